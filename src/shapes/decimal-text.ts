@@ -1,0 +1,39 @@
+import { z } from "zod";
+import { MONEY_WHOLE_DIGITS, UNIT_PRICE_PLACES } from "./limits.ts";
+
+const whole = `\\d{1,${MONEY_WHOLE_DIGITS}}`;
+
+/** Exact decimal text, not negative: `"0.062"`, at most 12 digits before and 6 after the point. */
+export const Amount = z
+  .string()
+  .regex(
+    new RegExp(`^${whole}(\\.\\d{1,${UNIT_PRICE_PLACES}})?$`),
+    "Write a number such as 0.062: digits with a point, not negative, at most 6 decimals.",
+  );
+
+/** A share or rate from 0 up to but not including 1, as decimal text: `"0.029"` is 2.9 %. */
+export const RateBelowOne = z
+  .string()
+  .regex(/^0(\.\d{1,6})?$/, "Write a rate from 0 up to, but not including, 100 %.");
+
+/** A share from 0 to 1 inclusive. */
+export const Share = z.string().regex(/^(0(\.\d{1,6})?|1(\.0{1,6})?)$/, "Write a share from 0 to 100 %.");
+
+/** A rate that may exceed 1, such as an import duty or a spare rate. */
+export const Rate = z
+  .string()
+  .regex(/^\d{1,3}(\.\d{1,6})?$/, "Write a rate such as 0.05 for 5 %: not negative, at most 6 decimals.");
+
+/** A conversion rate: reporting units per one foreign unit; more than nothing. */
+export const ConversionRate = z
+  .string()
+  .regex(/^\d{1,9}(\.\d{1,10})?$/)
+  .refine((text) => /[1-9]/.test(text), "A conversion rate is more than 0.");
+
+/** Three letters of ISO 4217. */
+export const CurrencyCode = z
+  .string()
+  .regex(/^[A-Z]{3}$/, "Write the three letters of the currency, such as EUR.");
+
+/** A calendar day, ISO 8601: `"2026-03-09"`. */
+export const Day = z.iso.date();

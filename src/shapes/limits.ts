@@ -1,0 +1,72 @@
+/** Closed lists and limits, each stated once: Zod shapes, table CHECKs, input lengths and tests read them here. */
+
+export const ROLES = ["owner", "designer", "seller", "co-builder"] as const;
+export type Role = (typeof ROLES)[number];
+
+/** Part classes; the properties that matter per class follow with the substitution rules. */
+export const PART_CLASSES = [
+  "resistor",
+  "capacitor",
+  "inductor",
+  "led",
+  "diode",
+  "transistor",
+  "integrated-circuit",
+  "crystal",
+  "switch",
+  "connector",
+  "potentiometer",
+  "battery-holder",
+  "mechanical",
+  "board",
+  "other",
+] as const;
+export type PartClass = (typeof PART_CLASSES)[number];
+
+/** How a line of the list counts: bought for every kit, chosen per edition, brought by the builder, or left off. */
+export const LINE_MARKS = ["in-kit", "option", "builders-own", "do-not-place"] as const;
+export type LineMark = (typeof LINE_MARKS)[number];
+
+/** COSTING 3: whole order at the break reached, each slice at its own price, or fixed lots at a total price. */
+export const PRICE_MODELS = ["whole-order", "by-slice", "lots"] as const;
+export type PriceModel = (typeof PRICE_MODELS)[number];
+
+export const FREIGHT_MODELS = ["none", "flat"] as const;
+export type FreightModel = (typeof FREIGHT_MODELS)[number];
+
+/** What a supplier does below its minimum order value. */
+export const SMALL_ORDER_TERMS = ["none", "fee", "refused"] as const;
+export type SmallOrderTerm = (typeof SMALL_ORDER_TERMS)[number];
+
+export const IMPORT_KINDS = ["parts-list", "price-list"] as const;
+export type ImportKind = (typeof IMPORT_KINDS)[number];
+
+/** Decimal text limits: digits before and after the point. */
+export const MONEY_WHOLE_DIGITS = 12;
+export const UNIT_PRICE_PLACES = 6;
+
+export const RUN_LEAST = 1;
+export const RUN_MOST = 1000;
+/** The ruler of the tally strip runs between these; a run outside them can be typed. */
+export const RULER_LEAST = 10;
+export const RULER_MOST = 500;
+
+export const PARTS_MOST = 2000;
+export const OFFERS_PER_PART_MOST = 40;
+export const BREAKS_PER_OFFER_MOST = 24;
+export const EDITIONS_MOST = 8;
+export const SUPPLIERS_MOST = 200;
+export const QUANTITY_MOST = 1_000_000_000;
+export const QUANTITY_PER_KIT_MOST = 10_000;
+
+export const NAME_LENGTH = 120;
+export const TEXT_LENGTH = 2000;
+export const EMAIL_LENGTH = 254;
+export const PASSWORD_LEAST = 12;
+export const PASSWORD_MOST = 256;
+
+export const UPLOAD_BYTES = 5 * 1024 * 1024;
+export const UPLOAD_ROWS = 20_000;
+export const UPLOAD_COLUMNS = 200;
+export const JSON_BYTES = 256 * 1024;
+export const PLAN_BYTES = 8 * 1024 * 1024;

@@ -1,0 +1,182 @@
+import { z } from "zod";
+import { Amount, ConversionRate, CurrencyCode, Day, Rate, RateBelowOne, Share } from "./decimal-text.ts";
+import * as limits from "./limits.ts";
+
+/**
+ * Everything the reckoning needs for one kit, and nothing else: the input of the costing core, of
+ * `POST /api/costing`, and the file a run page gives away. Amounts are decimal text; `null` means
+ * "not known", which is never the same as zero. Section numbers are those of the method pages.
+ */
+
+const Id = z.string().min(1).max(64);
+const Name = z.string().min(1).max(limits.NAME_LENGTH);
+const Count = z.int().min(0).max(limits.QUANTITY_MOST);
+const Minutes = Amount;
+
+/** One rung of a price ladder. `price` is per piece for whole-order and by-slice, per lot for lots. */
+export const PriceBreak = z.strictObject({ quantity: Count.min(1), price: Amount });
+export type PriceBreak = z.infer<typeof PriceBreak>;
+
+/** One supplier's price for one part (section 3). `breaks: []` is an offer whose price is not known yet. */
+export const PlanOffer = z.strictObject({
+  id: Id,
+  supplier: Id,
+  orderCode: z.string().max(limits.NAME_LENGTH),
+  currency: CurrencyCode,
+  priceModel: z.enum(limits.PRICE_MODELS),
+  breaks: z.array(PriceBreak).max(limits.BREAKS_PER_OFFER_MOST),
+  minimumOrder: Count.min(1),
+  orderMultiple: Count.min(1),
+  stockShown: Count.nullable(),
+  leadTimeDays: z.int().min(0).max(3650).nullable(),
+  pricedOn: Day.nullable(),
+  validUntil: Day.nullable(),
+});
+export type PlanOffer = z.infer<typeof PlanOffer>;
+
+export const PlanPart = z.strictObject({
+  id: Id,
+  name: Name,
+  /** Reference designators and list line, for naming the part in workings; may be empty. */
+  designators: z.string().max(limits.TEXT_LENGTH),
+  quantities: z.array(z.strictObject({ edition: Id, perKit: Count.max(limits.QUANTITY_PER_KIT_MOST) })),
+  spareRate: Rate,
+  leastSpare: Count,
+  /** What lies on the shelf and is not promised elsewhere; `bookCost` per piece in reporting currency. */
+  freeStock: z.strictObject({ quantity: Count, bookCost: Amount.nullable() }),
+  /** Share of the value of what is left over that keeps (section 8). */
+  keepShare: Share,
+  onlyFromStock: z.boolean(),
+  pinnedOffer: Id.nullable(),
+  offers: z.array(PlanOffer).max(limits.OFFERS_PER_PART_MOST),
+});
+export type PlanPart = z.infer<typeof PlanPart>;
+
+/** A supplier's terms (section 4), in its own currency. */
+export const PlanSupplier = z.strictObject({
+  id: Id,
+  name: Name,
+  currency: CurrencyCode,
+  freight: z.discriminatedUnion("model", [
+    z.strictObject({ model: z.literal("none") }),
+    z.strictObject({ model: z.literal("flat"), amount: Amount }),
+    z.strictObject({ model: z.literal("not-known") }),
+  ]),
+  freeFreightFrom: Amount.nullable(),
+  handlingFee: Amount,
+  minimumOrderValue: Amount.nullable(),
+  belowMinimum: z.discriminatedUnion("term", [
+    z.strictObject({ term: z.literal("none") }),
+    z.strictObject({ term: z.literal("fee"), fee: Amount }),
+    z.strictObject({ term: z.literal("refused") }),
+  ]),
+  leadTimeDays: z.int().min(0).max(3650).nullable(),
+});
+export type PlanSupplier = z.infer<typeof PlanSupplier>;
+
+/** A board house's quote (section 6). Lots may be combined; breaks are per board at the break reached. */
+export const PlanBoardQuote = z.strictObject({
+  id: Id,
+  boardHouse: Name,
+  currency: CurrencyCode,
+  priceModel: z.enum(["lots", "whole-order"]),
+  breaks: z.array(PriceBreak).max(limits.BREAKS_PER_OFFER_MOST),
+  engineeringCharge: Amount,
+  stencilCharge: Amount,
+  freight: Amount.nullable(),
+  leadTimeDays: z.int().min(0).max(3650).nullable(),
+  pricedOn: Day.nullable(),
+  validUntil: Day.nullable(),
+});
+export type PlanBoardQuote = z.infer<typeof PlanBoardQuote>;
+
+export const PlanEdition = z.strictObject({
+  id: Id,
+  name: Name,
+  /** Share of the run, as a weight; the run is split by largest remainder, ties to the earlier edition. */
+  weight: z.int().min(0).max(1_000_000),
+  boardsPerKit: z.int().min(0).max(100),
+  /** What the buyer pays, tax included; `null` while not decided. */
+  price: Amount.nullable(),
+});
+export type PlanEdition = z.infer<typeof PlanEdition>;
+
+export const PlanTask = z.strictObject({
+  id: Id,
+  name: Name,
+  /** `null`: every edition. */
+  editions: z.array(Id).nullable(),
+  minutesPerKit: Minutes,
+  setUpMinutes: Minutes,
+});
+export type PlanTask = z.infer<typeof PlanTask>;
+
+export const PlanCharge = z.strictObject({
+  id: Id,
+  name: Name,
+  amount: Amount,
+  /** Spread over so many kits in all, of which this run bears its share; `null`: this run bears it all. */
+  spreadOver: Count.min(1).nullable(),
+});
+export type PlanCharge = z.infer<typeof PlanCharge>;
+
+export const PlanPacking = z.strictObject({
+  id: Id,
+  name: Name,
+  editions: z.array(Id).nullable(),
+  costPerKit: Amount.nullable(),
+});
+export type PlanPacking = z.infer<typeof PlanPacking>;
+
+/** One fee and tax rule for every sale (section 10). */
+export const PlanSale = z.strictObject({
+  taxRate: Rate,
+  feeRate: RateBelowOne,
+  feeFixed: Amount,
+  postageCharged: Amount,
+  postagePaid: Amount.nullable(),
+});
+export type PlanSale = z.infer<typeof PlanSale>;
+
+export const Plan = z.strictObject({
+  format: z.literal("tinpenny-plan/1"),
+  kit: Name,
+  /** Revision letter and the newest price date, for the foot of a working; may be empty. */
+  revision: z.string().max(20),
+  currency: CurrencyCode,
+  rates: z
+    .array(z.strictObject({ currency: CurrencyCode, perForeignUnit: ConversionRate, dated: Day }))
+    .max(200),
+  /** The day on which offers must be valid, so that the same plan always gives the same figures. */
+  asOf: Day,
+  run: z.strictObject({
+    kits: z.int().min(limits.RUN_LEAST).max(limits.RUN_MOST),
+    sweepTo: z.int().min(limits.RUN_LEAST).max(limits.RUN_MOST),
+  }),
+  editions: z.array(PlanEdition).min(1).max(limits.EDITIONS_MOST),
+  parts: z.array(PlanPart).max(limits.PARTS_MOST),
+  suppliers: z.array(PlanSupplier).max(limits.SUPPLIERS_MOST),
+  shutOutSuppliers: z.array(Id).max(limits.SUPPLIERS_MOST),
+  boards: z.strictObject({
+    /** False for a kit without a board of its own. */
+    needed: z.boolean(),
+    yield: Share,
+    confidence: RateBelowOne,
+    quotes: z.array(PlanBoardQuote).max(50),
+    /** `null`: the cheapest at this run size. */
+    chosenQuote: Id.nullable(),
+  }),
+  work: z.strictObject({
+    /** `null`: not decided; "0" counts the hours at nothing. */
+    ratePerHour: Amount.nullable(),
+    /** Crawford's unit curve: time of a doubled unit as a share of the single's; "1" for no learning. */
+    learningSlope: Share,
+    kitsMadeBefore: Count,
+    tasks: z.array(PlanTask).max(100),
+  }),
+  packing: z.array(PlanPacking).max(100),
+  charges: z.array(PlanCharge).max(100),
+  replacements: z.strictObject({ share: Share, costEach: Amount.nullable() }),
+  sale: PlanSale,
+});
+export type Plan = z.infer<typeof Plan>;
