@@ -128,12 +128,12 @@ export const PlanPacking = z.strictObject({
 });
 export type PlanPacking = z.infer<typeof PlanPacking>;
 
-/** One fee and tax rule for every sale (section 10). */
+/** One fee and tax rule for every sale (section 10); what is `null` leaves the takings not known. */
 export const PlanSale = z.strictObject({
-  taxRate: Rate,
-  feeRate: RateBelowOne,
-  feeFixed: Amount,
-  postageCharged: Amount,
+  taxRate: Rate.nullable(),
+  feeRate: RateBelowOne.nullable(),
+  feeFixed: Amount.nullable(),
+  postageCharged: Amount.nullable(),
   postagePaid: Amount.nullable(),
 });
 export type PlanSale = z.infer<typeof PlanSale>;
