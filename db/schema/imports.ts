@@ -1,0 +1,61 @@
+import { index, integer, primaryKey, sqliteTable, text } from "drizzle-orm/sqlite-core";
+import { id, moment, oneOf, version, wholeNumber } from "#db/columns.ts";
+import { IMPORT_KINDS, IMPORT_STATES } from "#src/shapes/limits.ts";
+import { kits } from "./kits.ts";
+import { workshops } from "./workshops.ts";
+
+/** A list being read: a draft until it is taken, kept afterwards so that it can be taken back. */
+export const imports = sqliteTable(
+  "imports",
+  {
+    id: id("id").primaryKey(),
+    workshopId: id("workshop_id")
+      .notNull()
+      .references(() => workshops.id, { onDelete: "cascade" }),
+    /** Null for a price list, which belongs to the workshop. */
+    kitId: id("kit_id").references(() => kits.id, { onDelete: "cascade" }),
+    kind: text("kind", { enum: IMPORT_KINDS }).notNull(),
+    state: text("state", { enum: IMPORT_STATES }).notNull(),
+    fileName: text("file_name").notNull(),
+    byteLength: integer("byte_length").notNull(),
+    /** Name of the text encoding it was read in. */
+    encoding: text("encoding").notNull(),
+    /** SHA-256 of the bytes: the same file twice is recognised. */
+    contentHash: text("content_hash").notNull(),
+    /** The decoded text itself. */
+    content: text("content").notNull(),
+    /** Supplier of a price list. */
+    supplierId: id("supplier_id"),
+    /** The person's own choices: column meanings, and answers by row and question, as JSON. */
+    mapping: text("mapping", { mode: "json" }).$type<unknown>(),
+    answers: text("answers", { mode: "json" }).notNull().$type<unknown>(),
+    createdBy: id("created_by"),
+    createdAt: moment("created_at").notNull(),
+    takenAt: moment("taken_at"),
+    /** What stood before it was taken, for taking it back. */
+    before: text("before", { mode: "json" }).$type<unknown>(),
+    version: version(),
+  },
+  (t) => [
+    index("imports_workshop").on(t.workshopId, t.createdAt),
+    index("imports_kit").on(t.kitId, t.createdAt),
+    oneOf(t.kind, IMPORT_KINDS),
+    oneOf(t.state, IMPORT_STATES),
+    wholeNumber(t.byteLength),
+  ],
+);
+
+/** What the columns of a heading meant the last time, by the heading's fingerprint. */
+export const columnMemories = sqliteTable(
+  "column_memories",
+  {
+    workshopId: id("workshop_id")
+      .notNull()
+      .references(() => workshops.id, { onDelete: "cascade" }),
+    kind: text("kind", { enum: IMPORT_KINDS }).notNull(),
+    fingerprint: text("fingerprint").notNull(),
+    mapping: text("mapping", { mode: "json" }).notNull().$type<unknown>(),
+    usedAt: moment("used_at").notNull(),
+  },
+  (t) => [primaryKey({ columns: [t.workshopId, t.kind, t.fingerprint] }), oneOf(t.kind, IMPORT_KINDS)],
+);

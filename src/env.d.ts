@@ -1,0 +1,15 @@
+/// <reference types="astro/client" />
+
+declare namespace App {
+  interface Locals {
+    /** Who is signed in, on pages; `null` on pages for anyone. Routes under /api find out for themselves. */
+    user: import("#src/server/store/session.ts").UserRow | null;
+    session: import("#src/server/store/session.ts").SessionRow | null;
+    /** The place of a page under /workshops/[workshop]; `kit` only below /kits/[kit]. */
+    workshop: import("#src/server/store/membership.ts").WorkshopRow;
+    role: import("#src/shapes/limits.ts").Role;
+    kit: import("#src/server/store/kit.ts").KitRow;
+    /** For style elements that a library adds in the browser. */
+    styleNonce: string;
+  }
+}

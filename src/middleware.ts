@@ -1,0 +1,61 @@
+import { randomBytes } from "node:crypto";
+import type { APIContext } from "astro";
+import { defineMiddleware } from "astro:middleware";
+import { now } from "./server/clock.ts";
+import { serverDb } from "./server/db.ts";
+import { Problem, problemReply } from "./server/problem.ts";
+import { placeOf } from "./server/route.ts";
+import { addSecurityHeaders, contentSecurityPolicy } from "./server/security-headers.ts";
+import { sessionOf } from "./server/session.ts";
+
+/** Sends somebody who is not signed in to the sign-in page, and back here afterwards. */
+function toSignIn(context: APIContext): Response {
+  const back = context.url.pathname + context.url.search;
+  return context.redirect(`/sign-in?back=${encodeURIComponent(back)}`, 303);
+}
+
+/** Finds out, for a page, who asks and where; a page below a workshop exists only for its people. */
+function enter(context: APIContext): Response | undefined {
+  const { locals, request, params } = context;
+  const db = serverDb();
+  const { session, user } = sessionOf(db, request, now());
+  locals.session = session?.complete ? session : null;
+  locals.user = session?.complete ? user : null;
+  if (params.workshop === undefined) return undefined;
+  if (!locals.user) return toSignIn(context);
+  const place = placeOf(db, locals.user, params.workshop, params.kit);
+  Object.assign(locals, place);
+  return undefined;
+}
+
+async function page(context: APIContext, next: () => Promise<Response>): Promise<Response> {
+  try {
+    return enter(context) ?? (await next());
+  } catch (error) {
+    if (!(error instanceof Problem) || error.body().status !== 404) throw error;
+    const missing = await context.rewrite("/404");
+    return new Response(missing.body, { status: 404, headers: missing.headers });
+  }
+}
+
+async function api(next: () => Promise<Response>): Promise<Response> {
+  try {
+    return await next();
+  } catch (error) {
+    console.error(error);
+    return problemReply(new Problem("our-mistake"));
+  }
+}
+
+export const onRequest = defineMiddleware(async (context, next) => {
+  context.locals.styleNonce = randomBytes(16).toString("base64");
+  const response = context.url.pathname.startsWith("/api/") ? await api(next) : await page(context, next);
+  const policy = response.headers.get("content-security-policy");
+  if (policy)
+    response.headers.set(
+      "content-security-policy",
+      contentSecurityPolicy(policy, context.locals.styleNonce),
+    );
+  addSecurityHeaders(response.headers);
+  return response;
+});

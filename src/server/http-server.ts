@@ -1,0 +1,43 @@
+import { createServer, type IncomingMessage, type RequestListener, type Server, type ServerResponse } from "node:http";
+import compression from "compression";
+import type { Config } from "./config.ts";
+
+/** No reply needs a request larger than this; each route has its own, smaller limit and counts as it reads. */
+const MOST_BYTES = 16 * 1024 * 1024;
+const HEADER_TIME = 15_000;
+const REQUEST_TIME = 120_000;
+
+/**
+ * Makes what Astro believes about the address true: it trusts Host and X-Forwarded-*, so they are set from
+ * the configured origin, and a stranger's X-Forwarded-For is dropped unless a proxy of ours is trusted.
+ */
+export function settleAddress(request: IncomingMessage, config: Pick<Config, "origin" | "trustProxy">): void {
+  const origin = new URL(config.origin);
+  request.headers.host = origin.host;
+  request.headers["x-forwarded-host"] = origin.host;
+  request.headers["x-forwarded-proto"] = origin.protocol.slice(0, -1);
+  delete request.headers["x-forwarded-port"];
+  if (!config.trustProxy) delete request.headers["x-forwarded-for"];
+}
+
+function tooLarge(request: IncomingMessage, response: ServerResponse): boolean {
+  if (Number(request.headers["content-length"] ?? 0) <= MOST_BYTES) return false;
+  response.writeHead(413, { "content-type": "application/problem+json", connection: "close" });
+  response.end(
+    JSON.stringify({ type: "about:blank", status: 413, title: "This is larger than the server takes." }),
+  );
+  return true;
+}
+
+/** The HTTP server in front of Astro's handler: address settled, size capped, replies compressed. */
+export function httpServer(handler: RequestListener, config: Pick<Config, "origin" | "trustProxy">): Server {
+  const compress = compression();
+  const server = createServer((request, response) => {
+    settleAddress(request, config);
+    if (tooLarge(request, response)) return;
+    compress(request as never, response as never, () => handler(request, response));
+  });
+  server.headersTimeout = HEADER_TIME;
+  server.requestTimeout = REQUEST_TIME;
+  return server;
+}

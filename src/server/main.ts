@@ -1,0 +1,32 @@
+import { mkdirSync } from "node:fs";
+import type { RequestListener } from "node:http";
+import { migrateDb, openDb } from "#db/client.ts";
+import { config, listensOnLoopback } from "./config.ts";
+import { databasePath } from "./db.ts";
+import { httpServer } from "./http-server.ts";
+
+/** The production entry: settings, folder, migrations, demonstration, letters, then the server. */
+async function main(): Promise<void> {
+  const settings = config();
+  mkdirSync(settings.dataFolder, { recursive: true, mode: 0o700 });
+  const db = openDb(databasePath(settings.dataFolder));
+  migrateDb(db);
+  db.$client.close();
+
+  process.env.ASTRO_NODE_AUTOSTART = "disabled";
+  const entry = new URL("../../dist/server/entry.mjs", import.meta.url);
+  const { handler } = (await import(entry.href)) as { handler: RequestListener };
+  const server = httpServer(handler, settings);
+  server.listen(settings.port, settings.host, () => {
+    console.log(`Tinpenny is at ${settings.origin}`);
+    if (!settings.smtpUrl && !listensOnLoopback(settings.host))
+      console.log("No mail goes out: set TINPENNY_SMTP_URL.");
+  });
+  for (const signal of ["SIGINT", "SIGTERM"] as const)
+    process.on(signal, () => {
+      server.close(() => process.exit(0));
+      server.closeIdleConnections();
+    });
+}
+
+await main();
