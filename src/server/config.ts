@@ -100,6 +100,11 @@ export function config(): Config {
   return settings;
 }
 
+/** Puts other settings in their place; without an argument the environment's own again. For tests. */
+export function useConfig(other?: Config): void {
+  settings = other;
+}
+
 /** Whether the server can only be reached from this machine; the letters page exists only then. */
 export function listensOnLoopback(host: string): boolean {
   return host === "localhost" || host === "::1" || /^127(\.\d{1,3}){3}$/.test(host);

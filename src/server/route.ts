@@ -75,7 +75,7 @@ export interface Route<I = unknown, R = unknown> {
 /** What the browser sends to a route. */
 export type InputOf<T> = T extends Route<infer I, unknown> ? I : never;
 /** What a route sends back, as it arrives after JSON. */
-export type ReplyOf<T> = T extends Route<never, infer R> ? R : never;
+export type ReplyOf<T> = T extends Route<unknown, infer R> ? R : never;
 
 function checkOrigin(request: Request): void {
   if (request.method === "GET" || request.method === "HEAD") return;

@@ -31,8 +31,19 @@ export type LineMark = (typeof LINE_MARKS)[number];
 export const PRICE_MODELS = ["whole-order", "by-slice", "lots"] as const;
 export type PriceModel = (typeof PRICE_MODELS)[number];
 
-export const FREIGHT_MODELS = ["none", "flat"] as const;
-export type FreightModel = (typeof FREIGHT_MODELS)[number];
+/** How a board house prices: fixed lots at a total price, or per board at the break reached. */
+export const BOARD_PRICE_MODELS = ["lots", "whole-order"] as const;
+export type BoardPriceModel = (typeof BOARD_PRICE_MODELS)[number];
+
+export const BOARD_SHAPES = ["rectangle", "round"] as const;
+export type BoardShape = (typeof BOARD_SHAPES)[number];
+
+/** SI units a part's value may have. */
+export const VALUE_UNITS = ["ohm", "F", "H", "Hz", "V", "A", "m"] as const;
+export type ValueUnit = (typeof VALUE_UNITS)[number];
+
+export const FREIGHT_TERMS = ["none", "flat", "not-known"] as const;
+export type FreightTerm = (typeof FREIGHT_TERMS)[number];
 
 /** What a supplier does below its minimum order value. */
 export const SMALL_ORDER_TERMS = ["none", "fee", "refused"] as const;
@@ -40,6 +51,13 @@ export type SmallOrderTerm = (typeof SMALL_ORDER_TERMS)[number];
 
 export const IMPORT_KINDS = ["parts-list", "price-list"] as const;
 export type ImportKind = (typeof IMPORT_KINDS)[number];
+
+/** A draft can be left and come back to; a taken list can be taken back. */
+export const IMPORT_STATES = ["draft", "taken", "taken-back", "dropped"] as const;
+export type ImportState = (typeof IMPORT_STATES)[number];
+
+export const ONE_TIME_PURPOSES = ["confirm-email", "reset-password", "sign-in"] as const;
+export type OneTimePurpose = (typeof ONE_TIME_PURPOSES)[number];
 
 /** Decimal text limits: digits before and after the point. */
 export const MONEY_WHOLE_DIGITS = 12;
