@@ -1,0 +1,80 @@
+/**
+ * What the reckoning could not do, or did and wants known. A problem is data: a stable code, the
+ * things it is about, and numbers for a sentence. `problem-words.ts` turns codes into sentences.
+ */
+
+/** What is missing or impossible; figures that depend on it are not known. */
+export const NEED_CODES = [
+  "no-mix",
+  "unpriced-part",
+  "short-part",
+  "order-refused",
+  "no-rate",
+  "no-freight",
+  "no-board-quote",
+  "board-quote-too-small",
+  "no-board-freight",
+  "no-board-yield",
+  "no-packing-cost",
+  "no-hourly-rate",
+  "no-replacement-cost",
+  "no-stock-cost",
+  "no-price",
+  "no-postage-paid",
+  "no-work",
+  "not-within-sweep",
+  "amount-too-large",
+] as const;
+export type NeedCode = (typeof NEED_CODES)[number];
+
+/** Worth knowing, and no figure waits for it. */
+export const CAUTION_CODES = [
+  "offer-expired",
+  "offer-without-price",
+  "offer-other-currency",
+  "offer-stock-not-known",
+  "offer-impossible-ladder",
+  "offer-without-supplier",
+  "supplier-shut-out",
+  "pinned-offer-unusable",
+  "below-minimum-fee",
+  "quote-expired",
+  "quote-without-price",
+  "pinned-quote-unusable",
+] as const;
+export type CautionCode = (typeof CAUTION_CODES)[number];
+
+/** The thing a problem is about: ids of the plan; `currency` for a missing rate. */
+export interface Place {
+  part?: string;
+  offer?: string;
+  supplier?: string;
+  quote?: string;
+  edition?: string;
+  packing?: string;
+  currency?: string;
+}
+
+/** `by`: pieces short; `amount`, `currency`: money as exact text, such as what a minimum order still lacks. */
+export interface ProblemFacts {
+  by?: number;
+  amount?: string;
+  currency?: string;
+  day?: string;
+}
+
+export interface Problem {
+  code: NeedCode | CautionCode;
+  at: Place;
+  facts: ProblemFacts;
+}
+
+/** Why a figure is not known: one code, every place it holds, and the page whose field settles it. */
+export interface Need {
+  code: NeedCode;
+  at: Place[];
+  page: SourcePage;
+}
+
+/** Pages of a kit on which an input stands. */
+export type SourcePage = "parts" | "offers" | "boards" | "run" | "price";
