@@ -101,7 +101,7 @@ export function config(): Config {
 }
 
 /** Puts other settings in their place; without an argument the environment's own again. For tests. */
-export function useConfig(other?: Config): void {
+export function setConfig(other?: Config): void {
   settings = other;
 }
 

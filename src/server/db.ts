@@ -19,7 +19,7 @@ export function serverDb(): Db {
   return open;
 }
 
-/** Puts another database in its place, and gives back a way to undo that. For tests. */
-export function useDb(db: Db): void {
+/** Puts another database in its place, for tests. */
+export function setDb(db: Db): void {
   open = db;
 }
