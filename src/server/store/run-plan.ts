@@ -1,4 +1,4 @@
-import { asc, eq } from "drizzle-orm";
+import { and, asc, eq } from "drizzle-orm";
 import type { Db } from "#db/client.ts";
 import { charges, packingItems, runPlans, tasks } from "#db/schema/runs.ts";
 
@@ -12,6 +12,21 @@ export function runPlanOf(db: Db, kitId: string): RunPlanRow {
   const row = db.select().from(runPlans).where(eq(runPlans.kitId, kitId)).get();
   if (!row) throw new Error(`Kit ${kitId} has no run plan.`);
   return row;
+}
+
+/** Changes the plan if it still has this version; undefined where somebody changed it since. */
+export function changeRunPlan(
+  db: Db,
+  kitId: string,
+  version: number,
+  fields: Partial<RunPlanRow>,
+): RunPlanRow | undefined {
+  return db
+    .update(runPlans)
+    .set({ ...fields, version: version + 1 })
+    .where(and(eq(runPlans.kitId, kitId), eq(runPlans.version, version)))
+    .returning()
+    .get();
 }
 
 export function tasksOf(db: Db, kitId: string): TaskRow[] {

@@ -1,0 +1,19 @@
+import { and, eq } from "drizzle-orm";
+import type { Db } from "#db/client.ts";
+import { workshops } from "#db/schema/workshops.ts";
+import type { WorkshopRow } from "./membership.ts";
+
+/** Changes a workshop if it still has this version; undefined where somebody changed it since. */
+export function changeWorkshop(
+  db: Db,
+  id: string,
+  version: number,
+  fields: Partial<WorkshopRow>,
+): WorkshopRow | undefined {
+  return db
+    .update(workshops)
+    .set({ ...fields, version: version + 1 })
+    .where(and(eq(workshops.id, id), eq(workshops.version, version)))
+    .returning()
+    .get();
+}
