@@ -24,15 +24,21 @@ export const imports = sqliteTable(
     contentHash: text("content_hash").notNull(),
     /** The decoded text itself. */
     content: text("content").notNull(),
-    /** Supplier of a price list. */
+    /** Records of the text, blank ones too, for naming a list without reading it again. */
+    rowCount: integer("row_count").notNull(),
+    /** Whose the prices are where no column says: one of the workshop's suppliers, or the name of a new one. */
     supplierId: id("supplier_id"),
+    supplierName: text("supplier_name"),
     /** The person's own choices: column meanings, and answers by row and question, as JSON. */
     mapping: text("mapping", { mode: "json" }).$type<unknown>(),
     answers: text("answers", { mode: "json" }).notNull().$type<unknown>(),
     createdBy: id("created_by"),
     createdAt: moment("created_at").notNull(),
     takenAt: moment("taken_at"),
-    /** What stood before it was taken, for taking it back. */
+    takenBy: id("taken_by"),
+    /** What taking it did, in numbers, for the list of what was brought in. */
+    outcome: text("outcome", { mode: "json" }).$type<unknown>(),
+    /** What stood before it was taken, and what it left, for taking it back. */
     before: text("before", { mode: "json" }).$type<unknown>(),
     version: version(),
   },
@@ -42,6 +48,7 @@ export const imports = sqliteTable(
     oneOf(t.kind, IMPORT_KINDS),
     oneOf(t.state, IMPORT_STATES),
     wholeNumber(t.byteLength),
+    wholeNumber(t.rowCount),
   ],
 );
 
