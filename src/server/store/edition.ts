@@ -51,27 +51,3 @@ export function removeEdition(db: Db, kitId: string, editionId: string): void {
     .where(and(eq(editions.id, editionId), eq(editions.kitId, kitId)))
     .run();
 }
-
-/** An edition of this kit; an edition of another kit is not found. */
-export function editionOf(db: Db, kitId: string, id: string): EditionRow | undefined {
-  return db
-    .select()
-    .from(editions)
-    .where(and(eq(editions.id, id), eq(editions.kitId, kitId)))
-    .get();
-}
-
-/** Changes an edition if it still has this version; undefined where somebody changed it since. */
-export function changeEdition(
-  db: Db,
-  id: string,
-  version: number,
-  fields: Partial<EditionRow>,
-): EditionRow | undefined {
-  return db
-    .update(editions)
-    .set({ ...fields, version: version + 1 })
-    .where(and(eq(editions.id, id), eq(editions.version, version)))
-    .returning()
-    .get();
-}
