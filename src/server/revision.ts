@@ -1,0 +1,70 @@
+import type { Db } from "#db/client.ts";
+import { groupBy } from "#db/group-by.ts";
+import type { PartsSnapshot, SnapshotPart } from "#src/shapes/parts-snapshot.ts";
+import { revisionLetter } from "#src/shapes/revision-letter.ts";
+import { logActivity } from "./log-activity.ts";
+import { newId } from "./new-id.ts";
+import { editionsOf } from "./store/edition.ts";
+import { beginNextRevision, type KitRow } from "./store/kit.ts";
+import { lineQuantitiesOf, linesOf } from "./store/line.ts";
+import type { PartRow } from "./store/part.ts";
+import { addRevision, type RevisionRow } from "./store/revision.ts";
+
+function snapshotPart(part: PartRow): SnapshotPart {
+  const { workshopId, freeStock, stockCost, createdAt, version, ...read } = part;
+  return read;
+}
+
+/** A kit's parts list as it stands now, for keeping. */
+export function partsSnapshot(db: Db, kitId: string): PartsSnapshot {
+  const quantities = groupBy(lineQuantitiesOf(db, kitId), (row) => row.lineId);
+  return {
+    editions: editionsOf(db, kitId).map(({ id, name }) => ({ id, name })),
+    lines: linesOf(db, kitId).map(({ line, part }) => ({
+      id: line.id,
+      position: line.position,
+      designators: line.designators,
+      mark: line.mark,
+      note: line.note,
+      part: snapshotPart(part),
+      quantities: (quantities.get(line.id) ?? []).map(({ editionId, perKit }) => ({
+        edition: editionId,
+        perKit,
+      })),
+    })),
+  };
+}
+
+/**
+ * Ends the current revision of a kit's parts list: keeps the list as it stands and counts the revision up.
+ * Call it inside a transaction, before the change that begins the next revision. Returns what was kept
+ * and the kit as it then stands.
+ */
+export function endRevision(
+  db: Db,
+  kit: KitRow,
+  userId: string,
+  now: number,
+): { ended: RevisionRow; kit: KitRow } {
+  const ended: RevisionRow = {
+    id: newId(),
+    workshopId: kit.workshopId,
+    kitId: kit.id,
+    number: kit.revision,
+    endedAt: now,
+    endedBy: userId,
+    snapshot: partsSnapshot(db, kit.id),
+  };
+  addRevision(db, ended);
+  logActivity(db, {
+    workshopId: kit.workshopId,
+    kitId: kit.id,
+    userId,
+    at: now,
+    action: "revision.end",
+    subjectId: ended.id,
+    subjectName: kit.name,
+    detail: { revision: revisionLetter(kit.revision) },
+  });
+  return { ended, kit: beginNextRevision(db, kit.id) };
+}
