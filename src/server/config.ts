@@ -109,3 +109,17 @@ export function setConfig(other?: Config): void {
 export function listensOnLoopback(host: string): boolean {
   return host === "localhost" || host === "::1" || /^127(\.\d{1,3}){3}$/.test(host);
 }
+
+/**
+ * Whether letters are kept on this machine and shown on a page: no mail server is configured, and nobody
+ * but this machine can reach the page. A loopback server behind a public address does not count.
+ */
+export function lettersStayHere(settings: Config): boolean {
+  const { hostname } = new URL(settings.origin);
+  return (
+    settings.smtpUrl === null &&
+    !settings.trustProxy &&
+    listensOnLoopback(settings.host) &&
+    listensOnLoopback(hostname.replace(/^\[|\]$/g, ""))
+  );
+}

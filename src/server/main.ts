@@ -1,8 +1,9 @@
 import { mkdirSync } from "node:fs";
 import type { RequestListener } from "node:http";
 import { migrateDb, openDb } from "#db/client.ts";
-import { config, listensOnLoopback } from "./config.ts";
+import { config, lettersStayHere } from "./config.ts";
 import { databasePath } from "./db.ts";
+import { startLetterBox } from "./fakes/letter-box.ts";
 import { httpServer } from "./http-server.ts";
 
 /** The production entry: settings, folder, migrations, demonstration, letters, then the server. */
@@ -12,6 +13,7 @@ async function main(): Promise<void> {
   const db = openDb(databasePath(settings.dataFolder));
   migrateDb(db);
   db.$client.close();
+  if (lettersStayHere(settings)) await startLetterBox(settings.lettersPort, settings.dataFolder);
 
   process.env.ASTRO_NODE_AUTOSTART = "disabled";
   const entry = new URL("../../dist/server/entry.mjs", import.meta.url);
@@ -19,8 +21,8 @@ async function main(): Promise<void> {
   const server = httpServer(handler, settings);
   server.listen(settings.port, settings.host, () => {
     console.log(`Tinpenny is at ${settings.origin}`);
-    if (!settings.smtpUrl && !listensOnLoopback(settings.host))
-      console.log("No mail goes out: set TINPENNY_SMTP_URL.");
+    if (lettersStayHere(settings)) console.log(`Letters stay here: ${settings.origin}/letters`);
+    else if (!settings.smtpUrl) console.log("No mail goes out: set TINPENNY_SMTP_URL.");
   });
   for (const signal of ["SIGINT", "SIGTERM"] as const)
     process.on(signal, () => {

@@ -55,6 +55,91 @@ export const SENTENCES = {
     title: "Too many attempts.",
     detail: "Wait {wait}, then try again.",
   },
+  "wrong-credentials": {
+    status: 401,
+    title: "The email address and the password do not go together.",
+    detail: "Try again, or have a link sent to you by email.",
+  },
+  "sign-in-again": {
+    status: 403,
+    title: "This needs a fresh sign-in.",
+    detail: "Sign out, sign in again, and do it within a quarter of an hour.",
+  },
+  "not-for-scripts": {
+    status: 403,
+    title: "An access token cannot do this.",
+    detail: "Sign in with a browser and do it there.",
+  },
+  "link-not-valid": {
+    status: 410,
+    title: "This link does not work any more.",
+    detail: "A link works once and for a limited time. Ask for a new one.",
+  },
+  "already-set-up": {
+    status: 409,
+    title: "Tinpenny is set up already.",
+    detail: "Sign in, or ask the owner of your workshop for an invitation.",
+  },
+  "account-exists": {
+    status: 409,
+    title: "There is an account with this address.",
+    detail: "Sign in with it first, then take the invitation.",
+  },
+  "second-factor-on": {
+    status: 409,
+    title: "The second factor is on already.",
+    detail: "Turn it off first if you have another authenticator.",
+  },
+  "second-factor-off": {
+    status: 409,
+    title: "No authenticator is being set up.",
+    detail: "Begin again from your account page.",
+  },
+  "last-owner": {
+    status: 409,
+    title: "{name} is the only owner of this workshop.",
+    detail: "Make somebody else an owner first.",
+  },
+  "already-in-workshop": {
+    status: 409,
+    title: "{name} is in this workshop already.",
+    detail: "Change the role in the list of people.",
+  },
+  "currency-fixed": {
+    status: 409,
+    title: "The currency stays {currency} while the workshop has kits.",
+    detail: "Prices are written down in it. Make a new workshop for another currency.",
+  },
+  "mail-not-set-up": {
+    status: 503,
+    title: "This server sends no mail.",
+    detail: "The person who runs it has to name a mail server in TINPENNY_SMTP_URL.",
+  },
+  "mail-not-sent": {
+    status: 503,
+    title: "The letter could not be sent.",
+    detail: "The mail server did not take it. Try again in a few minutes.",
+  },
+  "identity-failed": {
+    status: 401,
+    title: "Signing in with {provider} did not work.",
+    detail: "Begin again. If it comes back, sign in with your password or a link.",
+  },
+  "identity-unreachable": {
+    status: 502,
+    title: "{provider} does not answer.",
+    detail: "Try again later, or sign in with your password or a link.",
+  },
+  "identity-not-known": {
+    status: 403,
+    title: "Nobody here signs in with that {provider} account.",
+    detail: "Sign in another way and connect it on your account page, or ask for an invitation.",
+  },
+  "identity-taken": {
+    status: 409,
+    title: "That {provider} account belongs to somebody else here.",
+    detail: "Sign in with it to see whose it is.",
+  },
   "our-mistake": {
     status: 500,
     title: "Tinpenny made a mistake here.",
