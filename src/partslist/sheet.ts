@@ -7,6 +7,7 @@ export const DELIMITERS = [
   "tab-runs",
   "fixed-width",
   "drawn-table",
+  "first-word",
   "one-column",
 ] as const;
 export type Delimiter = (typeof DELIMITERS)[number];

@@ -1,0 +1,193 @@
+/** Letters, digits, perhaps a letter: R1, LED12, U3A. What a board drawing prints beside a part. */
+const NUMBERED = /^([A-Za-zА-Яа-я][A-Za-zА-Яа-я_]{0,9}?)_?(\d{1,5})([A-Za-z]?)$/;
+/** A name used as a designator: BOOT, R_BB, IC2_PINS_1_12, LDO3V3, Rk. */
+const NAME = /^(?=.*[A-Za-z])[A-Za-z0-9_+\-*./#]{1,24}$/;
+/** An everyday word, which is no designator: Cables, Resistors, LEDs. */
+const WORD = /^(?:[A-Z]?[a-z]{3,}|[A-Z]{2,}s)$/;
+const CONJUNCTION = /^(?:and|und|et|y|e|i|och|en|&|\+)$/i;
+/** Guards against "R1-R99999". */
+const RANGE_MOST = 2000;
+
+export interface ReadDesignators {
+  designators: string[];
+  /** Pieces of the cell that could not be read as designators, as written. */
+  unclear: string[];
+  /** How many are numbered (R1), as against names (BOOT). */
+  numbered: number;
+}
+
+const NOTHING: ReadDesignators = { designators: [], unclear: [], numbered: 0 };
+
+function normalise(text: string): string {
+  return text
+    .replace(/[\u00a0\u2002-\u200a\u202f\u3000]/g, " ")
+    .replace(/[‐‑‒–—―−~～÷]/g, "-")
+    .replace(/…|\.{2,}/g, "-")
+    .replace(/[，、；]/g, ",")
+    .replace(/(\d)\s+(?:to|thru|through|bis|à|hasta|till|t\/m|до|až)\s+(?=[A-Za-z]{0,5}\d)/gi, "$1-")
+    .replace(/(\d)\s+(?:and|und|et|y|e|i|och|en)\s+(?=[A-Za-z]{0,5}\d)/gi, "$1,")
+    .replace(/(\d[A-Za-z]?)\s*-+\s*(?=[A-Za-z]{0,7}\d)/g, "$1-");
+}
+
+/** "R1-R4", "R1-4", "R1A-R1D" as their members; `null` for a name that only looks like a range. */
+function expandRange(token: string): string[] | null {
+  const dash = token.indexOf("-");
+  if (dash < 1 || dash !== token.lastIndexOf("-")) return null;
+  const from = NUMBERED.exec(token.slice(0, dash));
+  if (!from) return null;
+  const [, prefix = "", firstText = "", suffix = ""] = from;
+  const end = token.slice(dash + 1);
+  const to = /^\d{1,5}$/.test(end) ? ["", prefix, end, ""] : NUMBERED.exec(end);
+  if (!to || to[1]?.toUpperCase() !== prefix.toUpperCase()) return null;
+  const stem = token.slice(0, token.lastIndexOf(firstText, dash));
+  return suffix === "" && to[3] === ""
+    ? numbersBetween(stem, firstText, to[2] ?? "")
+    : lettersBetween(stem, firstText, suffix, to[2] ?? "", to[3] ?? "");
+}
+
+function numbersBetween(stem: string, firstText: string, lastText: string): string[] | null {
+  const first = Number(firstText);
+  const last = Number(lastText);
+  if (last <= first || last - first > RANGE_MOST) return null;
+  const width = firstText.startsWith("0") ? firstText.length : 0;
+  return Array.from({ length: last - first + 1 }, (_, i) => stem + String(first + i).padStart(width, "0"));
+}
+
+function lettersBetween(
+  stem: string,
+  number: string,
+  first: string,
+  lastNumber: string,
+  last: string,
+): string[] | null {
+  if (number !== lastNumber || first === "" || last === "" || last <= first) return null;
+  const start = first.charCodeAt(0);
+  return Array.from(
+    { length: last.charCodeAt(0) - start + 1 },
+    (_, i) => stem + number + String.fromCharCode(start + i),
+  );
+}
+
+/** Joins "C  2" to C2 and splits at commas, semicolons, blanks, slashes between designators. */
+function tokens(text: string): string[] {
+  return text
+    .replace(/(^|[\s,;])([A-Za-z]{1,4})\s+(?=\d{1,4}(?:$|[\s,;]))/g, "$1$2")
+    .replace(/([A-Za-z]\d+[A-Za-z]?)\s*[/&|]\s*(?=[A-Za-z]{1,5}\d)/g, "$1,")
+    .split(/[\s,;]+/)
+    .filter((token) => token !== "");
+}
+
+interface Reader {
+  read: ReadDesignators;
+  /** Letters of the last numbered designator, carried over "C1,3,6". */
+  prefix: string;
+}
+
+function take(reader: Reader, names: string[], numbered: boolean): void {
+  for (const name of names) reader.read.designators.push(name);
+  if (numbered) reader.read.numbered += names.length;
+}
+
+function readToken(reader: Reader, raw: string): void {
+  const token = raw.replace(/^["'([{]+|[\])}"'.:]+$/g, "");
+  const plain = /^[A-Za-z_]+\d+[A-Za-z]?\*$/.test(token) ? token.slice(0, -1) : token;
+  const numbered = NUMBERED.exec(plain);
+  if (numbered) {
+    reader.prefix = plain.slice(0, plain.length - (numbered[2] ?? "").length - (numbered[3] ?? "").length);
+    return take(reader, [plain], true);
+  }
+  const range = expandRange(plain);
+  if (range) {
+    reader.prefix = /^\D+/.exec(plain)?.[0] ?? "";
+    return take(reader, range, true);
+  }
+  if (reader.prefix !== "" && /^\d{1,5}[A-Za-z]?$/.test(plain))
+    return take(reader, [reader.prefix + plain], true);
+  if (reader.prefix !== "" && /^\d{1,5}-\d{1,5}$/.test(plain)) {
+    const carried = expandRange(reader.prefix + plain);
+    if (carried) return take(reader, carried, true);
+  }
+  if (reader.prefix !== "" && /^[a-z]{2,5}$/.test(plain) && !CONJUNCTION.test(plain)) {
+    reader.read.unclear.push(raw);
+    return take(reader, [reader.prefix + plain], false);
+  }
+  if (CONJUNCTION.test(plain)) return;
+  if (NAME.test(plain) && !WORD.test(plain)) return take(reader, [plain], false);
+  if (/[\p{L}\d]/u.test(token)) reader.read.unclear.push(raw);
+}
+
+/**
+ * The designators of one cell, expanded in the order written: `"R1-R3, R7"` is R1, R2, R3, R7;
+ * `"C1,3,6"` is C1, C3, C6. A range must rise and keep its letters: `"U1-1"` is a name.
+ * Words (`"Cables"`) are handed back as unclear.
+ */
+export function readDesignators(cell: string): ReadDesignators {
+  const trimmed = cell.trim();
+  if (trimmed === "") return NOTHING;
+  if (NUMBERED.test(trimmed)) return { designators: [trimmed], unclear: [], numbered: 1 };
+  const reader: Reader = { read: { designators: [], unclear: [], numbered: 0 }, prefix: "" };
+  const aside = /^[^(]*\d[^(]*(\(.*\))$/s.exec(trimmed)?.[1] ?? "";
+  if (aside !== "") reader.read.unclear.push(aside);
+  for (const token of tokens(normalise(trimmed.slice(0, trimmed.length - aside.length))))
+    readToken(reader, token);
+  return reader.read;
+}
+
+/** True where the whole cell reads as numbered designators; how a column of them is known without a heading. */
+export function looksLikeDesignators(cell: string): boolean {
+  const read = readDesignators(cell);
+  return read.numbered > 0 && read.unclear.length === 0 && read.numbered === read.designators.length;
+}
+
+/** The letters before the number: `"LED12"` gives `"LED"`; a name gives itself. */
+export function designatorLetters(designator: string): string {
+  return (/^[A-Za-zА-Яа-я]+/.exec(designator)?.[0] ?? "").toUpperCase();
+}
+
+/** Order of a person's reading: letters, then the number as a number, then the rest. R2 stands before R10. */
+export function compareDesignators(a: string, b: string): number {
+  const [left, right] = [splitForOrder(a), splitForOrder(b)];
+  if (left.letters !== right.letters) return left.letters < right.letters ? -1 : 1;
+  if (left.number !== right.number) return left.number - right.number;
+  if (left.rest !== right.rest) return left.rest < right.rest ? -1 : 1;
+  return a === b ? 0 : a < b ? -1 : 1;
+}
+
+function splitForOrder(text: string): { letters: string; number: number; rest: string } {
+  const found = /^(\D*)(\d*)(.*)$/s.exec(text);
+  return {
+    letters: (found?.[1] ?? "").toUpperCase(),
+    number: found?.[2] ? Number(found[2]) : -1,
+    rest: found?.[3] ?? "",
+  };
+}
+
+/** For display: sorted, runs of three and more as a range with an en dash: "C1, C2, R4–R9". */
+export function compressDesignators(designators: readonly string[]): string {
+  const sorted = [...new Set(designators)].sort(compareDesignators);
+  const runs: string[][] = [];
+  for (const name of sorted) {
+    const run = runs.at(-1);
+    if (run && follows(run.at(-1) ?? "", name)) run.push(name);
+    else runs.push([name]);
+  }
+  return runs.map((run) => (run.length > 2 ? `${run[0]}–${run.at(-1)}` : run.join(", "))).join(", ");
+}
+
+function follows(before: string, after: string): boolean {
+  const [left, right] = [/^(\D+)(\d+)$/.exec(before), /^(\D+)(\d+)$/.exec(after)];
+  if (!left || !right || left[1] !== right[1]) return false;
+  const next = String(Number(left[2]) + 1).padStart(
+    (left[2] ?? "").startsWith("0") ? (left[2] ?? "").length : 0,
+    "0",
+  );
+  return next === right[2];
+}
+
+/** Designators that stand more than once, each named once, in reading order. */
+export function repeatedDesignators(designators: readonly string[]): string[] {
+  const seen = new Set<string>();
+  const twice = new Set<string>();
+  for (const name of designators) (seen.has(name) ? twice : seen).add(name);
+  return [...twice].sort(compareDesignators);
+}
