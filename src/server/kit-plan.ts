@@ -1,0 +1,49 @@
+import type { Db } from "#db/client.ts";
+import type { Plan } from "#src/shapes/plan.ts";
+import { planOf } from "./plan.ts";
+import { editionsOf } from "./store/edition.ts";
+import type { KitRow } from "./store/kit.ts";
+import type { WorkshopRow } from "./store/membership.ts";
+import { chargesOf, packingItemsOf, runPlanOf, tasksOf } from "./store/run-plan.ts";
+
+/** A kit's plan for its page, with the version of every row a person can change there. */
+export interface KitPlan {
+  plan: Plan;
+  versions: {
+    /** Of the run plan itself, sale terms included. */
+    run: number;
+    workshop: number;
+    /** Of editions, tasks, packing items and charges, by id. */
+    rows: Record<string, number>;
+  };
+}
+
+/** The plan of a kit as it stands on the day `asOf`. */
+export function kitPlan(db: Db, workshop: WorkshopRow, kit: KitRow, asOf: string): KitPlan {
+  const rows = [
+    ...editionsOf(db, kit.id),
+    ...tasksOf(db, kit.id),
+    ...packingItemsOf(db, kit.id),
+    ...chargesOf(db, kit.id),
+  ];
+  return {
+    plan: planOf(db, workshop, kit, asOf),
+    versions: {
+      run: runPlanOf(db, kit.id).version,
+      workshop: workshop.version,
+      rows: Object.fromEntries(rows.map(({ id, version }) => [id, version])),
+    },
+  };
+}
+
+/** The plan as a file: what `POST /api/costing` takes. */
+export function planFile(plan: Plan): Response {
+  const name = plan.kit.replace(/[^\p{L}\p{N}]+/gu, "-").replace(/^-|-$/g, "") || "kit";
+  return new Response(`${JSON.stringify(plan, null, 2)}\n`, {
+    headers: {
+      "content-type": "application/json",
+      "cache-control": "no-store",
+      "content-disposition": `attachment; filename="plan.json"; filename*=UTF-8''${encodeURIComponent(`${name}-plan.json`)}`,
+    },
+  });
+}
