@@ -2,8 +2,8 @@ import type { Db } from "#db/client.ts";
 import { groupBy } from "#db/group-by.ts";
 import type { PartsSnapshot, SnapshotPart } from "#src/shapes/parts-snapshot.ts";
 import { revisionLetter } from "#src/shapes/revision-letter.ts";
-import { logActivity } from "./log-activity.ts";
 import { newId } from "./new-id.ts";
+import { type Changing, noteChange } from "./note-change.ts";
 import { editionsOf } from "./store/edition.ts";
 import { beginNextRevision, type KitRow } from "./store/kit.ts";
 import { lineQuantitiesOf, linesOf } from "./store/line.ts";
@@ -40,31 +40,25 @@ export function partsSnapshot(db: Db, kitId: string): PartsSnapshot {
  * Call it inside a transaction, before the change that begins the next revision. Returns what was kept
  * and the kit as it then stands.
  */
-export function endRevision(
-  db: Db,
-  kit: KitRow,
-  userId: string,
-  now: number,
-): { ended: RevisionRow; kit: KitRow } {
+export function endRevision(by: Changing, kit: KitRow): { ended: RevisionRow; kit: KitRow } {
   const ended: RevisionRow = {
     id: newId(),
     workshopId: kit.workshopId,
     kitId: kit.id,
     number: kit.revision,
-    endedAt: now,
-    endedBy: userId,
-    snapshot: partsSnapshot(db, kit.id),
+    endedAt: by.now,
+    endedBy: by.user.id,
+    snapshot: partsSnapshot(by.db, kit.id),
   };
-  addRevision(db, ended);
-  logActivity(db, {
-    workshopId: kit.workshopId,
-    kitId: kit.id,
-    userId,
-    at: now,
-    action: "revision.end",
-    subjectId: ended.id,
-    subjectName: kit.name,
-    detail: { revision: revisionLetter(kit.revision) },
-  });
-  return { ended, kit: beginNextRevision(db, kit.id) };
+  addRevision(by.db, ended);
+  noteChange(
+    { ...by, kit },
+    {
+      action: "revision.end",
+      subjectId: kit.id,
+      subjectName: kit.name,
+      detail: { revision: revisionLetter(kit.revision) },
+    },
+  );
+  return { ended, kit: beginNextRevision(by.db, kit.id) };
 }

@@ -6,8 +6,24 @@ import { users } from "#db/schema/people.ts";
 export type ActivityRow = typeof activity.$inferSelect;
 
 /** Writes down who changed what. Call it inside the transaction of the change. */
-export function recordActivity(db: Db, row: ActivityRow): void {
+export function addActivity(db: Db, row: ActivityRow): void {
   db.insert(activity).values(row).run();
+}
+
+/** Who changed a thing last, and when; `undefined` where the log knows of no change. */
+export function lastChangeOf(
+  db: Db,
+  workshopId: string,
+  subjectId: string,
+): { by: string | null; at: number } | undefined {
+  return db
+    .select({ by: users.name, at: activity.at })
+    .from(activity)
+    .leftJoin(users, eq(users.id, activity.userId))
+    .where(and(eq(activity.workshopId, workshopId), eq(activity.subjectId, subjectId)))
+    .orderBy(desc(activity.at))
+    .limit(1)
+    .get();
 }
 
 /** An entry with the name of the person, `null` where the person is gone or it was the program itself. */
