@@ -1,8 +1,8 @@
-import { type ButtonHTMLAttributes, type ReactNode, useId } from "react";
+import { type ComponentProps, type ReactNode, useId } from "react";
 import { type ButtonKind, type ButtonSize, buttonLook } from "#src/components/button-look.ts";
 import { BusyIcon } from "./Icons.tsx";
 
-export type ButtonProps = Omit<ButtonHTMLAttributes<HTMLButtonElement>, "disabled"> & {
+export type ButtonProps = Omit<ComponentProps<"button">, "disabled"> & {
   children: ReactNode;
   kind?: ButtonKind;
   size?: ButtonSize;

@@ -1,8 +1,8 @@
-import type { ButtonHTMLAttributes } from "react";
+import type { ComponentProps } from "react";
 import { WORKING_LOOK } from "#src/components/button-look.ts";
 import { EqualsIcon } from "./Icons.tsx";
 
-export type ShowWorkingProps = Omit<ButtonHTMLAttributes<HTMLButtonElement>, "children"> & {
+export type ShowWorkingProps = Omit<ComponentProps<"button">, "children"> & {
   /** What is worked out, for those who hear the page: "cost per kit by run size". */
   of: string;
   open?: boolean;

@@ -24,7 +24,7 @@ export function useHoldRepeat(step: () => boolean) {
     }, wait);
   }
 
-  useEffect(() => stop, []);
+  useEffect(() => () => clearTimeout(timer.current), []);
 
   return {
     onPointerDown(press: PointerEvent) {

@@ -1,0 +1,260 @@
+import { type ReactNode, useEffect, useRef, useState } from "react";
+import { RULER_LEAST, RULER_MOST, RUN_LEAST, RUN_MOST } from "#src/shapes/limits.ts";
+import { RunBands } from "./Bands.tsx";
+import { Button } from "./Button.tsx";
+import { Change, type ChangeProps } from "./Change.tsx";
+import { Figure } from "./Figure.tsx";
+import { holdFocus, useModal } from "./held-focus.ts";
+import { BusyIcon, UpIcon } from "./Icons.tsx";
+import { QuietButton } from "./QuietButton.tsx";
+import { Ruler } from "./Ruler.tsx";
+import { Stepper } from "./Stepper.tsx";
+
+export type TallyCell = {
+  key: string;
+  /** "Cost per kit". */
+  label: string;
+  /** As written: "€14.95". Null when not known; then `needs` says what is missing. */
+  value: string | null;
+  /** "needs parts", "not set". */
+  needs?: string;
+  /** A word after the figure: "sold". */
+  after?: string;
+  change?: ChangeProps;
+  onOpen?: () => void;
+  open?: boolean;
+  /** Stands in the phone's bar; the others are in its sheet. */
+  onPhone?: boolean;
+};
+
+export type TallyNote = {
+  /** The edit, in bold: "Run changed from 100 to 120." */
+  edit: string;
+  /** "Signed figures show the change." */
+  text?: string;
+  actions?: readonly { label: string; run: () => void }[];
+};
+
+export type TallyStripProps = {
+  run: number;
+  onRun: (kits: number) => void;
+  /** Who may not change the run sees it without keys and ruler. */
+  fixed?: boolean;
+  sweetSpots?: readonly number[];
+  cells: readonly TallyCell[];
+  note?: TallyNote;
+  /** Over 150 ms: figures stay, in grey, with a ring. */
+  workingOut?: boolean;
+  /** Said once, politely, after a change: "Cost per kit €14.95, €2.14 less." */
+  announce?: string;
+};
+
+/** The answers of the chosen run, in view on every page of a kit: at the top, on a phone at the bottom. */
+export function TallyStrip({
+  run,
+  onRun,
+  fixed,
+  sweetSpots,
+  cells,
+  note,
+  workingOut,
+  announce,
+}: TallyStripProps) {
+  const [sheet, setSheet] = useState(false);
+  useRunKeys(fixed ? undefined : onRun, run);
+  return (
+    <section
+      aria-label="The answers for this run"
+      data-tally
+      data-screen-only
+      className="z-20 bg-tin tablet:sticky tablet:top-0 tablet:border-t tablet:border-ink tablet:rule-result max-tablet:fixed max-tablet:inset-x-0 max-tablet:bottom-0 max-tablet:border-t-4 max-tablet:border-double max-tablet:border-ink [@media(max-height:419px)]:tablet:static"
+    >
+      <div className="gutters">
+        {fixed ? (
+          <div className="h-3 max-tablet:hidden" />
+        ) : (
+          <div className="max-tablet:hidden">
+            <Ruler run={run} onRun={onRun} sweetSpots={sweetSpots} />
+          </div>
+        )}
+        <div className="flex items-center max-tablet:min-h-[69px] max-tablet:gap-3 max-tablet:py-1.5 tablet:pb-2.5">
+          <Run run={run} onRun={onRun} fixed={fixed} />
+          <ul className="flex min-w-0 grow max-tablet:justify-start max-tablet:gap-4">
+            {cells.map((cell) => (
+              <Cell key={cell.key} cell={cell} workingOut={workingOut} />
+            ))}
+          </ul>
+          <button
+            type="button"
+            aria-label="Show all figures"
+            aria-expanded={sheet}
+            onClick={() => setSheet(true)}
+            className="flex size-10 shrink-0 items-center justify-center tablet:hidden"
+          >
+            {workingOut ? <BusyIcon /> : <UpIcon />}
+          </button>
+        </div>
+      </div>
+      {note && <NoteLine note={note} className="max-tablet:hidden" />}
+      <p role="status" className="heard-only">
+        {announce}
+      </p>
+      <TallySheet open={sheet} onClose={() => setSheet(false)} cells={cells} note={note} run={run} />
+    </section>
+  );
+}
+
+function Run({ run, onRun, fixed }: Pick<TallyStripProps, "run" | "onRun" | "fixed">) {
+  if (fixed)
+    return (
+      <div className="flex items-center gap-3 tablet:pr-6">
+        <span className="type-label text-ink-2">
+          Run of <span className="type-tally block font-bold text-ink">{run}</span>
+        </span>
+        <RunBands kits={run} width={104} className="max-desktop:hidden" />
+        <RunBands kits={run} width={52} className="desktop:hidden" />
+      </div>
+    );
+  return (
+    <div className="flex shrink-0 items-center gap-2.5">
+      <Stepper
+        label="Run of"
+        value={run}
+        onStep={onRun}
+        least={RULER_LEAST}
+        most={RULER_MOST}
+        typedLeast={RUN_LEAST}
+        typedMost={RUN_MOST}
+        below={<RunBands kits={run} width={52} className="tablet:hidden" />}
+      />
+      <RunBands kits={run} width={104} className="max-desktop:hidden" />
+    </div>
+  );
+}
+
+function Cell({ cell, workingOut }: { cell: TallyCell; workingOut?: boolean }) {
+  const shown = cell.onPhone ? "" : "max-tablet:hidden";
+  return (
+    <li
+      className={`${shown} min-w-0 tablet:ml-4 tablet:min-h-[52px] tablet:flex-auto tablet:border-l tablet:border-rule-2 tablet:pl-3.5 desktop:ml-6 desktop:pl-6`}
+    >
+      <span className="type-ruler flex items-center gap-1.5 whitespace-nowrap text-ink-2 tablet:type-label">
+        {cell.label}
+        {workingOut && <BusyIcon className="size-3.5 max-tablet:hidden" />}
+      </span>
+      <span className="flex flex-wrap items-center gap-x-2 max-desktop:flex-col max-desktop:items-start">
+        <CellFigure cell={cell} workingOut={workingOut} />
+        {cell.change && <Change {...cell.change} />}
+      </span>
+    </li>
+  );
+}
+
+function CellFigure({ cell, workingOut }: { cell: TallyCell; workingOut?: boolean }) {
+  if (cell.value === null)
+    return (
+      <span className="text-[1rem] leading-[1.9375rem] font-medium whitespace-nowrap text-ink-2 tablet:text-[1.1875rem]">
+        {cell.needs ?? "not known"}
+      </span>
+    );
+  return (
+    <span className="whitespace-nowrap">
+      <Figure
+        label={cell.label}
+        value={cell.value}
+        onOpen={cell.onOpen}
+        open={cell.open}
+        className={`type-tally ${workingOut ? "text-ink-2" : ""}`}
+      />
+      {cell.after && <span className="type-table ml-1.5 font-medium">{cell.after}</span>}
+    </span>
+  );
+}
+
+function NoteLine({ note, className }: { note: TallyNote; className?: string }) {
+  return (
+    <div className={`border-t border-rule-2 bg-sheet ${className ?? ""}`}>
+      <p className="gutters type-label flex min-h-[31px] flex-wrap items-center gap-x-4">
+        <span>
+          <b>{note.edit}</b> {note.text}
+        </span>
+        {note.actions?.map((action) => (
+          <QuietButton key={action.label} onClick={action.run} className="font-normal">
+            {action.label}
+          </QuietButton>
+        ))}
+      </p>
+    </div>
+  );
+}
+
+type SheetProps = Pick<TallyStripProps, "cells" | "note" | "run"> & { open: boolean; onClose: () => void };
+
+/** The phone's sheet with all figures, from the bar upward. */
+function TallySheet({ open, onClose, cells, note, run }: SheetProps) {
+  const closeKey = useRef<HTMLButtonElement>(null);
+  const box = useModal(open, closeKey);
+  return (
+    <dialog
+      ref={box}
+      aria-label={`All figures for a run of ${run}`}
+      onKeyDown={holdFocus}
+      onCancel={(cancel) => {
+        cancel.preventDefault();
+        onClose();
+      }}
+      className="mx-0 mt-auto mb-0 w-full max-w-none border-t-4 border-double border-ink bg-paper px-4 pt-4 pb-6 text-ink"
+    >
+      {open && (
+        <>
+          <div className="flex items-center justify-between gap-3">
+            <h2 className="type-h2">A run of {run}</h2>
+            <Button ref={closeKey} size="small" onClick={onClose}>
+              Close
+            </Button>
+          </div>
+          <dl className="mt-3">
+            {cells.map((cell) => (
+              <SheetRow key={cell.key} cell={cell} onOpen={cell.onOpen && (() => openFrom(cell, onClose))} />
+            ))}
+          </dl>
+          {note && <NoteLine note={note} className="mt-3 py-2 [&>p]:px-3" />}
+        </>
+      )}
+    </dialog>
+  );
+}
+
+function openFrom(cell: TallyCell, close: () => void): void {
+  close();
+  cell.onOpen?.();
+}
+
+function SheetRow({ cell, onOpen }: { cell: TallyCell; onOpen?: () => void }): ReactNode {
+  return (
+    <div className="hairline-b flex min-h-12 items-center justify-between gap-3">
+      <dt className="text-ink-2">{cell.label}</dt>
+      <dd className="flex flex-wrap items-center justify-end gap-2">
+        {cell.change && <Change {...cell.change} />}
+        <CellFigure cell={{ ...cell, onOpen }} />
+      </dd>
+    </div>
+  );
+}
+
+/** Alt with + or − changes the run from anywhere on the page. */
+function useRunKeys(onRun: ((kits: number) => void) | undefined, run: number): void {
+  const latest = useRef({ onRun, run });
+  latest.current = { onRun, run };
+  useEffect(() => {
+    const onKey = (press: KeyboardEvent) => {
+      const by = press.key === "+" || press.key === "=" ? 1 : press.key === "-" || press.key === "−" ? -1 : 0;
+      if (!press.altKey || press.ctrlKey || press.metaKey || by === 0 || !latest.current.onRun) return;
+      press.preventDefault();
+      const next = Math.min(Math.max(latest.current.run + by, RUN_LEAST), RUN_MOST);
+      if (next !== latest.current.run) latest.current.onRun(next);
+    };
+    addEventListener("keydown", onKey);
+    return () => removeEventListener("keydown", onKey);
+  }, []);
+}

@@ -1,0 +1,260 @@
+import { Fragment, type ReactNode, useEffect, useId, useRef, useState } from "react";
+import {
+  type Paper,
+  type PaperLine,
+  type PaperSource,
+  type PaperSub,
+  paperAsText,
+  ruledOff,
+} from "#src/components/working-paper.ts";
+import { Button } from "./Button.tsx";
+import { focusToReturn, holdFocus } from "./held-focus.ts";
+import { BusyIcon } from "./Icons.tsx";
+import { usePhone } from "./phone.ts";
+
+export type WorkingPanelProps = {
+  /** Null while it is being worked out. */
+  paper: Paper | null;
+  onClose: () => void;
+  id?: string;
+};
+
+/**
+ * The arithmetic of a figure on squared paper. On the desktop it stands at the right below the tally and the page stays
+ * usable; on a phone it is a modal sheet. Mount it while a figure is open: focus comes here and goes back when it is
+ * closed by its button or Escape.
+ */
+export function WorkingPanel({ paper, onClose, id }: WorkingPanelProps) {
+  const titleId = useId();
+  const box = useRef<HTMLDialogElement>(null);
+  const heading = useRef<HTMLHeadingElement>(null);
+  const phone = usePhone();
+  const top = useTallyFoot();
+
+  useEffect(() => {
+    const dialog = box.current;
+    if (!dialog) return;
+    const giveBack = focusToReturn();
+    if (phone) dialog.showModal();
+    else dialog.show();
+    heading.current?.focus({ preventScroll: true });
+    return () => {
+      dialog.close();
+      giveBack();
+    };
+  }, [phone]);
+  useEscape(onClose);
+
+  return (
+    <dialog
+      ref={box}
+      id={id}
+      data-working
+      aria-labelledby={titleId}
+      onCancel={(cancel) => cancel.preventDefault()}
+      onKeyDown={phone ? holdFocus : undefined}
+      style={phone ? undefined : { top }}
+      className="fixed inset-x-0 top-[60px] bottom-0 z-30 m-0 hidden h-auto max-h-none w-full max-w-none animate-panel flex-col border-t-2 border-ink bg-paper text-ink open:flex tablet:right-0 tablet:left-auto tablet:w-[min(588px,100vw)] tablet:border-t-0 tablet:border-l-2"
+    >
+      <header className="rule-section flex items-start justify-between gap-4 border-t-0! border-b-2! border-ink px-6 py-3 max-tablet:px-4">
+        <div>
+          <h2 id={titleId} ref={heading} tabIndex={-1} className="type-h2 outline-none">
+            The working
+          </h2>
+          <p className="type-note text-ink-2">{paper?.of ?? "Working out"}</p>
+        </div>
+        <Button size="small" onClick={onClose} data-screen-only>
+          Close
+        </Button>
+      </header>
+      {paper === null ? <WorkingOut /> : <WorkingPaper paper={paper} />}
+      {paper && <WorkingFoot paper={paper} />}
+    </dialog>
+  );
+}
+
+function WorkingOut() {
+  return (
+    <p role="status" className="squared-paper flex grow items-start gap-2 p-7">
+      <BusyIcon /> Working out
+    </p>
+  );
+}
+
+function WorkingFoot({ paper }: { paper: Paper }) {
+  const [copied, setCopied] = useState(false);
+  async function copy() {
+    await navigator.clipboard.writeText(paperAsText(paper));
+    setCopied(true);
+  }
+  return (
+    <footer className="flex flex-wrap items-center justify-between gap-3 border-t border-ink px-6 py-3 max-tablet:px-4">
+      <p className="type-label text-ink-2">{paper.foot}</p>
+      <div className="flex gap-3" data-screen-only>
+        <Button size="small" onClick={copy}>
+          {copied ? "Copied" : "Copy as text"}
+        </Button>
+        <Button size="small" onClick={printWorking}>
+          Print
+        </Button>
+      </div>
+    </footer>
+  );
+}
+
+/** Prints the open working alone: `data-printing` hides the rest of the page. */
+function printWorking(): void {
+  const root = document.documentElement;
+  root.dataset.printing = "working";
+  addEventListener("afterprint", () => delete root.dataset.printing, { once: true });
+  print();
+}
+
+const ROW =
+  "grid min-h-7 grid-cols-[46px_minmax(0,1fr)_auto_24px_104px] pr-4 leading-7 tablet:grid-cols-[69px_minmax(0,1fr)_auto_28px_112px] tablet:pr-7";
+
+/** The squared sheet itself: letters at the margin line, text, sub-amounts, sign, amount. */
+export function WorkingPaper({ paper }: { paper: Paper }) {
+  return (
+    <section
+      // biome-ignore lint/a11y/noNoninteractiveTabindex: a region that scrolls must be reachable by keyboard.
+      tabIndex={0}
+      aria-label={paper.of}
+      className="squared-paper relative grow overflow-y-auto py-3.5 text-[1.0625rem]"
+    >
+      <div className="relative min-h-full before:absolute before:-inset-y-3.5 before:left-[45px] before:w-px before:bg-margin-line tablet:before:left-[68px]">
+        <PaperText text={paper.basis} />
+        <div className="h-7" />
+        {paper.lines.map((line, place) => (
+          // biome-ignore lint/suspicious/noArrayIndexKey: a line is its place on the sheet.
+          <Fragment key={place}>
+            {line.apart && <div className="h-7" />}
+            <PaperRow line={line} ruled={ruledOff(paper.lines, place)} />
+          </Fragment>
+        ))}
+        {paper.notes.map((note) => (
+          <PaperText key={note} text={note} />
+        ))}
+      </div>
+    </section>
+  );
+}
+
+function PaperText({ text }: { text: string }) {
+  return <p className="pr-7 pl-[60px] leading-7 text-ink-2 tablet:pl-[83px]">{text}</p>;
+}
+
+function PaperRow({ line, ruled }: { line: PaperLine; ruled: boolean }) {
+  const subs = line.subs ?? [];
+  const strong = line.sign === "=" ? "font-semibold" : "";
+  const amount = <Amount line={line} ruled={ruled} />;
+  return (
+    <>
+      <div className={`${ROW} ${strong}`}>
+        <span className="pl-4 italic text-copper tablet:pl-7">{line.letter}</span>
+        <span className="pl-3.5">
+          {line.label} <Source source={line.source} />
+        </span>
+        <span />
+        {subs.length === 0 && <Carried sign={line.sign}>{amount}</Carried>}
+      </div>
+      {subs.map((sub, place) => (
+        <SubRow key={sub.label} sub={sub} last={place === subs.length - 1}>
+          {place === subs.length - 1 && <Carried sign={line.sign}>{amount}</Carried>}
+        </SubRow>
+      ))}
+    </>
+  );
+}
+
+function SubRow({ sub, last, children }: { sub: PaperSub; last: boolean; children: ReactNode }) {
+  return (
+    <div className={ROW}>
+      <span />
+      <span className="pl-7 text-ink-2 tablet:pl-[42px]">
+        {sub.label} <Source source={sub.source} />
+      </span>
+      <span
+        className={`min-w-[84px] pl-4 text-right whitespace-nowrap text-ink-2 ${last ? "rule-head" : ""}`}
+      >
+        <Opens label={sub.label} amount={sub.amount} onOpen={sub.onOpen} />
+      </span>
+      {children}
+    </div>
+  );
+}
+
+function Carried({ sign, children }: { sign: PaperLine["sign"]; children: ReactNode }) {
+  return (
+    <>
+      <span className="text-center">{sign}</span>
+      {children}
+    </>
+  );
+}
+
+function Amount({ line, ruled }: { line: PaperLine; ruled: boolean }) {
+  const rule = line.result ? "rule-result type-h3 font-bold leading-7" : ruled ? "rule-head" : "";
+  return (
+    <span className={`block text-right whitespace-nowrap ${rule}`}>
+      {line.amount && <Opens label={line.label} amount={line.amount} onOpen={line.onOpen} />}
+    </span>
+  );
+}
+
+function Opens({ label, amount, onOpen }: { label: string; amount: string; onOpen?: () => void }) {
+  if (!onOpen) return <>{amount}</>;
+  return (
+    <button
+      type="button"
+      onClick={onOpen}
+      aria-label={`${label} ${amount}, show the working`}
+      className="leading-5 foot-dotted hover:border-solid hover:border-petrol"
+    >
+      {amount}
+    </button>
+  );
+}
+
+function Source({ source }: { source?: PaperSource }) {
+  if (!source) return null;
+  return (
+    <a href={source.href} className="type-table ml-1.5 font-normal whitespace-nowrap">
+      {source.label}
+    </a>
+  );
+}
+
+/** The lower edge of the tally in the window, so that the panel begins below it wherever the page is scrolled. */
+function useTallyFoot(): number {
+  const [top, setTop] = useState(0);
+  useEffect(() => {
+    const tally = document.querySelector("[data-tally]");
+    if (!tally) return;
+    const measure = () => setTop(Math.max(0, Math.round(tally.getBoundingClientRect().bottom)));
+    measure();
+    addEventListener("scroll", measure, { passive: true });
+    addEventListener("resize", measure);
+    const sized = new ResizeObserver(measure);
+    sized.observe(tally);
+    return () => {
+      removeEventListener("scroll", measure);
+      removeEventListener("resize", measure);
+      sized.disconnect();
+    };
+  }, []);
+  return top;
+}
+
+/** Escape closes from anywhere on the page, unless something nearer took it. */
+function useEscape(close: () => void): void {
+  const latest = useRef(close);
+  latest.current = close;
+  useEffect(() => {
+    const onKey = (press: globalThis.KeyboardEvent) => {
+      if (press.key === "Escape" && !press.defaultPrevented) latest.current();
+    };
+    addEventListener("keydown", onKey);
+    return () => removeEventListener("keydown", onKey);
+  }, []);
+}
