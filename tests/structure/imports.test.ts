@@ -35,7 +35,12 @@ const RULES: readonly Rule[] = [
   { folder: "src/shapes/limits.ts", may: [] },
   {
     folder: "src/shapes/",
-    may: [/^src\/shapes\//, /^zod$/, /^src\/costing\/currenc/],
+    may: [
+      /^src\/shapes\//,
+      /^zod$/,
+      /^src\/costing\/currenc/,
+      /^src\/partslist\/(meanings|question-codes)\.ts$/,
+    ],
     types: [/^src\/costing\//],
   },
   { folder: "src/access.ts", may: [], types: [/^src\/shapes\/limits\.ts$/] },
