@@ -1,0 +1,40 @@
+import { expect, test } from "vitest";
+import { migrateDb, openDb } from "#db/client.ts";
+import { KITS } from "#db/seed/kits.ts";
+import { loadDemonstration, seedId, WORKSHOP_ID } from "#db/seed/load.ts";
+import { planOf } from "#src/server/plan.ts";
+import { kitsOf } from "#src/server/store/kit.ts";
+import { membershipOf } from "#src/server/store/membership.ts";
+import { Plan } from "#src/shapes/plan.ts";
+
+const NOW = Date.UTC(2026, 2, 9);
+
+function loaded() {
+  const db = openDb(":memory:");
+  migrateDb(db);
+  loadDemonstration(db, {}, NOW);
+  return db;
+}
+
+test("the demonstration loads into an empty database, and every kit gives a valid plan", () => {
+  const db = loaded();
+  const workshop = membershipOf(db, WORKSHOP_ID, seedId("user", "ines"))?.workshop;
+  const kits = kitsOf(db, WORKSHOP_ID);
+  expect(kits.map(({ name }) => name)).toEqual(KITS.map(({ name }) => name));
+  for (const kit of kits) {
+    const plan = planOf(db, workshop as never, kit, "2026-03-09");
+    expect(Plan.safeParse(plan).error).toBeUndefined();
+  }
+});
+
+test("Dew Lantern has 23 lines and three editions, as the demonstration promises", () => {
+  const kit = KITS[0];
+  expect(kit?.lines).toHaveLength(23);
+  expect(kit?.editions).toHaveLength(3);
+});
+
+test("quantities agree with designators in every line that has designators", () => {
+  for (const kit of KITS)
+    for (const line of kit.lines.filter(({ designators }) => designators !== ""))
+      expect(Math.max(...line.perKit)).toBe(line.designators.split(", ").length);
+});
