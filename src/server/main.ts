@@ -1,30 +1,12 @@
-import { mkdirSync } from "node:fs";
 import type { RequestListener } from "node:http";
-import { migrateDb, openDb } from "#db/client.ts";
-import { now } from "./clock.ts";
 import { config, lettersStayHere } from "./config.ts";
-import { databasePath } from "./db.ts";
-import { ensureDemonstration, passwordFile } from "./demonstration.ts";
-import { startLetterBox } from "./fakes/letter-box.ts";
 import { httpServer } from "./http-server.ts";
+import { prepare } from "./prepare.ts";
 
-function tellPasswords(people: string[], dataFolder: string): void {
-  if (people.length === 0) return;
-  console.log(`The demonstration is loaded. Its people, with passwords made just now:\n${people.join("\n")}`);
-  console.log(`They are printed this once and kept in ${passwordFile(dataFolder)}, which only you can read.`);
-}
-
-/** The production entry: settings, folder, migrations, demonstration, letters, then the server. */
+/** The production entry: settings, what must stand before, then the server. */
 async function main(): Promise<void> {
   const settings = config();
-  mkdirSync(settings.dataFolder, { recursive: true, mode: 0o700 });
-  const db = openDb(databasePath(settings.dataFolder));
-  migrateDb(db);
-  if (settings.demo)
-    tellPasswords(await ensureDemonstration(db, settings.dataFolder, now()), settings.dataFolder);
-  db.$client.close();
-  if (lettersStayHere(settings)) await startLetterBox(settings.lettersPort, settings.dataFolder);
-
+  await prepare(settings);
   process.env.ASTRO_NODE_AUTOSTART = "disabled";
   const entry = new URL("../../dist/server/entry.mjs", import.meta.url);
   const { handler } = (await import(entry.href)) as { handler: RequestListener };
