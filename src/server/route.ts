@@ -3,10 +3,11 @@ import type { z } from "zod";
 import type { Db } from "#db/client.ts";
 import { can, type Permission, rolesThatCan, seesEveryKit } from "#src/access.ts";
 import { JSON_BYTES, type Role } from "#src/shapes/limits.ts";
+import { checked } from "./checked.ts";
 import { now } from "./clock.ts";
 import { config } from "./config.ts";
 import { serverDb } from "./db.ts";
-import { type FieldError, Problem, problemReply } from "./problem.ts";
+import { Problem, problemReply } from "./problem.ts";
 import { readBytes, readJson } from "./read-body.ts";
 import { tokenHash } from "./secret-token.ts";
 import { sessionOf } from "./session.ts";
@@ -16,7 +17,7 @@ import { isGuestOf, membershipOf, type WorkshopRow } from "./store/membership.ts
 import type { SessionRow, UserRow } from "./store/session.ts";
 
 /** What every handler is given. */
-interface Common {
+export interface Common {
   db: Db;
   now: number;
   request: Request;
@@ -32,6 +33,10 @@ interface Person {
   /** `null` for a script with an access token. */
   session: SessionRow | null;
 }
+/** A person at a browser, not a script with an access token. */
+export interface InPerson extends Person {
+  session: SessionRow;
+}
 interface Place {
   workshop: WorkshopRow;
   role: Role;
@@ -41,11 +46,24 @@ interface InKit {
   kit: KitRow;
 }
 
-/** Who may call: a permission in the workshop of the address, any signed-in person, or anyone. */
-export type May = Permission | "signed-in" | "half-signed-in" | "anyone";
+/**
+ * Who may call: a permission in the workshop of the address; `member`: anybody of that workshop;
+ * `signed-in`: any person or script; `in-person`: any person, but no script; `half-signed-in`: also somebody
+ * who still owes the second factor, but no script; or `anyone`.
+ */
+export type May = Permission | "member" | "signed-in" | "in-person" | "half-signed-in" | "anyone";
+
+const NOWHERE: readonly May[] = ["signed-in", "in-person", "half-signed-in", "anyone"];
+const NOT_FOR_SCRIPTS: readonly May[] = ["in-person", "half-signed-in"];
 
 type Handed<M extends May> = Common &
-  (M extends "anyone" ? unknown : M extends "signed-in" | "half-signed-in" ? Person : Person & Place & InKit);
+  (M extends "anyone"
+    ? unknown
+    : M extends "signed-in"
+      ? Person
+      : M extends "in-person" | "half-signed-in"
+        ? InPerson
+        : Person & Place & InKit);
 
 interface Declaration<M extends May, I extends z.ZodType, Q extends z.ZodType, R> {
   may: M;
@@ -87,6 +105,7 @@ function checkOrigin(request: Request): void {
 function personOf(db: Db, request: Request, time: number, may: May): Person & { onlyIn: string | null } {
   const bearer = /^Bearer (\w+)$/.exec(request.headers.get("authorization") ?? "")?.[1];
   if (bearer) {
+    if (NOT_FOR_SCRIPTS.includes(may)) throw new Problem("not-for-scripts");
     const found = accessTokenByHash(db, tokenHash(bearer), time);
     if (!found) throw new Problem("sign-in-needed");
     touchAccessToken(db, found.token.id, time);
@@ -97,6 +116,11 @@ function personOf(db: Db, request: Request, time: number, may: May): Person & { 
   if (!session) throw new Problem("sign-in-needed");
   if (!session.complete && may !== "half-signed-in") throw new Problem("second-factor-needed");
   return { user, session, onlyIn: null };
+}
+
+/** Refuses a script, where only a person at a browser may do a thing. */
+export function requireBrowser(session: SessionRow | null): asserts session is SessionRow {
+  if (session === null) throw new Problem("not-for-scripts");
 }
 
 /** The workshop and kit of an address, for this person: a stranger learns nothing, not even that it exists. */
@@ -119,17 +143,6 @@ export function placeOf(
 export function requirePermission(role: Role, permission: Permission): void {
   if (!can(role, permission))
     throw new Problem("role-may-not", { parameters: { role, roles: rolesThatCan(permission).join(", ") } });
-}
-
-function parsed<T extends z.ZodType>(shape: T | undefined, value: unknown): z.output<T> {
-  if (!shape) return undefined as z.output<T>;
-  const read = shape.safeParse(value);
-  if (read.success) return read.data;
-  const errors: FieldError[] = read.error.issues.map((issue) => ({
-    at: issue.path.join("."),
-    message: issue.message,
-  }));
-  throw new Problem("wrong-input", { errors });
 }
 
 function reply(value: unknown, status: number, headers: Headers): Response {
@@ -163,17 +176,17 @@ export function route<M extends May, R, I extends z.ZodType = z.ZodType, Q exten
     else {
       const { onlyIn, ...person } = personOf(db, request, common.now, declared.may);
       Object.assign(given, person);
-      if (declared.may !== "signed-in" && declared.may !== "half-signed-in") {
+      if (!NOWHERE.includes(declared.may)) {
         if (onlyIn !== null && onlyIn !== params.workshop) throw new Problem("not-found");
         const place = placeOf(db, person.user, params.workshop ?? "", params.kit);
-        requirePermission(place.role, declared.may);
+        if (declared.may !== "member") requirePermission(place.role, declared.may as Permission);
         Object.assign(given, place);
       }
     }
-    given.query = parsed(declared.query, Object.fromEntries(url.searchParams));
+    if (declared.query) given.query = checked(declared.query, Object.fromEntries(url.searchParams));
     const limit = declared.limit ?? JSON_BYTES;
     if (declared.bytes) given.bytes = await readBytes(request, limit);
-    if (declared.input) given.input = parsed(declared.input, await readJson(request, limit));
+    if (declared.input) given.input = checked(declared.input, await readJson(request, limit));
     return reply(await declared.run(given as never), declared.status ?? 200, headers);
   }
 

@@ -24,25 +24,30 @@ export const OfferFields = z.strictObject({
 });
 export type OfferFields = z.infer<typeof OfferFields>;
 
-/** A lot is ordered whole and lots add up, so only prices per piece are held against the minimum order. */
+/** Why nobody can order the quantity of a break; `null` where somebody can. Lots are ordered whole and add up. */
+function notOrderable(offer: OfferFields, quantity: number): string | null {
+  const { minimumOrder, orderMultiple, priceModel } = offer;
+  if (priceModel === "lots")
+    return quantity % orderMultiple === 0
+      ? null
+      : `A lot of ${quantity} is not a multiple of the ${orderMultiple} it is sold in.`;
+  return quantity >= minimumOrder
+    ? null
+    : `${quantity} is below the minimum order of ${minimumOrder}, so nobody can buy at this price.`;
+}
+
 function checkOrderQuantities(offer: OfferFields, context: z.RefinementCtx): void {
-  const { minimumOrder, orderMultiple, priceModel, breaks } = offer;
+  const { minimumOrder, orderMultiple, breaks } = offer;
   if (minimumOrder % orderMultiple !== 0) {
     const below = minimumOrder - (minimumOrder % orderMultiple);
     const fitting = [below, below + orderMultiple].filter((quantity) => quantity > 0).join(" or ");
-    context.addIssue({
-      code: "custom",
-      path: ["minimumOrder"],
-      message: `${minimumOrder} is not a multiple of ${orderMultiple}. Write ${fitting}.`,
-    });
+    const message = `${minimumOrder} is not a multiple of ${orderMultiple}. Write ${fitting}.`;
+    context.addIssue({ code: "custom", path: ["minimumOrder"], message });
   }
-  for (const [place, { quantity }] of breaks.entries())
-    if (priceModel !== "lots" && quantity < minimumOrder)
-      context.addIssue({
-        code: "custom",
-        path: ["breaks", place, "quantity"],
-        message: `${quantity} is below the minimum order of ${minimumOrder}, so nobody can buy at this price.`,
-      });
+  for (const [place, { quantity }] of breaks.entries()) {
+    const message = notOrderable(offer, quantity);
+    if (message) context.addIssue({ code: "custom", path: ["breaks", place, "quantity"], message });
+  }
 }
 
 /** A whole offer: its ladder can be climbed and its days are in order. */
