@@ -83,6 +83,12 @@ export function removeLines(db: Db, kitId: string, lineIds: string[]): void {
       .run();
 }
 
+/** Quantities of lines that are new. Nought is no row. */
+export function addLineQuantities(db: Db, rows: LineQuantityRow[]): void {
+  for (const chunk of inChunks(rows.filter((row) => row.perKit > 0)))
+    db.insert(lineQuantities).values(chunk).run();
+}
+
 /** Sets how many of a line go into one kit of an edition. Nought takes the row away: the edition is without it. */
 export function setLineQuantities(db: Db, rows: LineQuantityRow[]): void {
   const none = rows.filter((row) => row.perKit === 0);

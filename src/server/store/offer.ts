@@ -3,6 +3,7 @@ import type { Db } from "#db/client.ts";
 import { groupBy } from "#db/group-by.ts";
 import { lines } from "#db/schema/parts.ts";
 import { offerBreaks, offers } from "#db/schema/supply.ts";
+import { inChunks } from "./in-chunks.ts";
 
 export type OfferRow = typeof offers.$inferSelect;
 export type OfferBreakRow = typeof offerBreaks.$inferSelect;
@@ -90,6 +91,25 @@ export function addOffer(db: Db, row: NewOfferRow, breaks: OfferWithBreaks["brea
   const offer = db.insert(offers).values(row).returning().get();
   setBreaks(db, offer, breaks);
   return offer;
+}
+
+/** Adds many offers at once, each with its id and its ladder. */
+export function addOffers(db: Db, rows: OfferWithBreaks[]): void {
+  for (const chunk of inChunks(rows.map(({ offer }) => offer))) db.insert(offers).values(chunk).run();
+  const rungs = rows.flatMap(({ offer, breaks }) =>
+    breaks.map(({ quantity, price }) => ({
+      workshopId: offer.workshopId,
+      offerId: offer.id,
+      quantity,
+      price,
+    })),
+  );
+  for (const chunk of inChunks(rungs)) db.insert(offerBreaks).values(chunk).run();
+}
+
+/** Every offer of a workshop. */
+export function offersOf(db: Db, workshopId: string): OfferWithBreaks[] {
+  return offersWhere(db, eq(offers.workshopId, workshopId));
 }
 
 /** Changes an offer and its ladder if it still has the version `seen`; `undefined` where it has moved on. */
