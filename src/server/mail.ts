@@ -1,5 +1,6 @@
 import nodemailer, { type Transporter } from "nodemailer";
 import { type Config, config, lettersStayHere } from "./config.ts";
+import { later } from "./later.ts";
 import type { Letter } from "./letters/letter.ts";
 import { Problem } from "./problem.ts";
 
@@ -43,13 +44,15 @@ export async function sendLetter(letter: Letter): Promise<void> {
   }
 }
 
-/**
- * Sends a letter without waiting: how long a reply takes must not tell whether an address is known. A letter
- * that cannot be sent is written to the server's own log.
- */
+/** Sends a letter after the reply; one that cannot be sent is written to the server's own log. */
 export function postLetter(letter: Letter): void {
-  void sendLetter(letter).catch((error: Error) => {
-    if (error instanceof Problem && error.code === "mail-not-set-up") console.error(error.body().title);
+  later(async () => {
+    try {
+      await sendLetter(letter);
+    } catch (error) {
+      if (!(error instanceof Problem)) throw error;
+      if (error.code === "mail-not-set-up") console.error(error.body().title);
+    }
   });
 }
 

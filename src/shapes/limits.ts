@@ -74,6 +74,7 @@ export const OFFERS_PER_PART_MOST = 40;
 export const BREAKS_PER_OFFER_MOST = 24;
 export const EDITIONS_MOST = 8;
 export const SUPPLIERS_MOST = 200;
+export const BOARD_QUOTES_MOST = 50;
 export const QUANTITY_MOST = 1_000_000_000;
 export const QUANTITY_PER_KIT_MOST = 10_000;
 
@@ -82,6 +83,7 @@ export const TEXT_LENGTH = 2000;
 export const EMAIL_LENGTH = 254;
 export const PASSWORD_LEAST = 12;
 export const PASSWORD_MOST = 256;
+export const PASSWORD_DIFFERENT_LEAST = 5;
 
 export const UPLOAD_BYTES = 5 * 1024 * 1024;
 export const UPLOAD_ROWS = 20_000;

@@ -1,0 +1,9 @@
+import { makeFirstOwner } from "#src/server/first-owner.ts";
+import { route } from "#src/server/route.ts";
+import { FirstOwner } from "#src/shapes/person.ts";
+
+export const POST = route({
+  may: "anyone",
+  input: FirstOwner,
+  run: ({ input, ...given }) => makeFirstOwner(given, input),
+});

@@ -1,0 +1,9 @@
+import { route } from "#src/server/route.ts";
+import { resetPassword } from "#src/server/sign-in-link.ts";
+import { Reset } from "#src/shapes/person.ts";
+
+export const POST = route({
+  may: "anyone",
+  input: Reset,
+  run: ({ input, ...given }) => resetPassword(given, input.token, input.password),
+});

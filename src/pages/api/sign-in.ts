@@ -1,0 +1,9 @@
+import { route } from "#src/server/route.ts";
+import { signInWithPassword } from "#src/server/sign-in.ts";
+import { SignIn } from "#src/shapes/person.ts";
+
+export const POST = route({
+  may: "anyone",
+  input: SignIn,
+  run: ({ input, ...given }) => signInWithPassword(given, input),
+});

@@ -1,0 +1,9 @@
+import { route } from "#src/server/route.ts";
+import { finishSignIn } from "#src/server/sign-in.ts";
+import { SecondFactor } from "#src/shapes/person.ts";
+
+export const POST = route({
+  may: "half-signed-in",
+  input: SecondFactor,
+  run: ({ input, ...given }) => finishSignIn(given, input.code),
+});

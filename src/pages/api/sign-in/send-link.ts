@@ -1,0 +1,13 @@
+import { route } from "#src/server/route.ts";
+import { sendSignInLink } from "#src/server/sign-in-link.ts";
+import { SendLink } from "#src/shapes/person.ts";
+
+export const POST = route({
+  may: "anyone",
+  input: SendLink,
+  status: 202,
+  run: ({ input, ...given }) => {
+    sendSignInLink(given, input.email, input.back);
+    return {};
+  },
+});
