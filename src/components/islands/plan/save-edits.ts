@@ -1,0 +1,170 @@
+import { CallFailed, call } from "#src/components/islands/call.ts";
+import { type KitAddress, kitApi, kitKeys } from "#src/components/islands/kit-address.ts";
+import { showToast } from "#src/components/islands/parts/toasts.ts";
+import { queryClient } from "#src/components/islands/query-client.ts";
+import type { KitPlan } from "#src/server/kit-plan.ts";
+import { merged, type PendingEdit, withEdit, withPending } from "./pending-edits.ts";
+import {
+  addressOf,
+  type Fields,
+  fieldsNow,
+  holderOf,
+  type PlanRow,
+  versionOf,
+  withFields,
+  withVersion,
+} from "./plan-rows.ts";
+import { type Clash, saving } from "./saving.ts";
+
+/** An edit is sent when nothing was typed for so long; holding a key makes one request, not twenty. */
+const QUIET_MS = 400;
+const RETRY_MS = 10_000;
+
+/** Edits of one version holder, sent one after the other. */
+interface Line {
+  address: KitAddress;
+  holder: string;
+  waiting: PendingEdit[];
+  sent: PendingEdit | null;
+  timer: ReturnType<typeof setTimeout> | undefined;
+}
+
+const lines = new Map<string, Line>();
+
+function lineOf(address: KitAddress, holder: string): Line {
+  const key = `${address.kit} ${holder}`;
+  const found = lines.get(key);
+  if (found) return found;
+  const line: Line = { address, holder, waiting: [], sent: null, timer: undefined };
+  lines.set(key, line);
+  return line;
+}
+
+/** The plan in the cache; edits are only made where one is shown. */
+export function heldPlan({ kit }: KitAddress): KitPlan | undefined {
+  return queryClient.getQueryData<KitPlan>(kitKeys.plan(kit));
+}
+
+export function holdPlan({ kit }: KitAddress, how: (held: KitPlan) => KitPlan): void {
+  queryClient.setQueryData<KitPlan>(kitKeys.plan(kit), (held) => held && how(held));
+}
+
+/** A plan from the server with this page's unsaved edits on top. */
+export function overlaid({ kit }: KitAddress, fresh: KitPlan): KitPlan {
+  const own = [...lines.values()].filter((line) => line.address.kit === kit);
+  return withPending(
+    fresh,
+    own.flatMap(({ sent, waiting }) => (sent ? [sent, ...waiting] : waiting)),
+  );
+}
+
+function countWaiting(): void {
+  const waiting = [...lines.values()].reduce(
+    (sum, line) => sum + line.waiting.length + (line.sent ? 1 : 0),
+    0,
+  );
+  saving.change((now) => ({ ...now, waiting }));
+}
+
+/** Changes fields of a row on this screen at once, and on the server soon. */
+export function editRow(address: KitAddress, row: PlanRow, fields: Fields): void {
+  const held = heldPlan(address);
+  if (!held) return;
+  void queryClient.cancelQueries({ queryKey: kitKeys.plan(address.kit) });
+  const base = fieldsNow(held, row, Object.keys(fields));
+  holdPlan(address, (now) => withFields(now, row, fields));
+  const line = lineOf(address, holderOf(row));
+  line.waiting = withEdit(line.waiting, { row, fields, base });
+  countWaiting();
+  clearTimeout(line.timer);
+  line.timer = setTimeout(() => void sendNext(line), QUIET_MS);
+}
+
+async function sendNext(line: Line): Promise<void> {
+  const held = heldPlan(line.address);
+  const next = line.waiting[0];
+  if (line.sent || !next || !held) return;
+  line.sent = next;
+  line.waiting = line.waiting.slice(1);
+  const { of, path } = addressOf(next.row);
+  const base = of === "kit" ? kitApi(line.address) : `/api/workshops/${line.address.workshop}`;
+  const body = { ...next.fields, version: versionOf(held.versions, line.holder) };
+  try {
+    const reply = (await call<never>("PATCH", base + path, body as never)) as { version: number };
+    holdPlan(line.address, (now) => ({
+      ...now,
+      versions: withVersion(now.versions, line.holder, reply.version),
+    }));
+    line.sent = null;
+    saving.change((now) => ({ ...now, savedAt: Date.now(), lostAt: null }));
+  } catch (error) {
+    line.sent = null;
+    if (!(error instanceof CallFailed)) throw error;
+    failed(line, next, error);
+  } finally {
+    countWaiting();
+  }
+  if (line.waiting.length > 0 && saving.now().lostAt === null) await sendNext(line);
+}
+
+function failed(line: Line, edit: PendingEdit, { problem }: CallFailed): void {
+  if (problem.code === "no-connection") {
+    line.waiting = line.waiting.reduce(withEdit, [edit]);
+    saving.change((now) => ({ ...now, lostAt: now.lostAt ?? Date.now() }));
+    line.timer = setTimeout(sendAll, RETRY_MS);
+  } else if (problem.code === "changed-meanwhile") meetOther(line, edit, problem.current as Fields);
+  else {
+    const detail = problem.errors?.[0]?.message ?? problem.detail;
+    showToast({ kind: "fault", text: `Not saved. ${problem.title} ${detail}` });
+    void queryClient.invalidateQueries({ queryKey: kitKeys.plan(line.address.kit) });
+  }
+}
+
+/** Somebody was quicker. What only we changed is sent again; what both changed is for the person to choose. */
+function meetOther(line: Line, edit: PendingEdit, current: Fields): void {
+  const { ours, both } = merged(edit, current);
+  holdPlan(line.address, (now) => ({
+    ...now,
+    versions: withVersion(now.versions, line.holder, current.version as number),
+  }));
+  if (Object.keys(ours).length > 0) line.waiting = line.waiting.reduce(withEdit, [{ ...edit, fields: ours }]);
+  const from = { by: current.changedBy as string | null, at: current.changedAt as number | null };
+  const clashes = both.map((field): Clash => ({ row: edit.row, ...field, ...from }));
+  saving.change((now) => ({ ...now, clashes: [...now.clashes, ...clashes] }));
+  if (both.length === 0) void queryClient.invalidateQueries({ queryKey: kitKeys.plan(line.address.kit) });
+}
+
+/** Ends a clash: our value is sent over theirs, or theirs is shown. */
+export function settleClash(address: KitAddress, clash: Clash, keep: "yours" | "theirs"): void {
+  saving.change((now) => ({ ...now, clashes: now.clashes.filter((one) => one !== clash) }));
+  if (keep === "yours") editRow(address, clash.row, { [clash.field]: clash.yours });
+  else holdPlan(address, (held) => withFields(held, clash.row, { [clash.field]: clash.theirs }));
+  void queryClient.invalidateQueries({ queryKey: kitKeys.plan(address.kit) });
+}
+
+/** Sends everything that waits, now: the page is being left, or the connection came back. */
+export function sendAll(): void {
+  saving.change((now) => ({ ...now, lostAt: null }));
+  for (const line of lines.values()) {
+    clearTimeout(line.timer);
+    void sendNext(line);
+  }
+}
+
+/** Sends what waits when the page is left or the connection comes back. Called once by the island that edits. */
+export function watchPage(page: Window): () => void {
+  const hide = () => page.document.visibilityState === "hidden" && sendAll();
+  const leave = (event: BeforeUnloadEvent) => {
+    if (saving.now().lostAt !== null && saving.now().waiting > 0) event.preventDefault();
+  };
+  page.addEventListener("online", sendAll);
+  page.addEventListener("pagehide", sendAll);
+  page.addEventListener("beforeunload", leave);
+  page.document.addEventListener("visibilitychange", hide);
+  return () => {
+    page.removeEventListener("online", sendAll);
+    page.removeEventListener("pagehide", sendAll);
+    page.removeEventListener("beforeunload", leave);
+    page.document.removeEventListener("visibilitychange", hide);
+  };
+}

@@ -1,0 +1,28 @@
+import { moduleStore } from "./module-store.ts";
+import type { PlanRow } from "./plan-rows.ts";
+
+/** Two people changed the same field: both values, until one is chosen. */
+export interface Clash {
+  row: PlanRow;
+  field: string;
+  yours: unknown;
+  theirs: unknown;
+  by: string | null;
+  /** Milliseconds since 1970. */
+  at: number | null;
+}
+
+export interface Saving {
+  /** Edits that have not reached the server. */
+  waiting: number;
+  /** When the last edit was saved, in milliseconds since 1970; null before the first. */
+  savedAt: number | null;
+  /** Since when there is no connection. */
+  lostAt: number | null;
+  clashes: readonly Clash[];
+}
+
+export const NOTHING_SAVED: Saving = { waiting: 0, savedAt: null, lostAt: null, clashes: [] };
+
+/** How saving stands, for the header, the banner and the boxes that show a clash. */
+export const saving = moduleStore<Saving>(NOTHING_SAVED);
