@@ -89,4 +89,6 @@ export const UPLOAD_BYTES = 5 * 1024 * 1024;
 export const UPLOAD_ROWS = 20_000;
 export const UPLOAD_COLUMNS = 200;
 export const JSON_BYTES = 256 * 1024;
+/** A change of a long parts list at once, such as a pasted block. */
+export const LIST_CHANGE_BYTES = 4 * 1024 * 1024;
 export const PLAN_BYTES = 8 * 1024 * 1024;

@@ -162,7 +162,7 @@ export const Plan = z.strictObject({
     needed: z.boolean(),
     yield: Share,
     confidence: RateBelowOne,
-    quotes: z.array(PlanBoardQuote).max(50),
+    quotes: z.array(PlanBoardQuote).max(limits.BOARD_QUOTES_MOST),
     /** `null`: the cheapest at this run size. */
     chosenQuote: Id.nullable(),
   }),

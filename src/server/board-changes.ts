@@ -1,0 +1,126 @@
+import type { z } from "zod";
+import {
+  type BoardChoiceChange,
+  BoardQuote,
+  type BoardQuoteChange,
+  type BoardQuoteFields,
+} from "#src/shapes/board-quote.ts";
+import { BOARD_QUOTES_MOST } from "#src/shapes/limits.ts";
+import { beforeAndAfter } from "./before-and-after.ts";
+import { checked } from "./checked.ts";
+import { newId } from "./new-id.ts";
+import { type Changing as ChangingSomewhere, clash, noteChange } from "./note-change.ts";
+import { Problem, wrongField } from "./problem.ts";
+import {
+  addBoardQuote as addRow,
+  type BoardQuoteRow,
+  boardQuoteOf,
+  boardQuotesOf,
+  changeBoardQuote as changeRow,
+  type QuoteWithBreaks,
+  removeBoardQuote as removeRow,
+} from "./store/board-quote.ts";
+import type { KitRow } from "./store/kit.ts";
+import { changeRunPlan, type RunPlanRow, runPlanOf } from "./store/run-plan.ts";
+import { inTransaction } from "./transaction.ts";
+
+type Changing = ChangingSomewhere & { kit: KitRow };
+
+/** A quote as people see it, with its lots or breaks. */
+export type BoardQuoteView = Omit<BoardQuoteRow, "workshopId" | "kitId"> & {
+  breaks: { quantity: number; price: string }[];
+};
+
+/** How the kit orders its boards; the version is the run plan's. */
+export type BoardChoiceView = Pick<
+  RunPlanRow,
+  "chosenQuoteId" | "boardYield" | "boardConfidence" | "version"
+>;
+
+/** All that the Boards page of a kit is made of. */
+export interface BoardsView {
+  choice: BoardChoiceView;
+  quotes: BoardQuoteView[];
+}
+
+function view({ quote: { workshopId: _, kitId: __, ...row }, breaks }: QuoteWithBreaks): BoardQuoteView {
+  return { ...row, breaks };
+}
+
+function choiceOf(row: RunPlanRow): BoardChoiceView {
+  const { chosenQuoteId, boardYield, boardConfidence, version } = row;
+  return { chosenQuoteId, boardYield, boardConfidence, version };
+}
+
+/** The kit's quotes and how it orders its boards. */
+export function boards({ db, kit }: Changing): BoardsView {
+  return { choice: choiceOf(runPlanOf(db, kit.id)), quotes: boardQuotesOf(db, kit.id).map(view) };
+}
+
+function found({ db, kit }: Changing, quoteId: string): BoardQuoteView {
+  const row = boardQuoteOf(db, kit.id, quoteId);
+  if (!row) throw new Problem("not-found");
+  return view(row);
+}
+
+/** Adds a board house's quote for the kit's board. */
+export function addQuote(given: Changing, input: BoardQuoteFields): BoardQuoteView {
+  const { db, workshop, kit } = given;
+  const { breaks, ...fields } = checked(BoardQuote, input);
+  return inTransaction(db, () => {
+    if (boardQuotesOf(db, kit.id).length >= BOARD_QUOTES_MOST)
+      throw wrongField("", `A kit has at most ${BOARD_QUOTES_MOST} quotes. Remove one first.`);
+    const row = addRow(db, { id: newId(), workshopId: workshop.id, kitId: kit.id, ...fields }, breaks);
+    noteChange(given, { action: "quote.add", subjectId: row.id, subjectName: row.boardHouse });
+    return found(given, row.id);
+  });
+}
+
+/** Changes fields of a quote; together with those that stay they must make sense. */
+export function changeQuote(
+  given: Changing,
+  quoteId: string,
+  { version, ...changed }: z.infer<typeof BoardQuoteChange>,
+): BoardQuoteView {
+  return inTransaction(given.db, () => {
+    const before = found(given, quoteId);
+    if (before.version !== version) throw clash(given, quoteId, before);
+    const { id: _, version: __, ...stays } = before;
+    const { breaks, ...fields } = checked(BoardQuote, { ...stays, ...changed });
+    if (!changeRow(given.db, quoteId, version, fields, breaks)) throw clash(given, quoteId, before);
+    const detail = beforeAndAfter(stays, { ...fields, breaks });
+    noteChange(given, { action: "quote.change", subjectId: quoteId, subjectName: before.boardHouse, detail });
+    return found(given, quoteId);
+  });
+}
+
+/** Removes a quote; a kit that had chosen it takes the cheapest again. */
+export function removeQuote(given: Changing, quoteId: string, version: number): void {
+  const { db, kit } = given;
+  inTransaction(db, () => {
+    const before = found(given, quoteId);
+    if (!removeRow(db, quoteId, version)) throw clash(given, quoteId, before);
+    const run = runPlanOf(db, kit.id);
+    if (run.chosenQuoteId === quoteId) changeRunPlan(db, kit.id, run.version, { chosenQuoteId: null });
+    noteChange(given, { action: "quote.remove", subjectId: quoteId, subjectName: before.boardHouse });
+  });
+}
+
+/** Chooses a quote, or the cheapest at the run, and says what share of the boards is good. */
+export function changeChoice(
+  given: Changing,
+  { version, ...change }: z.infer<typeof BoardChoiceChange>,
+): BoardChoiceView {
+  const { db, kit } = given;
+  return inTransaction(db, () => {
+    const { chosenQuoteId } = change;
+    if (chosenQuoteId && !boardQuoteOf(db, kit.id, chosenQuoteId))
+      throw wrongField("chosenQuoteId", "This kit has no such quote.");
+    const before = choiceOf(runPlanOf(db, kit.id));
+    const after = changeRunPlan(db, kit.id, version, change);
+    if (!after) throw clash(given, kit.id, before);
+    const detail = beforeAndAfter(before, change);
+    noteChange(given, { action: "boards.change", subjectId: kit.id, subjectName: kit.name, detail });
+    return choiceOf(after);
+  });
+}
