@@ -4,11 +4,14 @@ import { planOf } from "./plan.ts";
 import { editionsOf } from "./store/edition.ts";
 import type { KitRow } from "./store/kit.ts";
 import type { WorkshopRow } from "./store/membership.ts";
+import { partChoicesOf } from "./store/part.ts";
 import { chargesOf, packingItemsOf, runPlanOf, tasksOf } from "./store/run-plan.ts";
 
 /** A kit's plan for its page, with the version of every row a person can change there. */
 export interface KitPlan {
   plan: Plan;
+  /** The run's spare rate, and the parts that have one of their own. */
+  spare: { rate: string; own: string[] };
   versions: {
     /** Of the run plan itself, sale terms included. */
     run: number;
@@ -26,10 +29,13 @@ export function kitPlan(db: Db, workshop: WorkshopRow, kit: KitRow, asOf: string
     ...packingItemsOf(db, kit.id),
     ...chargesOf(db, kit.id),
   ];
+  const run = runPlanOf(db, kit.id);
+  const own = partChoicesOf(db, kit.id).filter(({ spareRate }) => spareRate !== null);
   return {
     plan: planOf(db, workshop, kit, asOf),
+    spare: { rate: run.spareRate, own: own.map(({ partId }) => partId) },
     versions: {
-      run: runPlanOf(db, kit.id).version,
+      run: run.version,
       workshop: workshop.version,
       rows: Object.fromEntries(rows.map(({ id, version }) => [id, version])),
     },

@@ -150,8 +150,8 @@ export function addressOf(row: PlanRow): { of: "kit" | "workshop"; path: string 
 
 /** What carries the version of a row: two rows with the same holder are saved one after the other. */
 export function holderOf(row: PlanRow): string {
-  if (row.kind === "run" || row.kind === "sale") return "run";
-  return row.kind === "hour-rate" ? "workshop" : row.id;
+  if ("id" in row) return row.id;
+  return row.kind === "hour-rate" ? "workshop" : "run";
 }
 
 export function versionOf(versions: KitPlan["versions"], holder: string): number {

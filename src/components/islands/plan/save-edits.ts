@@ -26,6 +26,8 @@ interface Line {
   holder: string;
   waiting: PendingEdit[];
   sent: PendingEdit | null;
+  /** The request that is under way, or the last one. */
+  flight: Promise<void>;
   timer: ReturnType<typeof setTimeout> | undefined;
 }
 
@@ -35,7 +37,14 @@ function lineOf(address: KitAddress, holder: string): Line {
   const key = `${address.kit} ${holder}`;
   const found = lines.get(key);
   if (found) return found;
-  const line: Line = { address, holder, waiting: [], sent: null, timer: undefined };
+  const line: Line = {
+    address,
+    holder,
+    waiting: [],
+    sent: null,
+    flight: Promise.resolve(),
+    timer: undefined,
+  };
   lines.set(key, line);
   return line;
 }
@@ -77,15 +86,20 @@ export function editRow(address: KitAddress, row: PlanRow, fields: Fields): void
   line.waiting = withEdit(line.waiting, { row, fields, base });
   countWaiting();
   clearTimeout(line.timer);
-  line.timer = setTimeout(() => void sendNext(line), QUIET_MS);
+  line.timer = setTimeout(() => sendNext(line), QUIET_MS);
 }
 
-async function sendNext(line: Line): Promise<void> {
+/** Sends the next edit of a line, and when it has arrived the one after; nothing while one is under way. */
+function sendNext(line: Line): void {
   const held = heldPlan(line.address);
   const next = line.waiting[0];
   if (line.sent || !next || !held) return;
   line.sent = next;
   line.waiting = line.waiting.slice(1);
+  line.flight = send(line, next, held);
+}
+
+async function send(line: Line, next: PendingEdit, held: KitPlan): Promise<void> {
   const { of, path } = addressOf(next.row);
   const base = of === "kit" ? kitApi(line.address) : `/api/workshops/${line.address.workshop}`;
   const body = { ...next.fields, version: versionOf(held.versions, line.holder) };
@@ -104,7 +118,15 @@ async function sendNext(line: Line): Promise<void> {
   } finally {
     countWaiting();
   }
-  if (line.waiting.length > 0 && saving.now().lostAt === null) await sendNext(line);
+  if (line.waiting.length > 0 && saving.now().lostAt === null) sendNext(line);
+}
+
+/** Waits until a row has no edit left to send, so that its version is the server's. */
+export async function settledRow(address: KitAddress, row: PlanRow): Promise<void> {
+  const line = lineOf(address, holderOf(row));
+  clearTimeout(line.timer);
+  sendNext(line);
+  while (line.sent) await line.flight;
 }
 
 function failed(line: Line, edit: PendingEdit, { problem }: CallFailed): void {
@@ -147,7 +169,7 @@ export function sendAll(): void {
   saving.change((now) => ({ ...now, lostAt: null }));
   for (const line of lines.values()) {
     clearTimeout(line.timer);
-    void sendNext(line);
+    sendNext(line);
   }
 }
 
