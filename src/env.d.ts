@@ -9,6 +9,9 @@ declare namespace App {
     workshop: import("#src/server/store/membership.ts").WorkshopRow;
     role: import("#src/shapes/limits.ts").Role;
     kit: import("#src/server/store/kit.ts").KitRow;
+    head: import("#src/server/page-head.ts").PageHead;
+    /** Why a page could not be shown, for the page that says so. */
+    problem: import("#src/server/problem.ts").ProblemBody | undefined;
     /** For style elements that a library adds in the browser. */
     styleNonce: string;
   }

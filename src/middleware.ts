@@ -1,8 +1,9 @@
+import { defineMiddleware } from "astro:middleware";
 import { randomBytes } from "node:crypto";
 import type { APIContext } from "astro";
-import { defineMiddleware } from "astro:middleware";
 import { now } from "./server/clock.ts";
 import { serverDb } from "./server/db.ts";
+import { pageHead } from "./server/page-head.ts";
 import { Problem, problemReply } from "./server/problem.ts";
 import { placeOf } from "./server/route.ts";
 import { addSecurityHeaders, contentSecurityPolicy } from "./server/security-headers.ts";
@@ -25,16 +26,24 @@ function enter(context: APIContext): Response | undefined {
   if (!locals.user) return toSignIn(context);
   const place = placeOf(db, locals.user, params.workshop, params.kit);
   Object.assign(locals, place);
+  locals.head = pageHead(db, locals.user, place.workshop, place.role, place.kit);
   return undefined;
+}
+
+/** A page that cannot be shown says why, with the problem's own status. */
+async function refusal(context: APIContext, problem: Problem): Promise<Response> {
+  context.locals.problem = problem.body();
+  const { status } = context.locals.problem;
+  const shown = await context.rewrite(status === 404 ? "/404" : "/refused");
+  return new Response(shown.body, { status, headers: shown.headers });
 }
 
 async function page(context: APIContext, next: () => Promise<Response>): Promise<Response> {
   try {
     return enter(context) ?? (await next());
   } catch (error) {
-    if (!(error instanceof Problem) || error.body().status !== 404) throw error;
-    const missing = await context.rewrite("/404");
-    return new Response(missing.body, { status: 404, headers: missing.headers });
+    if (error instanceof Problem) return refusal(context, error);
+    throw error;
   }
 }
 
@@ -52,10 +61,7 @@ export const onRequest = defineMiddleware(async (context, next) => {
   const response = context.url.pathname.startsWith("/api/") ? await api(next) : await page(context, next);
   const policy = response.headers.get("content-security-policy");
   if (policy)
-    response.headers.set(
-      "content-security-policy",
-      contentSecurityPolicy(policy, context.locals.styleNonce),
-    );
+    response.headers.set("content-security-policy", contentSecurityPolicy(policy, context.locals.styleNonce));
   addSecurityHeaders(response.headers);
   return response;
 });
