@@ -5,7 +5,7 @@ import { beforeAndAfter } from "./before-and-after.ts";
 import { checked } from "./checked.ts";
 import { newId } from "./new-id.ts";
 import { type Changing, clash, noteChange } from "./note-change.ts";
-import { Problem, wrongField } from "./problem.ts";
+import { type FieldError, Problem, wrongField } from "./problem.ts";
 import {
   addOffer as addRow,
   changeOffer as changeRow,
@@ -143,19 +143,37 @@ export interface BatchView {
   added: OfferView[];
 }
 
+/** Does every step, gathering what is wrong with each, so that a pasted block is answered once. */
+function gatherErrors<T>(steps: (() => T)[], errors: FieldError[]): T[] {
+  return steps.flatMap((step) => {
+    try {
+      return [step()];
+    } catch (error) {
+      if (!(error instanceof Problem) || error.code !== "wrong-input") throw error;
+      errors.push(...(error.details.errors ?? []));
+      return [];
+    }
+  });
+}
+
 /** Many changes of offers, all of them or none; what is wrong is named by its place in the batch. */
 export function changeOffers(given: Changing, batch: OfferBatch): BatchView {
   const { db, workshop } = given;
+  const changes = (batch.change ?? []).map(
+    ({ id, ...fields }, place) =>
+      () =>
+        change(given, id, fields, `change.${place}`),
+  );
+  const additions = (batch.add ?? []).map(({ partId, ...fields }, place) => () => {
+    if (partOf(db, workshop.id, partId)) return addTo(given, partId, fields, `add.${place}`);
+    throw wrongField(`add.${place}.partId`, "This workshop has no such part.");
+  });
   return inTransaction(db, () => {
+    const errors: FieldError[] = [];
     for (const { id, version } of batch.remove ?? []) remove(given, id, version);
-    const changed = (batch.change ?? []).map(({ id, ...fields }, place) =>
-      change(given, id, fields, `change.${place}`),
-    );
-    const added = (batch.add ?? []).map(({ partId, ...fields }, place) => {
-      if (!partOf(db, workshop.id, partId))
-        throw wrongField(`add.${place}.partId`, "This workshop has no such part.");
-      return addTo(given, partId, fields, `add.${place}`);
-    });
+    const changed = gatherErrors(changes, errors);
+    const added = gatherErrors(additions, errors);
+    if (errors.length > 0) throw new Problem("wrong-input", { errors });
     return { changed, added };
   });
 }

@@ -27,7 +27,7 @@ export const Rate = z
 /** A conversion rate: reporting units per one foreign unit; more than nothing. */
 export const ConversionRate = z
   .string()
-  .regex(/^\d{1,9}(\.\d{1,10})?$/)
+  .regex(/^\d{1,9}(\.\d{1,10})?$/, "Write a rate such as 0.92: digits with a point, at most 10 decimals.")
   .refine((text) => /[1-9]/.test(text), "A conversion rate is more than 0.");
 
 /** Three letters of ISO 4217. */
@@ -36,4 +36,4 @@ export const CurrencyCode = z
   .regex(/^[A-Z]{3}$/, "Write the three letters of the currency, such as EUR.");
 
 /** A calendar day, ISO 8601: `"2026-03-09"`. */
-export const Day = z.iso.date();
+export const Day = z.iso.date("Write a day of the calendar, such as 2026-03-09.");

@@ -18,14 +18,18 @@ export const ShortText = z
 
 export const Note = z.string().max(limits.TEXT_LENGTH, `Write at most ${limits.TEXT_LENGTH} characters.`);
 
-/** A number of pieces, none counted as 0. */
-export const Pieces = z
-  .int("Write a whole number.")
-  .min(0, "A number of pieces is not negative.")
-  .max(limits.QUANTITY_MOST, "Write at most 1 000 000 000.");
+function pieces(least: number, sentence: string) {
+  return z
+    .int("Write a whole number.")
+    .min(least, sentence)
+    .max(limits.QUANTITY_MOST, "Write at most 1 000 000 000.");
+}
+
+/** A number of pieces; there may be none. */
+export const Pieces = pieces(0, "A number of pieces is not negative.");
 
 /** A number of pieces that is ordered or counted in: at least one. */
-export const Quantity = Pieces.min(1, "Write a whole number of at least 1.");
+export const Quantity = pieces(1, "Write a whole number of at least 1.");
 
 /** Days from the order to the parcel. */
 export const LeadTimeDays = z
