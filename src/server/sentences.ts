@@ -140,6 +140,57 @@ export const SENTENCES = {
     title: "That {provider} account belongs to somebody else here.",
     detail: "Sign in with it to see whose it is.",
   },
+  "upload-empty": {
+    status: 422,
+    title: "{name} holds no rows.",
+    detail: "Choose a list with at least one row that is not blank.",
+  },
+  "upload-not-text": {
+    status: 415,
+    title: "{name} is {kind}, not a list in plain text.",
+    detail:
+      "Save it as CSV in the program that made it and bring in that file, or copy the cells and paste them.",
+  },
+  "upload-too-long": {
+    status: 413,
+    title: "{name} has {found} {what}; at most {most} can be read.",
+    detail: "Leave out what is no part of the list, or bring it in as several files.",
+  },
+  "no-draft-any-more": {
+    status: 409,
+    title: "This list is no draft any more: it was {state}.",
+    detail: "Look at the list of what was brought in.",
+  },
+  "rows-to-settle": {
+    status: 409,
+    title: "Some rows must be settled before the list is brought in.",
+    detail: "Settle rows {rows}. Nothing was changed.",
+  },
+  "difference-changed": {
+    status: 409,
+    title: "Somebody changed what this list is compared with.",
+    detail: "Nothing was brought in. Look at the difference as it is now, then bring the list in.",
+  },
+  "nothing-to-bring-in": {
+    status: 409,
+    title: "There is nothing to bring in.",
+    detail: "Everything in this list stands so already.",
+  },
+  "too-many-lines": {
+    status: 422,
+    title: "This list has {lines} lines; a kit holds at most {most}.",
+    detail: "Leave rows out, or join equal lines.",
+  },
+  "later-list-first": {
+    status: 409,
+    title: "{name} was brought in after this list.",
+    detail: "Take that one back first; then this one can be taken back.",
+  },
+  "changed-since-taken": {
+    status: 409,
+    title: "Some of what this list brought in was changed since.",
+    detail: "Leave everything as it is, or take the list back all the same: then these later changes go too.",
+  },
   "our-mistake": {
     status: 500,
     title: "Tinpenny made a mistake here.",
