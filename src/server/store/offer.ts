@@ -76,6 +76,16 @@ export function offersOfPartCount(db: Db, partId: string): number {
   return db.select({ offers: count() }).from(offers).where(eq(offers.partId, partId)).get()?.offers ?? 0;
 }
 
+/** Ids of the parts of a workshop that anybody offers. */
+export function offeredPartIds(db: Db, workshopId: string): Set<string> {
+  const rows = db
+    .selectDistinct({ partId: offers.partId })
+    .from(offers)
+    .where(eq(offers.workshopId, workshopId))
+    .all();
+  return new Set(rows.map((row) => row.partId));
+}
+
 function setBreaks(db: Db, offer: OfferRow, breaks: OfferWithBreaks["breaks"]): void {
   db.delete(offerBreaks).where(eq(offerBreaks.offerId, offer.id)).run();
   const rows = breaks.map(({ quantity, price }) => ({

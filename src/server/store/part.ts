@@ -25,6 +25,16 @@ export function partsUsedElsewhere(db: Db, workshopId: string, kitId: string): S
   return new Set(rows.map((row) => row.partId));
 }
 
+/** Ids of the parts of a workshop that any kit's list uses. */
+export function partIdsInUse(db: Db, workshopId: string): Set<string> {
+  const rows = db
+    .selectDistinct({ partId: lines.partId })
+    .from(lines)
+    .where(eq(lines.workshopId, workshopId))
+    .all();
+  return new Set(rows.map((row) => row.partId));
+}
+
 /** For each part that other kits use too: those kits' names. */
 export function otherKitsByPart(db: Db, workshopId: string, kitId: string): Map<string, string[]> {
   const rows = db
