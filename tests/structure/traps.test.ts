@@ -28,7 +28,7 @@ test("every grid carries the style nonce, without which it is unstyled", () => {
 
 test("data, builds and pictures stay out of version control", () => {
   const ignored = readFileSync(".gitignore", "utf8").split("\n");
-  for (const folder of ["data/", "dist/", "screens/", "node_modules/"]) expect(ignored).toContain(folder);
+  for (const folder of ["/data/", "/dist/", "/screens/", "node_modules/"]) expect(ignored).toContain(folder);
 });
 
 test("nothing names a package registry's host or a path of one machine", () => {
