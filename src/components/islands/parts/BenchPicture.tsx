@@ -39,6 +39,8 @@ const RIGHT: BandColour[][] = [
 ];
 const ROWS = [64, 71, 78, 85, 92, 99];
 
+const CENTIMETRES = Array.from({ length: 27 }, (_, cm) => cm);
+
 /** Moves a drawing to its place on the bench, in millimetres. */
 function at(x: number, y: number): string {
   return `translate(${x} ${y})`;
@@ -150,8 +152,7 @@ function Rule() {
         strokeWidth={0.2}
         className="stroke-ink"
       />
-      {Array.from({ length: 27 }, (_, cm) => (
-        // biome-ignore lint/suspicious/noArrayIndexKey: a figure is its place on the rule.
+      {CENTIMETRES.map((cm) => (
         <text
           key={cm}
           x={6 + cm * 10}

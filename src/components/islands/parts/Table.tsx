@@ -86,7 +86,7 @@ function BodyCell<Row>({ column, row, held }: { column: Column<Row>; row: Row; h
   const look = `${CELL} ${column.number ? NUMBER : ""} ${alignment(column)}`;
   if (!column.names) return <td className={look}>{column.cell(row)}</td>;
   return (
-    <th scope="row" className={`${look} font-semibold ${held ? "sticky left-0 bg-paper" : ""}`}>
+    <th scope="row" className={`${look} font-normal ${held ? "sticky left-0 bg-paper" : ""}`}>
       {column.cell(row)}
     </th>
   );
