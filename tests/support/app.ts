@@ -10,6 +10,9 @@ import { memberships, workshops } from "#db/schema/workshops.ts";
 import { setClock } from "#src/server/clock.ts";
 import { type Config, config, readConfig, setConfig } from "#src/server/config.ts";
 import { setDb } from "#src/server/db.ts";
+import { laterDone } from "#src/server/later.ts";
+import type { Letter } from "#src/server/letters/letter.ts";
+import { setMailer } from "#src/server/mail.ts";
 import { newId } from "#src/server/new-id.ts";
 import type { ProblemBody } from "#src/server/problem.ts";
 import type { Route } from "#src/server/route.ts";
@@ -118,6 +121,8 @@ export interface App {
   readonly now: number;
   /** Lets time pass, in milliseconds. */
   pass(milliseconds: number): void;
+  /** The letters that went out, once nothing is left to do. */
+  letters(): Promise<Letter[]>;
   /** Changes settings for this test. */
   settings(changed: Partial<Config>): void;
   workshop(over?: Partial<WorkshopRow>): WorkshopRow;
@@ -137,14 +142,21 @@ interface Ground {
   now: number;
   folder: string;
   made: number;
+  letters: Letter[];
+}
+
+/** The secret of the link in a letter. */
+export function tokenIn(letter: Letter | undefined): string {
+  return /token=(\w+)/.exec(letter?.text ?? "")?.[1] ?? "";
 }
 
 function newGround(): Ground {
   const folder = mkdtempSync(joinPath(tmpdir(), "tinpenny-test-"));
-  const ground = { db: freshDb(), now: START, folder, made: 0 };
+  const ground: Ground = { db: freshDb(), now: START, folder, made: 0, letters: [] };
   setDb(ground.db);
   setConfig(readConfig({ TINPENNY_DATA: folder }));
   setClock(() => ground.now);
+  setMailer(async (letter) => void ground.letters.push(letter));
   return ground;
 }
 
@@ -158,6 +170,10 @@ function builders(ground: () => Ground): App {
     },
     pass(milliseconds) {
       ground().now += milliseconds;
+    },
+    async letters() {
+      await laterDone();
+      return ground().letters;
     },
     settings(changed) {
       setConfig({ ...config(), ...changed });
@@ -200,19 +216,21 @@ function builders(ground: () => Ground): App {
 
 /**
  * The ground every test of the server stands on: before each test a fresh database, a clock that stands at
- * `START`, and a data folder of its own. Called once, at the top of a file of tests.
+ * `START`, a data folder of its own, and letters that are only collected. Called once, at the top of a file of tests.
  */
 export function testApp(): App {
   let ground: Ground | undefined;
   beforeEach(() => {
     ground = newGround();
   });
-  afterEach(() => {
+  afterEach(async () => {
     if (!ground) return;
+    await laterDone();
     ground.db.$client.close();
     rmSync(ground.folder, { recursive: true, force: true });
     setConfig();
     setClock();
+    setMailer();
     ground = undefined;
   });
   return builders(() => {

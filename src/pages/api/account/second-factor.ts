@@ -1,0 +1,15 @@
+import { beginSecondFactor, confirmSecondFactor } from "#src/server/own-second-factor.ts";
+import { route } from "#src/server/route.ts";
+import { FirstCode, MadeSure } from "#src/shapes/account.ts";
+
+export const POST = route({
+  may: "in-person",
+  input: MadeSure,
+  run: ({ input, ...given }) => beginSecondFactor(given, input.password),
+});
+
+export const PUT = route({
+  may: "in-person",
+  input: FirstCode,
+  run: ({ input, ...given }) => confirmSecondFactor(given, input.code),
+});

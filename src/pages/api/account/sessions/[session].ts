@@ -1,0 +1,7 @@
+import { endOwnSession } from "#src/server/account.ts";
+import { route } from "#src/server/route.ts";
+
+export const DELETE = route({
+  may: "in-person",
+  run: ({ params, ...given }) => endOwnSession({ params, ...given }, params.session ?? ""),
+});
