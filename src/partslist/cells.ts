@@ -162,7 +162,7 @@ function number(grid: Grid): SheetRecord[] {
  * CSV grammar: RFC 4180, section 2, by PapaParse.
  */
 export function readCells(text: string): Sheet {
-  const clean = oneLineEnd(unwrapLines(text.replace(/^\uFEFF/, "").replace(/\u0000/g, ""))).replace(
+  const clean = oneLineEnd(unwrapLines(text.replace(/^\uFEFF/, "").replaceAll("\u0000", ""))).replace(
     /(?:\r\n|\n|\r)$/,
     "",
   );

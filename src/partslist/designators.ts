@@ -83,37 +83,42 @@ interface Reader {
   prefix: string;
 }
 
-function take(reader: Reader, names: string[], numbered: boolean): void {
-  for (const name of names) reader.read.designators.push(name);
-  if (numbered) reader.read.numbered += names.length;
+/** The names a token stands for, or `null` for a word that is no designator. */
+function namesOf(reader: Reader, token: string): { names: string[]; numbered: boolean } | null {
+  const numbered = NUMBERED.exec(token);
+  if (numbered) {
+    reader.prefix = token.slice(0, token.length - (numbered[2] ?? "").length - (numbered[3] ?? "").length);
+    return { names: [token], numbered: true };
+  }
+  const range = expandRange(token);
+  if (range) {
+    reader.prefix = /^\D+/.exec(token)?.[0] ?? "";
+    return { names: range, numbered: true };
+  }
+  const carried = reader.prefix === "" ? null : carriedNames(reader.prefix, token);
+  if (carried) return carried;
+  return NAME.test(token) && !WORD.test(token) ? { names: [token], numbered: false } : null;
+}
+
+/** Members of "C1,3,6-8" and "LED1,2,pwr" that leave the letters out. */
+function carriedNames(prefix: string, token: string): { names: string[]; numbered: boolean } | null {
+  if (/^\d{1,5}[A-Za-z]?$/.test(token)) return { names: [prefix + token], numbered: true };
+  const range = /^\d{1,5}-\d{1,5}$/.test(token) ? expandRange(prefix + token) : null;
+  if (range) return { names: range, numbered: true };
+  return /^[a-z]{2,5}$/.test(token) ? { names: [prefix + token], numbered: false } : null;
 }
 
 function readToken(reader: Reader, raw: string): void {
-  const token = raw.replace(/^["'([{]+|[\])}"'.:]+$/g, "");
-  const plain = /^[A-Za-z_]+\d+[A-Za-z]?\*$/.test(token) ? token.slice(0, -1) : token;
-  const numbered = NUMBERED.exec(plain);
-  if (numbered) {
-    reader.prefix = plain.slice(0, plain.length - (numbered[2] ?? "").length - (numbered[3] ?? "").length);
-    return take(reader, [plain], true);
+  const bare = raw.replace(/^["'([{]+|[\])}"'.:]+$/g, "");
+  const token = /^[A-Za-z_]+\d+[A-Za-z]?\*$/.test(bare) ? bare.slice(0, -1) : bare;
+  if (CONJUNCTION.test(token)) return;
+  const found = namesOf(reader, token);
+  if (found) {
+    for (const name of found.names) reader.read.designators.push(name);
+    if (found.numbered) reader.read.numbered += found.names.length;
   }
-  const range = expandRange(plain);
-  if (range) {
-    reader.prefix = /^\D+/.exec(plain)?.[0] ?? "";
-    return take(reader, range, true);
-  }
-  if (reader.prefix !== "" && /^\d{1,5}[A-Za-z]?$/.test(plain))
-    return take(reader, [reader.prefix + plain], true);
-  if (reader.prefix !== "" && /^\d{1,5}-\d{1,5}$/.test(plain)) {
-    const carried = expandRange(reader.prefix + plain);
-    if (carried) return take(reader, carried, true);
-  }
-  if (reader.prefix !== "" && /^[a-z]{2,5}$/.test(plain) && !CONJUNCTION.test(plain)) {
+  if ((!found && /[\p{L}\d]/u.test(token)) || (reader.prefix !== "" && /^[a-z]{2,5}$/.test(token)))
     reader.read.unclear.push(raw);
-    return take(reader, [reader.prefix + plain], false);
-  }
-  if (CONJUNCTION.test(plain)) return;
-  if (NAME.test(plain) && !WORD.test(plain)) return take(reader, [plain], false);
-  if (/[\p{L}\d]/u.test(token)) reader.read.unclear.push(raw);
 }
 
 /**

@@ -10,7 +10,6 @@ export const QUESTION_CODES = [
   "designator-unclear",
   "price-unclear",
   "value-without-unit",
-  "value-hint",
   "spaces-only-difference",
   "looks-like-total",
   "looks-like-remark",
@@ -24,6 +23,5 @@ export const QUESTION_CODES = [
   "ladder-not-rising",
   "price-rises",
   "price-missing",
-  "currency-unknown",
 ] as const;
 export type QuestionCode = (typeof QUESTION_CODES)[number];

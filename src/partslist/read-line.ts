@@ -1,0 +1,233 @@
+import type { PartClass } from "#src/shapes/limits.ts";
+import { classFromColumn, guessClass } from "./classes.ts";
+import { readDesignators } from "./designators.ts";
+import type { DraftLine, PropertyName, ValueReading } from "./draft.ts";
+import { cellAt, type ListColumns, textAt } from "./list-columns.ts";
+import { maySayNotFitted, readDoNotPlace, readPlace, saysNotFitted, withoutMark } from "./marks.ts";
+import { preferredHint } from "./preferred-values.ts";
+import { recogniseProperties } from "./properties.ts";
+import { type ReadQuantity, readQuantity } from "./quantities.ts";
+import { type PriceProblem, readOffers } from "./read-offers.ts";
+import { findValue, guessBareCapacitance, readValue, valueKind } from "./values.ts";
+
+/** A line as read from its row, with what was doubtful on the way. */
+export interface ReadLine {
+  line: DraftLine;
+  quantity: ReadQuantity;
+  /** Pieces of the designator cell that could not be read. */
+  unclear: string[];
+  /** What a value without a unit is taken to be. */
+  bareValue: ValueReading | null;
+  /** A cell that may or may not mean "not fitted", and whether it stands in a column for that. */
+  maybeMark: { text: string; column: number; fromColumn: boolean } | null;
+  priceProblems: PriceProblem[];
+}
+
+interface Texts {
+  value: string | null;
+  description: string | null;
+  partNumber: string | null;
+  package: string | null;
+  kind: string | null;
+  note: string | null;
+}
+
+function joined(
+  cells: readonly string[],
+  columns: ListColumns,
+  meaning: "description" | "note",
+): string | null {
+  const texts = columns
+    .all(meaning)
+    .map((one) => textAt(cells, one.column))
+    .filter((text) => text !== null);
+  return texts.length === 0 ? null : [...new Set(texts)].join(", ");
+}
+
+function textsOf(cells: readonly string[], columns: ListColumns): Texts {
+  const text = (meaning: "value" | "part-number" | "package" | "class") =>
+    textAt(cells, columns.first(meaning));
+  return {
+    value: text("value"),
+    description: joined(cells, columns, "description"),
+    partNumber: text("part-number"),
+    package: text("package"),
+    kind: text("class"),
+    note: joined(cells, columns, "note"),
+  };
+}
+
+function classOf(texts: Texts, designators: readonly string[]): Pick<DraftLine, "class" | "classFrom"> {
+  const guess = guessClass(designators, [
+    texts.kind,
+    texts.description,
+    texts.value,
+    texts.package,
+    texts.partNumber,
+  ]);
+  const column = texts.kind === null ? null : classFromColumn(texts.kind);
+  if (column !== null && guess.from !== "designator") return { class: column, classFrom: "column" };
+  return { class: guess.class, classFrom: guess.from };
+}
+
+interface ReadPart {
+  value: string | null;
+  reading: ValueReading | null;
+  partNumber: string | null;
+  bareValue: ValueReading | null;
+}
+
+/** The value from its own column, else from the description, else from a part-number cell that is nothing but a value. */
+function valueOf(texts: Texts, partClass: PartClass, columns: ListColumns): ReadPart {
+  const column = columns.first("value");
+  const mark = column === null ? null : columns.mark(column);
+  const written = texts.value === null ? null : withoutMark(texts.value) || texts.value;
+  const own = written === null ? null : readValue(written, partClass, mark);
+  const { partNumber } = texts;
+  if (own !== null) return { value: written, reading: own, partNumber, bareValue: null };
+  const bare =
+    written === null || partClass !== "capacitor" ? null : guessBareCapacitance(firstWord(written));
+  if (bare) return { value: written, reading: null, partNumber, bareValue: bare };
+  if (written !== null && /\d/.test(written))
+    return { value: written, reading: null, partNumber, bareValue: null };
+  for (const text of [texts.description, texts.note === null ? null : texts.kind]) {
+    const found = text === null ? null : findValue(text, partClass);
+    if (found)
+      return { value: written ?? found.from.trim(), reading: found.reading, partNumber, bareValue: null };
+  }
+  const inNumber =
+    partNumber === null || !startsWithValue(partNumber) ? null : findValue(partNumber, partClass);
+  if (inNumber)
+    return { value: written ?? partNumber, reading: inNumber.reading, partNumber: null, bareValue: null };
+  return { value: written, reading: null, partNumber, bareValue: null };
+}
+
+function firstWord(text: string): string {
+  return /^\S+/.exec(text)?.[0] ?? text;
+}
+
+/** A part-number cell that holds "47R" or "470ohm PTH" instead of a part number. */
+function startsWithValue(text: string): boolean {
+  return /^~?\d+(?:[.,]\d+)?\s?(?:[kKMRΩnpuµμ]|[kKM]?ohms?)(?:\d{1,2})?(?:\s|$)/i.test(text);
+}
+
+function markOf(
+  cells: readonly string[],
+  columns: ListColumns,
+  texts: Texts,
+): Pick<DraftLine, "mark" | "markFrom"> & Pick<ReadLine, "maybeMark"> {
+  const notPlaced = columns.first("do-not-place");
+  const placed = columns.first("place");
+  const notPlacedText = cellAt(cells, notPlaced);
+  const placedText = cellAt(cells, placed);
+  if (readDoNotPlace(notPlacedText) === true)
+    return { mark: "do-not-place", markFrom: notPlacedText, maybeMark: null };
+  for (const text of [texts.value, texts.description, texts.note, texts.partNumber, texts.package])
+    if (text !== null && saysNotFitted(text))
+      return { mark: "do-not-place", markFrom: text, maybeMark: null };
+  if (placed !== null && readPlace(placedText) === false) {
+    if (/^place/i.test(columns.all("place")[0]?.heading ?? ""))
+      return {
+        mark: "in-kit",
+        markFrom: null,
+        maybeMark: { text: placedText, column: placed, fromColumn: true },
+      };
+    return { mark: "do-not-place", markFrom: placedText, maybeMark: null };
+  }
+  const value = columns.first("value");
+  const raw = cellAt(cells, value);
+  const maybe =
+    value !== null && raw !== "" && maySayNotFitted(raw)
+      ? { text: raw, column: value, fromColumn: false }
+      : null;
+  return { mark: "in-kit", markFrom: null, maybeMark: maybe };
+}
+
+function ownProperties(
+  cells: readonly string[],
+  columns: ListColumns,
+): Pick<DraftLine, "tolerance" | "power" | "voltage" | "holeSpacing"> {
+  return {
+    tolerance: textAt(cells, columns.first("tolerance")),
+    power: textAt(cells, columns.first("power")),
+    voltage: textAt(cells, columns.first("voltage")),
+    holeSpacing: textAt(cells, columns.first("hole-spacing")),
+  };
+}
+
+function knownProperties(own: ReturnType<typeof ownProperties>, texts: Texts): Set<PropertyName> {
+  const known = new Set<PropertyName>();
+  if (own.tolerance !== null) known.add("tolerance");
+  if (own.power !== null) known.add("power");
+  if (own.voltage !== null) known.add("voltage");
+  if (own.holeSpacing !== null) known.add("hole-spacing");
+  if (texts.package !== null && texts.package.length <= 10) known.add("package");
+  return known;
+}
+
+function quantityOf(
+  read: ReadQuantity,
+  designators: readonly string[],
+): Pick<DraftLine, "quantity" | "quantityFrom"> {
+  if (read.kind === "number") return { quantity: read.quantity, quantityFrom: "column" };
+  if (read.kind === "of-pack") return { quantity: read.quantity, quantityFrom: "column" };
+  if (designators.length > 0 && read.kind === "empty")
+    return { quantity: designators.length, quantityFrom: "designators" };
+  return { quantity: null, quantityFrom: "nothing" };
+}
+
+/** Reads one row that is a part. Cells that are empty stay "not known"; nothing is filled in from elsewhere. */
+export function readLine(cells: readonly string[], columns: ListColumns): ReadLine {
+  const texts = textsOf(cells, columns);
+  const designatorText = cellAt(cells, columns.first("designators"));
+  const { designators, unclear } = readDesignators(designatorText);
+  const quantityColumn = columns.first("quantity");
+  const quantity = readQuantity(
+    cellAt(cells, quantityColumn),
+    quantityColumn === null ? null : columns.mark(quantityColumn),
+  );
+  const kind = classOf(texts, designators);
+  const part = valueOf(texts, kind.class, columns);
+  const { maybeMark, ...mark } = markOf(cells, columns, texts);
+  const own = ownProperties(cells, columns);
+  const { offers, problems } = readOffers(cells, columns);
+  const recognised = recogniseProperties(
+    [texts.value, texts.description, texts.package, texts.note, texts.kind],
+    kind.class,
+    knownProperties(own, texts),
+  );
+  const line: DraftLine = {
+    designators,
+    designatorText,
+    ...quantityOf(quantity, designators),
+    ...kind,
+    value: part.value,
+    reading: part.reading,
+    preferredHint: part.reading !== null && hints(kind.class) ? preferredHint(part.reading.si) : null,
+    description: texts.description ?? leftOver(unclear, designators),
+    package: texts.package,
+    manufacturer: textAt(cells, columns.first("manufacturer")),
+    partNumber: part.partNumber,
+    offers,
+    ...mark,
+    drawer: textAt(cells, columns.first("drawer")),
+    note: texts.note,
+    datasheet: textAt(cells, columns.first("datasheet")),
+    ...own,
+    recognised,
+  };
+  return { line, quantity, unclear, bareValue: part.bareValue, maybeMark, priceProblems: problems };
+}
+
+/** Potentiometers and crystals keep to other rows of values. */
+function hints(partClass: PartClass): boolean {
+  return (
+    valueKind(partClass) !== null &&
+    (partClass === "resistor" || partClass === "capacitor" || partClass === "inductor")
+  );
+}
+
+/** Words in the designator cell of a row that says nothing else ("Cables") are its description. */
+function leftOver(unclear: readonly string[], designators: readonly string[]): string | null {
+  return designators.length === 0 && unclear.length > 0 ? unclear.join(" ") : null;
+}
