@@ -84,6 +84,8 @@ export const EMAIL_LENGTH = 254;
 export const PASSWORD_LEAST = 12;
 export const PASSWORD_MOST = 256;
 export const PASSWORD_DIFFERENT_LEAST = 5;
+export const TOKEN_DAYS_MOST = 366;
+export const TOKENS_MOST = 50;
 
 export const UPLOAD_BYTES = 5 * 1024 * 1024;
 export const UPLOAD_ROWS = 20_000;

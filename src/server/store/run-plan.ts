@@ -45,3 +45,8 @@ export function packingItemsOf(db: Db, kitId: string): PackingItemRow[] {
 export function chargesOf(db: Db, kitId: string): ChargeRow[] {
   return db.select().from(charges).where(eq(charges.kitId, kitId)).orderBy(asc(charges.position)).all();
 }
+
+/** A kit's run plan at the kit's first moment. */
+export function addRunPlan(db: Db, row: typeof runPlans.$inferInsert): void {
+  db.insert(runPlans).values(row).run();
+}
