@@ -86,6 +86,10 @@ export interface Route<I = unknown, R = unknown> {
   /** Whether a JSON body is read, for the test that lists every address. */
   input: z.ZodType | null;
   query: z.ZodType | null;
+  /** Whether the body is raw bytes. */
+  bytes: boolean;
+  /** Of a reply that succeeded. */
+  status: number;
   /** Only in types: what the browser sends and receives. */
   readonly types?: { input: I; reply: R };
 }
@@ -202,5 +206,7 @@ export function route<M extends May, R, I extends z.ZodType = z.ZodType, Q exten
     may: declared.may,
     input: declared.input ?? null,
     query: declared.query ?? null,
+    bytes: declared.bytes ?? false,
+    status: declared.status ?? 200,
   }) as unknown as Route<z.input<I>, Awaited<R>>;
 }
