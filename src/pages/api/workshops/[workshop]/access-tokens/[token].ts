@@ -1,0 +1,10 @@
+import { dropAccessToken } from "#src/server/own-access-tokens.ts";
+import { requireBrowser, route } from "#src/server/route.ts";
+
+export const DELETE = route({
+  may: "member",
+  run: (given) => {
+    requireBrowser(given.session);
+    dropAccessToken(given, given.params.token ?? "");
+  },
+});

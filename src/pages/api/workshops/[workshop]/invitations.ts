@@ -1,0 +1,15 @@
+import { invite, openInvitations } from "#src/server/invitations.ts";
+import { requireBrowser, route } from "#src/server/route.ts";
+import { NewInvitation } from "#src/shapes/invitation.ts";
+
+export const GET = route({ may: "manage-workshop", run: openInvitations });
+
+export const POST = route({
+  may: "manage-workshop",
+  input: NewInvitation,
+  status: 201,
+  run: ({ input, ...given }) => {
+    requireBrowser(given.session);
+    return invite(given, input);
+  },
+});
