@@ -1,0 +1,89 @@
+import type { SweepColumns, SweepResult } from "#src/costing/sweep-result.ts";
+
+/** Which of the two named views of cost a chart shows (section 8). */
+export type CostView = "used" | "spent";
+
+/** Run sizes a chart shows, both included. */
+export interface Span {
+  from: number;
+  to: number;
+}
+
+/** One run size. Floating-point numbers: only for pixels. */
+export interface CostPoint {
+  kits: number;
+  perKit: number | null;
+  total: number | null;
+  kept: number | null;
+  /** The next kit costs so much more that the line breaks after this one. */
+  breaksAfter: boolean;
+}
+
+/** A step in money larger than this breaks a line, if it is also far above what a usual next kit costs. */
+const STEP_MONEY = 40;
+const STEP_TIMES = 3;
+
+const pixels = (text: string | null | undefined) =>
+  text === null || text === undefined ? null : Number(text);
+
+function middle(values: readonly number[]): number {
+  const sorted = [...values].sort((one, other) => one - other);
+  return sorted[Math.floor(sorted.length / 2)] ?? 0;
+}
+
+/** The columns a chart draws: exact ones, or, where nothing is known exactly, those that leave out what is missing. */
+export function drawnColumns(sweep: SweepResult): { columns: SweepColumns; partial: boolean } {
+  const exact = sweep.columns.used.some((value) => value !== null);
+  return exact || !sweep.without
+    ? { columns: sweep.columns, partial: false }
+    : { columns: sweep.without, partial: true };
+}
+
+/** The points of a span, one for every whole number of kits. */
+export function costPoints(columns: SweepColumns, view: CostView, { from, to }: Span): CostPoint[] {
+  const totals = view === "used" ? columns.used : columns.spent;
+  const perKit = view === "used" ? columns.perKitUsed : columns.perKitSpent;
+  const sizes = Array.from({ length: Math.max(0, to - from + 1) }, (_, place) => from + place);
+  const points = sizes.map((kits) => ({
+    kits,
+    perKit: pixels(perKit[kits - 1]),
+    total: pixels(totals[kits - 1]),
+    kept: pixels(columns.kept[kits - 1]),
+  }));
+  const rises = points.map(({ total }, place) => {
+    const next = points[place + 1]?.total;
+    return total === null || next === null || next === undefined ? 0 : next - total;
+  });
+  const usual = Math.abs(middle(rises));
+  return points.map((point, place) => {
+    const rise = Math.abs(rises[place] ?? 0);
+    return { ...point, breaksAfter: rise > STEP_MONEY && rise > STEP_TIMES * usual };
+  });
+}
+
+/** From two fifths of the run to about twice the run: where the decision lies. */
+export function spanAround(run: number, end: number): Span {
+  const round = run >= 60 ? 10 : 5;
+  const from = Math.max(1, Math.floor((run * 0.4) / round) * round);
+  const to = Math.min(end, Math.max(Math.ceil((run * 2.1) / round) * round, run + 20));
+  return { from: Math.min(from, Math.max(1, to - 20)), to };
+}
+
+/** From a third of the first crossing to past the run and the last crossing. */
+export function spanOfCrossings(run: number, crossings: readonly number[], end: number): Span {
+  const first = Math.min(run, ...crossings);
+  const last = Math.max(run, ...crossings);
+  const to = Math.min(end, Math.max(Math.ceil((last * 1.25) / 10) * 10, 20));
+  return { from: Math.max(1, Math.floor((first * 0.35) / 10) * 10), to };
+}
+
+/**
+ * The money axis of unit costs. The smallest runs cost many times the usual kit; the axis stops at three times
+ * the cost at the run, and the line leaves at the top.
+ */
+export function unitCostTop(points: readonly CostPoint[], run: number, brings: number | null): number {
+  const known = points.flatMap(({ perKit }) => (perKit === null ? [] : [perKit]));
+  const atRun = points.find(({ kits }) => kits === run)?.perKit ?? middle(known);
+  const highest = Math.max(0, ...known);
+  return Math.max(Math.min(highest, atRun * 3), (brings ?? 0) * 1.08, atRun * 1.2);
+}
