@@ -12,7 +12,6 @@ export const NEED_CODES = [
   "no-rate",
   "no-freight",
   "no-board-quote",
-  "board-quote-too-small",
   "no-board-freight",
   "no-board-yield",
   "no-packing-cost",
@@ -20,15 +19,22 @@ export const NEED_CODES = [
   "no-replacement-cost",
   "no-stock-cost",
   "no-price",
+  "no-tax-rate",
+  "no-fee-rate",
+  "no-fixed-fee",
+  "no-postage-charged",
   "no-postage-paid",
   "no-work",
-  "not-within-sweep",
+  "not-in-run",
+  "nothing-made",
+  "not-even",
   "amount-too-large",
 ] as const;
 export type NeedCode = (typeof NEED_CODES)[number];
 
 /** Worth knowing, and no figure waits for it. */
 export const CAUTION_CODES = [
+  "currency-not-listed",
   "offer-expired",
   "offer-without-price",
   "offer-other-currency",
@@ -38,6 +44,7 @@ export const CAUTION_CODES = [
   "supplier-shut-out",
   "pinned-offer-unusable",
   "below-minimum-fee",
+  "minimum-not-reached",
   "quote-expired",
   "quote-without-price",
   "pinned-quote-unusable",

@@ -37,6 +37,11 @@ export interface RunResult {
   earnsPerKit: Figure;
   /** `(kept − all costs but own work) ÷ hours` (section 7). */
   earnedPerHour: Figure;
+  /**
+   * A whole number of kits: the least sold, by the mix, with no loss on this run (section 11); not known
+   * with `not-even` where even all of them do not pay.
+   */
+  evenAfter: Figure;
   /** Orders that come as a parcel: suppliers used, and one for the boards. */
   parcels: number;
   /** Everything missing or worth knowing, worst first; figures name their own needs as well. */
@@ -182,8 +187,6 @@ export interface Basket {
   freeFreightReached: boolean;
   /** How much goods would have to rise for free freight; null where none is offered or it is reached. */
   toFreeFreight: string | null;
-  /** The supplier refuses an order this small: what is missing to its minimum; null otherwise. */
-  refusedBy: string | null;
 }
 
 export interface BoardsResult {

@@ -3,6 +3,7 @@ import type { Need } from "./problem.ts";
 /**
  * Run sizes 1 … `to`, column by column: `columns.used[n - 1]` belongs to a run of n. `null` where the
  * figure is not known at that size; `needs` says why. Decimal text in the plan's currency, exact.
+ * Step-downs and sweet spots are those of `without` where something is missing.
  */
 export interface SweepResult {
   currency: string;
@@ -37,7 +38,9 @@ export interface SweepColumns {
 export type Change =
   | { what: "break"; part: string; offer: string; from: number; to: number }
   | { what: "offer"; part: string; from: string | null; to: string | null }
+  /** One pack more or fewer of a part sold in multiples or lots: pieces ordered before and after. */
   | { what: "pack"; part: string; offer: string; from: number; to: number }
+  | { what: "lots"; part: string; offer: string; from: number; to: number }
   | { what: "split"; part: string }
   | { what: "parcel-more"; supplier: string }
   | { what: "parcel-less"; supplier: string }
@@ -75,12 +78,13 @@ export interface Crossing {
 }
 
 export interface BreakEven {
-  /** False while profit is not known at some size; nothing below then holds. */
+  /** False while profit is not known even for a run of one; nothing below then holds. */
   known: boolean;
   crossings: Crossing[];
   /** First run with no loss, and the run from which no larger one up to `upTo` loses; null: none. */
   first: number | null;
   safe: number | null;
+  /** The end of the sweep, or the last size before profit is not known. */
   upTo: number;
   /** Margin of safety of the planned run against `safe`, `(planned − safe) ÷ planned`; null without one. */
   marginOfSafety: string | null;

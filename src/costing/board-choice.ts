@@ -1,0 +1,53 @@
+import { boardsToOrder } from "./boards-to-order.ts";
+import { byText } from "./by-name.ts";
+import { compareWorth, type MinorWorth } from "./conversion.ts";
+import { cheapestOrder } from "./ladder.ts";
+import { needOf } from "./need.ts";
+import type { PreparedPlan, PreparedQuote } from "./prepared-plan.ts";
+import { type BoardChoice, MISSING, type RunSheet } from "./run-sheet.ts";
+
+/**
+ * Boards of the run (section 6): how many to order for the yield, and of which quote. The quote the
+ * user chose, or the one whose landed cost (boards, engineering, stencil, freight) is worth least;
+ * quotes without freight come after those with. Ties: fewer boards over, then the house's name.
+ */
+export function chooseBoards(prepared: PreparedPlan, sheet: RunSheet): void {
+  const { boards } = prepared.plan;
+  sheet.boards = null;
+  sheet.boardsRequired = boards.needed ? needOf(sheet.kitsOf, prepared.boardsPerKit) : 0;
+  sheet.boardsToOrder = boardsToOrder(sheet.boardsRequired, boards.yield, boards.confidence);
+  if (sheet.boardsToOrder === 0) return;
+  if (sheet.boardsToOrder !== null) sheet.boards = cheapestBoards(prepared, sheet.boardsToOrder);
+  if (sheet.boards === null) sheet.missing |= MISSING.boards;
+}
+
+function cheapestBoards(prepared: PreparedPlan, toOrder: number): BoardChoice | null {
+  const { chosenQuote } = prepared.plan.boards;
+  let best: BoardChoice | null = null;
+  for (const quote of prepared.quotes) {
+    if (chosenQuote !== null && quote.quote.id !== chosenQuote) continue;
+    const choice = orderBoards(quote, toOrder);
+    if (choice !== null && (best === null || better(choice, best))) best = choice;
+  }
+  return best;
+}
+
+/** What a quote would deliver and charge for so many boards; null where it may not be used. */
+export function orderBoards(quote: PreparedQuote, toOrder: number): BoardChoice | null {
+  if (quote.ladder === null) return null;
+  const order = cheapestOrder(quote.ladder, toOrder);
+  if (order === null || order.cost === Number.POSITIVE_INFINITY) return null;
+  return { quote, order, charged: order.cost + quote.engineering + quote.stencil };
+}
+
+function better(a: BoardChoice, b: BoardChoice): boolean {
+  if ((a.quote.freight === null) !== (b.quote.freight === null)) return a.quote.freight !== null;
+  const [left, right] = [a, b].map(({ charged, quote }) => charged + (quote.freight ?? 0)) as [
+    number,
+    number,
+  ];
+  const byCost = compareWorth(left, a.quote.worth as MinorWorth, right, b.quote.worth as MinorWorth);
+  const byNames = () =>
+    byText(a.quote.quote.boardHouse, b.quote.quote.boardHouse) || byText(a.quote.quote.id, b.quote.quote.id);
+  return (byCost || a.order.quantity - b.order.quantity || byNames()) < 0;
+}

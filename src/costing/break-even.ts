@@ -1,0 +1,49 @@
+import { grainShare, grainText, ONE } from "./grains.ts";
+import { KEPT_NEEDS, USED_NEEDS } from "./run-sheet.ts";
+import type { Swept } from "./sweep.ts";
+import type { BreakEven, Crossing } from "./sweep-result.ts";
+
+/**
+ * Break-even over the sweep (section 11): profit(n) = kept from n sales − used cost of a run of n.
+ * Costs go up in steps, so every passing of zero is listed with what stepped; `first` is the first
+ * run without a loss and `safe` the one from which no run up to `upTo` loses.
+ */
+export function breakEvenOf(swept: Swept, planned: number): BreakEven {
+  const upTo = knownUpTo(swept);
+  const profit = (kits: number) => (swept.kept[kits] as bigint) - (swept.used[kits] as bigint);
+  const crossings: Crossing[] = [];
+  let first: number | null = null;
+  let safe: number | null = null;
+  for (let kits = 1; kits <= upTo; kits += 1) {
+    const pays = profit(kits) >= 0n;
+    if (pays && first === null) first = kits;
+    safe = pays ? (safe ?? kits) : null;
+    if (kits > 1 && pays !== profit(kits - 1) >= 0n) {
+      crossings.push({
+        kits,
+        way: pays ? "up" : "down",
+        profitBefore: grainText(profit(kits - 1)),
+        profit: grainText(profit(kits)),
+        changes: swept.changes[kits] ?? [],
+      });
+    }
+  }
+  return { known: upTo > 0, crossings, first, safe, upTo, marginOfSafety: marginOfSafety(planned, safe) };
+}
+
+/**
+ * Margin of safety (section 11): `(planned − break-even) ÷ planned`, as a share; negative where fewer
+ * are planned than pay.
+ *
+ * @example planned 120, safe from 65: 0.458333…
+ */
+export function marginOfSafety(planned: number, breakEven: number | null): string | null {
+  return breakEven === null ? null : grainText(grainShare(ONE, BigInt(planned - breakEven), BigInt(planned)));
+}
+
+function knownUpTo({ missing, to }: Swept): number {
+  for (let kits = 1; kits <= to; kits += 1) {
+    if (((missing[kits] as number) & (USED_NEEDS | KEPT_NEEDS)) !== 0) return kits - 1;
+  }
+  return to;
+}

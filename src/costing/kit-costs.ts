@@ -1,0 +1,109 @@
+import type { Plan, PlanCharge } from "#src/shapes/plan.ts";
+import { grainShare, grains, scaled } from "./grains.ts";
+import { FACTOR_PLACES } from "./learning.ts";
+import type { PreparedPlan, PreparedTask } from "./prepared-plan.ts";
+import { MISSING, type RunSheet } from "./run-sheet.ts";
+
+const FACTOR_UNIT = 10n ** BigInt(FACTOR_PLACES);
+const MILLION = 1_000_000n;
+
+/** Packing, work, one-off charges and replacements of the run (sections 7 and 8), in grains. */
+export function kitCosts(prepared: PreparedPlan, sheet: RunSheet): void {
+  const { plan } = prepared;
+  const { money } = sheet;
+  money.packing = 0n;
+  for (const item of plan.packing) {
+    const cost = packingCost(plan, item, sheet.kitsOf);
+    if (cost === null) sheet.missing |= MISSING.packing;
+    else money.packing += cost;
+  }
+  money.minutes = 0n;
+  money.work = 0n;
+  for (const task of prepared.tasks) {
+    const { minutes } = taskMinutes(task, sheet.kitsOf);
+    money.minutes += minutes;
+    money.work += workCost(plan, minutes) ?? 0n;
+  }
+  if (money.minutes > 0n && plan.work.ratePerHour === null) sheet.missing |= MISSING.rate;
+  money.oneOff = plan.charges.reduce((sum, charge) => sum + chargeShare(charge, sheet.kits), 0n);
+  const replacements = replacementCost(plan, sheet.kits);
+  if (replacements === null) sheet.missing |= MISSING.replacement;
+  money.replacements = replacements ?? 0n;
+}
+
+/** Kits of the run that have a packing item or a task; `editions` null: all. */
+export function kitsIn(plan: Plan, editions: readonly string[] | null, kitsOf: readonly number[]): number {
+  return plan.editions.reduce(
+    (sum, { id }, index) => sum + (editions === null || editions.includes(id) ? (kitsOf[index] ?? 0) : 0),
+    0,
+  );
+}
+
+/** `cost per kit × kits that have it`; null: the cost is not known and some kit has it. */
+export function packingCost(
+  plan: Plan,
+  item: Plan["packing"][number],
+  kitsOf: readonly number[],
+): bigint | null {
+  const kits = kitsIn(plan, item.editions, kitsOf);
+  if (kits === 0) return 0n;
+  return item.costPerKit === null ? null : grains(item.costPerKit) * BigInt(kits);
+}
+
+/**
+ * Minutes of one task in grains (section 7): `minutes of a first kit × Σ learning factors`, and the
+ * set-up where any kit needs the task. Each task counts its own kits of the run on from the kits
+ * made before.
+ */
+export function taskMinutes(task: PreparedTask, kitsOf: readonly number[]) {
+  const kits = kitsOf.reduce((sum, count, index) => sum + (task.applies[index] ? count : 0), 0);
+  const factorSum = task.factorSums[kits] ?? 0n;
+  const making = (task.minutesPerKit * factorSum) / FACTOR_UNIT;
+  const settingUp = kits === 0 ? 0n : task.setUpMinutes;
+  return { kits, factorSum, making, settingUp, minutes: making + settingUp };
+}
+
+/** `minutes ÷ 60 × rate`, to the nearest grain; null while the rate is not decided. */
+export function workCost(plan: Plan, minutes: bigint): bigint | null {
+  const { ratePerHour } = plan.work;
+  return ratePerHour === null ? null : grainShare(minutes, scaled(ratePerHour, 6), 60n * MILLION);
+}
+
+/**
+ * The run's share of a one-off charge (section 8): all of it, or `kits ÷ planned kits` of it, and
+ * never more than all.
+ *
+ * @example 240.00 spread over 120 kits, run of 40: 80.00
+ */
+export function chargeShare(charge: PlanCharge, kits: number): bigint {
+  const amount = grains(charge.amount);
+  if (charge.spreadOver === null || kits >= charge.spreadOver) return amount;
+  return grainShare(amount, BigInt(kits), BigInt(charge.spreadOver));
+}
+
+/** `kits × expected share × cost of one re-sent part`; null: a share is expected and its cost not known. */
+export function replacementCost(plan: Plan, kits: number): bigint | null {
+  const { share, costEach } = plan.replacements;
+  const expected = scaled(share, 6) * BigInt(kits);
+  if (expected === 0n) return 0n;
+  return costEach === null ? null : (expected * grains(costEach)) / MILLION;
+}
+
+/** What the run brings if every kit sells (sections 10 and 11): `Σ kits of the edition × kept per sale`. */
+export function takings(prepared: PreparedPlan, sheet: RunSheet): void {
+  const kept = keptFromSales(prepared, sheet.kitsOf);
+  if (kept === null) sheet.missing |= MISSING.sale;
+  sheet.money.kept = kept ?? 0n;
+}
+
+/** Kept from so many sales of each edition, in grains; null where a sold edition's is not known. */
+export function keptFromSales(prepared: PreparedPlan, sales: readonly number[]): bigint | null {
+  let sum = 0n;
+  for (let index = 0; index < sales.length; index += 1) {
+    if (sales[index] === 0) continue;
+    const each = prepared.keptPerSale[index] ?? null;
+    if (each === null) return null;
+    sum += each * BigInt(sales[index] as number);
+  }
+  return sum;
+}

@@ -1,0 +1,155 @@
+import type { PlanSale } from "#src/shapes/plan.ts";
+import { SALE_NEEDS } from "./kept-per-sale.ts";
+import { kitsIn } from "./kit-costs.ts";
+import type { PreparedPart, PreparedPlan } from "./prepared-plan.ts";
+import type { Need, NeedCode, Place, SourcePage } from "./problem.ts";
+import { MISSING, REFUSED, type RunSheet, SETTLED, SHORT, TOO_LARGE } from "./run-sheet.ts";
+
+/** The page on which each need is settled. */
+const PAGE_OF: Record<NeedCode, SourcePage> = {
+  "no-mix": "run",
+  "unpriced-part": "offers",
+  "short-part": "offers",
+  "order-refused": "offers",
+  "no-rate": "offers",
+  "no-freight": "offers",
+  "no-board-quote": "boards",
+  "no-board-freight": "boards",
+  "no-board-yield": "boards",
+  "no-packing-cost": "run",
+  "no-hourly-rate": "run",
+  "no-replacement-cost": "run",
+  "no-stock-cost": "parts",
+  "no-price": "price",
+  "no-tax-rate": "price",
+  "no-fee-rate": "price",
+  "no-fixed-fee": "price",
+  "no-postage-charged": "price",
+  "no-postage-paid": "price",
+  "no-work": "run",
+  "not-in-run": "run",
+  "nothing-made": "run",
+  "not-even": "price",
+  "amount-too-large": "offers",
+};
+
+/** A need with one place or several. */
+export function need(code: NeedCode, at: Place[]): Need {
+  return { code, at, page: PAGE_OF[code] };
+}
+
+/** Joins lists of needs: one entry a code, places in order of first mention, each once. */
+export function joinNeeds(...lists: readonly (readonly Need[])[]): Need[] {
+  const joined = new Map<NeedCode, Need>();
+  for (const { code, at, page } of lists.flat()) {
+    const known = joined.get(code) ?? { code, at: [], page };
+    const texts = new Set(known.at.map((place) => JSON.stringify(place)));
+    joined.set(code, {
+      ...known,
+      at: [...known.at, ...at.filter((place) => !texts.has(JSON.stringify(place)))],
+    });
+  }
+  return [...joined.values()];
+}
+
+/** Why a run's figures are not known, by the bits of `MISSING` they depend on. */
+export function needsOf(prepared: PreparedPlan, sheet: RunSheet, bits: number): Need[] {
+  const missing = sheet.missing & bits;
+  if (missing === 0) return [];
+  const { plan } = prepared;
+  const found: Need[] = [];
+  if (missing & MISSING.mix)
+    found.push(
+      need(
+        "no-mix",
+        plan.editions.map(({ id }) => ({ edition: id })),
+      ),
+    );
+  if (missing & MISSING.goods) {
+    found.push(...prepared.parts.flatMap((_, index) => partNeeds(prepared, sheet, index)));
+  }
+  if (missing & MISSING.freight) found.push(...freightNeeds(prepared, sheet));
+  if (missing & (MISSING.boards | MISSING.boardFreight)) found.push(...boardNeeds(prepared, sheet, missing));
+  if (missing & MISSING.packing) found.push(...packingNeeds(prepared, sheet));
+  if (missing & MISSING.rate) found.push(need("no-hourly-rate", [{}]));
+  if (missing & MISSING.replacement) found.push(need("no-replacement-cost", [{}]));
+  if (missing & MISSING.stock) found.push(...stockNeeds(prepared, sheet));
+  if (missing & MISSING.sale) found.push(...saleNeeds(prepared, sheet));
+  return joinNeeds(found);
+}
+
+/** Why one part's cost is not known; empty when it is. */
+export function partNeeds(prepared: PreparedPlan, sheet: RunSheet, index: number): Need[] {
+  const state = sheet.state[index] as number;
+  if (state <= SETTLED) return [];
+  const part = prepared.parts[index] as PreparedPart;
+  const at = { part: part.part.id };
+  if (state === SHORT) return [need("short-part", [at])];
+  if (state === REFUSED)
+    return [need("order-refused", [{ ...at, supplier: part.usable[0]?.supplier.id ?? "" }])];
+  if (state === TOO_LARGE) return [need("amount-too-large", [at])];
+  const withoutRate = part.offers.filter(({ standing }) => standing === "no-rate");
+  const priced = part.offers.filter(({ standing }) => standing !== "no-price");
+  if (withoutRate.length > 0 && withoutRate.length === priced.length) {
+    return [
+      need(
+        "no-rate",
+        withoutRate.map(({ offer }) => ({ currency: offer.currency })),
+      ),
+    ];
+  }
+  return [need("unpriced-part", [at])];
+}
+
+function freightNeeds(prepared: PreparedPlan, sheet: RunSheet): Need[] {
+  return prepared.suppliers
+    .filter(({ index, freight, freeFrom }) => {
+      const goods = sheet.goods[index] as number;
+      return (sheet.orders[index] as number) > 0 && freight === null && goods < freeFrom;
+    })
+    .map(({ id }) => need("no-freight", [{ supplier: id }]));
+}
+
+function boardNeeds(prepared: PreparedPlan, sheet: RunSheet, missing: number): Need[] {
+  if (missing & MISSING.boardFreight)
+    return [need("no-board-freight", [{ quote: sheet.boards?.quote.quote.id ?? "" }])];
+  if (sheet.boardsToOrder === null) return [need("no-board-yield", [{}])];
+  const { chosenQuote } = prepared.plan.boards;
+  const asked = prepared.quotes.filter(({ quote }) => chosenQuote === null || quote.id === chosenQuote);
+  const withoutRate = asked.filter(({ standing }) => standing === "no-rate");
+  if (withoutRate.length > 0 && withoutRate.length === asked.length) {
+    return [
+      need(
+        "no-rate",
+        withoutRate.map(({ quote }) => ({ currency: quote.currency })),
+      ),
+    ];
+  }
+  if (asked.some(({ standing }) => standing === "usable")) return [need("amount-too-large", [{}])];
+  return [need("no-board-quote", chosenQuote === null ? [{}] : [{ quote: chosenQuote }])];
+}
+
+function packingNeeds({ plan }: PreparedPlan, sheet: RunSheet): Need[] {
+  return plan.packing
+    .filter(({ costPerKit, editions }) => costPerKit === null && kitsIn(plan, editions, sheet.kitsOf) > 0)
+    .map(({ id }) => need("no-packing-cost", [{ packing: id }]));
+}
+
+function stockNeeds(prepared: PreparedPlan, sheet: RunSheet): Need[] {
+  return prepared.parts
+    .filter((part, index) => part.bookMillionths === null && (sheet.fromStock[index] as number) > 0)
+    .map(({ part }) => need("no-stock-cost", [{ part: part.id }]));
+}
+
+function saleNeeds({ plan }: PreparedPlan, sheet: RunSheet): Need[] {
+  const unpriced = plan.editions.filter(
+    ({ price }, index) => price === null && (sheet.kitsOf[index] ?? 0) > 0,
+  );
+  return [...unpriced.map(({ id }) => need("no-price", [{ edition: id }])), ...termNeeds(plan.sale)];
+}
+
+/** Terms of sale that are missing. */
+export function termNeeds(sale: PlanSale): Need[] {
+  const terms = Object.keys(SALE_NEEDS) as (keyof PlanSale)[];
+  return terms.filter((term) => sale[term] === null).map((term) => need(SALE_NEEDS[term], [{}]));
+}

@@ -1,0 +1,86 @@
+import { ordersOf } from "./order-parts.ts";
+import type { PreparedOffer, PreparedPlan, PreparedSupplier } from "./prepared-plan.ts";
+import type { RunSheet } from "./run-sheet.ts";
+import type { Change } from "./sweep-result.ts";
+
+/**
+ * What is different between two runs (section 9), most telling first: boards, then parcels and
+ * thresholds, then parts in the plan's order. Plain growth, more of the same, is no change.
+ */
+export function changesBetween(prepared: PreparedPlan, before: RunSheet, after: RunSheet): Change[] {
+  return [
+    ...boardChanges(before, after),
+    ...prepared.suppliers.flatMap((supplier) => supplierChanges(supplier, before, after)),
+    ...prepared.parts.flatMap((_, index) => partChanges(prepared, before, after, index)),
+  ];
+}
+
+/** Whether anything but one pack more of a part changed: what can make a kit cheaper by a step. */
+export function isStep({ what }: Change): boolean {
+  return what !== "pack";
+}
+
+function boardChanges(before: RunSheet, after: RunSheet): Change[] {
+  const [from, to] = [before.boards, after.boards];
+  if (from === null && to === null) return [];
+  if (from === null || to === null || from.quote !== to.quote) {
+    return [{ what: "board-quote", from: from?.quote.quote.id ?? null, to: to?.quote.quote.id ?? null }];
+  }
+  const quote = to.quote.quote.id;
+  if (to.quote.ladder?.model === "lots") {
+    const [less, more] = [from.order.quantity, to.order.quantity];
+    return less === more ? [] : [{ what: "board-lots", quote, from: less, to: more }];
+  }
+  if (from.order.tier === to.order.tier) return [];
+  const breakOf = (tier: number) => to.quote.ladder?.from[tier] ?? 0;
+  return [{ what: "board-break", quote, from: breakOf(from.order.tier), to: breakOf(to.order.tier) }];
+}
+
+function supplierChanges(supplier: PreparedSupplier, before: RunSheet, after: RunSheet): Change[] {
+  const { id, index, freeFrom, minimum, fee } = supplier;
+  const [had, has] = [before, after].map((sheet) => (sheet.orders[index] as number) > 0);
+  if (had !== has) return [{ what: has ? "parcel-more" : "parcel-less", supplier: id }];
+  if (!has) return [];
+  const changes: Change[] = [];
+  const [free, isFree] = [before, after].map((sheet) => (sheet.goods[index] as number) >= freeFrom);
+  if (isFree !== undefined && free !== isFree)
+    changes.push({ what: "free-freight", supplier: id, reached: isFree });
+  const [enough, isEnough] = [before, after].map((sheet) => (sheet.goods[index] as number) >= minimum);
+  if (isEnough !== undefined && fee > 0 && enough !== isEnough) {
+    changes.push({ what: "minimum-order", supplier: id, reached: isEnough });
+  }
+  return changes;
+}
+
+function partChanges(prepared: PreparedPlan, before: RunSheet, after: RunSheet, index: number): Change[] {
+  const part = prepared.parts[index]?.part.id ?? "";
+  if (before.splits.has(index) || after.splits.has(index)) {
+    const [from, to] = [before, after].map((sheet) => splitName(sheet, index));
+    return from === to ? [] : [{ what: "split", part }];
+  }
+  const [from, to] = [before.chosen[index] ?? null, after.chosen[index] ?? null];
+  if (from !== to) return [{ what: "offer", part, from: from?.offer.id ?? null, to: to?.offer.id ?? null }];
+  return to === null ? [] : orderChanges(part, to, before, after, index);
+}
+
+function orderChanges(
+  part: string,
+  offer: PreparedOffer,
+  before: RunSheet,
+  after: RunSheet,
+  index: number,
+): Change[] {
+  const { ladder } = offer;
+  const [from, to] = [before.quantity[index] as number, after.quantity[index] as number];
+  const at = { part, offer: offer.offer.id };
+  if (from === to) return [];
+  if (ladder.model === "lots") return [{ what: "lots", ...at, from, to }];
+  const [low, high] = [before.tier[index] as number, after.tier[index] as number];
+  if (low !== high)
+    return [{ what: "break", ...at, from: ladder.from[low] ?? 0, to: ladder.from[high] ?? 0 }];
+  return ladder.multiple > 1 ? [{ what: "pack", ...at, from, to }] : [];
+}
+
+function splitName(sheet: RunSheet, index: number): string {
+  return JSON.stringify(ordersOf(sheet, index).map(({ offer, order }) => [offer.offer.id, order.tier]));
+}
