@@ -145,11 +145,20 @@ export const SENTENCES = {
     title: "{name} holds no rows.",
     detail: "Choose a list with at least one row that is not blank.",
   },
+  "upload-spreadsheet": {
+    status: 415,
+    title: "{name} is a spreadsheet workbook.",
+    detail: "Save it as CSV in your spreadsheet and bring in that file, or copy the cells and paste them.",
+  },
+  "upload-old-spreadsheet": {
+    status: 415,
+    title: "{name} is an old spreadsheet workbook.",
+    detail: "Save it as CSV in your spreadsheet and bring in that file, or copy the cells and paste them.",
+  },
   "upload-not-text": {
     status: 415,
-    title: "{name} is {kind}, not a list in plain text.",
-    detail:
-      "Save it as CSV in the program that made it and bring in that file, or copy the cells and paste them.",
+    title: "{name} is not plain text.",
+    detail: "Bring in the list as CSV, TSV or another plain text, or copy its cells and paste them.",
   },
   "upload-too-long": {
     status: 413,
