@@ -10,10 +10,13 @@ const HALVES = [70, 90, 350, 450];
 /** A figure nearer to the ring than this share of the run would touch it. */
 const CLEAR_OF_RING = 0.09;
 
-/** Where a run stands on the ruler, from 0 at its left end to 1; beyond the ends it stays at the end. */
+/**
+ * Where a run stands on the ruler, from 0 at its left end to 1; beyond the ends it stays at the end. To six places,
+ * because server and browser may differ in the last bit of a logarithm.
+ */
 export function rulerPlace(kits: number): number {
   const kept = Math.min(Math.max(kits, RULER_LEAST), RULER_MOST);
-  return Math.log(kept / RULER_LEAST) / SPAN;
+  return Math.round((Math.log(kept / RULER_LEAST) / SPAN) * 1e6) / 1e6;
 }
 
 /** The whole run nearest to a place on the ruler. */

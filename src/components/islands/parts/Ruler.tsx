@@ -7,6 +7,7 @@ import {
   runAtPlace,
 } from "#src/components/ruler-scale.ts";
 import { RULER_LEAST, RULER_MOST } from "#src/shapes/limits.ts";
+import { LogoRings } from "./Logo.tsx";
 
 export type RulerProps = {
   run: number;
@@ -16,6 +17,10 @@ export type RulerProps = {
 };
 
 const TICKS = rulerTicks();
+
+function percent(kits: number): string {
+  return `${(rulerPlace(kits) * 100).toFixed(4)}%`;
+}
 
 /** The run as a place on a logarithmic ruler from 10 to 500: a slider that hangs from the top edge of the tally. */
 export function Ruler({ run, onRun, sweetSpots = [] }: RulerProps) {
@@ -64,13 +69,14 @@ export function Ruler({ run, onRun, sweetSpots = [] }: RulerProps) {
         aria-valuetext={`${run} kits`}
         onKeyDown={onKey}
         className="absolute top-0 h-[29px] w-7 -translate-x-1/2 rounded-control"
-        style={{ left: `${rulerPlace(run) * 100}%` }}
+        style={{ left: percent(run) }}
       >
         <svg width={28} height={29} viewBox="0 0 28 29" aria-hidden="true" focusable="false">
           <path d="M14 0V9" strokeWidth={3} className="stroke-petrol" />
-          <circle cx={14} cy={18} r={10.5} className="fill-copper-metal" />
-          <circle cx={14} cy={18} r={4.1} strokeWidth={2.6} className="fill-paper stroke-logo-tin" />
-          <circle cx={14} cy={18} r={5.7} fill="none" strokeWidth={1} className="stroke-paper" />
+          <g transform="translate(2.8 6.8) scale(0.7)">
+            <circle cx={16} cy={16} r={15} className="fill-paper" />
+            <LogoRings />
+          </g>
         </svg>
       </div>
     </div>
@@ -90,8 +96,8 @@ function RulerTicks({ run }: { run: number }) {
       {TICKS.map(({ kits, length }) => (
         <line
           key={kits}
-          x1={`${rulerPlace(kits) * 100}%`}
-          x2={`${rulerPlace(kits) * 100}%`}
+          x1={percent(kits)}
+          x2={percent(kits)}
           y1={0}
           y2={length}
           strokeWidth={length === 5 ? 1 : 1.5}
@@ -101,7 +107,7 @@ function RulerTicks({ run }: { run: number }) {
       {TICKS.filter(({ kits, figure }) => figure && !figureHidden(kits, run)).map(({ kits }) => (
         <text
           key={kits}
-          x={`${rulerPlace(kits) * 100}%`}
+          x={percent(kits)}
           y={25}
           textAnchor="middle"
           className="fill-ink text-[0.875rem] font-semibold"

@@ -44,7 +44,7 @@ export function Stepper({
 
   return (
     // biome-ignore lint/a11y/useSemanticElements: three controls of one value, not a set of form fields.
-    <div role="group" aria-label={label} className="inline-flex items-center gap-4 max-tablet:gap-2.5">
+    <div role="group" aria-label={label} className="inline-flex items-center gap-4 max-tablet:gap-1">
       <StepKey name="One less" off={value <= least} step={() => stepBy(-1)} sign={<MinusIcon />} />
       <span className="inline-flex min-w-11 flex-col items-center">
         {!labelHidden && <span className="type-label text-ink-2 max-tablet:hidden">{label}</span>}
@@ -81,7 +81,7 @@ function StepKey({
       aria-label={name}
       aria-disabled={off || undefined}
       {...hold}
-      className={`flex size-11 shrink-0 touch-manipulation select-none items-center justify-center rounded-control border-[1.5px] tablet:size-10 ${off ? "border-dashed border-rule-2 bg-tint text-ink-2" : "border-ink bg-sheet text-ink hover:bg-petrol-wash active:bg-tint"}`}
+      className={`flex h-11 w-10 shrink-0 touch-manipulation select-none items-center justify-center rounded-control border-[1.5px] tablet:size-10 ${off ? "border-dashed border-rule-2 bg-tint text-ink-2" : "border-ink bg-sheet text-ink hover:bg-petrol-wash active:bg-tint"}`}
     >
       {sign}
     </button>

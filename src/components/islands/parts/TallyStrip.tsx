@@ -77,9 +77,9 @@ export function TallyStrip({
             <Ruler run={run} onRun={onRun} sweetSpots={sweetSpots} />
           </div>
         )}
-        <div className="flex items-center max-tablet:min-h-[69px] max-tablet:gap-3 max-tablet:py-1.5 tablet:pb-2.5">
+        <div className="flex items-center max-tablet:min-h-[69px] max-tablet:gap-2.5 max-tablet:py-1.5 tablet:pb-2.5">
           <Run run={run} onRun={onRun} fixed={fixed} />
-          <ul className="flex min-w-0 grow max-tablet:justify-start max-tablet:gap-4">
+          <ul className="flex min-w-0 grow max-tablet:gap-2.5">
             {cells.map((cell) => (
               <Cell key={cell.key} cell={cell} workingOut={workingOut} />
             ))}
@@ -89,7 +89,7 @@ export function TallyStrip({
             aria-label="Show all figures"
             aria-expanded={sheet}
             onClick={() => setSheet(true)}
-            className="flex size-10 shrink-0 items-center justify-center tablet:hidden"
+            className="-mr-2 flex h-11 w-8 shrink-0 items-center justify-center tablet:hidden"
           >
             {workingOut ? <BusyIcon /> : <UpIcon />}
           </button>
@@ -136,7 +136,7 @@ function Cell({ cell, workingOut }: { cell: TallyCell; workingOut?: boolean }) {
   const shown = cell.onPhone ? "" : "max-tablet:hidden";
   return (
     <li
-      className={`${shown} min-w-0 tablet:ml-4 tablet:min-h-[52px] tablet:flex-auto tablet:border-l tablet:border-rule-2 tablet:pl-3.5 desktop:ml-6 desktop:pl-6`}
+      className={`${shown} min-w-0 max-tablet:flex-1 tablet:ml-4 tablet:min-h-[52px] tablet:flex-auto tablet:border-l tablet:border-rule-2 tablet:pl-3.5 desktop:ml-6 desktop:pl-6`}
     >
       <span className="type-ruler flex items-center gap-1.5 whitespace-nowrap text-ink-2 tablet:type-label">
         {cell.label}

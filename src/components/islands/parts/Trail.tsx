@@ -47,7 +47,7 @@ function TrailPad({ stop, place, stops }: { stop: TrailStop; place: number; stop
           className="size-[min(28px,7.4vw)] tablet:size-[30px]"
         />
         <span
-          className={`max-tablet:heard-only mt-1.5 block text-[1.0625rem] leading-[1.3125rem] group-hover:underline max-desktop:text-[0.9375rem] ${stop.here ? "font-bold text-petrol" : "font-medium"}`}
+          className={`max-tablet:heard-only mt-1.5 block text-[1.0625rem] leading-[1.3125rem] group-hover:underline max-desktop:text-[0.9375rem] ${stop.here ? "font-bold text-petrol" : "font-semibold"}`}
         >
           {stop.name}
         </span>

@@ -56,7 +56,7 @@ export function WorkingPanel({ paper, onClose, id }: WorkingPanelProps) {
       style={phone ? undefined : { top }}
       className="fixed inset-x-0 top-[60px] bottom-0 z-30 m-0 hidden h-auto max-h-none w-full max-w-none animate-panel flex-col border-t-2 border-ink bg-paper text-ink open:flex tablet:right-0 tablet:left-auto tablet:w-[min(588px,100vw)] tablet:border-t-0 tablet:border-l-2"
     >
-      <header className="rule-section flex items-start justify-between gap-4 border-t-0! border-b-2! border-ink px-6 py-3 max-tablet:px-4">
+      <div className="rule-section flex items-start justify-between gap-4 border-t-0! border-b-2! border-ink px-6 py-3 max-tablet:px-4">
         <div>
           <h2 id={titleId} ref={heading} tabIndex={-1} className="type-h2 outline-none">
             The working
@@ -66,7 +66,7 @@ export function WorkingPanel({ paper, onClose, id }: WorkingPanelProps) {
         <Button size="small" onClick={onClose} data-screen-only>
           Close
         </Button>
-      </header>
+      </div>
       {paper === null ? <WorkingOut /> : <WorkingPaper paper={paper} />}
       {paper && <WorkingFoot paper={paper} />}
     </dialog>
@@ -88,7 +88,7 @@ function WorkingFoot({ paper }: { paper: Paper }) {
     setCopied(true);
   }
   return (
-    <footer className="flex flex-wrap items-center justify-between gap-3 border-t border-ink px-6 py-3 max-tablet:px-4">
+    <div className="flex flex-wrap items-center justify-between gap-3 border-t border-ink px-6 py-3 max-tablet:px-4">
       <p className="type-label text-ink-2">{paper.foot}</p>
       <div className="flex gap-3" data-screen-only>
         <Button size="small" onClick={copy}>
@@ -98,7 +98,7 @@ function WorkingFoot({ paper }: { paper: Paper }) {
           Print
         </Button>
       </div>
-    </footer>
+    </div>
   );
 }
 

@@ -1,4 +1,3 @@
-import { runBands } from "#src/partslist/run-bands.ts";
 import { Bands, RunBands } from "../parts/Bands.tsx";
 import { Change } from "../parts/Change.tsx";
 import { Chip } from "../parts/Chip.tsx";
@@ -82,15 +81,5 @@ export function SignSheet() {
         </Section>
       </div>
     </>
-  );
-}
-
-/** The large run of the Run page. */
-export function LargeRun({ kits }: { kits: number }) {
-  return (
-    <div className="flex items-center gap-x-11 gap-y-2 tablet:flex-col tablet:items-start">
-      <span className="type-run">{kits}</span>
-      <Bands colours={runBands(kits)} width={206} className="max-w-full" />
-    </div>
   );
 }
