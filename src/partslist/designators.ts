@@ -4,7 +4,7 @@ const NUMBERED = /^([A-Za-zА-Яа-я][A-Za-zА-Яа-я_]{0,9}?)_?(\d{1,5})([A-Z
 const NAME = /^(?=.*[A-Za-z])[A-Za-z0-9_+\-*./#]{1,24}$/;
 /** An everyday word, which is no designator: Cables, Resistors, LEDs. */
 const WORD = /^(?:[A-Z]?[a-z]{3,}|[A-Z]{2,}s)$/;
-const CONJUNCTION = /^(?:and|und|et|y|e|i|och|en|&|\+)$/i;
+const CONJUNCTION = /^(?:[Aa]nd|AND|und|et|y|e|i|och|en|&|\+)$/;
 /** Guards against "R1-R99999". */
 const RANGE_MOST = 2000;
 

@@ -1,7 +1,7 @@
 import type { PartClass, ValueUnit } from "#src/shapes/limits.ts";
 import type { DraftLine, PropertyName } from "./draft.ts";
 import { compareDecimals } from "./exact-decimal.ts";
-import { valueWords } from "./value-words.ts";
+import { formatReading } from "./value-format.ts";
 
 /** What a line of a list says about its part. Empty text and `null` are "the list does not say". */
 export interface PartFields {
@@ -39,7 +39,7 @@ function millimetres(line: DraftLine): string | null {
 
 function nameOf(line: DraftLine): string {
   const { reading } = line;
-  const said = reading && line.value !== null ? valueWords(reading.si, reading.unit) : line.value;
+  const said = reading && line.value !== null ? formatReading(reading).replace("\u00a0", " ") : line.value;
   const name =
     said ?? line.partNumber ?? line.description ?? line.package ?? (line.designatorText || "not named");
   return name.slice(0, NAME_LENGTH);

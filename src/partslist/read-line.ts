@@ -8,7 +8,14 @@ import { preferredHint } from "./preferred-values.ts";
 import { recogniseProperties } from "./properties.ts";
 import { type ReadQuantity, readQuantity } from "./quantities.ts";
 import { type PriceProblem, readOffers } from "./read-offers.ts";
-import { findValue, guessBareCapacitance, readValue, valueKind } from "./values.ts";
+import {
+  findValue,
+  guessBareCapacitance,
+  guessSlippedValue,
+  namesTwoValues,
+  readValue,
+  valueKind,
+} from "./values.ts";
 
 /** A line as read from its row, with what was doubtful on the way. */
 export interface ReadLine {
@@ -78,7 +85,7 @@ interface ReadPart {
 }
 
 /** The value from its own column, else from the description, else from a part-number cell that is nothing but a value. */
-function valueOf(texts: Texts, partClass: PartClass, columns: ListColumns): ReadPart {
+function valueIn(texts: Texts, partClass: PartClass, columns: ListColumns): ReadPart {
   const column = columns.first("value");
   const mark = column === null ? null : columns.mark(column);
   const written = texts.value === null ? null : withoutMark(texts.value) || texts.value;
@@ -89,9 +96,14 @@ function valueOf(texts: Texts, partClass: PartClass, columns: ListColumns): Read
     written === null || partClass !== "capacitor" ? null : guessBareCapacitance(firstWord(written));
   if (bare) return { value: written, reading: null, partNumber, bareValue: bare };
   if (written !== null && /\d/.test(written))
-    return { value: written, reading: null, partNumber, bareValue: null };
+    return {
+      value: written,
+      reading: null,
+      partNumber,
+      bareValue: guessSlippedValue(written, partClass, mark),
+    };
   for (const text of [texts.description, texts.note === null ? null : texts.kind]) {
-    const found = text === null ? null : findValue(text, partClass);
+    const found = text === null || namesTwoValues(text, partClass) ? null : findValue(text, partClass);
     if (found)
       return { value: written ?? found.from.trim(), reading: found.reading, partNumber, bareValue: null };
   }
@@ -187,7 +199,7 @@ export function readLine(cells: readonly string[], columns: ListColumns): ReadLi
     quantityColumn === null ? null : columns.mark(quantityColumn),
   );
   const kind = classOf(texts, designators);
-  const part = valueOf(texts, kind.class, columns);
+  const part = valueIn(texts, kind.class, columns);
   const { maybeMark, ...mark } = markOf(cells, columns, texts);
   const own = ownProperties(cells, columns);
   const { offers, problems } = readOffers(cells, columns);

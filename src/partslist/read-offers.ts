@@ -25,7 +25,7 @@ export function readOffers(
   const suppliers = columns.all("supplier");
   columns.all("order-code").forEach((code, at) => {
     const orderCode = textAt(cells, code.column);
-    const supplier = code.supplier ?? supplierFor(cells, code, suppliers, at);
+    const supplier = code.supplier ?? supplierFor(cells, suppliers, at);
     if (orderCode !== null && !/^dn[pf]$/i.test(orderCode)) offers.push({ supplier, orderCode, prices: [] });
   });
   if (offers.length === 0)
@@ -42,10 +42,9 @@ export function readOffers(
   return { offers, problems };
 }
 
-/** The supplier column nearest before an order code, else the one of the same rank. */
+/** The supplier column of the same rank as the order code; a single supplier column holds for all. */
 function supplierFor(
   cells: readonly string[],
-  code: ColumnMeaning,
   suppliers: readonly ColumnMeaning[],
   at: number,
 ): string | null {

@@ -199,6 +199,32 @@ function bareNumber(text: string, mark: DecimalMark | null): Found | null {
     : { reading: { si: digits, unit: "ohm", unitWritten: false }, from: text, at: 0 };
 }
 
+/** True where a text names two different values of the class, so that neither can be taken: "5K 10K". */
+export function namesTwoValues(text: string, partClass: PartClass): boolean {
+  const first = findValue(text, partClass);
+  if (first === null) return false;
+  const rest = plainUnits(text).slice(first.at + first.from.length);
+  const second = findValue(rest, partClass);
+  return (
+    second !== null &&
+    second.reading.si !== first.reading.si &&
+    second.reading.unitWritten === first.reading.unitWritten
+  );
+}
+
+/**
+ * A value with letters that belong to no unit, as a slip of the keyboard leaves them: "0,1uk" for 0,1 µF.
+ * Only as a suggestion.
+ */
+export function guessSlippedValue(
+  text: string,
+  partClass: PartClass,
+  mark: DecimalMark | null,
+): ValueReading | null {
+  const found = /^\s*(\d*[.,]?\d+)\s?([pnuµμkKM])\s?\p{L}{1,2}\s*$/u.exec(text);
+  return found ? readValue(`${found[1]}${found[2]}`, partClass, mark) : null;
+}
+
 /**
  * What a number without any letter may mean on a capacitor: three figures as the marking of
  * IEC 60062:2016 (two digits and a power of ten in pF: 104 is 100 nF), a fraction as µF, else pF.
