@@ -1,7 +1,7 @@
 import { currencyDecimals } from "#src/costing/currencies.ts";
 import type { CurrencyRateInput } from "#src/shapes/currency-rate.ts";
 import { beforeAndAfter } from "./before-and-after.ts";
-import { type Changing, clash, noteChange } from "./note-change.ts";
+import { type Changing, clash, noteChange, type Where } from "./note-change.ts";
 import { Problem, wrongField } from "./problem.ts";
 import {
   type CurrencyRateRow,
@@ -21,7 +21,7 @@ function view({ workshopId: _, ...row }: CurrencyRateRow): RateView {
 }
 
 /** The rates of a workshop, by currency. */
-export function rates({ db, workshop }: Changing): RateView[] {
+export function rates({ db, workshop }: Where): RateView[] {
   return currencyRatesOf(db, workshop.id).map(view);
 }
 

@@ -12,6 +12,9 @@ export interface Changing {
   kit?: { id: string };
 }
 
+/** Where something is read. */
+export type Where = Pick<Changing, "db" | "workshop">;
+
 interface Change {
   /** What was done, such as "run.change". */
   action: string;

@@ -4,7 +4,7 @@ import { Offer, type OfferBatch, type OfferChange, type OfferFields } from "#src
 import { beforeAndAfter } from "./before-and-after.ts";
 import { checked } from "./checked.ts";
 import { newId } from "./new-id.ts";
-import { type Changing, clash, noteChange } from "./note-change.ts";
+import { type Changing, clash, noteChange, type Where } from "./note-change.ts";
 import { type FieldError, Problem, wrongField } from "./problem.ts";
 import {
   addOffer as addRow,
@@ -31,18 +31,18 @@ function view({ offer: { workshopId: _, ...row }, breaks }: OfferWithBreaks): Of
 }
 
 /** Every offer for a part of the kit's list. */
-export function kitOffers({ db, kit }: Changing & { kit: { id: string } }): OfferView[] {
+export function kitOffers({ db, kit }: Where & { kit: { id: string } }): OfferView[] {
   return offersForKit(db, kit.id).map(view);
 }
 
 /** Every offer of one supplier of the workshop. */
-export function supplierOffers({ db, workshop }: Changing, supplierId: string): OfferView[] {
+export function supplierOffers({ db, workshop }: Where, supplierId: string): OfferView[] {
   if (!supplierOf(db, workshop.id, supplierId)) throw new Problem("not-found");
   return offersFromSupplier(db, workshop.id, supplierId).map(view);
 }
 
 /** Every offer for one part of the workshop. */
-export function partOffers({ db, workshop }: Changing, partId: string): OfferView[] {
+export function partOffers({ db, workshop }: Where, partId: string): OfferView[] {
   if (!partOf(db, workshop.id, partId)) throw new Problem("not-found");
   return offersForPart(db, workshop.id, partId).map(view);
 }

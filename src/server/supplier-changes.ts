@@ -4,7 +4,7 @@ import { Supplier, type SupplierChange, type SupplierFields } from "#src/shapes/
 import { beforeAndAfter } from "./before-and-after.ts";
 import { checked } from "./checked.ts";
 import { newId } from "./new-id.ts";
-import { type Changing, clash, noteChange } from "./note-change.ts";
+import { type Changing, clash, noteChange, type Where } from "./note-change.ts";
 import { Problem, wrongField } from "./problem.ts";
 import {
   addSupplier as addRow,
@@ -27,13 +27,13 @@ function view({ workshopId: _, ...row }: SupplierRow, offers: number): SupplierV
 }
 
 /** The suppliers of a workshop, by name. */
-export function suppliers({ db, workshop }: Changing): SupplierView[] {
+export function suppliers({ db, workshop }: Where): SupplierView[] {
   const counts = offerCounts(db, workshop.id);
   return suppliersOf(db, workshop.id).map((row) => view(row, counts.get(row.id) ?? 0));
 }
 
 /** One supplier of the workshop. */
-export function supplier({ db, workshop }: Changing, supplierId: string): SupplierView {
+export function supplier({ db, workshop }: Where, supplierId: string): SupplierView {
   const row = supplierOf(db, workshop.id, supplierId);
   if (!row) throw new Problem("not-found");
   return view(row, offerCounts(db, workshop.id).get(row.id) ?? 0);

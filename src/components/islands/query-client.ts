@@ -7,3 +7,6 @@ export const queryClient = new QueryClient({
     mutations: { retry: false },
   },
 });
+
+/** The cache a component asks. While a page is rendered on the server nothing may be kept: it serves everybody. */
+export const pageCache: () => QueryClient = import.meta.env.SSR ? () => new QueryClient() : () => queryClient;

@@ -95,3 +95,13 @@ export function removeBoardQuote(db: Db, quoteId: string, seen: number): boolean
     .run();
   return gone.changes > 0;
 }
+
+/** Currencies that quotes of a workshop are in. */
+export function quotedCurrencies(db: Db, workshopId: string): string[] {
+  const rows = db
+    .selectDistinct({ currency: boardQuotes.currency })
+    .from(boardQuotes)
+    .where(eq(boardQuotes.workshopId, workshopId))
+    .all();
+  return rows.map(({ currency }) => currency).sort();
+}

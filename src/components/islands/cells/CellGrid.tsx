@@ -1,0 +1,178 @@
+import {
+  type CellEditRequestEvent,
+  CellStyleModule,
+  ClientSideRowModelModule,
+  type ColDef,
+  ColumnAutoSizeModule,
+  type GridApi,
+  RenderApiModule,
+  RowApiModule,
+  SelectEditorModule,
+  TextEditorModule,
+} from "ag-grid-community";
+import { AgGridReact } from "ag-grid-react";
+import { type ClipboardEvent, useEffect, useMemo, useRef } from "react";
+import { gridTheme } from "#src/components/islands/grid-theme.ts";
+import { showToast } from "#src/components/islands/parts/toasts.ts";
+import { layBlock, readBlock, writeBlock } from "./block.ts";
+import { type CellColumn, type CellEdit, type CellFault, type CellRow, cellKey } from "./cell-column.ts";
+
+const MODULES = [
+  ClientSideRowModelModule,
+  ColumnAutoSizeModule,
+  CellStyleModule,
+  RenderApiModule,
+  RowApiModule,
+  TextEditorModule,
+  SelectEditorModule,
+];
+
+/** Beyond so many rows the grid scrolls inside itself. */
+const ROWS_IN_FULL = 30;
+const ROW = 37;
+
+export interface CellGridProps<Row extends CellRow, Fields> {
+  /** What the sheet holds: "Suppliers". */
+  label: string;
+  rows: readonly Row[];
+  columns: readonly CellColumn<Row, Fields>[];
+  faults: ReadonlyMap<string, CellFault>;
+  canEdit: boolean;
+  styleNonce: string;
+  onEdits: (edits: CellEdit[]) => void;
+  onUndo: () => void;
+  onRedo: () => void;
+}
+
+/** A sheet of cells: arrows move, Enter edits, Escape leaves as it was, Ctrl and C, V, Z, Y do what they do everywhere. */
+export default function CellGrid<Row extends CellRow, Fields>(props: CellGridProps<Row, Fields>) {
+  const { label, rows, columns, faults, canEdit, styleNonce, onEdits } = props;
+  const grid = useRef<AgGridReact<Row>>(null);
+  const shown = useRef(faults);
+  shown.current = faults;
+  const definitions = useMemo(
+    () => columns.map((column) => definition(column, canEdit, () => shown.current)),
+    [columns, canEdit],
+  );
+  // biome-ignore lint/correctness/useExhaustiveDependencies: the cells read faults through a ref.
+  useEffect(() => grid.current?.api?.refreshCells({ force: true }), [faults]);
+
+  const request = ({ data, colDef, newValue }: CellEditRequestEvent<Row>) =>
+    onEdits([{ row: data.id, column: colDef.colId ?? "", entry: String(newValue ?? "").trim() }]);
+  const keys = columns.map(({ key }) => key);
+
+  function paste(event: ClipboardEvent) {
+    const at = focusedCell(grid.current?.api, event);
+    if (!at || !canEdit) return;
+    event.preventDefault();
+    const ids = rows.map(({ id }) => id);
+    const { edits, past } = layBlock(readBlock(event.clipboardData.getData("text/plain")), ids, keys, at);
+    if (past > 0)
+      showToast({ kind: "caution", text: `${past} cells reached past the end and were left out.` });
+    onEdits(edits);
+  }
+
+  function copy(event: ClipboardEvent) {
+    const at = focusedCell(grid.current?.api, event);
+    const row = rows.find(({ id }) => id === at?.row);
+    const column = columns.find(({ key }) => key === at?.column);
+    if (!row || !column) return;
+    event.preventDefault();
+    event.clipboardData.setData("text/plain", writeBlock([[column.text(row)]]));
+  }
+
+  return (
+    // biome-ignore lint/a11y/noStaticElementInteractions: the grid inside is the control; this hears its clipboard.
+    <div
+      onPaste={paste}
+      onCopy={copy}
+      onKeyDown={(press) => pressed(press, grid.current?.api, props)}
+      style={rows.length > ROWS_IN_FULL ? { height: ROW * ROWS_IN_FULL } : undefined}
+    >
+      <AgGridReact<Row>
+        ref={grid}
+        theme={gridTheme}
+        modules={MODULES}
+        styleNonce={styleNonce}
+        rowData={rows as Row[]}
+        columnDefs={definitions}
+        getRowId={({ data }) => data.id}
+        defaultColDef={{
+          resizable: true,
+          sortable: false,
+          suppressHeaderMenuButton: true,
+          wrapHeaderText: true,
+        }}
+        domLayout={rows.length > ROWS_IN_FULL ? "normal" : "autoHeight"}
+        readOnlyEdit
+        stopEditingWhenCellsLoseFocus
+        enterNavigatesVerticallyAfterEdit
+        suppressNoRowsOverlay
+        onCellEditRequest={request}
+        onGridReady={({ api }) => api.setGridAriaProperty("label", label)}
+      />
+    </div>
+  );
+}
+
+function definition<Row extends CellRow, Fields>(
+  column: CellColumn<Row, Fields>,
+  canEdit: boolean,
+  faults: () => ReadonlyMap<string, CellFault>,
+): ColDef<Row> {
+  const faultIn = (row: Row) => faults().get(cellKey({ row: row.id, column: column.key }));
+  const { choices } = column;
+  return {
+    colId: column.key,
+    headerName: column.head,
+    editable: canEdit && column.read !== undefined,
+    valueGetter: ({ data }) => data && (faultIn(data)?.entry ?? column.text(data)),
+    valueFormatter: ({ data, value }) =>
+      data && !faultIn(data) ? (column.shown ?? column.text)(data) : value,
+    // The entry is read by the column, not by the grid.
+    valueParser: ({ newValue }) => newValue,
+    cellEditor: choices ? "agSelectCellEditor" : "agTextCellEditor",
+    cellEditorParams: choices ? { values: choices } : undefined,
+    cellClassRules: {
+      "bg-bad-wash": ({ data }) => data !== undefined && faultIn(data) !== undefined,
+      "text-right": () => column.number === true,
+      "font-semibold": () => column.held === true,
+    },
+    headerClass: column.number ? "ag-right-aligned-header" : "",
+    cellRenderer: column.href ? linkRenderer(column.href) : undefined,
+    width: column.width ?? 120,
+    flex: column.grows ? 1 : undefined,
+    minWidth: column.grows ? column.width : undefined,
+    pinned: column.held ? "left" : undefined,
+    lockPinned: true,
+  };
+}
+
+function linkRenderer<Row>(href: (row: Row) => string) {
+  return ({ data, valueFormatted }: { data: Row; valueFormatted: string }) => (
+    <a href={href(data)} tabIndex={-1}>
+      {valueFormatted}
+    </a>
+  );
+}
+
+/** The cell that has the focus, unless it is being edited: then the clipboard is the field's. */
+function focusedCell<Row extends CellRow>(api: GridApi<Row> | undefined, event: ClipboardEvent) {
+  if (!api || event.target instanceof HTMLInputElement) return null;
+  const cell = api.getFocusedCell();
+  const row = cell && api.getDisplayedRowAtIndex(cell.rowIndex)?.data;
+  return row ? { row: row.id, column: cell.column.getColId() } : null;
+}
+
+function pressed<Row extends CellRow, Fields>(
+  press: React.KeyboardEvent,
+  api: GridApi<Row> | undefined,
+  { onUndo, onRedo }: CellGridProps<Row, Fields>,
+): void {
+  if (!api || press.target instanceof HTMLInputElement) return;
+  const key = press.key.toLowerCase();
+  if (!(press.ctrlKey || press.metaKey) || (key !== "z" && key !== "y")) return;
+  press.preventDefault();
+  if (key === "y" || press.shiftKey) onRedo();
+  else onUndo();
+}
