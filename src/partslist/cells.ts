@@ -188,3 +188,8 @@ export function readCells(text: string): Sheet {
 function isShort(cell: string): boolean {
   return cell.length < 16 && /^\s*[^\d\s]{0,3}\s*\d*[.,]\d+\s*[^\d\s]{0,4}\s*$/.test(cell);
 }
+
+/** Rows of a block parted by tabs and nothing else; for pasting. */
+export function readTabbed(text: string): string[][] {
+  return parse(oneLineEnd(text), "\t");
+}

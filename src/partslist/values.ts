@@ -203,7 +203,7 @@ function bareNumber(text: string, mark: DecimalMark | null): Found | null {
 export function namesTwoValues(text: string, partClass: PartClass): boolean {
   const first = findValue(text, partClass);
   if (first === null) return false;
-  const rest = plainUnits(text).slice(first.at + first.from.length);
+  const rest = `; ${plainUnits(text).slice(first.at + first.from.length)}`;
   const second = findValue(rest, partClass);
   return (
     second !== null &&

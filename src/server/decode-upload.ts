@@ -162,7 +162,7 @@ function plausible(text: string, name: string): boolean {
     return (
       count(text, /\p{Script=Cyrillic}{3,}/gu) > 0 &&
       count(text, /\p{Script=Cyrillic}/gu) > beyond * 0.7 &&
-      count(text, /\p{Ll}\p{Lu}/gu) < beyond * 0.1
+      count(text, /[а-яё][А-ЯЁ]/g) < beyond * 0.1
     );
   if (/1250|8859-2/.test(name))
     return count(text, /[ąęłśźżčěřšůžőű]/gi) > 0 && count(text, EAST_EUROPEAN) > beyond * 0.8;
