@@ -26,6 +26,8 @@ export const imports = sqliteTable(
     content: text("content").notNull(),
     /** Records of the text, blank ones too, for naming a list without reading it again. */
     rowCount: integer("row_count").notNull(),
+    /** Of its heading as first guessed: lists of one shape share it, and what was settled for one holds for the next. */
+    fingerprint: text("fingerprint").notNull().default(""),
     /** Whose the prices are where no column says: one of the workshop's suppliers, or the name of a new one. */
     supplierId: id("supplier_id"),
     supplierName: text("supplier_name"),

@@ -1,0 +1,1 @@
+ALTER TABLE `imports` ADD `fingerprint` text DEFAULT '' NOT NULL;
