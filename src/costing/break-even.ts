@@ -24,7 +24,7 @@ export function breakEvenOf(swept: Swept, planned: number): BreakEven {
         way: pays ? "up" : "down",
         profitBefore: grainText(profit(kits - 1)),
         profit: grainText(profit(kits)),
-        changes: swept.changes[kits] ?? [],
+        changes: swept.changesAt(kits),
       });
     }
   }

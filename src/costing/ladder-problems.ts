@@ -26,30 +26,38 @@ export interface LadderProblem {
  * @example breaks 1, 10, 10 → [{ code: "quantity-repeats", refused: true, at: 2, with: 1 }]
  */
 export function ladderProblems(terms: Omit<LadderTerms, "currency">): LadderProblem[] {
+  const { breaks, priceModel } = terms;
+  const rises = breaks.flatMap((step, at): LadderProblem[] => {
+    const before = breaks[at - 1];
+    const rising =
+      before !== undefined && before.quantity < step.quantity && dearer(priceModel, before, step);
+    return rising ? [{ code: "price-rises", refused: false, at, with: at - 1 }] : [];
+  });
+  return [...quantityProblems(terms), ...rises].sort((a, b) => a.at - b.at);
+}
+
+/** Those that are refused: what is wrong with the quantities. */
+export function quantityProblems(terms: Omit<LadderTerms, "currency">): LadderProblem[] {
   const problems: LadderProblem[] = [];
   const { breaks, minimumOrder, orderMultiple, priceModel } = terms;
-  const found = (code: LadderProblemCode, at: number, other: number | null = null) =>
-    problems.push({ code, refused: code !== "price-rises", at, with: other });
-  for (const [at, { quantity, price }] of breaks.entries()) {
-    const same = breaks.findIndex((other) => other.quantity === quantity);
-    if (same < at) {
-      found("quantity-repeats", at, same);
+  const first = new Map<number, number>();
+  for (const [at, { quantity }] of breaks.entries()) {
+    const found = (code: LadderProblemCode, other: number | null = null) =>
+      problems.push({ code, refused: true, at, with: other });
+    const same = first.get(quantity);
+    if (same !== undefined) {
+      found("quantity-repeats", same);
       continue;
     }
-    if (priceModel === "lots" && quantity % orderMultiple !== 0) found("lot-not-multiple", at);
-    if (priceModel !== "lots" && quantity < minimumOrder) found("break-below-minimum", at);
-    const before = breaks[at - 1];
-    if (before === undefined) continue;
-    if (before.quantity > quantity) found("not-ascending", at, at - 1);
-    else if (dearer(priceModel, before, { quantity, price })) found("price-rises", at, at - 1);
+    first.set(quantity, at);
+    if (priceModel === "lots" && quantity % orderMultiple !== 0) found("lot-not-multiple");
+    if (priceModel !== "lots" && quantity < minimumOrder) found("break-below-minimum");
+    if ((breaks[at - 1]?.quantity ?? 0) > quantity) found("not-ascending", at - 1);
   }
   return problems;
 }
 
-interface Break {
-  quantity: number;
-  price: string;
-}
+type Break = LadderTerms["breaks"][number];
 
 /** Lots state a total, so their price per piece is compared. */
 function dearer(model: LadderTerms["priceModel"], before: Break, after: Break): boolean {

@@ -20,10 +20,10 @@ export interface Order {
   tier: number;
 }
 
-/** Unit price in millionths; `exact` where it is too large for a whole number below 2^50. */
-interface Price {
+/** Unit price in millionths: Infinity where that is no whole number below 2^50, and `exactPrice` is asked. */
+export interface Price {
   millionths: number;
-  exact: bigint;
+  text: string;
 }
 
 /**
@@ -62,7 +62,7 @@ export function prepareLadder(terms: LadderTerms, cap: number, quantityMost: num
     multiple: terms.orderMultiple,
     cap,
     divisor: 10 ** (6 - minorDecimals(terms.currency)),
-    below: fullSlices(breaks, prices),
+    below: terms.priceModel === "by-slice" ? fullSlices(breaks, prices) : [],
     onward: [],
     lots: null,
   };
@@ -105,10 +105,10 @@ export function costOf(ladder: Ladder, tier: number, quantity: number): number {
   if (ladder.model === "whole-order") {
     const product = price.millionths * quantity;
     if (product < SAFE) return divideHalfUp(product, ladder.divisor);
-    return bounded(divideBigHalfAway(price.exact * BigInt(quantity), BigInt(ladder.divisor)));
+    return bounded(divideBigHalfAway(exactPrice(price) * BigInt(quantity), BigInt(ladder.divisor)));
   }
   const inTier = tier === 0 ? quantity : quantity - (ladder.from[tier] ?? 0) + 1;
-  const exact = (ladder.below[tier] ?? 0n) + price.exact * BigInt(inTier);
+  const exact = (ladder.below[tier] ?? 0n) + exactPrice(price) * BigInt(inTier);
   return bounded(divideBigHalfAway(exact, BigInt(ladder.divisor)));
 }
 
@@ -139,14 +139,20 @@ function fullSlices(breaks: readonly { quantity: number }[], prices: readonly Pr
     const before = breaks[tier - 1];
     if (before === undefined) return 0n;
     const pieces = tier === 1 ? quantity - 1 : quantity - before.quantity;
-    sum += (prices[tier - 1]?.exact ?? 0n) * BigInt(pieces);
+    sum += exactPrice(prices[tier - 1] as Price) * BigInt(pieces);
     return sum;
   });
 }
 
 function priceOf(text: string): Price {
-  const exact = scaled(text, 6);
-  return { exact, millionths: exact < BigInt(SAFE) ? Number(exact) : Number.POSITIVE_INFINITY };
+  const [whole = "0", fraction = ""] = text.split(".");
+  const millionths = Number(whole + fraction.padEnd(6, "0"));
+  return { text, millionths: millionths < SAFE ? millionths : Number.POSITIVE_INFINITY };
+}
+
+/** A unit price in millionths, however large. */
+export function exactPrice({ text }: Price): bigint {
+  return scaled(text, 6);
 }
 
 function bounded(minor: bigint): number {

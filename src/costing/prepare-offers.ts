@@ -1,7 +1,7 @@
 import type { PlanOffer, PlanPart } from "#src/shapes/plan.ts";
 import { byText } from "./by-name.ts";
 import { prepareLadder } from "./ladder.ts";
-import { ladderProblems } from "./ladder-problems.ts";
+import { quantityProblems } from "./ladder-problems.ts";
 import type { Preparing } from "./prepare-plan.ts";
 import type { PreparedOffer, PreparedPart } from "./prepared-plan.ts";
 import type { CautionCode, NeedCode } from "./problem.ts";
@@ -47,6 +47,9 @@ export function prepareOffers(
     .flatMap(({ prepared }) => prepared ?? [])
     .filter(({ offer }) => part.pinnedOffer === null || offer.id === part.pinnedOffer)
     .sort((a, b) => a.supplier.index - b.supplier.index || byText(a.offer.id, b.offer.id));
+  usable.forEach((offer, rank) => {
+    offer.rank = rank;
+  });
   if (part.pinnedOffer !== null && usable.length === 0) {
     const at = { part: part.id, offer: part.pinnedOffer };
     preparing.problems.push({ code: "pinned-offer-unusable", at, facts: {} });
@@ -63,7 +66,7 @@ function standingOf(offer: PlanOffer, part: PlanPart, preparing: Preparing): Off
   if (offer.currency !== supplier.terms.currency) return "other-currency";
   if (preparing.worthOf(offer.currency) === null) return "no-rate";
   if (part.onlyFromStock && offer.stockShown === null) return "stock-not-known";
-  if (ladderProblems(offer).some(isImpossible)) return "impossible-ladder";
+  if (quantityProblems(offer).some(isImpossible)) return "impossible-ladder";
   return "usable";
 }
 
@@ -88,5 +91,6 @@ function prepareOffer(
     worth,
     ladder: prepareLadder(offer, cap, buyMost),
     bucket: preparing.bucketOf(worth, part.keepShare),
+    rank: 0,
   };
 }

@@ -9,7 +9,13 @@ import { toMinor } from "./money.ts";
 import { spareOf } from "./need.ts";
 import { prepareOffers } from "./prepare-offers.ts";
 import { prepareQuote } from "./prepare-quote.ts";
-import type { PreparedPart, PreparedPlan, PreparedSupplier, PreparedTask } from "./prepared-plan.ts";
+import type {
+  ChoiceMemory,
+  PreparedPart,
+  PreparedPlan,
+  PreparedSupplier,
+  PreparedTask,
+} from "./prepared-plan.ts";
 import type { Problem } from "./problem.ts";
 
 /** Where worths and buckets of a plan are looked up while it is prepared. */
@@ -105,7 +111,23 @@ function preparePart(part: PlanPart, preparing: Preparing): PreparedPart {
   const { bookCost } = part.freeStock;
   const { offers, usable } = prepareOffers(part, buyMost, preparing);
   const book = bookCost === null ? null : scaled(bookCost, 6);
-  return { part, perKit, ...spare, usable, offers, buyMost, bookMillionths: book, split: null };
+  return {
+    part,
+    perKit,
+    ...spare,
+    usable,
+    offers,
+    buyMost,
+    bookMillionths: book,
+    split: null,
+    choice: emptyMemory(usable.length),
+  };
+}
+
+function emptyMemory(offers: number): ChoiceMemory {
+  const never = Number.POSITIVE_INFINITY;
+  const from = new Float64Array(offers).fill(never);
+  return { winner: null, from, floor: new Float64Array(offers), rivalsFrom: never, rivalsFloor: 0 };
 }
 
 function prepareTasks(plan: Plan, kitsMost: number): PreparedTask[] {

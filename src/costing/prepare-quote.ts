@@ -1,7 +1,7 @@
 import type { PlanBoardQuote } from "#src/shapes/plan.ts";
 import { BOARDS_MOST, boardsToOrder } from "./boards-to-order.ts";
 import { prepareLadder } from "./ladder.ts";
-import { ladderProblems } from "./ladder-problems.ts";
+import { quantityProblems } from "./ladder-problems.ts";
 import { toMinor } from "./money.ts";
 import type { Preparing } from "./prepare-plan.ts";
 import type { PreparedQuote } from "./prepared-plan.ts";
@@ -38,7 +38,7 @@ function standingOf(quote: PlanBoardQuote, noRate: boolean, { plan }: Preparing)
   if (quote.breaks.length === 0) return "no-price";
   if (quote.validUntil !== null && quote.validUntil < plan.asOf) return "expired";
   if (noRate) return "no-rate";
-  const repeats = ladderProblems({ ...quote, minimumOrder: 1, orderMultiple: 1 });
+  const repeats = quantityProblems({ ...quote, minimumOrder: 1, orderMultiple: 1 });
   return repeats.some(({ code }) => code === "quantity-repeats") ? "impossible-ladder" : "usable";
 }
 

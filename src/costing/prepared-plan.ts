@@ -62,6 +62,18 @@ export interface PreparedPart {
   buyMost: number;
   bookMillionths: bigint | null;
   split: SplitTable | null;
+  choice: ChoiceMemory;
+}
+
+/** What the last choice for a part tells about the next one; see `chooseOffer`. */
+export interface ChoiceMemory {
+  winner: PreparedOffer | null;
+  /** By rank: the last quantity weighed, and what no quantity from there upward can be worth less than. */
+  from: Float64Array;
+  floor: Float64Array;
+  /** The least floor among all but the winner, and the quantity from which they all hold. */
+  rivalsFrom: number;
+  rivalsFloor: number;
 }
 
 export interface PreparedOffer {
@@ -71,6 +83,8 @@ export interface PreparedOffer {
   ladder: Ladder;
   /** Index into `PreparedPlan.buckets`. */
   bucket: number;
+  /** Place among the part's usable offers: the earlier wins a tie. */
+  rank: number;
 }
 
 export interface PreparedQuote {

@@ -1,5 +1,6 @@
 import { convertMinor } from "./conversion.ts";
 import { grainShare } from "./grains.ts";
+import { exactPrice, type Price } from "./ladder.ts";
 import { ordersOf } from "./order-parts.ts";
 import type { PreparedOffer, PreparedPart, PreparedPlan } from "./prepared-plan.ts";
 import { MISSING, type RunSheet } from "./run-sheet.ts";
@@ -41,14 +42,18 @@ export function leftValue(
 ): bigint {
   const { ladder, worth } = offer;
   if (ladder.model === "whole-order") {
-    return BigInt(left) * (ladder.prices[tier]?.exact ?? 0n) * worth.millionth;
+    return BigInt(left) * exactPrice(ladder.prices[tier] as Price) * worth.millionth;
   }
   return grainShare(convertMinor(cost, worth), BigInt(left), BigInt(quantity));
 }
 
 function takeStock(sheet: RunSheet, part: PreparedPart, fromStock: number): void {
   if (part.bookMillionths === null) sheet.missing |= MISSING.stock;
-  else addProduct(sheet.stock, fromStock, Number(part.bookMillionths), part.bookMillionths);
+  else addBook(sheet, fromStock, part.bookMillionths);
+}
+
+function addBook(sheet: RunSheet, fromStock: number, millionths: bigint): void {
+  addProduct(sheet.stock, fromStock, Number(millionths), () => millionths);
 }
 
 /** Prices by the piece are summed as whole millionths for each currency and keep share. */
@@ -63,7 +68,7 @@ function leave(
   const price = offer.ladder.prices[tier];
   const sum = sheet.left[offer.bucket];
   if (offer.ladder.model === "whole-order" && price !== undefined && sum !== undefined) {
-    addProduct(sum, left, price.millionths, price.exact);
+    addProduct(sum, left, price.millionths, () => exactPrice(price));
     return;
   }
   const value = leftValue(offer, tier, sheet.quantity[index] as number, sheet.cost[index] as number, left);

@@ -5,19 +5,31 @@ import type { Change } from "./sweep-result.ts";
 
 /**
  * What is different between two runs (section 9), most telling first: boards, then parcels and
- * thresholds, then parts in the plan's order. Plain growth, more of the same, is no change.
+ * thresholds, then parts in the plan's order. Plain growth, more of the same piece by piece, is no
+ * change; one pack more of the same is named as `pack` only where `packs` asks for it, since it makes
+ * no kit cheaper.
  */
-export function changesBetween(prepared: PreparedPlan, before: RunSheet, after: RunSheet): Change[] {
-  return [
-    ...boardChanges(before, after),
-    ...prepared.suppliers.flatMap((supplier) => supplierChanges(supplier, before, after)),
-    ...prepared.parts.flatMap((_, index) => partChanges(prepared, before, after, index)),
-  ];
+export function changesBetween(
+  prepared: PreparedPlan,
+  before: RunSheet,
+  after: RunSheet,
+  packs: boolean,
+): Change[] {
+  const changes = boardChanges(before, after);
+  for (const supplier of prepared.suppliers) changes.push(...supplierChanges(supplier, before, after));
+  for (let index = 0; index < prepared.parts.length; index += 1) {
+    if (mayDiffer(before, after, index, packs)) changes.push(...partChanges(prepared, before, after, index));
+  }
+  return changes;
 }
 
-/** Whether anything but one pack more of a part changed: what can make a kit cheaper by a step. */
-export function isStep({ what }: Change): boolean {
-  return what !== "pack";
+/** Quickly passes over parts of which the same is bought, or more of the same. */
+function mayDiffer(before: RunSheet, after: RunSheet, index: number, packs: boolean): boolean {
+  const offer = after.chosen[index] ?? null;
+  if (offer === null || offer !== before.chosen[index]) return true;
+  if (before.quantity[index] === after.quantity[index]) return false;
+  const { multiple, model } = offer.ladder;
+  return before.tier[index] !== after.tier[index] || model === "lots" || (packs && multiple > 1);
 }
 
 function boardChanges(before: RunSheet, after: RunSheet): Change[] {

@@ -1,6 +1,6 @@
 import { compareWorth } from "./conversion.ts";
 import { cheapestOrder, type Order } from "./ladder.ts";
-import type { PreparedOffer, PreparedPart, PreparedSupplier } from "./prepared-plan.ts";
+import type { ChoiceMemory, PreparedOffer, PreparedPart, PreparedSupplier } from "./prepared-plan.ts";
 
 /** An offer with the order it would get for a quantity. */
 export interface WeighedOffer {
@@ -43,18 +43,82 @@ export function chooseOffer(
   quantity: number,
   barred: ReadonlySet<number>,
 ): WeighedOffer | null {
+  if (barred.size > 0) {
+    return bestOf(
+      part.usable.filter(({ supplier }) => !barred.has(supplier.index)),
+      quantity,
+    );
+  }
+  const { choice } = part;
+  const winner = choice.winner === null ? null : weigh(choice.winner, quantity);
+  if (winner?.freightKnown && quantity >= choice.rivalsFrom && isBelow(winner, choice.rivalsFloor))
+    return winner;
+  return chooseAnew(part, quantity, winner);
+}
+
+function bestOf(offers: readonly PreparedOffer[], quantity: number): WeighedOffer | null {
   let best: WeighedOffer | null = null;
-  for (const offer of part.usable) {
-    if (barred.size > 0 && barred.has(offer.supplier.index)) continue;
+  for (const offer of offers) {
     const weighed = weigh(offer, quantity);
     if (weighed !== null && (best === null || better(weighed, best))) best = weighed;
   }
   return best;
 }
 
-/** Whether `a` goes before `b`, which stands earlier in the order of names. */
+/** Whether `a` goes before `b`. */
 export function better(a: WeighedOffer, b: WeighedOffer): boolean {
   if (a.freightKnown !== b.freightKnown) return a.freightKnown;
-  const difference = compareWorth(a.alone, a.offer.worth, b.alone, b.offer.worth);
-  return difference < 0 || (difference === 0 && a.order.quantity < b.order.quantity);
+  const byWorth = compareWorth(a.alone, a.offer.worth, b.alone, b.offer.worth);
+  return (byWorth || a.order.quantity - b.order.quantity || a.offer.rank - b.offer.rank) < 0;
+}
+
+/**
+ * An order of more pieces never costs less, so what an offer cost at some quantity holds for all
+ * larger ones. From one run size to the next quantities grow a little, and most offers stay too dear
+ * for many sizes: they are passed over without being weighed again.
+ */
+function chooseAnew(part: PreparedPart, quantity: number, winner: WeighedOffer | null): WeighedOffer | null {
+  const { choice, usable } = part;
+  let best = winner;
+  if (winner !== null) setFloor(choice, winner.offer, quantity, winner);
+  for (const offer of usable) {
+    if (offer === winner?.offer) continue;
+    const holds = quantity >= (choice.from[offer.rank] as number);
+    if (holds && best?.freightKnown && isBelow(best, choice.floor[offer.rank] as number)) continue;
+    const weighed = weigh(offer, quantity);
+    setFloor(choice, offer, quantity, weighed);
+    if (weighed !== null && (best === null || better(weighed, best))) best = weighed;
+  }
+  rememberRivals(choice, best);
+  return best;
+}
+
+/** Plainly below, with a billionth of margin for the rounding of the comparison. */
+function isBelow({ alone, offer }: WeighedOffer, floor: number): boolean {
+  return alone * offer.worth.near < floor * (1 - 1e-9);
+}
+
+/** At least goods and freight, unless more goods reach the value from which freight is free. */
+function setFloor(
+  choice: ChoiceMemory,
+  offer: PreparedOffer,
+  quantity: number,
+  weighed: WeighedOffer | null,
+): void {
+  const { supplier, worth, rank } = offer;
+  const goods = weighed === null ? Number.POSITIVE_INFINITY : weighed.order.cost;
+  const least = Math.min(goods + (supplier.freight ?? 0), Math.max(goods, supplier.freeFrom));
+  choice.from[rank] = quantity;
+  choice.floor[rank] = least * worth.near;
+}
+
+function rememberRivals(choice: ChoiceMemory, best: WeighedOffer | null): void {
+  choice.winner = best?.offer ?? null;
+  choice.rivalsFrom = 0;
+  choice.rivalsFloor = Number.POSITIVE_INFINITY;
+  for (let rank = 0; rank < choice.from.length; rank += 1) {
+    if (rank === best?.offer.rank) continue;
+    choice.rivalsFrom = Math.max(choice.rivalsFrom, choice.from[rank] as number);
+    choice.rivalsFloor = Math.min(choice.rivalsFloor, choice.floor[rank] as number);
+  }
 }

@@ -8,7 +8,7 @@ import { reckonRun } from "./reckon-run.ts";
 import { joinNeeds, needsOf } from "./run-needs.ts";
 import { createSheet, KEPT_NEEDS, MISSING, SPENT_NEEDS, USED_NEEDS } from "./run-sheet.ts";
 import { soldToPayFor } from "./sold-to-pay.ts";
-import { changesBetween, isStep } from "./step-changes.ts";
+import { changesBetween } from "./step-changes.ts";
 import type { Change, StepDown, SweepColumns, SweepResult, SweetSpot } from "./sweep-result.ts";
 import { divideDown } from "./whole.ts";
 
@@ -21,8 +21,10 @@ export interface Swept {
   leftOver: bigint[];
   parcels: number[];
   missing: number[];
-  /** What changed from n − 1 to n, found only where it is asked. */
-  changes: (Change[] | null)[];
+  /** What makes a kit of n cheaper than one of n − 1 by a step; found only where it is that much cheaper. */
+  steps: Change[][];
+  /** All that changed from n − 1 to n, reckoned again when it is asked. */
+  changesAt: (kits: number) => Change[];
 }
 
 /**
@@ -41,7 +43,7 @@ export function sweepRuns(plan: Plan): SweepResult {
   const beyond = windowOf(to);
   const prepared = preparePlan(plan, beyond);
   const { swept, needs } = reckonAll(prepared, to, beyond);
-  const complete = swept.missing.every((bits) => bits === 0);
+  const complete = swept.missing.every((bits, kits) => bits === 0 || kits > to);
   return {
     currency: plan.currency,
     to,
@@ -71,7 +73,8 @@ function reckonAll(prepared: PreparedPlan, to: number, beyond: number): { swept:
     leftOver: [0n],
     parcels: [0],
     missing: [0],
-    changes: [null],
+    steps: [[], []],
+    changesAt: (kits) => changesAt(prepared, kits),
   };
   let needs: Need[] = [];
   let [sheet, before] = [createSheet(prepared), createSheet(prepared)];
@@ -84,19 +87,23 @@ function reckonAll(prepared: PreparedPlan, to: number, beyond: number): { swept:
     swept.kept.push(money.kept);
     swept.leftOver.push(money.leftOver);
     swept.parcels.push(parcels);
-    swept.missing.push(kits <= to ? missing : 0);
-    swept.changes.push(kits > 1 && worthNaming(swept, kits) ? changesBetween(prepared, before, sheet) : null);
+    swept.missing.push(missing);
+    if (kits > 1) {
+      const fell = fellByStep(swept.used[kits - 1] as bigint, money.used, kits);
+      swept.steps.push(fell ? changesBetween(prepared, before, sheet, false) : []);
+    }
     if (missing !== 0 && kits <= to)
       needs = joinNeeds(needs, needsOf(prepared, sheet, USED_NEEDS | KEPT_NEEDS));
   }
   return { swept, needs };
 }
 
-/** Where something may have to be named: cost per kit falls by a step or rises, or profit passes zero. */
-function worthNaming({ used, kept }: Swept, kits: number): boolean {
-  const [earlier, now] = [used[kits - 1] as bigint, used[kits] as bigint];
-  if (fellByStep(earlier, now, kits) || now * BigInt(kits - 1) > earlier * BigInt(kits)) return true;
-  return (kept[kits] as bigint) >= now !== (kept[kits - 1] as bigint) >= earlier;
+/** Everything that changes between a run of `kits` − 1 and one of `kits`. */
+function changesAt(prepared: PreparedPlan, kits: number): Change[] {
+  const [before, after] = [createSheet(prepared), createSheet(prepared)];
+  reckonRun(prepared, kits - 1, before);
+  reckonRun(prepared, kits, after);
+  return changesBetween(prepared, before, after, true);
 }
 
 /** Cost per kit falls by at least half a per cent: `C(n)/n ≤ 0.995 · C(n − 1)/(n − 1)`. */
@@ -104,19 +111,19 @@ function fellByStep(earlier: bigint, now: bigint, kits: number): boolean {
   return now * BigInt(kits - 1) * 1000n <= 995n * earlier * BigInt(kits);
 }
 
-function stepDowns({ used, changes, to }: Swept): StepDown[] {
+function stepDowns({ used, steps, to }: Swept): StepDown[] {
   const found: StepDown[] = [];
   for (let kits = 2; kits <= to; kits += 1) {
-    const [earlier, now] = [used[kits - 1] as bigint, used[kits] as bigint];
-    const changed = changes[kits] ?? [];
-    if (!fellByStep(earlier, now, kits) || !changed.some(isStep)) continue;
-    const [perKit, before] = [perKitOf(now, kits), perKitOf(earlier, kits - 1)];
-    found.push({ kits, perKit: grainText(perKit), fellBy: grainText(before - perKit), changes: changed });
+    const changes = steps[kits] ?? [];
+    if (changes.length === 0) continue;
+    const perKit = perKitOf(used[kits] as bigint, kits);
+    const before = perKitOf(used[kits - 1] as bigint, kits - 1);
+    found.push({ kits, perKit: grainText(perKit), fellBy: grainText(before - perKit), changes });
   }
   return found;
 }
 
-function sweetSpots({ used, changes, to }: Swept, beyond: number): SweetSpot[] {
+function sweetSpots({ used, changesAt, to }: Swept, beyond: number): SweetSpot[] {
   const found: SweetSpot[] = [];
   const cheaper = (a: number, b: number) => (used[a] as bigint) * BigInt(b) < (used[b] as bigint) * BigInt(a);
   let lowest = 0;
@@ -132,7 +139,7 @@ function sweetSpots({ used, changes, to }: Swept, beyond: number): SweetSpot[] {
       kits,
       perKit: grainText(perKitOf(used[kits] as bigint, kits)),
       nextKit: grainText(nextKit),
-      changes: changes[kits + 1] ?? [],
+      changes: changesAt(kits + 1),
     });
   }
   return found;

@@ -10,14 +10,14 @@ export function emptySum(): WholeSum {
   return { small: 0, big: 0n };
 }
 
-/** Adds `count × value`; `exactValue` is the same value where it is too large for an ordinary number. */
-export function addProduct(sum: WholeSum, count: number, value: number, exactValue: bigint): void {
+/** Adds `count × value`; `exactValue` gives the same value where it is too large for an ordinary number. */
+export function addProduct(sum: WholeSum, count: number, value: number, exactValue: () => bigint): void {
   const total = sum.small + count * value;
   if (total < SAFE) {
     sum.small = total;
     return;
   }
-  sum.big += BigInt(sum.small) + BigInt(count) * exactValue;
+  sum.big += BigInt(sum.small) + BigInt(count) * exactValue();
   sum.small = 0;
 }
 
