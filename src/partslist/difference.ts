@@ -13,7 +13,8 @@ export interface ComparableLine {
   package: string | null;
   manufacturer: string | null;
   partNumber: string | null;
-  mark: LineMark;
+  /** `null`: the list does not speak of marks. */
+  mark: LineMark | null;
   note: string | null;
   drawer: string | null;
 }
@@ -195,9 +196,12 @@ function plain(text: string | null): string {
 
 /** A value by what it means, else by its letters. */
 function meaning(line: ComparableLine): string {
-  if (line.value === null) return "";
-  const reading = readValue(line.value, line.class);
-  return reading === null ? plain(line.value) : `${reading.si} ${reading.unit} ${afterValue(line.value)}`;
+  return line.value === null ? "" : textMeaning(line.value, line.class);
+}
+
+function textMeaning(value: string, partClass: PartClass): string {
+  const reading = readValue(value, partClass);
+  return reading === null ? plain(value) : `${reading.si} ${reading.unit} ${afterValue(value)}`;
 }
 
 /** What else stands in a value cell ("100n 50V") counts as well. */
@@ -223,8 +227,19 @@ function equal(field: ComparedField, before: ComparableLine, after: ComparableLi
   if (field === "quantity") return after.quantity === null || before.quantity === after.quantity;
   if (field === "value")
     return after.value === null || (before.value !== null && meaning(before) === meaning(after));
+  if (field === "mark") return sameMark(before.mark, after.mark);
   if (field === "class") return before.class === after.class || after.class === "other";
   return after[field] === null || plain(before[field]) === plain(after[field]);
+}
+
+/** A list tells fitted from not fitted; options and what the builder brings are marked by hand and stay. */
+function sameMark(before: LineMark | null, after: LineMark | null): boolean {
+  return after === null || before === after || (after === "in-kit" && before !== "do-not-place");
+}
+
+/** Whether two texts mean the same value for a part of this class: "4k7" and "4.7 kΩ". */
+export function sameValue(a: string, b: string, partClass: PartClass): boolean {
+  return textMeaning(a, partClass) === textMeaning(b, partClass);
 }
 
 function sameNames(a: readonly string[], b: readonly string[]): boolean {

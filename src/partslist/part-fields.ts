@@ -1,4 +1,5 @@
 import type { PartClass, ValueUnit } from "#src/shapes/limits.ts";
+import { sameValue } from "./difference.ts";
 import type { DraftLine, PropertyName } from "./draft.ts";
 import { compareDecimals } from "./exact-decimal.ts";
 import { formatReading } from "./value-format.ts";
@@ -37,11 +38,26 @@ function millimetres(line: DraftLine): string | null {
   return /\d+(?:\.\d+)?/.exec((text ?? "").replace(",", "."))?.[0] ?? null;
 }
 
+/** The value as people write it, with what stands behind it in its cell, so that it still means the same. */
+function valueName(line: DraftLine): string | null {
+  const { value, reading } = line;
+  if (value === null || reading === null) return value;
+  const plain = formatReading(reading).replace("\u00a0", " ");
+  const withRest = `${plain} ${value
+    .trim()
+    .split(/[\s,/]+/)
+    .slice(1)
+    .join(" ")}`.trim();
+  return [plain, withRest].find((name) => sameValue(name, value, line.class)) ?? value;
+}
+
 function nameOf(line: DraftLine): string {
-  const { reading } = line;
-  const said = reading && line.value !== null ? formatReading(reading).replace("\u00a0", " ") : line.value;
   const name =
-    said ?? line.partNumber ?? line.description ?? line.package ?? (line.designatorText || "not named");
+    valueName(line) ??
+    line.partNumber ??
+    line.description ??
+    line.package ??
+    (line.designatorText || "not named");
   return name.slice(0, NAME_LENGTH);
 }
 
