@@ -1,0 +1,273 @@
+import { Decimal } from "decimal.js";
+import type { Plan, PlanBoardQuote, PlanOffer, PlanPart, PlanSupplier } from "#src/shapes/plan.ts";
+
+/**
+ * The method read a second time, as plainly as possible: one run size after the other, every offer
+ * and every break tried with decimal.js, nothing prepared, nothing remembered. Checks and the bench
+ * compare the core with it. It knows the price models by trying every quantity up to the last
+ * break, offers without stock limits, and suppliers that do not refuse small orders.
+ */
+const D = Decimal.clone({ precision: 80, rounding: Decimal.ROUND_HALF_UP });
+type D = Decimal;
+
+/** Minor units' decimals of the currencies these plans use (ISO 4217). */
+const DECIMALS: Record<string, number> = { EUR: 2, USD: 2, GBP: 2, JPY: 0, KWD: 3 };
+
+export interface PlainRun {
+  spent: string;
+  used: string;
+  kept: string;
+  leftOver: string;
+  parcels: number;
+}
+
+/** Quotients are taken to the 24th decimal, as the core states it. */
+function quotient(value: D): D {
+  return value.toDecimalPlaces(24, Decimal.ROUND_HALF_UP);
+}
+
+function rounded(value: D, currency: string): D {
+  return value.toDecimalPlaces(DECIMALS[currency] ?? 2, Decimal.ROUND_HALF_UP);
+}
+
+export function rateOf(plan: Plan, currency: string): D {
+  if (currency === plan.currency) return new D(1);
+  return new D(plan.rates.find((rate) => rate.currency === currency)?.perForeignUnit ?? Number.NaN);
+}
+
+/** Largest remainder: whole quotas first, then one each by remainder, the earlier first. */
+export function plainSplit(kits: number, weights: readonly number[]): number[] {
+  const total = weights.reduce((a, b) => a + b, 0);
+  const quotas = weights.map((weight) => new D(kits).times(weight).div(total));
+  const counts = quotas.map((quota) => quota.floor().toNumber());
+  while (counts.reduce((a, b) => a + b, 0) < kits) {
+    let best = -1;
+    quotas.forEach((quota, index) => {
+      const rest = quota.minus(counts[index] ?? 0);
+      const bestRest = best < 0 ? new D(-1) : (quotas[best] as D).minus(counts[best] ?? 0);
+      if (rest.gt(bestRest)) best = index;
+    });
+    counts[best] = (counts[best] ?? 0) + 1;
+  }
+  return counts;
+}
+
+export interface PlainOrder {
+  quantity: number;
+  cost: D;
+}
+
+/** Every sensible quantity tried: from the need to the first permitted one past the last break. */
+export function plainOrder(
+  offer: Pick<PlanOffer, "breaks" | "minimumOrder" | "orderMultiple" | "currency">,
+  need: number,
+): PlainOrder {
+  const breaks = offer.breaks.toSorted((a, b) => a.quantity - b.quantity);
+  const multiple = offer.orderMultiple;
+  const least = Math.max(need, offer.minimumOrder, breaks[0]?.quantity ?? 1);
+  const candidates = [least, ...breaks.map((step) => step.quantity).filter((quantity) => quantity > least)];
+  let best: PlainOrder | null = null;
+  for (const candidate of candidates) {
+    const quantity = Math.ceil(candidate / multiple) * multiple;
+    const price = breaks.filter((step) => step.quantity <= quantity).at(-1)?.price ?? "NaN";
+    const cost = rounded(new D(price).times(quantity), offer.currency);
+    if (best === null || cost.lt(best.cost) || (cost.eq(best.cost) && quantity < best.quantity)) {
+      best = { quantity, cost };
+    }
+  }
+  return best as PlainOrder;
+}
+
+function freightOf(supplier: PlanSupplier, goods: D): D {
+  if (supplier.freeFreightFrom !== null && goods.gte(supplier.freeFreightFrom)) return new D(0);
+  return supplier.freight.model === "flat"
+    ? rounded(new D(supplier.freight.amount), supplier.currency)
+    : new D(0);
+}
+
+interface Choice {
+  offer: PlanOffer;
+  supplier: PlanSupplier;
+  order: PlainOrder;
+  alone: D;
+}
+
+function choose(plan: Plan, part: PlanPart, toBuy: number): Choice {
+  let best: Choice | null = null;
+  for (const offer of part.offers) {
+    const supplier = plan.suppliers.find(({ id }) => id === offer.supplier) as PlanSupplier;
+    const order = plainOrder(offer, toBuy);
+    const alone = order.cost.plus(freightOf(supplier, order.cost)).times(rateOf(plan, offer.currency));
+    const choice = { offer, supplier, order, alone };
+    if (best === null || beats(choice, best)) best = choice;
+  }
+  return best as Choice;
+}
+
+function beats(a: Choice, b: Choice): boolean {
+  if (!a.alone.eq(b.alone)) return a.alone.lt(b.alone);
+  if (a.order.quantity !== b.order.quantity) return a.order.quantity < b.order.quantity;
+  if (a.supplier.name !== b.supplier.name) return a.supplier.name < b.supplier.name;
+  if (a.supplier.id !== b.supplier.id) return a.supplier.id < b.supplier.id;
+  return a.offer.id < b.offer.id;
+}
+
+/** Fewest boards with enough good ones at the confidence, by the binomial distribution term by term. */
+export function plainBoards(required: number, yieldShare: string, confidence: string): number {
+  for (let boards = required; ; boards += 1) {
+    const good = new D(yieldShare);
+    const bad = new D(1).minus(good);
+    let term = good.pow(boards);
+    let enough = new D(0);
+    for (let faulty = 0; faulty <= boards - required; faulty += 1) {
+      enough = enough.plus(term);
+      term = good.isZero()
+        ? new D(0)
+        : term
+            .times(boards - faulty)
+            .div(faulty + 1)
+            .times(bad)
+            .div(good);
+    }
+    if (enough.gte(confidence)) return boards;
+  }
+}
+
+function boardOrder(quote: PlanBoardQuote, need: number): PlainOrder {
+  if (quote.priceModel === "whole-order")
+    return plainOrder({ ...quote, minimumOrder: 1, orderMultiple: 1 }, need);
+  const best: PlainOrder[] = [{ quantity: 0, cost: new D(0) }];
+  for (let pieces = 1; pieces <= need; pieces += 1) {
+    for (const lot of quote.breaks) {
+      const before = best[Math.max(0, pieces - lot.quantity)] as PlainOrder;
+      const order = {
+        quantity: before.quantity + lot.quantity,
+        cost: before.cost.plus(rounded(new D(lot.price), quote.currency)),
+      };
+      const held = best[pieces];
+      if (
+        held === undefined ||
+        order.cost.lt(held.cost) ||
+        (order.cost.eq(held.cost) && order.quantity < held.quantity)
+      ) {
+        best[pieces] = order;
+      }
+    }
+  }
+  return best[need] as PlainOrder;
+}
+
+/** Σ i^(log2 slope), each factor to 12 decimals, for the kits after those made before. */
+const factors = new Map<string, D>();
+function factor(slope: string, number: number): D {
+  const key = `${slope}:${number}`;
+  const known = factors.get(key);
+  if (known !== undefined) return known;
+  const value = new D(number)
+    .pow(new D(slope).ln().div(new D(2).ln()))
+    .toDecimalPlaces(12, Decimal.ROUND_HALF_UP);
+  factors.set(key, value);
+  return value;
+}
+
+/** One run, from the plan alone. Sizes of boards already worked out may be handed in. */
+export function plainRun(plan: Plan, kits: number, boardsFor = plainBoards): PlainRun {
+  const kitsOf = plainSplit(
+    kits,
+    plan.editions.map(({ weight }) => weight),
+  );
+  const kitsIn = (editions: string[] | null) =>
+    plan.editions.reduce(
+      (sum, { id }, at) => sum + (editions === null || editions.includes(id) ? (kitsOf[at] ?? 0) : 0),
+      0,
+    );
+  let spent = new D(0);
+  let left = new D(0);
+  let kept = new D(0);
+  let stock = new D(0);
+  const goods = new Map<PlanSupplier, D>();
+  for (const part of plan.parts) {
+    const need = part.quantities.reduce((sum, { edition, perKit }) => sum + kitsIn([edition]) * perKit, 0);
+    const spare =
+      need === 0 ? 0 : Math.max(part.leastSpare, new D(part.spareRate).times(need).ceil().toNumber());
+    const fromStock = Math.min(part.freeStock.quantity, need + spare);
+    const toBuy = need + spare - fromStock;
+    stock = stock.plus(new D(part.freeStock.bookCost ?? 0).times(fromStock));
+    if (toBuy === 0) continue;
+    const { offer, supplier, order } = choose(plan, part, toBuy);
+    goods.set(supplier, (goods.get(supplier) ?? new D(0)).plus(order.cost));
+    const price =
+      offer.breaks
+        .toSorted((a, b) => a.quantity - b.quantity)
+        .filter((step) => step.quantity <= order.quantity)
+        .at(-1)?.price ?? 0;
+    const value = new D(price).times(order.quantity - toBuy).times(rateOf(plan, offer.currency));
+    left = left.plus(value);
+    kept = kept.plus(value.times(part.keepShare));
+  }
+  for (const [supplier, sum] of goods) {
+    const small = supplier.minimumOrderValue !== null && sum.lt(supplier.minimumOrderValue);
+    const fee =
+      small && supplier.belowMinimum.term === "fee"
+        ? rounded(new D(supplier.belowMinimum.fee), supplier.currency)
+        : new D(0);
+    const handling = rounded(new D(supplier.handlingFee), supplier.currency);
+    spent = spent.plus(
+      sum.plus(fee).plus(handling).plus(freightOf(supplier, sum)).times(rateOf(plan, supplier.currency)),
+    );
+  }
+  let parcels = goods.size;
+  const boards = plan.boards.needed
+    ? kitsOf.reduce((sum, count, at) => sum + count * (plan.editions[at]?.boardsPerKit ?? 0), 0)
+    : 0;
+  if (boards > 0) {
+    const toOrder = boardsFor(boards, plan.boards.yield, plan.boards.confidence);
+    const landed = plan.boards.quotes.map((quote) =>
+      boardOrder(quote, toOrder)
+        .cost.plus(rounded(new D(quote.engineeringCharge), quote.currency))
+        .plus(rounded(new D(quote.stencilCharge), quote.currency))
+        .plus(rounded(new D(quote.freight ?? 0), quote.currency))
+        .times(rateOf(plan, quote.currency)),
+    );
+    spent = spent.plus(D.min(...landed));
+    parcels += 1;
+  }
+  for (const item of plan.packing)
+    spent = spent.plus(new D(item.costPerKit ?? 0).times(kitsIn(item.editions)));
+  for (const task of plan.work.tasks) {
+    const made = kitsIn(task.editions);
+    let sum = new D(0);
+    for (let kit = 1; kit <= made; kit += 1)
+      sum = sum.plus(factor(plan.work.learningSlope, plan.work.kitsMadeBefore + kit));
+    const minutes = new D(task.minutesPerKit).times(sum).plus(made > 0 ? task.setUpMinutes : 0);
+    spent = spent.plus(quotient(minutes.times(plan.work.ratePerHour ?? 0).div(60)));
+  }
+  for (const charge of plan.charges) {
+    const share = charge.spreadOver === null ? new D(1) : D.min(1, new D(kits).div(charge.spreadOver));
+    spent = spent.plus(quotient(new D(charge.amount).times(share)));
+  }
+  spent = spent.plus(new D(plan.replacements.share).times(kits).times(plan.replacements.costEach ?? 0));
+  return {
+    spent: spent.toFixed(),
+    used: spent.minus(kept).plus(stock).toFixed(),
+    kept: plan.editions
+      .reduce(
+        (sum, edition, at) => sum.plus(keptPerSale(plan, edition.price ?? "0").times(kitsOf[at] ?? 0)),
+        new D(0),
+      )
+      .toFixed(),
+    leftOver: left.toFixed(),
+    parcels,
+  };
+}
+
+function keptPerSale({ sale, currency }: Plan, price: string): D {
+  const charged = new D(price).plus(sale.postageCharged ?? 0);
+  const rate = new D(sale.taxRate ?? 0);
+  const tax = rounded(charged.times(rate).div(rate.plus(1)), currency);
+  const fee = rounded(charged.times(sale.feeRate ?? 0).plus(sale.feeFixed ?? 0), currency);
+  return charged
+    .minus(tax)
+    .minus(fee)
+    .minus(sale.postagePaid ?? 0);
+}
