@@ -16,6 +16,10 @@ const CHANGES = {
     subject: "The second factor is off",
     says: "signing in to Tinpenny no longer asks for a code from an authenticator.",
   },
+  identity: {
+    subject: "Another way to sign in",
+    says: "your account at Tinpenny can now be opened through an outside account that has your address.",
+  },
   "recovery-code": {
     subject: "A recovery code was used",
     says: "somebody signed in to Tinpenny with one of your recovery codes. It does not work again.",
