@@ -48,7 +48,6 @@ const LETTERS: Readonly<Record<string, PartClass>> = {
   T: "transistor",
   TR: "transistor",
   VT: "transistor",
-  V: "transistor",
   SCR: "transistor",
   U: "integrated-circuit",
   IC: "integrated-circuit",
@@ -114,6 +113,10 @@ const LETTERS: Readonly<Record<string, PartClass>> = {
 
 /** Words of the text that say the class, in several languages; the first that is found counts. */
 const TEXTS: readonly (readonly [RegExp, PartClass])[] = [
+  [
+    /\b(?:transformer|transformator|übertrager|transformateur|transformador|trasformatore|relay|relais|relé|rel[ée]|przekaźnik|fuse|polyfuse|sicherung|fusible|fusibile|bezpiecznik|pojistka|säkring|buzzer|speaker|lautsprecher|microphone|mikrofon|motor|antenna|antenne|реле|предохранитель|трансформатор)\b/i,
+    "other",
+  ],
   [
     /\b(?:screw|schraube|nut|mutter|washer|unterlegscheibe|spacer|stand-?offs?|abstands\w*|rivet|bolt|distanz\w*|knob|knopf|feet|foot|bumper|enclosure|gehäuse mit|case for|heat ?sinks?|kühlkörper|vis\b|écrou|tornillo|tuerca|vite\b|dado\b|šroub|matice|śruba|nakrętka|parafuso|porca|skruv|mutter|mounting ?hole|mount-?hole|fiducial|standoffs)/i,
     "mechanical",

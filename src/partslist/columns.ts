@@ -32,6 +32,7 @@ export function findHeading(records: readonly SheetRecord[]): number | null {
 function headingScore(cells: readonly string[]): number {
   const filled = cells.filter((cell) => cell.trim() !== "");
   if (filled.length < 2 || filled.some((cell) => cell.length > 80 && !cell.includes("\n"))) return 0;
+  const breaks = risingBreaks(filled);
   let known = 0;
   let unlikely = 0;
   const seen = new Set<Meaning>();
@@ -40,9 +41,18 @@ function headingScore(cells: readonly string[]): number {
     if (match && !seen.has(match.meaning)) {
       known += match.weight >= 5 ? 1.5 : 1;
       seen.add(match.meaning);
-    } else if (/^[\d.,\s€$£%]+$/.test(cell) || (!match && holdsDesignators(cell.trim()))) unlikely++;
+    } else if ((!breaks && /^[\d.,\s€$£%]+$/.test(cell)) || (!match && holdsDesignators(cell.trim())))
+      unlikely++;
   }
   return seen.size < 2 ? 0 : known - unlikely * 1.5 - (filled.length - known > known * 2 ? 1 : 0);
+}
+
+/** Headings such as 1, 10, 100: two and more bare whole numbers that rise. */
+function risingBreaks(filled: readonly string[]): boolean {
+  const numbers = filled
+    .filter((cell) => /^\s*\d{1,6}\s*\+?\s*$/.test(cell))
+    .map((cell) => Number.parseInt(cell, 10));
+  return numbers.length > 1 && numbers.every((number, at) => at === 0 || number > (numbers[at - 1] ?? 0));
 }
 
 /** A heading in words the vocabulary does not know, told from the rows under it. */

@@ -1,6 +1,7 @@
 import { repeatedDesignators } from "./designators.ts";
-import type { ExistingLine, Facts } from "./draft.ts";
+import type { ExistingLine } from "./draft.ts";
 import type { ListColumns } from "./list-columns.ts";
+import { askAboutPrice } from "./price-question.ts";
 import type { ReadLine } from "./read-line.ts";
 import { type Answers, ask, type RowWork } from "./row-work.ts";
 import { formatReading } from "./value-format.ts";
@@ -25,7 +26,8 @@ export function askAboutLine(work: RowWork, read: ReadLine, context: QuestionCon
   askDesignators(work, read, context);
   askValue(work, read, context);
   askMark(work, read, context);
-  askPrices(work, read, context);
+  const [priceProblem] = read.priceProblems;
+  if (priceProblem !== undefined) askAboutPrice(work, priceProblem, context.answers);
   askSpaces(work, context);
   askHardlyAPart(work, context);
 }
@@ -145,7 +147,8 @@ function askValue(work: RowWork, read: ReadLine, context: QuestionContext): void
       ? line.reading
       : null);
   if (taken === null || line.value === null) return;
-  const facts = { text: line.value, reading: formatReading(taken) };
+  const slipped = bareValue !== null && /[^\d.,\s]/.test(line.value);
+  const facts = { text: line.value, reading: formatReading(taken), slipped: slipped ? 1 : 0 };
   askOnce(work, `value-without-unit:${line.class} ${line.value}`, context, () => {
     ask(
       work,
@@ -173,28 +176,6 @@ function askMark(work: RowWork, read: ReadLine, context: QuestionContext): void 
       context.answers,
     );
   });
-}
-
-function askPrices(work: RowWork, read: ReadLine, context: QuestionContext): void {
-  const problem = read.priceProblems[0];
-  if (problem === undefined) return;
-  const { text, per } = problem;
-  const facts: Facts =
-    per === null
-      ? { text }
-      : { text, amount: per.amount, per: per.per, each: per.each, currency: per.currency };
-  const choices = per === null ? ["leave-price-out"] : ["read-from", "read-for", "leave-price-out"];
-  ask(
-    work,
-    {
-      code: "price-unclear",
-      level: per === null ? "look" : "must",
-      columns: [problem.column],
-      facts,
-      choices,
-    },
-    context.answers,
-  );
 }
 
 /** A value that differs from one of the present list by blanks only. */

@@ -128,7 +128,10 @@ export const QUESTION_WORDS: Readonly<Record<QuestionCode, Words>> = {
     },
   },
   "value-without-unit": {
-    says: (f) => `${quoted(f, "text")} has no unit.`,
+    says: (f) =>
+      f.slipped === 1
+        ? `${quoted(f, "text")} ends in letters that are no unit.`
+        : `${quoted(f, "text")} has no unit.`,
     choices: { "read-as": (f) => `Read it as ${text(f, "reading")}`, "leave-text": () => "Leave as text" },
   },
   "spaces-only-difference": {

@@ -111,12 +111,21 @@ function findLetterCode(kind: Kind, text: string): Found | null {
   const found = GRAMMARS[kind].letterCode.exec(text);
   if (!found) return null;
   const [from, whole = "", letter = "", fraction = "", unit] = found;
-  // "E" and a lone "m" are too easily part of a name; "R10" in a sentence is a designator.
-  if (whole === "" && (letter !== "R" || from !== text.trim())) return null;
-  if (/^[Em]$/.test(letter) && from.trim() !== text.trim()) return null;
-  if (kind === "resistance" && letter === "E" && !/^\d+E\d$/.test(from.trim())) return null;
-  const read = reading(kind, tidyDecimal(`${whole || "0"}.${fraction}`), letter, unit !== undefined);
+  const alone = from === text.trim();
+  // "R10" in a sentence is a designator, "E" and a lone "m" part of a name.
+  if ((whole === "" || /^[Em]$/.test(letter)) && !alone) return null;
+  if (whole === "" && letter === "E") return null;
+  const digits = tidyDecimal(`${whole || "0"}.${fraction}`);
+  const read = reading(kind, digits, letter, unit !== undefined);
   return read && { reading: { ...read, unitWritten: true }, from, at: found.index };
+}
+
+/** L for milliohm, IEC 60062:2016: "470L"; only where nothing else stands in the cell. */
+function milliohms(text: string): Found | null {
+  const found = /^(\d{0,3})L(\d{0,3})$/.exec(text);
+  if (!found || found[0].length < 2) return null;
+  const si = shiftDecimal(tidyDecimal(`${found[1] || "0"}.${found[2]}`), -3);
+  return { reading: { si, unit: "ohm", unitWritten: true }, from: found[0], at: 0 };
 }
 
 function findNumber(
@@ -177,7 +186,7 @@ export function findValue(text: string, partClass: PartClass, mark: DecimalMark 
   const found =
     firstOf([findLetterCode(kind, tidy), findNumber(kind, rules.withUnit, true, tidy, mark)]) ??
     findNumber(kind, rules.withPrefix, false, tidy, mark) ??
-    (kind === "resistance" ? bareNumber(tidy, mark) : null);
+    (kind === "resistance" ? (bareNumber(tidy, mark) ?? milliohms(tidy)) : null);
   return found && !isRange(tidy, found) ? found : null;
 }
 
