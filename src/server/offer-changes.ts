@@ -13,7 +13,6 @@ import {
   type OfferWithBreaks,
   offerCoded,
   offerOf,
-  offersForKit,
   offersForPart,
   offersFromSupplier,
   offersOfPartCount,
@@ -26,31 +25,27 @@ import { inTransaction } from "./transaction.ts";
 /** An offer as people see it, with its ladder. */
 export type OfferView = Omit<OfferRow, "workshopId"> & { breaks: { quantity: number; price: string }[] };
 
-function view({ offer: { workshopId: _, ...row }, breaks }: OfferWithBreaks): OfferView {
+/** An offer without what no screen needs. */
+export function offerView({ offer: { workshopId: _, ...row }, breaks }: OfferWithBreaks): OfferView {
   return { ...row, breaks };
-}
-
-/** Every offer for a part of the kit's list. */
-export function kitOffers({ db, kit }: Where & { kit: { id: string } }): OfferView[] {
-  return offersForKit(db, kit.id).map(view);
 }
 
 /** Every offer of one supplier of the workshop. */
 export function supplierOffers({ db, workshop }: Where, supplierId: string): OfferView[] {
   if (!supplierOf(db, workshop.id, supplierId)) throw new Problem("not-found");
-  return offersFromSupplier(db, workshop.id, supplierId).map(view);
+  return offersFromSupplier(db, workshop.id, supplierId).map(offerView);
 }
 
 /** Every offer for one part of the workshop. */
 export function partOffers({ db, workshop }: Where, partId: string): OfferView[] {
   if (!partOf(db, workshop.id, partId)) throw new Problem("not-found");
-  return offersForPart(db, workshop.id, partId).map(view);
+  return offersForPart(db, workshop.id, partId).map(offerView);
 }
 
 function found({ db, workshop }: Changing, offerId: string): OfferView {
   const row = offerOf(db, workshop.id, offerId);
   if (!row) throw new Problem("not-found");
-  return view(row);
+  return offerView(row);
 }
 
 /** One path under another: `change.3` and `orderCode` are `change.3.orderCode`. */

@@ -10,7 +10,7 @@ import { POST as addSupplier } from "#src/pages/api/workshops/[workshop]/supplie
 import { newId } from "#src/server/new-id.ts";
 import type { KitRow } from "#src/server/store/kit.ts";
 import type { PartRow } from "#src/server/store/part.ts";
-import { OFFERS_PER_PART_MOST, ROLES } from "#src/shapes/limits.ts";
+import { type LineMark, OFFERS_PER_PART_MOST, ROLES } from "#src/shapes/limits.ts";
 import { call, testApp } from "#tests/support/app.ts";
 import { anOffer, aPart, SUPPLIER } from "#tests/support/supply.ts";
 
@@ -29,11 +29,11 @@ async function ground() {
   return { workshop, as, params, supplier, part, added, listed };
 }
 
-function onLine(kit: KitRow, part: PartRow) {
+function onLine(kit: KitRow, part: PartRow, mark: LineMark = "in-kit", position = 1) {
   const row = { id: newId(), workshopId: kit.workshopId, kitId: kit.id, partId: part.id };
   app.db
     .insert(lines)
-    .values({ ...row, position: 1, designators: "LED1", mark: "in-kit", note: "" })
+    .values({ ...row, position, designators: "LED1", mark, note: "" })
     .run();
 }
 
@@ -183,15 +183,32 @@ describe("offers", () => {
     expect((await call(PATCH, { as, params: at, body: { version: 2, stockShown: 1 } })).status).toBe(404);
   });
 
-  it("of a kit are those for its parts alone", async () => {
-    const { workshop, as, params, part, added } = await ground();
+  it("of a kit are those for the parts it buys, with what the list calls them", async () => {
+    const { workshop, as, params, part, supplier, added } = await ground();
     const { body } = await added();
-    const [with_, without] = [app.kit(workshop), app.kit(workshop)];
-    onLine(with_, part);
-    const of = async (kit: KitRow) =>
-      (await call(ofKit, { as, params: { ...params, kit: kit.id }, method: "GET" })).body;
-    expect(await of(with_)).toEqual([body]);
-    expect(await of(without)).toEqual([]);
+    const [kit, without] = [app.kit(workshop), app.kit(workshop)];
+    onLine(kit, part);
+    const left = aPart(app, workshop, "Fuse");
+    onLine(kit, left, "do-not-place", 2);
+    await call(add, { as, params: { ...params, part: left.id }, body: anOffer(supplier) });
+    const of = async ({ id }: KitRow) =>
+      (await call(ofKit, { as, params: { ...params, kit: id }, method: "GET" })).body;
+    const seen = await of(kit);
+    expect(seen.offers).toEqual([body]);
+    expect(seen.parts).toEqual([
+      {
+        id: part.id,
+        name: "LED, warm white",
+        spec: "",
+        class: "led",
+        value: null,
+        lines: [1],
+        designators: "LED1",
+        choiceVersion: 0,
+      },
+    ]);
+    expect(seen.suppliers.map(({ id }) => id)).toEqual([supplier]);
+    expect((await of(without)).offers).toEqual([]);
   });
 
   it("are at most so many for a part", async () => {

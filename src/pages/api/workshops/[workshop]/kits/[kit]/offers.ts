@@ -1,5 +1,5 @@
-import { kitOffers } from "#src/server/offer-changes.ts";
+import { kitOffers } from "#src/server/kit-offers.ts";
 import { route } from "#src/server/route.ts";
 
-/** Every offer for a part of the kit's list. */
+/** The parts the kit buys and every offer for them. */
 export const GET = route({ may: "see-money", run: kitOffers });
