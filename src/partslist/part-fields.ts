@@ -61,6 +61,11 @@ function nameOf(line: DraftLine): string {
   return name.slice(0, NAME_LENGTH);
 }
 
+function specOf(line: DraftLine, name: string, properties: string): string {
+  if (line.description === null) return properties;
+  return line.description === name ? "" : line.description;
+}
+
 /**
  * The part a line of a list speaks of, as it would be kept: `"4k7"` becomes the name "4.7 kΩ" with its value in ohms;
  * what only stands in free text fills what no column says.
@@ -77,7 +82,7 @@ export function partFields(line: DraftLine): PartFields {
   return {
     class: line.class,
     name,
-    spec: line.description !== null && line.description !== name ? line.description : properties,
+    spec: specOf(line, name, properties),
     value: unit === null || unit === "W" ? null : (line.reading?.si ?? null),
     unit: unit === "W" ? null : unit,
     tolerance,
