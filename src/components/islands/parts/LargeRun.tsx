@@ -5,7 +5,7 @@ export function LargeRun({ kits }: { kits: number }) {
   return (
     <div className="flex items-center gap-x-4 gap-y-2 tablet:flex-col tablet:items-start">
       <span className="type-run">{kits}</span>
-      <RunBands kits={kits} width={206} className="min-w-0 shrink" />
+      <RunBands kits={kits} width={206} className="min-w-0 shrink!" />
     </div>
   );
 }

@@ -136,7 +136,7 @@ function Cell({ cell, workingOut }: { cell: TallyCell; workingOut?: boolean }) {
   const shown = cell.onPhone ? "" : "max-tablet:hidden";
   return (
     <li
-      className={`${shown} min-w-0 max-tablet:flex-1 tablet:ml-4 tablet:min-h-[52px] tablet:flex-auto tablet:border-l tablet:border-rule-2 tablet:pl-3.5 desktop:ml-6 desktop:pl-6`}
+      className={`${shown} min-w-0 max-tablet:flex-1 max-[22.5rem]:not-first:hidden tablet:ml-4 tablet:min-h-[52px] tablet:flex-auto tablet:border-l tablet:border-rule-2 tablet:pl-3.5 desktop:ml-6 desktop:pl-6`}
     >
       <span className="type-ruler flex items-center gap-1.5 whitespace-nowrap text-ink-2 tablet:type-label">
         {cell.label}

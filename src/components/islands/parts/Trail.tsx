@@ -38,7 +38,7 @@ function TrailPad({ stop, place, stops }: { stop: TrailStop; place: number; stop
       <a
         href={stop.href}
         aria-current={stop.here ? "step" : undefined}
-        className="group relative block min-h-11 text-ink no-underline max-tablet:flex max-tablet:min-h-10 max-tablet:w-7 max-tablet:items-center"
+        className="group relative block min-h-11 text-ink no-underline max-tablet:flex max-tablet:min-h-10 max-tablet:w-[min(28px,7.4vw)] max-tablet:items-center"
       >
         <Pad
           state={stop.state.kind}
@@ -72,7 +72,7 @@ function Trace({ laid }: { laid: boolean }) {
   return (
     <span
       aria-hidden="true"
-      className={`absolute top-5 right-0 left-7 -translate-y-1/2 tablet:top-[15px] tablet:left-[30px] ${laid ? "h-[3px] bg-copper-metal tablet:h-1 forced-colors:bg-[CanvasText]" : "border-t-[1.5px] border-dashed border-rule-2"}`}
+      className={`absolute top-5 right-0 left-[min(28px,7.4vw)] -translate-y-1/2 tablet:top-[15px] tablet:left-[30px] ${laid ? "h-[3px] bg-copper-metal tablet:h-1 forced-colors:bg-[CanvasText]" : "border-t-[1.5px] border-dashed border-rule-2"}`}
     />
   );
 }

@@ -111,7 +111,7 @@ function printWorking(): void {
 }
 
 const ROW =
-  "grid min-h-7 grid-cols-[46px_minmax(0,1fr)_auto_24px_104px] pr-4 leading-7 tablet:grid-cols-[69px_minmax(0,1fr)_auto_28px_112px] tablet:pr-7";
+  "grid items-end min-h-7 grid-cols-[46px_minmax(0,1fr)_auto_20px_84px] pr-4 leading-7 tablet:grid-cols-[69px_minmax(0,1fr)_auto_28px_112px] tablet:pr-7";
 
 /** The squared sheet itself: letters at the margin line, text, sub-amounts, sign, amount. */
 export function WorkingPaper({ paper }: { paper: Paper }) {
@@ -151,7 +151,7 @@ function PaperRow({ line, ruled }: { line: PaperLine; ruled: boolean }) {
   return (
     <>
       <div className={`${ROW} ${strong}`}>
-        <span className="pl-4 italic text-copper tablet:pl-7">{line.letter}</span>
+        <span className="self-start pl-4 italic text-copper tablet:pl-7">{line.letter}</span>
         <span className="pl-3.5">
           {line.label} <Source source={line.source} />
         </span>
@@ -175,7 +175,7 @@ function SubRow({ sub, last, children }: { sub: PaperSub; last: boolean; childre
         {sub.label} <Source source={sub.source} />
       </span>
       <span
-        className={`min-w-[84px] pl-4 text-right whitespace-nowrap text-ink-2 ${last ? "rule-head" : ""}`}
+        className={`pl-3 text-right tablet:min-w-[84px] whitespace-nowrap text-ink-2 ${last ? "-mb-[1.5px] rule-head" : ""}`}
       >
         <Opens label={sub.label} amount={sub.amount} onOpen={sub.onOpen} />
       </span>
@@ -194,7 +194,11 @@ function Carried({ sign, children }: { sign: PaperLine["sign"]; children: ReactN
 }
 
 function Amount({ line, ruled }: { line: PaperLine; ruled: boolean }) {
-  const rule = line.result ? "rule-result type-h3 font-bold leading-7" : ruled ? "rule-head" : "";
+  const rule = line.result
+    ? "-mb-1 rule-result type-h3 font-bold leading-7"
+    : ruled
+      ? "-mb-[1.5px] rule-head"
+      : "";
   return (
     <span className={`block text-right whitespace-nowrap ${rule}`}>
       {line.amount && <Opens label={line.label} amount={line.amount} onOpen={line.onOpen} />}
