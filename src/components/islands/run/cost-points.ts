@@ -9,12 +9,13 @@ export interface Span {
   to: number;
 }
 
-/** One run size. Floating-point numbers: only for pixels. */
+/** One run size. Floating-point numbers are for pixels only; `exact` holds the figures themselves. */
 export interface CostPoint {
   kits: number;
   perKit: number | null;
   total: number | null;
   kept: number | null;
+  exact: { perKit: string | null; total: string | null; kept: string | null };
   /** The next kit costs so much more that the line breaks after this one. */
   breaksAfter: boolean;
 }
@@ -23,8 +24,8 @@ export interface CostPoint {
 const STEP_MONEY = 40;
 const STEP_TIMES = 3;
 
-const pixels = (text: string | null | undefined) =>
-  text === null || text === undefined ? null : Number(text);
+/** For pixels. */
+export const pixels = (text: string | null) => (text === null ? null : Number(text));
 
 function middle(values: readonly number[]): number {
   const sorted = [...values].sort((one, other) => one - other);
@@ -44,12 +45,17 @@ export function costPoints(columns: SweepColumns, view: CostView, { from, to }: 
   const totals = view === "used" ? columns.used : columns.spent;
   const perKit = view === "used" ? columns.perKitUsed : columns.perKitSpent;
   const sizes = Array.from({ length: Math.max(0, to - from + 1) }, (_, place) => from + place);
-  const points = sizes.map((kits) => ({
-    kits,
-    perKit: pixels(perKit[kits - 1]),
-    total: pixels(totals[kits - 1]),
-    kept: pixels(columns.kept[kits - 1]),
-  }));
+  const points = sizes.map((kits) => {
+    const at = (column: readonly (string | null)[]) => column[kits - 1] ?? null;
+    const exact = { perKit: at(perKit), total: at(totals), kept: at(columns.kept) };
+    return {
+      kits,
+      perKit: pixels(exact.perKit),
+      total: pixels(exact.total),
+      kept: pixels(exact.kept),
+      exact,
+    };
+  });
   const rises = points.map(({ total }, place) => {
     const next = points[place + 1]?.total;
     return total === null || next === null || next === undefined ? 0 : next - total;

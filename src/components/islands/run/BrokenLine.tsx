@@ -1,0 +1,50 @@
+import { STEP_SEGMENT } from "#src/components/islands/chart-theme.ts";
+import type { CostPoint } from "./cost-points.ts";
+
+interface DrawnPoint {
+  x: number | null;
+  y: number | null;
+  payload?: CostPoint;
+}
+
+/** What Recharts hands to the shape of a line. */
+export interface BrokenLineProps {
+  points?: readonly DrawnPoint[];
+  stroke?: string;
+  strokeWidth?: number | string;
+}
+
+type Placed = { x: number; y: number; breaks: boolean };
+
+function placed(points: readonly DrawnPoint[]): (Placed | null)[] {
+  return points.map(({ x, y, payload }) =>
+    x === null || y === null ? null : { x, y, breaks: payload?.breaksAfter ?? false },
+  );
+}
+
+/** The path with a gap after each step, and the steps as pairs of ends. */
+function paths(points: readonly (Placed | null)[]): { line: string; steps: [Placed, Placed][] } {
+  const line: string[] = [];
+  const steps: [Placed, Placed][] = [];
+  let drawing = false;
+  for (const [place, point] of points.entries()) {
+    if (point) line.push(`${drawing ? "L" : "M"}${point.x.toFixed(2)} ${point.y.toFixed(2)}`);
+    const next = points[place + 1];
+    if (point?.breaks && next) steps.push([point, next]);
+    drawing = point !== null && !point.breaks;
+  }
+  return { line: line.join(""), steps };
+}
+
+/** A line that breaks where cost goes up in a step, its two ends joined by a fine dashed one. */
+export function BrokenLine({ points = [], stroke, strokeWidth }: BrokenLineProps) {
+  const { line, steps } = paths(placed(points));
+  return (
+    <g>
+      {steps.map(([from, to]) => (
+        <path key={from.x} d={`M${from.x} ${from.y}L${to.x} ${to.y}`} fill="none" {...STEP_SEGMENT} />
+      ))}
+      <path d={line} fill="none" stroke={stroke} strokeWidth={strokeWidth} strokeLinejoin="round" />
+    </g>
+  );
+}

@@ -1,0 +1,92 @@
+import { CartesianGrid, Line, LineChart, Tooltip, XAxis, YAxis } from "recharts";
+import {
+  axisTitle,
+  CHART_HEIGHT,
+  COST_LINE,
+  CURSOR,
+  GRID,
+  TAKINGS_LINE,
+  X_AXIS,
+  Y_AXIS,
+} from "#src/components/islands/chart-theme.ts";
+import { HatchDefs } from "#src/components/islands/parts/HatchDefs.tsx";
+import { money, wholeMoney } from "#src/components/written.ts";
+import { BrokenLine } from "./BrokenLine.tsx";
+import { ChartTip } from "./ChartTip.tsx";
+import type { CostPoint, Span } from "./cost-points.ts";
+import { EvenAreas, EvenMarks } from "./EvenMarks.tsx";
+import { roundStep, roundTicks } from "./round-ticks.ts";
+
+/** A place where takings and cost cross, with its letter. */
+export interface LetteredCrossing {
+  letter: string;
+  kits: number;
+}
+
+export interface EvenChartProps {
+  points: readonly CostPoint[];
+  span: Span;
+  run: number;
+  width: number;
+  narrow: boolean;
+  currency: string;
+  crossings: readonly LetteredCrossing[];
+  /** So many sold pay for the run; null where even all do not. */
+  soldToPay: number | null;
+  label: string;
+}
+
+/** Takings against total cost, if every kit sells. */
+export function EvenChart(props: EvenChartProps) {
+  const { points, span, width, narrow, currency } = props;
+  const top = Math.max(1, ...points.flatMap(({ total, kept }) => [total ?? 0, kept ?? 0]));
+  const low = Math.min(0, ...points.map(({ kept }) => kept ?? 0));
+  const step = roundStep(top - low, 7);
+  const ticks = roundTicks(Math.floor(low / step) * step, Math.ceil(top / step) * step, 7);
+  const written = (value: string | null) => (value === null ? "not known" : money(value, currency));
+  return (
+    <LineChart
+      width={width}
+      height={narrow ? 360 : CHART_HEIGHT.breakEven}
+      data={points as CostPoint[]}
+      margin={{ top: 12, right: narrow ? 8 : 20, bottom: 0, left: 0 }}
+      aria-label={props.label}
+    >
+      <defs>
+        <HatchDefs />
+      </defs>
+      <CartesianGrid {...GRID} />
+      <XAxis
+        {...X_AXIS}
+        dataKey="kits"
+        domain={[span.from, span.to]}
+        ticks={roundTicks(span.from, span.to, narrow ? 4 : 8)}
+        label={axisTitle("kits made and sold")}
+      />
+      <YAxis
+        {...Y_AXIS}
+        domain={[ticks[0] ?? 0, ticks.at(-1) ?? 0]}
+        ticks={ticks}
+        width={narrow ? 54 : Y_AXIS.width}
+        tickFormatter={(value: number) => wholeMoney(String(value), currency)}
+      />
+      <EvenAreas points={points} />
+      <Line {...TAKINGS_LINE} dataKey="kept" />
+      <Line {...COST_LINE} dataKey="total" shape={(line: object) => <BrokenLine {...line} />} />
+      <EvenMarks {...props} />
+      <Tooltip
+        cursor={CURSOR}
+        isAnimationActive={false}
+        content={(tip) => (
+          <ChartTip
+            {...(tip as object)}
+            lines={({ exact }) => [
+              { name: "Takings", figure: written(exact.kept) },
+              { name: "Total cost, used", figure: written(exact.total) },
+            ]}
+          />
+        )}
+      />
+    </LineChart>
+  );
+}
