@@ -20,7 +20,7 @@ const KINDS: Record<ButtonKind, string> = {
 };
 
 const SHAPE =
-  "inline-flex items-center justify-center gap-2 rounded-control border-[1.5px] border-solid text-center no-underline transition-colors tablet:whitespace-nowrap";
+  "inline-flex items-center justify-center gap-2 print:hidden rounded-control border-[1.5px] border-solid text-center no-underline transition-colors tablet:whitespace-nowrap";
 
 /** Classes of a button. At most one primary stands in a view. */
 export function buttonLook(
@@ -37,8 +37,8 @@ export function buttonLook(
 
 /** Quiet: the second choice beside a button. Petrol words, underlined, no border. */
 export const QUIET_LOOK =
-  "inline-block font-medium text-petrol underline decoration-[1.5px] underline-offset-4 hover:text-petrol-hi disabled:text-ink-2";
+  "inline-block print:hidden font-medium text-petrol underline decoration-[1.5px] underline-offset-4 hover:text-petrol-hi disabled:text-ink-2";
 
 /** "Show the working": an equals sign and words. */
 export const WORKING_LOOK =
-  "inline-flex min-h-7 items-center gap-2 type-table font-semibold text-petrol no-underline hover:text-petrol-hi hover:underline underline-offset-4";
+  "inline-flex print:hidden min-h-7 items-center gap-2 type-table font-semibold text-petrol no-underline hover:text-petrol-hi hover:underline underline-offset-4";

@@ -21,7 +21,7 @@ export function Figure({ label, value, onOpen, open, controls, className = "" }:
       aria-expanded={open}
       aria-controls={open ? controls : undefined}
       onClick={onOpen}
-      className={`foot-dotted cursor-pointer hover:border-solid hover:border-petrol focus-visible:border-solid focus-visible:border-petrol ${open ? "border-solid! border-petrol! bg-petrol-wash" : ""} ${className}`}
+      className={`foot-dotted cursor-pointer print:border-0 hover:border-solid hover:border-petrol focus-visible:border-solid focus-visible:border-petrol ${open ? "border-solid! border-petrol! bg-petrol-wash" : ""} ${className}`}
     >
       {value}
     </button>

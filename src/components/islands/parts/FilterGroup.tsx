@@ -11,7 +11,10 @@ export type FilterGroupProps = {
 /** Joined buttons; the chosen one is ink. The count stands inside: "To settle 3". */
 export function FilterGroup({ label, choices, value, onChoose }: FilterGroupProps) {
   return (
-    <fieldset className="inline-flex max-w-full flex-wrap rounded-control border-[1.5px] border-ink bg-sheet">
+    <fieldset
+      data-screen-only
+      className="inline-flex max-w-full flex-wrap rounded-control border-[1.5px] border-ink bg-sheet"
+    >
       <legend className="heard-only">{label}</legend>
       {choices.map((choice, place) => (
         <button

@@ -22,7 +22,7 @@ export function Progress({ done, of, what }: ProgressProps) {
         <span className="relative h-1 grow">
           <span className="absolute inset-x-0 top-1/2 border-t-[1.5px] border-dashed border-rule-2" />
           <span
-            className="absolute inset-y-0 left-0 bg-copper-metal transition-[width] duration-400 ease-linear"
+            className="absolute inset-y-0 left-0 bg-copper-metal forced-colors:bg-[CanvasText] transition-[width] duration-400 ease-linear"
             style={{ width: `${share * 100}%` }}
           />
         </span>

@@ -61,7 +61,7 @@ export function RepairList({ items, label }: { items: readonly RepairItem[]; lab
           <span className="max-desktop:col-start-2 [&>button]:w-full [&>button]:max-w-[330px] [&>button]:justify-start [&>button]:text-left">
             {item.suggestion}
           </span>
-          <span className="max-desktop:col-start-2">{item.other}</span>
+          <span className="type-table max-desktop:col-start-2">{item.other}</span>
         </li>
       ))}
     </ul>

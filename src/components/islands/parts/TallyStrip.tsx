@@ -67,7 +67,7 @@ export function TallyStrip({
       aria-label="The answers for this run"
       data-tally
       data-screen-only
-      className="z-20 bg-tin tablet:sticky tablet:top-0 tablet:border-t tablet:border-ink tablet:rule-result max-tablet:fixed max-tablet:inset-x-0 max-tablet:bottom-0 max-tablet:border-t-4 max-tablet:border-double max-tablet:border-ink [@media(max-height:419px)]:tablet:static"
+      className="z-20 bg-tin tablet:sticky tablet:top-0 tablet:-mt-px tablet:border-t tablet:border-ink tablet:rule-result max-tablet:fixed max-tablet:inset-x-0 max-tablet:bottom-0 max-tablet:border-t-4 max-tablet:border-double max-tablet:border-ink [@media(max-height:419px)]:tablet:static"
     >
       <div className="gutters">
         {fixed ? (
