@@ -57,7 +57,9 @@ function Cause({ cause }: { cause: ErrorCause }) {
         <span className="text-ink-2">{cause.detail}</span>
       </p>
       {cause.ways && (
-        <div className="type-table flex shrink-0 flex-col items-start gap-2 tablet:items-end">{cause.ways}</div>
+        <div className="type-table flex shrink-0 flex-col items-start gap-2 tablet:items-end">
+          {cause.ways}
+        </div>
       )}
     </div>
   );
