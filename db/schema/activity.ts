@@ -1,17 +1,15 @@
 import { index, sqliteTable, text } from "drizzle-orm/sqlite-core";
 import { id, moment } from "#db/columns.ts";
+import { ofWorkshop } from "#db/of-workshop.ts";
 import { kits } from "./kits.ts";
 import { users } from "./people.ts";
-import { workshops } from "./workshops.ts";
 
 /** Who changed what, when: written in the same transaction as the change. */
 export const activity = sqliteTable(
   "activity",
   {
     id: id("id").primaryKey(),
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
+    ...ofWorkshop(),
     kitId: id("kit_id").references(() => kits.id, { onDelete: "set null" }),
     userId: id("user_id").references(() => users.id, { onDelete: "set null" }),
     at: moment("at").notNull(),

@@ -1,20 +1,15 @@
 import { index, integer, primaryKey, sqliteTable, text } from "drizzle-orm/sqlite-core";
 import { amount, amountText, id, oneOf, version, wholeNumber } from "#db/columns.ts";
+import { ofKit } from "#db/of-kit.ts";
+import { ofWorkshop } from "#db/of-workshop.ts";
 import { BOARD_PRICE_MODELS } from "#src/shapes/limits.ts";
-import { kits } from "./kits.ts";
-import { workshops } from "./workshops.ts";
 
 /** A board house's quote for one kit's board. */
 export const boardQuotes = sqliteTable(
   "board_quotes",
   {
     id: id("id").primaryKey(),
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
-    kitId: id("kit_id")
-      .notNull()
-      .references(() => kits.id, { onDelete: "cascade" }),
+    ...ofKit(),
     boardHouse: text("board_house").notNull(),
     currency: text("currency").notNull(),
     /** Millimetres, as quoted; null: not stated. */
@@ -50,9 +45,7 @@ export const boardQuotes = sqliteTable(
 export const boardQuoteBreaks = sqliteTable(
   "board_quote_breaks",
   {
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
+    ...ofWorkshop(),
     quoteId: id("quote_id")
       .notNull()
       .references(() => boardQuotes.id, { onDelete: "cascade" }),

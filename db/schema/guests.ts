@@ -1,20 +1,16 @@
 import { index, primaryKey, sqliteTable, text, uniqueIndex } from "drizzle-orm/sqlite-core";
 import { id, moment, oneOf } from "#db/columns.ts";
+import { ofKit } from "#db/of-kit.ts";
+import { ofWorkshop } from "#db/of-workshop.ts";
 import { ROLES } from "#src/shapes/limits.ts";
 import { kits } from "./kits.ts";
 import { users } from "./people.ts";
-import { workshops } from "./workshops.ts";
 
 /** The kits a co-builder was asked to; other roles see every kit and have no rows here. */
 export const kitGuests = sqliteTable(
   "kit_guests",
   {
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
-    kitId: id("kit_id")
-      .notNull()
-      .references(() => kits.id, { onDelete: "cascade" }),
+    ...ofKit(),
     userId: id("user_id")
       .notNull()
       .references(() => users.id, { onDelete: "cascade" }),
@@ -26,9 +22,7 @@ export const invitations = sqliteTable(
   "invitations",
   {
     id: id("id").primaryKey(),
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
+    ...ofWorkshop(),
     email: text("email").notNull(),
     role: text("role", { enum: ROLES }).notNull(),
     /** For a co-builder: the kit they are asked to. */

@@ -1,17 +1,15 @@
 import { index, integer, primaryKey, sqliteTable, text } from "drizzle-orm/sqlite-core";
 import { id, moment, oneOf, version, wholeNumber } from "#db/columns.ts";
+import { ofWorkshop } from "#db/of-workshop.ts";
 import { IMPORT_KINDS, IMPORT_STATES } from "#src/shapes/limits.ts";
 import { kits } from "./kits.ts";
-import { workshops } from "./workshops.ts";
 
 /** A list being read: a draft until it is taken, kept afterwards so that it can be taken back. */
 export const imports = sqliteTable(
   "imports",
   {
     id: id("id").primaryKey(),
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
+    ...ofWorkshop(),
     /** Null for a price list, which belongs to the workshop. */
     kitId: id("kit_id").references(() => kits.id, { onDelete: "cascade" }),
     kind: text("kind", { enum: IMPORT_KINDS }).notNull(),
@@ -58,9 +56,7 @@ export const imports = sqliteTable(
 export const columnMemories = sqliteTable(
   "column_memories",
   {
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
+    ...ofWorkshop(),
     kind: text("kind", { enum: IMPORT_KINDS }).notNull(),
     fingerprint: text("fingerprint").notNull(),
     mapping: text("mapping", { mode: "json" }).notNull().$type<unknown>(),

@@ -1,15 +1,14 @@
 import { index, integer, sqliteTable, text, uniqueIndex } from "drizzle-orm/sqlite-core";
 import { amount, amountText, id, moment, oneOf, version, wholeNumber } from "#db/columns.ts";
+import { ofKit } from "#db/of-kit.ts";
+import { ofWorkshop } from "#db/of-workshop.ts";
 import { BOARD_SHAPES } from "#src/shapes/limits.ts";
-import { workshops } from "./workshops.ts";
 
 export const kits = sqliteTable(
   "kits",
   {
     id: id("id").primaryKey(),
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
+    ...ofWorkshop(),
     name: text("name").notNull(),
     /** One line that says what it does. */
     summary: text("summary").notNull(),
@@ -37,12 +36,7 @@ export const editions = sqliteTable(
   "editions",
   {
     id: id("id").primaryKey(),
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
-    kitId: id("kit_id")
-      .notNull()
-      .references(() => kits.id, { onDelete: "cascade" }),
+    ...ofKit(),
     position: integer("position").notNull(),
     name: text("name").notNull(),
     /** Share of the run as a weight. */
@@ -67,12 +61,7 @@ export const revisions = sqliteTable(
   "revisions",
   {
     id: id("id").primaryKey(),
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
-    kitId: id("kit_id")
-      .notNull()
-      .references(() => kits.id, { onDelete: "cascade" }),
+    ...ofKit(),
     number: integer("number").notNull(),
     endedAt: moment("ended_at").notNull(),
     endedBy: id("ended_by"),

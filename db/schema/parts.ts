@@ -1,17 +1,16 @@
 import { index, integer, primaryKey, sqliteTable, text } from "drizzle-orm/sqlite-core";
 import { amount, amountText, id, moment, oneOf, version, wholeNumber } from "#db/columns.ts";
+import { ofKit } from "#db/of-kit.ts";
+import { ofWorkshop } from "#db/of-workshop.ts";
 import { LINE_MARKS, PART_CLASSES, VALUE_UNITS } from "#src/shapes/limits.ts";
-import { editions, kits } from "./kits.ts";
-import { workshops } from "./workshops.ts";
+import { editions } from "./kits.ts";
 
 /** What is bought and kept in a drawer. A part belongs to the workshop; several kits may use it. */
 export const parts = sqliteTable(
   "parts",
   {
     id: id("id").primaryKey(),
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
+    ...ofWorkshop(),
     class: text("class", { enum: PART_CLASSES }).notNull(),
     /** What people call it: "10 kΩ", "NPN transistor". */
     name: text("name").notNull(),
@@ -54,12 +53,7 @@ export const lines = sqliteTable(
   "lines",
   {
     id: id("id").primaryKey(),
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
-    kitId: id("kit_id")
-      .notNull()
-      .references(() => kits.id, { onDelete: "cascade" }),
+    ...ofKit(),
     partId: id("part_id")
       .notNull()
       .references(() => parts.id),
@@ -82,9 +76,7 @@ export const lines = sqliteTable(
 export const lineQuantities = sqliteTable(
   "line_quantities",
   {
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
+    ...ofWorkshop(),
     lineId: id("line_id")
       .notNull()
       .references(() => lines.id, { onDelete: "cascade" }),
@@ -104,12 +96,7 @@ export const lineQuantities = sqliteTable(
 export const partChoices = sqliteTable(
   "part_choices",
   {
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
-    kitId: id("kit_id")
-      .notNull()
-      .references(() => kits.id, { onDelete: "cascade" }),
+    ...ofKit(),
     partId: id("part_id")
       .notNull()
       .references(() => parts.id, { onDelete: "cascade" }),

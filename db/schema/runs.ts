@@ -1,7 +1,8 @@
 import { index, integer, sqliteTable, text } from "drizzle-orm/sqlite-core";
 import { amount, amountText, id, version, wholeNumber } from "#db/columns.ts";
+import { ofKit } from "#db/of-kit.ts";
+import { ofWorkshop } from "#db/of-workshop.ts";
 import { kits } from "./kits.ts";
-import { workshops } from "./workshops.ts";
 
 /** One kit's run: how many, with which yield, spares, work and sale terms. Null: not decided. */
 export const runPlans = sqliteTable(
@@ -10,9 +11,7 @@ export const runPlans = sqliteTable(
     kitId: id("kit_id")
       .primaryKey()
       .references(() => kits.id, { onDelete: "cascade" }),
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
+    ...ofWorkshop(),
     kits: integer("kits").notNull(),
     sweepTo: integer("sweep_to").notNull(),
     spareRate: amount("spare_rate").notNull(),
@@ -55,12 +54,7 @@ export const tasks = sqliteTable(
   "tasks",
   {
     id: id("id").primaryKey(),
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
-    kitId: id("kit_id")
-      .notNull()
-      .references(() => kits.id, { onDelete: "cascade" }),
+    ...ofKit(),
     position: integer("position").notNull(),
     name: text("name").notNull(),
     /** Edition ids as JSON; null: every edition. */
@@ -81,12 +75,7 @@ export const packingItems = sqliteTable(
   "packing_items",
   {
     id: id("id").primaryKey(),
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
-    kitId: id("kit_id")
-      .notNull()
-      .references(() => kits.id, { onDelete: "cascade" }),
+    ...ofKit(),
     position: integer("position").notNull(),
     name: text("name").notNull(),
     editions: text("editions", { mode: "json" }).$type<string[] | null>(),
@@ -102,12 +91,7 @@ export const charges = sqliteTable(
   "charges",
   {
     id: id("id").primaryKey(),
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
-    kitId: id("kit_id")
-      .notNull()
-      .references(() => kits.id, { onDelete: "cascade" }),
+    ...ofKit(),
     position: integer("position").notNull(),
     name: text("name").notNull(),
     amount: amount("amount").notNull(),

@@ -1,18 +1,16 @@
 import { index, integer, primaryKey, sqliteTable, text, uniqueIndex } from "drizzle-orm/sqlite-core";
 import { amount, amountText, id, moment, oneOf, version, wholeNumber } from "#db/columns.ts";
+import { ofKit } from "#db/of-kit.ts";
+import { ofWorkshop } from "#db/of-workshop.ts";
 import { FREIGHT_TERMS, PRICE_MODELS, SMALL_ORDER_TERMS } from "#src/shapes/limits.ts";
-import { kits } from "./kits.ts";
 import { parts } from "./parts.ts";
-import { workshops } from "./workshops.ts";
 
 /** Who sells parts, with terms in the supplier's own currency. */
 export const suppliers = sqliteTable(
   "suppliers",
   {
     id: id("id").primaryKey(),
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
+    ...ofWorkshop(),
     name: text("name").notNull(),
     currency: text("currency").notNull(),
     freightTerm: text("freight_term", { enum: FREIGHT_TERMS }).notNull(),
@@ -44,9 +42,7 @@ export const offers = sqliteTable(
   "offers",
   {
     id: id("id").primaryKey(),
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
+    ...ofWorkshop(),
     partId: id("part_id")
       .notNull()
       .references(() => parts.id, { onDelete: "cascade" }),
@@ -82,9 +78,7 @@ export const offers = sqliteTable(
 export const offerBreaks = sqliteTable(
   "offer_breaks",
   {
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
+    ...ofWorkshop(),
     offerId: id("offer_id")
       .notNull()
       .references(() => offers.id, { onDelete: "cascade" }),
@@ -98,12 +92,7 @@ export const offerBreaks = sqliteTable(
 export const shutOutSuppliers = sqliteTable(
   "shut_out_suppliers",
   {
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
-    kitId: id("kit_id")
-      .notNull()
-      .references(() => kits.id, { onDelete: "cascade" }),
+    ...ofKit(),
     supplierId: id("supplier_id")
       .notNull()
       .references(() => suppliers.id, { onDelete: "cascade" }),
@@ -115,9 +104,7 @@ export const shutOutSuppliers = sqliteTable(
 export const currencyRates = sqliteTable(
   "currency_rates",
   {
-    workshopId: id("workshop_id")
-      .notNull()
-      .references(() => workshops.id, { onDelete: "cascade" }),
+    ...ofWorkshop(),
     currency: text("currency").notNull(),
     perForeignUnit: amount("per_foreign_unit").notNull(),
     dated: text("dated").notNull(),
