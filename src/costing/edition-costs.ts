@@ -4,8 +4,16 @@ import { partMoney } from "./part-lines.ts";
 import type { PreparedPlan } from "./prepared-plan.ts";
 import type { RunSheet } from "./run-sheet.ts";
 
-/** Cost of all kits of each edition in both views, in grains. */
+export const DIRECT_COSTS = ["boards", "parts", "packing", "making", "replacements"] as const;
+export type DirectCost = (typeof DIRECT_COSTS)[number];
+
+/** The run's cost by edition, in grains: each list has an entry for every edition of the plan. */
 export interface EditionCosts {
+  direct: Record<DirectCost, bigint[]>;
+  /** What the used view adds to parts: stock taken less what keeps on the shelf. */
+  shelf: bigint[];
+  /** Freight, one-off charges and setting up. */
+  joint: { whole: bigint; spent: bigint[]; used: bigint[] };
   spent: bigint[];
   used: bigint[];
 }
@@ -17,66 +25,81 @@ export interface EditionCosts {
  * the editions add up to the run exactly.
  */
 export function editionCosts(prepared: PreparedPlan, sheet: RunSheet): EditionCosts {
-  const spent = directCosts(prepared, sheet);
+  const direct = directCosts(prepared, sheet);
   const shelf = shelfByEdition(prepared, sheet);
+  const ofEdition = (edition: number) =>
+    DIRECT_COSTS.reduce((sum, head) => sum + (direct[head][edition] ?? 0n), 0n);
+  const spent = sheet.kitsOf.map((_, edition) => ofEdition(edition));
   const used = spent.map((cost, edition) => cost + (shelf[edition] ?? 0n));
-  const joint = sheet.money.freight + sheet.money.oneOff + setUpCost(prepared, sheet);
-  return { spent: withJoint(spent, joint, sheet.kitsOf), used: withJoint(used, joint, sheet.kitsOf) };
+  const whole = sheet.money.freight + sheet.money.oneOff + setUpCost(prepared, sheet);
+  const joint = {
+    whole,
+    spent: jointShares(whole, spent, sheet.kitsOf),
+    used: jointShares(whole, used, sheet.kitsOf),
+  };
+  return { direct, shelf, joint, spent: added(spent, joint.spent), used: added(used, joint.used) };
 }
 
-/** Joint costs by value of direct cost; by kits where no direct cost is known. */
-function withJoint(direct: readonly bigint[], joint: bigint, kitsOf: readonly number[]): bigint[] {
+/** Joint costs by value of direct cost; by kits where there is none. */
+function jointShares(joint: bigint, direct: readonly bigint[], kitsOf: readonly number[]): bigint[] {
   const weights = direct.map((cost) => (cost > 0n ? cost : 0n));
-  const byKits = weights.every((weight) => weight === 0n);
-  const shares = allocate(joint, byKits ? kitsOf.map(BigInt) : weights);
-  return direct.map((cost, edition) => cost + (shares[edition] ?? 0n));
+  return allocate(joint, weights.every((weight) => weight === 0n) ? kitsOf.map(BigInt) : weights);
 }
 
-function directCosts(prepared: PreparedPlan, sheet: RunSheet): bigint[] {
+function added(a: readonly bigint[], b: readonly bigint[]): bigint[] {
+  return a.map((value, index) => value + (b[index] ?? 0n));
+}
+
+function directCosts(prepared: PreparedPlan, sheet: RunSheet): Record<DirectCost, bigint[]> {
   const { plan } = prepared;
-  const sums = plan.editions.map(() => 0n);
-  const add = (amount: bigint, weights: readonly number[]) => addShares(sums, amount, weights);
-  prepared.parts.forEach(({ perKit }, index) => {
-    add(partMoney(prepared, sheet, index).goods, times(sheet.kitsOf, perKit));
-  });
-  add(sheet.money.boards, times(sheet.kitsOf, prepared.boardsPerKit));
-  for (const item of plan.packing) {
-    const has = plan.editions.map(({ id }) => Number(item.editions === null || item.editions.includes(id)));
-    add(packingCost(plan, item, sheet.kitsOf) ?? 0n, times(sheet.kitsOf, has));
-  }
-  for (const task of prepared.tasks) {
-    const { making } = taskMinutes(task, sheet.kitsOf);
-    add(workCost(plan, making) ?? 0n, times(sheet.kitsOf, task.applies.map(Number)));
-  }
-  add(sheet.money.replacements, sheet.kitsOf);
-  return sums;
+  const { kitsOf, money } = sheet;
+  const none = kitsOf.map(() => 0n);
+  const has = (editions: readonly string[] | null) =>
+    plan.editions.map(({ id }) => Number(editions === null || editions.includes(id)));
+  return {
+    boards: shared(money.boards, kitsOf, prepared.boardsPerKit),
+    parts: prepared.parts
+      .map(({ perKit }, index) => shared(partMoney(prepared, sheet, index).goods, kitsOf, perKit))
+      .reduce(added, none),
+    packing: plan.packing
+      .map((item) => shared(packingCost(plan, item, kitsOf) ?? 0n, kitsOf, has(item.editions)))
+      .reduce(added, none),
+    making: prepared.tasks
+      .map((task) => shared(makingCost(prepared, sheet, task), kitsOf, task.applies.map(Number)))
+      .reduce(added, none),
+    replacements: allocate(money.replacements, kitsOf.map(BigInt)),
+  };
 }
 
-/** What the used view adds to the spent one, by the edition that needs the part. */
-function shelfByEdition(prepared: PreparedPlan, sheet: RunSheet): bigint[] {
-  const sums = prepared.plan.editions.map(() => 0n);
-  prepared.parts.forEach(({ perKit }, index) => {
-    const { kept, stock } = partMoney(prepared, sheet, index);
-    if (kept !== stock) addShares(sums, stock - kept, times(sheet.kitsOf, perKit));
-  });
-  return sums;
+function makingCost(
+  { plan }: PreparedPlan,
+  { kitsOf }: RunSheet,
+  task: PreparedPlan["tasks"][number],
+): bigint {
+  return workCost(plan, taskMinutes(task, kitsOf).making) ?? 0n;
 }
 
 /** Cost of setting up: what work costs beyond making. */
-export function setUpCost(prepared: PreparedPlan, sheet: RunSheet): bigint {
-  const making = prepared.tasks.reduce(
-    (sum, task) => sum + (workCost(prepared.plan, taskMinutes(task, sheet.kitsOf).making) ?? 0n),
-    0n,
+function setUpCost(prepared: PreparedPlan, sheet: RunSheet): bigint {
+  return prepared.tasks.reduce((rest, task) => rest - makingCost(prepared, sheet, task), sheet.money.work);
+}
+
+function shelfByEdition(prepared: PreparedPlan, sheet: RunSheet): bigint[] {
+  return prepared.parts
+    .map(({ perKit }, index) => {
+      const { kept, stock } = partMoney(prepared, sheet, index);
+      return shared(stock - kept, sheet.kitsOf, perKit);
+    })
+    .reduce(
+      added,
+      sheet.kitsOf.map(() => 0n),
+    );
+}
+
+/** An amount split by `kits × pieces per kit`. */
+function shared(amount: bigint, kits: readonly number[], perKit: readonly number[]): bigint[] {
+  return allocate(
+    amount,
+    kits.map((count, edition) => BigInt(count) * BigInt(perKit[edition] ?? 0)),
   );
-  return sheet.money.work - making;
-}
-
-function addShares(sums: bigint[], amount: bigint, weights: readonly number[]): void {
-  allocate(amount, weights.map(BigInt)).forEach((share, edition) => {
-    sums[edition] = (sums[edition] ?? 0n) + share;
-  });
-}
-
-function times(kits: readonly number[], perKit: readonly number[]): number[] {
-  return kits.map((count, edition) => count * (perKit[edition] ?? 0));
 }

@@ -66,6 +66,7 @@ export interface WorkingLine {
   /** Section of the method this step follows. */
   rule: string;
   result: boolean;
+  /** The amount of this line was rounded to so many places, halves away from zero; null: exact or to the last place carried. */
   rounds: number | null;
 }
 
