@@ -229,8 +229,12 @@ export function guessClass(designators: readonly string[], texts: readonly (stri
   }
   const overrules = OVERRULES[designatorLetters(first ?? "")];
   if (overrules) {
-    const words = classFromText(texts.filter((text) => text !== null).join(" ; "));
-    if (words !== null && overrules.includes(words)) return { class: words, from: "text" };
+    const words = texts.filter((text) => text !== null).join(" ; ");
+    const said = TEXTS.find(
+      ([pattern, partClass]) =>
+        (partClass === byLetters || overrules.includes(partClass)) && pattern.test(words),
+    );
+    if (said && said[1] !== byLetters) return { class: said[1], from: "text" };
   }
   return { class: byLetters, from: "designator" };
 }

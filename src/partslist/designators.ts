@@ -4,6 +4,8 @@ const NUMBERED = /^([A-Za-zА-Яа-я][A-Za-zА-Яа-я_]{0,9}?)_?(\d{1,5})([A-Z
 const NAME = /^(?=.*[A-Za-z])[A-Za-z0-9_+\-*./#]{1,24}$/;
 /** An everyday word, which is no designator: Cables, Resistors, LEDs. */
 const WORD = /^(?:[A-Z]?[a-z]{3,}|[A-Z]{2,}s)$/;
+/** The common case, read without further looking: R1 or R1, R2, R3. */
+const PLAIN_LIST = /^[A-Za-z]{1,6}\d{1,5}(?:, ?[A-Za-z]{1,6}\d{1,5})*$/;
 const CONJUNCTION = /^(?:[Aa]nd|AND|und|et|y|e|i|och|en|&|\+)$/;
 /** Guards against "R1-R99999". */
 const RANGE_MOST = 2000;
@@ -129,7 +131,10 @@ function readToken(reader: Reader, raw: string): void {
 export function readDesignators(cell: string): ReadDesignators {
   const trimmed = cell.trim();
   if (trimmed === "") return NOTHING;
-  if (NUMBERED.test(trimmed)) return { designators: [trimmed], unclear: [], numbered: 1 };
+  if (PLAIN_LIST.test(trimmed)) {
+    const designators = trimmed.split(/, ?/);
+    return { designators, unclear: [], numbered: designators.length };
+  }
   const reader: Reader = { read: { designators: [], unclear: [], numbered: 0 }, prefix: "" };
   const aside = /^[^(]*\d[^(]*(\(.*\))$/s.exec(trimmed)?.[1] ?? "";
   if (aside !== "") reader.read.unclear.push(aside);

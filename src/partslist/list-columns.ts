@@ -36,6 +36,7 @@ export function cellAt(cells: readonly string[], column: number | null): string 
 
 /** The text of a cell, or `null` where it is empty or only a stroke that stands for "nothing". */
 export function textAt(cells: readonly string[], column: number | null): string | null {
-  const text = cellAt(cells, column).replace(/\s+/g, " ");
+  const cell = cellAt(cells, column);
+  const text = /\s\s|[\t\r\n]/.test(cell) ? cell.replace(/\s+/g, " ") : cell;
   return text === "" || /^(?:[~\-–—]+|n\/a|\?+)$/i.test(text) ? null : text;
 }

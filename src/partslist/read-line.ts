@@ -8,6 +8,7 @@ import { preferredHint } from "./preferred-values.ts";
 import { recogniseProperties } from "./properties.ts";
 import { type ReadQuantity, readQuantity } from "./quantities.ts";
 import { type PriceProblem, readOffers } from "./read-offers.ts";
+import type { DecimalMark } from "./sheet.ts";
 import {
   findValue,
   guessBareCapacitance,
@@ -30,6 +31,9 @@ export interface ReadLine {
   priceProblems: PriceProblem[];
 }
 
+/** Values read once, for the many rows of a list that say the same. */
+export type ReadValues = Map<string, ReadPart>;
+
 interface Texts {
   value: string | null;
   description: string | null;
@@ -44,11 +48,12 @@ function joined(
   columns: ListColumns,
   meaning: "description" | "note",
 ): string | null {
-  const texts = columns
-    .all(meaning)
-    .map((one) => textAt(cells, one.column))
-    .filter((text) => text !== null);
-  return texts.length === 0 ? null : [...new Set(texts)].join(", ");
+  let text: string | null = null;
+  for (const { column } of columns.all(meaning)) {
+    const one = textAt(cells, column);
+    if (one !== null && one !== text) text = text === null ? one : `${text}, ${one}`;
+  }
+  return text;
 }
 
 function textsOf(cells: readonly string[], columns: ListColumns): Texts {
@@ -65,13 +70,8 @@ function textsOf(cells: readonly string[], columns: ListColumns): Texts {
 }
 
 function classOf(texts: Texts, designators: readonly string[]): Pick<DraftLine, "class" | "classFrom"> {
-  const guess = guessClass(designators, [
-    texts.kind,
-    texts.description,
-    texts.value,
-    texts.package,
-    texts.partNumber,
-  ]);
+  const said = [texts.kind, texts.description, texts.value, texts.package, texts.partNumber];
+  const guess = guessClass(designators, said);
   const column = texts.kind === null ? null : classFromColumn(texts.kind);
   if (column !== null && guess.from !== "designator") return { class: column, classFrom: "column" };
   return { class: guess.class, classFrom: guess.from };
@@ -85,33 +85,38 @@ interface ReadPart {
 }
 
 /** The value from its own column, else from the description, else from a part-number cell that is nothing but a value. */
-function valueIn(texts: Texts, partClass: PartClass, columns: ListColumns): ReadPart {
-  const column = columns.first("value");
-  const mark = column === null ? null : columns.mark(column);
-  const written = texts.value === null ? null : withoutMark(texts.value) || texts.value;
-  const own = written === null ? null : readValue(written, partClass, mark);
-  const { partNumber } = texts;
-  if (own !== null) return { value: written, reading: own, partNumber, bareValue: null };
-  const bare =
-    written === null || partClass !== "capacitor" ? null : guessBareCapacitance(firstWord(written));
-  if (bare) return { value: written, reading: null, partNumber, bareValue: bare };
-  if (written !== null && /\d/.test(written))
-    return {
-      value: written,
-      reading: null,
-      partNumber,
-      bareValue: guessSlippedValue(written, partClass, mark),
-    };
+function valueIn(texts: Texts, partClass: PartClass, columns: ListColumns, values: ReadValues): ReadPart {
+  const { value, partNumber } = texts;
+  const key = `${partClass} ${value ?? ""}`;
+  const known = values.get(key) ?? ownValue(value, partClass, columns);
+  values.set(key, known);
+  if (known.reading !== null || known.bareValue !== null || /\d/.test(known.value ?? ""))
+    return { ...known, partNumber };
   for (const text of [texts.description, texts.note === null ? null : texts.kind]) {
     const found = text === null || namesTwoValues(text, partClass) ? null : findValue(text, partClass);
     if (found)
-      return { value: written ?? found.from.trim(), reading: found.reading, partNumber, bareValue: null };
+      return { value: known.value ?? found.from.trim(), reading: found.reading, partNumber, bareValue: null };
   }
   const inNumber =
     partNumber === null || !startsWithValue(partNumber) ? null : findValue(partNumber, partClass);
   if (inNumber)
-    return { value: written ?? partNumber, reading: inNumber.reading, partNumber: null, bareValue: null };
-  return { value: written, reading: null, partNumber, bareValue: null };
+    return { value: known.value ?? partNumber, reading: inNumber.reading, partNumber: null, bareValue: null };
+  return { ...known, partNumber };
+}
+
+/** What the value cell says by itself: a value, a number whose unit must be confirmed, or a text. */
+function ownValue(value: string | null, partClass: PartClass, columns: ListColumns): ReadPart {
+  const column = columns.first("value");
+  const mark = column === null ? null : columns.mark(column);
+  const written = value === null ? null : withoutMark(value) || value;
+  const reading = written === null ? null : readValue(written, partClass, mark);
+  const bare = written === null || reading !== null ? null : bareValue(written, partClass, mark);
+  return { value: written, reading, partNumber: null, bareValue: bare };
+}
+
+function bareValue(written: string, partClass: PartClass, mark: DecimalMark | null): ValueReading | null {
+  const number = partClass === "capacitor" ? guessBareCapacitance(firstWord(written)) : null;
+  return number ?? guessSlippedValue(written, partClass, mark);
 }
 
 function firstWord(text: string): string {
@@ -189,7 +194,11 @@ function quantityOf(
 }
 
 /** Reads one row that is a part. Cells that are empty stay "not known"; nothing is filled in from elsewhere. */
-export function readLine(cells: readonly string[], columns: ListColumns): ReadLine {
+export function readLine(
+  cells: readonly string[],
+  columns: ListColumns,
+  values: ReadValues = new Map(),
+): ReadLine {
   const texts = textsOf(cells, columns);
   const designatorText = cellAt(cells, columns.first("designators"));
   const { designators, unclear } = readDesignators(designatorText);
@@ -199,15 +208,12 @@ export function readLine(cells: readonly string[], columns: ListColumns): ReadLi
     quantityColumn === null ? null : columns.mark(quantityColumn),
   );
   const kind = classOf(texts, designators);
-  const part = valueIn(texts, kind.class, columns);
+  const part = valueIn(texts, kind.class, columns, values);
   const { maybeMark, ...mark } = markOf(cells, columns, texts);
   const own = ownProperties(cells, columns);
   const { offers, problems } = readOffers(cells, columns);
-  const recognised = recogniseProperties(
-    [texts.value, texts.description, texts.package, texts.note, texts.kind],
-    kind.class,
-    knownProperties(own, texts),
-  );
+  const said = [texts.value, texts.description, texts.package, texts.note, texts.kind];
+  const recognised = recogniseProperties(said, kind.class, knownProperties(own, texts));
   const line: DraftLine = {
     designators,
     designatorText,

@@ -2,14 +2,17 @@ import { askAboutTwoRows } from "./cross-questions.ts";
 import type { Answer, ExistingLine, Question, ReadResult, Row, RowCounts } from "./draft.ts";
 import { joinEqualLines, joinOffers } from "./join-lines.ts";
 import { askAboutLine, type QuestionContext } from "./line-questions.ts";
-import { type ListColumns, listColumns } from "./list-columns.ts";
+import { listColumns } from "./list-columns.ts";
 import { askAboutTables } from "./list-tables.ts";
 import type { ColumnMapping } from "./mapping.ts";
 import { settle } from "./question-effects.ts";
-import { readLine } from "./read-line.ts";
+import { type ReadValues, readLine } from "./read-line.ts";
 import { type ListShape, listShape, type RowKind, rowKind } from "./row-kind.ts";
 import { type Answers, ask, indexAnswers, type RowWork } from "./row-work.ts";
 import type { SheetRecord } from "./sheet.ts";
+
+/** Longest text of a row shown in one line. */
+const ROW_TEXT_LENGTH = 200;
 
 export interface ReadListInput {
   records: readonly SheetRecord[];
@@ -31,7 +34,8 @@ export function readList(input: ReadListInput): ReadResult {
   const columns = listColumns(input.mapping);
   const answers = indexAnswers(input.answers);
   const shape = listShape(input.records, columns);
-  const works = input.records.map((record) => startRow(record, shape, columns, answers));
+  const values: ReadValues = new Map();
+  const works = input.records.map((record) => startRow(record, shape, values, answers));
   const context: QuestionContext = {
     answers,
     columns,
@@ -66,10 +70,10 @@ function keptBothTables(works: readonly RowWork[]): boolean {
   );
 }
 
-function startRow(record: SheetRecord, shape: ListShape, columns: ListColumns, answers: Answers): RowWork {
+function startRow(record: SheetRecord, shape: ListShape, values: ReadValues, answers: Answers): RowWork {
   const kind = rowKind(record, shape);
   if (kind.kind === "skip") return { record, line: null, reason: kind.reason, read: null, questions: [] };
-  const read = readLine(record.cells, columns);
+  const read = readLine(record.cells, shape.columns, values);
   const work: RowWork = { record, line: read.line, reason: null, read, questions: [] };
   if (kind.kind === "doubtful") askWhetherAPart(work, kind, answers);
   return work;
@@ -87,12 +91,15 @@ function askWhetherAPart(work: RowWork, kind: RowKind & { kind: "doubtful" }, an
 }
 
 function rowText(record: SheetRecord): string {
-  const text = record.cells
-    .map((cell) => cell.trim())
-    .filter((cell) => cell !== "")
-    .join(" · ")
-    .replace(/\s+/g, " ");
-  return text.length > 200 ? `${text.slice(0, 199)}…` : text;
+  let text = "";
+  for (const cell of record.cells) {
+    const trimmed = cell.trim();
+    if (trimmed === "") continue;
+    text = text === "" ? trimmed : `${text} · ${trimmed}`;
+    if (text.length > ROW_TEXT_LENGTH) break;
+  }
+  const plain = /\s\s|[\t\r\n]/.test(text) ? text.replace(/\s+/g, " ") : text;
+  return plain.length > ROW_TEXT_LENGTH ? `${plain.slice(0, ROW_TEXT_LENGTH - 1)}…` : plain;
 }
 
 function finish(works: readonly RowWork[], join: readonly number[] | "all"): ReadResult {

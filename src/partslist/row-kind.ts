@@ -1,7 +1,6 @@
 import { readDesignators } from "./designators.ts";
 import type { SkipReason } from "./draft.ts";
 import { isFrameLine } from "./drawn-table.ts";
-import { plainHeading } from "./headings.ts";
 import { cellAt, type ListColumns } from "./list-columns.ts";
 import type { Meaning } from "./meanings.ts";
 import type { SheetRecord } from "./sheet.ts";
@@ -48,7 +47,7 @@ export function listShape(records: readonly SheetRecord[], columns: ListColumns)
   }
   return {
     columns,
-    heading: heading === null ? null : heading.map(plainHeading),
+    heading: heading === null ? null : heading.map((cell) => cell.trim().toLowerCase()),
     quantityFill: named === 0 ? 0 : counted / named,
     designated: designated > named * 0.5,
   };
@@ -159,7 +158,7 @@ function repeatsHeading(cells: readonly string[], { heading }: ListShape): boole
   cells.forEach((cell, column) => {
     if (cell.trim() === "") return;
     filled++;
-    if (heading[column] !== "" && heading[column] === plainHeading(cell)) same++;
+    if (heading[column] === cell.trim().toLowerCase()) same++;
   });
   return filled >= 2 && same >= 2 && same >= filled * 0.7;
 }
