@@ -1,9 +1,12 @@
-/** Keeps `data-ag-theme-mode` of `<html>` in step with the system where the person chose no theme. */
+/** Writes the grid's mode on `<html>`: the chosen theme, or the system's where the person chose none. */
+export function writeGridMode(root: HTMLElement, dark: MediaQueryList): void {
+  const { theme } = root.dataset;
+  const system = dark.matches ? "dark" : "light";
+  root.dataset.agThemeMode = theme === "light" || theme === "dark" ? theme : system;
+}
+
+/** Keeps `data-ag-theme-mode` of `<html>` right from the start and when the system changes. */
 export function followSystemTheme(root: HTMLElement, dark: MediaQueryList): void {
-  if (root.dataset.theme !== "system") return;
-  const write = () => {
-    root.dataset.agThemeMode = dark.matches ? "dark" : "light";
-  };
-  write();
-  dark.addEventListener("change", write);
+  writeGridMode(root, dark);
+  dark.addEventListener("change", () => writeGridMode(root, dark));
 }

@@ -1,6 +1,6 @@
 /**
  * The theme a person chose. Stored in the cookie `theme`, read on the server so that the first paint is right;
- * `system` leaves the choice to the browser's own setting.
+ * `system` leaves the choice to the browser's own setting. `choose-theme.ts` writes it, `ThemeChoice.tsx` asks.
  */
 export const THEME_COOKIE = "theme";
 export const THEME_CHOICES = ["light", "dark", "system"] as const;

@@ -25,9 +25,11 @@ describe("following the system's theme", () => {
     expect(root.dataset.agThemeMode).toBe("light");
   });
 
-  it("leaves a chosen theme alone", () => {
+  it("keeps a chosen theme whatever the system says", () => {
     const root = pageWith("light");
-    followSystemTheme(root, new Query(true) as unknown as MediaQueryList);
-    expect(root.dataset.agThemeMode).toBeUndefined();
+    const dark = new Query(true);
+    followSystemTheme(root, dark as unknown as MediaQueryList);
+    dark.dispatchEvent(new Event("change"));
+    expect(root.dataset.agThemeMode).toBe("light");
   });
 });

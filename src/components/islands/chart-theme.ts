@@ -56,6 +56,17 @@ const LINE = {
 export const COST_LINE = { ...LINE, stroke: INK, strokeWidth: 2.25 } as const;
 export const TAKINGS_LINE = { ...LINE, stroke: PETROL, strokeWidth: 2.75 } as const;
 export const NET_LINE = { ...LINE, stroke: PETROL, strokeWidth: 1.75, strokeDasharray: "7 4" } as const;
+/** An area between two lines: loss hatched, profit plain. */
+const AREA = {
+  type: "linear",
+  stroke: "none",
+  fillOpacity: 1,
+  activeDot: false,
+  isAnimationActive: false,
+} as const;
+export const LOSS_AREA = { ...AREA, fill: "url(#hatch-loss)" } as const;
+export const PROFIT_AREA = { ...AREA, fill: PETROL_WASH } as const;
+export const SAVINGS_AREA = { ...AREA, fill: "url(#hatch-savings)" } as const;
 /** Joins the two ends of a step in cost. */
 export const STEP_SEGMENT = { stroke: RULE_2, strokeWidth: 1.25, strokeDasharray: "2 3" } as const;
 /** A step in money larger than this breaks the line. */

@@ -96,6 +96,7 @@ export const gridTheme = themeQuartz
     wrapperBorderRadius: 0,
     columnBorder: false,
     headerColumnBorder: false,
+    pinnedColumnBorder: false,
     pinnedRowFontWeight: 600,
     cellEditingShadow: "none",
     popupShadow: "none",
