@@ -1,6 +1,6 @@
 import type { Db } from "#db/client.ts";
 import { groupBy } from "#db/group-by.ts";
-import type { PartsSnapshot, SnapshotPart } from "#src/shapes/parts-snapshot.ts";
+import { PartsSnapshot, type SnapshotPart } from "#src/shapes/parts-snapshot.ts";
 import { revisionLetter } from "#src/shapes/revision-letter.ts";
 import { newId } from "./new-id.ts";
 import { type Changing, noteChange } from "./note-change.ts";
@@ -8,7 +8,7 @@ import { editionsOf } from "./store/edition.ts";
 import { beginNextRevision, type KitRow } from "./store/kit.ts";
 import { lineQuantitiesOf, linesOf } from "./store/line.ts";
 import type { PartRow } from "./store/part.ts";
-import { addRevision, type RevisionRow } from "./store/revision.ts";
+import { addRevision, lastRevisionOf, type RevisionRow } from "./store/revision.ts";
 
 function snapshotPart(part: PartRow): SnapshotPart {
   const { workshopId, freeStock, stockCost, createdAt, version, ...read } = part;
@@ -61,4 +61,28 @@ export function endRevision(by: Changing, kit: KitRow): { ended: RevisionRow; ki
     },
   );
   return { ended, kit: beginNextRevision(by.db, kit.id) };
+}
+
+/** A revision that has ended, with its lines as they are compared. */
+export interface EndedRevision {
+  revision: string;
+  endedAt: number;
+  editions: PartsSnapshot["editions"];
+  lines: (Omit<PartsSnapshot["lines"][number], "quantities"> & { quantities: Record<string, number> })[];
+}
+
+/** The last revision that has ended; `null` while the first one lasts. */
+export function lastRevision(db: Db, kitId: string): EndedRevision | null {
+  const row = lastRevisionOf(db, kitId);
+  if (!row) return null;
+  const snapshot = PartsSnapshot.parse(row.snapshot);
+  return {
+    revision: revisionLetter(row.number),
+    endedAt: row.endedAt,
+    editions: snapshot.editions,
+    lines: snapshot.lines.map((line) => ({
+      ...line,
+      quantities: Object.fromEntries(line.quantities.map(({ edition, perKit }) => [edition, perKit])),
+    })),
+  };
 }

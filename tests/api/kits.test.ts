@@ -5,7 +5,7 @@ import {
   PATCH as changeLines,
   GET as lines,
 } from "#src/pages/api/workshops/[workshop]/kits/[kit]/lines/index.ts";
-import { POST as endRevision } from "#src/pages/api/workshops/[workshop]/kits/[kit]/revisions.ts";
+import { POST as endRevision } from "#src/pages/api/workshops/[workshop]/kits/[kit]/revisions/index.ts";
 import { GET as kitList, POST as newKit } from "#src/pages/api/workshops/[workshop]/kits/index.ts";
 import { activitySince } from "#src/server/store/activity.ts";
 import { runPlanOf } from "#src/server/store/run-plan.ts";

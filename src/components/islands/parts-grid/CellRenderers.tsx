@@ -1,0 +1,139 @@
+import type { CustomCellEditorProps, CustomCellRendererProps } from "ag-grid-react";
+import { useEffect, useRef } from "react";
+import { Bands } from "#src/components/islands/parts/Bands.tsx";
+import { Chip } from "#src/components/islands/parts/Chip.tsx";
+import type { GridContext } from "./grid-context.ts";
+import type { GridRow } from "./grid-rows.ts";
+
+type CellProps = CustomCellRendererProps<GridRow, string, GridContext>;
+
+/** The number of a line: a button that opens all of its fields. The grid's Enter key does the same. */
+export function PlaceCell({ data, context }: CellProps) {
+  if (data?.kind !== "line") return null;
+  return (
+    <button
+      type="button"
+      tabIndex={-1}
+      aria-label={`Line ${data.place}, all fields`}
+      onClick={() => context.openLine(data.id)}
+      className="w-full cursor-pointer text-right underline decoration-rule-2 decoration-dotted underline-offset-4 hover:text-petrol"
+    >
+      {data.place}
+    </button>
+  );
+}
+
+/** A part: what it is called, then the rest more quietly. On a phone below each other. */
+export function PartCell({ data, value }: CellProps) {
+  if (data?.kind !== "line") return <span className="text-ink-3">{value}</span>;
+  const { name, spec } = data.line.part;
+  if (value !== (spec === "" ? name : `${name}, ${spec}`)) return <span>{value}</span>;
+  return (
+    <span className="max-tablet:flex max-tablet:flex-col max-tablet:py-1.5 max-tablet:leading-[1.1875rem] max-tablet:whitespace-normal">
+      <b className="font-semibold">{name}</b>{" "}
+      <span className="text-ink-2 tablet:ml-1.5 max-tablet:text-[0.9375rem]">{spec}</span>
+    </span>
+  );
+}
+
+export function BandsCell({ data }: CellProps) {
+  if (data?.kind !== "line" || data.bands === null) return null;
+  return (
+    <Bands
+      colours={data.bands.colours}
+      tolerance={data.bands.tolerance}
+      width={64}
+      className="align-middle"
+    />
+  );
+}
+
+/** Supplier, then the order code more quietly. A pinned offer says so. */
+export function SupplierCell({ data, value }: CellProps) {
+  if (data?.kind !== "line" || !data.money) return null;
+  const { supplier, orderCode, pinned } = data.money;
+  if (supplier === "") return <span className="text-ink-2">{value}</span>;
+  return (
+    <span>
+      {supplier} <span className="text-ink-2">{orderCode}</span>
+      {pinned && <span className="text-ink-2">, pinned</span>}
+    </span>
+  );
+}
+
+/** What one kit's share costs: opens its working. */
+export function PerKitCell({ data, value, node, context }: CellProps) {
+  if (node.rowPinned) return <span className="rule-result inline-block pl-3">{value}</span>;
+  if (data?.kind !== "line" || !value) return null;
+  return (
+    <button
+      type="button"
+      tabIndex={-1}
+      aria-label={`Per kit ${value}, show the working`}
+      onClick={() => context.openWorking(data.line.part.id)}
+      className="foot-dotted cursor-pointer leading-6 hover:border-petrol hover:border-solid"
+    >
+      {value}
+    </button>
+  );
+}
+
+export function StateCell({ data, value }: CellProps) {
+  if (data?.kind === "draft") return value ? <Chip kind="caution">{value}</Chip> : null;
+  if (data?.kind !== "line") return null;
+  const { kind, word } = data.state;
+  return (
+    <Chip kind={kind} className="align-middle">
+      {word}
+    </Chip>
+  );
+}
+
+/** The heading of a group of lines. */
+export function GroupCell({ data }: CellProps) {
+  if (data?.kind !== "group") return null;
+  return (
+    <div className="flex h-full items-end gap-3 px-2.5 pb-1.5">
+      <b className="font-semibold">{data.name}</b>
+      <span className="text-ink-2">{data.count === 1 ? "1 line" : `${data.count} lines`}</span>
+    </div>
+  );
+}
+
+export interface EditorChoice {
+  value: string;
+  words: string;
+}
+
+/** One of a list, in a cell: the browser's own select, opened at once. */
+export function ChoiceEditor({
+  value,
+  onValueChange,
+  stopEditing,
+  colDef,
+  choices,
+}: CustomCellEditorProps<GridRow, string> & { choices: readonly EditorChoice[] }) {
+  const select = useRef<HTMLSelectElement>(null);
+  useEffect(() => {
+    select.current?.focus();
+  }, []);
+  return (
+    <select
+      ref={select}
+      aria-label={colDef.headerName}
+      value={value ?? ""}
+      onChange={(change) => {
+        onValueChange(change.currentTarget.value);
+        // The grid reads the value after React has handed it over.
+        setTimeout(() => stopEditing());
+      }}
+      className="h-full w-full bg-sheet px-2 text-ink"
+    >
+      {choices.map((choice) => (
+        <option key={choice.value} value={choice.value}>
+          {choice.words}
+        </option>
+      ))}
+    </select>
+  );
+}

@@ -1,0 +1,192 @@
+import { moneyText, unitPriceText } from "#src/components/amount-text.ts";
+import { CLASS_WORDS, CLASSES_IN_ORDER } from "#src/components/part-words.ts";
+import { roundedText } from "#src/costing/decimal.ts";
+import type { PartLine, RunResult } from "#src/costing/run-result.ts";
+import { compressDesignators, repeatedDesignators } from "#src/partslist/designators.ts";
+import { type ResistorBands, resistorBands } from "#src/partslist/resistor-bands.ts";
+import type { LineView, PartsList, PricedPartView } from "#src/server/present.ts";
+import type { Plan } from "#src/shapes/plan.ts";
+import { buyingState, IN_ORDER, type LineState, listState } from "./line-state.ts";
+
+type AnyLine = LineView | LineView<PricedPartView>;
+
+/** What the reckoning says of a line's part, as it is shown. */
+export interface LineMoney {
+  /** Supplier and order code that is bought from; empty where nothing is. */
+  supplier: string;
+  orderCode: string;
+  pinned: boolean;
+  /** Pieces ordered for the run; a part used by several lines is bought once. */
+  buy: number;
+  each: string;
+  perKit: string;
+  /** The line further up that the same part is bought with; `null` for the first line of a part. */
+  boughtWith: string | null;
+}
+
+export interface LineRow {
+  kind: "line";
+  id: string;
+  /** Its number in the list, counted from 1. */
+  place: number;
+  line: AnyLine;
+  designators: string;
+  bands: ResistorBands | null;
+  state: LineState;
+  money: LineMoney | null;
+}
+export interface GroupRow {
+  kind: "group";
+  id: string;
+  name: string;
+  count: number;
+}
+/** The line that is being written. */
+export interface DraftRow {
+  kind: "draft";
+  id: "draft";
+}
+/** The last row: what all lines come to. */
+export interface TotalRow {
+  kind: "total";
+  id: "total";
+  cells: Readonly<Record<string, string>>;
+}
+export type GridRow = LineRow | GroupRow | DraftRow | TotalRow;
+
+/** A unit price at least at three decimals. */
+const UNIT_PLACES = 3;
+
+function eachText(bought: PartLine): string {
+  const [order] = bought.orders;
+  if (!order) return "";
+  if (bought.orders.length > 1) return "several";
+  if (order.breakReached) return unitPriceText(order.breakReached.price, order.currency);
+  return order.lots.length > 0 ? "in lots" : "";
+}
+
+function moneyOf(plan: Plan, bought: PartLine, boughtWith: string | null): LineMoney {
+  const [order] = bought.orders;
+  const perKit = bought.perKit.spent;
+  const names = bought.orders.map((one) => plan.suppliers.find(({ id }) => id === one.supplier)?.name ?? "");
+  const known = perKit.known
+    ? unitPriceText(roundedText(perKit.value, UNIT_PLACES), plan.currency)
+    : "not known";
+  return {
+    supplier: names.join(" + "),
+    orderCode: bought.orders.length === 1 ? (order?.orderCode ?? "") : "",
+    pinned: order?.pinned ?? false,
+    buy: bought.ordered,
+    each: eachText(bought),
+    perKit: known,
+    boughtWith,
+  };
+}
+
+interface Bought {
+  plan: Plan;
+  run: RunResult;
+}
+
+/** For each line its row: number, colour code, state, and what the reckoning says of its part. */
+export function lineRows(list: PartsList, bought: Bought | null): LineRow[] {
+  const all = list.lines.flatMap(({ designators }) => (designators === "" ? [] : designators.split(", ")));
+  const repeated = new Set(repeatedDesignators(all));
+  const planParts = new Map(bought?.plan.parts.map((part) => [part.id, part]));
+  const partLines = new Map(bought?.run.parts.map((part) => [part.id, part]));
+  const firstLines = new Map<string, string>();
+  return list.lines.map((line: AnyLine, place): LineRow => {
+    const own = listState(line, repeated);
+    const [planned, reckoned] = [planParts.get(line.part.id), partLines.get(line.part.id)];
+    const isBought = line.mark === "in-kit" || line.mark === "option";
+    const state =
+      own ?? (bought && planned && reckoned ? buyingState(bought.plan, planned, reckoned) : IN_ORDER);
+    const { value, unit, tolerance } = line.part;
+    const first = isBought ? firstLines.get(line.part.id) : undefined;
+    if (isBought && first === undefined)
+      firstLines.set(line.part.id, line.designators || `line ${place + 1}`);
+    return {
+      kind: "line",
+      id: line.id,
+      place: place + 1,
+      line,
+      designators: line.designators === "" ? "" : compressDesignators(line.designators.split(", ")),
+      bands:
+        line.part.class === "resistor" && unit === "ohm" && value !== null
+          ? resistorBands(value, tolerance ?? toleranceIn(line.part.spec))
+          : null,
+      state,
+      money: bought && reckoned && isBought ? moneyOf(bought.plan, reckoned, first ?? null) : null,
+    };
+  });
+}
+
+/** A tolerance that only stands in the words: "5 %, 0.25 W". */
+function toleranceIn(spec: string): string | null {
+  return /(?:^|[\s,±])(\d+(?:[.,]\d+)?)\s?%/.exec(spec)?.[1] ?? null;
+}
+
+/** Which rows are looked at: all, those to settle, or those that changed since the last revision. */
+export type LineFilter = "all" | "to-settle" | "changed";
+
+const folded = (text: string) => text.toLowerCase().replace(/\u00a0/g, " ");
+
+function said(row: LineRow): string {
+  const { part, note, designators } = row.line;
+  const { name, spec, package: body, drawer, manufacturer, manufacturerPartNumber } = part;
+  const words = [designators, row.designators, name, spec, body, drawer, note, manufacturer];
+  return folded([...words, manufacturerPartNumber, row.money?.supplier, row.money?.orderCode].join(" "));
+}
+
+/** The rows that a filter and the words in the find box leave; every word must be found. */
+export function filteredRows(
+  rows: readonly LineRow[],
+  filter: LineFilter,
+  find: string,
+  changed: ReadonlySet<string>,
+): LineRow[] {
+  const words = folded(find).split(/\s+/).filter(Boolean);
+  return rows.filter((row) => {
+    if (filter === "to-settle" && !row.state.toSettle) return false;
+    if (filter === "changed" && !changed.has(row.id)) return false;
+    const text = words.length > 0 ? said(row) : "";
+    return words.every((word) => text.includes(word));
+  });
+}
+
+/** Rows under a heading for each kind of part, in the order a board is built. */
+export function groupedRows(rows: readonly LineRow[]): GridRow[] {
+  return CLASSES_IN_ORDER.flatMap((kind): GridRow[] => {
+    const own = rows.filter(({ line }) => line.part.class === kind);
+    if (own.length === 0) return [];
+    const head: GroupRow = {
+      kind: "group",
+      id: `group ${kind}`,
+      name: CLASS_WORDS[kind].many,
+      count: own.length,
+    };
+    return [head, ...own];
+  });
+}
+
+/** Pieces in one kit of an edition, do-not-place lines left out. */
+export function piecesIn(list: PartsList, edition: string): number {
+  return list.lines
+    .filter(({ mark }) => mark !== "do-not-place")
+    .reduce((sum: number, { quantities }) => sum + (quantities[edition] ?? 0), 0);
+}
+
+/** What all parts cost: for the run, and in one kit, as all that is spent on them without freight. */
+export interface PartsTotal {
+  run: string;
+  perKit: string;
+}
+
+export function partsTotal({ plan, run }: Bought): PartsTotal | null {
+  const head = run.heads.find(({ id }) => id === "parts");
+  if (!head?.spent.known || !head.perKit.spent.known) return null;
+  return {
+    run: moneyText(head.spent.value, plan.currency),
+    perKit: moneyText(head.perKit.spent.value, plan.currency),
+  };
+}
