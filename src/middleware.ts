@@ -49,7 +49,9 @@ async function page(context: APIContext, next: () => Promise<Response>): Promise
 
 async function api(next: () => Promise<Response>): Promise<Response> {
   try {
-    return await next();
+    const response = await next();
+    const isOurs = response.headers.get("content-type")?.includes("json") ?? false;
+    return response.status === 404 && !isOurs ? problemReply(new Problem("not-found")) : response;
   } catch (error) {
     console.error(error);
     return problemReply(new Problem("our-mistake"));

@@ -67,3 +67,14 @@ export function pageHead(
     yours: yours(db, user, workshop.id),
   };
 }
+
+/** The header of a person's pages outside any workshop: the way to each of theirs. */
+export function ownHead(db: Db, user: UserRow): PageHead {
+  const { name } = user;
+  return {
+    home: "/",
+    places: [],
+    people: [{ name, initials: initials(name), you: true }],
+    yours: yours(db, user, ""),
+  };
+}

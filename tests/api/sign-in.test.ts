@@ -187,14 +187,14 @@ describe("signing out", () => {
   it("ends the session and empties the cookie", async () => {
     const person = app.person();
     const answer = await call(signOut, { as: person });
-    expect(answer.status).toBe(204);
+    expect([answer.status, answer.headers.get("location")]).toEqual([303, "/sign-in"]);
     expect(answer.headers.get("set-cookie")).toMatch(/^tinpenny=; .*Max-Age=0/);
     expect((await call(readAccount, { as: person })).status).toBe(401);
   });
 
   it("can be done while the second factor is still owed", async () => {
     const cookie = app.signIn(app.person(), false);
-    expect((await call(signOut, { cookie })).status).toBe(204);
+    expect((await call(signOut, { cookie })).status).toBe(303);
     expect((await call(signOutEverywhere, { cookie })).status).toBe(401);
   });
 
