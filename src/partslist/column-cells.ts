@@ -2,6 +2,8 @@ import { looksLikeDesignators, readDesignators } from "./designators.ts";
 
 /** What the cells of a column hold, as shares of the filled cells (0 to 1). */
 export interface ColumnCells {
+  /** Whether the column has a heading. */
+  headed: boolean;
   filled: number;
   /** Filled cells as a share of the rows looked at. */
   fill: number;
@@ -57,7 +59,7 @@ const EMPTY_SHARES = {
 type Shares = typeof EMPTY_SHARES;
 
 /** Looks at the cells of one column (a sample is enough) and says what they hold. */
-export function lookAtColumn(cells: readonly string[]): ColumnCells {
+export function lookAtColumn(cells: readonly string[], headed = false): ColumnCells {
   const filled = cells.map((cell) => cell.trim()).filter((cell) => cell !== "");
   const counts: Shares = { ...EMPTY_SHARES };
   for (const cell of filled) count(counts, cell);
@@ -65,6 +67,7 @@ export function lookAtColumn(cells: readonly string[]): ColumnCells {
   for (const key of Object.keys(counts) as (keyof Shares)[]) shares[key] = counts[key] / (filled.length || 1);
   return {
     ...shares,
+    headed,
     filled: filled.length,
     fill: filled.length / (cells.length || 1),
     sequence: countsUp(filled),

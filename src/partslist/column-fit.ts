@@ -36,10 +36,13 @@ function designators(cells: ColumnCells): Fit {
 function quantity(cells: ColumnCells, agreement: number): Fit {
   if (agreement >= 0.7) return { fit: 6, alone: 6 };
   if (cells.sequence && cells.distinct > 0.9) return { fit: -3, alone: 0 };
-  if (cells.integers >= 0.8) return { fit: 4, alone: cells.distinct < 0.6 && !cells.sequence ? 2.6 : 0 };
+  if (cells.integers >= 0.8) {
+    const plausible = !cells.sequence && (cells.distinct < 0.6 || !cells.headed);
+    return { fit: 4, alone: plausible && cells.examples.every((cell) => cell.length < 5) ? 2.6 : 0 };
+  }
   if (cells.integers >= 0.5) return { fit: 2, alone: 0 };
   if (cells.integers + cells.decimals + cells.codes >= 0.3) return { fit: 0, alone: 0 };
-  return { fit: -5, alone: 0 };
+  return { fit: cells.designators + cells.values + cells.urls > 0.5 ? -5 : -3, alone: 0 };
 }
 
 function lineNumber(cells: ColumnCells): Fit {

@@ -205,7 +205,10 @@ export function guessColumns(
   let columns = headings.length;
   for (const row of rows) columns = Math.max(columns, row.length);
   const cells = Array.from({ length: columns }, (_, column) =>
-    lookAtColumn(rows.map((row) => row[column] ?? "")),
+    lookAtColumn(
+      rows.map((row) => row[column] ?? ""),
+      (headings[column] ?? "").trim() !== "",
+    ),
   );
   const designators = bestDesignators(headings, cells);
   const agree = designators === null ? [] : agreements(rows, designators, columns);

@@ -123,6 +123,12 @@ function readToken(reader: Reader, raw: string): void {
     reader.read.unclear.push(raw);
 }
 
+/** A cell that begins with a word is a text that happens to name something: "Vite M3". */
+function isText(cell: string, read: ReadDesignators): boolean {
+  const [first = ""] = cell.split(/[\s,;]+/);
+  return read.unclear.includes(first) && read.unclear.length >= read.designators.length;
+}
+
 /**
  * The designators of one cell, expanded in the order written: `"R1-R3, R7"` is R1, R2, R3, R7;
  * `"C1,3,6"` is C1, C3, C6. A range must rise and keep its letters: `"U1-1"` is a name.
@@ -140,7 +146,7 @@ export function readDesignators(cell: string): ReadDesignators {
   if (aside !== "") reader.read.unclear.push(aside);
   for (const token of tokens(normalise(trimmed.slice(0, trimmed.length - aside.length))))
     readToken(reader, token);
-  return reader.read;
+  return isText(trimmed, reader.read) ? { designators: [], unclear: [trimmed], numbered: 0 } : reader.read;
 }
 
 /** True where the whole cell reads as numbered designators; how a column of them is known without a heading. */

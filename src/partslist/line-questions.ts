@@ -27,7 +27,8 @@ export function askAboutLine(work: RowWork, read: ReadLine, context: QuestionCon
   askValue(work, read, context);
   askMark(work, read, context);
   const [priceProblem] = read.priceProblems;
-  if (priceProblem !== undefined) askAboutPrice(work, priceProblem, context.answers);
+  if (priceProblem !== undefined)
+    askAboutPrice(work, priceProblem, work.line?.offers[0]?.prices ?? [], context.answers);
   askSpaces(work, context);
   askHardlyAPart(work, context);
 }

@@ -53,7 +53,7 @@ function valueKey(text: string | null, partClass: KnownPart["class"]): string | 
 export function matchPart(draft: PriceDraft, index: PartIndex): Match {
   const byCode = draft.orderCode === null ? undefined : index.byOrderCode.get(code(draft.orderCode));
   if (byCode) return settled(byCode, "order-code");
-  const byNumber = [draft.partNumber, draft.value]
+  const byNumber = [draft.partNumber, draft.value, draft.orderCode, draft.description]
     .map((text) => (text === null ? undefined : index.byPartNumber.get(code(text))))
     .find((found) => found);
   if (byNumber) return settled(byNumber, "part-number");

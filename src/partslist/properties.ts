@@ -43,7 +43,7 @@ const PACKAGES: readonly RegExp[] = [
   /(?<![A-Za-z0-9])(DO-?(?:35|41|15|201|27|34|7|214AC|214AA)|SOD-?\d{2,3}[A-Z]*|SM[ABC](?=\b))(?![0-9])/i,
   /(?<![A-Za-z0-9])(HC-?49(?:\/?[A-Z]{1,2})?)(?![A-Za-z0-9])/i,
   /(?<![A-Za-z0-9.])(?:[CRLD]_?|SMD ?|LED_?|DIN)?(0201|0402|0603|0805|1206|1210|1812|2010|2512|0204|0207|0309|0411|0414)(?![A-Za-z0-9])/,
-  /\b(axial|radial)\b/i,
+  /\b(a[xs]s?ial|radial)(?:e|es|o)?\b/i,
 ];
 
 /** A number of the text as decimal text. */
@@ -109,7 +109,10 @@ function packageIn(text: string): { value: string; from: string } | null {
   const found = first(PACKAGES, text);
   return (
     found && {
-      value: (found[1] ?? "").toUpperCase().replace(/^(AXIAL|RADIAL)$/, (word) => word.toLowerCase()),
+      value: (found[1] ?? "")
+        .toUpperCase()
+        .replace(/^A[XS]+IAL$/, "axial")
+        .replace(/^RADIAL$/, "radial"),
       from: found[0].trim(),
     }
   );

@@ -7,8 +7,8 @@ import { readMoney } from "./prices.ts";
 export interface PriceProblem {
   column: number;
   text: string;
-  /** Index of the offer it belongs to. */
-  offer: number;
+  /** From how many pieces the price holds, as heading or column say; 1 where they do not. */
+  quantity: number;
   /** For "0,66/100". */
   per: { amount: string; per: number; each: string; currency: string | null } | null;
 }
@@ -63,13 +63,13 @@ function readPrices(cells: readonly string[], columns: ListColumns, problems: Pr
     const quantity = column.breakQuantity ?? (Number(cellAt(cells, fromColumn)) || 1);
     if (read.kind === "price")
       prices.push({ quantity, amount: read.amount, currency: read.currency ?? listed });
-    if (read.kind === "unclear") problems.push({ column: column.column, text, offer: 0, per: null });
+    if (read.kind === "unclear") problems.push({ column: column.column, text, quantity, per: null });
     if (read.kind === "per") {
       const { amount, per, each, currency } = read;
       problems.push({
         column: column.column,
         text,
-        offer: 0,
+        quantity,
         per: { amount, per, each, currency: currency ?? listed },
       });
     }

@@ -202,7 +202,7 @@ function askPrice(work: PriceWork, offer: PriceDraft, answers: Answers): string 
     );
   }
   const { per } = problem;
-  const choice = choiceOf(askAboutPrice(work, problem, answers));
+  const choice = choiceOf(askAboutPrice(work, problem, offer.breaks, answers));
   if (per !== null && choice !== "leave-price-out")
     offer.breaks.push({
       quantity: per.per,

@@ -61,12 +61,12 @@ function names(cells: readonly string[], columns: ListColumns): boolean {
 export function rowKind(record: SheetRecord, shape: ListShape): RowKind {
   const filled = record.cells.filter((cell) => cell.trim() !== "");
   if (filled.length === 0) return { kind: "skip", reason: "blank" };
+  const first = (filled[0] ?? "").trim();
+  if (filled.every((cell) => isFrameLine(cell.trim()))) return { kind: "skip", reason: "separator" };
   const { headerRecord } = shape.columns;
   if (headerRecord !== null && record.record < headerRecord)
     return { kind: "skip", reason: "above-the-heading" };
   if (record.record === headerRecord) return { kind: "skip", reason: "heading" };
-  const first = (filled[0] ?? "").trim();
-  if (filled.length === 1 && isFrameLine(first)) return { kind: "skip", reason: "separator" };
   if (repeatsHeading(record.cells, shape)) return { kind: "skip", reason: "repeated-heading" };
   if (COMMENT.test(first)) return filled.length > 1 ? doubtful("commented-out") : skip("remark");
   return partOrText(record, filled, shape);
