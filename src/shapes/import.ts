@@ -40,6 +40,13 @@ export const AnswerEntry = z.strictObject({
   typed: z.string().max(limits.TEXT_LENGTH).optional(),
 });
 
+/** What a draft keeps of a person's decisions about its rows. */
+export const DraftDecisions = z.strictObject({
+  answers: z.array(AnswerEntry),
+  join: z.union([z.literal("all"), z.array(Row)]),
+});
+export type DraftDecisions = z.infer<typeof DraftDecisions>;
+
 /** Whose the prices are where no column says. */
 export const PricesFrom = z.union([
   z.strictObject({ id: Id }),
@@ -62,6 +69,8 @@ export const DraftEdit = z.strictObject({
     .optional(),
   /** Answers every open question by its suggestion. */
   takeSuggestions: z.literal(true).optional(),
+  /** Equal lines that are to stand as one, by the first row of each offer. */
+  join: z.union([z.literal("all"), z.array(Row).max(limits.UPLOAD_ROWS)]).optional(),
   /** Forgets what was said about columns and guesses them anew. */
   guessAgain: z.literal(true).optional(),
   pricesFrom: PricesFrom.nullable().optional(),
@@ -73,6 +82,3 @@ export const TakeList = z.strictObject({ version: Version, seen: z.string().leng
 
 /** Taking it back; `evenSo` after being told what changed since. */
 export const TakeBack = z.strictObject({ version: Version, evenSo: z.literal(true).optional() });
-
-/** A draft is dropped by somebody who has seen it as it is now. */
-export const DropDraft = z.strictObject({ version: Version });

@@ -78,6 +78,9 @@ export const BOARD_QUOTES_MOST = 50;
 export const QUANTITY_MOST = 1_000_000_000;
 export const QUANTITY_PER_KIT_MOST = 10_000;
 
+/** A price older than this is worth asking for again before money is spent. Common practice, no source. */
+export const OLD_PRICE_DAYS = 30;
+
 export const NAME_LENGTH = 120;
 export const TEXT_LENGTH = 2000;
 export const EMAIL_LENGTH = 254;
@@ -88,6 +91,8 @@ export const TOKEN_DAYS_MOST = 366;
 export const TOKENS_MOST = 50;
 
 export const UPLOAD_BYTES = 5 * 1024 * 1024;
+/** Pasted cells travel as JSON, which escapes tabs and line ends. */
+export const PASTED_BYTES = 2 * UPLOAD_BYTES;
 export const UPLOAD_ROWS = 20_000;
 export const UPLOAD_COLUMNS = 200;
 export const JSON_BYTES = 256 * 1024;

@@ -75,7 +75,7 @@ export function changeDraft(db: Db, id: string, seen: number, change: DraftChang
 }
 
 type Ending = Pick<ImportRow, "state"> &
-  Partial<Pick<ImportRow, "takenAt" | "takenBy" | "outcome" | "before">>;
+  Partial<Pick<ImportRow, "takenAt" | "takenBy" | "outcome" | "before" | "content">>;
 
 /** Moves an import from one state to the next: taken, taken back, dropped. `false` where it was not in that state. */
 export function moveImport(

@@ -1,0 +1,78 @@
+import { createHash } from "node:crypto";
+import { readCells } from "#src/partslist/cells.ts";
+import { guessColumns } from "#src/partslist/columns.ts";
+import { NAME_LENGTH, UPLOAD_COLUMNS, UPLOAD_ROWS } from "#src/shapes/limits.ts";
+import { decodeUpload } from "../decode-upload.ts";
+import { newId } from "../new-id.ts";
+import type { Changing } from "../note-change.ts";
+import { Problem } from "../problem.ts";
+import { addImport, type ImportPlace } from "../store/import.ts";
+import { NO_DECISIONS } from "./list-draft.ts";
+
+export const PASTED_NAME = "Pasted cells";
+
+/** The name of an uploaded file, from the header it travels in. */
+export function uploadName(request: Request): string {
+  const written = request.headers.get("x-file-name") ?? "";
+  const name = decoded(written)
+    .replace(/^.*[/\\]/, "")
+    .trim();
+  return (name || "List without a name").slice(0, NAME_LENGTH);
+}
+
+function decoded(text: string): string {
+  try {
+    return decodeURIComponent(text);
+  } catch {
+    return text;
+  }
+}
+
+function tooLong(name: string, found: number, what: string, most: number): Problem {
+  return new Problem("upload-too-long", { parameters: { name, found, what, most } });
+}
+
+function shapeOf(name: string, text: string): { rowCount: number; fingerprint: string } {
+  const sheet = readCells(text);
+  const filled = sheet.records.filter(({ cells }) => cells.some((cell) => cell.trim() !== ""));
+  if (filled.length === 0) throw new Problem("upload-empty", { parameters: { name } });
+  if (sheet.records.length > UPLOAD_ROWS) throw tooLong(name, sheet.records.length, "rows", UPLOAD_ROWS);
+  if (sheet.columns > UPLOAD_COLUMNS) throw tooLong(name, sheet.columns, "columns", UPLOAD_COLUMNS);
+  return { rowCount: sheet.records.length, fingerprint: guessColumns(sheet.records).fingerprint };
+}
+
+/**
+ * Begins to bring in a list: its bytes are decoded and kept as a draft; nothing else is changed.
+ *
+ * @throws Problem upload-… for what is no list in plain text, or has more rows or columns than can be read.
+ */
+export function beginDraft(
+  { db, now, user, workshop }: Changing,
+  place: Pick<ImportPlace, "kind" | "kitId">,
+  name: string,
+  bytes: Uint8Array,
+): { id: string } {
+  const decodedList = decodeUpload(bytes);
+  if (!decodedList.ok) {
+    if (decodedList.code === "upload-too-large")
+      throw new Problem("too-large", { parameters: { limit: "5 MB" } });
+    throw new Problem(decodedList.code, { parameters: { name } });
+  }
+  const id = newId();
+  addImport(db, {
+    id,
+    workshopId: workshop.id,
+    ...place,
+    state: "draft",
+    fileName: name,
+    byteLength: bytes.byteLength,
+    encoding: decodedList.encoding,
+    contentHash: createHash("sha256").update(bytes).digest("hex"),
+    content: decodedList.text,
+    ...shapeOf(name, decodedList.text),
+    answers: NO_DECISIONS,
+    createdBy: user.id,
+    createdAt: now,
+  });
+  return { id };
+}
