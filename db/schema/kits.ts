@@ -1,6 +1,5 @@
 import { index, integer, sqliteTable, text, uniqueIndex } from "drizzle-orm/sqlite-core";
 import { amount, amountText, id, moment, oneOf, version, wholeNumber } from "#db/columns.ts";
-import { ofKit } from "#db/of-kit.ts";
 import { ofWorkshop } from "#db/of-workshop.ts";
 import { BOARD_SHAPES } from "#src/shapes/limits.ts";
 
@@ -36,7 +35,10 @@ export const editions = sqliteTable(
   "editions",
   {
     id: id("id").primaryKey(),
-    ...ofKit(),
+    ...ofWorkshop(),
+    kitId: id("kit_id")
+      .notNull()
+      .references(() => kits.id, { onDelete: "cascade" }),
     position: integer("position").notNull(),
     name: text("name").notNull(),
     /** Share of the run as a weight. */
@@ -61,7 +63,10 @@ export const revisions = sqliteTable(
   "revisions",
   {
     id: id("id").primaryKey(),
-    ...ofKit(),
+    ...ofWorkshop(),
+    kitId: id("kit_id")
+      .notNull()
+      .references(() => kits.id, { onDelete: "cascade" }),
     number: integer("number").notNull(),
     endedAt: moment("ended_at").notNull(),
     endedBy: id("ended_by"),

@@ -76,5 +76,5 @@ describe("the database itself", () => {
     const said = execFileSync("npx", words, { encoding: "utf8" });
     rmSync(copy, { recursive: true });
     expect(said).toContain("No schema changes");
-  });
+  }, 30_000);
 });
