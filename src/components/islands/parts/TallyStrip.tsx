@@ -18,6 +18,8 @@ export type TallyCell = {
   value: string | null;
   /** "needs parts", "not set". */
   needs?: string;
+  /** Where it is entered. */
+  needsHref?: string;
   /** A word after the figure: "sold". */
   after?: string;
   change?: ChangeProps;
@@ -154,7 +156,13 @@ function CellFigure({ cell, workingOut }: { cell: TallyCell; workingOut?: boolea
   if (cell.value === null)
     return (
       <span className="text-[1rem] leading-[1.9375rem] font-medium whitespace-nowrap text-ink-2 tablet:text-[1.1875rem]">
-        {cell.needs ?? "not known"}
+        {cell.needsHref ? (
+          <a href={cell.needsHref} className="text-ink-2">
+            {cell.needs ?? "not known"}
+          </a>
+        ) : (
+          (cell.needs ?? "not known")
+        )}
       </span>
     );
   return (

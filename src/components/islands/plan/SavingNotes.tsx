@@ -1,0 +1,61 @@
+import type { KitAddress } from "#src/components/islands/kit-address.ts";
+import { Banner } from "#src/components/islands/parts/Banner.tsx";
+import { Button } from "#src/components/islands/parts/Button.tsx";
+import { ConflictBox } from "#src/components/islands/parts/ConflictBox.tsx";
+import type { Plan } from "#src/shapes/plan.ts";
+import { fieldName, fieldValue } from "./field-words.ts";
+import { useStore } from "./module-store.ts";
+import type { PlanRow } from "./plan-rows.ts";
+import { sendAll, settleClash } from "./save-edits.ts";
+import { type Clash, NOTHING_SAVED, saving } from "./saving.ts";
+
+/** Hours and minutes of a moment: "14:41". */
+export function clockTime(at: number): string {
+  return new Date(at).toLocaleTimeString("en-GB", { hour: "2-digit", minute: "2-digit" });
+}
+
+/** The lost connection, while it is lost. */
+export function LostConnection() {
+  const { lostAt, waiting } = useStore(saving, NOTHING_SAVED);
+  if (lostAt === null || waiting === 0) return null;
+  return (
+    <Banner
+      lead={`Not saved since ${clockTime(lostAt)}: no connection.`}
+      action={
+        <Button size="small" onClick={sendAll}>
+          Try again now
+        </Button>
+      }
+    >
+      Your changes are kept on this page and will be sent when it is back.
+    </Banner>
+  );
+}
+
+function thing(plan: Plan, row: PlanRow): string | undefined {
+  if (!("id" in row)) return undefined;
+  const rows = [...plan.editions, ...plan.work.tasks, ...plan.packing, ...plan.charges];
+  return rows.find(({ id }) => id === row.id)?.name;
+}
+
+function happened({ by, at, row, field }: Clash, plan: Plan): string {
+  const named = fieldName(row, field, thing(plan, row));
+  const who = by ?? "Somebody";
+  return `${who} changed ${named.charAt(0).toLowerCase()}${named.slice(1)}${at === null ? "" : ` at ${clockTime(at)}`}.`;
+}
+
+/** Fields that two people changed: both values, to choose one. */
+export function Clashes({ address, plan }: { address: KitAddress; plan: Plan }) {
+  const { clashes } = useStore(saving, NOTHING_SAVED);
+  return clashes.map((clash) => (
+    <ConflictBox
+      key={`${clash.row.kind} ${"id" in clash.row ? clash.row.id : ""} ${clash.field}`}
+      happened={happened(clash, plan)}
+      yours={fieldValue(clash.field, clash.yours, plan.currency)}
+      theirs={fieldValue(clash.field, clash.theirs, plan.currency)}
+      theirWord={clash.by ? `${clash.by}’s` : "Theirs"}
+      onKeepYours={() => settleClash(address, clash, "yours")}
+      onTakeTheirs={() => settleClash(address, clash, "theirs")}
+    />
+  ));
+}

@@ -1,0 +1,79 @@
+import { count, money, rate } from "#src/components/written.ts";
+import type { PlanRow } from "./plan-rows.ts";
+
+const MONEY = [
+  "price",
+  "ratePerHour",
+  "feeFixed",
+  "postageCharged",
+  "postagePaid",
+  "replacementCost",
+  "amount",
+  "costPerKit",
+];
+const RATES = [
+  "taxRate",
+  "feeRate",
+  "spareRate",
+  "boardYield",
+  "boardConfidence",
+  "learningSlope",
+  "replacementShare",
+];
+
+/** What a field of the plan is called in a sentence. */
+const NAMES: Record<string, string> = {
+  kits: "run",
+  sweepTo: "largest run",
+  spareRate: "spare parts",
+  boardYield: "board yield",
+  boardConfidence: "confidence of enough boards",
+  chosenQuoteId: "board quote",
+  learningSlope: "learning",
+  kitsMadeBefore: "kits made before",
+  replacementShare: "share of replacements",
+  replacementCost: "cost of a replacement",
+  taxRate: "tax rate",
+  feeRate: "fee",
+  feeFixed: "fixed fee",
+  postageCharged: "postage the buyer pays",
+  postagePaid: "postage you pay",
+  price: "price",
+  weight: "share of the run",
+  ratePerHour: "rate for an hour",
+  minutesPerKit: "minutes a kit",
+  setUpMinutes: "minutes to set up",
+  costPerKit: "cost a kit",
+  amount: "amount",
+  spreadOver: "kits it is spread over",
+  editions: "editions",
+  name: "name",
+};
+
+/** A value of a field as it is written in a sentence. */
+export function fieldValue(field: string, value: unknown, currency: string): string {
+  if (value === null || value === undefined) return "not set";
+  if (MONEY.includes(field)) return money(String(value), currency);
+  if (RATES.includes(field)) return rate(String(value));
+  if (typeof value === "number") return count(value);
+  if (Array.isArray(value)) return value.length === 1 ? "one edition" : `${value.length} editions`;
+  return String(value);
+}
+
+/** "Run", "Price of Full kit": a field with the thing it belongs to. */
+export function fieldName(row: PlanRow, field: string, thing?: string): string {
+  const name = NAMES[field] ?? field;
+  const capital = name.charAt(0).toUpperCase() + name.slice(1);
+  return thing && "id" in row ? `${capital} of ${thing}` : capital;
+}
+
+/** "Run changed from 100 to 120." */
+export function changeWords(
+  named: string,
+  field: string,
+  from: unknown,
+  to: unknown,
+  currency: string,
+): string {
+  return `${named} changed from ${fieldValue(field, from, currency)} to ${fieldValue(field, to, currency)}.`;
+}

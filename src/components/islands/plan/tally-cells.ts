@@ -1,0 +1,85 @@
+import type { KitAddress } from "#src/components/islands/kit-address.ts";
+import type { TallyCell } from "#src/components/islands/parts/TallyStrip.tsx";
+import { count, money, signedCount, signedMoney } from "#src/components/written.ts";
+import type { Figure } from "#src/costing/figure.ts";
+import type { Tally } from "#src/costing/tally.ts";
+import type { TallyChange, TallyFigure } from "#src/costing/tally-change.ts";
+import type { FigureId } from "#src/costing/working-tree.ts";
+import { needInShort } from "./need-words.ts";
+import { needLink } from "./page-links.ts";
+
+const LABELS: Record<TallyFigure, string> = {
+  costPerKit: "Cost per kit",
+  price: "Price",
+  earnsPerKit: "Earns per kit",
+  evenAfter: "Even after",
+  cashNeeded: "Cash needed",
+};
+
+const ORDER: readonly TallyFigure[] = ["costPerKit", "price", "earnsPerKit", "evenAfter", "cashNeeded"];
+
+/** What each figure opens; the price of a kit in one edition opens that sale, a mean price what a kit brings. */
+function opened(figure: TallyFigure, editions: readonly { id: string }[]): FigureId {
+  if (figure === "price")
+    return editions.length === 1 && editions[0] ? `sale:${editions[0].id}` : "kept-per-kit";
+  const figures = {
+    costPerKit: "per-kit-used",
+    earnsPerKit: "earns-per-kit",
+    evenAfter: "even-after",
+    cashNeeded: "spent",
+  } as const;
+  return figures[figure];
+}
+
+export interface CellContext {
+  address: KitAddress;
+  currency: string;
+  editions: readonly { id: string }[];
+  changes: readonly TallyChange[];
+  /** Left out until there is a plan whose workings can be opened. */
+  opens?: (figure: FigureId) => { open: boolean; onOpen: () => void };
+}
+
+function needs(figure: Figure, address: KitAddress): Pick<TallyCell, "needs" | "needsHref"> {
+  if (figure.known) return {};
+  const [first] = figure.needs;
+  return { needs: needInShort(figure.needs), needsHref: first && needLink(address, first) };
+}
+
+/** The figures of the strip, written, with their changes and what they open. */
+export function tallyCells(tally: Tally, context: CellContext): TallyCell[] {
+  const { address, currency, changes, editions, opens } = context;
+  return ORDER.map((key) => {
+    const figure = tally[key];
+    const change = changes.find((one) => one.figure === key);
+    const isCount = key === "evenAfter";
+    return {
+      key,
+      label: LABELS[key],
+      value: figure.known ? (isCount ? count(figure.value) : money(figure.value, currency)) : null,
+      ...needs(figure, address),
+      ...(isCount && { after: "sold" }),
+      onPhone: key === "costPerKit" || key === "earnsPerKit",
+      ...(change && {
+        change: {
+          amount: isCount ? signedCount(change.by) : signedMoney(change.by, currency),
+          turn: change.turn,
+        },
+      }),
+      ...(figure.known && opens?.(opened(key, editions))),
+    };
+  });
+}
+
+/** What is said once after a change: "Cost per kit €14.95, €2.14 less." */
+export function spokenChange(tally: Tally, changes: readonly TallyChange[]): string {
+  const change = changes[0];
+  if (!change) return "";
+  const figure = tally[change.figure];
+  if (!figure.known) return "";
+  const isCount = change.figure === "evenAfter";
+  const write = (value: string) => (isCount ? count(value) : money(value, tally.currency));
+  const less = change.by.startsWith("-");
+  const by = write(less ? change.by.slice(1) : change.by);
+  return `${LABELS[change.figure]} ${write(figure.value)}, ${by} ${less ? "less" : "more"}.`;
+}

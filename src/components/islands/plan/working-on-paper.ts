@@ -1,0 +1,116 @@
+import type { KitAddress } from "#src/components/islands/kit-address.ts";
+import type { Paper, PaperLine, PaperSub } from "#src/components/working-paper.ts";
+import { count, money, plainMoney, rate, unitPrice } from "#src/components/written.ts";
+import { roundedText } from "#src/costing/decimal.ts";
+import type {
+  FigureId,
+  WorkingAmount,
+  WorkingLine,
+  WorkingSource,
+  WorkingSub,
+  WorkingTree,
+} from "#src/costing/working-tree.ts";
+import { needInShort } from "./need-words.ts";
+import { pageLink } from "./page-links.ts";
+
+export interface PaperContext {
+  address: KitAddress;
+  currency: string;
+  /** "14:32". */
+  time: string;
+  /** Opens another figure from a line. */
+  open: (figure: FigureId) => void;
+}
+
+/** Decimals of a plain number such as hours or a learning factor. */
+const NUMBER_PLACES = 4;
+
+function trimmed(value: string): string {
+  const rounded = roundedText(value, NUMBER_PLACES);
+  return rounded.replace(/\.?0+$/, "");
+}
+
+function written(amount: WorkingAmount, currency: string): string {
+  switch (amount.kind) {
+    case "money":
+      if (amount.places !== undefined) return unitPrice(amount.value, amount.currency);
+      return amount.currency === currency
+        ? plainMoney(amount.value, currency)
+        : money(amount.value, amount.currency);
+    case "count":
+      return amount.unit ? `${count(amount.value)} ${amount.unit}` : count(amount.value);
+    case "rate":
+      return rate(amount.value);
+    case "number":
+      return amount.unit ? `${trimmed(amount.value)} ${amount.unit}` : trimmed(amount.value);
+    case "words":
+      return amount.value;
+    case "not-known":
+      return needInShort(amount.needs);
+  }
+}
+
+function source(from: WorkingSource | null, { address }: PaperContext) {
+  return from ? pageLink(address, from.page) : undefined;
+}
+
+const opener = (opens: FigureId | null, { open }: PaperContext) => (opens ? () => open(opens) : undefined);
+
+function paperSub(sub: WorkingSub, context: PaperContext): PaperSub {
+  return {
+    label: sub.label,
+    amount: written(sub.amount, context.currency),
+    source: source(sub.source, context),
+    onOpen: opener(sub.opens, context),
+  };
+}
+
+function paperLine(line: WorkingLine, before: WorkingLine | undefined, context: PaperContext): PaperLine {
+  return {
+    letter: line.letter ?? undefined,
+    label: line.label,
+    sign: line.sign ?? undefined,
+    amount: line.amount ? written(line.amount, context.currency) : undefined,
+    subs: line.subs.map((sub) => paperSub(sub, context)),
+    source: source(line.source, context),
+    onOpen: opener(line.opens, context),
+    result: line.result,
+    apart: before?.sign === "=" && line.sign === null,
+  };
+}
+
+const MONTHS = [
+  "January",
+  "February",
+  "March",
+  "April",
+  "May",
+  "June",
+  "July",
+  "August",
+  "September",
+  "October",
+  "November",
+  "December",
+];
+
+/** A day as people say it: "9 March 2026". */
+export function dayInWords(day: string): string {
+  const [year, month, date] = day.split("-").map(Number);
+  return `${date} ${MONTHS[(month ?? 1) - 1]} ${year}`;
+}
+
+/** A working as it is written on squared paper. */
+export function workingOnPaper(tree: WorkingTree, context: PaperContext): Paper {
+  const from = [
+    tree.revision && `rev ${tree.revision}`,
+    tree.pricedOn && `the prices of ${dayInWords(tree.pricedOn)}`,
+  ].filter(Boolean);
+  return {
+    of: tree.title,
+    basis: tree.basis,
+    lines: tree.lines.map((line, place) => paperLine(line, tree.lines[place - 1], context)),
+    notes: tree.notes,
+    foot: `Worked at ${context.time}${from.length > 0 ? ` from ${from.join(" and ")}` : ""}.`,
+  };
+}
