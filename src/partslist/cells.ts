@@ -31,7 +31,7 @@ function parse(text: string, sign: string): string[][] {
       newline: newlineOf(rest),
       quoteChar: quotes ? '"' : "\u0000",
     });
-    const unclosed = parsed.errors.find((error) => error.code === "MissingQuotes")?.row;
+    const unclosed = unclosedRow(parsed);
     if (unclosed === undefined) return append(rows, parsed.data);
     append(rows, parsed.data.slice(0, unclosed));
     const lines = rest.split("\n");
@@ -40,6 +40,15 @@ function parse(text: string, sign: string): string[][] {
     rest = lines.slice(at + 1).join("\n");
     if (at + 1 >= lines.length) return rows;
   }
+}
+
+/** The first row whose quote is not closed, or is closed only by a quote of a later line. */
+function unclosedRow(parsed: Papa.ParseResult<string[]>): number | undefined {
+  return parsed.errors.find(
+    ({ code, row }) =>
+      code === "MissingQuotes" ||
+      (code === "InvalidQuotes" && parsed.data[row ?? -1]?.some((cell) => cell.includes("\n"))),
+  )?.row;
 }
 
 function append(rows: string[][], more: string[][]): string[][] {

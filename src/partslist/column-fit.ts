@@ -56,6 +56,7 @@ function value(cells: ColumnCells): Fit {
   if (cells.long > 0.5) return { fit: -1, alone: 0 };
   if (cells.values >= 0.25 && cells.packages < 0.7) return { fit: 3, alone: 3.5 };
   if (cells.sequence) return { fit: -3, alone: 0 };
+  if (cells.values === 0 && cells.words > 0.5) return { fit: -0.5, alone: 0 };
   return { fit: cells.sentences > 0.8 ? 0 : 0.5, alone: 0 };
 }
 

@@ -23,8 +23,8 @@ export interface ReadPricesInput {
 }
 
 /** As `guessColumns`, for a price list: a quantity column tells from how many pieces a price holds. */
-export function guessPriceColumns(records: readonly SheetRecord[]): ColumnGuesses {
-  const guesses = guessColumns(records);
+export function guessPriceColumns(records: readonly SheetRecord[], header?: number | null): ColumnGuesses {
+  const guesses = guessColumns(records, header);
   const hasBreaks = guesses.columns.some(
     (one) => one.meaning === "break-quantity" || one.meaning === "price-break",
   );

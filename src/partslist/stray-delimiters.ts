@@ -4,6 +4,8 @@ import { looksLikeDesignators } from "./designators.ts";
 interface Profile {
   designators: number;
   numbers: number;
+  /** Numbers without a fraction. */
+  whole: number;
   empty: number;
   filled: number;
   length: number;
@@ -50,13 +52,15 @@ function profile(rows: readonly string[][], width: number): Profile[] {
   const profiles = Array.from({ length: width }, () => ({
     designators: 0,
     numbers: 0,
+    whole: 0,
     empty: 0,
     filled: 0,
     length: 0,
   }));
   let looked = 0;
   for (const row of rows) {
-    if (row.length !== width || looked++ > LOOKED_AT) continue;
+    // The first row is mostly a heading and says nothing of the cells under it.
+    if (row.length !== width || looked++ === 0 || looked > LOOKED_AT) continue;
     row.forEach((cell, column) => {
       const kind = profiles[column];
       if (kind) note(kind, cell);
@@ -71,8 +75,10 @@ function note(kind: Profile, cell: string): void {
   else {
     kind.filled++;
     kind.length += text.length;
-    if (isNumber(text)) kind.numbers++;
-    else if (looksLikeDesignators(text)) kind.designators++;
+    if (isNumber(text)) {
+      kind.numbers++;
+      if (/^\d+$/.test(text)) kind.whole++;
+    } else if (looksLikeDesignators(text)) kind.designators++;
   }
 }
 
@@ -86,7 +92,10 @@ function suits(cell: string, kind: Profile): number {
   const all = kind.filled + kind.empty || 1;
   if (text === "") return kind.empty / all - 0.3;
   const filled = kind.filled || 1;
-  if (isNumber(text)) return 2 * (kind.numbers / filled) - 1 - kind.empty / all / 2;
+  if (isNumber(text)) {
+    const alike = /^\d+$/.test(text) ? kind.whole : kind.numbers - kind.whole;
+    return (kind.numbers + alike) / filled - 1 - kind.empty / all / 2;
+  }
   if (looksLikeDesignators(text)) return 2 * (kind.designators / filled) - 1;
   return 1 - 2 * ((kind.numbers + kind.designators) / filled) - kind.empty / all / 2;
 }
@@ -113,4 +122,4 @@ function bestStart(
   return best && best.score > 0 && best.score - second >= 0.8 ? best.start : null;
 }
 
-const EMPTY: Profile = { designators: 0, numbers: 0, empty: 1, filled: 0, length: 0 };
+const EMPTY: Profile = { designators: 0, numbers: 0, whole: 0, empty: 1, filled: 0, length: 0 };

@@ -176,7 +176,7 @@ export function readValue(
 /** As `readValue`, with the words the value was read from. */
 export function findValue(text: string, partClass: PartClass, mark: DecimalMark | null = null): Found | null {
   const kind = valueKind(partClass);
-  if (kind === null || !/\d/.test(text)) return null;
+  if (kind === null || !/\p{Nd}/u.test(text)) return null;
   const plain = plainUnits(text)
     .replace(/_/g, " ")
     .replace(/^[~≈]\s*/, "")
