@@ -3,8 +3,12 @@ import { can } from "#src/access.ts";
 import type { Role } from "#src/shapes/limits.ts";
 import { today } from "./clock.ts";
 import { type RateView, rates } from "./currency-rate-changes.ts";
+import { kitOffers } from "./kit-offers.ts";
+import { kitPlan } from "./kit-plan.ts";
+import { Problem } from "./problem.ts";
 import { requirePermission } from "./route.ts";
 import { quotedCurrencies } from "./store/board-quote.ts";
+import type { KitRow } from "./store/kit.ts";
 import type { WorkshopRow } from "./store/membership.ts";
 import { type SupplierView, suppliers } from "./supplier-changes.ts";
 
@@ -37,4 +41,26 @@ export function suppliersPage({ db, workshop, role }: Asking): SuppliersPage {
     today: today(),
     canChange: can(role, "change-supply"),
   };
+}
+
+/** All that the pages about a kit's offers show. */
+export function kitSupplyPage({ db, workshop, role, kit }: Asking & { kit: KitRow }) {
+  requirePermission(role, "see-money");
+  const day = today();
+  return {
+    address: { workshop: workshop.id, kit: kit.id },
+    plan: kitPlan(db, workshop, kit, day),
+    offers: kitOffers({ db, workshop, kit }),
+    today: day,
+    canChange: can(role, "change-supply"),
+    canChoose: can(role, "change-run"),
+  };
+}
+
+/** The same for one part of the list; a part that the kit does not buy is not found. */
+export function partOffersPage(asking: Asking & { kit: KitRow }, part: string) {
+  const page = kitSupplyPage(asking);
+  const found = page.offers.parts.find(({ id }) => id === part);
+  if (!found) throw new Problem("not-found");
+  return { page: { ...page, part }, name: found.name };
 }
