@@ -9,6 +9,9 @@ declare namespace App {
     workshop: import("#src/server/store/membership.ts").WorkshopRow;
     role: import("#src/shapes/limits.ts").Role;
     kit: import("#src/server/store/kit.ts").KitRow;
+    /** How the kit of the page stands; holds money, so only what a role may see is taken from it. */
+    state: import("#src/server/trail.ts").KitState;
+    stops: import("#src/server/trail.ts").KitStop[];
     head: import("#src/server/page-head.ts").PageHead;
     /** Why a page could not be shown, for the page that says so. */
     problem: import("#src/server/problem.ts").ProblemBody | undefined;

@@ -1,13 +1,15 @@
 import { defineMiddleware } from "astro:middleware";
 import { randomBytes } from "node:crypto";
 import type { APIContext } from "astro";
-import { now } from "./server/clock.ts";
+import { now, today } from "./server/clock.ts";
 import { serverDb } from "./server/db.ts";
+import { kitState } from "./server/kit-state.ts";
 import { pageHead } from "./server/page-head.ts";
 import { Problem, problemReply } from "./server/problem.ts";
 import { placeOf } from "./server/route.ts";
 import { addSecurityHeaders, contentSecurityPolicy } from "./server/security-headers.ts";
 import { sessionOf } from "./server/session.ts";
+import { kitStops } from "./server/trail.ts";
 
 /** Sends somebody who is not signed in to the sign-in page, and back here afterwards. */
 function toSignIn(context: APIContext): Response {
@@ -26,6 +28,10 @@ function enter(context: APIContext): Response | undefined {
   if (!locals.user) return toSignIn(context);
   const place = placeOf(db, locals.user, params.workshop, params.kit);
   Object.assign(locals, place);
+  if (place.kit) {
+    locals.state = kitState(db, place.workshop, place.kit, today());
+    locals.stops = kitStops(place.role, locals.state);
+  }
   locals.head = pageHead(db, locals.user, place.workshop, place.role, place.kit);
   return undefined;
 }

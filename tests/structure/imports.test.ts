@@ -72,7 +72,11 @@ const RULES: readonly Rule[] = [
   },
   {
     folder: "src/layouts/",
-    may: [/^src\/(layouts|components|access|styles|costing)/, /^@fontsource/, /^astro/],
+    may: [
+      /^src\/(layouts|components|access|styles|costing|shapes\/revision-letter)/,
+      /^@fontsource/,
+      /^astro/,
+    ],
     types: [/^src\//],
   },
   { folder: "src/components/islands/", may: [...REACT, ...ISLAND_STATE], types: [/^src\//] },
