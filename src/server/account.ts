@@ -87,8 +87,8 @@ function sessionId({ tokenHash }: SessionRow): string {
   return tokenHash.slice(0, 16);
 }
 
-/** A person's own sign-ins that last, the newest in use first. */
-export function ownSessions({ db, user, session, now }: Given): OwnSession[] {
+/** A person's own sign-ins that last, the newest in use first. `session` is the one that asks. */
+export function ownSessions(db: Db, user: UserRow, session: SessionRow, now: number): OwnSession[] {
   return sessionsOf(db, user.id, now)
     .filter(({ complete }) => complete)
     .sort((a, b) => b.lastSeenAt - a.lastSeenAt)

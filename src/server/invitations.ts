@@ -35,7 +35,11 @@ function asOwnersSee({ invitation, kit, by }: FullInvitation, now: number): Open
 }
 
 /** Invitations of a workshop that were not taken. */
-export function openInvitations({ db, workshop, now }: Given): OpenInvitation[] {
+export function openInvitations({
+  db,
+  workshop,
+  now,
+}: Pick<Given, "db" | "workshop" | "now">): OpenInvitation[] {
   return invitationsOf(db, workshop.id).map((row) => asOwnersSee(row, now));
 }
 

@@ -19,9 +19,10 @@ function faultsOf(error: unknown): Faults {
 
 function showBusy(form: HTMLFormElement, busy: boolean): void {
   form.toggleAttribute("data-busy", busy);
-  for (const button of form.querySelectorAll<HTMLElement>('button[type="submit"]')) {
-    button.toggleAttribute("aria-disabled", busy);
+  for (const button of form.elements) {
+    if (!(button instanceof HTMLButtonElement) || button.type !== "submit") continue;
     if (busy) button.setAttribute("aria-disabled", "true");
+    else button.removeAttribute("aria-disabled");
     const [label, working] = button.querySelectorAll(":scope > span > span");
     if (!working) continue;
     label?.classList.toggle("invisible", busy);
