@@ -48,9 +48,10 @@ function askAboutClash(
   }
   asked.set(key, work);
   const facts = { designators, row: work.record.row, otherRow: other.record.row };
-  const choices = skipsANumber(designators, seen)
-    ? ["keep-both", "leave-row-out"]
-    : choicesFor(work.line, other.line, designators);
+  const choices =
+    work.line?.designators.length === 1 && skipsANumber(designators, seen)
+      ? ["keep-both", "leave-row-out"]
+      : choicesFor(work.line, other.line, designators);
   ask(
     work,
     {
