@@ -1,20 +1,17 @@
 import type { Db } from "#db/client.ts";
 import { costRun } from "#src/costing/cost-run.ts";
+import { lineFaults } from "#src/partslist/line-faults.ts";
+import { partsListOf } from "./parts-list.ts";
 import { planOf } from "./plan.ts";
 import type { KitRow } from "./store/kit.ts";
-import { lineQuantitiesOf, linesOf } from "./store/line.ts";
+import { linesOf } from "./store/line.ts";
 import type { WorkshopRow } from "./store/membership.ts";
 import type { KitState } from "./trail.ts";
 
-/** How many lines say another quantity than their designators count, in the edition that takes most of them. */
-function linesAtOdds(db: Db, kitId: string): number {
-  const most = new Map<string, number>();
-  for (const { lineId, perKit } of lineQuantitiesOf(db, kitId))
-    most.set(lineId, Math.max(most.get(lineId) ?? 0, perKit));
-  return linesOf(db, kitId).filter(({ line }) => {
-    const counted = line.designators === "" ? 0 : line.designators.split(",").length;
-    return counted > 0 && most.get(line.id) !== counted;
-  }).length;
+/** How many lines of the list somebody must see to, whatever they cost. */
+function linesToSettle(db: Db, kit: KitRow): number {
+  const lines = partsListOf(db, kit).lines.map(({ line, quantities }) => ({ ...line, quantities }));
+  return lineFaults(lines).size;
 }
 
 /** Reckons a kit as it stands on the day `asOf`: its plan, the run's figures, and what is open in its list. */
@@ -24,6 +21,6 @@ export function kitState(db: Db, workshop: WorkshopRow, kit: KitRow, asOf: strin
     plan,
     result: costRun(plan),
     lines: linesOf(db, kit.id).length,
-    linesAtOdds: linesAtOdds(db, kit.id),
+    linesToSettle: linesToSettle(db, kit),
   };
 }

@@ -21,8 +21,8 @@ export interface KitStop {
 export interface KitState {
   plan: Plan;
   result: RunResult;
-  /** Lines whose quantity differs from what their designators count. */
-  linesAtOdds: number;
+  /** Lines that somebody must see to, whatever they cost: without a quantity, named twice, at odds. */
+  linesToSettle: number;
   lines: number;
 }
 
@@ -60,7 +60,7 @@ function settled(count: number): StopState {
   return count > 0 ? { kind: "to-settle", count } : { kind: "done" };
 }
 
-function stateOf(stop: StopKey, { plan, result, lines, linesAtOdds }: KitState): StopState {
+function stateOf(stop: StopKey, { plan, result, lines, linesToSettle }: KitState): StopState {
   const begun: Record<StopKey, boolean> = {
     parts: lines > 0,
     offers: plan.parts.some(({ offers }) => offers.length > 0),
@@ -68,7 +68,7 @@ function stateOf(stop: StopKey, { plan, result, lines, linesAtOdds }: KitState):
     run: lines > 0 && plan.parts.length > 0,
   };
   if (!begun[stop]) return { kind: "not-started" };
-  return settled(countAt(stop, result.problems) + (stop === "parts" ? linesAtOdds : 0));
+  return settled(countAt(stop, result.problems) + (stop === "parts" ? linesToSettle : 0));
 }
 
 const NAMES: Record<StopKey, string> = { parts: "Parts", offers: "Offers", boards: "Boards", run: "Run" };
