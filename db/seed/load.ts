@@ -138,6 +138,12 @@ function loadPart(db: Db, part: SeedPart, now: number): void {
   for (const offer of part.offers) loadOffer(db, part.key, offer, now);
 }
 
+function offerId(part: string, code: string): string {
+  const offer = PARTS.find(({ key }) => key === part)?.offers.find((one) => one.code === code);
+  if (!offer) throw new Error(`The demonstration fixes an offer it does not have: ${code}`);
+  return seedId("offer", part, offer.supplier, code);
+}
+
 /** Rows of one kit hang on these two ids. */
 interface Owner {
   workshopId: string;
@@ -163,15 +169,15 @@ function loadLines(db: Db, kit: SeedKit, owner: Owner): void {
       const editionId = seedId("edition", kit.name, kit.editions[index]?.name ?? "");
       db.insert(lineQuantities).values({ workshopId: WORKSHOP_ID, lineId: id, editionId, perKit }).run();
     }
-    if (line.pinned) {
-      const offer = PARTS.find(({ key }) => key === line.part)?.offers.find(
-        ({ code }) => code === line.pinned,
-      );
-      const pinnedOfferId = seedId("offer", line.part, offer?.supplier ?? "", line.pinned);
+    if (line.pinned || line.onlyFromStock)
       db.insert(partChoices)
-        .values({ ...owner, partId, pinnedOfferId })
+        .values({
+          ...owner,
+          partId,
+          pinnedOfferId: line.pinned ? offerId(line.part, line.pinned) : null,
+          onlyFromStock: line.onlyFromStock ?? false,
+        })
         .run();
-    }
   }
 }
 

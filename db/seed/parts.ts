@@ -318,7 +318,14 @@ export const PARTS: readonly SeedPart[] = [
     package: "DIP-14",
     drawer: "D2",
     offers: [
-      { supplier: "Nordhafen", code: "44-0014", breaks: "1:0.220 50:0.160 100:0.141", stock: 3_000, age: 94 },
+      {
+        supplier: "Nordhafen",
+        code: "44-0014",
+        breaks: "1:0.220 50:0.160 100:0.141",
+        stock: 3_000,
+        age: 94,
+        validFor: -4,
+      },
       { supplier: "Tamsin", code: "T-SK14", breaks: "1:0.260 100:0.175", stock: 800, age: 2 },
     ],
   },

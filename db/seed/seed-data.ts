@@ -79,6 +79,8 @@ export interface SeedLine {
   perKit: readonly number[];
   /** Order code of the offer that is fixed. */
   pinned?: string;
+  /** Only offers whose stock covers it. */
+  onlyFromStock?: true;
   note?: string;
 }
 
