@@ -1,8 +1,11 @@
 import fc from "fast-check";
-import { describe, expect, test } from "vitest";
+import { describe, expect, test, vi } from "vitest";
 import { cheapestOrder, type LadderTerms, prepareLadder } from "#src/costing/ladder.ts";
 import { ladderProblems, quantityProblems } from "#src/costing/ladder-problems.ts";
 import { ORDER_MOST } from "#src/costing/whole.ts";
+import { MANY_CASES } from "#tests/support/slow.ts";
+
+vi.setConfig({ testTimeout: MANY_CASES });
 
 const ANY = Number.POSITIVE_INFINITY;
 

@@ -35,19 +35,15 @@ export function rateOf(plan: Plan, currency: string): D {
   return new D(plan.rates.find((rate) => rate.currency === currency)?.perForeignUnit ?? Number.NaN);
 }
 
-/** Largest remainder: whole quotas first, then one each by remainder, the earlier first. */
+/** Largest remainder: whole quotas first, then one each by what is left of the division, the earlier first. */
 export function plainSplit(kits: number, weights: readonly number[]): number[] {
   const total = weights.reduce((a, b) => a + b, 0);
-  const quotas = weights.map((weight) => new D(kits).times(weight).div(total));
-  const counts = quotas.map((quota) => quota.floor().toNumber());
+  const counts = weights.map((weight) => Math.floor((kits * weight) / total));
+  const rests = weights.map((weight) => (kits * weight) % total);
   while (counts.reduce((a, b) => a + b, 0) < kits) {
-    let best = -1;
-    quotas.forEach((quota, index) => {
-      const rest = quota.minus(counts[index] ?? 0);
-      const bestRest = best < 0 ? new D(-1) : (quotas[best] as D).minus(counts[best] ?? 0);
-      if (rest.gt(bestRest)) best = index;
-    });
+    const best = rests.indexOf(Math.max(...rests));
     counts[best] = (counts[best] ?? 0) + 1;
+    rests[best] = -1;
   }
   return counts;
 }

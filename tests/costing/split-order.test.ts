@@ -1,8 +1,11 @@
 import fc from "fast-check";
-import { describe, expect, test } from "vitest";
+import { describe, expect, test, vi } from "vitest";
 import { costRun } from "#src/costing/cost-run.ts";
+import { MANY_CASES } from "#tests/support/slow.ts";
 import { plainOrder } from "./plain-reckoning.ts";
 import { offer, part, plan, supplier } from "./plans.ts";
+
+vi.setConfig({ testTimeout: MANY_CASES });
 
 /** Two or three offers with little stock, each from a supplier with flat freight. */
 const shortOffers = fc.array(
@@ -118,7 +121,7 @@ describe("an order that no single offer covers", () => {
           held: line?.ordered,
         }).toEqual(best);
       }),
-      { numRuns: 200 },
+      { numRuns: 80 },
     );
   });
 

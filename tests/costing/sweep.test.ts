@@ -1,12 +1,15 @@
 import fc from "fast-check";
-import { describe, expect, test } from "vitest";
+import { describe, expect, test, vi } from "vitest";
 import { costRun } from "#src/costing/cost-run.ts";
 import type { Figure } from "#src/costing/figure.ts";
 import { sweepRuns } from "#src/costing/sweep.ts";
 import { bigPlan } from "#tests/bench/big-plan.ts";
+import { MANY_CASES } from "#tests/support/slow.ts";
 import { plainBoards, plainRun } from "./plain-reckoning.ts";
 import { frozen, part, plan } from "./plans.ts";
 import { completePlan } from "./random-plans.ts";
+
+vi.setConfig({ testTimeout: MANY_CASES });
 
 const value = (figure: Figure) => (figure.known ? figure.value : null);
 
@@ -41,7 +44,7 @@ describe("sweepRuns", () => {
           });
         }
       }),
-      { numRuns: 60 },
+      { numRuns: 25 },
     );
   });
 
@@ -61,7 +64,7 @@ describe("sweepRuns", () => {
           ]).toEqual([run.spent, run.used, run.kept, run.leftOver, run.parcels]);
         }
       }),
-      { numRuns: 60 },
+      { numRuns: 25 },
     );
   });
 

@@ -1,11 +1,14 @@
 import { Decimal } from "decimal.js";
 import fc from "fast-check";
-import { describe, expect, test } from "vitest";
+import { describe, expect, test, vi } from "vitest";
 import { figuresOf, reckoned, working, workingOf } from "#src/costing/working.ts";
 import type { WorkingAmount, WorkingTree } from "#src/costing/working-tree.ts";
 import { bigPlan } from "#tests/bench/big-plan.ts";
+import { MANY_CASES } from "#tests/support/slow.ts";
 import { edition, frozen, offer, part, plan, quote, supplier } from "./plans.ts";
 import { completePlan } from "./random-plans.ts";
+
+vi.setConfig({ testTimeout: MANY_CASES });
 
 const D = Decimal.clone({ precision: 80, rounding: Decimal.ROUND_HALF_UP });
 
@@ -53,7 +56,7 @@ describe("working", () => {
           if (tree) redo(tree);
         }
       }),
-      { numRuns: 40 },
+      { numRuns: 20 },
     );
   });
 

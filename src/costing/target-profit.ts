@@ -1,0 +1,38 @@
+import { exact } from "./decimal.ts";
+import type { SweepResult } from "./sweep-result.ts";
+
+/** Runs that reach a profit: the first that does, and the one from which every larger one does. */
+export interface TargetRuns {
+  first: number | null;
+  safe: number | null;
+}
+
+/**
+ * Profit before tax that leaves `afterTax` when so much of it is taxed away (section 11):
+ * `after ÷ (1 − rate)`, to 40 significant digits. Money as decimal text; rate below 1.
+ *
+ * @example profitBeforeTax("540000", "0.4") === "900000"
+ */
+export function profitBeforeTax(afterTax: string, taxRate: string): string {
+  return exact(afterTax).div(exact(1).minus(taxRate)).toFixed();
+}
+
+/**
+ * Run sizes with at least a target profit before tax, from a sweep; null: none up to its end, or
+ * profit is not known. As with break-even, costs go up in steps, so a larger run may miss it again.
+ *
+ * @example fixed 50 000, price 250, variable 150: runsForProfit(sweep, "30000").first === 800
+ */
+export function runsForProfit(sweep: SweepResult, target: string): TargetRuns {
+  const wanted = exact(target);
+  const { profit } = sweep.columns;
+  const end = profit.indexOf(null);
+  const known = end < 0 ? profit : profit.slice(0, end);
+  const reaches = known.map((value) => value !== null && exact(value).gte(wanted));
+  const first = reaches.indexOf(true);
+  const lastMiss = reaches.lastIndexOf(false);
+  return {
+    first: first < 0 ? null : first + 1,
+    safe: lastMiss === reaches.length - 1 ? null : lastMiss + 2,
+  };
+}
