@@ -41,7 +41,6 @@ const DEW_LANTERN: SeedKit = {
     full("U1", "nand", 1),
     full("XU1", "socket14", 1, {
       mark: "option",
-      pinned: "44-0014",
       note: "The chip may also be soldered in without it.",
     }),
     full("LDR1", "ldr", 1),
