@@ -1,4 +1,4 @@
-import { useState } from "react";
+import { type KeyboardEvent, useRef, useState } from "react";
 import { FIELD_GROUP_LOOK, fieldLook, UNIT_BOX_LOOK } from "#src/components/field-look.ts";
 import { readMeasure } from "#src/components/measure-entry.ts";
 import { Field, type FieldWords } from "./Field.tsx";
@@ -10,6 +10,8 @@ export type MeasureFieldProps = FieldWords & {
   unit: string;
   /** Called when the field is left, with decimal text in `unit`. */
   onMeasure?: (value: string) => void;
+  /** Also called while one types, for figures that follow; Escape then gives back what stood there. */
+  live?: boolean;
   name?: string;
   id?: string;
   off?: boolean;
@@ -17,10 +19,35 @@ export type MeasureFieldProps = FieldWords & {
 };
 
 /** A measure. A unit typed after the number converts it: "0.8 cm" in a field of mm becomes 8. */
-export function MeasureField({ value, unit, onMeasure, name, id, off, row, ...words }: MeasureFieldProps) {
+export function MeasureField({
+  value,
+  unit,
+  onMeasure,
+  live,
+  name,
+  id,
+  off,
+  row,
+  ...words
+}: MeasureFieldProps) {
   const [draft, setDraft] = useState<string | null>(null);
   const [fault, setFault] = useState<string>();
   const wrong = fault ?? words.wrong;
+  const begun = useRef(value);
+
+  function type(entry: string) {
+    setDraft(entry);
+    const read = readMeasure(entry, unit);
+    if (live && read.ok && read.value !== value) onMeasure?.(read.value);
+  }
+
+  function key({ key, currentTarget }: KeyboardEvent<HTMLInputElement>) {
+    if (key === "Enter") take(currentTarget.value);
+    if (key !== "Escape") return;
+    setDraft(null);
+    setFault(undefined);
+    if (live && value !== begun.current) onMeasure?.(begun.current);
+  }
 
   function take(entry: string) {
     const read = readMeasure(entry, unit);
@@ -41,9 +68,12 @@ export function MeasureField({ value, unit, onMeasure, name, id, off, row, ...wo
             autoComplete="off"
             readOnly={off}
             value={draft ?? value}
-            onChange={(change) => setDraft(change.currentTarget.value)}
+            onFocus={() => {
+              begun.current = value;
+            }}
+            onChange={(change) => type(change.currentTarget.value)}
             onBlur={(leave) => draft !== null && take(leave.currentTarget.value)}
-            onKeyDown={(press) => press.key === "Enter" && take(press.currentTarget.value)}
+            onKeyDown={key}
             className="w-full min-w-0 bg-transparent px-3 text-right text-[1.1875rem] leading-6 font-semibold outline-none"
           />
           <span className={`${UNIT_BOX_LOOK} border-l border-rule`}>{unit}</span>

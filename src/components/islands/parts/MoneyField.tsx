@@ -1,4 +1,4 @@
-import { type KeyboardEvent, useState } from "react";
+import { type KeyboardEvent, useRef, useState } from "react";
 import { FIELD_GROUP_LOOK, fieldLook, UNIT_BOX_LOOK } from "#src/components/field-look.ts";
 import { type MoneyPlaces, readMoney, stepMoney } from "#src/components/money-entry.ts";
 import { Field, type FieldWords } from "./Field.tsx";
@@ -8,6 +8,8 @@ export type MoneyFieldProps = FieldWords & {
   value: string;
   /** Called when the field is left or stepped, with decimal text; never with what cannot be read. */
   onMoney?: (value: string) => void;
+  /** Also called while one types, for figures that follow; Escape then gives back what stood there. */
+  live?: boolean;
   name?: string;
   id?: string;
   currency?: string;
@@ -25,6 +27,7 @@ export type MoneyFieldProps = FieldWords & {
 export function MoneyField({
   value,
   onMoney,
+  live,
   name,
   id,
   currency = "€",
@@ -38,6 +41,13 @@ export function MoneyField({
   const [draft, setDraft] = useState<string | null>(null);
   const [fault, setFault] = useState<string>();
   const wrong = fault ?? words.wrong;
+  const begun = useRef(value);
+
+  function type(entry: string) {
+    setDraft(entry);
+    const read = readMoney(entry, places);
+    if (live && read.ok && read.value !== value) onMoney?.(read.value);
+  }
 
   function take(entry: string) {
     const read = readMoney(entry, places);
@@ -52,6 +62,7 @@ export function MoneyField({
     if (press.key === "Escape") {
       setDraft(null);
       setFault(undefined);
+      if (live && value !== begun.current) onMoney?.(begun.current);
     }
     const direction = press.key === "ArrowUp" ? 1 : press.key === "ArrowDown" ? -1 : 0;
     if (direction === 0 || off) return;
@@ -79,7 +90,10 @@ export function MoneyField({
             autoComplete="off"
             readOnly={off}
             value={draft ?? value}
-            onChange={(change) => setDraft(change.currentTarget.value)}
+            onFocus={() => {
+              begun.current = value;
+            }}
+            onChange={(change) => type(change.currentTarget.value)}
             onBlur={(leave) => draft !== null && take(leave.currentTarget.value)}
             onKeyDown={step}
             className={`w-full min-w-0 bg-transparent px-3 text-right outline-none ${large ? "type-price py-2.5" : "text-[1.1875rem] leading-6 font-semibold"}`}
