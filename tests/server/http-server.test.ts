@@ -14,13 +14,13 @@ afterEach(() => {
 const ORIGIN = "https://kits.example.org";
 
 /** A server in front of a handler that sends back the headers it was given, or a long text. */
-async function listening(trustProxy = false): Promise<number> {
+async function listening(trustProxy = false, origin = ORIGIN): Promise<number> {
   server = httpServer(
     (request, response) => {
       response.setHeader("content-type", "text/plain");
       response.end(request.url === "/long" ? "kit ".repeat(2000) : JSON.stringify(request.headers));
     },
-    { origin: ORIGIN, trustProxy },
+    { origin, trustProxy },
   );
   server.listen(0, "127.0.0.1");
   await once(server, "listening");
@@ -59,6 +59,25 @@ test("a proxy that is trusted may say where a request came from", async () => {
   const port = await listening(true);
   const seen = JSON.parse((await ask(port, "/", { "x-forwarded-for": "203.0.113.9" })).body.toString());
   expect(seen["x-forwarded-for"]).toBe("203.0.113.9");
+});
+
+test("of several addresses only the proxy's own, the last, is believed", async () => {
+  const port = await listening(true);
+  const claimed = { "x-forwarded-for": "198.51.100.1, 203.0.113.9" };
+  const seen = JSON.parse((await ask(port, "/", claimed)).body.toString());
+  expect(seen["x-forwarded-for"]).toBe("203.0.113.9");
+});
+
+test.each([
+  ["127.0.0.1:4321", 200],
+  ["localhost:4321", 200],
+  ["[::1]:4321", 200],
+  ["evil.example:4321", 421],
+  ["127.0.0.1.evil.example", 421],
+  ["not a name", 421],
+])("a server on this machine asked as %s answers %i", async (host, status) => {
+  const port = await listening(false, "http://127.0.0.1:4321");
+  expect((await ask(port, "/", { host })).status).toBe(status);
 });
 
 test("replies are sent compressed to those who can read that", async () => {
