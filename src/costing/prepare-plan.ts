@@ -43,12 +43,13 @@ export function preparePlan(plan: Plan, kitsMost: number): PreparedPlan {
     worths.set(currency, worth);
     return worth;
   };
+  const places = new Map<string, number>();
   const bucketOf = (worth: MinorWorth, keepShare: string) => {
-    const keepMillionths = scaled(keepShare, 6);
-    const found = buckets.findIndex(
-      (bucket) => bucket.worth === worth && bucket.keepMillionths === keepMillionths,
-    );
-    return found >= 0 ? found : buckets.push({ worth, keepMillionths }) - 1;
+    const key = `${worth.currency} ${keepShare}`;
+    const known = places.get(key);
+    if (known !== undefined) return known;
+    places.set(key, buckets.length);
+    return buckets.push({ worth, keepMillionths: scaled(keepShare, 6) }) - 1;
   };
   const suppliers = plan.suppliers
     .toSorted(byNameAndId)
@@ -127,7 +128,14 @@ function preparePart(part: PlanPart, preparing: Preparing): PreparedPart {
 function emptyMemory(offers: number): ChoiceMemory {
   const never = Number.POSITIVE_INFINITY;
   const from = new Float64Array(offers).fill(never);
-  return { winner: null, from, floor: new Float64Array(offers), rivalsFrom: never, rivalsFloor: 0 };
+  return {
+    best: null,
+    quantity: 0,
+    from,
+    floor: new Float64Array(offers),
+    rivalsFrom: never,
+    rivalsFloor: 0,
+  };
 }
 
 function prepareTasks(plan: Plan, kitsMost: number): PreparedTask[] {

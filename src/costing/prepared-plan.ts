@@ -11,6 +11,7 @@ import type { Ladder } from "./ladder.ts";
 import type { Problem } from "./problem.ts";
 import type { OfferStanding } from "./run-result.ts";
 import type { SplitTable } from "./split-order.ts";
+import type { WeighedOffer } from "./supplier-choice.ts";
 
 /** A plan with every text read once, so that a thousand run sizes can be reckoned from it. */
 export interface PreparedPlan {
@@ -67,7 +68,9 @@ export interface PreparedPart {
 
 /** What the last choice for a part tells about the next one; see `chooseOffer`. */
 export interface ChoiceMemory {
-  winner: PreparedOffer | null;
+  /** The last choice and the quantity it was made for. */
+  best: WeighedOffer | null;
+  quantity: number;
   /** By rank: the last quantity weighed, and what no quantity from there upward can be worth less than. */
   from: Float64Array;
   floor: Float64Array;

@@ -50,10 +50,17 @@ export function chooseOffer(
     );
   }
   const { choice } = part;
-  const winner = choice.winner === null ? null : weigh(choice.winner, quantity);
-  if (winner?.freightKnown && quantity >= choice.rivalsFrom && isBelow(winner, choice.rivalsFloor))
-    return winner;
-  return chooseAnew(part, quantity, winner);
+  const winner = choice.best === null ? null : weighAgain(choice.best, choice.quantity, quantity);
+  const holds = winner?.freightKnown && quantity >= choice.rivalsFrom && isBelow(winner, choice.rivalsFloor);
+  choice.best = holds ? winner : chooseAnew(part, quantity, winner);
+  choice.quantity = quantity;
+  return choice.best;
+}
+
+/** An order that already holds a larger quantity is still the cheapest for it: it was so among more. */
+function weighAgain(last: WeighedOffer, lastQuantity: number, quantity: number): WeighedOffer | null {
+  if (quantity >= lastQuantity && quantity <= last.order.quantity) return last;
+  return weigh(last.offer, quantity);
 }
 
 function bestOf(offers: readonly PreparedOffer[], quantity: number): WeighedOffer | null {
@@ -113,7 +120,6 @@ function setFloor(
 }
 
 function rememberRivals(choice: ChoiceMemory, best: WeighedOffer | null): void {
-  choice.winner = best?.offer ?? null;
   choice.rivalsFrom = 0;
   choice.rivalsFloor = Number.POSITIVE_INFINITY;
   for (let rank = 0; rank < choice.from.length; rank += 1) {
