@@ -1,6 +1,6 @@
 import { type KeyboardEvent, useRef, useState } from "react";
 import { FIELD_GROUP_LOOK, fieldLook, UNIT_BOX_LOOK } from "#src/components/field-look.ts";
-import { readMeasure } from "#src/components/measure-entry.ts";
+import { type MeasureEntry, readMeasure } from "#src/components/measure-entry.ts";
 import { Field, type FieldWords } from "./Field.tsx";
 
 export type MeasureFieldProps = FieldWords & {
@@ -12,6 +12,8 @@ export type MeasureFieldProps = FieldWords & {
   onMeasure?: (value: string) => void;
   /** Also called while one types, for figures that follow; Escape then gives back what stood there. */
   live?: boolean;
+  /** What is wrong with a value that can be read, such as one out of range; it is then not handed on. */
+  check?: (value: string) => string | undefined;
   name?: string;
   id?: string;
   off?: boolean;
@@ -24,6 +26,7 @@ export function MeasureField({
   unit,
   onMeasure,
   live,
+  check,
   name,
   id,
   off,
@@ -35,9 +38,15 @@ export function MeasureField({
   const wrong = fault ?? words.wrong;
   const begun = useRef(value);
 
+  function readChecked(entry: string): MeasureEntry {
+    const read = readMeasure(entry, unit);
+    const sentence = read.ok && read.value !== "" ? check?.(read.value) : undefined;
+    return sentence === undefined ? read : { ok: false, sentence };
+  }
+
   function type(entry: string) {
     setDraft(entry);
-    const read = readMeasure(entry, unit);
+    const read = readChecked(entry);
     if (live && read.ok && read.value !== value) onMeasure?.(read.value);
   }
 
@@ -50,7 +59,7 @@ export function MeasureField({
   }
 
   function take(entry: string) {
-    const read = readMeasure(entry, unit);
+    const read = readChecked(entry);
     setFault(read.ok ? undefined : read.sentence);
     if (!read.ok) return;
     setDraft(null);

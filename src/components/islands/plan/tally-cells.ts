@@ -2,10 +2,10 @@ import type { KitAddress } from "#src/components/islands/kit-address.ts";
 import type { TallyCell } from "#src/components/islands/parts/TallyStrip.tsx";
 import { count, money, signedCount, signedMoney } from "#src/components/written.ts";
 import type { Figure } from "#src/costing/figure.ts";
+import { needWords } from "#src/costing/problem-words.ts";
 import type { Tally } from "#src/costing/tally.ts";
 import type { TallyChange, TallyFigure } from "#src/costing/tally-change.ts";
 import type { FigureId } from "#src/costing/working-tree.ts";
-import { needInShort } from "./need-words.ts";
 import { needLink } from "./page-links.ts";
 
 const LABELS: Record<TallyFigure, string> = {
@@ -43,7 +43,7 @@ export interface CellContext {
 function needs(figure: Figure, address: KitAddress): Pick<TallyCell, "needs" | "needsHref"> {
   if (figure.known) return {};
   const [first] = figure.needs;
-  return { needs: needInShort(figure.needs), needsHref: first && needLink(address, first) };
+  return { needs: needWords(figure.needs), needsHref: first && needLink(address, first) };
 }
 
 /** The figures of the strip, written, with their changes and what they open. */

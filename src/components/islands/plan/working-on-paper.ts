@@ -2,6 +2,7 @@ import type { KitAddress } from "#src/components/islands/kit-address.ts";
 import type { Paper, PaperLine, PaperSub } from "#src/components/working-paper.ts";
 import { count, money, plainMoney, rate, unitPrice } from "#src/components/written.ts";
 import { roundedText } from "#src/costing/decimal.ts";
+import { needWords } from "#src/costing/problem-words.ts";
 import type {
   FigureId,
   WorkingAmount,
@@ -10,7 +11,6 @@ import type {
   WorkingSub,
   WorkingTree,
 } from "#src/costing/working-tree.ts";
-import { needInShort } from "./need-words.ts";
 import { pageLink } from "./page-links.ts";
 
 export interface PaperContext {
@@ -46,7 +46,7 @@ function written(amount: WorkingAmount, currency: string): string {
     case "words":
       return amount.value;
     case "not-known":
-      return needInShort(amount.needs);
+      return needWords(amount.needs);
   }
 }
 

@@ -1,0 +1,53 @@
+import { count, money } from "#src/components/written.ts";
+import { needWords } from "#src/costing/problem-words.ts";
+import type { RunResult } from "#src/costing/run-result.ts";
+
+/** A piece of the answer; deciding figures are bold. */
+export interface AnswerPiece {
+  text: string;
+  bold?: boolean;
+}
+
+const bold = (text: string): AnswerPiece => ({ text, bold: true });
+const plain = (text: string): AnswerPiece => ({ text });
+
+function positive(amount: string): string {
+  return amount.startsWith("-") ? amount.slice(1) : amount;
+}
+
+/**
+ * The answer of the run page from the figures of the run, pieces to be set one after the other: what a kit
+ * costs, brings in and earns, when the run is paid for, and what it needs in cash.
+ */
+export function runAnswer(run: RunResult): AnswerPiece[] {
+  const { kits, perKit, keptPerKit, earnsPerKit, evenAfter, spent, currency } = run;
+  const write = (amount: string) => money(amount, currency);
+  if (!perKit.used.known)
+    return [bold(`${kits} cannot be worked out yet.`), plain(` The cost ${needWords(perKit.used.needs)}.`)];
+  const cost = `One kit costs ${write(perKit.used.value)}`;
+  if (!keptPerKit.known || !earnsPerKit.known)
+    return [
+      bold(
+        `${kits} ${kits === 1 ? "kit costs" : "kits cost"} ${spent.known ? write(spent.value) : "more than is known"}.`,
+      ),
+      plain(` ${cost}. What it brings in ${needWords(keptPerKit.known ? [] : keptPerKit.needs)}.`),
+    ];
+  const brings = `${cost} and brings in ${write(keptPerKit.value)}`;
+  const earns = earnsPerKit.value;
+  if (earns.startsWith("-"))
+    return [
+      bold(`A run of ${kits} loses money.`),
+      plain(` ${brings}, so each loses `),
+      bold(write(positive(earns))),
+      plain(" even if all are sold."),
+    ];
+  const cash = spent.known ? ` It needs ${write(spent.value)} in cash.` : "";
+  return [
+    bold(`Make ${kits}.`),
+    plain(` ${brings}, so each earns `),
+    bold(write(earns)),
+    plain(
+      evenAfter.known ? `. The run is paid for after ${count(evenAfter.value)} sold.${cash}` : `.${cash}`,
+    ),
+  ];
+}
