@@ -2,7 +2,8 @@ import { moneyText, unitPriceText } from "#src/components/amount-text.ts";
 import { CLASS_WORDS, CLASSES_IN_ORDER } from "#src/components/part-words.ts";
 import { roundedText } from "#src/costing/decimal.ts";
 import type { PartLine, RunResult } from "#src/costing/run-result.ts";
-import { compressDesignators, repeatedDesignators } from "#src/partslist/designators.ts";
+import { compressDesignators } from "#src/partslist/designators.ts";
+import { lineFaults } from "#src/partslist/line-faults.ts";
 import { type ResistorBands, resistorBands } from "#src/partslist/resistor-bands.ts";
 import type { LineView, PartsList, PricedPartView } from "#src/server/present.ts";
 import type { Plan } from "#src/shapes/plan.ts";
@@ -90,13 +91,12 @@ interface Bought {
 
 /** For each line its row: number, colour code, state, and what the reckoning says of its part. */
 export function lineRows(list: PartsList, bought: Bought | null): LineRow[] {
-  const all = list.lines.flatMap(({ designators }) => (designators === "" ? [] : designators.split(", ")));
-  const repeated = new Set(repeatedDesignators(all));
+  const faults = lineFaults(list.lines);
   const planParts = new Map(bought?.plan.parts.map((part) => [part.id, part]));
   const partLines = new Map(bought?.run.parts.map((part) => [part.id, part]));
   const firstLines = new Map<string, string>();
   return list.lines.map((line: AnyLine, place): LineRow => {
-    const own = listState(line, repeated);
+    const own = listState(line, faults.get(line.id));
     const [planned, reckoned] = [planParts.get(line.part.id), partLines.get(line.part.id)];
     const isBought = line.mark === "in-kit" || line.mark === "option";
     const state =

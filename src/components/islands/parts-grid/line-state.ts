@@ -1,5 +1,6 @@
-import { daysBetween } from "#src/components/day-text.ts";
+import { isOldPrice } from "#src/components/islands/offers/offer-words.ts";
 import type { PartLine } from "#src/costing/run-result.ts";
+import type { LineFault } from "#src/partslist/line-faults.ts";
 import type { LineView } from "#src/server/present.ts";
 import type { Plan, PlanOffer, PlanPart } from "#src/shapes/plan.ts";
 
@@ -10,22 +11,17 @@ export interface LineState {
   toSettle: boolean;
 }
 
-/** A price older than this is worth asking for again. Common practice among small buyers, no source. */
-export const PRICE_OLD_DAYS = 90;
-
 const settle = (word: string): LineState => ({ kind: "caution", word, toSettle: true });
 const note = (word: string): LineState => ({ kind: "neutral", word, toSettle: false });
 const SETTLED: LineState = { kind: "plain", word: "Settled", toSettle: false };
 
-/** What is wrong with a line whatever it costs: no quantity, or a designator that another line has too. */
-export function listState(line: LineView, repeated: ReadonlySet<string>): LineState | null {
-  if (line.part.name === "") return settle("Needs its part");
-  const twice = line.designators.split(", ").find((name) => repeated.has(name));
-  if (twice) return settle(`${twice} twice`);
+/** What is to settle about the line itself, or how its mark keeps it from being bought; `null`: nothing. */
+export function listState(line: LineView, fault: LineFault | undefined): LineState | null {
+  if (fault?.kind === "twice") return settle(`${fault.designator} twice`);
+  if (fault?.kind === "no-quantity") return settle("No quantity");
+  if (fault?.kind === "at-odds") return settle(`${fault.named} named`);
   if (line.mark === "do-not-place") return note("Do not place");
-  if (line.mark === "builders-own") return note("Builder’s own");
-  if (Object.keys(line.quantities).length === 0) return settle("No quantity");
-  return null;
+  return line.mark === "builders-own" ? note("Builder’s own") : null;
 }
 
 function offersOrdered(part: PlanPart, bought: PartLine): PlanOffer[] {
@@ -33,16 +29,12 @@ function offersOrdered(part: PlanPart, bought: PartLine): PlanOffer[] {
   return part.offers.filter(({ id }) => ids.has(id));
 }
 
-function isOld(offer: PlanOffer, asOf: string): boolean {
-  return offer.pricedOn !== null && daysBetween(offer.pricedOn, asOf) > PRICE_OLD_DAYS;
-}
-
 /** How the buying of a line's part stands in the run. */
 export function buyingState(plan: Plan, part: PlanPart, bought: PartLine): LineState {
   if (bought.state === "unpriced") return settle("No price");
   if (bought.state === "short") return settle(`${bought.shortBy} short`);
   if (bought.state === "refused") return settle("Order too small");
-  if (offersOrdered(part, bought).some((offer) => isOld(offer, plan.asOf))) return settle("Old price");
+  if (offersOrdered(part, bought).some((offer) => isOldPrice(offer, plan.asOf))) return settle("Old price");
   return bought.state === "not-needed" ? note("Not in this run") : SETTLED;
 }
 
