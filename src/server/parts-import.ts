@@ -2,7 +2,7 @@ import type { ColumnMapping } from "#src/partslist/mapping.ts";
 import type { DraftDecisions, DraftEdit } from "#src/shapes/import.ts";
 import { beginDraft } from "./bring-in/begin-draft.ts";
 import { existingLines } from "./bring-in/existing-lines.ts";
-import { draftAt, pricesFromAfter, writeDraft } from "./bring-in/import-at.ts";
+import { draftAt, dropDraft, pricesFromAfter, writeDraft } from "./bring-in/import-at.ts";
 import { type PricesView, pricesFromOf, pricesView } from "./bring-in/list-offers.ts";
 import { type ListedImport, listedImports } from "./bring-in/listed-imports.ts";
 import type { PartsSummary, PartsSummaryJob, summariseParts } from "./bring-in/parts-summary.ts";
@@ -11,9 +11,8 @@ import type { PartsSource } from "./bring-in/read-parts.ts";
 import type { Terms } from "./bring-in/take-offers.ts";
 import { type FileView, fileView } from "./bring-in/view.ts";
 import type { Changing } from "./note-change.ts";
-import { Problem } from "./problem.ts";
 import { rememberedMapping } from "./store/column-memory.ts";
-import { type ImportPlace, type ImportRow, lastTaken, moveImport } from "./store/import.ts";
+import { type ImportPlace, type ImportRow, lastTaken } from "./store/import.ts";
 import type { KitRow } from "./store/kit.ts";
 import type { WorkshopRow } from "./store/membership.ts";
 
@@ -44,6 +43,7 @@ export function partsTerms({ workshop, now }: InKit): Terms {
 export function partsSource({ db, workshop, kit }: InKit, row: ImportRow): PartsSource {
   return {
     id: row.id,
+    kind: row.kind,
     text: row.content,
     mapping: row.mapping as ColumnMapping | null,
     remembered:
@@ -93,9 +93,6 @@ export async function editPartsImport(given: InKit, id: string, edit: DraftEdit)
   return viewOf(given, { ...row, ...change, version: row.version + 1 }, summary);
 }
 
-/** Drops a draft: its text goes at once. */
 export function dropPartsImport(given: InKit, id: string, seen: number): void {
-  const row = draftAt(given, partsPlace(given), id, seen);
-  if (!moveImport(given.db, row.id, "draft", seen, { state: "dropped", content: "" }))
-    throw new Problem("changed-meanwhile");
+  dropDraft(given, partsPlace(given), id, seen);
 }

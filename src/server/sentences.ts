@@ -175,6 +175,11 @@ export const SENTENCES = {
     title: "Some rows must be settled before the list is brought in.",
     detail: "Settle rows {rows}. Nothing was changed.",
   },
+  "supplier-not-said": {
+    status: 409,
+    title: "Nobody has said whose prices these are.",
+    detail: "Choose the supplier of the {count} offers that name none, or leave their rows out.",
+  },
   "difference-changed": {
     status: 409,
     title: "Somebody changed what this list is compared with.",

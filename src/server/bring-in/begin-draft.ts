@@ -1,13 +1,12 @@
 import { createHash } from "node:crypto";
 import { readCells } from "#src/partslist/cells.ts";
-import { guessColumns } from "#src/partslist/columns.ts";
-import { NAME_LENGTH, UPLOAD_COLUMNS, UPLOAD_ROWS } from "#src/shapes/limits.ts";
+import { type ImportKind, NAME_LENGTH, UPLOAD_COLUMNS, UPLOAD_ROWS } from "#src/shapes/limits.ts";
 import { decodeUpload } from "../decode-upload.ts";
 import { newId } from "../new-id.ts";
 import type { Changing } from "../note-change.ts";
 import { Problem } from "../problem.ts";
 import { addImport, type ImportPlace } from "../store/import.ts";
-import { NO_DECISIONS } from "./list-draft.ts";
+import { guessFor, NO_DECISIONS } from "./list-draft.ts";
 
 export const PASTED_NAME = "Pasted cells";
 
@@ -32,13 +31,13 @@ function tooLong(name: string, found: number, what: string, most: number): Probl
   return new Problem("upload-too-long", { parameters: { name, found, what, most } });
 }
 
-function shapeOf(name: string, text: string): { rowCount: number; fingerprint: string } {
+function shapeOf(kind: ImportKind, name: string, text: string): { rowCount: number; fingerprint: string } {
   const sheet = readCells(text);
   const filled = sheet.records.filter(({ cells }) => cells.some((cell) => cell.trim() !== ""));
   if (filled.length === 0) throw new Problem("upload-empty", { parameters: { name } });
   if (sheet.records.length > UPLOAD_ROWS) throw tooLong(name, sheet.records.length, "rows", UPLOAD_ROWS);
   if (sheet.columns > UPLOAD_COLUMNS) throw tooLong(name, sheet.columns, "columns", UPLOAD_COLUMNS);
-  return { rowCount: sheet.records.length, fingerprint: guessColumns(sheet.records).fingerprint };
+  return { rowCount: sheet.records.length, fingerprint: guessFor(kind, sheet).fingerprint };
 }
 
 /**
@@ -69,7 +68,7 @@ export function beginDraft(
     encoding: decodedList.encoding,
     contentHash: createHash("sha256").update(bytes).digest("hex"),
     content: decodedList.text,
-    ...shapeOf(name, decodedList.text),
+    ...shapeOf(place.kind, name, decodedList.text),
     answers: NO_DECISIONS,
     createdBy: user.id,
     createdAt: now,

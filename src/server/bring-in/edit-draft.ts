@@ -1,10 +1,11 @@
-import { guessColumns, mappingOf } from "#src/partslist/columns.ts";
+import { mappingOf } from "#src/partslist/columns.ts";
 import type { Answer, Question } from "#src/partslist/draft.ts";
 import { breakQuantityOf } from "#src/partslist/headings.ts";
 import type { ColumnMapping, ColumnMeaning } from "#src/partslist/mapping.ts";
 import { REPEATABLE_MEANINGS } from "#src/partslist/meanings.ts";
-import type { Sheet } from "#src/partslist/sheet.ts";
 import type { ColumnChange, DraftDecisions, DraftEdit } from "#src/shapes/import.ts";
+import type { ImportKind } from "#src/shapes/limits.ts";
+import { guessFor, type ListDraft } from "./list-draft.ts";
 
 function changed(column: ColumnMeaning, change: ColumnChange): ColumnMeaning {
   const meaning = change.meaning ?? column.meaning;
@@ -33,10 +34,14 @@ function withColumn(columns: ColumnMeaning[], change: ColumnChange): ColumnMeani
  * The mapping after an edit, `null` to guess anew. Another heading row makes a new guess, over which the edit's own
  * columns stand.
  */
-export function editedMapping(sheet: Sheet, mapping: ColumnMapping, edit: DraftEdit): ColumnMapping | null {
+export function editedMapping(
+  kind: ImportKind,
+  { sheet, mapping }: ListDraft,
+  edit: DraftEdit,
+): ColumnMapping | null {
   if (edit.guessAgain) return null;
   const moved = edit.headerRecord !== undefined && edit.headerRecord !== mapping.headerRecord;
-  const base = moved ? mappingOf(guessColumns(sheet.records, edit.headerRecord)) : mapping;
+  const base = moved ? mappingOf(guessFor(kind, sheet, edit.headerRecord)) : mapping;
   return {
     headerRecord: base.headerRecord,
     currency: edit.currency === undefined ? base.currency : edit.currency,

@@ -19,7 +19,7 @@ export interface EditedParts {
 /** An edit of a parts list in draft: what it decides, and how the list then reads. */
 export function editParts({ edit, source, ...rest }: EditPartsJob): EditedParts {
   const draft = openList(source);
-  const mapping = editsColumns(edit) ? editedMapping(draft.sheet, draft.mapping, edit) : source.mapping;
+  const mapping = editsColumns(edit) ? editedMapping(source.kind, draft, edit) : source.mapping;
   const open = edit.takeSuggestions ? openQuestions(readParts({ ...source, mapping }).result.rows) : [];
   const decisions = editedDecisions(source.decisions, edit, open);
   return {

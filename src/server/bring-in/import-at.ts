@@ -7,6 +7,7 @@ import {
   type ImportPlace,
   type ImportRow,
   importOf,
+  moveImport,
 } from "../store/import.ts";
 import { supplierOf } from "../store/supplier.ts";
 
@@ -32,6 +33,13 @@ export function draftAt(given: Changing, place: ImportPlace, id: string, seen?: 
   if (seen !== undefined && row.version !== seen)
     throw new Problem("changed-meanwhile", { current: { version: row.version } });
   return row;
+}
+
+/** Drops a draft: its text goes at once. */
+export function dropDraft(given: Changing, place: ImportPlace, id: string, seen: number): void {
+  const row = draftAt(given, place, id, seen);
+  if (!moveImport(given.db, row.id, "draft", seen, { state: "dropped", content: "" }))
+    throw new Problem("changed-meanwhile");
 }
 
 /** Writes an edit into a draft, unless somebody else did first. */

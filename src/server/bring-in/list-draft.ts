@@ -1,12 +1,15 @@
 import { readCells } from "#src/partslist/cells.ts";
 import { applyRemembered, guessColumns, mappingOf } from "#src/partslist/columns.ts";
 import type { ColumnGuesses, ColumnMapping } from "#src/partslist/mapping.ts";
+import { guessPriceColumns } from "#src/partslist/read-prices.ts";
 import type { Sheet } from "#src/partslist/sheet.ts";
 import type { DraftDecisions } from "#src/shapes/import.ts";
+import type { ImportKind } from "#src/shapes/limits.ts";
 
 /** What a list is read from: its text and what people decided. Plain data, so that another thread can read it. */
 export interface ListSource {
   id: string;
+  kind: ImportKind;
   text: string;
   /** Column meanings a person has set; `null` leaves the guess. */
   mapping: ColumnMapping | null;
@@ -40,11 +43,18 @@ function sheetOf({ id, text }: ListSource): Sheet {
   return sheet;
 }
 
+/** What the columns of a sheet mean by the look of them; under another heading row where one is given. */
+export function guessFor(kind: ImportKind, sheet: Sheet, header?: number | null): ColumnGuesses {
+  return kind === "price-list"
+    ? guessPriceColumns(sheet.records, header)
+    : guessColumns(sheet.records, header);
+}
+
 /** Opens a list: reads its cells and says what its columns mean. */
 export function openList(source: ListSource): ListDraft {
   const sheet = sheetOf(source);
-  const { mapping, remembered } = source;
-  const guesses = mapping ? guessColumns(sheet.records, mapping.headerRecord) : guessColumns(sheet.records);
+  const { kind, mapping, remembered } = source;
+  const guesses = guessFor(kind, sheet, mapping?.headerRecord);
   const shown = !mapping && remembered ? applyRemembered(guesses, remembered.columns) : guesses;
   return { sheet, guesses: shown, mapping: mapping ?? mappingOf(shown) };
 }

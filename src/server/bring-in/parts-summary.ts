@@ -70,7 +70,6 @@ export interface PartsTaking {
   lines: PartsReading["lines"];
   difference: PartsReading["difference"];
   mapping: ColumnMapping;
-  fingerprint: string;
   mustRows: number[];
   seen: string;
 }
@@ -85,7 +84,6 @@ export function partsTaking(source: PartsSource): PartsTaking {
     lines,
     difference,
     mapping: draft.mapping,
-    fingerprint: draft.guesses.fingerprint,
     mustRows: must.map(({ row }) => row),
     seen: seenStamp(difference),
   };

@@ -1,7 +1,7 @@
 import type { Rung } from "#src/shapes/ladder.ts";
 import { Offer, type OfferFields } from "#src/shapes/offer.ts";
 import { checked } from "../checked.ts";
-import { type OfferWithBreaks, offersOf } from "../store/offer.ts";
+import { type OfferRow, type OfferWithBreaks, offersOf } from "../store/offer.ts";
 import { type SupplierRow, suppliersOf } from "../store/supplier.ts";
 import type { Ledger } from "./ledger.ts";
 
@@ -44,6 +44,15 @@ export function supplierKey(name: string): string {
   return name.trim().toLowerCase().replace(/\s+/g, " ");
 }
 
+/** An offer is known by its part, its supplier and the supplier's code. */
+export function offerKey({
+  partId,
+  supplierId,
+  orderCode,
+}: Pick<OfferRow, "partId" | "supplierId" | "orderCode">): string {
+  return JSON.stringify([partId, supplierId, orderCode]);
+}
+
 /**
  * A ladder as it can be bought from: nothing below the least order, and the price that holds there. "1: 0.10, 10:
  * 0.08" with at least 25 is "25: 0.08", which says the same.
@@ -61,7 +70,7 @@ function leastOrder(wanted: WantedOffer, multiple: number): number {
   return Number.isFinite(first) ? Math.ceil(first / multiple) * multiple : multiple;
 }
 
-function newFields(
+export function newFields(
   wanted: WantedOffer,
   supplier: Pick<SupplierRow, "id" | "currency">,
   terms: Terms,
@@ -85,7 +94,11 @@ function newFields(
 }
 
 /** What the list says put over what is there; a list without prices leaves the ladder and its day alone. */
-function changedFields({ offer, breaks }: OfferWithBreaks, wanted: WantedOffer, terms: Terms): OfferFields {
+export function changedFields(
+  { offer, breaks }: OfferWithBreaks,
+  wanted: WantedOffer,
+  terms: Terms,
+): OfferFields {
   const { supplierId, orderCode, priceModel, validUntil, note } = offer;
   const priced = wanted.breaks.length > 0;
   const orderMultiple = wanted.orderMultiple ?? offer.orderMultiple;
@@ -104,8 +117,12 @@ function changedFields({ offer, breaks }: OfferWithBreaks, wanted: WantedOffer, 
 }
 
 /** Everything but the day, in one text: equal where nothing changes. */
-function told({ pricedOn, validUntil, note, ...rest }: OfferFields): string {
+export function told({ pricedOn, validUntil, note, ...rest }: OfferFields): string {
   return JSON.stringify(rest, Object.keys(rest).sort().concat("quantity", "price"));
+}
+
+export function toldOf(offer: OfferWithBreaks): string {
+  return told(asFields(offer));
 }
 
 function asFields({ offer, breaks }: OfferWithBreaks): OfferFields {
@@ -162,19 +179,15 @@ function supplierFinder(ledger: Ledger, counts: OfferCounts, terms: Terms) {
 export function takeOffers(ledger: Ledger, wanted: readonly WantedOffer[], terms: Terms): OfferCounts {
   const counts: OfferCounts = { added: 0, changed: 0, confirmed: 0, same: 0, newSuppliers: [] };
   if (wanted.length === 0) return counts;
-  const keyOf = (part: string, supplier: string, code: string) => JSON.stringify([part, supplier, code]);
   const known = new Map(
-    offersOf(ledger.by.db, ledger.by.workshop.id).map((row) => [
-      keyOf(row.offer.partId, row.offer.supplierId, row.offer.orderCode),
-      row,
-    ]),
+    offersOf(ledger.by.db, ledger.by.workshop.id).map((row) => [offerKey(row.offer), row]),
   );
   const supplierFor = supplierFinder(ledger, counts, terms);
   const seen = new Set<string>();
   for (const one of wanted) {
     const supplier = supplierFor(one);
     if (!supplier) continue;
-    const key = keyOf(one.partId, supplier.id, one.orderCode);
+    const key = offerKey({ partId: one.partId, supplierId: supplier.id, orderCode: one.orderCode });
     // Two rows of one list with the same part and code state the same offer; the first with a price counts.
     if (seen.has(key)) continue;
     if (one.breaks.length > 0) seen.add(key);
@@ -199,7 +212,7 @@ function bringUpToDate(
   counts: OfferCounts,
 ): OfferWithBreaks {
   const fields = checked(Offer, changedFields(old, wanted, terms), wanted.at);
-  const equal = told(fields) === told(asFields(old));
+  const equal = told(fields) === toldOf(old);
   if (equal && !(terms.confirms && fields.pricedOn !== old.offer.pricedOn)) {
     counts.same++;
     return old;
