@@ -1,4 +1,3 @@
-import { useState } from "react";
 import {
   Area,
   CartesianGrid,
@@ -27,11 +26,10 @@ import {
   Y_AXIS,
 } from "#src/components/islands/chart-theme.ts";
 import { HatchDefs } from "#src/components/islands/parts/HatchDefs.tsx";
-import { ShowWorking } from "#src/components/islands/parts/ShowWorking.tsx";
 import { type Column, Table } from "#src/components/islands/parts/Table.tsx";
 import type { LadderTerms } from "#src/costing/ladder.ts";
 import type { PartOrder } from "#src/costing/run-result.ts";
-import { type CurveRow, curveEnd, curveRows } from "./curve-points.ts";
+import { type CurveRow, curveEnd, curveRows, roundTicks } from "./curve-points.ts";
 
 export interface CurveChartProps {
   terms: LadderTerms;
@@ -39,35 +37,30 @@ export interface CurveChartProps {
   order: PartOrder | null;
   /** "LEDs". */
   pieces: string;
+  /** The table behind the chart is shown too. */
+  asTable: boolean;
 }
 
 const HEIGHT = 340;
 
 /** What any number costs at one offer: thick is what is paid, the hatched part what buying up saves. */
-export default function CurveChart({ terms, need, order, pieces }: CurveChartProps) {
-  const [asTable, setAsTable] = useState(false);
+export default function CurveChart({ terms, need, order, pieces, asTable }: CurveChartProps) {
   const ordered = order?.quantity ?? need;
-  const end = curveEnd(terms, need, ordered);
+  const ticks = roundTicks(curveEnd(terms, need, ordered));
+  const end = ticks.at(-1) ?? ordered;
   const rows = curveRows(terms, end);
   if (rows.length === 0) return <p className="type-note">No number of these has a price here.</p>;
   const { currency } = terms;
+  const amounts = roundTicks(Math.max(...rows.map(({ pays, listed }) => listed ?? pays)), 0.01);
   const instead = order?.boughtUp;
   return (
     <div>
-      <div className="flex justify-end">
-        <ShowWorking
-          of="what any number costs"
-          open={asTable}
-          label={asTable ? "Hide the table" : "Show as a table"}
-          onClick={() => setAsTable(!asTable)}
-        />
-      </div>
       <section
         style={{ height: HEIGHT }}
         aria-label={`What any number of ${pieces} costs, up to ${countText(end)}`}
       >
         <ResponsiveContainer width="100%" height={HEIGHT} initialDimension={{ width: 358, height: HEIGHT }}>
-          <ComposedChart data={rows} margin={{ top: 16, right: 24, bottom: 0, left: 0 }}>
+          <ComposedChart data={rows} margin={{ top: 16, right: 24, bottom: 10, left: 0 }}>
             <defs>
               <HatchDefs />
             </defs>
@@ -77,13 +70,14 @@ export default function CurveChart({ terms, need, order, pieces }: CurveChartPro
               dataKey="quantity"
               domain={[0, end]}
               tickFormatter={countText}
-              tickCount={6}
+              ticks={ticks}
               label={axisTitle(`${pieces} bought`)}
             />
             <YAxis
               {...Y_AXIS}
               tickFormatter={(amount) => roundMoneyText(String(amount), currency)}
-              tickCount={5}
+              ticks={amounts}
+              domain={[0, amounts.at(-1) ?? 1]}
             />
             <Tooltip content={<Tip currency={currency} />} cursor={CURSOR} isAnimationActive={false} />
             <Area
@@ -119,7 +113,8 @@ export default function CurveChart({ terms, need, order, pieces }: CurveChartPro
                 fill={INK}
                 label={{
                   value: `${countText(instead.insteadOf)} for ${moneyText(instead.insteadOfCosts, currency)}`,
-                  position: "left",
+                  position: "top",
+                  offset: 10,
                   ...LINE_NAME,
                   fill: INK,
                 }}

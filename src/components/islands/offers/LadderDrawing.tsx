@@ -189,8 +189,18 @@ function NeedLine({ plan, need, y }: { plan: Plan; need: number; y: number }) {
     <g>
       <path d={`M${plan.left} ${y}H${plan.right - 2}`} strokeWidth={2} className="stroke-copper-metal" />
       <circle cx={plan.left} cy={y} r={7} strokeWidth={4} className="fill-logo-tin stroke-copper-metal" />
-      <text x={plan.left - 20} y={y + 5} textAnchor="end" className="fill-copper font-semibold type-label">
-        need {countText(need)}
+      <text
+        x={plan.left - 20}
+        y={y + (plan.narrow ? -4 : 5)}
+        textAnchor="end"
+        className="fill-copper font-semibold type-label"
+      >
+        {plan.narrow ? "need" : `need ${countText(need)}`}
+        {plan.narrow && (
+          <tspan x={plan.left - 20} dy={18}>
+            {countText(need)}
+          </tspan>
+        )}
       </text>
     </g>
   );

@@ -8,7 +8,8 @@ import { useOpens } from "#src/components/islands/plan/open-working.ts";
 import { PAIRS } from "#src/components/page-look.ts";
 import type { LadderTerms } from "#src/costing/ladder.ts";
 import { neverWorthBuying, rungOrders } from "#src/costing/order-curve.ts";
-import type { PartLine, PartOrder } from "#src/costing/run-result.ts";
+import type { Basket, PartLine, PartOrder } from "#src/costing/run-result.ts";
+import { compressDesignators } from "#src/partslist/designators.ts";
 import type { OfferPart } from "#src/server/kit-offers.ts";
 import type { OfferView } from "#src/server/offer-changes.ts";
 import type { CurveChartProps } from "./CurveChart.tsx";
@@ -18,7 +19,7 @@ import { LadderDrawing } from "./LadderDrawing.tsx";
 import { LotTable } from "./LotTable.tsx";
 import { OffersSection } from "./OffersSection.tsx";
 import { offerAnswer } from "./offer-answer.ts";
-import { lineText, piecesOf, thePart } from "./offer-words.ts";
+import { piecesOf, thePart } from "./offer-words.ts";
 import { PartSteps } from "./PartSteps.tsx";
 
 export type OfferPageProps = KitSupplyProps & { part: string };
@@ -73,10 +74,6 @@ function LadderSection({ supply, line, shown }: { supply: KitSupply; line: PartL
   const lots = offer.priceModel === "lots";
   const rungs = lots || offer.breaks.length === 0 ? [] : rungOrders(termsOf(offer), Math.max(1, line.toBuy));
   const { plan } = supply;
-  const rate =
-    offer.currency === plan.currency
-      ? "1"
-      : (plan.rates.find(({ currency }) => currency === offer.currency)?.perForeignUnit ?? null);
   return (
     <Pair note={<HowMany {...{ supply, line, shown }} />}>
       <Section
@@ -91,7 +88,8 @@ function LadderSection({ supply, line, shown }: { supply: KitSupply; line: PartL
             <div className="w-full grow desktop:w-auto desktop:max-w-[320px]">
               {line.toBuy > 0 && (
                 <IfYouBuy
-                  {...{ rungs, order, rate }}
+                  {...{ rungs, order }}
+                  rate={supply.rateOf(offer.currency)}
                   currency={offer.currency}
                   reporting={plan.currency}
                   kits={plan.run.kits}
@@ -121,15 +119,25 @@ function HowMany({ supply, line, shown }: { supply: KitSupply; line: PartLine; s
           <p>
             {others.length === 0
               ? "Nothing else comes in this parcel."
-              : `${names(others.map(({ part }) => partOf(part)?.designators || partOf(part)?.name || ""))} ${others.length === 1 ? "comes" : "come"} in the same parcel.`}{" "}
-            {basket.freight.known
-              ? `Freight of ${moneyText(basket.freight.value, basket.currency)} is shared by ${basket.lines.length === 1 ? "this line alone" : `${basket.lines.length} lines`}.`
-              : "Freight is not known."}
+              : `${names(others.map(({ part }) => calledShort(partOf(part))))} ${others.length === 1 ? "comes" : "come"} in the same parcel.`}{" "}
+            {freightText(basket)}
           </p>
         </MarginNote>
       )}
     </>
   );
+}
+
+function calledShort(line: PartLine | undefined): string {
+  return line ? compressDesignators(line.designators.split(", ").filter(Boolean)) || line.name : "";
+}
+
+function freightText({ freight, currency, lines, freeFreightReached }: Basket): string {
+  if (!freight.known) return "Its freight is not known.";
+  if (freeFreightReached) return "The order is large enough for free freight.";
+  if (!/[1-9]/.test(freight.value)) return "No freight is charged.";
+  const shared = lines.length === 1 ? "falls on this line alone" : `is shared by ${lines.length} lines`;
+  return `Freight of ${moneyText(freight.value, currency)} ${shared}.`;
 }
 
 function working({ open, onOpen, controls }: ReturnType<ReturnType<typeof useOpens>>) {
@@ -162,6 +170,7 @@ function useChart() {
 
 function CurveSection({ part, line, shown }: { part: OfferPart; line: PartLine; shown: Shown }) {
   const Chart = useChart();
+  const [asTable, setAsTable] = useState(false);
   const terms = termsOf(shown.offer);
   const never = neverWorthBuying(terms);
   const ranges = never.map(({ from, to }) =>
@@ -180,9 +189,28 @@ function CurveSection({ part, line, shown }: { part: OfferPart; line: PartLine; 
         )
       }
     >
-      <Section title="What any number costs" aside={`${lineText(part)}, at the price list shown above`}>
+      <Section
+        title="What any number costs"
+        aside="at this supplier’s prices"
+        actions={
+          <ShowWorking
+            of="what any number costs"
+            open={asTable}
+            label={asTable ? "Hide the table" : "Show as a table"}
+            onClick={() => setAsTable(!asTable)}
+          />
+        }
+      >
         <div className="min-h-[340px]">
-          {Chart && <Chart terms={terms} need={line.toBuy} order={shown.order} pieces={piecesOf(part)} />}
+          {Chart && (
+            <Chart
+              terms={terms}
+              need={line.toBuy}
+              order={shown.order}
+              pieces={piecesOf(part)}
+              asTable={asTable}
+            />
+          )}
         </div>
       </Section>
     </Pair>

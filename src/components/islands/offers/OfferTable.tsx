@@ -1,9 +1,11 @@
 import { countText, moneyText, unitPriceText } from "#src/components/amount-text.ts";
 import { spanText } from "#src/components/day-text.ts";
 import { Chip } from "#src/components/islands/parts/Chip.tsx";
+import { Figure, type FigureProps } from "#src/components/islands/parts/Figure.tsx";
 import { QuietButton } from "#src/components/islands/parts/QuietButton.tsx";
 import { RadioDot } from "#src/components/islands/parts/RadioGroup.tsx";
 import { CELL, HEAD_CELL, HEAD_ROW, NUMBER, rowLook, TABLE } from "#src/components/table-look.ts";
+import { exact } from "#src/costing/decimal.ts";
 import type { ConsideredOffer } from "#src/costing/run-result.ts";
 import type { OfferView } from "#src/server/offer-changes.ts";
 import type { SupplierView } from "#src/server/supplier-changes.ts";
@@ -25,6 +27,11 @@ export interface OfferTableProps {
   canChoose: boolean;
   canChange: boolean;
   supplierHref: (supplier: string) => string;
+  /** What the run is reckoned in, and what other currencies are worth in it. */
+  reporting: string;
+  rateOf: (currency: string) => string | null;
+  /** Opens the working of the part. */
+  working: Pick<FigureProps, "onOpen" | "open" | "controls">;
   onPin: (offer: string | null) => void;
   onEdit: (offer: OfferView) => void;
 }
@@ -112,7 +119,7 @@ function Row({ row, ...props }: OfferTableProps & { row: OfferRow }) {
         {considered.quantity === null ? "" : countText(considered.quantity)}
       </td>
       <td className={`${CELL} ${NUMBER}`}>
-        {considered.extended === null ? "" : moneyText(considered.extended, offer.currency)}
+        <Pays row={row} {...props} />
       </td>
       <td className={`${CELL} ${NUMBER} ${WIDE}`}>
         {offer.stockShown === null ? (
@@ -124,15 +131,15 @@ function Row({ row, ...props }: OfferTableProps & { row: OfferRow }) {
       <td className={`${CELL} ${WIDE}`}>{lead === null ? "not known" : spanText(lead)}</td>
       <td className={`${CELL} text-ink-2 ${WIDE}`}>{seenText(offer, today)}</td>
       <td className={CELL}>
-        <Chip kind={mark.kind}>{mark.word}</Chip>
+        <Chip kind={mark.kind} className="align-middle">
+          {mark.word}
+        </Chip>
         {canChange && (
-          <QuietButton
-            className="mt-1 block tablet:hidden"
-            onClick={() => onEdit(offer)}
-            aria-label={`Change the offer of ${name}`}
-          >
-            Change
-          </QuietButton>
+          <span className="mt-1 block tablet:hidden">
+            <QuietButton onClick={() => onEdit(offer)} aria-label={`Change the offer of ${name}`}>
+              Change
+            </QuietButton>
+          </span>
         )}
       </td>
       {canChange && (
@@ -143,6 +150,28 @@ function Row({ row, ...props }: OfferTableProps & { row: OfferRow }) {
         </td>
       )}
     </tr>
+  );
+}
+
+/** In the offer's currency, and below it in the run's where that is another. The chosen one opens its working. */
+function Pays({
+  row: { offer, considered },
+  reporting,
+  rateOf,
+  working,
+}: OfferTableProps & { row: OfferRow }) {
+  const { extended, chosen } = considered;
+  if (extended === null) return null;
+  const rate = offer.currency === reporting ? null : rateOf(offer.currency);
+  return (
+    <>
+      <Figure label="You pay" value={moneyText(extended, offer.currency)} {...(chosen ? working : {})} />
+      {rate !== null && (
+        <span className="block text-ink-2 type-label">
+          {moneyText(exact(extended).times(rate).toFixed(), reporting)}
+        </span>
+      )}
+    </>
   );
 }
 

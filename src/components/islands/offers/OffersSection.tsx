@@ -7,6 +7,7 @@ import { Dialog } from "#src/components/islands/parts/Dialog.tsx";
 import { MarginNote, Pair } from "#src/components/islands/parts/Pair.tsx";
 import { Section } from "#src/components/islands/parts/Section.tsx";
 import { showToast } from "#src/components/islands/parts/toasts.ts";
+import { useOpens } from "#src/components/islands/plan/open-working.ts";
 import { problemSentence } from "#src/costing/problem-words.ts";
 import type { PartLine } from "#src/costing/run-result.ts";
 import type { OfferPart } from "#src/server/kit-offers.ts";
@@ -29,6 +30,7 @@ interface OffersSectionProps {
 export function OffersSection({ props, supply, part, line }: OffersSectionProps) {
   const { address, today, canChange, canChoose } = props;
   const [open, setOpen] = useState<"new" | string | null>(null);
+  const opens = useOpens();
   const planned = supply.plan.parts.find(({ id }) => id === part.id);
   const rows = rowsOf(supply, line, part);
   const edited = supply.offers.find(({ id }) => id === open);
@@ -63,6 +65,9 @@ export function OffersSection({ props, supply, part, line }: OffersSectionProps)
             caption={`Offers for ${part.name}`}
             pinned={planned?.pinnedOffer ?? null}
             supplierHref={supply.supplierHref}
+            reporting={supply.plan.currency}
+            rateOf={supply.rateOf}
+            working={opens(`part:${part.id}`)}
             onPin={pin}
             onEdit={({ id }) => setOpen(id)}
             {...{ rows, today, canChoose, canChange }}

@@ -35,12 +35,12 @@ export function PartSteps({ parts, part, planned, hrefOf }: PartStepsProps) {
   );
 }
 
-/** "6 in each kit", or "4 to 6 in a kit" where editions differ. */
+/** "6 in each kit", or "up to 6 in a kit" where editions differ. */
 function perKitText(planned: PlanPart | undefined): string {
   const counts = planned?.quantities.map(({ perKit }) => perKit) ?? [];
   if (counts.length === 0) return "";
-  const [least, most] = [Math.min(...counts), Math.max(...counts)];
-  return least === most ? `, ${most} in each kit` : `, ${least} to ${most} in a kit`;
+  const most = Math.max(...counts);
+  return counts.every((perKit) => perKit === most) ? `, ${most} in each kit` : `, up to ${most} in a kit`;
 }
 
 function Step({

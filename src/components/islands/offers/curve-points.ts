@@ -1,4 +1,4 @@
-import { type LadderTerms, prepareLadder } from "#src/costing/ladder.ts";
+import type { LadderTerms } from "#src/costing/ladder.ts";
 import { orderCurve } from "#src/costing/order-curve.ts";
 
 /** A point of the chart; numbers are for pixels, the text is what is shown. */
@@ -16,26 +16,45 @@ export interface CurveRow {
 /** Enough points that a straight line between two is the price. */
 const POINTS = 240;
 
-/** How far the chart goes: past what is ordered and past the next break, to a round number. */
+/** Round steps of an axis, so that there are four to seven of them. */
+function roundStep(reach: number): number {
+  const size = 10 ** Math.floor(Math.log10(reach / 4));
+  return ([1, 2, 5, 10].find((step) => reach / (step * size) <= 7) ?? 10) * size;
+}
+
+/** Ticks of an axis from 0 to at least `reach`, at least `least` apart. */
+export function roundTicks(reach: number, least = 1): number[] {
+  const step = Math.max(least, roundStep(Math.max(reach, least)));
+  return Array.from({ length: Math.ceil(reach / step) + 1 }, (_, place) => place * step);
+}
+
+/** How far the chart goes: past what is ordered and past the next break. */
 export function curveEnd(terms: LadderTerms, need: number, ordered: number): number {
   const next = terms.breaks.map(({ quantity }) => quantity).filter((quantity) => quantity > ordered);
-  const reach = Math.max(need * 1.6, ordered * 1.6, Math.min(...next, ordered * 3), 10);
-  const size = 10 ** Math.floor(Math.log10(reach));
-  return Math.ceil((reach / size) * 5) * (size / 5);
+  return Math.max(need * 1.6, ordered * 1.6, Math.min(...next, ordered * 2), 10);
 }
 
 /** Quantities at which the chart has points: even steps, each break, and the last piece before it. */
 function quantitiesUpTo(terms: LadderTerms, end: number): number[] {
-  const first = Math.max(1, prepareLadder(terms, Number.POSITIVE_INFINITY, end).minimum);
   const step = Math.max(1, Math.floor(end / POINTS));
   const even = Array.from({ length: Math.floor(end / step) + 1 }, (_, place) => place * step);
-  const edges = terms.breaks.flatMap(({ quantity }) => [quantity - 1, quantity]);
-  return [...new Set([first, ...even, ...edges, end])]
-    .filter((quantity) => quantity >= first && quantity <= end)
+  const edges = terms.breaks.flatMap(({ quantity }) => [quantity - 1, quantity, quantity + 1]);
+  return [...new Set([1, ...even, ...edges, ...packEdges(terms, end), end])]
+    .filter((quantity) => quantity >= 1 && quantity <= end)
     .sort((a, b) => a - b);
 }
 
-/** What any number costs, from the least that may be ordered to `end`. */
+/** The ends of packs, where the cost steps up; none where the packs are too small to be seen. */
+function packEdges({ orderMultiple }: LadderTerms, end: number): number[] {
+  const packs = Math.floor(end / orderMultiple);
+  if (orderMultiple === 1 || packs > POINTS / 2) return [];
+  return Array.from({ length: packs }, (_, place) => (place + 1) * orderMultiple).flatMap((pack) => [
+    pack,
+    pack + 1,
+  ]);
+}
+
+/** What any number costs, from one piece to `end`. */
 export function curveRows(terms: LadderTerms, end: number): CurveRow[] {
   const rows = orderCurve(terms, quantitiesUpTo(terms, end)).map((point): CurveRow => {
     const [pays, listed] = [Number(point.pays), Number(point.listed)];

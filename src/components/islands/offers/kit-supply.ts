@@ -27,6 +27,8 @@ export interface KitSupply extends KitOffers {
   supplier: (id: string) => SupplierView | undefined;
   /** "Lumenhof"; a supplier that is gone is "nobody". */
   nameOf: (supplier: string) => string;
+  /** One unit of a currency in what the run is reckoned in; null: no rate. */
+  rateOf: (currency: string) => string | null;
   partHref: (part: string) => string;
   supplierHref: (supplier: string) => string;
 }
@@ -43,6 +45,10 @@ export function useKitSupply({ address, plan: first, offers: firstOffers }: KitS
     run: runOf(plan),
     supplier,
     nameOf: (id) => supplier(id)?.name ?? "nobody",
+    rateOf: (code) =>
+      code === plan.currency
+        ? "1"
+        : (plan.rates.find(({ currency }) => currency === code)?.perForeignUnit ?? null),
     partHref: (part) => kitPath(address, `/offers/${part}`),
     supplierHref: (id) => `/workshops/${address.workshop}/suppliers/${id}`,
   };

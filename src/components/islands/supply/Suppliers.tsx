@@ -45,7 +45,7 @@ export default function Suppliers(props: SuppliersProps) {
       >
         <Answer suppliers={suppliers} />
       </Question>
-      <div className={PAIRS}>
+      <div className="flex flex-col gap-11">
         {adding && (
           <Section title="A new supplier">
             <SupplierForm
@@ -71,9 +71,11 @@ export default function Suppliers(props: SuppliersProps) {
             />
           </Section>
         )}
-        <Pair note={<RateNote />}>
-          <Rates {...{ workshop, reporting, rates, used, today, canChange }} />
-        </Pair>
+        <div className={PAIRS}>
+          <Pair note={<RateNote />}>
+            <Rates {...{ workshop, reporting, rates, used, today, canChange }} />
+          </Pair>
+        </div>
       </div>
     </>
   );

@@ -61,6 +61,7 @@ const smallOrder: Column = {
   key: "smallOrder",
   head: "Below it",
   width: 116,
+  grows: true,
   fields: ["smallOrderTerm", "smallOrderFee"],
   text: ({ smallOrderTerm, smallOrderFee }) =>
     smallOrderTerm === "fee" ? (smallOrderFee ?? "") : smallOrderTerm === "refused" ? "refused" : "taken",
@@ -90,7 +91,6 @@ export function supplierColumns(base: string): Column[] {
       head: "Supplier",
       width: 190,
       held: true,
-      grows: true,
       fields: ["name"],
       text: ({ name }) => name,
       read: (entry) => ({ ok: true, change: { name: entry } }),
