@@ -1,14 +1,18 @@
 import { editions } from "#db/schema/kits.ts";
+import { POST as TAKE } from "#src/pages/api/workshops/[workshop]/kits/[kit]/imports/[import]/take.ts";
+import { POST as TAKE_BACK } from "#src/pages/api/workshops/[workshop]/kits/[kit]/imports/[import]/take-back.ts";
+import {
+  DELETE as DROP,
+  PATCH as EDIT,
+  GET as LOOK,
+} from "#src/pages/api/workshops/[workshop]/kits/[kit]/imports/[import].ts";
+import { GET as LIST, POST as UPLOAD } from "#src/pages/api/workshops/[workshop]/kits/[kit]/imports.ts";
 import type { PartsImportView } from "#src/server/parts-import.ts";
 import type { KitRow } from "#src/server/store/kit.ts";
 import { lineQuantitiesOf, linesOf } from "#src/server/store/line.ts";
 import type { WorkshopRow } from "#src/server/store/membership.ts";
 import { offersOf } from "#src/server/store/offer.ts";
 import { suppliersOf } from "#src/server/store/supplier.ts";
-import { GET as LIST, POST as UPLOAD } from "#src/pages/api/workshops/[workshop]/kits/[kit]/imports.ts";
-import { DELETE as DROP, GET as LOOK, PATCH as EDIT } from "#src/pages/api/workshops/[workshop]/kits/[kit]/imports/[import].ts";
-import { POST as TAKE } from "#src/pages/api/workshops/[workshop]/kits/[kit]/imports/[import]/take.ts";
-import { POST as TAKE_BACK } from "#src/pages/api/workshops/[workshop]/kits/[kit]/imports/[import]/take-back.ts";
 import type { DraftEdit } from "#src/shapes/import.ts";
 import type { App, TestPerson } from "./app.ts";
 import { call } from "./app.ts";
@@ -27,7 +31,10 @@ export function importKit(app: App) {
     weight: 1,
     boardsPerKit: 1,
   });
-  app.db.insert(editions).values([edition("full", 0), edition("bare", 1)]).run();
+  app.db
+    .insert(editions)
+    .values([edition("full", 0), edition("bare", 1)])
+    .run();
   return { workshop, as, kit, ...importCalls(app, as, workshop, kit) };
 }
 
@@ -50,6 +57,7 @@ export function importCalls(app: App, as: TestPerson, workshop: WorkshopRow, kit
   async function bringIn(content: string, name?: string) {
     const { id } = (await upload(content, name)).body;
     const view = (await look(id)).body;
+    app.pass(1000);
     return { id, view, ...(await take(id, view)) };
   }
   return {
@@ -65,7 +73,11 @@ export function importCalls(app: App, as: TestPerson, workshop: WorkshopRow, kit
       call(TAKE_BACK, { as, params: at(id), body: { version, evenSo } }),
     /** Everything a list may touch, for comparing before and after. Versions are left out: they only count up. */
     standing: () => ({
-      lines: linesOf(app.db, kit.id).map(({ line, part }) => ({ ...line, version: 0, part: { ...part, version: 0 } })),
+      lines: linesOf(app.db, kit.id).map(({ line, part }) => ({
+        ...line,
+        version: 0,
+        part: { ...part, version: 0 },
+      })),
       quantities: lineQuantitiesOf(app.db, kit.id).sort((a, b) =>
         (a.lineId + a.editionId).localeCompare(b.lineId + b.editionId),
       ),

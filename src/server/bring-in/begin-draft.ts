@@ -32,9 +32,9 @@ function tooLong(name: string, found: number, what: string, most: number): Probl
 }
 
 function shapeOf(kind: ImportKind, name: string, text: string): { rowCount: number; fingerprint: string } {
+  // Signs alone, such as the commas of empty cells, are no row.
+  if (!/[\p{L}\p{N}]/u.test(text)) throw new Problem("upload-empty", { parameters: { name } });
   const sheet = readCells(text);
-  const filled = sheet.records.filter(({ cells }) => cells.some((cell) => cell.trim() !== ""));
-  if (filled.length === 0) throw new Problem("upload-empty", { parameters: { name } });
   if (sheet.records.length > UPLOAD_ROWS) throw tooLong(name, sheet.records.length, "rows", UPLOAD_ROWS);
   if (sheet.columns > UPLOAD_COLUMNS) throw tooLong(name, sheet.columns, "columns", UPLOAD_COLUMNS);
   return { rowCount: sheet.records.length, fingerprint: guessFor(kind, sheet).fingerprint };
