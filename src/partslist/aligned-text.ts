@@ -1,25 +1,26 @@
 import type { Delimiter } from "./sheet.ts";
 
 const TAB_STOP = 8;
+/** Share of the lines that may write across a gap without hiding it: a title set over the table, a long cell. */
+const ACROSS = 0.04;
 
-interface Piece {
-  start: number;
-  end: number;
-  text: string;
-}
-
-/** Columns of a text set out with blanks or runs of tabs, found from where the pieces of its lines stand. */
+/**
+ * Columns of a text set out with blanks or runs of tabs, found from the places that stay empty from top to
+ * bottom. `null` where fewer than two columns show.
+ */
 export function alignedColumns(text: string): { delimiter: Delimiter; rows: string[][] } | null {
-  const lines = text.split(/\r?\n|\r/);
-  const tabbed = lines.some((line) => /\S\t+\S/.test(line));
-  const pieces = lines.map((line) => piecesOf(expandTabs(line), tabbed ? line : null));
-  const table = pieces.filter((line) => line.length > 1);
-  const filled = pieces.filter((line) => line.length > 0);
+  const raw = text.split(/\r?\n|\r/);
+  const tabbed = raw.filter((line) => /\S\t+\S/.test(line)).length;
+  const lines = raw.map((line) => expandTabs(line).trimEnd());
+  const filled = lines.filter((line) => line !== "");
+  const table = filled.filter((line) => /\S {2,}\S/.test(line) || (tabbed > 0 && /\S +\S/.test(line)));
   if (table.length < 3 || table.length < filled.length * 0.6) return null;
-  const delimiter = tabbed ? "tab-runs" : "fixed-width";
-  const columns = columnsOf(table);
-  if (columns.length < 2) return null;
-  return { delimiter, rows: pieces.map((line) => place(line, columns)) };
+  const starts = columnStarts(table);
+  if (starts.length < 2) return null;
+  return {
+    delimiter: tabbed > table.length * 0.5 ? "tab-runs" : "fixed-width",
+    rows: lines.map((line) => cut(line, starts)),
+  };
 }
 
 function expandTabs(line: string): string {
@@ -30,64 +31,60 @@ function expandTabs(line: string): string {
   return wide;
 }
 
-/** Pieces parted by two blanks or more; in a text with tabs, by tabs only, so that names keep their blanks. */
-function piecesOf(wide: string, tabbed: string | null): Piece[] {
-  if (tabbed?.includes("\t")) return tabPieces(tabbed);
-  return [...wide.matchAll(/\S+(?: \S+)*/g)].map((found) => ({
-    start: found.index,
-    end: found.index + found[0].length,
-    text: found[0],
-  }));
-}
-
-function tabPieces(line: string): Piece[] {
-  const found: Piece[] = [];
-  let at = 0;
-  for (const part of line.split(/(\t+)/)) {
-    if (part.startsWith("\t")) at += TAB_STOP - (at % TAB_STOP) + (part.length - 1) * TAB_STOP;
-    else {
-      if (part.trim() !== "") found.push({ start: at, end: at + part.length, text: part.trim() });
-      at += part.length;
-    }
-  }
-  return found;
-}
-
-/**
- * Where the columns begin: after each gap that at most a few lines write across, two places wide.
- * A heading or note set over the table does not hide a gap.
- */
-function columnsOf(table: readonly Piece[][]): number[] {
-  const width = Math.max(...table.map((line) => line.at(-1)?.end ?? 0));
+/** A column begins after a gap of two places, or of one where a word of the first line begins there too. */
+function columnStarts(table: readonly string[]): number[] {
+  const width = Math.max(...table.map((line) => line.length));
   const used = new Array<number>(width + 1).fill(0);
   for (const line of table)
-    for (const piece of line) for (let at = piece.start; at < piece.end; at++) used[at] = (used[at] ?? 0) + 1;
-  const across = Math.floor(table.length * 0.04);
+    for (let at = 0; at < line.length; at++) if (line[at] !== " ") used[at] = (used[at] ?? 0) + 1;
+  const across = Math.floor(table.length * ACROSS);
+  const heading = table[0] ?? "";
   const starts: number[] = [];
   let gap = 2;
   for (let at = 0; at <= width; at++) {
-    if ((used[at] ?? 0) <= across) gap++;
-    else {
-      if (gap >= 2) starts.push(at);
-      gap = 0;
+    if ((used[at] ?? 0) <= across) {
+      gap++;
+      continue;
     }
+    const headed = gap > 0 && /\S/.test(heading[at] ?? "") && (heading[at - 1] ?? " ") === " ";
+    if (gap >= 2 || headed) starts.push(at);
+    gap = 0;
   }
   return starts;
 }
 
-function place(line: readonly Piece[], columns: readonly number[]): string[] {
-  if (line.length === 0) return [""];
-  const cells: string[] = [];
-  for (const piece of line) {
-    let column = 0;
-    while (column + 1 < columns.length && (columns[column + 1] ?? 0) < piece.end) {
-      if ((columns[column + 1] ?? 0) > piece.start && piece.end - (columns[column + 1] ?? 0) < 1) break;
-      if ((columns[column + 1] ?? 0) > piece.start) break;
-      column++;
-    }
-    while (cells.length < column) cells.push("");
-    cells[column] = cells[column] ? `${cells[column]} ${piece.text}` : piece.text;
-  }
-  if (line.length > 1) while (cells.length < columns.length) cells.push("");
+/** Cuts a line at the columns. A text that runs across a column's beginning stays whole in the column where it starts. */
+function cut(line: string, starts: readonly number[]): string[] {
+  if (line.trim() === "") return [""];
+  const bounds = starts.filter((start, at) => at === 0 || !runsAcross(line, start));
+  const cells = starts.map(() => "");
+  bounds.forEach((start, at) => {
+    const from = at === 0 ? 0 : start;
+    cells[starts.indexOf(start)] = line.slice(from, bounds[at + 1] ?? line.length).trim();
+  });
+  return cells.filter((cell) => cell !== "").length === 1 && !/\S {2,}\S/.test(line)
+    ? whole(line, cells)
+    : partList(cells);
+}
+
+/** A cell longer than its column, or a list that goes on: "R11, R12". */
+function runsAcross(line: string, start: number): boolean {
+  if (start >= line.length) return false;
+  return (line[start - 1] ?? " ") !== " " || /[,;]$/.test(line.slice(Math.max(0, start - 2), start - 1));
+}
+
+/** Words behind a list of designators that ran into the next column belong there: "R11, R12 RESISTOR". */
+function partList(cells: string[]): string[] {
+  cells.forEach((cell, column) => {
+    const found = /^((?:[A-Za-z]{1,4}\d+[,;] ?)+[A-Za-z]{1,4}\d+) (\S.*)$/.exec(cell);
+    if (!found || cells[column + 1] !== "") return;
+    cells[column] = found[1] ?? "";
+    cells[column + 1] = found[2] ?? "";
+  });
   return cells;
+}
+
+/** A line of one text: in its column if it is short, else a title over the table. */
+function whole(line: string, cells: string[]): string[] {
+  return /^\S/.test(line) && (cells[0] ?? "") !== "" ? [line.trim()] : cells;
 }

@@ -132,6 +132,14 @@ function unwrapLines(text: string): string {
     .join("\n");
 }
 
+/** Tabs that set columns out stand in runs of different length; tabs that part cells stand alone. */
+function tabsAreRuns(sample: string): boolean {
+  const lines = sample.split("\n").filter((line) => /\S\t+\S/.test(line));
+  const runs = lines.filter((line) => /\S\t{2,}\S/.test(line)).length;
+  const counts = new Set(lines.map((line) => line.split("\t").length));
+  return runs > lines.length * 0.3 && counts.size > 1;
+}
+
 function chooseGrid(text: string): Grid {
   const declared = /^(?:\s*)"?sep=(.)"?\s*?(?:\r?\n|$)/i.exec(text)?.[1];
   for (const sign of Object.keys(SIGNS) as Sign[]) if (SIGNS[sign] === declared) return delimited(text, sign);
@@ -140,9 +148,10 @@ function chooseGrid(text: string): Grid {
   if (drawn) return { delimiter: "drawn-table", rows: drawn.rows, lines: drawn.lines };
   const best = bestSign(sample);
   if (best && best.width >= 3 && best.share >= 0.6) {
-    const tabs = best.sign === "tab" && best.share < 0.8 ? alignedColumns(text) : null;
-    if (!tabs) return delimited(text, best.sign);
+    const tabs = best.sign === "tab" && tabsAreRuns(sample) ? alignedColumns(text) : null;
+    return tabs ?? delimited(text, best.sign);
   }
+  if (best?.sign === "tab" && best.share >= 0.4 && !tabsAreRuns(sample)) return delimited(text, "tab");
   const aligned = alignedColumns(text);
   const alignedScore = aligned ? evenness(aligned.rows).score : 0;
   if (aligned && alignedScore > (best?.score ?? 0)) return aligned;

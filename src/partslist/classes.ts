@@ -170,7 +170,7 @@ const TEXTS: readonly (readonly [RegExp, PartClass])[] = [
     "integrated-circuit",
   ],
   [
-    /^(?:pcb|board|platine|leiterplatte|circuit board|printed circuit board|bare board|circuit imprimé|carte|placa|placa de circuito|circuito stampato|printplaat|płytka|deska plošných spojů|dps|kretskort|плата|基板|电路板)\b|\b(?:main|bare|circuit|printed) board\b|\bpcb\b(?! (?:mount|terminal|header|power|connector|screw|socket|jack|relay))/i,
+    /^(?:pcb|board|platine|leiterplatte|circuit board|printed circuit board|bare board|circuit imprimé|carte|placa|placa de circuito|circuito stampato|printplaat|płytka|deska plošných spojů|dps|kretskort|плата)\b|^(?:プリント)?基板|电路板|\b(?:main|bare|circuit|printed) board\b|\bpcb\b(?! (?:mount|terminal|header|power|connector|screw|socket|jack|relay))/i,
     "board",
   ],
 ];

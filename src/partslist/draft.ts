@@ -147,7 +147,7 @@ export type LineRow = RowPlace & { kind: "line"; line: DraftLine };
 export type SkippedRow = RowPlace & { kind: "skipped"; reason: SkipReason };
 /** A row with an open question; `line` or `reason` is what it becomes if the suggestions are taken. */
 export type QuestionRow = RowPlace & { kind: "question"; line: DraftLine | null; reason: SkipReason | null };
-/** A row whose line was joined with an equal one above. */
+/** A row whose line was joined with an equal one above, or that carries on the designators of the row above. */
 export type JoinedRow = RowPlace & { kind: "joined"; into: number };
 export type Row = LineRow | SkippedRow | QuestionRow | JoinedRow;
 

@@ -1,10 +1,10 @@
 /** A line of a frame: +-----+, |---|---|, ├──┼──┤, ===== =====. */
-const FRAME = /^[\s+\-=|:─━═│┃║┌┐└┘├┤┬┴┼╔╗╚╝╠╣╦╩╬╒╕╘╛╞╡╤╧╪╓╖╙╜╟╢╥╨╫]+$/;
+const FRAME = /^[\s+\-=_|:─━═│┃║┌┐└┘├┤┬┴┼╔╗╚╝╠╣╦╩╬╒╕╘╛╞╡╤╧╪╓╖╙╜╟╢╥╨╫]+$/;
 const EDGE = /^\s*[|│┃║]/;
 const PARTING = /[|│┃║]/;
 
 export function isFrameLine(line: string): boolean {
-  return FRAME.test(line) && /[-=─━═]{2}/.test(line);
+  return FRAME.test(line) && /[-=_─━═]{2}/.test(line);
 }
 
 /**

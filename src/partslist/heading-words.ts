@@ -150,6 +150,6 @@ export const HEADING_WORDS: Readonly<Record<Meaning, Words>> = {
   },
   "leave-out": {
     strong:
-      "x|y|device|rotation|rot|angle|side|layer|mid x|mid y|center x|center y|centre x|centre y|ref x|ref y|pad x|pad y|pos x|pos y|lib part|libpart|library|lib ref|libref|library ref|footprint lib|footprint library|footprintlib|symbol|optional|order qty|order quantity|qty to order|quantity to order|qty needed|total qty|total quantity|qty total|quantity ordered|bestellmenge|gesamtmenge|cantidad total|quantite totale|checked|ordered|order|color|colour|series|mounting type|mounting|technology|rohs|pins|pin count|pads|weight|revision|version",
+      "x|y|device|sheet|sheets|page|gate|rotation|rot|angle|side|layer|mid x|mid y|center x|center y|centre x|centre y|ref x|ref y|pad x|pad y|pos x|pos y|lib part|libpart|library|lib ref|libref|library ref|footprint lib|footprint library|footprintlib|symbol|optional|order qty|order quantity|qty to order|quantity to order|qty needed|total qty|total quantity|qty total|quantity ordered|bestellmenge|gesamtmenge|cantidad total|quantite totale|checked|ordered|order|color|colour|series|mounting type|mounting|technology|rohs|pins|pin count|pads|weight|revision|version",
   },
 };

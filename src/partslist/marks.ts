@@ -43,12 +43,11 @@ export function readPlace(text: string): boolean | null {
   return YES.test(plain) || NO.test(plain) ? true : null;
 }
 
-/** The text without the mark: "10k (DNP)" is "10k". */
+/** The text without the mark: "10k (DNP)" and "10k (non monté)" are "10k". */
 export function withoutMark(text: string): string {
   return text
-    .replace(
-      /\s*[([]\s*(?:DNP|DNF|DNI|DNM|NOPOP|not fitted|not populated|n\.\s?b\.|nicht bestückt)\s*[)\]]/gi,
-      "",
+    .replace(/\s*[([]\s*([^()[\]]{2,30}?)\s*[)\]]/g, (whole, inside: string) =>
+      saysNotFitted(inside) ? "" : whole,
     )
     .replace(/^(?:DNP|DNF|DNI|NOPOP)[\s_:/-]+(?=\S)/i, "")
     .replace(/[\s_:/,;-]+(?:DNP|DNF|DNI|NOPOP)$/i, "")

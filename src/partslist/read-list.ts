@@ -1,3 +1,4 @@
+import { joinContinuations } from "./continuation-rows.ts";
 import { askAboutTwoRows } from "./cross-questions.ts";
 import type { Answer, ExistingLine, Question, ReadResult, Row, RowCounts } from "./draft.ts";
 import { joinEqualLines, joinOffers } from "./join-lines.ts";
@@ -33,9 +34,10 @@ export interface ReadListInput {
 export function readList(input: ReadListInput): ReadResult {
   const columns = listColumns(input.mapping);
   const answers = indexAnswers(input.answers);
-  const shape = listShape(input.records, columns);
+  const { records, into } = joinContinuations(input.records, columns);
+  const shape = listShape(records, columns);
   const values: ReadValues = new Map();
-  const works = input.records.map((record) => startRow(record, shape, values, answers));
+  const works = records.map((record) => startRow(record, into.get(record.record), shape, values, answers));
   const context: QuestionContext = {
     answers,
     columns,
@@ -70,7 +72,14 @@ function keptBothTables(works: readonly RowWork[]): boolean {
   );
 }
 
-function startRow(record: SheetRecord, shape: ListShape, values: ReadValues, answers: Answers): RowWork {
+function startRow(
+  record: SheetRecord,
+  into: number | undefined,
+  shape: ListShape,
+  values: ReadValues,
+  answers: Answers,
+): RowWork {
+  if (into !== undefined) return { record, line: null, reason: null, read: null, questions: [], into };
   const kind = rowKind(record, shape);
   if (kind.kind === "skip") return { record, line: null, reason: kind.reason, read: null, questions: [] };
   const read = readLine(record.cells, shape.columns, values);
@@ -117,6 +126,7 @@ function rowOf(work: RowWork): Row {
     text: rowText(work.record),
     questions: work.questions,
   };
+  if (work.into !== undefined) return { ...place, kind: "joined", into: work.into };
   if (work.questions.some((question) => question.answer === null))
     return { ...place, kind: "question", line: work.line, reason: work.reason };
   if (work.line !== null) return { ...place, kind: "line", line: work.line };

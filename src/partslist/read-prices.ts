@@ -39,7 +39,8 @@ export function guessPriceColumns(records: readonly SheetRecord[], header?: numb
 interface PriceWork extends RowWork {
   kind: PriceRow["kind"];
   offer: PriceDraft | null;
-  into: PriceWork | null;
+  /** The row of the offer this row is a break of. */
+  breakOf: PriceWork | null;
   problems: PriceProblem[];
 }
 
@@ -82,7 +83,7 @@ function startRow(
     questions: [],
     kind: "offer",
     offer: draft,
-    into: null,
+    breakOf: null,
     problems,
   };
   const kind = rowKind(record, shape);
@@ -92,7 +93,8 @@ function startRow(
     (draft.breaks.length > 0 || problems.length > 0) &&
     above !== undefined &&
     above.kind !== "skipped";
-  const into = key === null ? (continues ? (above?.into ?? above ?? null) : null) : (open.get(key) ?? null);
+  const into =
+    key === null ? (continues ? (above?.breakOf ?? above ?? null) : null) : (open.get(key) ?? null);
   if (into?.offer && kind.kind !== "skip") return joinInto(work, into, into.offer);
   if (kind.kind === "skip" || key === null)
     return {
@@ -114,7 +116,7 @@ function joinInto(work: PriceWork, into: PriceWork, offer: PriceDraft): PriceWor
   offer.rows.push(work.record.row);
   offer.breaks.push(...(work.offer?.breaks ?? []));
   into.problems.push(...work.problems);
-  return { ...work, kind: "break", into };
+  return { ...work, kind: "break", breakOf: into };
 }
 
 /** Rows of one supplier with the same order code, else part number, else description, are one offer. */
@@ -287,7 +289,7 @@ function rowOf(work: PriceWork): PriceRow {
     .join(" · ")
     .slice(0, 200);
   const place = { row: work.record.row, record: work.record.record, text, questions: work.questions };
-  if (work.kind === "break") return { ...place, kind: "break", into: work.into?.record.row ?? 0 };
+  if (work.kind === "break") return { ...place, kind: "break", into: work.breakOf?.record.row ?? 0 };
   if (work.questions.some((question) => question.answer === null))
     return { ...place, kind: "question", offer: work.offer };
   if (work.offer !== null) return { ...place, kind: "offer", offer: sorted(work.offer) };

@@ -11,6 +11,8 @@ export interface RowWork {
   reason: SkipReason | null;
   read: ReadLine | null;
   questions: Question[];
+  /** The row whose designators this one carries on. */
+  into?: number;
 }
 
 export type Answers = ReadonlyMap<string, Answer>;

@@ -117,7 +117,9 @@ function mixed(buffer: Buffer): Text | null {
 }
 
 /** Tried after what the letter statistics propose; the first whose letters make sense is taken. */
-const ALSO_TRIED = ["windows-1251", "Shift_JIS", "GB18030", "windows-1250"];
+const ALSO_TRIED = ["windows-1251", "GB18030", "windows-1250"];
+/** Tried first: Japanese text passes for rare Chinese characters, but hardly any other text passes for Japanese. */
+const TRIED_FIRST = ["Shift_JIS"];
 
 const NAMES: Readonly<Record<string, string>> = {
   Shift_JIS: "Shift-JIS",
@@ -139,7 +141,7 @@ const DECODED_AS: Readonly<Record<string, string>> = {
 function eightBit(buffer: Buffer): Text {
   const sample = buffer.subarray(0, SAMPLE);
   const proposed = analyse(sample).map((guess) => guess.name as string);
-  for (const name of [...proposed, ...ALSO_TRIED]) {
+  for (const name of [...TRIED_FIRST, ...proposed, ...ALSO_TRIED]) {
     const codec = DECODED_AS[name] ?? name;
     if (!iconv.encodingExists(codec) || !plausible(iconv.decode(sample, codec), name)) continue;
     return { text: iconv.decode(buffer, codec), encoding: NAMES[name] ?? name };
@@ -150,6 +152,8 @@ function eightBit(buffer: Buffer): Text {
 const WIDE_LETTERS = "[\\p{Script=Hiragana}\\u30a0-\\u30ff\\p{Script=Han}\\p{Script=Hangul}]";
 const WIDE_RUN = new RegExp(`${WIDE_LETTERS}{2,}`, "gu");
 const WIDE_SIGNS = new RegExp(`${WIDE_LETTERS}|[Ωμ℃±×　-〿％－～（）：，．]`, "gu");
+/** Signs that stand inside words only where letters of another code page are taken for Western ones. */
+const ODD_IN_WORDS = /\p{L}[¹³¿¯Ÿ]|[¹³¿]\p{L}|œ[^a-z\s]/gu;
 const EAST_EUROPEAN = /[ąęłśźżćńčěřšůžďťňőűáéíóúýöüä]/gi;
 
 /** Whether the letters beyond ASCII make sense in the alphabet of an encoding. */
@@ -169,6 +173,7 @@ function plausible(text: string, name: string): boolean {
   return (
     /1252|8859-1$/.test(name) &&
     count(text, /[À-ÿ]{3,}/g) === 0 &&
+    count(text, ODD_IN_WORDS) === 0 &&
     count(text, /[¡¢¤¦§¨ª¬¯¸¹¾]/g) <= beyond * 0.3
   );
 }
