@@ -151,7 +151,7 @@ function eightBit(buffer: Buffer): Text {
 
 const WIDE_LETTERS = "[\\p{Script=Hiragana}\\u30a0-\\u30ff\\p{Script=Han}\\p{Script=Hangul}]";
 const WIDE_RUN = new RegExp(`${WIDE_LETTERS}{2,}`, "gu");
-const WIDE_SIGNS = new RegExp(`${WIDE_LETTERS}|[Ωμ℃±×　-〿％－～（）：，．]`, "gu");
+const WIDE_SIGNS = new RegExp(`${WIDE_LETTERS}|[Ωμ℃±×　-〿\uff01-\uff5e]`, "gu");
 /** Signs that stand inside words only where letters of another code page are taken for Western ones. */
 const ODD_IN_WORDS = /\p{L}[¹³¿¯Ÿ]|[¹³¿]\p{L}|œ[^a-z\s]/gu;
 const EAST_EUROPEAN = /[ąęłśźżćńčěřšůžďťňőűáéíóúýöüä]/gi;
