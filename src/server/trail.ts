@@ -71,6 +71,13 @@ function stateOf(stop: StopKey, { plan, result, lines, linesToSettle }: KitState
   return settled(countAt(stop, result.problems) + (stop === "parts" ? linesToSettle : 0));
 }
 
+/** What waits for a person, in the order of the stops; nothing for a kit that is not begun. */
+export function waitingProblems({ result, lines }: KitState): Problem[] {
+  if (lines === 0) return [];
+  const order: readonly StopKey[] = ["parts", "offers", "boards", "run"];
+  return order.flatMap((stop) => result.problems.filter((problem) => stopOf(problem) === stop));
+}
+
 const NAMES: Record<StopKey, string> = { parts: "Parts", offers: "Offers", boards: "Boards", run: "Run" };
 
 /** The stops of the job so far, in order, each with its state; a role without money has only the parts. */

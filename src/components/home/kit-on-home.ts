@@ -1,0 +1,104 @@
+import type { BoardPicture } from "#src/components/board-picture.ts";
+import type { KitLabelProps } from "#src/components/islands/parts/KitLabel.tsx";
+import { count, money } from "#src/components/written.ts";
+import type { Figure } from "#src/costing/figure.ts";
+import type { Problem } from "#src/costing/problem.ts";
+import { needWords } from "#src/costing/problem-words.ts";
+import type { Tally } from "#src/costing/tally.ts";
+import type { HomeKit } from "#src/server/home.ts";
+import type { KitRow } from "#src/server/store/kit.ts";
+
+/** What the home page says of a kit: chip, next step, four figures. */
+
+type Step = KitLabelProps["step"];
+
+function openCount({ stops }: HomeKit): number {
+  return stops.reduce((sum, { state }) => sum + (state.kind === "to-settle" ? state.count : 0), 0);
+}
+
+/** How a kit stands, in a word. */
+export function kitChip(home: HomeKit): KitLabelProps["chip"] {
+  if (home.empty) return { kind: "waiting", words: "Just begun" };
+  const open = openCount(home);
+  if (open > 0) return { kind: "caution", words: `${open} to settle` };
+  const ahead = home.stops.find(({ state }) => state.kind === "not-started");
+  return ahead ? { kind: "waiting", words: `${ahead.name} to come` } : { kind: "good", words: "All settled" };
+}
+
+const SETTLE = {
+  parts: "Settle the parts list",
+  offers: "Settle the offers",
+  boards: "Settle the boards",
+  run: "Settle the run",
+};
+const BEGIN = {
+  parts: "Bring in a parts list",
+  offers: "Add the first offer",
+  boards: "Add a board quote",
+  run: "Plan the run",
+};
+
+/** The one next step of a kit, with the page on which it is taken. */
+export function nextStep({ stops, empty, money: seesMoney }: HomeKit, base: string): Step {
+  if (empty) return { label: BEGIN.parts, href: `${base}/parts` };
+  if (!seesMoney) return { label: "See the parts list", href: `${base}/parts` };
+  const open = stops.find(({ state }) => state.kind === "to-settle");
+  if (open) return { label: SETTLE[open.key], href: `${base}/${open.key}` };
+  const ahead = stops.find(({ state }) => state.kind === "not-started");
+  return ahead
+    ? { label: BEGIN[ahead.key], href: `${base}/${ahead.key}` }
+    : { label: "See the run", href: `${base}/run` };
+}
+
+function written(figure: Figure, currency: string): string {
+  return figure.known ? money(figure.value, currency) : needWords(figure.needs);
+}
+
+/** Four figures as written; what is not known says what it needs. */
+export function kitFigures(tally: Tally, empty: boolean): KitLabelProps["figures"] {
+  const { currency, costPerKit, price, evenAfter, earnsPerKit } = tally;
+  if (empty)
+    return [
+      { label: "Cost per kit", value: "needs parts" },
+      { label: "Price", value: price.known ? money(price.value, currency) : "not set" },
+      { label: "Even after", value: "needs parts" },
+      { label: "Earns per kit", value: "needs parts" },
+    ];
+  return [
+    { label: "Cost per kit", value: written(costPerKit, currency) },
+    { label: "Price", value: price.known ? money(price.value, currency) : "not set" },
+    {
+      label: "Even after",
+      value: evenAfter.known ? `${count(evenAfter.value)} sold` : needWords(evenAfter.needs),
+    },
+    { label: "Earns per kit", value: written(earnsPerKit, currency) },
+  ];
+}
+
+/** The kit with the least left to settle among those that are begun: the one to name in the answer. */
+export function nearest(kits: readonly HomeKit[]): { home: HomeKit; open: number } | undefined {
+  const begun = kits.filter((home) => !home.empty && home.money !== null);
+  const ranked = begun
+    .map((home) => ({ home, open: openCount(home) }))
+    .filter(({ open }) => open > 0)
+    .sort((a, b) => a.open - b.open);
+  return ranked[0];
+}
+
+/** The board to scale; null while it is not drawn, or the kit has none. A round one needs its diameter only. */
+export function boardPicture({
+  boardNeeded,
+  boardShape,
+  boardWidth,
+  boardHeight,
+}: KitRow): BoardPicture | null {
+  const height = boardShape === "round" ? boardWidth : boardHeight;
+  if (!boardNeeded || boardWidth === null || height === null) return null;
+  return { shape: boardShape, widthMm: Number(boardWidth), heightMm: Number(height) };
+}
+
+/** The page on which a problem is settled. */
+export function problemHref(base: string, { at }: Problem): string {
+  if (at.part) return `${base}/offers/${at.part}`;
+  return at.quote ? `${base}/boards` : `${base}/run#inputs`;
+}
