@@ -1,4 +1,4 @@
-import { and, asc, eq, gt, isNull } from "drizzle-orm";
+import { and, asc, eq, gt, isNull, lte } from "drizzle-orm";
 import type { Db } from "#db/client.ts";
 import { invitations } from "#db/schema/guests.ts";
 import { kits } from "#db/schema/kits.ts";
@@ -87,4 +87,9 @@ export function takeInvitation(db: Db, id: string, now: number): boolean {
     .where(and(eq(invitations.id, id), isNull(invitations.acceptedAt)))
     .run();
   return taken.changes === 1;
+}
+
+/** Forgets invitations, taken or not, whose time ran out before a moment. */
+export function dropInvitationsBefore(db: Db, expiredBefore: number): void {
+  db.delete(invitations).where(lte(invitations.expiresAt, expiredBefore)).run();
 }
