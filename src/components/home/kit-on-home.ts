@@ -3,7 +3,6 @@ import type { KitLabelProps } from "#src/components/islands/parts/KitLabel.tsx";
 import { count, money } from "#src/components/written.ts";
 import type { Figure } from "#src/costing/figure.ts";
 import type { Problem } from "#src/costing/problem.ts";
-import { needWords } from "#src/costing/problem-words.ts";
 import type { Tally } from "#src/costing/tally.ts";
 import type { HomeKit } from "#src/server/home.ts";
 import type { KitRow } from "#src/server/store/kit.ts";
@@ -51,10 +50,10 @@ export function nextStep({ stops, empty, money: seesMoney }: HomeKit, base: stri
 }
 
 function written(figure: Figure, currency: string): string {
-  return figure.known ? money(figure.value, currency) : needWords(figure.needs);
+  return figure.known ? money(figure.value, currency) : "not known";
 }
 
-/** Four figures as written; what is not known says what it needs. */
+/** Four figures as written; what a figure needs stands beside the labels, under "Waiting for you". */
 export function kitFigures(tally: Tally, empty: boolean): KitLabelProps["figures"] {
   const { currency, costPerKit, price, evenAfter, earnsPerKit } = tally;
   if (empty)
@@ -69,7 +68,7 @@ export function kitFigures(tally: Tally, empty: boolean): KitLabelProps["figures
     { label: "Price", value: price.known ? money(price.value, currency) : "not set" },
     {
       label: "Even after",
-      value: evenAfter.known ? `${count(evenAfter.value)} sold` : needWords(evenAfter.needs),
+      value: evenAfter.known ? `${count(evenAfter.value)} sold` : "not known",
     },
     { label: "Earns per kit", value: written(earnsPerKit, currency) },
   ];
