@@ -1,10 +1,5 @@
 import type { z } from "zod";
-import {
-  type BoardChoiceChange,
-  BoardQuote,
-  type BoardQuoteChange,
-  type BoardQuoteFields,
-} from "#src/shapes/board-quote.ts";
+import { BoardQuote, type BoardQuoteChange, type BoardQuoteFields } from "#src/shapes/board-quote.ts";
 import { BOARD_QUOTES_MOST } from "#src/shapes/limits.ts";
 import { beforeAndAfter } from "./before-and-after.ts";
 import { checked } from "./checked.ts";
@@ -103,24 +98,5 @@ export function removeQuote(given: Changing, quoteId: string, version: number): 
     const run = runPlanOf(db, kit.id);
     if (run.chosenQuoteId === quoteId) changeRunPlan(db, kit.id, run.version, { chosenQuoteId: null });
     noteChange(given, { action: "quote.remove", subjectId: quoteId, subjectName: before.boardHouse });
-  });
-}
-
-/** Chooses a quote, or the cheapest at the run, and says what share of the boards is good. */
-export function changeChoice(
-  given: Changing,
-  { version, ...change }: z.infer<typeof BoardChoiceChange>,
-): BoardChoiceView {
-  const { db, kit } = given;
-  return inTransaction(db, () => {
-    const { chosenQuoteId } = change;
-    if (chosenQuoteId && !boardQuoteOf(db, kit.id, chosenQuoteId))
-      throw wrongField("chosenQuoteId", "This kit has no such quote.");
-    const before = choiceOf(runPlanOf(db, kit.id));
-    const after = changeRunPlan(db, kit.id, version, change);
-    if (!after) throw clash(given, kit.id, before);
-    const detail = beforeAndAfter(before, change);
-    noteChange(given, { action: "boards.change", subjectId: kit.id, subjectName: kit.name, detail });
-    return choiceOf(after);
   });
 }

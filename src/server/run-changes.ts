@@ -1,5 +1,6 @@
 import { type Changing as ChangingSomewhere, clash, noteChange } from "./note-change.ts";
-import { Problem } from "./problem.ts";
+import { Problem, wrongField } from "./problem.ts";
+import { boardQuoteOf } from "./store/board-quote.ts";
 import { changeEdition, type EditionRow, editionOf } from "./store/edition.ts";
 import type { KitRow } from "./store/kit.ts";
 import type { WorkshopRow } from "./store/membership.ts";
@@ -27,6 +28,8 @@ export function setRunPlan(
 ): Changed {
   const { db, kit } = given;
   return inTransaction(db, () => {
+    if (fields.chosenQuoteId && !boardQuoteOf(db, kit.id, fields.chosenQuoteId))
+      throw wrongField("chosenQuoteId", "This kit has no such quote.");
     const before = runPlanOf(db, kit.id);
     const after = changeRunPlan(db, kit.id, version, fields);
     if (!after) throw clash(given, kit.id, before);

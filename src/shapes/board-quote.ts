@@ -1,7 +1,7 @@
 import { z } from "zod";
 import { checkMinorUnit, ListedCurrency } from "./currency.ts";
-import { Amount, Day, RateBelowOne, Share } from "./decimal-text.ts";
-import { LeadTimeDays, Name, Note, RowId, ShortText, Version } from "./field.ts";
+import { Amount, Day } from "./decimal-text.ts";
+import { LeadTimeDays, Name, Note, ShortText, Version } from "./field.ts";
 import { checkDays, checkRungs, Ladder } from "./ladder.ts";
 import * as limits from "./limits.ts";
 
@@ -38,14 +38,3 @@ export const BoardQuote = BoardQuoteFields.superRefine(checkMinorUnit<BoardQuote
 
 export const NewBoardQuote = BoardQuoteFields;
 export const BoardQuoteChange = BoardQuoteFields.partial().extend({ version: Version });
-
-/** How a kit orders its boards. `chosenQuoteId: null` is the cheapest at the run. */
-export const BoardChoiceChange = z.strictObject({
-  version: Version,
-  chosenQuoteId: RowId.nullable().optional(),
-  boardYield: Share.refine(
-    (share) => /[1-9]/.test(share),
-    "With a yield of 0 % no board is ever good.",
-  ).optional(),
-  boardConfidence: RateBelowOne.optional(),
-});
