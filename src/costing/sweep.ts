@@ -6,7 +6,7 @@ import type { PreparedPlan } from "./prepared-plan.ts";
 import type { Need } from "./problem.ts";
 import { reckonRun } from "./reckon-run.ts";
 import { joinNeeds, needsOf } from "./run-needs.ts";
-import { createSheet, KEPT_NEEDS, MISSING, SPENT_NEEDS, USED_NEEDS } from "./run-sheet.ts";
+import { createSheet, KEPT_NEEDS, MISSING, type RunSheet, SPENT_NEEDS, USED_NEEDS } from "./run-sheet.ts";
 import { soldToPayFor } from "./sold-to-pay.ts";
 import { changesBetween } from "./step-changes.ts";
 import type { Change, StepDown, SweepColumns, SweepResult, SweetSpot } from "./sweep-result.ts";
@@ -92,10 +92,27 @@ function reckonAll(prepared: PreparedPlan, to: number, beyond: number): { swept:
       const fell = fellByStep(swept.used[kits - 1] as bigint, money.used, kits);
       swept.steps.push(fell ? changesBetween(prepared, before, sheet, false) : []);
     }
-    if (missing !== 0 && kits <= to)
+    if (missing !== 0 && kits <= to && !sameGaps(before, sheet)) {
       needs = joinNeeds(needs, needsOf(prepared, sheet, USED_NEEDS | KEPT_NEEDS));
+    }
   }
   return { swept, needs };
+}
+
+/** Whether two runs lack the same things, so that what one needs need not be listed again for the other. */
+function sameGaps(before: RunSheet, after: RunSheet): boolean {
+  const sameSigns = (a: ArrayLike<number>, b: ArrayLike<number>) => {
+    for (let index = 0; index < b.length; index += 1) if ((a[index] === 0) !== (b[index] === 0)) return false;
+    return a.length === b.length;
+  };
+  const sameStates = before.state.every((state, index) => state === after.state[index]);
+  const samePlaces = sameSigns(before.orders, after.orders) && sameSigns(before.kitsOf, after.kitsOf);
+  return (
+    before.missing === after.missing &&
+    sameStates &&
+    samePlaces &&
+    before.boards?.quote === after.boards?.quote
+  );
 }
 
 /** Everything that changes between a run of `kits` − 1 and one of `kits`. */

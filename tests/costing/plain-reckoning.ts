@@ -7,8 +7,19 @@ import type { Plan, PlanBoardQuote, PlanOffer, PlanPart, PlanSupplier } from "#s
  * compare the core with it. It knows the price models by trying every quantity up to the last
  * break, offers without stock limits, and suppliers that do not refuse small orders.
  */
-const D = Decimal.clone({ precision: 80, rounding: Decimal.ROUND_HALF_UP });
+const D = Decimal.clone({ precision: 60, rounding: Decimal.ROUND_HALF_UP });
 type D = Decimal;
+
+/** Each text is read once, as anybody would who cares a little for speed. */
+const read = new Map<string, D>();
+function dec(text: string | number): D {
+  if (typeof text === "number") return new D(text);
+  const known = read.get(text);
+  if (known !== undefined) return known;
+  const value = new D(text);
+  read.set(text, value);
+  return value;
+}
 
 /** Minor units' decimals of the currencies these plans use (ISO 4217). */
 const DECIMALS: Record<string, number> = { EUR: 2, USD: 2, GBP: 2, JPY: 0, KWD: 3 };
@@ -32,7 +43,7 @@ function rounded(value: D, currency: string): D {
 
 export function rateOf(plan: Plan, currency: string): D {
   if (currency === plan.currency) return new D(1);
-  return new D(plan.rates.find((rate) => rate.currency === currency)?.perForeignUnit ?? Number.NaN);
+  return dec(plan.rates.find((rate) => rate.currency === currency)?.perForeignUnit ?? Number.NaN);
 }
 
 /** Largest remainder: whole quotas first, then one each by what is left of the division, the earlier first. */
@@ -53,20 +64,28 @@ export interface PlainOrder {
   cost: D;
 }
 
-/** Every sensible quantity tried: from the need to the first permitted one past the last break. */
+const ladders = new WeakMap<object, PlanOffer["breaks"]>();
+function ascending(breaks: PlanOffer["breaks"]): PlanOffer["breaks"] {
+  const known = ladders.get(breaks);
+  if (known !== undefined) return known;
+  const sorted = breaks.toSorted((a, b) => a.quantity - b.quantity);
+  ladders.set(breaks, sorted);
+  return sorted;
+}
+
+/** Every sensible quantity tried: the least permitted, and the first permitted at every break above it. */
 export function plainOrder(
   offer: Pick<PlanOffer, "breaks" | "minimumOrder" | "orderMultiple" | "currency">,
   need: number,
 ): PlainOrder {
-  const breaks = offer.breaks.toSorted((a, b) => a.quantity - b.quantity);
-  const multiple = offer.orderMultiple;
+  const breaks = ascending(offer.breaks);
   const least = Math.max(need, offer.minimumOrder, breaks[0]?.quantity ?? 1);
-  const candidates = [least, ...breaks.map((step) => step.quantity).filter((quantity) => quantity > least)];
   let best: PlainOrder | null = null;
-  for (const candidate of candidates) {
-    const quantity = Math.ceil(candidate / multiple) * multiple;
-    const price = breaks.filter((step) => step.quantity <= quantity).at(-1)?.price ?? "NaN";
-    const cost = rounded(new D(price).times(quantity), offer.currency);
+  for (let step = -1; step < breaks.length; step += 1) {
+    const from = step < 0 ? least : (breaks[step]?.quantity ?? 0);
+    if (step >= 0 && from <= least) continue;
+    const quantity = Math.ceil(from / offer.orderMultiple) * offer.orderMultiple;
+    const cost = rounded(dec(priceAt(breaks, quantity)).times(quantity), offer.currency);
     if (best === null || cost.lt(best.cost) || (cost.eq(best.cost) && quantity < best.quantity)) {
       best = { quantity, cost };
     }
@@ -74,10 +93,16 @@ export function plainOrder(
   return best as PlainOrder;
 }
 
+function priceAt(breaks: PlanOffer["breaks"], quantity: number): string {
+  let reached = 0;
+  while ((breaks[reached + 1]?.quantity ?? Number.POSITIVE_INFINITY) <= quantity) reached += 1;
+  return breaks[reached]?.price ?? "NaN";
+}
+
 function freightOf(supplier: PlanSupplier, goods: D): D {
   if (supplier.freeFreightFrom !== null && goods.gte(supplier.freeFreightFrom)) return new D(0);
   return supplier.freight.model === "flat"
-    ? rounded(new D(supplier.freight.amount), supplier.currency)
+    ? rounded(dec(supplier.freight.amount), supplier.currency)
     : new D(0);
 }
 
@@ -138,7 +163,7 @@ function boardOrder(quote: PlanBoardQuote, need: number): PlainOrder {
       const before = best[Math.max(0, pieces - lot.quantity)] as PlainOrder;
       const order = {
         quantity: before.quantity + lot.quantity,
-        cost: before.cost.plus(rounded(new D(lot.price), quote.currency)),
+        cost: before.cost.plus(rounded(dec(lot.price), quote.currency)),
       };
       const held = best[pieces];
       if (
@@ -185,19 +210,16 @@ export function plainRun(plan: Plan, kits: number, boardsFor = plainBoards): Pla
   for (const part of plan.parts) {
     const need = part.quantities.reduce((sum, { edition, perKit }) => sum + kitsIn([edition]) * perKit, 0);
     const spare =
-      need === 0 ? 0 : Math.max(part.leastSpare, new D(part.spareRate).times(need).ceil().toNumber());
+      need === 0 ? 0 : Math.max(part.leastSpare, dec(part.spareRate).times(need).ceil().toNumber());
     const fromStock = Math.min(part.freeStock.quantity, need + spare);
     const toBuy = need + spare - fromStock;
-    stock = stock.plus(new D(part.freeStock.bookCost ?? 0).times(fromStock));
+    stock = stock.plus(dec(part.freeStock.bookCost ?? 0).times(fromStock));
     if (toBuy === 0) continue;
     const { offer, supplier, order } = choose(plan, part, toBuy);
     goods.set(supplier, (goods.get(supplier) ?? new D(0)).plus(order.cost));
-    const price =
-      offer.breaks
-        .toSorted((a, b) => a.quantity - b.quantity)
-        .filter((step) => step.quantity <= order.quantity)
-        .at(-1)?.price ?? 0;
-    const value = new D(price).times(order.quantity - toBuy).times(rateOf(plan, offer.currency));
+    const value = dec(priceAt(ascending(offer.breaks), order.quantity))
+      .times(order.quantity - toBuy)
+      .times(rateOf(plan, offer.currency));
     left = left.plus(value);
     kept = kept.plus(value.times(part.keepShare));
   }
@@ -205,9 +227,9 @@ export function plainRun(plan: Plan, kits: number, boardsFor = plainBoards): Pla
     const small = supplier.minimumOrderValue !== null && sum.lt(supplier.minimumOrderValue);
     const fee =
       small && supplier.belowMinimum.term === "fee"
-        ? rounded(new D(supplier.belowMinimum.fee), supplier.currency)
+        ? rounded(dec(supplier.belowMinimum.fee), supplier.currency)
         : new D(0);
-    const handling = rounded(new D(supplier.handlingFee), supplier.currency);
+    const handling = rounded(dec(supplier.handlingFee), supplier.currency);
     spent = spent.plus(
       sum.plus(fee).plus(handling).plus(freightOf(supplier, sum)).times(rateOf(plan, supplier.currency)),
     );
@@ -220,29 +242,34 @@ export function plainRun(plan: Plan, kits: number, boardsFor = plainBoards): Pla
     const toOrder = boardsFor(boards, plan.boards.yield, plan.boards.confidence);
     const landed = plan.boards.quotes.map((quote) =>
       boardOrder(quote, toOrder)
-        .cost.plus(rounded(new D(quote.engineeringCharge), quote.currency))
-        .plus(rounded(new D(quote.stencilCharge), quote.currency))
-        .plus(rounded(new D(quote.freight ?? 0), quote.currency))
+        .cost.plus(rounded(dec(quote.engineeringCharge), quote.currency))
+        .plus(rounded(dec(quote.stencilCharge), quote.currency))
+        .plus(rounded(dec(quote.freight ?? 0), quote.currency))
         .times(rateOf(plan, quote.currency)),
     );
     spent = spent.plus(D.min(...landed));
     parcels += 1;
   }
-  for (const item of plan.packing)
-    spent = spent.plus(new D(item.costPerKit ?? 0).times(kitsIn(item.editions)));
+  for (const item of plan.packing) spent = spent.plus(dec(item.costPerKit ?? 0).times(kitsIn(item.editions)));
   for (const task of plan.work.tasks) {
     const made = kitsIn(task.editions);
     let sum = new D(0);
     for (let kit = 1; kit <= made; kit += 1)
       sum = sum.plus(factor(plan.work.learningSlope, plan.work.kitsMadeBefore + kit));
-    const minutes = new D(task.minutesPerKit).times(sum).plus(made > 0 ? task.setUpMinutes : 0);
+    const minutes = dec(task.minutesPerKit)
+      .times(sum)
+      .plus(made > 0 ? task.setUpMinutes : 0);
     spent = spent.plus(quotient(minutes.times(plan.work.ratePerHour ?? 0).div(60)));
   }
   for (const charge of plan.charges) {
     const share = charge.spreadOver === null ? new D(1) : D.min(1, new D(kits).div(charge.spreadOver));
-    spent = spent.plus(quotient(new D(charge.amount).times(share)));
+    spent = spent.plus(quotient(dec(charge.amount).times(share)));
   }
-  spent = spent.plus(new D(plan.replacements.share).times(kits).times(plan.replacements.costEach ?? 0));
+  spent = spent.plus(
+    dec(plan.replacements.share)
+      .times(kits)
+      .times(plan.replacements.costEach ?? 0),
+  );
   return {
     spent: spent.toFixed(),
     used: spent.minus(kept).plus(stock).toFixed(),
@@ -258,8 +285,8 @@ export function plainRun(plan: Plan, kits: number, boardsFor = plainBoards): Pla
 }
 
 function keptPerSale({ sale, currency }: Plan, price: string): D {
-  const charged = new D(price).plus(sale.postageCharged ?? 0);
-  const rate = new D(sale.taxRate ?? 0);
+  const charged = dec(price).plus(sale.postageCharged ?? 0);
+  const rate = dec(sale.taxRate ?? 0);
   const tax = rounded(charged.times(rate).div(rate.plus(1)), currency);
   const fee = rounded(charged.times(sale.feeRate ?? 0).plus(sale.feeFixed ?? 0), currency);
   return charged
