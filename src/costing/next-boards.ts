@@ -1,4 +1,4 @@
-import type { Plan, PlanBoardQuote } from "#src/shapes/plan.ts";
+import type { PlanBoardQuote } from "#src/shapes/plan.ts";
 import { exact } from "./decimal.ts";
 import { cheapestOrder, prepareLadder } from "./ladder.ts";
 import { minorText, toMinor } from "./money.ts";
@@ -57,9 +57,4 @@ function stepUp({ priceModel, breaks }: PlanBoardQuote, at: number): number {
   if (priceModel === "lots") return at + 1;
   const higher = breaks.map(({ quantity }) => quantity).filter((quantity) => quantity > at);
   return higher.length > 0 ? Math.min(...higher) : at + Math.max(1, Math.ceil(at / 10));
-}
-
-/** The quote of a plan with this id. */
-export function quoteIn(plan: Plan, id: string | null): PlanBoardQuote | undefined {
-  return plan.boards.quotes.find((quote) => quote.id === id);
 }
