@@ -1,4 +1,5 @@
 import { count, money } from "#src/components/written.ts";
+import type { Figure } from "#src/costing/figure.ts";
 import { needWords } from "#src/costing/problem-words.ts";
 import type { RunResult } from "#src/costing/run-result.ts";
 
@@ -6,6 +7,30 @@ import type { RunResult } from "#src/costing/run-result.ts";
 export interface AnswerPiece {
   text: string;
   bold?: boolean;
+}
+
+/** The figures of a run that its answer is made of. */
+export interface AnswerFigures {
+  kits: number;
+  currency: string;
+  costPerKit: Figure;
+  bringsPerKit: Figure;
+  earnsPerKit: Figure;
+  evenAfter: Figure;
+  spent: Figure;
+}
+
+/** The figures of the answer from a run. */
+export function answerFigures(run: RunResult): AnswerFigures {
+  return {
+    kits: run.kits,
+    currency: run.currency,
+    costPerKit: run.perKit.used,
+    bringsPerKit: run.keptPerKit,
+    earnsPerKit: run.earnsPerKit,
+    evenAfter: run.evenAfter,
+    spent: run.spent,
+  };
 }
 
 const bold = (text: string): AnswerPiece => ({ text, bold: true });
@@ -19,20 +44,20 @@ function positive(amount: string): string {
  * The answer of the run page from the figures of the run, pieces to be set one after the other: what a kit
  * costs, brings in and earns, when the run is paid for, and what it needs in cash.
  */
-export function runAnswer(run: RunResult): AnswerPiece[] {
-  const { kits, perKit, keptPerKit, earnsPerKit, evenAfter, spent, currency } = run;
+export function runAnswer(figures: AnswerFigures): AnswerPiece[] {
+  const { kits, costPerKit, bringsPerKit, earnsPerKit, evenAfter, spent, currency } = figures;
   const write = (amount: string) => money(amount, currency);
-  if (!perKit.used.known)
-    return [bold(`${kits} cannot be worked out yet.`), plain(` The cost ${needWords(perKit.used.needs)}.`)];
-  const cost = `One kit costs ${write(perKit.used.value)}`;
-  if (!keptPerKit.known || !earnsPerKit.known)
+  if (!costPerKit.known)
+    return [bold(`${kits} cannot be worked out yet.`), plain(` The cost ${needWords(costPerKit.needs)}.`)];
+  const cost = `One kit costs ${write(costPerKit.value)}`;
+  if (!bringsPerKit.known || !earnsPerKit.known)
     return [
       bold(
         `${kits} ${kits === 1 ? "kit costs" : "kits cost"} ${spent.known ? write(spent.value) : "more than is known"}.`,
       ),
-      plain(` ${cost}. What it brings in ${needWords(keptPerKit.known ? [] : keptPerKit.needs)}.`),
+      plain(` ${cost}. What it brings in ${needWords(bringsPerKit.known ? [] : bringsPerKit.needs)}.`),
     ];
-  const brings = `${cost} and brings in ${write(keptPerKit.value)}`;
+  const brings = `${cost} and brings in ${write(bringsPerKit.value)}`;
   const earns = earnsPerKit.value;
   if (earns.startsWith("-"))
     return [

@@ -1,0 +1,103 @@
+import { lazy, Suspense } from "react";
+import { PAIRS } from "#src/components/page-look.ts";
+import type { KitPlan } from "#src/server/kit-plan.ts";
+import { CallFailed } from "./call.ts";
+import type { KitAddress } from "./kit-address.ts";
+import { Button } from "./parts/Button.tsx";
+import { ErrorBox } from "./parts/ErrorBox.tsx";
+import { Loading } from "./parts/Loading.tsx";
+import { useOpens } from "./plan/open-working.ts";
+import { runOf } from "./plan/run-of.ts";
+import { usePlan } from "./plan/use-plan.ts";
+import { useSweep } from "./plan/use-sweep.ts";
+import type { AnswerFigures } from "./run/answer-words.ts";
+import { CannotBeKnown } from "./run/CannotBeKnown.tsx";
+import { drawnColumns } from "./run/cost-points.ts";
+import { take } from "./run/inputs/entry.ts";
+import { Inputs } from "./run/inputs/Inputs.tsx";
+import { PlanFile } from "./run/PlanFile.tsx";
+import { FirstAnswer, RunAnswer } from "./run/RunAnswer.tsx";
+
+/** The charts and their library come when the figures do. */
+const RunEvidence = lazy(async () => ({ default: (await import("./run/RunEvidence.tsx")).RunEvidence }));
+
+export interface RunPageProps {
+  workshop: string;
+  kit: string;
+  /** Worked out on the server, for the first paint. */
+  first: AnswerFigures;
+  may: { changeRun: boolean; changePrice: boolean };
+}
+
+/** How many kits should we make? The answer, its evidence, and everything it rests on. */
+export function RunPage({ workshop, kit, first, may }: RunPageProps) {
+  const address = { workshop, kit };
+  const { held, error, retry } = usePlan(address);
+  if (held) return <Reckoned address={address} held={held} may={may} />;
+  return (
+    <>
+      <FirstAnswer figures={first} />
+      {error ? (
+        <ErrorBox title="The plan could not be fetched" alert>
+          <p>
+            {error instanceof CallFailed ? `${error.problem.title} ${error.problem.detail}` : error.message}
+          </p>
+          <Button className="mt-3" onClick={retry}>
+            Try again
+          </Button>
+        </ErrorBox>
+      ) : (
+        <Loading what="runs and charts" rows={6} />
+      )}
+    </>
+  );
+}
+
+interface ReckonedProps {
+  address: KitAddress;
+  held: KitPlan;
+  may: RunPageProps["may"];
+}
+
+function Reckoned({ address, held, may }: ReckonedProps) {
+  const { plan } = held;
+  const run = runOf(plan);
+  const opens = useOpens();
+  const { sweep, workingOut } = useSweep(plan);
+  const choose = (kits: number) =>
+    take({ address, row: { kind: "run" }, field: "kits", currency: plan.currency }, kits);
+  return (
+    <>
+      <RunAnswer run={run} opens={opens} />
+      <div className={PAIRS}>
+        {!run.perKit.used.known && (
+          <CannotBeKnown
+            address={address}
+            plan={plan}
+            title={`${run.kits} cannot be worked out yet`}
+            needs={run.perKit.used.needs}
+            may={may}
+          />
+        )}
+        <Suspense fallback={<Loading what="charts" rows={8} />}>
+          {sweep ? (
+            <RunEvidence
+              {...{ address, plan, run, sweep, workingOut, may, opens }}
+              {...evidenceColumns(sweep)}
+              onChoose={choose}
+            />
+          ) : (
+            <Loading what="every run size" rows={8} />
+          )}
+        </Suspense>
+        <Inputs address={address} held={held} run={run} may={may} />
+        <PlanFile address={address} />
+      </div>
+    </>
+  );
+}
+
+function evidenceColumns(sweep: Parameters<typeof drawnColumns>[0]) {
+  const { columns, partial } = drawnColumns(sweep);
+  return { columns, isPartial: partial };
+}

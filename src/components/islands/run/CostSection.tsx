@@ -1,0 +1,137 @@
+import { useState } from "react";
+import { FilterGroup } from "#src/components/islands/parts/FilterGroup.tsx";
+import { Section } from "#src/components/islands/parts/Section.tsx";
+import { ShowWorking } from "#src/components/islands/parts/ShowWorking.tsx";
+import type { useOpens } from "#src/components/islands/plan/open-working.ts";
+import { money } from "#src/components/written.ts";
+import type { RunResult } from "#src/costing/run-result.ts";
+import type { SweepColumns, SweepResult } from "#src/costing/sweep-result.ts";
+import type { Plan } from "#src/shapes/plan.ts";
+import { ChartFrame, type ChartTable } from "./ChartFrame.tsx";
+import { CostChart } from "./CostChart.tsx";
+import { changesInWords } from "./change-words.ts";
+import { type CostView, costPoints, type Span, spanAround } from "./cost-points.ts";
+import { fileName } from "./file-name.ts";
+
+export interface SectionProps {
+  plan: Plan;
+  run: RunResult;
+  sweep: SweepResult;
+  columns: SweepColumns;
+  narrow: boolean;
+  opens: ReturnType<typeof useOpens>;
+  /** Said of figures that leave something out: "without 3 unpriced lines". */
+  partial: string | null;
+}
+
+/** Whether the two views differ at any run size. */
+function viewsDiffer({ used, spent }: SweepColumns): boolean {
+  return used.some((value, place) => value !== spent[place]);
+}
+
+/** Every run size of the columns, for a table or a file. */
+function costTable(columns: SweepColumns, span: Span, currency: string): ChartTable {
+  const head = ["Run", "Used per kit", "Spent per kit", "Used", "Spent", "Next kit, used"];
+  const of = (place: number) => [
+    columns.perKitUsed[place],
+    columns.perKitSpent[place],
+    columns.used[place],
+    columns.spent[place],
+    columns.nextKitUsed[place],
+  ];
+  const sizes = Array.from({ length: span.to - span.from + 1 }, (_, place) => span.from + place);
+  return {
+    head,
+    rows: sizes.map((kits) => [
+      String(kits),
+      ...of(kits - 1).map((value) =>
+        value === null || value === undefined ? "not known" : money(value, currency),
+      ),
+    ]),
+    fileRows: columns.used.map((_, place) => [String(place + 1), ...of(place).map((value) => value ?? "")]),
+  };
+}
+
+/** What one kit costs at every run size. */
+export function CostSection({ plan, run, sweep, columns, narrow, opens, partial }: SectionProps) {
+  const [whole, setWhole] = useState(false);
+  const [view, setView] = useState<CostView>("used");
+  const differ = viewsDiffer(columns);
+  const shown = differ ? view : "used";
+  const span = whole ? { from: 1, to: sweep.to } : spanAround(run.kits, sweep.to);
+  const points = costPoints(columns, shown, span);
+  const next = sweep.sweetSpots.find(({ kits }) => kits === run.kits);
+  const name = "What one kit costs, by run size";
+  const spots = sweep.sweetSpots.map(({ kits }) => ({
+    kits,
+    perKit: (shown === "used" ? columns.perKitUsed : columns.perKitSpent)[kits - 1] ?? "0",
+  }));
+  return (
+    <Section
+      title={name}
+      aside={partial ?? (differ ? `${shown}, without what sale brings` : "used and spent are the same here")}
+      actions={<ShowWorking of="the cost per kit" onClick={opens("per-kit-used").onOpen} />}
+    >
+      <div className="mb-3 flex flex-wrap gap-3">
+        <FilterGroup
+          label="Run sizes shown"
+          value={whole ? "whole" : "around"}
+          onChoose={(value) => setWhole(value === "whole")}
+          choices={[
+            { value: "around", label: `Around ${run.kits}` },
+            { value: "whole", label: `1 to ${sweep.to}` },
+          ]}
+        />
+        {differ && (
+          <FilterGroup
+            label="View of cost"
+            value={view}
+            onChoose={(value) => setView(value as CostView)}
+            choices={[
+              { value: "used", label: "Used" },
+              { value: "spent", label: "Spent" },
+            ]}
+          />
+        )}
+      </div>
+      <ChartFrame
+        name={name}
+        file={fileName(plan.kit, "cost-per-kit")}
+        height={narrow ? 330 : 430}
+        table={() => costTable(columns, span, run.currency)}
+      >
+        {(width) => (
+          <CostChart
+            points={points}
+            span={span}
+            run={run.kits}
+            width={width}
+            narrow={narrow}
+            currency={run.currency}
+            brings={run.keptPerKit.known ? run.keptPerKit.value : null}
+            earns={shown === "used" && run.earnsPerKit.known ? run.earnsPerKit.value : null}
+            spots={spots}
+            nextKit={next ? nextKitNote(plan, run, next) : null}
+            view={shown}
+            label={`${name}: from ${span.from} to ${span.to} kits. Arrow keys go from run size to run size.`}
+          />
+        )}
+      </ChartFrame>
+    </Section>
+  );
+}
+
+const ORDINALS: Record<string, string> = { one: "st", two: "nd", few: "rd", other: "th" };
+const ordinalRules = new Intl.PluralRules("en", { type: "ordinal" });
+
+/** "121st" */
+export function ordinal(whole: number): string {
+  return `${whole}${ORDINALS[ordinalRules.select(whole)] ?? "th"}`;
+}
+
+function nextKitNote(plan: Plan, run: RunResult, spot: SweepResult["sweetSpots"][number]) {
+  return {
+    title: `The ${ordinal(run.kits + 1)} kit costs ${money(spot.nextKit, run.currency)}:`,
+    reason: `${changesInWords(plan, spot.changes)}.`,
+  };
+}

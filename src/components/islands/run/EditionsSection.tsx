@@ -1,0 +1,68 @@
+import { Figure } from "#src/components/islands/parts/Figure.tsx";
+import { Section } from "#src/components/islands/parts/Section.tsx";
+import { type Column, Table } from "#src/components/islands/parts/Table.tsx";
+import type { useOpens } from "#src/components/islands/plan/open-working.ts";
+import { count, money } from "#src/components/written.ts";
+import type { Figure as CostFigure } from "#src/costing/figure.ts";
+import { figureLess } from "#src/costing/figure-less.ts";
+import { needWords } from "#src/costing/problem-words.ts";
+import type { EditionResult, RunResult } from "#src/costing/run-result.ts";
+import type { FigureId } from "#src/costing/working-tree.ts";
+
+/** What each edition costs, brings in and earns, in both views. */
+export function EditionsSection({ run, opens }: { run: RunResult; opens: ReturnType<typeof useOpens> }) {
+  const { currency } = run;
+  const written = (label: string, figure: CostFigure, figureId?: FigureId) =>
+    figure.known ? (
+      <Figure label={label} value={money(figure.value, currency)} {...(figureId && opens(figureId))} />
+    ) : (
+      <span className="text-ink-2">{needWords(figure.needs)}</span>
+    );
+  const columns: Column<EditionResult>[] = [
+    { key: "name", head: "Edition", names: true, cell: ({ name }) => name },
+    { key: "kits", head: "Kits", number: true, cell: ({ kits }) => count(kits) },
+    {
+      key: "price",
+      head: "Price",
+      number: true,
+      wide: true,
+      cell: ({ sale }) => (sale.price === null ? "not set" : money(sale.price, currency)),
+    },
+    {
+      key: "brings",
+      head: "Brings in",
+      number: true,
+      cell: ({ id, name, sale }) => written(`${name} brings in`, sale.kept, `sale:${id}`),
+    },
+    {
+      key: "used",
+      head: "Costs, used",
+      number: true,
+      cell: ({ id, name, perKit }) => written(`${name} costs, used`, perKit.used, `edition:${id}`),
+    },
+    {
+      key: "spent",
+      head: "Costs, spent",
+      number: true,
+      wide: true,
+      cell: ({ name, perKit }) => written(`${name} costs, spent`, perKit.spent),
+    },
+    {
+      key: "earns",
+      head: "Earns",
+      number: true,
+      cell: ({ name, sale, perKit }) => written(`${name} earns`, figureLess(sale.kept, perKit.used)),
+    },
+  ];
+  return (
+    <Section title="Edition by edition" aside={`one kit of each, in a run of ${run.kits}`}>
+      <Table
+        caption="Edition by edition"
+        columns={columns}
+        rows={run.editions}
+        keyOf={({ id }) => id}
+        scrolls
+      />
+    </Section>
+  );
+}

@@ -1,0 +1,127 @@
+import { useState } from "react";
+import { buttonLook } from "#src/components/button-look.ts";
+import { CallFailed, call } from "#src/components/islands/call.ts";
+import { type KitAddress, kitApi } from "#src/components/islands/kit-address.ts";
+import { DropArea } from "#src/components/islands/parts/DropArea.tsx";
+import { ErrorBox } from "#src/components/islands/parts/ErrorBox.tsx";
+import { Section } from "#src/components/islands/parts/Section.tsx";
+import { Table } from "#src/components/islands/parts/Table.tsx";
+import { count, money } from "#src/components/written.ts";
+import type { Figure } from "#src/costing/figure.ts";
+import { needWords } from "#src/costing/problem-words.ts";
+import type { RunResult } from "#src/costing/run-result.ts";
+import type { POST } from "#src/pages/api/costing.ts";
+import type { ProblemBody } from "#src/server/problem.ts";
+
+type Outcome =
+  | { state: "none" }
+  | { state: "busy" }
+  | { state: "reckoned"; file: string; run: RunResult }
+  | { state: "refused"; file: string; title: string; detail: string; errors: ProblemBody["errors"] };
+
+async function reckoned(file: File): Promise<Outcome> {
+  try {
+    const plan = JSON.parse(await file.text());
+    const { run } = await call<typeof POST>("POST", "/api/costing?working=", plan);
+    return { state: "reckoned", file: file.name, run };
+  } catch (error) {
+    if (error instanceof CallFailed)
+      return { state: "refused", file: file.name, errors: [], ...error.problem };
+    if (!(error instanceof SyntaxError)) throw error;
+    return {
+      state: "refused",
+      file: file.name,
+      title: "This file is not a plan.",
+      detail: "Choose a file that was downloaded here: its name ends in plan.json.",
+      errors: [],
+    };
+  }
+}
+
+/** The plan as a file, and a file's figures worked out again without changing anything here. */
+export function PlanFile({ address }: { address: KitAddress }) {
+  const [outcome, setOutcome] = useState<Outcome>({ state: "none" });
+  async function feed(file: File) {
+    setOutcome({ state: "busy" });
+    setOutcome(await reckoned(file));
+  }
+  return (
+    <Section id="plan-file" title="The plan as a file" aside="for scripts, for keeping, for another machine">
+      <p className="type-note measure-prose">
+        The file holds everything the figures rest on, as JSON. Any plan can be worked out again here or at{" "}
+        <code>POST /api/costing</code>; nothing of this kit changes.{" "}
+        <a href="/api/openapi.json">Description of the API</a>
+      </p>
+      <p className="mt-3">
+        <a href={`${kitApi(address, "/plan")}?download=1`} download className={buttonLook()}>
+          Download this plan
+        </a>
+      </p>
+      <div className="mt-5">
+        <DropArea
+          title="Work out a plan file"
+          level={3}
+          accept=".json,application/json"
+          chooseLabel="Choose a plan file"
+          onFile={(file) => void feed(file)}
+        >
+          Drop a file that was downloaded here. Its figures stand below; nothing is saved.
+        </DropArea>
+      </div>
+      <div aria-live="polite" className="mt-4">
+        <OutcomeOf outcome={outcome} />
+      </div>
+    </Section>
+  );
+}
+
+function OutcomeOf({ outcome }: { outcome: Outcome }) {
+  if (outcome.state === "none") return null;
+  if (outcome.state === "busy") return <p>Working out</p>;
+  if (outcome.state === "refused")
+    return (
+      <ErrorBox
+        title={`${outcome.file} cannot be worked out`}
+        causes={(outcome.errors ?? []).slice(0, 20).map(({ at, message }) => ({
+          key: `${at} ${message}`,
+          what: at || "The plan",
+          reason: message,
+        }))}
+      >
+        {outcome.title} {outcome.detail}
+      </ErrorBox>
+    );
+  return <FileFigures file={outcome.file} run={outcome.run} />;
+}
+
+function FileFigures({ file, run }: { file: string; run: RunResult }) {
+  const written = (figure: Figure) =>
+    figure.known ? money(figure.value, run.currency) : needWords(figure.needs);
+  const rows: [string, string][] = [
+    ["Cost per kit, used", written(run.perKit.used)],
+    ["Cost per kit, spent", written(run.perKit.spent)],
+    ["One kit brings in", written(run.keptPerKit)],
+    ["Earns per kit", written(run.earnsPerKit)],
+    [
+      "Even after",
+      run.evenAfter.known ? `${count(run.evenAfter.value)} sold` : needWords(run.evenAfter.needs),
+    ],
+    ["Cash needed", written(run.spent)],
+  ];
+  return (
+    <>
+      <p className="type-h3 mb-2">
+        {file}: {run.kit}, a run of {run.kits}
+      </p>
+      <Table
+        caption={`Figures of ${file}`}
+        rows={rows}
+        keyOf={([name]) => name}
+        columns={[
+          { key: "name", head: "Figure", names: true, cell: ([name]) => name },
+          { key: "value", head: run.currency, number: true, cell: ([, value]) => value },
+        ]}
+      />
+    </>
+  );
+}

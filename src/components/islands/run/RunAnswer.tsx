@@ -1,0 +1,67 @@
+import type { ReactNode } from "react";
+import { buttonLook } from "#src/components/button-look.ts";
+import { RunBands } from "#src/components/islands/parts/Bands.tsx";
+import { Chip } from "#src/components/islands/parts/Chip.tsx";
+import { ShowWorking } from "#src/components/islands/parts/ShowWorking.tsx";
+import type { useOpens } from "#src/components/islands/plan/open-working.ts";
+import type { RunResult } from "#src/costing/run-result.ts";
+import { type AnswerFigures, type AnswerPiece, answerFigures, runAnswer } from "./answer-words.ts";
+
+/** The question, the run as a large figure with its bands, and the answer in a sentence or two. */
+export function RunAnswer({ run, opens }: { run: RunResult; opens: ReturnType<typeof useOpens> }) {
+  const known = run.perKit.used.known;
+  return (
+    <AnswerHead kits={run.kits} pieces={runAnswer(answerFigures(run))}>
+      {known && <Chip kind="good">{run.kits} is your chosen run</Chip>}
+      <a href="#runs" className={buttonLook("secondary", "small")}>
+        Compare other runs
+      </a>
+      <a href="#inputs" className={buttonLook("secondary", "small")}>
+        Change what it rests on
+      </a>
+      {known && <ShowWorking of="the cost per kit" onClick={opens("per-kit-used").onOpen} />}
+    </AnswerHead>
+  );
+}
+
+/** The same head from the figures that came with the page, before the plan is here. */
+export function FirstAnswer({ figures }: { figures: AnswerFigures }) {
+  return <AnswerHead kits={figures.kits} pieces={runAnswer(figures)} />;
+}
+
+interface HeadProps {
+  kits: number;
+  pieces: readonly AnswerPiece[];
+  children?: ReactNode;
+}
+
+function AnswerHead({ kits, pieces, children }: HeadProps) {
+  return (
+    <header className="mb-11">
+      <h1 className="type-h1">How many kits should we make?</h1>
+      <div className="mt-4 flex gap-x-11 gap-y-4 max-tablet:flex-col tablet:mt-5 tablet:items-start">
+        <RunFigure kits={kits} />
+        <div className="min-w-0 tablet:pt-4">
+          <p className="type-answer">
+            <Pieces pieces={pieces} />
+          </p>
+          <div className="mt-3.5 flex min-h-9 flex-wrap items-center gap-3">{children}</div>
+        </div>
+      </div>
+    </header>
+  );
+}
+
+function RunFigure({ kits }: { kits: number }) {
+  return (
+    <div className="flex shrink-0 gap-x-6 max-tablet:items-center tablet:flex-col tablet:items-start">
+      <p className="type-run">{kits}</p>
+      <RunBands kits={kits} width={206} className="tablet:mt-3 max-tablet:max-w-[48vw]" />
+    </div>
+  );
+}
+
+/** Pieces of a sentence, the deciding figures bold. */
+export function Pieces({ pieces }: { pieces: readonly AnswerPiece[] }) {
+  return pieces.map(({ text, bold }) => (bold ? <b key={text}>{text}</b> : <span key={text}>{text}</span>));
+}
