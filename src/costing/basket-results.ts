@@ -24,6 +24,8 @@ export interface Baskets {
 /**
  * Baskets by supplier (section 4), with landed cost by line: extended price and its share by value
  * of freight, small-order fee and handling. Shares are exact and sum to the basket's charges.
+ *
+ * @example goods 6.00 and 2.00, freight 4.90 → landed 9.675 and 3.225
  */
 export function basketResults(prepared: PreparedPlan, sheet: RunSheet): Baskets {
   const shares = new Map<PreparedOffer, OrderShare>();

@@ -10,6 +10,8 @@ import { type BoardChoice, MISSING, type RunSheet } from "./run-sheet.ts";
  * Boards of the run (section 6): how many to order for the yield, and of which quote. The quote the
  * user chose, or the one whose landed cost (boards, engineering, stencil, freight) is worth least;
  * quotes without freight come after those with. Ties: fewer boards over, then the house's name.
+ *
+ * @example 20 boards, yield 95 %, confidence 95 % → 23; lots of 10 and 30 → 30
  */
 export function chooseBoards(prepared: PreparedPlan, sheet: RunSheet): void {
   const { boards } = prepared.plan;

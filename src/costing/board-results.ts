@@ -4,7 +4,7 @@ import type { Figure } from "./figure.ts";
 import { figureOf, figurePer, wholeFigure } from "./figure-of.ts";
 import { scaled, scaledText } from "./grains.ts";
 import { minorText } from "./money.ts";
-import { boughtUp, breakReached, lotsTaken } from "./part-lines.ts";
+import { boughtUp, breakReached, lotsTaken } from "./order-details.ts";
 import type { PreparedPlan, PreparedQuote } from "./prepared-plan.ts";
 import type { Need } from "./problem.ts";
 import { need, needsOf } from "./run-needs.ts";

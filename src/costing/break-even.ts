@@ -1,12 +1,14 @@
 import { grainShare, grainText, ONE } from "./grains.ts";
 import { KEPT_NEEDS, USED_NEEDS } from "./run-sheet.ts";
-import type { Swept } from "./sweep.ts";
 import type { BreakEven, Crossing } from "./sweep-result.ts";
+import type { Swept } from "./swept.ts";
 
 /**
  * Break-even over the sweep (section 11): profit(n) = kept from n sales − used cost of a run of n.
  * Costs go up in steps, so every passing of zero is listed with what stepped; `first` is the first
  * run without a loss and `safe` the one from which no run up to `upTo` loses.
+ *
+ * @example fixed 20 000, price 400, variable 250 → first and safe 134, one crossing up
  */
 export function breakEvenOf(swept: Swept, planned: number): BreakEven {
   const upTo = knownUpTo(swept);

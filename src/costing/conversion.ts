@@ -19,6 +19,8 @@ export interface MinorWorth {
 /**
  * Conversion of section 1.4: reporting units per one foreign unit, applied after the foreign sum's own
  * rounding. Where a plan states a currency twice the rate of the later date counts. `null`: no rate.
+ *
+ * @example 1 USD = 0.8797 EUR: minorWorth(plan, "USD").grains is 0.008797 EUR
  */
 export function minorWorth(plan: Plan, currency: string): MinorWorth | null {
   const perMinor = 10n ** BigInt(minorDecimals(currency));
@@ -46,6 +48,8 @@ export function minorWorth(plan: Plan, currency: string): MinorWorth | null {
 /**
  * Compares two sums of minor units by their worth, exactly: below 0 when `a` is less. Sums that
  * differ by more than a billionth are told apart in floating point; nearer ones exactly.
+ *
+ * @example 200 US cents at 0.5 and 100 euro cents are equal: 0
  */
 export function compareWorth(a: number, aWorth: MinorWorth, b: number, bWorth: MinorWorth): number {
   if (aWorth === bWorth) return a - b;
@@ -56,7 +60,11 @@ export function compareWorth(a: number, aWorth: MinorWorth, b: number, bWorth: M
   return difference < 0n ? -1 : difference > 0n ? 1 : 0;
 }
 
-/** Minor units of a currency as exact grains of the plan's. */
+/**
+ * Minor units of a currency as exact grains of the plan's.
+ *
+ * @example 12.34 USD at 0.8797: convertMinor(1234, worth) is 10.855498 EUR, exact
+ */
 export function convertMinor(minor: number, worth: MinorWorth): bigint {
   return BigInt(minor) * worth.grains;
 }

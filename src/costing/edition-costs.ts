@@ -23,6 +23,8 @@ export interface EditionCosts {
  * packing and making by the kits that have them, replacements by kits. Joint: freight, one-off
  * charges and setting up, by value of direct cost. Every split is by largest remainder in grains, so
  * the editions add up to the run exactly.
+ *
+ * @example joint 30.00, direct costs 200 and 100 → 20.00 and 10.00 more
  */
 export function editionCosts(prepared: PreparedPlan, sheet: RunSheet): EditionCosts {
   const direct = directCosts(prepared, sheet);

@@ -19,7 +19,11 @@ export function grains(text: string): bigint {
   return scaled(text, GRAIN_PLACES);
 }
 
-/** Decimal text times 10^places as a whole number; the text has at most so many decimals. */
+/**
+ * Decimal text times 10^places as a whole number; the text has at most so many decimals.
+ *
+ * @example scaled("0.062", 6) === 62_000n
+ */
 export function scaled(text: string, places: number): bigint {
   const negative = text.startsWith("-");
   const [whole = "0", fraction = ""] = (negative ? text.slice(1) : text).split(".");
@@ -36,7 +40,11 @@ export function grainText(value: bigint): string {
   return scaledText(value, GRAIN_PLACES);
 }
 
-/** A whole number of 10^-places as the shortest exact decimal text. */
+/**
+ * A whole number of 10^-places as the shortest exact decimal text.
+ *
+ * @example scaledText(48_500_000n, 6) === "48.5"
+ */
 export function scaledText(value: bigint, places: number): string {
   const negative = value < 0n;
   const digits = (negative ? -value : value).toString().padStart(places + 1, "0");
@@ -48,7 +56,11 @@ export function scaledText(value: bigint, places: number): string {
   return negative ? `-${text}` : text;
 }
 
-/** `value × part ÷ whole`, to the nearest grain; `whole > 0`. */
+/**
+ * `value × part ÷ whole`, to the nearest grain; `whole > 0`.
+ *
+ * @example grainShare(100n, 1n, 3n) === 33n
+ */
 export function grainShare(value: bigint, part: bigint, whole: bigint): bigint {
   return divideBigHalfAway(value * part, whole);
 }

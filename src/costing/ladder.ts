@@ -92,14 +92,22 @@ export function cheapestOrder(ladder: Ladder, quantity: number): Order | null {
   return { quantity: least, cost, tier };
 }
 
-/** Index of the price break a quantity reaches. */
+/**
+ * Index of the price break a quantity reaches.
+ *
+ * @example breaks 100, 500, 1000: 735 pieces reach index 1
+ */
 export function tierOf(ladder: Ladder, quantity: number): number {
   let tier = ladder.from.length - 1;
   while (tier > 0 && (ladder.from[tier] ?? 0) > quantity) tier -= 1;
   return tier;
 }
 
-/** Extended price of a quantity at a break, in minor units, halves up; beyond `ORDER_MOST` it is Infinity. */
+/**
+ * Extended price of a quantity at a break, in minor units, halves up; beyond `ORDER_MOST` it is Infinity.
+ *
+ * @example 800 at 0.094 → 7520 cents
+ */
 export function costOf(ladder: Ladder, tier: number, quantity: number): number {
   const price = ladder.prices[tier] as Price;
   if (ladder.model === "whole-order") {
@@ -150,7 +158,11 @@ function priceOf(text: string): Price {
   return { text, millionths: millionths < SAFE ? millionths : Number.POSITIVE_INFINITY };
 }
 
-/** A unit price in millionths, however large. */
+/**
+ * A unit price in millionths, however large.
+ *
+ * @example exactPrice("0.094") === 94_000n
+ */
 export function exactPrice({ text }: Price): bigint {
   return scaled(text, 6);
 }

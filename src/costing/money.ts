@@ -5,6 +5,8 @@ import { divideBigHalfAway } from "./whole.ts";
 /**
  * Decimals an amount of a currency is charged in. A code that is not on the ISO list is reckoned
  * with two, which most have, and the run says so (`currency-not-listed`).
+ *
+ * @example minorDecimals("JPY") === 0
  */
 export function minorDecimals(currency: string): number {
   return currencyDecimals(currency) ?? 2;

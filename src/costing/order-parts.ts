@@ -24,6 +24,8 @@ export interface BasketCharges {
 /**
  * Charges on a basket of `goods` minor units: the small-order fee below the supplier's minimum order
  * value, freight or none from its free value upward, and the handling fee.
+ *
+ * @example goods 500, minimum 2000, fee 400, flat 490: { freight: 490, fee: 400, handling: 0 }
  */
 export function basketCharges(supplier: PreparedSupplier, goods: number): BasketCharges {
   return {

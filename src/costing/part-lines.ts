@@ -1,19 +1,18 @@
+import { considered } from "./considered-offers.ts";
 import { convertMinor } from "./conversion.ts";
 import type { Figure } from "./figure.ts";
 import { figureOf, figurePer, wholeFigure } from "./figure-of.ts";
 import { grainText } from "./grains.ts";
-import { costOf, type Ladder, type Order, tierOf } from "./ladder.ts";
 import { minorText } from "./money.ts";
+import { boughtUp, breakReached, lotsTaken } from "./order-details.ts";
 import { ordersOf } from "./order-parts.ts";
 import type { PreparedOffer, PreparedPart, PreparedPlan } from "./prepared-plan.ts";
 import type { Need } from "./problem.ts";
 import { joinNeeds, need, partNeeds } from "./run-needs.ts";
-import type { BoughtUp, ConsideredOffer, PartLine, PartOrder, PartState } from "./run-result.ts";
+import type { PartLine, PartOrder, PartState } from "./run-result.ts";
 import type { RunSheet } from "./run-sheet.ts";
 import { keptOf, leftValue } from "./shelf.ts";
-import { coverableOf, mostOf, type SplitPart } from "./split-order.ts";
-import { better, type WeighedOffer, weigh } from "./supplier-choice.ts";
-import { upToMultiple } from "./whole.ts";
+import { coverableOf, type SplitPart } from "./split-order.ts";
 
 const STATES: readonly PartState[] = ["not-needed", "settled", "unpriced", "short", "refused", "unpriced"];
 
@@ -134,86 +133,5 @@ function partOrder(
     landed: figureOf(goods + share, needs),
     pinned: part.pinnedOffer === offer.offer.id,
     boughtUp: boughtUp(offer.ladder, currency, covers, order),
-  };
-}
-
-type Breaks = readonly { quantity: number; price: string }[];
-
-/** The break an order reaches, as its offer states it; null for lots. */
-export function breakReached(ladder: Ladder, breaks: Breaks, { tier }: Order): PartOrder["breakReached"] {
-  return ladder.model === "lots" ? null : (breaks.toSorted((a, b) => a.quantity - b.quantity)[tier] ?? null);
-}
-
-/** The lots that cover a quantity, largest first; empty for other price models. */
-export function lotsTaken(ladder: Ladder, breaks: Breaks, quantity: number): PartOrder["lots"] {
-  const counts = ladder.lots?.taken(Math.max(quantity, ladder.minimum)) ?? [];
-  const ascending = breaks.toSorted((a, b) => a.quantity - b.quantity);
-  return ascending
-    .map((lot, index) => ({ ...lot, count: counts[index] ?? 0 }))
-    .filter(({ count }) => count > 0)
-    .reverse();
-}
-
-/**
- * Whether an order goes past the least permitted quantity because a higher break costs less
- * (section 3): instead of how many, what those would cost, and what it saves.
- *
- * @example 84 would cost 9.90, 100 cost 8.00 → instead of 84, saves 1.90, 16 left over
- */
-export function boughtUp(ladder: Ladder, currency: string, quantity: number, order: Order): BoughtUp | null {
-  if (ladder.model !== "whole-order") return null;
-  const insteadOf = upToMultiple(Math.max(quantity, ladder.minimum), ladder.multiple);
-  if (insteadOf >= order.quantity) return null;
-  const cost = costOf(ladder, tierOf(ladder, insteadOf), insteadOf);
-  if (cost === Number.POSITIVE_INFINITY) return null;
-  return {
-    insteadOf,
-    insteadOfCosts: minorText(cost, currency),
-    saves: minorText(cost - order.cost, currency),
-    leftOver: order.quantity - quantity,
-  };
-}
-
-/** Every offer of the part weighed for what is to buy: usable ones best first, then those set aside. */
-function considered(part: PreparedPart, sheet: RunSheet, index: number, toBuy: number): ConsideredOffer[] {
-  const taken = new Set(ordersOf(sheet, index).map(({ offer }) => offer.offer.id));
-  const rows = part.offers.map(({ offer, standing, prepared }) => {
-    const weighed = prepared === null || toBuy === 0 ? null : weigh(prepared, toBuy);
-    const row = consideredRow(prepared, weighed, toBuy);
-    const barred = prepared !== null && sheet.barred.has(prepared.supplier.index);
-    return {
-      weighed,
-      row: {
-        offer: offer.id,
-        supplier: offer.supplier,
-        chosen: taken.has(offer.id),
-        pinned: part.part.pinnedOffer === offer.id,
-        currency: offer.currency,
-        ...row,
-        standing: standing === "usable" ? (barred ? "minimum-not-reached" : row.standing) : standing,
-      },
-    };
-  });
-  const before = (a: (typeof rows)[number], b: (typeof rows)[number]) => {
-    if (a.weighed === null || b.weighed === null)
-      return Number(a.weighed === null) - Number(b.weighed === null);
-    return better(a.weighed, b.weighed) ? -1 : better(b.weighed, a.weighed) ? 1 : 0;
-  };
-  return rows.sort(before).map(({ row }) => row);
-}
-
-function consideredRow(offer: PreparedOffer | null, weighed: WeighedOffer | null, toBuy: number) {
-  const short = offer !== null && weighed === null && offer.ladder.cap !== Number.POSITIVE_INFINITY;
-  return {
-    quantity: weighed?.order.quantity ?? null,
-    extended: weighed && minorText(weighed.order.cost, weighed.offer.worth.currency),
-    aloneLanded: weighed?.freightKnown ? grainText(convertMinor(weighed.alone, weighed.offer.worth)) : null,
-    leftOver: weighed && weighed.order.quantity - toBuy,
-    shortBy: short && toBuy > 0 ? Math.max(0, toBuy - mostOf(offer)) : 0,
-    standing: (short && toBuy > 0
-      ? "short"
-      : weighed === null && toBuy > 0
-        ? "amount-too-large"
-        : "usable") as ConsideredOffer["standing"],
   };
 }

@@ -149,7 +149,11 @@ export function withoutWords(needs: readonly Need[]): string {
   return parts.length === 0 ? `without ${last}` : `without ${parts.join(", ")} and ${last}`;
 }
 
-/** A problem of the run as a sentence that names its things. */
+/**
+ * A problem of the run as a sentence that names its things.
+ *
+ * @example no-rate at USD → "There is no rate for USD. Add one with its date."
+ */
 export function problemSentence({ code, at, facts }: Problem, plan: Plan): string {
   const amount = facts.amount === undefined ? "" : `${facts.amount} ${facts.currency ?? plan.currency}`;
   return SENTENCES[code](namesOf(at, plan), {

@@ -100,6 +100,7 @@ export interface RunMoney {
   minutes: bigint;
 }
 
+/** An empty sheet with room for the parts and suppliers of a plan. */
 export function createSheet(prepared: PreparedPlan): RunSheet {
   const parts = prepared.parts.length;
   return {

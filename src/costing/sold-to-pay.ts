@@ -2,7 +2,7 @@ import { keptFromSales } from "./kit-costs.ts";
 import type { PreparedPlan } from "./prepared-plan.ts";
 import { KEPT_NEEDS, USED_NEEDS } from "./run-sheet.ts";
 import { splitKits } from "./split-kits.ts";
-import type { Swept } from "./sweep.ts";
+import type { Swept } from "./swept.ts";
 
 /**
  * The second question of section 11: a run of N is made and m of them sell, by the mix. For each N
@@ -32,7 +32,11 @@ function highestTakings(prepared: PreparedPlan, to: number): bigint[] | null {
   return highest;
 }
 
-/** The same for one run: least number sold that pays for `cost`; null: not even all, or not known. */
+/**
+ * The same for one run: least number sold that pays for `cost`; null: not even all, or not known.
+ *
+ * @example cost 1793.65, 25.19 kept a sale, 120 made → 72
+ */
 export function soldToPay(prepared: PreparedPlan, cost: bigint, kits: number): number | null {
   const highest = highestTakings(prepared, kits);
   return highest === null ? null : leastSold(highest, cost, kits);

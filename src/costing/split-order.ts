@@ -141,7 +141,11 @@ function aloneValue(supplier: PreparedSupplier, goods: number, oneCurrency: bool
       );
 }
 
-/** Pieces that all offers of a part cover together. */
+/**
+ * Pieces that all offers of a part cover together.
+ *
+ * @example stock 8400 and 640 in hundreds → 9000
+ */
 export function coverableOf(
   part: PreparedPart,
   barred: ReadonlyMap<number, number> | ReadonlySet<number>,
@@ -150,7 +154,11 @@ export function coverableOf(
   return open.reduce((sum, offer) => sum + mostOf(offer), 0);
 }
 
-/** Most pieces one offer covers: the last multiple within its stock, 0 where that is below its minimum. */
+/**
+ * Most pieces one offer covers: the last multiple within its stock, 0 where that is below its minimum.
+ *
+ * @example stock 640 in hundreds → 600
+ */
 export function mostOf({ ladder }: PreparedOffer): number {
   if (ladder.cap === Number.POSITIVE_INFINITY) return ladder.cap;
   const most = ladder.cap - (ladder.cap % ladder.multiple);

@@ -14,12 +14,18 @@ export interface WeighedOffer {
 /**
  * A supplier's freight for goods of so many minor units (section 4.2); 0 from its free value upward;
  * null where its terms are not known.
+ *
+ * @example flat 490, free from 5000: 490 for goods of 4999, 0 for 5000
  */
 export function freightFor(supplier: PreparedSupplier, goods: number): number | null {
   return goods >= supplier.freeFrom ? 0 : supplier.freight;
 }
 
-/** Weighs one offer for a quantity; null where it cannot cover it, or the sum is beyond all bounds. */
+/**
+ * Weighs one offer for a quantity; null where it cannot cover it, or the sum is beyond all bounds.
+ *
+ * @example 1000 LEDs for 6200 cents with freight 490 → alone 6690
+ */
 export function weigh(offer: PreparedOffer, quantity: number): WeighedOffer | null {
   const order = cheapestOrder(offer.ladder, quantity);
   if (order === null || order.cost === Number.POSITIVE_INFINITY) return null;
@@ -37,6 +43,8 @@ export function weigh(offer: PreparedOffer, quantity: number): WeighedOffer | nu
  * answer per part.
  *
  * @param barred suppliers, by index, that turned the run's basket down (section 4.1)
+ *
+ * @example 10 at 0.10 + 5.00 freight against 10 at 0.50 without: the second, 5.00 against 6.00
  */
 export function chooseOffer(
   part: PreparedPart,

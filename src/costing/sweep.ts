@@ -1,31 +1,16 @@
 import type { Plan } from "#src/shapes/plan.ts";
 import { breakEvenOf } from "./break-even.ts";
-import { grainShare, grainText } from "./grains.ts";
 import { preparePlan } from "./prepare-plan.ts";
 import type { PreparedPlan } from "./prepared-plan.ts";
 import type { Need } from "./problem.ts";
 import { reckonRun } from "./reckon-run.ts";
 import { joinNeeds, needsOf } from "./run-needs.ts";
-import { createSheet, KEPT_NEEDS, MISSING, type RunSheet, SPENT_NEEDS, USED_NEEDS } from "./run-sheet.ts";
-import { soldToPayFor } from "./sold-to-pay.ts";
+import { createSheet, KEPT_NEEDS, type RunSheet, USED_NEEDS } from "./run-sheet.ts";
 import { changesBetween } from "./step-changes.ts";
-import type { Change, StepDown, SweepColumns, SweepResult, SweetSpot } from "./sweep-result.ts";
-import { divideDown } from "./whole.ts";
-
-/** The sweep in grains; entry n belongs to a run of n, entry 0 is empty. */
-export interface Swept {
-  to: number;
-  spent: bigint[];
-  used: bigint[];
-  kept: bigint[];
-  leftOver: bigint[];
-  parcels: number[];
-  missing: number[];
-  /** What makes a kit of n cheaper than one of n − 1 by a step; found only where it is that much cheaper. */
-  steps: Change[][];
-  /** All that changed from n − 1 to n, reckoned again when it is asked. */
-  changesAt: (kits: number) => Change[];
-}
+import { fellByStep, stepDowns, sweetSpots, windowOf } from "./steps.ts";
+import { columnsOf } from "./sweep-columns.ts";
+import type { Change, SweepResult } from "./sweep-result.ts";
+import type { Swept } from "./swept.ts";
 
 /**
  * Every run size from 1 to the plan's end of sweep (sections 9 and 11), each reckoned as a run of its
@@ -54,14 +39,6 @@ export function sweepRuns(plan: Plan): SweepResult {
     sweetSpots: sweetSpots(swept, beyond),
     breakEven: breakEvenOf(swept, plan.run.kits),
   };
-}
-
-/**
- * Largest run a sweet spot at `kits` must not be beaten by: a tenth more (section 9), and at least
- * the next kit, since below ten a tenth more is no whole kit.
- */
-function windowOf(kits: number): number {
-  return Math.max(kits + 1, divideDown(11 * kits, 10));
 }
 
 function reckonAll(prepared: PreparedPlan, to: number, beyond: number): { swept: Swept; needs: Need[] } {
@@ -122,76 +99,3 @@ function changesAt(prepared: PreparedPlan, kits: number): Change[] {
   reckonRun(prepared, kits, after);
   return changesBetween(prepared, before, after, true);
 }
-
-/** Cost per kit falls by at least half a per cent: `C(n)/n ≤ 0.995 · C(n − 1)/(n − 1)`. */
-function fellByStep(earlier: bigint, now: bigint, kits: number): boolean {
-  return now * BigInt(kits - 1) * 1000n <= 995n * earlier * BigInt(kits);
-}
-
-function stepDowns({ used, steps, to }: Swept): StepDown[] {
-  const found: StepDown[] = [];
-  for (let kits = 2; kits <= to; kits += 1) {
-    const changes = steps[kits] ?? [];
-    if (changes.length === 0) continue;
-    const perKit = perKitOf(used[kits] as bigint, kits);
-    const before = perKitOf(used[kits - 1] as bigint, kits - 1);
-    found.push({ kits, perKit: grainText(perKit), fellBy: grainText(before - perKit), changes });
-  }
-  return found;
-}
-
-function sweetSpots({ used, changesAt, to }: Swept, beyond: number): SweetSpot[] {
-  const found: SweetSpot[] = [];
-  const cheaper = (a: number, b: number) => (used[a] as bigint) * BigInt(b) < (used[b] as bigint) * BigInt(a);
-  let lowest = 0;
-  for (let kits = 1; kits <= to; kits += 1) {
-    if (lowest > 0 && !cheaper(kits, lowest)) continue;
-    lowest = kits;
-    let beaten = false;
-    for (let more = kits + 1; more <= Math.min(windowOf(kits), beyond); more += 1)
-      beaten ||= cheaper(more, kits);
-    if (beaten) continue;
-    const nextKit = (used[kits + 1] as bigint) - (used[kits] as bigint);
-    found.push({
-      kits,
-      perKit: grainText(perKitOf(used[kits] as bigint, kits)),
-      nextKit: grainText(nextKit),
-      changes: changesAt(kits + 1),
-    });
-  }
-  return found;
-}
-
-function perKitOf(value: bigint, kits: number): bigint {
-  return grainShare(value, 1n, BigInt(kits));
-}
-
-/** Columns as text: where `known` only what is known at that size, else everything that can be reckoned. */
-function columnsOf(prepared: PreparedPlan, swept: Swept, known: boolean): SweepColumns {
-  const { spent, used, kept, leftOver, missing, to } = swept;
-  const column = (bits: number, value: (kits: number) => bigint) => {
-    const texts: (string | null)[] = [];
-    for (let kits = 1; kits <= to; kits += 1) {
-      const hidden = ((missing[kits] as number) & (known ? bits : bits & NEVER_PARTIAL)) !== 0;
-      texts.push(hidden ? null : grainText(value(kits)));
-    }
-    return texts;
-  };
-  const at = (of: readonly bigint[], kits: number) => of[kits] as bigint;
-  return {
-    spent: column(SPENT_NEEDS, (kits) => at(spent, kits)),
-    used: column(USED_NEEDS, (kits) => at(used, kits)),
-    perKitSpent: column(SPENT_NEEDS, (kits) => perKitOf(at(spent, kits), kits)),
-    perKitUsed: column(USED_NEEDS, (kits) => perKitOf(at(used, kits), kits)),
-    kept: column(KEPT_NEEDS, (kits) => at(kept, kits)),
-    profit: column(USED_NEEDS | KEPT_NEEDS, (kits) => at(kept, kits) - at(used, kits)),
-    leftOver: column(MISSING.mix | MISSING.goods, (kits) => at(leftOver, kits)),
-    nextKitSpent: column(SPENT_NEEDS, (kits) => at(spent, kits + 1) - at(spent, kits)),
-    nextKitUsed: column(USED_NEEDS, (kits) => at(used, kits + 1) - at(used, kits)),
-    parcels: swept.parcels.slice(1, to + 1),
-    soldToPay: soldToPayFor(prepared, swept, known),
-  };
-}
-
-/** Without a mix or a price there are no takings, not even partial ones. */
-const NEVER_PARTIAL = MISSING.mix | MISSING.sale;

@@ -14,17 +14,29 @@ export const SAFE = 2 ** 50;
  */
 export const ORDER_MOST = 2 ** 40;
 
-/** Quotient of two whole numbers, halves up: `0 ≤ a < 2^50`, `1 ≤ b < 2^50`. */
+/**
+ * Quotient of two whole numbers, halves up: `0 ≤ a < 2^50`, `1 ≤ b < 2^50`.
+ *
+ * @example divideHalfUp(4905, 10) === 491
+ */
 export function divideHalfUp(a: number, b: number): number {
   return Math.floor((2 * a + b) / (2 * b));
 }
 
-/** Quotient rounded up: `0 ≤ a < 2^50`, `1 ≤ b < 2^50`. */
+/**
+ * Quotient rounded up: `0 ≤ a < 2^50`, `1 ≤ b < 2^50`.
+ *
+ * @example divideUp(735, 100) === 8
+ */
 export function divideUp(a: number, b: number): number {
   return Math.floor((a + b - 1) / b);
 }
 
-/** Quotient rounded down: `0 ≤ a < 2^50`, `1 ≤ b < 2^50`. */
+/**
+ * Quotient rounded down: `0 ≤ a < 2^50`, `1 ≤ b < 2^50`.
+ *
+ * @example divideDown(735, 100) === 7
+ */
 export function divideDown(a: number, b: number): number {
   return Math.floor(a / b);
 }
@@ -38,7 +50,11 @@ export function upToMultiple(least: number, multiple: number): number {
   return multiple === 1 ? least : divideUp(least, multiple) * multiple;
 }
 
-/** Exact quotient of whole numbers of any size, halves away from zero; `b > 0`. */
+/**
+ * Exact quotient of whole numbers of any size, halves away from zero; `b > 0`.
+ *
+ * @example divideBigHalfAway(-5n, 2n) === -3n
+ */
 export function divideBigHalfAway(a: bigint, b: bigint): bigint {
   const doubled = 2n * (a < 0n ? -a : a) + b;
   const quotient = doubled / (2n * b);

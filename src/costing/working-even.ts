@@ -75,6 +75,7 @@ export function crossingSheet(context: WorkingContext, kits: number, title: stri
   };
 }
 
+/** The first run without a loss, or the safe one, with the run before it; or that there is none (section 11). */
 export function firstOrSafeSheet(context: WorkingContext, which: "first" | "safe"): Sheet {
   const { breakEven } = sweepRuns(context.prepared.plan);
   const kits = breakEven[which];

@@ -11,6 +11,7 @@ export type Sign = WorkingLine["sign"];
 /** Whatever a step may leave at its usual value. */
 type Extras = Partial<Pick<Step, "subs" | "source" | "opens" | "result" | "rounds">>;
 
+/** A line: sign, label, amount and the section it follows; the rest at its usual value. */
 export function step(
   sign: Sign,
   label: string,
@@ -32,11 +33,6 @@ export function step(
   };
 }
 
-/** A line of words only. */
-export function remark(label: string, rule: string): Step {
-  return step(null, label, null, rule);
-}
-
 /** Money in a currency from grains, decimal text, or a figure that may not be known. */
 export function money(value: bigint | string | Figure, currency: string, places?: number): WorkingAmount {
   if (typeof value === "object" && !value.known) return { kind: "not-known", needs: value.needs };
@@ -46,26 +42,27 @@ export function money(value: bigint | string | Figure, currency: string, places?
     : { kind: "money", value: text, currency, places };
 }
 
+/** A whole number of things: pieces, kits, boards. */
 export function count(value: number | string, unit: string): WorkingAmount {
   return { kind: "count", value: value.toString(), unit };
 }
 
+/** A share or rate as a decimal. */
 export function rate(value: string): WorkingAmount {
   return { kind: "rate", value };
 }
 
+/** A number with its unit, where it is neither money nor a count. */
 export function number(value: string, unit = ""): WorkingAmount {
   return { kind: "number", value, unit };
 }
 
-export function words(value: string): WorkingAmount {
-  return { kind: "words", value };
-}
-
+/** In place of an amount: what it needs. */
 export function notKnown(needs: Need[]): WorkingAmount {
   return { kind: "not-known", needs };
 }
 
+/** The page, and the thing on it, whose field an amount comes from. */
 export function from(page: SourcePage, id: string | null = null): WorkingSource {
   return { page, id };
 }
@@ -104,6 +101,7 @@ export interface Sheet {
   basis?: string;
 }
 
+/** A finished working from its steps and the facts of the run. */
 export function treeOf(
   figure: FigureId,
   sheet: Sheet,

@@ -2,7 +2,7 @@ import { headSpent } from "./head-results.ts";
 import type { SourcePage } from "./problem.ts";
 import { HEADS, type HeadId, type RunResult } from "./run-result.ts";
 import type { WorkingContext } from "./working.ts";
-import { count, from, money, number, type Sheet, type Step, step, summed } from "./working-lines.ts";
+import { count, from, money, type Sheet, type Step, step, summed } from "./working-lines.ts";
 
 /** Names of the heads as lines call them, and the page whose inputs make them up. */
 export const HEAD_NAMES: Record<HeadId, { name: string; page: SourcePage }> = {
@@ -15,7 +15,8 @@ export const HEAD_NAMES: Record<HeadId, { name: string; page: SourcePage }> = {
   replacements: { name: "Replacements", page: "run" },
 };
 
-const EXACT = "Every line is exact; only what a supplier charges is rounded, to the cent, halves up.";
+/** How rounding is said once on papers of sums. */
+export const EXACT = "Every line is exact; only what a supplier charges is rounded, to the cent, halves up.";
 
 /** The heads as a sum that ends in what is spent; heads that cost nothing are left out. */
 export function spentSteps({ result, sheet }: WorkingContext, isResult: boolean): Step[] {
@@ -37,6 +38,7 @@ export function spentSteps({ result, sheet }: WorkingContext, isResult: boolean)
   return [...summed(lines), total];
 }
 
+/** All the money the run needs, by head (section 8). */
 export function spentSheet(context: WorkingContext): Sheet {
   return {
     title: `Spent on a run of ${context.result.kits}`,
@@ -67,6 +69,7 @@ function usedSteps(context: WorkingContext, isResult: boolean): Step[] {
   ];
 }
 
+/** Spent, less what keeps on the shelf, with stock taken from it (section 8). */
 export function usedSheet(context: WorkingContext): Sheet {
   return {
     title: `Used by a run of ${context.result.kits}`,
@@ -75,6 +78,7 @@ export function usedSheet(context: WorkingContext): Sheet {
   };
 }
 
+/** Cost per kit in either view: the heads, the run, and its kits (section 8). */
 export function perKitSheet(context: WorkingContext, view: "spent" | "used"): Sheet {
   const { result } = context;
   const { currency, kits } = result;
@@ -95,118 +99,6 @@ export function perKitSheet(context: WorkingContext, view: "spent" | "used"): Sh
       ),
     ],
     notes: [EXACT, "The quotient is carried exactly and written to the nearest cent."],
-  };
-}
-
-/** What every edition's kits bring, and together. */
-export function keptSheet(context: WorkingContext): Sheet {
-  const { result } = context;
-  return {
-    title: `What a run of ${result.kits} brings if every kit sells`,
-    steps: keptSteps(context, true),
-    notes: ["Tax, fees and postage are taken off sale by sale."],
-    basis: `In ${result.currency}, after tax, fees and postage`,
-  };
-}
-
-function keptSteps({ result, sheet, prepared }: WorkingContext, isResult: boolean): Step[] {
-  const { currency } = result;
-  const sold = result.editions.filter(({ kits }) => kits > 0);
-  const groups = sold.flatMap((edition) => [
-    step(null, `${edition.name}, kept from one sale`, money(edition.sale.kept, currency), "10", {
-      opens: `sale:${edition.id}`,
-      source: from("price", edition.id),
-    }),
-    step("×", `${edition.name}, kits in the run`, count(edition.kits, "kits"), "2", { source: from("run") }),
-    step("=", `${edition.name} brings`, ofEdition(edition.id), "11", {
-      result: isResult && sold.length === 1,
-    }),
-  ]);
-  function ofEdition(id: string) {
-    const index = prepared.plan.editions.findIndex((edition) => edition.id === id);
-    const each = prepared.keptPerSale[index] ?? null;
-    const known = result.editions[index]?.sale.kept ?? result.kept;
-    return each === null ? money(known, currency) : money(each * BigInt(sheet.kitsOf[index] ?? 0), currency);
-  }
-  if (sold.length < 2) return groups;
-  const total = sold.map((edition) => step("+", `${edition.name} brings`, ofEdition(edition.id), "11"));
-  return [
-    ...groups,
-    ...summed(total),
-    step("=", "The run brings", money(result.kept, currency), "11", { result: isResult }),
-  ];
-}
-
-export function keptPerKitSheet(context: WorkingContext): Sheet {
-  const { result } = context;
-  return {
-    title: `What one kit brings in a run of ${result.kits}`,
-    steps: [
-      step(null, "The run brings", money(result.kept, result.currency), "11", { opens: "kept" }),
-      step("÷", "Kits in the run", count(result.kits, "kits"), "2", { source: from("run") }),
-      step("=", "One kit brings", money(result.keptPerKit, result.currency), "11", { result: true }),
-    ],
-    notes: result.editions.length > 1 ? ["The mean over the editions of the run."] : [],
-    basis: `In ${result.currency}, after tax, fees and postage`,
-  };
-}
-
-export function profitSheet({ result }: WorkingContext): Sheet {
-  const { currency, kits } = result;
-  return {
-    title: `Profit of a run of ${kits} if every kit sells`,
-    steps: [
-      step(null, "The run brings", money(result.kept, currency), "11", { opens: "kept" }),
-      step("−", "Used by the run", money(result.used, currency), "8", { opens: "used" }),
-      step("=", "Profit", money(result.profit, currency), "11", { result: true }),
-    ],
-    notes: [EXACT],
-  };
-}
-
-export function earnsSheet({ result }: WorkingContext): Sheet {
-  const { currency, kits } = result;
-  return {
-    title: `Earned per kit in a run of ${kits}`,
-    steps: [
-      step(null, "One kit brings", money(result.keptPerKit, currency), "11", { opens: "kept-per-kit" }),
-      step("−", "Cost per kit", money(result.perKit.used, currency), "8", { opens: "per-kit-used" }),
-      step("=", "Earns per kit", money(result.earnsPerKit, currency), "11", { result: true }),
-    ],
-    notes: ["Both are carried exactly; the difference is written to the nearest cent."],
-  };
-}
-
-export function perHourSheet({ result, sheet }: WorkingContext): Sheet {
-  const { currency, work, kits } = result;
-  const others = sheet.money.used - sheet.money.work;
-  const usedKnown = result.earnedPerHour.known;
-  return {
-    title: `Earned per hour in a run of ${kits}`,
-    steps: [
-      step(null, "The run brings", money(result.kept, currency), "7", { opens: "kept" }),
-      step(
-        "−",
-        "All costs but own work",
-        usedKnown ? money(others, currency) : money(result.earnedPerHour, currency),
-        "7",
-        {
-          opens: "used",
-        },
-      ),
-      step(
-        "=",
-        "Left for the hours",
-        usedKnown ? money(sheet.money.kept - others, currency) : money(result.earnedPerHour, currency),
-        "7",
-      ),
-      step("÷", "Hours of the run", number(work.hours, "hours"), "7", {
-        opens: "head:work",
-        source: from("run"),
-      }),
-      step("=", "Earned per hour", money(result.earnedPerHour, currency), "7", { result: true }),
-    ],
-    notes: ["Hours are minutes over 60, carried exactly."],
   };
 }
 
@@ -248,7 +140,11 @@ export function leftOverSheet({ result, prepared }: WorkingContext): Sheet {
   };
 }
 
-/** A share as whole and part of a hundred: "0.5" is "50 %". */
+/**
+ * A share as whole and part of a hundred: "0.5" is "50 %".
+ *
+ * @example percent("0.025") is "2.5 %" with a no-break space
+ */
 export function percent(share: string): string {
   const [whole = "0", fraction = ""] = share.split(".");
   const digits = `${whole}${fraction.padEnd(2, "0").slice(0, 2)}`.replace(/^0+(?=\d)/, "");

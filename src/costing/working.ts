@@ -11,18 +11,9 @@ import { crossingSheet, evenAfterSheet, firstOrSafeSheet, nextKitSheet } from ".
 import { headSheet, taskSheet } from "./working-head.ts";
 import { type Sheet, treeOf } from "./working-lines.ts";
 import { partSheet } from "./working-part.ts";
-import {
-  earnsSheet,
-  keptPerKitSheet,
-  keptSheet,
-  leftOverSheet,
-  perHourSheet,
-  perKitSheet,
-  profitSheet,
-  spentSheet,
-  usedSheet,
-} from "./working-run.ts";
+import { leftOverSheet, perKitSheet, spentSheet, usedSheet } from "./working-run.ts";
 import { editionSheet, saleSheet } from "./working-sale.ts";
+import { earnsSheet, keptPerKitSheet, keptSheet, perHourSheet, profitSheet } from "./working-takings.ts";
 import type { FigureId, WorkingTree } from "./working-tree.ts";
 
 /** One run reckoned, as every working reads it: the sheet the figures come from, and the result. */
@@ -83,6 +74,7 @@ export function reckoned(plan: Plan, kits: number = plan.run.kits): WorkingConte
   return { prepared, sheet, result: runResult(prepared, sheet) };
 }
 
+/** One figure of a run already reckoned; `null` as in `working`. */
 export function workingOf(context: WorkingContext, figure: FigureId): WorkingTree | null {
   const colon = figure.indexOf(":");
   const sheet =
