@@ -24,8 +24,8 @@ export function PlaceCell({ data, context }: CellProps) {
 }
 
 /** A part: what it is called, then the rest more quietly. On a phone below each other. */
-export function PartCell({ data, value }: CellProps) {
-  if (data?.kind !== "line") return <span className="text-ink-3">{value}</span>;
+export function PartCell({ data, value, valueFormatted }: CellProps) {
+  if (data?.kind !== "line") return <span>{valueFormatted}</span>;
   const { name, spec } = data.line.part;
   if (value !== (spec === "" ? name : `${name}, ${spec}`)) return <span>{value}</span>;
   return (
@@ -50,6 +50,7 @@ export function BandsCell({ data }: CellProps) {
 
 /** Supplier, then the order code more quietly. A pinned offer says so. */
 export function SupplierCell({ data, value }: CellProps) {
+  if (data?.kind === "total") return <span className="block text-right">{value}</span>;
   if (data?.kind !== "line" || !data.money) return null;
   const { supplier, orderCode, pinned } = data.money;
   if (supplier === "") return <span className="text-ink-2">{value}</span>;
@@ -63,7 +64,7 @@ export function SupplierCell({ data, value }: CellProps) {
 
 /** What one kit's share costs: opens its working. */
 export function PerKitCell({ data, value, node, context }: CellProps) {
-  if (node.rowPinned) return <span className="rule-result inline-block pl-3">{value}</span>;
+  if (node.rowPinned) return value && <span className="rule-result inline-block pl-3">{value}</span>;
   if (data?.kind !== "line" || !value) return null;
   return (
     <button

@@ -53,6 +53,9 @@ const MODULES = [
 const ROWS_IN_FULL = 60;
 const ROW = 37;
 
+/** As every grid, but for the marks between heads: the columns here are many and narrow. */
+const theme = gridTheme.withParams({ headerColumnResizeHandleColor: "transparent" });
+
 /** Where a block is to be pasted, as the grid is seen. */
 export interface PastePlace {
   row: number;
@@ -64,8 +67,10 @@ export interface PastePlace {
 export type GridDeeds = Omit<KeyDeeds, "setRange"> & {
   edit: (row: LineRow, column: ColumnKey, text: string) => void;
   writeDraft: (column: ColumnKey, text: string) => void;
-  /** The empty line is left, or Enter was pressed in it. */
+  /** The empty line is left: it is added if it says what its part is. */
   leaveDraft: () => void;
+  /** Enter, or Tab in its last cell: it is added, and the next one begins. */
+  nextDraft: () => void;
   paste: (block: string[][], place: PastePlace) => void;
   select: (lines: string[]) => void;
 };
@@ -105,8 +110,21 @@ export default function PartsGrid(props: PartsGridProps) {
   }, [props.context.faults, props.context.draft, range]);
   const current = () => api.current && { api: api.current, columns, range: context.current.range };
 
+  /** Enter and the last Tab in the empty line end it; the grid alone would stay in the cell, or leave. */
+  function pressedInDraft(press: KeyboardEvent, grid: GridApi<GridRow>) {
+    const cell = grid.getFocusedCell();
+    if (!cell || rowAt(grid, cell.rowIndex)?.kind !== "draft") return;
+    const last = cell.column.getColId() === "drawer" && press.key === "Tab" && !press.shiftKey;
+    if (press.key !== "Enter" && !last) return;
+    press.preventDefault();
+    press.stopPropagation();
+    grid.stopEditing();
+    deeds.nextDraft();
+  }
+
   function pressed(press: KeyboardEvent) {
     const view = current();
+    if (view && inField(press.target)) pressedInDraft(press, view.api);
     if (!view || inField(press.target)) return;
     if (!handleKey(press.nativeEvent, view, { ...deeds, setRange })) return;
     press.preventDefault();
@@ -155,10 +173,10 @@ export default function PartsGrid(props: PartsGridProps) {
       onKeyDownCapture={pressed}
       onCopy={copy}
       onPaste={paste}
-      className={whole ? "" : "h-[max(480px,calc(100vh-250px))]"}
+      className={`[&_.ag-cell-focus:not(.ag-cell-inline-editing)]:outline-3 [&_.ag-cell-focus:not(.ag-cell-inline-editing)]:-outline-offset-3 [&_.ag-cell-focus:not(.ag-cell-inline-editing)]:outline-petrol ${whole ? "" : "h-[max(480px,calc(100vh-250px))]"}`}
     >
       <AgGridReact<GridRow>
-        theme={gridTheme}
+        theme={theme}
         modules={MODULES}
         styleNonce={styleNonce}
         rowData={rows as GridRow[]}
@@ -186,7 +204,7 @@ export default function PartsGrid(props: PartsGridProps) {
               }
             : undefined
         }
-        selectionColumnDef={{ pinned: "left", width: 40, suppressMovable: true }}
+        selectionColumnDef={{ pinned: "left", width: 38, suppressMovable: true }}
         onSelectionChanged={({ api: grid }) => deeds.select(grid.getSelectedRows().map(({ id }) => id))}
         readOnlyEdit
         stopEditingWhenCellsLoseFocus

@@ -145,18 +145,23 @@ function Answer({
     );
   if (!list) return <b>{counted(lines, "line", "lines")}.</b>;
   const toSettle = rows.filter(({ state }) => state.toSettle).length;
-  const [edition] = list.editions;
-  const pieces = edition ? piecesIn(list, edition.id) : 0;
+  const { pieces, name } = fullestEdition(list);
   return (
     <>
       <b>
         {lines === 1 ? "1 line" : `${lines} lines`}, {pieces === 1 ? "1 piece" : `${pieces} pieces`}
-        {list.editions.length > 1 && ` in ${edition?.name}`}.
+        {list.editions.length > 1 && ` in ${name}`}.
       </b>{" "}
       {bought && <CostSentence bought={bought} />}{" "}
       {toSettle > 0 && `${counted(toSettle, "line waits", "lines wait")} to be settled.`}
     </>
   );
+}
+
+/** The edition with most pieces, which stands for the kit where there are several. */
+function fullestEdition(list: PartsList): { name: string; pieces: number } {
+  const all = list.editions.map(({ id, name }) => ({ name, pieces: piecesIn(list, id) }));
+  return all.reduce((most, one) => (one.pieces > most.pieces ? one : most), { name: "", pieces: 0 });
 }
 
 function CostSentence({ bought }: { bought: Bought }) {

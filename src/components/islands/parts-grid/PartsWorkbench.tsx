@@ -129,18 +129,24 @@ export function PartsWorkbench(props: WorkbenchProps) {
   const asked = useStore(addLine, 0);
   const draftFocus = useRef(focusDraft);
   draftFocus.current = focusDraft;
+  /** The empty line moves as lines are added; it is gone to when the grid shows it at its new place. */
+  const [wish, setWish] = useState(0);
   useEffect(() => {
-    if (asked > 0) requestAnimationFrame(() => draftFocus.current());
-  }, [asked]);
+    if (asked + wish === 0) return;
+    const frame = requestAnimationFrame(() => draftFocus.current());
+    return () => cancelAnimationFrame(frame);
+  }, [asked, wish]);
 
   const gridDeeds: GridDeeds = {
     ...deeds,
-    leaveDraft: () => {
-      if (deeds.commitDraft()) requestAnimationFrame(() => draftFocus.current());
+    leaveDraft: () => void deeds.commitDraft(),
+    nextDraft: () => {
+      deeds.commitDraft();
+      setWish((count) => count + 1);
     },
     insertAt: (row) => {
       deeds.insertAt(row);
-      requestAnimationFrame(() => draftFocus.current());
+      setWish((count) => count + 1);
     },
     paste: (block, place) => deeds.paste(block, place, rows, columns),
     open: (row, column) => {

@@ -60,7 +60,7 @@ export function columnKeys(
 
 /** What stands in a cell as text: for copying with units, for the editor, and to see whether it changed. */
 export function cellText({ line, money, ...row }: LineRow, key: ColumnKey): string {
-  if (key.startsWith("quantity:")) return String(line.quantities[key.slice(9)] ?? "");
+  if (key.startsWith("quantity:")) return String(line.quantities[key.slice(9)] || "");
   switch (key) {
     case "place":
       return String(row.place);

@@ -46,25 +46,25 @@ const EXAMPLES: DraftCells = {
   drawer: "A1",
 };
 
-/** The name of a column, as its head says it. */
+/** The name of a column, as its head says it; with several editions each has a column under its own name. */
 export function columnHead(key: ColumnKey, editions: readonly { id: string; name: string }[]): string {
   if (!key.startsWith("quantity:")) return HEADS[key] ?? "";
   if (editions.length === 1) return "Qty";
-  return `Qty, ${editions.find(({ id }) => id === key.slice(9))?.name ?? ""}`;
+  return editions.find(({ id }) => id === key.slice(9))?.name ?? "";
 }
 
 const WIDTHS: Partial<Record<ColumnKey, Partial<Def>>> = {
-  place: { width: 58 },
-  designators: { width: 120 },
-  part: { flex: 1, minWidth: 190 },
-  bands: { width: 92 },
-  package: { width: 140 },
-  drawer: { width: 78 },
-  supplier: { width: 178 },
-  buy: { width: 74 },
-  each: { width: 84 },
-  perKit: { width: 84 },
-  state: { width: 122 },
+  place: { width: 52 },
+  designators: { width: 104 },
+  part: { flex: 1, minWidth: 170 },
+  bands: { width: 80 },
+  package: { width: 120 },
+  drawer: { width: 70 },
+  supplier: { width: 162 },
+  buy: { width: 64 },
+  each: { width: 72 },
+  perKit: { width: 74 },
+  state: { width: 116 },
   mark: { width: 110 },
   class: { width: 150 },
   note: { width: 180 },
@@ -148,8 +148,9 @@ function shownValue(key: ColumnKey, row: GridRow | undefined, context: GridConte
   return context.faults.get(faultKey(row.id, key))?.text ?? cellText(row, key);
 }
 
-/** Text of the empty line: the example stands there, more quietly, until something is written. */
-function draftExample(key: ColumnKey, row: GridRow | undefined, value: string): string {
+/** In the empty line an example stands, more quietly, until something is written; an edition without a line has a dash. */
+function shownText(key: ColumnKey, row: GridRow | undefined, value: string): string {
+  if (row?.kind === "line" && key.startsWith("quantity:")) return value === "" ? "–" : value;
   if (row?.kind !== "draft" || value !== "") return value;
   return EXAMPLES[key as CellColumn] ?? "";
 }
@@ -206,12 +207,12 @@ export function columnDefs({ keys, editions, phone, sortable }: ColumnsWanted): 
   return keys.map((key): Def => {
     const head = columnHead(key, editions);
     const width = phone ? (PHONE_WIDTHS[key] ?? { width: 52 }) : (WIDTHS[key] ?? {});
-    const several = editions.length > 1 ? Math.max(72, 26 + head.length * 4) : 62;
+    const quantity = phone ? 50 : editions.length > 1 ? 74 : 56;
     return {
       colId: key,
       headerName: head,
-      headerTooltip: key.startsWith("quantity:") && editions.length > 1 ? head : undefined,
-      ...(key.startsWith("quantity:") && { width: phone ? 50 : several }),
+      headerTooltip: key.startsWith("quantity:") && editions.length > 1 ? `Pieces in one ${head}` : undefined,
+      ...(key.startsWith("quantity:") && { width: quantity }),
       ...width,
       sortable: sortable && !phone,
       ...comparatorOf(key),
@@ -220,7 +221,7 @@ export function columnDefs({ keys, editions, phone, sortable }: ColumnsWanted): 
       suppressMovable: true,
       type: isNumber(key) ? "rightAligned" : undefined,
       valueGetter: ({ data, context }) => shownValue(key, data, context as GridContext),
-      valueFormatter: ({ data, value }) => draftExample(key, data, value ?? ""),
+      valueFormatter: ({ data, value }) => shownText(key, data, value ?? ""),
       valueParser: ({ newValue }) => newValue,
       editable: (params) => !phone && isEditable(key, params),
       ...editorOf(key),

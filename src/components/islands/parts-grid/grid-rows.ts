@@ -70,9 +70,7 @@ function moneyOf(plan: Plan, bought: PartLine, boughtWith: string | null): LineM
   const [order] = bought.orders;
   const perKit = bought.perKit.spent;
   const names = bought.orders.map((one) => plan.suppliers.find(({ id }) => id === one.supplier)?.name ?? "");
-  const known = perKit.known
-    ? unitPriceText(roundedText(perKit.value, UNIT_PLACES), plan.currency)
-    : "not known";
+  const known = perKit.known ? unitPriceText(roundedText(perKit.value, UNIT_PLACES), plan.currency) : "";
   return {
     supplier: names.join(" + "),
     orderCode: bought.orders.length === 1 ? (order?.orderCode ?? "") : "",

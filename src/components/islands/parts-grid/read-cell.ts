@@ -185,9 +185,15 @@ function kindOf(designators: readonly string[], part: string): PartClass {
   return (first === undefined ? null : classFromDesignator(first)) ?? classFromColumn(part) ?? "other";
 }
 
+/** The editions a new line goes into unless somebody says otherwise: those that have at least half of the list. */
+function usualEditions(list: PricedPartsList): string[] {
+  const holds = (edition: string) => list.lines.filter(({ quantities }) => quantities[edition]).length;
+  return list.editions.map(({ id }) => id).filter((id) => holds(id) * 2 >= list.lines.length);
+}
+
 /**
  * A new line from what was written into its cells. A quantity that was not written is the number of designators,
- * or one; in every edition, as a new line goes into all of them until somebody says otherwise.
+ * or one, in the editions that have most of the list; a bare board does not get every resistor.
  */
 export function lineFromCells(list: PricedPartsList, id: string, cells: DraftCells, at?: number): ReadCell {
   const { designators, unclear } = readDesignators(cells.designators ?? "");
@@ -197,12 +203,14 @@ export function lineFromCells(list: PricedPartsList, id: string, cells: DraftCel
   if (part === "") return wrong("A new line needs its part, such as 10 kΩ, 5 %.");
   const kind = kindOf(designators, part);
   const quantities: Record<string, number> = {};
+  const usual = usualEditions(list);
   for (const { id: edition } of list.editions) {
     const text = (cells[`quantity:${edition}`] ?? "").replace(/[\u00a0\s]/g, "");
     const read = readQuantity(text);
     if (read.kind !== "number" && read.kind !== "empty")
       return wrong(`“${text}” is not a number of pieces. Write a whole number.`);
-    quantities[edition] = read.kind === "number" ? read.quantity : Math.max(1, designators.length);
+    const unsaid = usual.includes(edition) ? Math.max(1, designators.length) : 0;
+    quantities[edition] = read.kind === "number" ? read.quantity : unsaid;
   }
   const step: Step = {
     do: "add-line",
