@@ -163,25 +163,33 @@ function matchByIdentity(
   }
 }
 
-/** Two lines with designators of which none is shared are two lines, except where one side has none. */
+/**
+ * Two lines with designators of which none is free for both are two lines, unless they say the same part in the same
+ * number: some lists name a designator in several rows.
+ */
 function mayBeTheSame(line: ComparableLine, other: ComparableLine): boolean {
   return (
     line.designators.length === 0 ||
     other.designators.length === 0 ||
-    fullIdentity(line) === fullIdentity(other)
+    (fullIdentity(line) === fullIdentity(other) && sameWords(line.description, other.description))
   );
+}
+
+/** A list that gives no description does not contradict one. */
+function sameWords(a: string | null, b: string | null): boolean {
+  return a === null || b === null || plain(a) === plain(b);
 }
 
 function fullIdentity(line: ComparableLine): string | null {
   const part = partIdentity(line);
-  return part === null ? null : `${part}\u001f${plain(line.description)}\u001f${line.quantity}`;
+  return part === null ? null : `${part}\u001f${line.quantity}`;
 }
 
 function partIdentity(line: ComparableLine): string | null {
   if (line.partNumber !== null) return `n\u001f${plain(line.partNumber)}`;
   return line.value === null && line.description === null
     ? null
-    : `v\u001f${line.class}\u001f${meaning(line)}\u001f${plain(line.package)}\u001f${line.value === null ? plain(line.description) : ""}`;
+    : `v\u001f${line.class}\u001f${line.value === null ? plain(line.description) : meaning(line)}\u001f${plain(line.package)}`;
 }
 
 function nameIdentity(line: ComparableLine): string | null {
@@ -194,23 +202,37 @@ function plain(text: string | null): string {
   return (text ?? "").trim().toLowerCase().replace(/\s+/g, " ");
 }
 
-/** A value by what it means, else by its letters. */
 function meaning(line: ComparableLine): string {
-  return line.value === null ? "" : textMeaning(line.value, line.class);
+  if (line.value === null) return "";
+  const { value, rest } = valueMeaning(line.value, line.class);
+  return `${value} ${rest}`.trim();
 }
 
-function textMeaning(value: string, partClass: PartClass): string {
-  const reading = readValue(value, partClass);
-  return reading === null ? plain(value) : `${reading.si} ${reading.unit} ${afterValue(value)}`;
+/** Words of a value cell: blanks, slashes and commas part them, but not the comma of "4,7k". */
+export function valueCellWords(text: string): string[] {
+  return text
+    .trim()
+    .split(/[\s/]+|(?<!\d),|,(?!\d)/)
+    .filter((word) => word !== "");
 }
 
-/** What else stands in a value cell ("100n 50V") counts as well. */
-function afterValue(value: string): string {
-  return plain(value)
-    .split(/[\s,/]+/)
+/**
+ * A value cell by what it means: its reading in SI units, else its letters; and what else stands in the cell, such as
+ * the "50v" of "100n 50V", which counts as well.
+ */
+export function valueMeaning(text: string, partClass: PartClass): { value: string; rest: string } {
+  const reading = readValue(text, partClass);
+  if (reading === null) return { value: plain(text), rest: "" };
+  const rest = valueCellWords(plain(text))
     .slice(1)
-    .filter((word) => !/^(?:[kmunpµ]?(?:ω|ohms?|f|h))$/.test(word))
-    .join(" ");
+    .filter((word) => !/^(?:[kmunpµ]?(?:ω|ohms?|f|h))$/.test(word));
+  return { value: `${reading.si} ${reading.unit}`, rest: rest.join(" ") };
+}
+
+/** Whether a value that is stated says the same as one that is known; saying less is no contradiction. */
+export function sameValue(known: string, stated: string, partClass: PartClass): boolean {
+  const [before, after] = [valueMeaning(known, partClass), valueMeaning(stated, partClass)];
+  return before.value === after.value && (after.rest === "" || after.rest === before.rest);
 }
 
 function changesBetween(before: ComparableLine, after: ComparableLine): FieldChange[] {
@@ -226,7 +248,9 @@ function equal(field: ComparedField, before: ComparableLine, after: ComparableLi
   if (field === "designators") return sameNames(before.designators, after.designators);
   if (field === "quantity") return after.quantity === null || before.quantity === after.quantity;
   if (field === "value")
-    return after.value === null || (before.value !== null && meaning(before) === meaning(after));
+    return (
+      after.value === null || (before.value !== null && sameValue(before.value, after.value, after.class))
+    );
   if (field === "mark") return sameMark(before.mark, after.mark);
   if (field === "class") return before.class === after.class || after.class === "other";
   return after[field] === null || plain(before[field]) === plain(after[field]);
@@ -235,11 +259,6 @@ function equal(field: ComparedField, before: ComparableLine, after: ComparableLi
 /** A list tells fitted from not fitted; options and what the builder brings are marked by hand and stay. */
 function sameMark(before: LineMark | null, after: LineMark | null): boolean {
   return after === null || before === after || (after === "in-kit" && before !== "do-not-place");
-}
-
-/** Whether two texts mean the same value for a part of this class: "4k7" and "4.7 kΩ". */
-export function sameValue(a: string, b: string, partClass: PartClass): boolean {
-  return textMeaning(a, partClass) === textMeaning(b, partClass);
 }
 
 function sameNames(a: readonly string[], b: readonly string[]): boolean {

@@ -1,5 +1,5 @@
 import type { PartClass, ValueUnit } from "#src/shapes/limits.ts";
-import { sameValue } from "./difference.ts";
+import { sameValue, valueCellWords, valueMeaning } from "./difference.ts";
 import type { DraftLine, PropertyName } from "./draft.ts";
 import { compareDecimals } from "./exact-decimal.ts";
 import { formatReading } from "./value-format.ts";
@@ -38,17 +38,26 @@ function millimetres(line: DraftLine): string | null {
   return /\d+(?:\.\d+)?/.exec((text ?? "").replace(",", "."))?.[0] ?? null;
 }
 
-/** The value as people write it, with what stands behind it in its cell, so that it still means the same. */
+/**
+ * The value as people write it, with what stands behind it in its cell. Where the cell begins with other words it
+ * stays as it is, so that the name always means what the list said.
+ */
 function valueName(line: DraftLine): string | null {
   const { value, reading } = line;
   if (value === null || reading === null) return value;
   const plain = formatReading(reading).replace("\u00a0", " ");
-  const withRest = `${plain} ${value
-    .trim()
-    .split(/[\s,/]+/)
-    .slice(1)
-    .join(" ")}`.trim();
-  return [plain, withRest].find((name) => sameValue(name, value, line.class)) ?? value;
+  const [first = "", ...rest] = valueCellWords(value);
+  const begins =
+    sameValue(plain, first, line.class) || sameValue(plain, `${first} ${rest[0] ?? ""}`, line.class);
+  const names = [plain, begins ? `${plain} ${rest.join(" ")}` : value];
+  const said = valueMeaning(value, line.class);
+  return names.find((name) => equalMeaning(valueMeaning(name, line.class), said)) ?? value;
+}
+
+type Meaning = ReturnType<typeof valueMeaning>;
+
+function equalMeaning(a: Meaning, b: Meaning): boolean {
+  return a.value === b.value && a.rest === b.rest;
 }
 
 function nameOf(line: DraftLine): string {
@@ -103,9 +112,8 @@ function folded(text: string | null): string {
 }
 
 function valueKey(part: PartFields): string {
-  return part.value !== null && part.unit !== null
-    ? `${part.unit}:${part.value}`
-    : `text:${folded(part.name)}`;
+  const { value, rest } = valueMeaning(part.name, part.class);
+  return `${folded(value)}:${folded(rest)}`;
 }
 
 type Said = Pick<
@@ -151,11 +159,13 @@ function unitOf(text: string): string {
  */
 export function canBeSamePart(part: PartFields, said: PartFields): boolean {
   const sameClass = part.class === said.class || part.class === "other" || said.class === "other";
-  const sameValue =
+  const [known, stated] = [valueMeaning(part.name, said.class), valueMeaning(said.name, said.class)];
+  const equalValue =
     part.value !== null && said.value !== null
       ? part.unit === said.unit && compareDecimals(part.value, said.value) === 0
-      : folded(part.name) === folded(said.name);
-  return sameClass && sameValue && SAID.every((field) => agree(part[field], said[field]));
+      : folded(known.value) === folded(stated.value);
+  const sameWords = equalValue && agree(known.rest, stated.rest);
+  return sameClass && sameWords && SAID.every((field) => agree(part[field], said[field]));
 }
 
 const TAKEN_OVER = ["spec", "datasheet", "drawer"] as const;
@@ -169,6 +179,8 @@ export function partChanges(part: PartFields, said: PartFields): Partial<PartFie
   for (const field of TAKEN_OVER)
     if (said[field] !== "" && said[field] !== part[field]) changes[field] = said[field];
   for (const field of SAID) if (!part[field] && said[field]) changes[field] = said[field];
+  if (sameValue(said.name, part.name, said.class) && !sameValue(part.name, said.name, said.class))
+    changes.name = said.name;
   if (part.class === "other" && said.class !== "other") changes.class = said.class;
   return changes as Partial<PartFields>;
 }

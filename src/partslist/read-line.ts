@@ -222,7 +222,7 @@ export function readLine(
     value: part.value,
     reading: part.reading,
     preferredHint: part.reading !== null && hints(kind.class) ? preferredHint(part.reading.si) : null,
-    description: texts.description ?? leftOver(unclear, designators),
+    description: texts.description ?? leftOver(unclear, designators) ?? onlyKind(texts, part),
     package: texts.package,
     manufacturer: textAt(cells, columns.first("manufacturer")),
     partNumber: part.partNumber,
@@ -243,6 +243,11 @@ function hints(partClass: PartClass): boolean {
     valueKind(partClass) !== null &&
     (partClass === "resistor" || partClass === "capacitor" || partClass === "inductor")
   );
+}
+
+/** Where nothing but the kind of part is written ("Gasket"), it is what the part is called. */
+function onlyKind(texts: Texts, part: Pick<DraftLine, "value" | "partNumber">): string | null {
+  return part.value === null && part.partNumber === null ? texts.kind : null;
 }
 
 /** Words in the designator cell of a row that says nothing else ("Cables") are its description. */
