@@ -4,7 +4,7 @@ import { BOARD_QUOTES_MOST } from "#src/shapes/limits.ts";
 import { beforeAndAfter } from "./before-and-after.ts";
 import { checked } from "./checked.ts";
 import { newId } from "./new-id.ts";
-import { type Changing as ChangingSomewhere, clash, noteChange } from "./note-change.ts";
+import { type Changing as ChangingSomewhere, clash, noteChange, type Where } from "./note-change.ts";
 import { Problem, wrongField } from "./problem.ts";
 import {
   addBoardQuote as addRow,
@@ -48,7 +48,7 @@ function choiceOf(row: RunPlanRow): BoardChoiceView {
 }
 
 /** The kit's quotes and how it orders its boards. */
-export function boards({ db, kit }: Changing): BoardsView {
+export function boards({ db, kit }: Where & { kit: KitRow }): BoardsView {
   return { choice: choiceOf(runPlanOf(db, kit.id)), quotes: boardQuotesOf(db, kit.id).map(view) };
 }
 

@@ -1,6 +1,7 @@
 import type { Db } from "#db/client.ts";
 import { can } from "#src/access.ts";
 import type { Role } from "#src/shapes/limits.ts";
+import { boards } from "./board-changes.ts";
 import { today } from "./clock.ts";
 import { type RateView, rates } from "./currency-rate-changes.ts";
 import { kitOffers } from "./kit-offers.ts";
@@ -63,4 +64,20 @@ export function partOffersPage(asking: Asking & { kit: KitRow }, part: string) {
   const found = page.offers.parts.find(({ id }) => id === part);
   if (!found) throw new Problem("not-found");
   return { page: { ...page, part }, name: found.name };
+}
+
+/** All that the page about a kit's boards shows. */
+export function boardsPage({ db, workshop, role, kit }: Asking & { kit: KitRow }) {
+  requirePermission(role, "see-money");
+  const day = today();
+  return {
+    address: { workshop: workshop.id, kit: kit.id },
+    plan: kitPlan(db, workshop, kit, day),
+    boards: boards({ db, workshop, kit }),
+    width: kit.boardWidth,
+    height: kit.boardShape === "round" ? kit.boardWidth : kit.boardHeight,
+    today: day,
+    canChange: can(role, "change-supply"),
+    canChoose: can(role, "change-run"),
+  };
 }

@@ -1,0 +1,153 @@
+import { countText, moneyText } from "#src/components/amount-text.ts";
+import { spanText } from "#src/components/day-text.ts";
+import { Chip } from "#src/components/islands/parts/Chip.tsx";
+import { Figure } from "#src/components/islands/parts/Figure.tsx";
+import { QuietButton } from "#src/components/islands/parts/QuietButton.tsx";
+import { RadioDot } from "#src/components/islands/parts/RadioGroup.tsx";
+import { useOpens } from "#src/components/islands/plan/open-working.ts";
+import { CELL, HEAD_CELL, HEAD_ROW, NUMBER, rowLook, TABLE } from "#src/components/table-look.ts";
+import { needWords } from "#src/costing/problem-words.ts";
+import type { QuoteResult } from "#src/costing/run-result.ts";
+import type { BoardQuoteView } from "#src/server/board-changes.ts";
+import { boardWords, orderWords, quoteMark } from "./board-words.ts";
+
+/** A quote with what the reckoning makes of it at this run. */
+export interface QuoteRow {
+  quote: BoardQuoteView;
+  result: QuoteResult;
+}
+
+export interface QuoteTableProps {
+  rows: readonly QuoteRow[];
+  /** The chosen quote; null: the cheapest at the run. */
+  chosen: string | null;
+  reporting: string;
+  today: string;
+  canChoose: boolean;
+  canChange: boolean;
+  onChoose: (quote: string | null) => void;
+  onEdit: (quote: BoardQuoteView) => void;
+}
+
+const WIDE = "max-tablet:hidden";
+
+/** Board houses side by side for this run. */
+export function QuoteTable(props: QuoteTableProps) {
+  const { rows, chosen, canChoose, canChange, onChoose } = props;
+  const heads = [
+    { head: "Board house", look: "" },
+    { head: "You order", look: WIDE },
+    { head: "Boards", look: `${NUMBER} ${WIDE}` },
+    { head: "Landed", look: NUMBER },
+    { head: "Each", look: NUMBER },
+    { head: "Made and sent", look: WIDE },
+    { head: "Board", look: WIDE },
+  ];
+  return (
+    <table className={TABLE}>
+      <caption className="heard-only">Quotes of board houses</caption>
+      <thead>
+        <tr className={HEAD_ROW}>
+          {heads.map(({ head, look }) => (
+            <th key={head} scope="col" className={`${HEAD_CELL} ${look}`}>
+              {head}
+            </th>
+          ))}
+          <th scope="col" className={HEAD_CELL}>
+            <span className="heard-only">State</span>
+          </th>
+          {canChange && (
+            <th scope="col" className={HEAD_CELL}>
+              <span className="heard-only">Change</span>
+            </th>
+          )}
+        </tr>
+      </thead>
+      <tbody>
+        {canChoose && (
+          <tr className={rowLook("ordinary")}>
+            <td colSpan={9} className={CELL}>
+              <label htmlFor="quote-none" className="inline-flex min-h-10 items-center gap-3">
+                <RadioDot
+                  id="quote-none"
+                  name="quote"
+                  checked={chosen === null}
+                  onChange={() => onChoose(null)}
+                />
+                The cheapest, worked out for every run
+              </label>
+            </td>
+          </tr>
+        )}
+        {rows.map((row) => (
+          <Row key={row.quote.id} row={row} {...props} />
+        ))}
+      </tbody>
+    </table>
+  );
+}
+
+function Row({
+  row: { quote, result },
+  chosen,
+  reporting,
+  today,
+  canChoose,
+  canChange,
+  onChoose,
+  onEdit,
+}: QuoteTableProps & { row: QuoteRow }) {
+  const opens = useOpens();
+  const mark = quoteMark(quote, result, today);
+  return (
+    <tr data-chosen={result.chosen || undefined} className={rowLook("ordinary", result.chosen)}>
+      <th scope="row" className={`${CELL} ${result.chosen ? "font-semibold" : "font-normal"}`}>
+        <span className="flex items-center gap-3">
+          {canChoose && (
+            <RadioDot
+              name="quote"
+              checked={chosen === quote.id}
+              onChange={() => onChoose(quote.id)}
+              aria-label={`Always ${quote.boardHouse}`}
+            />
+          )}
+          {quote.boardHouse}
+        </span>
+      </th>
+      <td className={`${CELL} ${WIDE}`}>{orderWords(result)}</td>
+      <td className={`${CELL} ${NUMBER} ${WIDE}`}>
+        {result.ordered === null ? "" : countText(result.ordered)}
+      </td>
+      <td className={`${CELL} ${NUMBER}`}>
+        {result.landed.known ? (
+          <Figure
+            label={`${quote.boardHouse}, landed`}
+            value={moneyText(result.landed.value, reporting)}
+            {...opens(`quote:${quote.id}`)}
+          />
+        ) : (
+          <span className="whitespace-normal text-ink-2">{needWords(result.landed.needs)}</span>
+        )}
+      </td>
+      <td className={`${CELL} ${NUMBER} font-semibold`}>
+        {result.perBoard.known ? moneyText(result.perBoard.value, reporting) : ""}
+      </td>
+      <td className={`${CELL} ${WIDE}`}>
+        {quote.leadTimeDays === null ? "not known" : spanText(quote.leadTimeDays)}
+      </td>
+      <td className={`${CELL} text-ink-2 ${WIDE}`}>{boardWords(quote)}</td>
+      <td className={CELL}>
+        <Chip kind={mark.kind} className="align-middle">
+          {mark.word}
+        </Chip>
+      </td>
+      {canChange && (
+        <td className={CELL}>
+          <QuietButton onClick={() => onEdit(quote)} aria-label={`Change the quote of ${quote.boardHouse}`}>
+            Change
+          </QuietButton>
+        </td>
+      )}
+    </tr>
+  );
+}

@@ -1,0 +1,71 @@
+import { countText, moneyText, unitPriceText } from "#src/components/amount-text.ts";
+import { shortDayText } from "#src/components/day-text.ts";
+import type { Answer } from "#src/components/islands/offers/offer-answer.ts";
+import { isOldPrice, type Mark } from "#src/components/islands/offers/offer-words.ts";
+import { needWords } from "#src/costing/problem-words.ts";
+import type { BoardsResult, OfferStanding, QuoteResult } from "#src/costing/run-result.ts";
+import type { BoardQuoteView } from "#src/server/board-changes.ts";
+
+/** "2 lots of 50 and one of 100", or "120 boards at €1.900". */
+export function orderWords({ lots, ordered, breakReached, currency }: QuoteResult): string {
+  if (ordered === null) return "";
+  if (breakReached) return `${countText(ordered)} at ${unitPriceText(breakReached.price, currency)}`;
+  return lots
+    .map(
+      ({ quantity, count }) =>
+        `${count === 1 ? "a lot" : `${countText(count)} lots`} of ${countText(quantity)}`,
+    )
+    .join(" and ");
+}
+
+const WORDS: Partial<Record<OfferStanding, Mark>> = {
+  "no-price": { kind: "bad", word: "No price" },
+  "impossible-ladder": { kind: "bad", word: "Lots repeat" },
+  "amount-too-large": { kind: "bad", word: "Too large" },
+};
+
+/** The chip of a quote. */
+export function quoteMark(quote: BoardQuoteView, result: QuoteResult, today: string): Mark {
+  const { standing, chosen } = result;
+  if (standing === "expired")
+    return { kind: "bad", word: quote.validUntil ? `Ended ${shortDayText(quote.validUntil)}` : "Ended" };
+  if (standing === "no-rate") return { kind: "bad", word: `No rate for ${quote.currency}` };
+  const said = WORDS[standing];
+  if (said) return said;
+  if (quote.freight === null) return { kind: "caution", word: "Freight not known" };
+  if (chosen) return { kind: "good", word: "Chosen" };
+  return isOldPrice(quote, today) ? { kind: "caution", word: "Old price" } : { kind: "plain", word: "Fits" };
+}
+
+/** "58 × 42 mm, 2 layers, lead-free tin, petrol". */
+export function boardWords({ width, height, layers, finish, colour }: BoardQuoteView): string {
+  const size = width !== null && height !== null ? `${width} × ${height}\u00a0mm` : "size not stated";
+  const copper = layers === null ? "" : layers === 1 ? "1 layer" : `${layers} layers`;
+  return [size, copper, finish, colour].filter(Boolean).join(", ");
+}
+
+/** Who makes the boards, and how many, in one or two sentences. */
+export function boardsAnswer(boards: BoardsResult, currency: string): Answer {
+  if (boards.required === 0) return { deciding: "None are needed in this run.", rest: "" };
+  const chosen = boards.quotes.find(({ id }) => id === boards.chosen);
+  if (boards.toOrder === null)
+    return { deciding: "Not known yet.", rest: "With this yield no number of boards is enough." };
+  if (!chosen || chosen.ordered === null)
+    return {
+      deciding: "Nobody yet.",
+      rest: `${countText(boards.toOrder)} boards wait for a quote that can be used.`,
+    };
+  const ordered = `${chosen.boardHouse}, ${countText(chosen.ordered)} boards`;
+  if (!chosen.landed.known)
+    return { deciding: `${ordered}.`, rest: `What they cost ${needWords(chosen.landed.needs)}.` };
+  const each = chosen.perBoard.known ? moneyText(chosen.perBoard.value, currency) : "";
+  const spare = chosen.ordered - boards.required;
+  const left =
+    spare === 0
+      ? "There is no spare board in it."
+      : `${countText(spare)} of them ${spare === 1 ? "is" : "are"} spare.`;
+  return {
+    deciding: `${ordered}: ${moneyText(chosen.landed.value, currency)}.`,
+    rest: `That is ${each} for each board in a kit, with freight. ${left}`,
+  };
+}
