@@ -1,3 +1,4 @@
+import { roundedText } from "./decimal.ts";
 import { scaled } from "./grains.ts";
 import { kitsIn } from "./kit-costs.ts";
 import type { Head, HeadId } from "./run-result.ts";
@@ -81,7 +82,9 @@ function notesOf({ result }: WorkingContext, id: HeadId): string[] {
   if (id === "freight")
     return ["Freight, handling and small-order fees of each parcel, boards' freight included."];
   if (id === "work")
-    return [`Minutes of a first kit fall by the learning curve; ${result.work.hours} hours in all.`];
+    return [
+      `Minutes of a first kit fall by the learning curve; ${roundedText(result.work.hours, 2)} hours in all.`,
+    ];
   if (id === "one-off")
     return ["A charge spread over a number of kits is borne by the share of them made here."];
   return [];

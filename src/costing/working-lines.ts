@@ -57,6 +57,11 @@ export function number(value: string, unit = ""): WorkingAmount {
   return { kind: "number", value, unit };
 }
 
+/** An amount that is told in words: why an offer is not taken. */
+export function words(value: string): WorkingAmount {
+  return { kind: "words", value };
+}
+
 /** In place of an amount: what it needs. */
 export function notKnown(needs: Need[]): WorkingAmount {
   return { kind: "not-known", needs };

@@ -1,6 +1,6 @@
-import type { PartLine } from "./run-result.ts";
+import type { ConsideredOffer, OfferStanding, PartLine } from "./run-result.ts";
 import type { WorkingContext } from "./working.ts";
-import { count, from, money, type Sheet, type Step, step, summed } from "./working-lines.ts";
+import { count, from, money, type Sheet, type Step, step, summed, words } from "./working-lines.ts";
 import { orderSteps } from "./working-order.ts";
 import { percent } from "./working-run.ts";
 
@@ -63,21 +63,35 @@ function splitTotal({ result }: WorkingContext, part: PartLine): Step[] {
   return [...summed(lines), step("=", "All orders of the part", money(part.goods, result.currency), "3")];
 }
 
-/** The other offers, as they would come alone: why this one. */
+/** The other offers, as they would come alone, or why they are not taken. */
 function consideredSteps({ prepared, result }: WorkingContext, part: PartLine): Step[] {
-  const rivals = part.considered.filter(({ aloneLanded }) => aloneLanded !== null);
-  if (rivals.length < 2) return [];
-  return rivals.map((offer) => {
+  if (part.considered.length < 2) return [];
+  return part.considered.map((offer) => {
     const name = prepared.plan.suppliers.find(({ id }) => id === offer.supplier)?.name ?? offer.supplier;
-    const chosen = offer.chosen ? ", chosen" : "";
-    return step(
-      null,
-      `${name}: ${offer.quantity} with freight as though alone${chosen}`,
-      money(offer.aloneLanded ?? "0", result.currency),
-      "5",
-      { source: from("offers", part.id) },
-    );
+    const source = from("offers", part.id);
+    if (offer.aloneLanded === null) return step(null, name, words(whyNot(offer)), "5", { source });
+    const label = `${name}: ${offer.quantity} with freight as though alone${offer.chosen ? ", chosen" : ""}`;
+    return step(null, label, money(offer.aloneLanded, result.currency), "5", { source });
   });
+}
+
+const WHY_NOT: Record<OfferStanding, string> = {
+  usable: "freight not known",
+  short: "short",
+  expired: "old price",
+  "no-price": "no price",
+  "no-rate": "no rate",
+  "other-currency": "other currency",
+  "stock-not-known": "stock not known",
+  "impossible-ladder": "breaks do not fit",
+  "no-supplier": "no supplier",
+  "shut-out": "left out",
+  "minimum-not-reached": "below its minimum",
+  "amount-too-large": "too large",
+};
+
+function whyNot({ standing, shortBy }: ConsideredOffer): string {
+  return shortBy > 0 ? `${shortBy} short` : WHY_NOT[standing];
 }
 
 function notesOf(part: PartLine): string[] {
