@@ -35,7 +35,7 @@ test("nothing names a package registry's host or a path of one machine", () => {
   const words = [
     "grep",
     "-nIE",
-    "registry\\.[a-z]|/(root|home)/[a-z]",
+    "registry\\.[a-z]|(^|[^a-z])/(root|home)/[a-z]",
     "--",
     ".",
     ":!tests/structure/traps.test.ts",

@@ -9,7 +9,7 @@ export const GET = route({
   run: ({ query, ...given }) => seeInvitation(given, query.token),
 });
 
-/** Takes it. */
+/** Takes an invitation: as the person signed in, or with a new account. */
 export const POST = route({
   may: "anyone",
   input: TakenInvitation,

@@ -2,6 +2,7 @@ import { ownSessions } from "#src/server/account.ts";
 import { route } from "#src/server/route.ts";
 import { endSessionsOf } from "#src/server/store/session.ts";
 
+/** One's own sign-ins. */
 export const GET = route({
   may: "in-person",
   run: ({ db, user, session, now }) => ownSessions(db, user, session, now),

@@ -2,8 +2,10 @@ import { makeAccessToken, ownAccessTokens } from "#src/server/own-access-tokens.
 import { requireBrowser, route } from "#src/server/route.ts";
 import { NewAccessToken } from "#src/shapes/access-token.ts";
 
+/** One's own access tokens in this workshop. */
 export const GET = route({ may: "member", run: ownAccessTokens });
 
+/** Makes an access token; its secret is in this reply only. */
 export const POST = route({
   may: "member",
   input: NewAccessToken,

@@ -10,6 +10,7 @@ export const POST = route({
   },
 });
 
+/** Takes an invitation back. */
 export const DELETE = route({
   may: "manage-workshop",
   run: (given) => withdrawInvitation(given, given.params.invitation ?? ""),

@@ -2,6 +2,7 @@ import { giveRole, removePerson } from "#src/server/people.ts";
 import { requireBrowser, route } from "#src/server/route.ts";
 import { RoleChange } from "#src/shapes/workshop-person.ts";
 
+/** Gives a person another role. */
 export const PATCH = route({
   may: "manage-workshop",
   input: RoleChange,
@@ -11,6 +12,7 @@ export const PATCH = route({
   },
 });
 
+/** Takes a person out of the workshop. */
 export const DELETE = route({
   may: "manage-workshop",
   run: (given) => {
