@@ -3,6 +3,8 @@ import type { Delimiter } from "./sheet.ts";
 const TAB_STOP = 8;
 /** Share of the lines that may write across a gap without hiding it: a title set over the table, a long cell. */
 const ACROSS = 0.04;
+/** The same where a word of the heading stands after a gap of its own. */
+const ACROSS_HEADED = 0.15;
 
 /**
  * Columns of a text set out with blanks or runs of tabs, found from the places that stay empty from top to
@@ -38,16 +40,19 @@ function columnStarts(table: readonly string[]): number[] {
   for (const line of table)
     for (let at = 0; at < line.length; at++) if (line[at] !== " ") used[at] = (used[at] ?? 0) + 1;
   const across = Math.floor(table.length * ACROSS);
+  const acrossHeaded = Math.max(1, Math.floor(table.length * ACROSS_HEADED));
   const heading = table[0] ?? "";
   const starts: number[] = [];
   let gap = 2;
   for (let at = 0; at <= width; at++) {
-    if ((used[at] ?? 0) <= across) {
+    const begins = /\S/.test(heading[at] ?? "") && (heading[at - 1] ?? " ") === " ";
+    const apart = begins && (heading[at - 2] ?? " ") === " ";
+    if ((used[at] ?? 0) <= across && !begins) {
       gap++;
       continue;
     }
-    const headed = gap > 0 && /\S/.test(heading[at] ?? "") && (heading[at - 1] ?? " ") === " ";
-    if (gap >= 2 || headed) starts.push(at);
+    if (apart && gap === 0 && (used[at - 1] ?? 0) <= acrossHeaded) gap = 2;
+    if (gap >= 2 || (gap > 0 && begins)) starts.push(at);
     gap = 0;
   }
   return starts;

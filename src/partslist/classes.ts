@@ -111,8 +111,18 @@ const LETTERS: Readonly<Record<string, PartClass>> = {
   PCB: "board",
 };
 
+/** The edge of a word in any alphabet; `\\b` knows only ASCII letters and would miss "imprimé" and "Übertrager". */
+const EDGE = "(?:(?<![\\p{L}\\p{N}_])(?=[\\p{L}\\p{N}_])|(?<=[\\p{L}\\p{N}_])(?![\\p{L}\\p{N}_]))";
+
+function inAnyAlphabet(words: readonly (readonly [RegExp, PartClass])[]): [RegExp, PartClass][] {
+  return words.map(([pattern, partClass]) => [
+    new RegExp(pattern.source.replaceAll("\\b", EDGE), "iu"),
+    partClass,
+  ]);
+}
+
 /** Words of the text that say the class, in several languages; the first that is found counts. */
-const TEXTS: readonly (readonly [RegExp, PartClass])[] = [
+const TEXTS: readonly (readonly [RegExp, PartClass])[] = inAnyAlphabet([
   [
     /\b(?:transformer|transformator|übertrager|transformateur|transformador|trasformatore|relay|relais|relé|rel[ée]|przekaźnik|fuse|polyfuse|sicherung|fusible|fusibile|bezpiecznik|pojistka|säkring|buzzer|speaker|lautsprecher|microphone|mikrofon|motor|antenna|antenne|реле|предохранитель|трансформатор)\b/i,
     "other",
@@ -173,7 +183,7 @@ const TEXTS: readonly (readonly [RegExp, PartClass])[] = [
     /^(?:pcb|board|platine|leiterplatte|circuit board|printed circuit board|bare board|circuit imprimé|carte|placa|placa de circuito|circuito stampato|printplaat|płytka|deska plošných spojů|dps|kretskort|плата)\b|^(?:プリント)?基板|电路板|\b(?:main|bare|circuit|printed) board\b|\bpcb\b(?! (?:mount|terminal|header|power|connector|screw|socket|jack|relay))/i,
     "board",
   ],
-];
+]);
 
 /** Texts that overrule the letters of a designator: what a T, Q, X, D or R is, where letters mean several things. */
 const OVERRULES: Readonly<Record<string, readonly PartClass[]>> = {
@@ -186,7 +196,7 @@ const OVERRULES: Readonly<Record<string, readonly PartClass[]>> = {
   K: ["switch"],
   P: ["potentiometer"],
   VR: ["integrated-circuit"],
-  TR: ["potentiometer"],
+  TR: ["potentiometer", "other"],
   B: ["battery-holder", "switch"],
   J: ["switch"],
   U: ["connector"],

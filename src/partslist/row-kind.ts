@@ -141,8 +141,9 @@ function loneText(text: string, cells: readonly string[], shape: ListShape): Row
   if (REMARK.test(text) || text.length > TITLE_LENGTH) return skip("remark");
   if (!mapped && naming) return { kind: "part" };
   if (/[:：]$/.test(text)) return skip("section-title");
-  if (shape.quantityFill >= 0.6 || column === first || !naming) return skip("section-title");
-  return { kind: "part" };
+  if (column === first || !naming) return skip("section-title");
+  if (shape.quantityFill < 0.6 || text.split(/\s+/).length <= 3) return { kind: "part" };
+  return doubtful("looks-like-remark");
 }
 
 function firstFilledColumn(columns: ListColumns): number {

@@ -15,8 +15,12 @@ function factOf(row: Row): Fact[] {
   if (row.kind !== "line" && row.kind !== "question") return [];
   if (row.line === null) return [];
   const { designators, quantity, reading, mark } = row.line;
-  const fact: Fact = [designators.join(" "), quantity, reading?.si ?? null];
-  return [mark === "do-not-place" ? [...fact, "x"] : fact];
+  const si = reading?.si ?? null;
+  return [
+    mark === "do-not-place"
+      ? [designators.join(" "), quantity, si, "x"]
+      : [designators.join(" "), quantity, si],
+  ];
 }
 
 describe("lists as people write them", () => {
