@@ -71,5 +71,7 @@ export const onRequest = defineMiddleware(async (context, next) => {
   if (policy)
     response.headers.set("content-security-policy", contentSecurityPolicy(policy, context.locals.styleNonce));
   addSecurityHeaders(response.headers);
+  // Pages are personal, or have a secret in their address: after signing out, Back shows nothing.
+  if (!response.headers.has("cache-control")) response.headers.set("cache-control", "no-store");
   return response;
 });

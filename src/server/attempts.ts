@@ -1,7 +1,8 @@
 import type { Db } from "#db/client.ts";
+import { networkOf } from "./network-of.ts";
 import { Problem } from "./problem.ts";
 import { tokenHash } from "./secret-token.ts";
-import { countAttempt, forgetAttempts } from "./store/attempt.ts";
+import { countAttempt, forgetAttempts, takeBackAttempt } from "./store/attempt.ts";
 
 const MINUTE = 60 * 1000;
 const HOUR = 60 * MINUTE;
@@ -9,7 +10,7 @@ const HOUR = 60 * MINUTE;
 /**
  * How often something may be tried, counted by what the person gives and where they come from. `pair` is
  * one account from one address, so that a stranger's guesses from elsewhere do not lock its owner out before
- * `account`, which is wider, stops guesses from many addresses.
+ * `account`, which is wider, stops guesses from many addresses. The narrowest stands first.
  */
 export const ATTEMPTS = {
   "sign-in": { pair: [5, 15 * MINUTE], account: [30, HOUR], address: [50, 15 * MINUTE] },
@@ -39,7 +40,8 @@ function inWords(milliseconds: number): string {
 }
 
 function keyOf(what: Attempted, by: string, { account = "", address }: Trying): string {
-  const parts = { pair: [account, address], account: [account], address: [address] }[by] ?? [];
+  const network = networkOf(address);
+  const parts = { pair: [account, network], account: [account], address: [network] }[by] ?? [];
   return tokenHash([what, by, ...parts].join("\n"));
 }
 
@@ -59,10 +61,12 @@ export function countAttempts(db: Db, what: Attempted, trying: Trying, now: numb
   }
 }
 
-/** After a success, what this account tried from this address no longer counts. */
+/**
+ * After a success: the narrowest count, which the person's own slips filled, begins anew; wider ones take
+ * back this one attempt, so that only failures add up there.
+ */
 export function forgiveAttempts(db: Db, what: Attempted, trying: Trying): void {
-  for (const by of ["pair", "account"]) {
-    if (by === "account" && "pair" in ATTEMPTS[what]) continue;
-    forgetAttempts(db, keyOf(what, by, trying));
-  }
+  const [narrowest, ...wider] = Object.keys(ATTEMPTS[what]);
+  forgetAttempts(db, keyOf(what, narrowest ?? "", trying));
+  for (const by of wider) takeBackAttempt(db, keyOf(what, by, trying));
 }

@@ -108,6 +108,19 @@ describe("limits on signing in", () => {
     expect(await attempts(5, { body: wrong })).toEqual([401, 401, 401, 401, 401]);
   });
 
+  it("do not add up successes, however many sign in from one address", async () => {
+    withPassword();
+    const asking = { body: right };
+    expect(new Set(await attempts(60, asking))).toEqual(new Set([200]));
+  });
+
+  it("stop guesses at many accounts from one address", async () => {
+    const statuses = [];
+    for (let i = 0; i < 51; i++)
+      statuses.push((await call(signIn, { body: { ...wrong, email: `person${i}@example.org` } })).status);
+    expect(statuses.slice(49)).toEqual([401, 429]);
+  });
+
   it("stop guesses at one account from many addresses", async () => {
     withPassword();
     const statuses = [];

@@ -135,7 +135,8 @@ test("Ways in load no React: less than 30 kB of script, compressed, and nothing 
     if (/content security policy/i.test(message.text())) blocked.push(message.text());
   });
   for (const path of ["/sign-in", "/forgotten", "/sign-in/send-link"]) {
-    await page.goto(path, { waitUntil: "networkidle" });
+    const reply = await page.goto(path, { waitUntil: "networkidle" });
+    expect(reply?.headers()["cache-control"]).toBe("no-store");
     const bytes = await page.evaluate(() =>
       performance
         .getEntriesByType("resource")

@@ -25,6 +25,14 @@ export function forgetAttempts(db: Db, key: string): void {
   db.delete(attemptCounts).where(eq(attemptCounts.key, key)).run();
 }
 
+/** Takes one attempt back that turned out to be no failure. */
+export function takeBackAttempt(db: Db, key: string): void {
+  db.update(attemptCounts)
+    .set({ count: sql`max(${attemptCounts.count} - 1, 0)` })
+    .where(eq(attemptCounts.key, key))
+    .run();
+}
+
 export function dropEndedAttempts(db: Db, now: number): void {
   db.delete(attemptCounts).where(lte(attemptCounts.windowEndsAt, now)).run();
 }
