@@ -100,35 +100,6 @@ describe("limits on signing in", () => {
     const body = { ...right, email: "nobody@example.org" };
     expect(await attempts(6, { body })).toEqual([401, 401, 401, 401, 401, 429]);
   });
-
-  it("forget the failures after a success", async () => {
-    withPassword();
-    await attempts(4, { body: wrong });
-    expect(await attempts(1, { body: right })).toEqual([200]);
-    expect(await attempts(5, { body: wrong })).toEqual([401, 401, 401, 401, 401]);
-  });
-
-  it("do not add up successes, however many sign in from one address", async () => {
-    withPassword();
-    const asking = { body: right };
-    expect(new Set(await attempts(60, asking))).toEqual(new Set([200]));
-  });
-
-  it("stop guesses at many accounts from one address", async () => {
-    const statuses = [];
-    for (let i = 0; i < 51; i++)
-      statuses.push((await call(signIn, { body: { ...wrong, email: `person${i}@example.org` } })).status);
-    expect(statuses.slice(49)).toEqual([401, 429]);
-  });
-
-  it("stop guesses at one account from many addresses", async () => {
-    withPassword();
-    const statuses = [];
-    for (let i = 0; i < 31; i++)
-      statuses.push((await call(signIn, { body: wrong, address: `198.51.100.${i}` })).status);
-    expect(statuses.filter((status) => status === 401)).toHaveLength(30);
-    expect(statuses.at(-1)).toBe(429);
-  });
 });
 
 describe("the second factor", () => {
@@ -171,14 +142,15 @@ describe("the second factor", () => {
   });
 
   it("stops after five wrong codes, whatever address they come from and however often one signs in", async () => {
-    const { codes } = withFactor();
+    const { person, codes } = withFactor();
+    const half = () => app.signIn(person, false);
     for (let i = 0; i < 5; i++) {
-      const asking = { cookie: await half(), body: { code: "000000" }, address: `198.51.100.${i}` };
+      const asking = { cookie: half(), body: { code: "000000" }, address: `198.51.100.${i}` };
       expect((await call(finish, asking)).status).toBe(422);
     }
-    expect((await call(finish, { cookie: await half(), body: { code: codes[0] } })).status).toBe(429);
+    expect((await call(finish, { cookie: half(), body: { code: codes[0] } })).status).toBe(429);
     app.pass(15 * MINUTE);
-    expect((await call(finish, { cookie: await half(), body: { code: codes[0] } })).status).toBe(200);
+    expect((await call(finish, { cookie: half(), body: { code: codes[0] } })).status).toBe(200);
   });
 
   it("has to come within ten minutes of the password", async () => {
