@@ -42,6 +42,12 @@ export function wholeMoney(amount: string, currency: string): string {
   return withSign(roundedText(amount, 0), currency, false);
 }
 
+/** A figure of a money axis: without cents, unless the axis counts in less than a whole unit. */
+export function axisMoney(value: number, ticks: readonly number[], currency: string): string {
+  const whole = ticks.every(Number.isInteger);
+  return whole ? wholeMoney(String(value), currency) : money(String(value), currency);
+}
+
 /** A unit price: three decimals, more where the price has them: "€0.062", "€0.0043". */
 export function unitPrice(amount: string, currency: string): string {
   const places = Math.max(3, minorDecimals(currency), (amount.split(".")[1] ?? "").replace(/0+$/, "").length);

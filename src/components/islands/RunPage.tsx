@@ -6,6 +6,7 @@ import type { KitAddress } from "./kit-address.ts";
 import { Button } from "./parts/Button.tsx";
 import { ErrorBox } from "./parts/ErrorBox.tsx";
 import { Loading } from "./parts/Loading.tsx";
+import { Pair } from "./parts/Pair.tsx";
 import { useOpens } from "./plan/open-working.ts";
 import { runOf } from "./plan/run-of.ts";
 import { usePlan } from "./plan/use-plan.ts";
@@ -90,8 +91,12 @@ function Reckoned({ address, held, may }: ReckonedProps) {
             <Loading what="every run size" rows={8} />
           )}
         </Suspense>
-        <Inputs address={address} held={held} run={run} may={may} />
-        <PlanFile address={address} />
+        <Pair>
+          <Inputs address={address} held={held} run={run} may={may} />
+        </Pair>
+        <Pair>
+          <PlanFile address={address} />
+        </Pair>
       </div>
     </>
   );

@@ -15,7 +15,7 @@ export interface LastEdit {
 }
 
 /** A pause this long, and touching the same field again is a new edit. */
-const SAME_EDIT_MS = 3000;
+const SAME_EDIT_MS = 5000;
 
 /** Null when nothing was edited, or the signs were kept or undone. */
 export const lastEdit = moduleStore<LastEdit | null>(null);

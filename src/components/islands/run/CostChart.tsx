@@ -17,13 +17,13 @@ import {
   X_AXIS,
   Y_AXIS,
 } from "#src/components/islands/chart-theme.ts";
-import { money, wholeMoney } from "#src/components/written.ts";
+import { axisMoney, money } from "#src/components/written.ts";
 import { BrokenLine } from "./BrokenLine.tsx";
 import { ChartTip } from "./ChartTip.tsx";
 import { useChartScale } from "./chart-scale.ts";
-import { type CostPoint, pixels, type Span, unitCostTop } from "./cost-points.ts";
+import { type CostPoint, pixels, type Span, unitCostRange } from "./cost-points.ts";
 import { labelsWithRoom } from "./label-room.ts";
-import { roundStep, roundTicks } from "./round-ticks.ts";
+import { axisTicks, roundTicks } from "./round-ticks.ts";
 
 export interface NamedSpot {
   kits: number;
@@ -55,9 +55,8 @@ export interface CostChartProps {
 export function CostChart(props: CostChartProps) {
   const { points, span, run, width, narrow, currency } = props;
   const brings = pixels(props.brings);
-  const top = unitCostTop(points, run, brings);
-  const step = roundStep(top, 6);
-  const yTicks = roundTicks(0, Math.ceil(top / step) * step, 6);
+  const range = unitCostRange(points, run, brings);
+  const yTicks = axisTicks(range.low, range.high, 6);
   const written = (value: string | null) => (value === null ? "not known" : money(value, currency));
   return (
     <LineChart
@@ -77,11 +76,11 @@ export function CostChart(props: CostChartProps) {
       />
       <YAxis
         {...Y_AXIS}
-        domain={[0, yTicks.at(-1) ?? 0]}
+        domain={[yTicks[0] ?? 0, yTicks.at(-1) ?? 0]}
         ticks={yTicks}
         width={narrow ? 46 : Y_AXIS.width}
         allowDataOverflow
-        tickFormatter={(value: number) => wholeMoney(String(value), currency)}
+        tickFormatter={(value: number) => axisMoney(value, yTicks, currency)}
       />
       {brings !== null && <ReferenceLine y={brings} {...NET_LINE} />}
       {run >= span.from && run <= span.to && <ReferenceLine x={run} {...RUN_LINE} />}

@@ -69,7 +69,7 @@ export function CostSection({ plan, run, sweep, columns, narrow, opens, partial 
   return (
     <Section
       title={name}
-      aside={partial ?? (differ ? `${shown}, without what sale brings` : "used and spent are the same here")}
+      aside={partial ?? (differ ? `as ${shown}` : "used and spent are the same here")}
       actions={<ShowWorking of="the cost per kit" onClick={opens("per-kit-used").onOpen} />}
     >
       <div className="mb-3 flex flex-wrap gap-3">

@@ -10,12 +10,12 @@ import {
   Y_AXIS,
 } from "#src/components/islands/chart-theme.ts";
 import { HatchDefs } from "#src/components/islands/parts/HatchDefs.tsx";
-import { money, wholeMoney } from "#src/components/written.ts";
+import { axisMoney, money } from "#src/components/written.ts";
 import { BrokenLine } from "./BrokenLine.tsx";
 import { ChartTip } from "./ChartTip.tsx";
 import type { CostPoint, Span } from "./cost-points.ts";
 import { EvenAreas, EvenMarks } from "./EvenMarks.tsx";
-import { roundStep, roundTicks } from "./round-ticks.ts";
+import { axisTicks, roundTicks } from "./round-ticks.ts";
 
 /** A place where takings and cost cross, with its letter. */
 export interface LetteredCrossing {
@@ -41,8 +41,7 @@ export function EvenChart(props: EvenChartProps) {
   const { points, span, width, narrow, currency } = props;
   const top = Math.max(1, ...points.flatMap(({ total, kept }) => [total ?? 0, kept ?? 0]));
   const low = Math.min(0, ...points.map(({ kept }) => kept ?? 0));
-  const step = roundStep(top - low, 7);
-  const ticks = roundTicks(Math.floor(low / step) * step, Math.ceil(top / step) * step, 7);
+  const ticks = axisTicks(low, top, 7);
   const written = (value: string | null) => (value === null ? "not known" : money(value, currency));
   return (
     <LineChart
@@ -68,7 +67,7 @@ export function EvenChart(props: EvenChartProps) {
         domain={[ticks[0] ?? 0, ticks.at(-1) ?? 0]}
         ticks={ticks}
         width={narrow ? 54 : Y_AXIS.width}
-        tickFormatter={(value: number) => wholeMoney(String(value), currency)}
+        tickFormatter={(value: number) => axisMoney(value, ticks, currency)}
       />
       <EvenAreas points={points} />
       <Line {...TAKINGS_LINE} dataKey="kept" />

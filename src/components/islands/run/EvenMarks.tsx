@@ -72,7 +72,7 @@ export function EvenMarks(props: EvenChartProps) {
   );
   return (
     <g>
-      <AreaNames points={points} scale={scale} narrow={narrow} />
+      <AreaNames points={points} run={props.run} scale={scale} narrow={narrow} />
       <PaidBack {...props} scale={scale} foot={plot.y + plot.height} />
       {placed.map(({ letter, kits, place }) => (
         <Crossing
@@ -115,63 +115,53 @@ function Crossing({
   );
 }
 
-/** The middle of the widest area of a kind, and how tall it is there. */
-function roomIn(points: readonly CostPoint[], gain: GainArea["gain"], scale: Scale) {
-  const tallest = points.reduce<{ point: CostPoint; height: number } | null>((best, point) => {
-    if (point.total === null || point.kept === null) return best;
-    if (point.kept >= point.total !== (gain === "profit")) return best;
-    const top = scale({ kits: point.kits, money: Math.max(point.kept, point.total) });
-    const foot = scale({ kits: point.kits, money: Math.min(point.kept, point.total) });
-    const height = foot.y - top.y;
-    return !best || height > best.height ? { point, height } : best;
-  }, null);
-  return tallest;
+interface NamesProps {
+  points: readonly CostPoint[];
+  run: number;
+  scale: Scale;
+  narrow: boolean;
+}
+
+/** The area of a kind where it is tallest, with its middle and height in pixels. */
+function tallest(points: readonly CostPoint[], gain: GainArea["gain"], scale: Scale) {
+  let best = { x: 0, y: 0, height: 0 };
+  for (const { kits, total, kept } of points) {
+    if (total === null || kept === null || kept >= total !== (gain === "profit")) continue;
+    const [upper, lower] = [scale({ kits, money: total }), scale({ kits, money: kept })];
+    const height = Math.abs(upper.y - lower.y);
+    if (height > best.height) best = { x: upper.x, y: (upper.y + lower.y) / 2, height };
+  }
+  return best;
+}
+
+/** Where along the span the cost line has room below it for its name: not under the name of the run. */
+function costNameAt(points: readonly CostPoint[], run: number): CostPoint | undefined {
+  const known = points.filter(({ total }) => total !== null);
+  const at = (share: number) => known[Math.floor((known.length - 1) * share)];
+  const wanted = at(0.62);
+  const near = wanted && Math.abs(wanted.kits - run) < known.length * 0.2;
+  return near ? at(0.36) : wanted;
 }
 
 /** Names stand in their areas and at their lines. */
-function AreaNames({
-  points,
-  scale,
-  narrow,
-}: {
-  points: readonly CostPoint[];
-  scale: Scale;
-  narrow: boolean;
-}) {
-  const loss = roomIn(points, "loss", scale);
-  const profit = roomIn(points, "profit", scale);
-  const last = points.findLast(({ kept, total }) => kept !== null && total !== null);
-  const first = points.find(({ total }) => total !== null);
-  const nameAt = (found: typeof loss, share: number) => {
-    if (!found || found.height < 24) return null;
-    const { kits, total, kept } = found.point;
-    const end = gain(found.point) ? (last?.kits ?? kits) : (first?.kits ?? kits);
-    const money = ((total ?? 0) + (kept ?? 0)) / 2;
-    const toward =
-      kits + (end === kits ? (gain(found.point) ? -1 : 1) * share * (kits - (first?.kits ?? 0)) : 0);
-    return scale({ kits: toward, money });
-  };
-  const inLoss = nameAt(loss, 0);
-  const inProfit = nameAt(profit, 0.16);
-  const [costAt, takingsAt] = [first, last].map((point) =>
-    point
-      ? {
-          cost: scale({ kits: point.kits, money: point.total ?? 0 }),
-          takings: scale({ kits: point.kits, money: point.kept ?? 0 }),
-        }
-      : null,
-  );
+function AreaNames({ points, run, scale, narrow }: NamesProps) {
+  const [loss, profit] = [tallest(points, "loss", scale), tallest(points, "profit", scale)];
+  const cost = costNameAt(points, run);
+  const last = points.findLast(({ kept }) => kept !== null);
+  const costAt = cost && scale({ kits: cost.kits, money: cost.total ?? 0 });
+  const takingsAt = last && scale({ kits: last.kits, money: last.kept ?? 0 });
+  const profitShift = narrow ? 44 : 110;
   return (
     <g>
-      {inLoss && (
-        <text x={inLoss.x + 30} y={inLoss.y + 5} {...LINE_NAME} textAnchor="middle" fill={BAD}>
+      {loss.height > 30 && (
+        <text x={loss.x + (narrow ? 22 : 40)} y={loss.y + 5} {...LINE_NAME} textAnchor="middle" fill={BAD}>
           Loss
         </text>
       )}
-      {inProfit && (
+      {profit.height > 60 && (
         <text
-          x={inProfit.x}
-          y={inProfit.y + 5}
+          x={profit.x - profitShift}
+          y={profit.y + 5}
           {...LINE_NAME}
           stroke={PETROL_WASH}
           textAnchor="middle"
@@ -181,14 +171,14 @@ function AreaNames({
         </text>
       )}
       {costAt && (
-        <text x={costAt.cost.x + (narrow ? 8 : 88)} y={costAt.cost.y - 16} {...LINE_NAME} fill={INK}>
+        <text x={costAt.x} y={costAt.y + 26} {...LINE_NAME} textAnchor="middle" fill={INK}>
           Total cost
         </text>
       )}
       {takingsAt && (
         <text
-          x={takingsAt.takings.x - (narrow ? 40 : 96)}
-          y={takingsAt.takings.y + 12}
+          x={takingsAt.x - (narrow ? 40 : 96)}
+          y={takingsAt.y + 12}
           {...LINE_NAME}
           textAnchor="end"
           fill={PETROL}
@@ -198,10 +188,6 @@ function AreaNames({
       )}
     </g>
   );
-}
-
-function gain({ total, kept }: CostPoint): boolean {
-  return (kept ?? 0) >= (total ?? 0);
 }
 
 /** From the cost of the run back to the takings and down: how many sold pay for it. */

@@ -5,7 +5,7 @@ import { money } from "#src/components/written.ts";
 import type { RunResult } from "#src/costing/run-result.ts";
 import type { SweepColumns, SweepResult } from "#src/costing/sweep-result.ts";
 import type { Plan } from "#src/shapes/plan.ts";
-import { asSentence, changesInWords } from "./change-words.ts";
+import { changesInWords } from "./change-words.ts";
 
 interface WhyProps {
   plan: Plan;
@@ -32,7 +32,7 @@ export function WhyThisRun({ plan, run, sweep, columns, opens }: WhyProps) {
         <p>
           It is no sweet spot.
           {next && ` The next is ${next.kits}, at ${money(next.perKit, currency)} a kit.`}
-          {next && ` ${asSentence(`beyond it ${changesInWords(plan, next.changes)}`)}`}
+          {next && next.changes.length > 0 && ` With one more ${changesInWords(plan, next.changes)}.`}
         </p>
       )}
       {nextKit !== null && (

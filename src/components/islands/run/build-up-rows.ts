@@ -26,10 +26,11 @@ export interface BuildUp {
 }
 
 function headLabel(run: RunResult, id: HeadId): string {
-  const ordered = run.parts.filter(({ required }) => required > 0).length;
+  const kinds = run.parts.filter(({ required }) => required > 0).length;
+  const ordered = run.boards.quotes.find(({ chosen }) => chosen)?.ordered ?? null;
   const labels: Record<HeadId, string> = {
-    parts: `Parts, ${ordered} ${ordered === 1 ? "kind" : "kinds"}`,
-    boards: run.boards.toOrder === null ? "Boards" : `Boards, ${run.boards.toOrder} ordered`,
+    parts: `Parts, ${kinds} ${kinds === 1 ? "kind" : "kinds"}`,
+    boards: ordered === null ? "Boards" : `Boards, ${ordered} ordered`,
     freight: `Freight and duty, ${run.parcels} ${run.parcels === 1 ? "parcel" : "parcels"}`,
     packing: "Packing material",
     work: "Work, programming and test",

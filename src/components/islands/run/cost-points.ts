@@ -84,12 +84,20 @@ export function spanOfCrossings(run: number, crossings: readonly number[], end: 
 }
 
 /**
- * The money axis of unit costs. The smallest runs cost many times the usual kit; the axis stops at three times
- * the cost at the run, and the line leaves at the top.
+ * The money axis of unit costs, as its lowest and highest value. The smallest runs cost many times the usual
+ * kit; the axis ends at three times the cost at the run, and the line leaves at the top. It begins a little
+ * below the cheapest kit, so that steps of a few cents are to be seen.
  */
-export function unitCostTop(points: readonly CostPoint[], run: number, brings: number | null): number {
+export function unitCostRange(
+  points: readonly CostPoint[],
+  run: number,
+  brings: number | null,
+): { low: number; high: number } {
   const known = points.flatMap(({ perKit }) => (perKit === null ? [] : [perKit]));
   const atRun = points.find(({ kits }) => kits === run)?.perKit ?? middle(known);
   const highest = Math.max(0, ...known);
-  return Math.max(Math.min(highest, atRun * 3), (brings ?? 0) * 1.08, atRun * 1.2);
+  const lowest = Math.min(...known, brings ?? Number.POSITIVE_INFINITY);
+  const high = Math.max(Math.min(highest, atRun * 3), (brings ?? 0) * 1.06, atRun * 1.1);
+  const low = Number.isFinite(lowest) ? Math.max(0, lowest - (high - lowest) * 0.22) : 0;
+  return { low: low < high * 0.2 ? 0 : low, high };
 }

@@ -16,3 +16,13 @@ export function roundTicks(from: number, to: number, most: number): number[] {
   const last = Math.floor(to / step + 1e-9);
   return Array.from({ length: Math.max(0, last - first + 1) }, (_, place) => (first + place) * step);
 }
+
+/** Round figures that enclose two values. */
+export function axisTicks(low: number, high: number, most: number): number[] {
+  const step = roundStep(high - low, most - 1);
+  const first = Math.floor(low / step + 1e-9);
+  const last = Math.ceil(high / step - 1e-9);
+  return Array.from({ length: last - first + 1 }, (_, place) =>
+    Number(((first + place) * step).toPrecision(12)),
+  );
+}
