@@ -134,7 +134,8 @@ function presentChoice({ workshopId, kitId, ...choice }: PartChoiceRow): ChoiceV
   return choice;
 }
 
-function plainPartsList(stored: StoredPartsList): PlainPartsList {
+/** A parts list without money: for everybody who may see the kit. */
+export function plainPartsList(stored: StoredPartsList): PlainPartsList {
   return {
     money: false,
     kit: presentKit(stored.kit),

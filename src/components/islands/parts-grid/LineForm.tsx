@@ -1,10 +1,10 @@
-import { type ReactNode, useId, useRef, useState } from "react";
+import { type ReactNode, useId, useRef } from "react";
 import { listed } from "#src/components/count-words.ts";
+import { SavedField } from "#src/components/islands/forms/SavedField.tsx";
 import { Button } from "#src/components/islands/parts/Button.tsx";
 import { CheckBox } from "#src/components/islands/parts/CheckBox.tsx";
 import { ChoiceField } from "#src/components/islands/parts/ChoiceField.tsx";
 import { holdFocus, useModal } from "#src/components/islands/parts/held-focus.ts";
-import { LongTextField, TextField } from "#src/components/islands/parts/TextField.tsx";
 import { CLASS_WORDS, CLASSES_IN_ORDER, MARK_WORDS, MARKS_IN_ORDER } from "#src/components/part-words.ts";
 import type { PricedPartsList } from "#src/server/present.ts";
 import type { PartFields } from "#src/shapes/part.ts";
@@ -31,47 +31,6 @@ export interface LineFormProps {
   canChoose: boolean;
   deeds: PartsDeeds;
   onClose: () => void;
-}
-
-/** A field that is saved when it is left: its entry stays, with the reason, where it cannot be taken. */
-function SavedField({
-  label,
-  value,
-  save,
-  off,
-  hint,
-  long,
-  inputMode,
-}: {
-  label: string;
-  value: string;
-  save: (text: string) => string | null;
-  off: boolean;
-  hint?: ReactNode;
-  long?: boolean;
-  inputMode?: "numeric" | "decimal";
-}) {
-  const [draft, setDraft] = useState<string | null>(null);
-  const [wrong, setWrong] = useState<string>();
-  const leave = () => {
-    if (draft === null) return;
-    const message = draft === value ? null : save(draft);
-    setWrong(message ?? undefined);
-    if (message === null) setDraft(null);
-  };
-  const Entry = long ? LongTextField : TextField;
-  return (
-    <Entry
-      label={label}
-      value={draft ?? value}
-      wrong={wrong}
-      hint={hint}
-      off={off}
-      inputMode={inputMode}
-      onChange={(change: { currentTarget: { value: string } }) => setDraft(change.currentTarget.value)}
-      onBlur={leave}
-    />
-  );
 }
 
 /** All fields of one line, in a sheet at the right; on a phone over the page. Each is saved when it is left. */

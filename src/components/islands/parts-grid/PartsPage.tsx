@@ -30,6 +30,8 @@ export interface PartsProps {
   address: KitAddress;
   /** As the page was made: what the answer says before the list is here. */
   first: { lines: number; revision: string; kits: number };
+  /** Another kit of the workshop that has a list, to be copied as an example. */
+  example: { id: string; name: string } | null;
   canEdit: boolean;
   canChoose: boolean;
   money: boolean;
@@ -80,6 +82,7 @@ function Parts(props: PartsProps & { bought: Bought | null }) {
           list={list?.money ? list : null}
           kits={bought?.plan.run.kits ?? first.kits}
           canEdit={canEdit}
+          example={props.example}
         />
       ) : list ? (
         <PartsWorkbench
@@ -99,11 +102,12 @@ function Parts(props: PartsProps & { bought: Bought | null }) {
       ) : (
         <Loading what="Parts list" rows={Math.min(lines, 12) + 1} />
       )}
-      {last && list && (
-        <p className="mt-6">
-          <a href={kitPath(address, "/parts/changes")}>What changed since rev {last.revision}</a>
-        </p>
-      )}
+      <p className="mt-6 flex flex-wrap gap-x-8 gap-y-2">
+        {last && <a href={kitPath(address, "/parts/changes")}>What changed since rev {last.revision}</a>}
+        <a href={kitPath(address, "/details")} className="tablet:hidden">
+          Editions and board
+        </a>
+      </p>
     </>
   );
 }
@@ -114,9 +118,7 @@ function Actions({ address }: { address: KitAddress }) {
       <a href={kitPath(address, "/details")} className={`${buttonLook()} max-tablet:hidden`}>
         Editions and board
       </a>
-      <Button className="max-tablet:hidden" onClick={() => addLine.change((count) => count + 1)}>
-        Add a line
-      </Button>
+      <Button onClick={() => addLine.change((count) => count + 1)}>Add a line</Button>
       <a href={kitPath(address, "/parts/bring-in")} className={buttonLook("primary")}>
         Bring in a list
       </a>

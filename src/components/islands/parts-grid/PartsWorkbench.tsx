@@ -6,6 +6,7 @@ import { SearchIcon } from "#src/components/islands/parts/Icons.tsx";
 import { Loading } from "#src/components/islands/parts/Loading.tsx";
 import { usePhone } from "#src/components/islands/parts/phone.ts";
 import { QuietButton } from "#src/components/islands/parts/QuietButton.tsx";
+import { Section } from "#src/components/islands/parts/Section.tsx";
 import { TextField } from "#src/components/islands/parts/TextField.tsx";
 import { type ModuleStore, useStore } from "#src/components/islands/plan/module-store.ts";
 import { openWorking } from "#src/components/islands/plan/open-working.ts";
@@ -25,6 +26,7 @@ import {
   piecesIn,
   type TotalRow,
 } from "./grid-rows.ts";
+import { LineEntry } from "./LineEntry.tsx";
 import { LineForm } from "./LineForm.tsx";
 import { editorState, NOTHING_EDITED } from "./list-editor.ts";
 import { moreColumns } from "./more-columns.ts";
@@ -131,6 +133,8 @@ export function PartsWorkbench(props: WorkbenchProps) {
   draftFocus.current = focusDraft;
   /** The empty line moves as lines are added; it is gone to when the grid shows it at its new place. */
   const [wish, setWish] = useState(0);
+  /** On a phone: how many asked-for lines have been entered. */
+  const [entering, setEntering] = useState(0);
   useEffect(() => {
     if (asked + wish === 0) return;
     const frame = requestAnimationFrame(() => draftFocus.current());
@@ -205,6 +209,13 @@ export function PartsWorkbench(props: WorkbenchProps) {
         )}
         {bought && <p className="type-label ml-auto text-ink-2">{basis(bought)}</p>}
       </div>
+      {phone && canEdit && list.money && entering < asked && (
+        <Section title="A new line">
+          <div className="pb-6">
+            <LineEntry address={address} list={list} onAdded={() => setEntering(asked)} />
+          </div>
+        </Section>
+      )}
       {list.money && <EditorBoxes address={address} list={list} work={work} />}
       {chosen.length > 0 && (
         <ChosenBar

@@ -1,0 +1,260 @@
+import { type FormEvent, useState } from "react";
+import { CallFailed, call } from "#src/components/islands/call.ts";
+import { SavedField } from "#src/components/islands/forms/SavedField.tsx";
+import { type KitAddress, kitApi } from "#src/components/islands/kit-address.ts";
+import { Button } from "#src/components/islands/parts/Button.tsx";
+import { ChoiceField } from "#src/components/islands/parts/ChoiceField.tsx";
+import { Dialog } from "#src/components/islands/parts/Dialog.tsx";
+import { DownIcon, UpIcon } from "#src/components/islands/parts/Icons.tsx";
+import { QuietButton } from "#src/components/islands/parts/QuietButton.tsx";
+import { TextField } from "#src/components/islands/parts/TextField.tsx";
+import { showToast } from "#src/components/islands/parts/toasts.ts";
+import { saving } from "#src/components/islands/plan/saving.ts";
+import type {
+  DELETE,
+  GET as LOSS,
+  PATCH,
+} from "#src/pages/api/workshops/[workshop]/kits/[kit]/editions/[edition]/index.ts";
+import type { GET, POST, PUT } from "#src/pages/api/workshops/[workshop]/kits/[kit]/editions/index.ts";
+import type { EditionLoss } from "#src/server/edition-changes.ts";
+import type { EditionView } from "#src/server/present.ts";
+import { EDITIONS_MOST } from "#src/shapes/limits.ts";
+import { lossWords } from "./loss-words.ts";
+
+export interface EditionsProps {
+  address: KitAddress;
+  first: EditionView[];
+  canEdit: boolean;
+}
+
+function whole(text: string): number | null {
+  return /^\d{1,7}$/.test(text.trim()) ? Number(text.trim()) : null;
+}
+
+/** What the server says of a change it refuses: its first sentence for a field, or what happened. */
+function refusal(error: unknown): string {
+  if (!(error instanceof CallFailed)) throw error;
+  const { title, detail, errors } = error.problem;
+  return errors?.[0]?.message ?? `${title} ${detail}`;
+}
+
+/** The editions of a kit: names, shares of the run, boards; added, reordered, removed. */
+export default function Editions({ address, first, canEdit }: EditionsProps) {
+  const [editions, setEditions] = useState(first);
+  const [leaving, setLeaving] = useState<{ edition: EditionView; loss: EditionLoss } | null>(null);
+  const path = (id: string) => kitApi(address, `/editions/${id}`);
+  const saved = () => saving.change((now) => ({ ...now, savedAt: Date.now() }));
+
+  async function reload() {
+    setEditions(await call<typeof GET>("GET", kitApi(address, "/editions")));
+  }
+
+  async function change(
+    edition: EditionView,
+    fields: Partial<Pick<EditionView, "name" | "weight" | "boardsPerKit">>,
+  ) {
+    try {
+      const after = await call<typeof PATCH>("PATCH", path(edition.id), {
+        ...fields,
+        version: edition.version,
+      });
+      setEditions((now) => now.map((one) => (after && one.id === edition.id ? after : one)));
+      saved();
+      return null;
+    } catch (error) {
+      const message = refusal(error);
+      if (error instanceof CallFailed && error.problem.code === "changed-meanwhile") await reload();
+      return message;
+    }
+  }
+
+  async function move(place: number, by: 1 | -1) {
+    const order = editions.map(({ id }) => id);
+    const [id] = order.splice(place, 1);
+    if (id === undefined) return;
+    order.splice(place + by, 0, id);
+    try {
+      setEditions(await call<typeof PUT>("PUT", kitApi(address, "/editions"), { editions: order }));
+      saved();
+    } catch (error) {
+      showToast({ kind: "fault", text: refusal(error) });
+    }
+  }
+
+  async function ask(edition: EditionView) {
+    const loss = await call<typeof LOSS>("GET", path(edition.id));
+    setLeaving({ edition, loss });
+  }
+
+  async function remove({ id, version }: EditionView) {
+    setLeaving(null);
+    try {
+      await call<typeof DELETE>("DELETE", `${path(id)}?version=${version}`);
+      setEditions((now) => now.filter((one) => one.id !== id));
+      saved();
+    } catch (error) {
+      showToast({ kind: "fault", text: refusal(error) });
+      await reload();
+    }
+  }
+
+  return (
+    <div>
+      <ul aria-label="Editions">
+        {editions.map((edition, place) => (
+          <li key={edition.id} className="hairline-b flex flex-wrap items-start gap-x-5 gap-y-3 py-4">
+            <SavedField
+              label="Name"
+              className="w-full tablet:w-64"
+              value={edition.name}
+              off={!canEdit}
+              save={(text) => change(edition, { name: text })}
+            />
+            <SavedField
+              label="Share of the run"
+              className="w-36"
+              value={String(edition.weight)}
+              off={!canEdit}
+              inputMode="numeric"
+              save={(text) => {
+                const weight = whole(text);
+                return weight === null
+                  ? "Write a whole number; 0 makes none of it."
+                  : change(edition, { weight });
+              }}
+            />
+            <SavedField
+              label="Boards in a kit"
+              className="w-36"
+              value={String(edition.boardsPerKit)}
+              off={!canEdit}
+              inputMode="numeric"
+              save={(text) => {
+                const boardsPerKit = whole(text);
+                return boardsPerKit === null || boardsPerKit > 100
+                  ? "Write a whole number up to 100."
+                  : change(edition, { boardsPerKit });
+              }}
+            />
+            {canEdit && (
+              <div className="flex items-center gap-2 tablet:mt-[30px]">
+                <OrderKey
+                  label={`${edition.name}, up`}
+                  off={place === 0}
+                  onPress={() => void move(place, -1)}
+                  up
+                />
+                <OrderKey
+                  label={`${edition.name}, down`}
+                  off={place === editions.length - 1}
+                  onPress={() => void move(place, 1)}
+                />
+                {editions.length > 1 && (
+                  <QuietButton className="ml-2" onClick={() => void ask(edition)}>
+                    Remove
+                  </QuietButton>
+                )}
+              </div>
+            )}
+          </li>
+        ))}
+      </ul>
+      {canEdit && editions.length < EDITIONS_MOST && (
+        <NewEdition
+          address={address}
+          editions={editions}
+          onMade={(made) => setEditions([...editions, made])}
+        />
+      )}
+      <Dialog
+        open={leaving !== null}
+        title={`Remove ${leaving?.edition.name ?? ""}?`}
+        safe={{ label: "Keep it", run: () => setLeaving(null) }}
+        act={{ label: "Remove it", removes: true, run: () => leaving && void remove(leaving.edition) }}
+      >
+        {leaving && <p>{lossWords(leaving.loss)}</p>}
+      </Dialog>
+    </div>
+  );
+}
+
+function OrderKey({
+  label,
+  off,
+  onPress,
+  up,
+}: {
+  label: string;
+  off: boolean;
+  onPress: () => void;
+  up?: boolean;
+}) {
+  const Icon = up ? UpIcon : DownIcon;
+  return (
+    <button
+      type="button"
+      aria-label={label}
+      aria-disabled={off || undefined}
+      onClick={off ? undefined : onPress}
+      className={`flex size-10 items-center justify-center rounded-control border-[1.5px] ${off ? "border-dashed border-rule-2 bg-tint text-ink-2" : "border-ink bg-sheet hover:bg-petrol-wash"}`}
+    >
+      <Icon />
+    </button>
+  );
+}
+
+function NewEdition({
+  address,
+  editions,
+  onMade,
+}: {
+  address: KitAddress;
+  editions: readonly EditionView[];
+  onMade: (edition: EditionView) => void;
+}) {
+  const [name, setName] = useState("");
+  const [like, setLike] = useState(editions[0]?.id ?? "");
+  const [wrong, setWrong] = useState<string>();
+  const pattern = editions.find(({ id }) => id === like);
+
+  async function add(submit: FormEvent) {
+    submit.preventDefault();
+    try {
+      const boardsPerKit = pattern?.boardsPerKit ?? editions[0]?.boardsPerKit ?? 1;
+      const body = { name, weight: 1, boardsPerKit, like: pattern ? like : null };
+      const made = await call<typeof POST>("POST", kitApi(address, "/editions"), body);
+      setName("");
+      setWrong(undefined);
+      if (made) onMade(made);
+      saving.change((now) => ({ ...now, savedAt: Date.now() }));
+    } catch (error) {
+      setWrong(refusal(error));
+    }
+  }
+
+  return (
+    <form onSubmit={(submit) => void add(submit)} className="mt-5 flex flex-wrap items-start gap-x-5 gap-y-3">
+      <TextField
+        label="Another edition"
+        className="w-full tablet:w-64"
+        placeholder="Bare board"
+        value={name}
+        wrong={wrong}
+        onChange={({ currentTarget }) => setName(currentTarget.value)}
+      />
+      <ChoiceField
+        label="Begins with"
+        className="w-full tablet:w-72"
+        value={like}
+        choices={[
+          ...editions.map(({ id, name: called }) => ({ value: id, label: `what is in ${called}` })),
+          { value: "", label: "nothing" },
+        ]}
+        onChange={({ currentTarget }) => setLike(currentTarget.value)}
+      />
+      <Button type="submit" className="tablet:mt-[30px]">
+        Add the edition
+      </Button>
+    </form>
+  );
+}
