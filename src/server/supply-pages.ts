@@ -4,13 +4,15 @@ import type { Role } from "#src/shapes/limits.ts";
 import { boards } from "./board-changes.ts";
 import { today } from "./clock.ts";
 import { type RateView, rates } from "./currency-rate-changes.ts";
-import { kitOffers } from "./kit-offers.ts";
+import { kitOffers, type OfferPart } from "./kit-offers.ts";
 import { kitPlan } from "./kit-plan.ts";
+import { supplierOffers } from "./offer-changes.ts";
 import { Problem } from "./problem.ts";
 import { requirePermission } from "./route.ts";
 import { quotedCurrencies } from "./store/board-quote.ts";
 import type { KitRow } from "./store/kit.ts";
 import type { WorkshopRow } from "./store/membership.ts";
+import { partsOf } from "./store/part.ts";
 import { type SupplierView, suppliers } from "./supplier-changes.ts";
 
 /** Whose page it is. */
@@ -79,5 +81,29 @@ export function boardsPage({ db, workshop, role, kit }: Asking & { kit: KitRow }
     today: day,
     canChange: can(role, "change-supply"),
     canChoose: can(role, "change-run"),
+  };
+}
+
+/** All that the page of one supplier shows. */
+export function supplierPage({ db, workshop, role }: Asking, supplier: string) {
+  requirePermission(role, "see-money");
+  const offers = supplierOffers({ db, workshop }, supplier);
+  const offered = new Set(offers.map(({ partId }) => partId));
+  return {
+    workshop: workshop.id,
+    supplier,
+    suppliers: suppliers({ db, workshop }),
+    parts: partsOf(db, workshop.id)
+      .filter(({ id }) => offered.has(id))
+      .map(
+        ({ id, name, spec, class: partClass, value }): OfferPart => ({
+          ...{ id, name, spec, class: partClass, value },
+          lines: [],
+          designators: "",
+          choiceVersion: 0,
+        }),
+      ),
+    offers,
+    canChange: can(role, "change-supply"),
   };
 }

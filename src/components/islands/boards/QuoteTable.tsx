@@ -57,7 +57,7 @@ export function QuoteTable(props: QuoteTableProps) {
             <span className="heard-only">State</span>
           </th>
           {canChange && (
-            <th scope="col" className={HEAD_CELL}>
+            <th scope="col" className={`${HEAD_CELL} ${WIDE}`}>
               <span className="heard-only">Change</span>
             </th>
           )}
@@ -99,6 +99,11 @@ function Row({
 }: QuoteTableProps & { row: QuoteRow }) {
   const opens = useOpens();
   const mark = quoteMark(quote, result, today);
+  const change = (
+    <QuietButton onClick={() => onEdit(quote)} aria-label={`Change the quote of ${quote.boardHouse}`}>
+      Change
+    </QuietButton>
+  );
   return (
     <tr data-chosen={result.chosen || undefined} className={rowLook("ordinary", result.chosen)}>
       <th scope="row" className={`${CELL} ${result.chosen ? "font-semibold" : "font-normal"}`}>
@@ -140,14 +145,9 @@ function Row({
         <Chip kind={mark.kind} className="align-middle">
           {mark.word}
         </Chip>
+        {canChange && <span className="mt-1 block tablet:hidden">{change}</span>}
       </td>
-      {canChange && (
-        <td className={CELL}>
-          <QuietButton onClick={() => onEdit(quote)} aria-label={`Change the quote of ${quote.boardHouse}`}>
-            Change
-          </QuietButton>
-        </td>
-      )}
+      {canChange && <td className={`${CELL} ${WIDE}`}>{change}</td>}
     </tr>
   );
 }

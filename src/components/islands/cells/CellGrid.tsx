@@ -13,6 +13,7 @@ import {
 import { AgGridReact } from "ag-grid-react";
 import { type ClipboardEvent, useEffect, useMemo, useRef } from "react";
 import { gridTheme } from "#src/components/islands/grid-theme.ts";
+import { usePhone } from "#src/components/islands/parts/phone.ts";
 import { showToast } from "#src/components/islands/parts/toasts.ts";
 import { layBlock, readBlock, writeBlock } from "./block.ts";
 import { type CellColumn, type CellEdit, type CellFault, type CellRow, cellKey } from "./cell-column.ts";
@@ -28,7 +29,7 @@ const MODULES = [
 ];
 
 /** Beyond so many rows the grid scrolls inside itself. */
-const ROWS_IN_FULL = 30;
+const ROWS_IN_FULL = 18;
 const ROW = 37;
 
 export interface CellGridProps<Row extends CellRow, Fields> {
@@ -50,9 +51,10 @@ export default function CellGrid<Row extends CellRow, Fields>(props: CellGridPro
   const grid = useRef<AgGridReact<Row>>(null);
   const shown = useRef(faults);
   shown.current = faults;
+  const phone = usePhone();
   const definitions = useMemo(
-    () => columns.map((column) => definition(column, canEdit, () => shown.current)),
-    [columns, canEdit],
+    () => columns.map((column) => definition(column, canEdit, !phone, () => shown.current)),
+    [columns, canEdit, phone],
   );
   // biome-ignore lint/correctness/useExhaustiveDependencies: the cells read faults through a ref.
   useEffect(() => grid.current?.api?.refreshCells({ force: true }), [faults]);
@@ -118,6 +120,7 @@ export default function CellGrid<Row extends CellRow, Fields>(props: CellGridPro
 function definition<Row extends CellRow, Fields>(
   column: CellColumn<Row, Fields>,
   canEdit: boolean,
+  holds: boolean,
   faults: () => ReadonlyMap<string, CellFault>,
 ): ColDef<Row> {
   const faultIn = (row: Row) => faults().get(cellKey({ row: row.id, column: column.key }));
@@ -143,7 +146,7 @@ function definition<Row extends CellRow, Fields>(
     width: column.width ?? 120,
     flex: column.grows ? 1 : undefined,
     minWidth: column.grows ? column.width : undefined,
-    pinned: column.held ? "left" : undefined,
+    pinned: column.held && holds ? "left" : null,
     lockPinned: true,
   };
 }

@@ -10,7 +10,8 @@ import { Section } from "#src/components/islands/parts/Section.tsx";
 import { SettleList } from "#src/components/islands/parts/SettleList.tsx";
 import { PAIRS } from "#src/components/page-look.ts";
 import { withoutWords } from "#src/costing/problem-words.ts";
-import type { OfferPart } from "#src/server/kit-offers.ts";
+import type { KitOffers, OfferPart } from "#src/server/kit-offers.ts";
+import type { OfferView } from "#src/server/offer-changes.ts";
 import { type KitSupply, type KitSupplyProps, useKitSupply } from "./kit-supply.ts";
 import { LinesTable, lineMark } from "./LinesTable.tsx";
 import { OrdersTable } from "./OrdersTable.tsx";
@@ -168,6 +169,18 @@ function Lines({ supply, today }: { supply: KitSupply; today: string }) {
   );
 }
 
+/** Offers in the order of the list, then by supplier. */
+function inListOrder({ parts, suppliers, offers }: KitOffers): OfferView[] {
+  const placeOf = new Map(parts.map(({ id }, place) => [id, place]));
+  const nameOf = new Map(suppliers.map(({ id, name }) => [id, name]));
+  return [...offers].sort(
+    (a, b) =>
+      (placeOf.get(a.partId) ?? 0) - (placeOf.get(b.partId) ?? 0) ||
+      (nameOf.get(a.supplierId) ?? "").localeCompare(nameOf.get(b.supplierId) ?? "") ||
+      a.id.localeCompare(b.id),
+  );
+}
+
 /** Every offer in one sheet, for editing and pasting. */
 function Everything({ props, supply }: { props: OffersOverviewProps; supply: KitSupply }) {
   const { address, canChange, styleNonce } = props;
@@ -178,6 +191,7 @@ function Everything({ props, supply }: { props: OffersOverviewProps; supply: Kit
     [parts, suppliers, offers, address.kit],
   );
   const store = useMemo(() => offersSheet(address), [address]);
+  const rows = useMemo(() => inListOrder({ parts, suppliers, offers }), [parts, suppliers, offers]);
   const nameOf = ({ partId, supplierId }: (typeof offers)[number]) =>
     `${parts.find(({ id }) => id === partId)?.name ?? "A part"} from ${supply.nameOf(supplierId)}`;
   return (
@@ -191,7 +205,7 @@ function Everything({ props, supply }: { props: OffersOverviewProps; supply: Kit
       ) : (
         <Sheet
           label="Every offer"
-          rows={offers}
+          rows={rows}
           canEdit={canChange}
           {...{ columns, nameOf, store, styleNonce }}
         />
