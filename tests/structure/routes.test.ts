@@ -35,6 +35,7 @@ const DECISIONS: Record<string, May> = {
   "POST /invitation": "anyone",
   "GET /openapi.json": "anyone",
   "POST /reset": "anyone",
+  "GET /samples/[file]": "anyone",
   "POST /sign-in": "anyone",
   "POST /sign-in/link": "anyone",
   "POST /sign-in/second-factor": "half-signed-in",

@@ -1,0 +1,14 @@
+import type { ImportView } from "./use-import.ts";
+
+/** What the trail of a list needs to know. */
+export interface TrailCounts {
+  matched: number;
+  leftOut: number;
+  open: number;
+}
+
+export function trailCounts(view: Pick<ImportView, "columns" | "questions">): TrailCounts {
+  const { columns } = view.columns;
+  const leftOut = columns.filter(({ meaning }) => meaning === "leave-out").length;
+  return { matched: columns.length - leftOut, leftOut, open: view.questions.must + view.questions.look };
+}
