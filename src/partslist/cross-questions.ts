@@ -10,12 +10,18 @@ export function askAboutTwoRows(works: readonly RowWork[], context: QuestionCont
   for (const work of works) {
     const line = work.line;
     if (line === null) continue;
-    const clashes = new Map<RowWork, string[]>();
-    for (const name of new Set(line.designators)) {
-      const other = seen.get(name.toUpperCase());
-      if (other === undefined) seen.set(name.toUpperCase(), work);
-      else clashes.set(other, [...(clashes.get(other) ?? []), name]);
+    let clashes: Map<RowWork, string[]> | null = null;
+    for (const name of line.designators) {
+      const key = name.toUpperCase();
+      const other = seen.get(key);
+      if (other === undefined) seen.set(key, work);
+      else if (other !== work) {
+        clashes ??= new Map();
+        const names = clashes.get(other) ?? [];
+        if (!names.includes(name)) clashes.set(other, [...names, name]);
+      }
     }
+    if (clashes === null) continue;
     const first = [...clashes][0];
     if (first === undefined) continue;
     const designators = [...clashes.values()].flat();

@@ -1,10 +1,9 @@
 import { compareDesignators } from "./designators.ts";
 import type { DraftLine, JoinOffer, Row } from "./draft.ts";
 
-/** What two lines must have in common to be the same part. A part nobody named is like no other. */
-function identity(line: DraftLine): string | null {
+/** What two lines must have in common to be the same part. */
+function identity(line: DraftLine): string {
   const value = line.reading === null ? line.value : `${line.reading.si} ${line.reading.unit}`;
-  if (value === null && line.partNumber === null && line.description === null) return null;
   const offers = line.offers.map((offer) => `${offer.supplier ?? ""} ${offer.orderCode ?? ""}`).join(";");
   return [
     line.class,
@@ -26,20 +25,42 @@ function identity(line: DraftLine): string | null {
 
 /** Groups of two and more lines that say the same part: one row for each designator, grown from a drawing. */
 export function joinOffers(rows: readonly Row[]): JoinOffer[] {
-  const groups = new Map<string, { row: number; line: DraftLine }[]>();
+  const alike = new Map<string, Placed[]>();
   for (const row of rows) {
-    if (row.kind !== "line" && row.kind !== "question") continue;
-    if (row.line === null || row.line.designators.length === 0) continue;
-    const key = identity(row.line);
+    if ((row.kind !== "line" && row.kind !== "question") || row.line === null) continue;
+    const { line } = row;
+    if (line.designators.length === 0) continue;
+    // Most lines of a list differ in one text; only those that do not are compared whole.
+    const key = line.partNumber ?? line.description ?? line.reading?.si ?? line.value;
     if (key === null) continue;
-    const group = groups.get(key);
-    if (group) group.push({ row: row.row, line: row.line });
-    else groups.set(key, [{ row: row.row, line: row.line }]);
+    const group = alike.get(key);
+    if (group) group.push({ row: row.row, line });
+    else alike.set(key, [{ row: row.row, line }]);
   }
-  return [...groups.values()].filter((group) => group.length > 1).map(offerOf);
+  return [...alike.values()]
+    .filter((group) => group.length > 1)
+    .flatMap(equalGroups)
+    .map(offerOf)
+    .sort((a, b) => (a.rows[0] ?? 0) - (b.rows[0] ?? 0));
 }
 
-function offerOf(group: readonly { row: number; line: DraftLine }[]): JoinOffer {
+interface Placed {
+  row: number;
+  line: DraftLine;
+}
+
+function equalGroups(candidates: readonly Placed[]): Placed[][] {
+  const groups = new Map<string, Placed[]>();
+  for (const one of candidates) {
+    const key = identity(one.line);
+    const group = groups.get(key);
+    if (group) group.push(one);
+    else groups.set(key, [one]);
+  }
+  return [...groups.values()].filter((group) => group.length > 1);
+}
+
+function offerOf(group: readonly Placed[]): JoinOffer {
   const quantities = group.map(({ line }) => line.quantity);
   return {
     rows: group.map(({ row }) => row),

@@ -14,6 +14,7 @@ interface Table {
  * two builds of one board. Adding them up would count parts twice, so the person is asked which to take.
  */
 export function askAboutTables(works: readonly RowWork[], context: QuestionContext): void {
+  if (!works.some((work) => work.reason === "repeated-heading")) return;
   const tables = split(works);
   const [first, ...others] = tables;
   if (first === undefined) return;

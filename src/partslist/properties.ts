@@ -53,6 +53,8 @@ function decimal(text: string | undefined): string {
 
 interface Rule {
   name: PropertyName;
+  /** A sign without which the property cannot be named; spares most texts the search. */
+  sign: RegExp;
   /** `null` where the class has no such property to be read. */
   read: (text: string, partClass: PartClass) => { value: string; from: string } | null;
 }
@@ -119,22 +121,28 @@ function packageIn(text: string): { value: string; from: string } | null {
 }
 
 const RULES: readonly Rule[] = [
-  { name: "tolerance", read: (text) => withValue(TOLERANCE.exec(text)) },
+  { name: "tolerance", sign: /%/, read: (text) => withValue(TOLERANCE.exec(text)) },
   {
     name: "power",
+    sign: /w/i,
     read: (text, partClass) =>
       partClass === "resistor" || partClass === "potentiometer" ? power(text) : null,
   },
-  { name: "voltage", read: (text, partClass) => (partClass === "capacitor" ? voltage(text) : null) },
-  { name: "hole-spacing", read: spacing },
-  { name: "row-spacing", read: (text) => withValue(ROW_SPACING.exec(text)) },
+  {
+    name: "voltage",
+    sign: /v/i,
+    read: (text, partClass) => (partClass === "capacitor" ? voltage(text) : null),
+  },
+  { name: "hole-spacing", sign: /\d/, read: spacing },
+  { name: "row-spacing", sign: /_W/, read: (text) => withValue(ROW_SPACING.exec(text)) },
   {
     name: "diameter",
+    sign: /mm/,
     read: (text, partClass) =>
       withValue(first(DIAMETER, text) ?? (partClass === "led" ? LED_SIZE.exec(text) : null)),
   },
-  { name: "dielectric", read: dielectric },
-  { name: "package", read: packageIn },
+  { name: "dielectric", sign: /./, read: dielectric },
+  { name: "package", sign: /./, read: packageIn },
 ];
 
 function withValue(found: RegExpExecArray | null): { value: string; from: string } | null {
@@ -164,8 +172,8 @@ export function recogniseProperties(
   const found: RecognisedProperty[] = [];
   const text = texts.filter((one) => one !== null && one !== "").join(" ; ");
   if (text === "") return found;
-  for (const { name, read } of RULES) {
-    if (known.has(name)) continue;
+  for (const { name, sign, read } of RULES) {
+    if (known.has(name) || !sign.test(text)) continue;
     const one = read(text, partClass);
     if (one) found.push({ name, value: one.value, from: one.from });
   }

@@ -209,16 +209,19 @@ export function readLine(
   );
   const kind = classOf(texts, designators);
   const part = valueIn(texts, kind.class, columns, values);
-  const { maybeMark, ...mark } = markOf(cells, columns, texts);
+  const marked = markOf(cells, columns, texts);
   const own = ownProperties(cells, columns);
   const { offers, problems } = readOffers(cells, columns);
   const said = [texts.value, texts.description, texts.package, texts.note, texts.kind];
   const recognised = recogniseProperties(said, kind.class, knownProperties(own, texts));
+  const counted = quantityOf(quantity, designators);
   const line: DraftLine = {
     designators,
     designatorText,
-    ...quantityOf(quantity, designators),
-    ...kind,
+    quantity: counted.quantity,
+    quantityFrom: counted.quantityFrom,
+    class: kind.class,
+    classFrom: kind.classFrom,
     value: part.value,
     reading: part.reading,
     preferredHint: part.reading !== null && hints(kind.class) ? preferredHint(part.reading.si) : null,
@@ -227,14 +230,25 @@ export function readLine(
     manufacturer: textAt(cells, columns.first("manufacturer")),
     partNumber: part.partNumber,
     offers,
-    ...mark,
+    mark: marked.mark,
+    markFrom: marked.markFrom,
     drawer: textAt(cells, columns.first("drawer")),
     note: texts.note,
     datasheet: textAt(cells, columns.first("datasheet")),
-    ...own,
+    tolerance: own.tolerance,
+    power: own.power,
+    voltage: own.voltage,
+    holeSpacing: own.holeSpacing,
     recognised,
   };
-  return { line, quantity, unclear, bareValue: part.bareValue, maybeMark, priceProblems: problems };
+  return {
+    line,
+    quantity,
+    unclear,
+    bareValue: part.bareValue,
+    maybeMark: marked.maybeMark,
+    priceProblems: problems,
+  };
 }
 
 /** Potentiometers and crystals keep to other rows of values. */

@@ -120,17 +120,14 @@ function finish(works: readonly RowWork[], join: readonly number[] | "all"): Rea
 }
 
 function rowOf(work: RowWork): Row {
-  const place = {
-    row: work.record.row,
-    record: work.record.record,
-    text: rowText(work.record),
-    questions: work.questions,
-  };
-  if (work.into !== undefined) return { ...place, kind: "joined", into: work.into };
-  if (work.questions.some((question) => question.answer === null))
-    return { ...place, kind: "question", line: work.line, reason: work.reason };
-  if (work.line !== null) return { ...place, kind: "line", line: work.line };
-  return { ...place, kind: "skipped", reason: work.reason ?? "left-out" };
+  const { line, questions } = work;
+  const { row, record } = work.record;
+  const text = rowText(work.record);
+  if (work.into !== undefined) return { row, record, text, questions, kind: "joined", into: work.into };
+  if (questions.some((question) => question.answer === null))
+    return { row, record, text, questions, kind: "question", line, reason: work.reason };
+  if (line !== null) return { row, record, text, questions, kind: "line", line };
+  return { row, record, text, questions, kind: "skipped", reason: work.reason ?? "left-out" };
 }
 
 /** Counts the rows by how they end; rows = lines + skipped + questions + joined. */

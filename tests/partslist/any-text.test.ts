@@ -57,7 +57,7 @@ describe("any text", () => {
         expect(rows.map((row) => row.record)).toEqual(records.map((record) => record.record));
         expect(counts.lines + counts.skipped + counts.questions + counts.joined).toBe(records.length);
       }),
-      { numRuns: 400 },
+      { numRuns: 150 },
     );
   });
 
@@ -72,7 +72,7 @@ describe("any text", () => {
             expect(choiceLabel(question.code, choice)).not.toBe(choice.choice);
         }
       }),
-      { numRuns: 200 },
+      { numRuns: 100 },
     );
   });
 
@@ -97,7 +97,7 @@ describe("any text", () => {
           expect(settled.counts.lines).toBe(open.counts.linesWithSuggestions);
         },
       ),
-      { numRuns: 300 },
+      { numRuns: 120 },
     );
   });
 
@@ -115,7 +115,7 @@ describe("any text", () => {
         expect(rows).toHaveLength(records.length);
         expect(counts.offers + counts.breaks + counts.skipped + counts.questions).toBe(records.length);
       }),
-      { numRuns: 300 },
+      { numRuns: 120 },
     );
   });
 
