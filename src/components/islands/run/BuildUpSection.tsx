@@ -68,7 +68,9 @@ function BuildUpLine({ row, lines, currency, opens }: LineProps) {
   const foot =
     kind === "left" ? "border-b-4 border-double border-ink" : kind === "cost" ? "rule-head" : "hairline-b";
   return (
-    <tr className={`h-[37px] ${foot} max-tablet:grid max-tablet:grid-cols-[1fr_auto] max-tablet:py-1`}>
+    <tr
+      className={`h-[37px] ${foot} max-tablet:grid max-tablet:h-auto max-tablet:grid-cols-[1fr_auto] max-tablet:py-1`}
+    >
       <th scope="row" className={`w-[27%] py-1 pr-3 text-left ${weight || "font-normal"} max-tablet:w-auto`}>
         {label}
       </th>

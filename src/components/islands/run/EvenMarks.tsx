@@ -1,4 +1,4 @@
-import { usePlotArea } from "recharts";
+import { type PlotArea, usePlotArea } from "recharts";
 import {
   BAD,
   hatchFill,
@@ -16,6 +16,7 @@ import type { CostPoint } from "./cost-points.ts";
 import type { EvenChartProps } from "./EvenChart.tsx";
 import { EvenWindow } from "./EvenWindow.tsx";
 import { type ChartPlace, crowded, type GainArea, gainAreas, meeting } from "./even-shapes.ts";
+import { freePlace, type NameBox } from "./label-room.ts";
 
 type Scale = (place: ChartPlace) => { x: number; y: number };
 
@@ -63,6 +64,7 @@ export function EvenMarks(props: EvenChartProps) {
   const plot = usePlotArea();
   if (!scale || !plot) return null;
   const { points, span, narrow } = props;
+  const paid = paidBack(props, scale, plot);
   const placed = placedCrossings(props);
   const perKit = plot.width / Math.max(1, span.to - span.from);
   const near = crowded(
@@ -72,8 +74,13 @@ export function EvenMarks(props: EvenChartProps) {
   );
   return (
     <g>
-      <AreaNames points={points} run={props.run} scale={scale} narrow={narrow} />
-      <PaidBack {...props} scale={scale} foot={plot.y + plot.height} />
+      <AreaNames
+        points={points}
+        scale={scale}
+        narrow={narrow}
+        taken={paid ? [paid.soldBox, paid.runBox] : []}
+      />
+      {paid && <PaidBack paid={paid} run={props.run} soldToPay={props.soldToPay} currency={props.currency} />}
       {placed.map(({ letter, kits, place }) => (
         <Crossing
           key={letter}
@@ -117,9 +124,10 @@ function Crossing({
 
 interface NamesProps {
   points: readonly CostPoint[];
-  run: number;
   scale: Scale;
   narrow: boolean;
+  /** Room that other names take. */
+  taken: readonly NameBox[];
 }
 
 /** The area of a kind where it is tallest, with its middle and height in pixels. */
@@ -134,21 +142,32 @@ function tallest(points: readonly CostPoint[], gain: GainArea["gain"], scale: Sc
   return best;
 }
 
-/** Where along the span the cost line has room below it for its name: not under the name of the run. */
-function costNameAt(points: readonly CostPoint[], run: number): CostPoint | undefined {
+/** Where along the span the cost line has room beside it for its name. */
+function costNameAt({ points, scale }: NamesProps, taken: readonly NameBox[]) {
   const known = points.filter(({ total }) => total !== null);
-  const at = (share: number) => known[Math.floor((known.length - 1) * share)];
-  const wanted = at(0.62);
-  const near = wanted && Math.abs(wanted.kits - run) < known.length * 0.2;
-  return near ? at(0.36) : wanted;
+  const at = [0.62, 0.8, 0.48, 0.34, 0.2].flatMap((share) => {
+    const point = known[Math.floor((known.length - 1) * share)];
+    return point ? [scale({ kits: point.kits, money: point.total ?? 0 })] : [];
+  });
+  const named = (dy: number) =>
+    at.map(({ x, y }) => ({
+      x,
+      y: y + dy,
+      left: x - 40,
+      right: x + 40,
+      top: y + dy - 16,
+      bottom: y + dy + 6,
+    }));
+  const places = [...named(26), ...named(-12)];
+  return freePlace(places, taken);
 }
 
 /** Names stand in their areas and at their lines. */
-function AreaNames({ points, run, scale, narrow }: NamesProps) {
+function AreaNames(props: NamesProps) {
+  const { points, scale, narrow, taken } = props;
   const [loss, profit] = [tallest(points, "loss", scale), tallest(points, "profit", scale)];
-  const cost = costNameAt(points, run);
+  const costAt = costNameAt(props, taken);
   const last = points.findLast(({ kept }) => kept !== null);
-  const costAt = cost && scale({ kits: cost.kits, money: cost.total ?? 0 });
   const takingsAt = last && scale({ kits: last.kits, money: last.kept ?? 0 });
   const profitShift = narrow ? 44 : 110;
   return (
@@ -171,7 +190,7 @@ function AreaNames({ points, run, scale, narrow }: NamesProps) {
         </text>
       )}
       {costAt && (
-        <text x={costAt.x} y={costAt.y + 26} {...LINE_NAME} textAnchor="middle" fill={INK}>
+        <text x={costAt.x} y={costAt.y} {...LINE_NAME} textAnchor="middle" fill={INK}>
           Total cost
         </text>
       )}
@@ -190,21 +209,52 @@ function AreaNames({ points, run, scale, narrow }: NamesProps) {
   );
 }
 
-/** From the cost of the run back to the takings and down: how many sold pay for it. */
-function PaidBack({
-  points,
-  run,
-  soldToPay,
-  currency,
-  scale,
-  foot,
-  narrow,
-}: EvenChartProps & { scale: Scale; foot: number }) {
+/** Places of the run's ring, of the takings that pay for it, and of both names. */
+interface PaidPlaces {
+  ring: { x: number; y: number };
+  cost: string;
+  back: { x: number; y: number } | null;
+  foot: number;
+  runName: { x: number; y: number; anchor: "start" | "end" };
+  soldBox: NameBox;
+  runBox: NameBox;
+}
+
+const NAME_WIDTH = 150;
+
+function paidBack(
+  { points, run, soldToPay, narrow }: EvenChartProps,
+  scale: Scale,
+  plot: PlotArea,
+): PaidPlaces | null {
   const made = points.find(({ kits }) => kits === run);
-  if (!made || made.total === null) return null;
+  if (!made || made.total === null || made.exact.total === null) return null;
   const ring = scale({ kits: run, money: made.total });
   const sold = soldToPay === null ? undefined : points.find(({ kits }) => kits === soldToPay);
-  const back = sold && sold.kept !== null ? scale({ kits: sold.kits, money: made.total }) : null;
+  const back = sold ? scale({ kits: sold.kits, money: made.total }) : null;
+  const foot = plot.y + plot.height;
+  // Below the ring where there is room above the names at the foot; else above it.
+  const y = foot - ring.y > 100 ? ring.y + 26 : ring.y - 16;
+  const anchor = narrow || ring.x + NAME_WIDTH + 12 > plot.x + plot.width ? "end" : "start";
+  const x = anchor === "end" ? ring.x + 8 : ring.x + 12;
+  const left = anchor === "end" ? x - NAME_WIDTH : x;
+  const soldLeft = (back?.x ?? plot.x) + 8;
+  return {
+    ring,
+    cost: made.exact.total,
+    back,
+    foot,
+    runName: { x, y, anchor },
+    runBox: { left, right: left + NAME_WIDTH, top: y - 16, bottom: y + 6 },
+    soldBox: { left: soldLeft - 12, right: soldLeft + 130, top: foot - 54, bottom: foot },
+  };
+}
+
+type PaidBackProps = Pick<EvenChartProps, "run" | "soldToPay" | "currency"> & { paid: PaidPlaces };
+
+/** From the cost of the run back to the takings and down: how many sold pay for it. */
+function PaidBack({ paid, run, soldToPay, currency }: PaidBackProps) {
+  const { ring, back, foot, runName, cost } = paid;
   return (
     <g>
       {back && (
@@ -220,14 +270,8 @@ function PaidBack({
         </>
       )}
       <circle cx={ring.x} cy={ring.y} {...RUN_RING} />
-      <text
-        x={ring.x + (narrow ? 0 : 12)}
-        y={ring.y + 26}
-        {...LINE_NAME}
-        fill={INK}
-        textAnchor={narrow ? "end" : "start"}
-      >
-        {run} cost {money(made.exact.total ?? "0", currency)}
+      <text x={runName.x} y={runName.y} {...LINE_NAME} fill={INK} textAnchor={runName.anchor}>
+        {run} cost {money(cost, currency)}
       </text>
     </g>
   );

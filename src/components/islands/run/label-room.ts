@@ -15,3 +15,19 @@ export function labelsWithRoom<T extends WantedLabel>(wanted: readonly T[]): T[]
     if (shown.every((other) => Math.abs(other.at - label.at) >= other.half + label.half)) shown.push(label);
   return shown;
 }
+
+/** The room a name takes, in pixels. */
+export interface NameBox {
+  left: number;
+  right: number;
+  top: number;
+  bottom: number;
+}
+
+const overlap = (one: NameBox, other: NameBox) =>
+  one.left < other.right && other.left < one.right && one.top < other.bottom && other.top < one.bottom;
+
+/** The first of the wanted places whose box is free of all that is taken; the first where none is. */
+export function freePlace<T extends NameBox>(wanted: readonly T[], taken: readonly NameBox[]): T | undefined {
+  return wanted.find((box) => taken.every((other) => !overlap(box, other))) ?? wanted[0];
+}
