@@ -206,6 +206,15 @@ const OVERRULES: Readonly<Record<string, readonly PartClass[]>> = {
   E: ["capacitor"],
 };
 
+/** By letters: the texts that may overrule them, in their order, with those that would confirm the letters before. */
+const DOUBTS: ReadonlyMap<string, readonly (readonly [RegExp, PartClass])[]> = new Map(
+  Object.entries(OVERRULES).map(([letters, overrules]) => {
+    const last = TEXTS.findLastIndex(([, partClass]) => overrules.includes(partClass));
+    const either = [...overrules, LETTERS[letters]];
+    return [letters, TEXTS.slice(0, last + 1).filter(([, partClass]) => either.includes(partClass))];
+  }),
+);
+
 /** The class a text names, or `null`. */
 export function classFromText(text: string): PartClass | null {
   for (const [pattern, partClass] of TEXTS) if (pattern.test(text)) return partClass;
@@ -237,13 +246,10 @@ export function guessClass(designators: readonly string[], texts: readonly (stri
     const words = classFromText(texts.filter((text) => text !== null).join(" ; "));
     return words === null ? { class: "other", from: "nothing" } : { class: words, from: "text" };
   }
-  const overrules = OVERRULES[designatorLetters(first ?? "")];
-  if (overrules) {
+  const doubts = DOUBTS.get(designatorLetters(first ?? ""));
+  if (doubts !== undefined) {
     const words = texts.filter((text) => text !== null).join(" ; ");
-    const said = TEXTS.find(
-      ([pattern, partClass]) =>
-        (partClass === byLetters || overrules.includes(partClass)) && pattern.test(words),
-    );
+    const said = doubts.find(([pattern]) => pattern.test(words));
     if (said && said[1] !== byLetters) return { class: said[1], from: "text" };
   }
   return { class: byLetters, from: "designator" };

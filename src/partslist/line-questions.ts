@@ -1,5 +1,5 @@
 import { repeatedDesignators } from "./designators.ts";
-import type { ExistingLine } from "./draft.ts";
+import type { DraftLine, ExistingLine } from "./draft.ts";
 import type { ListColumns } from "./list-columns.ts";
 import { askAboutPrice } from "./price-question.ts";
 import type { ReadLine } from "./read-line.ts";
@@ -207,18 +207,20 @@ const HARDLY_LETTERS = /^(?:FID|MH|TP|LOGO)\d/;
 /** Holes, fiducials and test points stand on the board and are not bought. */
 function askHardlyAPart(work: RowWork, context: QuestionContext): void {
   const line = work.line;
-  if (line === null) return;
-  const texts = [line.value, line.description, line.package].filter((text) => text !== null);
-  const said = texts.find((text) => HARDLY.test(text));
-  const unnamed = texts.length === 0 || texts.every((text) => HARDLY.test(text) || text === line.package);
-  const lettered =
-    line.designators.length > 0 && line.designators.every((name) => HARDLY_LETTERS.test(name)) && unnamed;
-  if (said === undefined && !lettered) return;
-  if (line.partNumber !== null || line.offers.some((offer) => offer.orderCode !== null)) return;
-  const facts = { text: said ?? line.designatorText };
-  ask(
-    work,
-    { code: "hardly-a-part", level: "look", columns: [], facts, choices: ["leave-row-out", "keep-row"] },
-    context.answers,
+  if (line === null || line.partNumber !== null) return;
+  const said = [line.value, line.description, line.package].find(
+    (text) => text !== null && HARDLY.test(text),
   );
+  if ((said === undefined || said === null) && !namedAsHole(line)) return;
+  if (line.offers.some((offer) => offer.orderCode !== null)) return;
+  const facts = { text: said ?? line.designatorText };
+  const choices = ["leave-row-out", "keep-row"];
+  ask(work, { code: "hardly-a-part", level: "look", columns: [], facts, choices }, context.answers);
+}
+
+/** FID1, MH2, TP3 with no other text than a body. */
+function namedAsHole(line: DraftLine): boolean {
+  if (!HARDLY_LETTERS.test(line.designators[0] ?? "") || line.value !== null || line.description !== null)
+    return false;
+  return line.designators.every((name) => HARDLY_LETTERS.test(name));
 }

@@ -24,27 +24,12 @@ const DIAMETER: readonly RegExp[] = [
 ];
 const LED_SIZE = /(?<![A-Za-z0-9.,])(3|5|8|10|1[.,]8)\s?mm(?![A-Za-z0-9])/;
 const DIELECTRIC = /(?<![A-Za-z0-9])(X[5678][RSTUV]|Y5V|Z5U|C0G|COG|NP0|NPO|C0K)(?![A-Za-z0-9])/i;
-const MATERIAL: readonly (readonly [RegExp, string])[] = [
-  [
-    /\b(?:electrolytic|elektrolyt\w*|elko|électrolytique|chimique|electrolítico|elettrolitico|elco|elektrolit\w*|eletrolítico|электролит\w*)\b/i,
-    "electrolytic",
-  ],
-  [/\btantal(?:um|e|io|o)?\b/i, "tantalum"],
-  [
-    /\b(?:ceramic|keramik|keramisch|kerko|céramique|cerámico|ceramico|keramick[áéý]|ceramiczny|cerâmico|керамика)\b/i,
-    "ceramic",
-  ],
-  [/\b(?:film|folie|folien\w*|polyester|polypropylen\w*|mks|mkt|mkp|polystyrene|styroflex)\b/i, "film"],
-];
-const PACKAGES: readonly RegExp[] = [
-  /(?<![A-Za-z0-9])(TO-?(?:92|126|220|247|18|39|3|252|263)(?:-\d)?[A-Z]?)(?![0-9])/i,
-  /(?<![A-Za-z0-9])((?:P?DIP|DIL|CDIP|SIP|SOIC|SOP|SSOP|TSSOP|MSOP|SO|TQFP|LQFP|QFN|DFN|PLCC)-?\d{1,3})(?![0-9])/i,
-  /(?<![A-Za-z0-9])(SOT-?(?:23|223|89|323|363|353|143)(?:-\d)?)(?![0-9])/i,
-  /(?<![A-Za-z0-9])(DO-?(?:35|41|15|201|27|34|7|214AC|214AA)|SOD-?\d{2,3}[A-Z]*|SM[ABC](?=\b))(?![0-9])/i,
-  /(?<![A-Za-z0-9])(HC-?49(?:\/?[A-Z]{1,2})?)(?![A-Za-z0-9])/i,
-  /(?<![A-Za-z0-9.])(?:[CRLD]_?|SMD ?|LED_?|DIN)?(0201|0402|0603|0805|1206|1210|1812|2010|2512|0204|0207|0309|0411|0414)(?![A-Za-z0-9])/,
-  /\b(a[xs]s?ial|radial)(?:e|es|o)?\b/i,
-];
+/** One search for all of them: most rows name none, and each search costs. */
+const MATERIAL =
+  /(?<![\p{L}])(?:(?<electrolytic>electrolytic|elektrolyt\p{L}*|elko|électrolytique|chimique|electrolítico|elettrolitico|elco|elektrolit\p{L}*|eletrolítico|электролит\p{L}*)|(?<tantalum>tantal(?:um|e|io|o)?)|(?<ceramic>ceramic|keramik|keramisch|kerko|céramique|cerámico|ceramico|keramick[áéý]|ceramiczny|cerâmico|керамика)|(?<film>film|folie|folien\p{L}*|polyester|polypropylen\p{L}*|mks|mkt|mkp|polystyrene|styroflex))(?!\p{L})/iu;
+/** Usual names of bodies; the last group is the four figures of chips and axial parts, the one before the lead style. */
+const PACKAGE =
+  /(?<![A-Za-z0-9.])(?:(TO-?(?:92|126|220|247|18|39|3|252|263)(?:-\d)?[A-Z]?|(?:P?DIP|DIL|CDIP|SIP|SOIC|SOP|SSOP|TSSOP|MSOP|SO|TQFP|LQFP|QFN|DFN|PLCC)-?\d{1,3}|SOT-?(?:23|223|89|323|363|353|143)(?:-\d)?|DO-?(?:35|41|15|201|27|34|7|214AC|214AA)|SOD-?\d{2,3}[A-Z]*|SM[ABC](?![A-Za-z])|HC-?49(?:\/?[A-Z]{1,2})?|a[xs]s?ial|radial)(?:e|es|o)?(?![0-9])|(?:[CRLD]_?|SMD ?|LED_?|DIN)?(0201|0402|0603|0805|1206|1210|1812|2010|2512|0204|0207|0309|0411|0414)(?![A-Za-z0-9]))/i;
 
 /** A number of the text as decimal text. */
 function decimal(text: string | undefined): string {
@@ -108,17 +93,13 @@ function timesInch(inches: string): string {
 }
 
 function packageIn(text: string): { value: string; from: string } | null {
-  const found = first(PACKAGES, text);
-  return (
-    found && {
-      value: (found[1] ?? "")
-        .toUpperCase()
-        .replace(/^A[XS]+IAL$/, "axial")
-        .replace(/^RADIAL$/, "radial"),
-      from: found[0].trim(),
-    }
-  );
+  const found = PACKAGE.exec(text);
+  if (!found) return null;
+  const name = (found[1] ?? found[2] ?? "").toUpperCase();
+  return { value: name.replace(/^A[XS]+IAL$/, "axial").replace(/^RADIAL$/, "radial"), from: found[0].trim() };
 }
+
+const SPACING_SIGN = /\d\s?(?:mm|in|["″']|$)|rm|_P\d|raster|pitch|spacing|\bls|rozteč|entraxe|pas|steek|шаг/i;
 
 const RULES: readonly Rule[] = [
   { name: "tolerance", sign: /%/, read: (text) => withValue(TOLERANCE.exec(text)) },
@@ -133,7 +114,7 @@ const RULES: readonly Rule[] = [
     sign: /v/i,
     read: (text, partClass) => (partClass === "capacitor" ? voltage(text) : null),
   },
-  { name: "hole-spacing", sign: /\d/, read: spacing },
+  { name: "hole-spacing", sign: SPACING_SIGN, read: spacing },
   { name: "row-spacing", sign: /_W/, read: (text) => withValue(ROW_SPACING.exec(text)) },
   {
     name: "diameter",
@@ -153,11 +134,10 @@ function dielectric(text: string, partClass: PartClass): { value: string; from: 
   if (partClass !== "capacitor") return null;
   const code = DIELECTRIC.exec(text);
   if (code) return { value: (code[1] ?? "").toUpperCase().replace(/^(COG|NP0|NPO)$/, "C0G"), from: code[0] };
-  for (const [pattern, name] of MATERIAL) {
-    const found = pattern.exec(text);
-    if (found) return { value: name, from: found[0] };
-  }
-  return null;
+  const material = MATERIAL.exec(text);
+  if (!material) return null;
+  const name = Object.entries(material.groups ?? {}).find(([, words]) => words !== undefined)?.[0];
+  return name === undefined ? null : { value: name, from: material[0] };
 }
 
 /**
