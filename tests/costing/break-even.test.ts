@@ -125,6 +125,9 @@ describe("a run that is made, of which some sell", () => {
       charges: [{ id: "c", name: "All", amount: "1793.65", spreadOver: null }],
     });
     expect(costRun(made, 120).evenAfter).toEqual({ known: true, value: "72" });
+    const even = plan({ ...made, editions: [edition({ price: "1793.65" })] });
+    expect(costRun(even, 120).evenAfter).toEqual({ known: true, value: "1" });
+    expect(sweepRuns(even).columns.soldToPay[9]).toBe(1);
     expect(costRun(made, 71).evenAfter).toMatchObject({ known: false, needs: [{ code: "not-even" }] });
   });
 });

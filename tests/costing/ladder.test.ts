@@ -183,6 +183,15 @@ describe("the order quantity", () => {
     );
   });
 
+  test("lots: on a tie those that hold less, with a limit of stock as well", () => {
+    const breaks = [6, 10, 14].map((quantity) => ({ quantity, price: "5.00" }));
+    const ladder = terms({ priceModel: "lots", breaks });
+    for (const cap of [ANY, 60]) {
+      expect(cheapestOrder(prepareLadder(ladder, cap, 30), 5)).toMatchObject({ quantity: 6, cost: 500 });
+      expect(cheapestOrder(prepareLadder(ladder, cap, 30), 15)).toMatchObject({ quantity: 16, cost: 1000 });
+    }
+  });
+
   test("lots: a large number is the same whether it is looked up or reduced by whole lots", () => {
     fc.assert(
       fc.property(

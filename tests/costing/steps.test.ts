@@ -39,6 +39,29 @@ describe("step-downs", () => {
     expect(steps[0]).toMatchObject({ perKit: "0.6" });
   });
 
+  test("half a per cent exactly is a step, a hair less is none", () => {
+    const priced = (price: string) =>
+      plan({
+        run: { kits: 10, sweepTo: 205 },
+        parts: [
+          part({
+            offers: [
+              offer({
+                breaks: [
+                  { quantity: 1, price: "1.00" },
+                  { quantity: 200, price },
+                ],
+              }),
+            ],
+          }),
+        ],
+      });
+    expect(sweepRuns(priced("0.995")).stepDowns.map(({ kits, fellBy }) => [kits, fellBy])).toEqual([
+      [200, "0.005"],
+    ]);
+    expect(sweepRuns(priced("0.99505")).stepDowns).toEqual([]);
+  });
+
   test("never where the fall is less, and always with a name", () => {
     fc.assert(
       fc.property(completePlan, (made) => {
