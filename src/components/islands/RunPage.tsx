@@ -72,13 +72,15 @@ function Reckoned({ address, held, may }: ReckonedProps) {
       <RunAnswer run={run} opens={opens} />
       <div className={PAIRS}>
         {!run.perKit.used.known && (
-          <CannotBeKnown
-            address={address}
-            plan={plan}
-            title={`${run.kits} cannot be worked out yet`}
-            needs={run.perKit.used.needs}
-            may={may}
-          />
+          <Pair>
+            <CannotBeKnown
+              address={address}
+              plan={plan}
+              title={`${run.kits} cannot be worked out yet`}
+              needs={run.perKit.used.needs}
+              may={may}
+            />
+          </Pair>
         )}
         <Suspense fallback={<Loading what="charts" rows={8} />}>
           {sweep ? (

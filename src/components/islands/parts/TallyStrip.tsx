@@ -155,7 +155,7 @@ function Cell({ cell, workingOut }: { cell: TallyCell; workingOut?: boolean }) {
 function CellFigure({ cell, workingOut }: { cell: TallyCell; workingOut?: boolean }) {
   if (cell.value === null)
     return (
-      <span className="text-[1rem] leading-[1.9375rem] font-medium whitespace-nowrap text-ink-2 tablet:text-[1.1875rem]">
+      <span className="block max-w-full overflow-hidden text-[1rem] leading-[1.9375rem] font-medium text-ellipsis whitespace-nowrap text-ink-2 tablet:text-[1.1875rem]">
         {cell.needsHref ? (
           <a href={cell.needsHref} className="text-ink-2">
             {cell.needs ?? "not known"}

@@ -40,10 +40,12 @@ export interface CellContext {
   opens?: (figure: FigureId) => { open: boolean; onOpen: () => void };
 }
 
+/** A cell is narrow: one kind of need by its name, several by their number. */
 function needs(figure: Figure, address: KitAddress): Pick<TallyCell, "needs" | "needsHref"> {
   if (figure.known) return {};
-  const [first] = figure.needs;
-  return { needs: needWords(figure.needs), needsHref: first && needLink(address, first) };
+  const [first, ...more] = figure.needs;
+  const words = more.length === 0 ? needWords(figure.needs) : `needs ${figure.needs.length} things`;
+  return { needs: words, needsHref: first && needLink(address, first) };
 }
 
 /** The figures of the strip, written, with their changes and what they open. */
