@@ -2,7 +2,7 @@ import type { KitAddress } from "#src/components/islands/kit-address.ts";
 import { kitPath } from "#src/components/islands/kit-address.ts";
 import { MarginNote } from "#src/components/islands/parts/Pair.tsx";
 import { type SettleItem, SettleList } from "#src/components/islands/parts/SettleList.tsx";
-import type { Problem } from "#src/costing/problem.ts";
+import { CAUTION_CODES, type Problem } from "#src/costing/problem.ts";
 import { problemSentence } from "#src/costing/problem-words.ts";
 import type { RunResult } from "#src/costing/run-result.ts";
 import type { Plan } from "#src/shapes/plan.ts";
@@ -18,9 +18,11 @@ function place(address: KitAddress, { at }: Problem): { label: string; href: str
 /** So many at a glance; the rest are on their own pages. */
 const SHOWN = 6;
 
-/** What is uncertain although the figures are known, and where it is settled. */
+const isCaution = ({ code }: Problem) => (CAUTION_CODES as readonly string[]).includes(code);
+
+/** What is uncertain although the figures are known, and where it is settled. What is missing stands elsewhere. */
 export function StillToSettle({ address, plan, run }: { address: KitAddress; plan: Plan; run: RunResult }) {
-  const items = run.problems.map((problem): SettleItem => {
+  const items = run.problems.filter(isCaution).map((problem): SettleItem => {
     const where = place(address, problem);
     return {
       key: `${problem.code} ${JSON.stringify(problem.at)}`,
