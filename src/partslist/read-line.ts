@@ -32,7 +32,7 @@ export interface ReadLine {
 }
 
 /** Values read once, for the many rows of a list that say the same. */
-export type ReadValues = Map<string, ReadPart>;
+export type ReadValues = Map<PartClass, Map<string | null, ReadPart>>;
 
 interface Texts {
   value: string | null;
@@ -69,9 +69,20 @@ function textsOf(cells: readonly string[], columns: ListColumns): Texts {
   };
 }
 
-function classOf(texts: Texts, designators: readonly string[]): Pick<DraftLine, "class" | "classFrom"> {
-  const said = [texts.kind, texts.description, texts.value, texts.package, texts.partNumber];
-  const guess = guessClass(designators, said);
+/** The texts of a row in one, parted so that no word runs over from one into the next. */
+function wordsOf(texts: Texts): string {
+  let words = "";
+  for (const text of [texts.kind, texts.description, texts.value, texts.package])
+    if (text !== null) words = words === "" ? text : `${words} ; ${text}`;
+  return words;
+}
+
+function classOf(
+  texts: Texts,
+  designators: readonly string[],
+  words: string,
+): Pick<DraftLine, "class" | "classFrom"> {
+  const guess = guessClass(designators, [words, texts.partNumber]);
   const column = texts.kind === null ? null : classFromColumn(texts.kind);
   if (column !== null && guess.from !== "designator") return { class: column, classFrom: "column" };
   return { class: guess.class, classFrom: guess.from };
@@ -87,9 +98,7 @@ interface ReadPart {
 /** The value from its own column, else from the description, else from a part-number cell that is nothing but a value. */
 function valueIn(texts: Texts, partClass: PartClass, columns: ListColumns, values: ReadValues): ReadPart {
   const { value, partNumber } = texts;
-  const key = `${partClass} ${value ?? ""}`;
-  const known = values.get(key) ?? ownValue(value, partClass, columns);
-  values.set(key, known);
+  const known = onceForClass(value, partClass, columns, values);
   if (known.reading !== null || known.bareValue !== null || /\d/.test(known.value ?? ""))
     return { ...known, partNumber };
   for (const text of [texts.description, texts.note === null ? null : texts.kind]) {
@@ -102,6 +111,25 @@ function valueIn(texts: Texts, partClass: PartClass, columns: ListColumns, value
   if (inNumber)
     return { value: known.value ?? partNumber, reading: inNumber.reading, partNumber: null, bareValue: null };
   return { ...known, partNumber };
+}
+
+function onceForClass(
+  value: string | null,
+  partClass: PartClass,
+  columns: ListColumns,
+  values: ReadValues,
+): ReadPart {
+  let ofClass = values.get(partClass);
+  if (ofClass === undefined) {
+    ofClass = new Map();
+    values.set(partClass, ofClass);
+  }
+  let part = ofClass.get(value);
+  if (part === undefined) {
+    part = ownValue(value, partClass, columns);
+    ofClass.set(value, part);
+  }
+  return part;
 }
 
 /** What the value cell says by itself: a value, a number whose unit must be confirmed, or a text. */
@@ -172,14 +200,18 @@ function ownProperties(
   };
 }
 
-function knownProperties(own: ReturnType<typeof ownProperties>, texts: Texts): Set<PropertyName> {
-  const known = new Set<PropertyName>();
-  if (own.tolerance !== null) known.add("tolerance");
-  if (own.power !== null) known.add("power");
-  if (own.voltage !== null) known.add("voltage");
-  if (own.holeSpacing !== null) known.add("hole-spacing");
-  if (texts.package !== null && texts.package.length <= 10) known.add("package");
-  return known;
+const PACKAGE_KNOWN: ReadonlySet<PropertyName> = new Set(["package"]);
+const NOTHING_KNOWN: ReadonlySet<PropertyName> = new Set();
+
+function knownProperties(own: ReturnType<typeof ownProperties>, texts: Texts): ReadonlySet<PropertyName> {
+  const named: PropertyName[] = [];
+  if (own.tolerance !== null) named.push("tolerance");
+  if (own.power !== null) named.push("power");
+  if (own.voltage !== null) named.push("voltage");
+  if (own.holeSpacing !== null) named.push("hole-spacing");
+  if (texts.package !== null && texts.package.length <= 10) named.push("package");
+  if (named.length === 0) return NOTHING_KNOWN;
+  return named.length === 1 && named[0] === "package" ? PACKAGE_KNOWN : new Set(named);
 }
 
 function quantityOf(
@@ -207,13 +239,13 @@ export function readLine(
     cellAt(cells, quantityColumn),
     quantityColumn === null ? null : columns.mark(quantityColumn),
   );
-  const kind = classOf(texts, designators);
+  const words = wordsOf(texts);
+  const kind = classOf(texts, designators, words);
   const part = valueIn(texts, kind.class, columns, values);
   const marked = markOf(cells, columns, texts);
   const own = ownProperties(cells, columns);
   const { offers, problems } = readOffers(cells, columns);
-  const said = [texts.value, texts.description, texts.package, texts.note, texts.kind];
-  const recognised = recogniseProperties(said, kind.class, knownProperties(own, texts));
+  const recognised = recogniseProperties([words, texts.note], kind.class, knownProperties(own, texts));
   const counted = quantityOf(quantity, designators);
   const line: DraftLine = {
     designators,
