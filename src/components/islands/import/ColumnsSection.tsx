@@ -36,7 +36,7 @@ export function ColumnsSection({ columns, edit }: Props) {
         <CurrencyNote columns={columns} />
       </div>
       {/* biome-ignore lint/a11y/noNoninteractiveTabindex: a region that scrolls must be reachable by keyboard. */}
-      <section tabIndex={0} aria-label="Columns and first rows" className="overflow-x-auto p-1 -m-1">
+      <section tabIndex={0} aria-label="Columns and first rows" className="relative -m-1 overflow-x-auto p-1">
         <table className="type-table w-full border-collapse">
           <caption className="heard-only">The first rows of the list, and what each column means</caption>
           <thead>
@@ -62,18 +62,28 @@ export function ColumnsSection({ columns, edit }: Props) {
 
 const CELL = "border-rule px-2.5 not-first:border-l";
 
+/** Wide enough for the words of the meaning that is chosen. */
+const WIDTHS = { short: "min-w-[124px]", usual: "min-w-[168px]", long: "min-w-[224px]" } as const;
+
+function widthOf(meaning: Meaning): keyof typeof WIDTHS {
+  const letters = MEANING_LABELS[meaning].length;
+  if (letters <= 9) return "short";
+  return letters <= 15 ? "usual" : "long";
+}
+
 function ColumnHead({ column, edit }: { column: ColumnView; edit: Props["edit"] }) {
   const name = column.heading.trim() || `Column ${column.column + 1}`;
   const change = (fields: Omit<NonNullable<Edit["columns"]>[number], "column">) =>
     edit({ columns: [{ column: column.column, ...fields }] });
   return (
-    <th scope="col" className={`${CELL} min-w-[136px] pb-2.5 align-bottom nth-2:border-l-0 nth-2:pl-0`}>
+    <th scope="col" className={`${CELL} pb-2.5 align-bottom nth-2:border-l-0 nth-2:pl-0`}>
       <span className="type-label mb-1 block max-w-[220px] truncate font-semibold text-ink-2" title={name}>
         {name}
       </span>
       <ChoiceField
         label={`What ${name} means`}
         labelHidden
+        className={WIDTHS[widthOf(column.meaning)]}
         choices={CHOICES}
         leaveOut={LEAVE_OUT}
         row

@@ -2,7 +2,6 @@ import type { FieldChange } from "#src/partslist/difference.ts";
 import type { DifferenceLine, DifferenceView } from "#src/server/bring-in/difference-view.ts";
 import { Section } from "../parts/Section.tsx";
 import { CostLine } from "./CostLine.tsx";
-import { counted } from "./count-words.ts";
 import type { ImportPlace } from "./import-place.ts";
 
 interface Props {
@@ -30,6 +29,11 @@ const FIELD_WORDS: Readonly<Record<FieldChange["field"], string>> = {
   drawer: "drawer",
 };
 
+function against(revision: string, unchanged: number): string {
+  const stay = unchanged === 1 ? "1 line stays as it is" : `${unchanged} lines stay as they are`;
+  return unchanged === 0 ? `against rev ${revision}` : `against rev ${revision}; ${stay}`;
+}
+
 /** What the list would change of the one that stands: nothing of it is done before it is brought in. */
 export function DifferenceSection({ place, id, version, difference, revision, money }: Props) {
   const { counts } = difference;
@@ -39,11 +43,7 @@ export function DifferenceSection({ place, id, version, difference, revision, mo
     <Section
       id="difference"
       title="What changes"
-      aside={
-        first
-          ? "the list is empty until now"
-          : `against rev ${revision}; ${counted(counts.unchanged, "line stays", "lines stay")} as they are`
-      }
+      aside={first ? "the list is empty until now" : against(revision, counts.unchanged)}
     >
       {money && changes > 0 && <CostLine place={place} id={id} version={version} />}
       {changes === 0 && <p>Nothing: every line stands so already.</p>}

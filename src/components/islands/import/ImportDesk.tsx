@@ -10,7 +10,7 @@ import { DeskHead } from "./DeskHead.tsx";
 import { DifferenceSection } from "./DifferenceSection.tsx";
 import { FileBox } from "./FileBox.tsx";
 import { RecognisedRows, SkippedRows } from "./FoldedRows.tsx";
-import type { ImportPlace } from "./import-place.ts";
+import { type ImportPlace, importKeys } from "./import-place.ts";
 import { JoinsSection } from "./JoinsSection.tsx";
 import { OfferDifferenceSection } from "./OfferDifferenceSection.tsx";
 import { PricesSection } from "./PricesSection.tsx";
@@ -70,6 +70,8 @@ function Desk({ place, initial, revision, money }: Props) {
           reading={draft.busy}
           onTaken={(done) => {
             setTaken(done);
+            const after = { ...view, file: { ...view.file, state: "taken" as const } };
+            queryClient.setQueryData(importKeys.one(view.file.id), after);
             if (place.kit) void queryClient.invalidateQueries({ queryKey: kitKeys.plan(place.kit) });
           }}
         />

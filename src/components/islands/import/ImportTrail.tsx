@@ -1,4 +1,4 @@
-import { QueryClientProvider, useQuery } from "@tanstack/react-query";
+import { QueryClientProvider, skipToken, useQuery } from "@tanstack/react-query";
 import type { TrailStop } from "#src/components/trail-states.ts";
 import { Trail } from "../parts/Trail.tsx";
 import { pageCache } from "../query-client.ts";
@@ -21,11 +21,11 @@ export default function ImportTrail(props: Props) {
 }
 
 function Stages({ id, counts }: Props) {
-  const { data } = useQuery<ImportView>({ queryKey: importKeys.one(id), enabled: false });
+  const { data } = useQuery<ImportView>({ queryKey: importKeys.one(id), queryFn: skipToken });
   return <Trail stops={stages(data ? trailCounts(data) : counts)} label="The stages of this list" />;
 }
 
-function stages({ matched, leftOut, open }: TrailCounts): TrailStop[] {
+function stages({ matched, leftOut, open, taken }: TrailCounts): TrailStop[] {
   const left = leftOut > 0 ? `, ${leftOut} left out` : "";
   return [
     { name: "File", href: "#file", state: { kind: "done" }, words: "read" },

@@ -23,6 +23,7 @@ export function OtherChoices({ question, parts, onChoose }: Props) {
       {alternatives.map((choice) => (
         <QuietButton
           key={choice.choice}
+          className="text-left"
           onClick={() => (choice.choice === "type" ? setTyping(true) : onChoose(choice.choice))}
         >
           {choiceLabel(code, choice)}

@@ -17,8 +17,9 @@ interface Props {
 const NOBODY = "nobody";
 const NEW = "new";
 
-function offersWords(count: number): string {
-  return count === 1 ? "1 offer" : `${countText(count)} offers`;
+function rowsWords(offers: number): string {
+  if (offers === 1) return "The supplier and price of one row become an offer for its part.";
+  return `Suppliers and prices of ${countText(offers)} rows become offers for their parts.`;
 }
 
 /** Prices in a list: whose they are, which suppliers they add, and what of them cannot be taken. */
@@ -29,9 +30,10 @@ export function PricesSection({ prices, edit }: Props) {
     <Section
       id="prices"
       title="Prices and suppliers"
-      aside={offers === null ? "whose list it is" : `${offersWords(offers)} will be taken`}
+      aside={offers === null ? "whose list it is" : undefined}
     >
       <div className="flex flex-col gap-3">
+        {offers !== null && offers > 0 && <p>{rowsWords(offers)}</p>}
         {(offers === null || prices.unnamed > 0 || prices.pricesFrom !== null) && (
           <Whose prices={prices} edit={edit} />
         )}
