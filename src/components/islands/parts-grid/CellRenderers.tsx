@@ -10,6 +10,7 @@ type CellProps = CustomCellRendererProps<GridRow, string, GridContext>;
 /** The number of a line: a button that opens all of its fields. The grid's Enter key does the same. */
 export function PlaceCell({ data, context }: CellProps) {
   if (data?.kind !== "line") return null;
+  if (!context.canOpen) return <span>{data.place}</span>;
   return (
     <button
       type="button"

@@ -35,7 +35,14 @@ export function EmptyParts({
       </Section>
       <p>
         Want to look round first?{" "}
-        <a href={`/workshops/${address.workshop}`}>Copy another kit as an example</a>, or{" "}
+        {example && (
+          <>
+            <a href={kitPath({ ...address, kit: example.id }, "/details#copy")}>
+              Copy {example.name} as an example kit
+            </a>
+            , or{" "}
+          </>
+        )}
         <a href={kitPath(address, "/parts/bring-in")}>see what a list can look like</a>.
       </p>
     </div>

@@ -55,6 +55,7 @@ const ROW = 37;
 
 /** As every grid, but for the marks between heads: the columns here are many and narrow. */
 const theme = gridTheme.withParams({ headerColumnResizeHandleColor: "transparent" });
+const phoneTheme = theme.withParams({ cellHorizontalPadding: 6 });
 
 /** Where a block is to be pasted, as the grid is seen. */
 export interface PastePlace {
@@ -176,7 +177,7 @@ export default function PartsGrid(props: PartsGridProps) {
       className={`[&_.ag-cell-focus:not(.ag-cell-inline-editing)]:outline-3 [&_.ag-cell-focus:not(.ag-cell-inline-editing)]:-outline-offset-3 [&_.ag-cell-focus:not(.ag-cell-inline-editing)]:outline-petrol ${whole ? "" : "h-[max(480px,calc(100vh-250px))]"}`}
     >
       <AgGridReact<GridRow>
-        theme={theme}
+        theme={phone ? phoneTheme : theme}
         modules={MODULES}
         styleNonce={styleNonce}
         rowData={rows as GridRow[]}

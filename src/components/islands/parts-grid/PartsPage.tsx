@@ -15,7 +15,7 @@ import { compareLists } from "#src/partslist/since-revision.ts";
 import type { PartsList } from "#src/server/present.ts";
 import type { Plan } from "#src/shapes/plan.ts";
 import { EmptyParts } from "./EmptyParts.tsx";
-import { lineRows, partsTotal, piecesIn } from "./grid-rows.ts";
+import { fullestEdition, lineRows, partsTotal } from "./grid-rows.ts";
 import { watchLeaving } from "./list-editor.ts";
 import { PartsWorkbench } from "./PartsWorkbench.tsx";
 import { useLastRevision, usePartsList } from "./use-parts-list.ts";
@@ -147,7 +147,7 @@ function Answer({
     );
   if (!list) return <b>{counted(lines, "line", "lines")}.</b>;
   const toSettle = rows.filter(({ state }) => state.toSettle).length;
-  const { pieces, name } = fullestEdition(list);
+  const { pieces, name } = fullestEdition(list) ?? { pieces: 0, name: "" };
   return (
     <>
       <b>
@@ -158,12 +158,6 @@ function Answer({
       {toSettle > 0 && `${counted(toSettle, "line waits", "lines wait")} to be settled.`}
     </>
   );
-}
-
-/** The edition with most pieces, which stands for the kit where there are several. */
-function fullestEdition(list: PartsList): { name: string; pieces: number } {
-  const all = list.editions.map(({ id, name }) => ({ name, pieces: piecesIn(list, id) }));
-  return all.reduce((most, one) => (one.pieces > most.pieces ? one : most), { name: "", pieces: 0 });
 }
 
 function CostSentence({ bought }: { bought: Bought }) {

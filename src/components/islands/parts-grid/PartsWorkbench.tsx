@@ -18,6 +18,7 @@ import { EditorBoxes } from "./EditorBoxes.tsx";
 import type { GridContext, OfferChoice } from "./grid-context.ts";
 import {
   filteredRows,
+  fullestEdition,
   type GridRow,
   groupedRows,
   type LineFilter,
@@ -63,11 +64,11 @@ function totalRow(list: PartsList, bought: Bought | null): TotalRow {
 
 const PHONE_COLUMNS: readonly string[] = ["designators", "part", "bands", "perKit"];
 
-/** On a phone three or four columns are left; with several editions the first one's quantity. */
+/** On a phone three or four columns are left; with several editions the quantity in the fullest. */
 function shownColumns(all: ColumnKey[], list: PartsList, phone: boolean, money: boolean): ColumnKey[] {
   if (!phone) return all;
-  const first = `quantity:${list.editions[0]?.id}`;
-  return all.filter((key) => key === first || PHONE_COLUMNS.includes(key) || (!money && key === "state"));
+  const fullest = `quantity:${fullestEdition(list)?.id}`;
+  return all.filter((key) => key === fullest || PHONE_COLUMNS.includes(key) || (!money && key === "state"));
 }
 
 export interface WorkbenchProps extends PartsProps {
@@ -114,6 +115,7 @@ export function PartsWorkbench(props: WorkbenchProps) {
     faults: work.faults,
     draft: draft.cells,
     canEdit,
+    canOpen: list.money,
     canChoose,
     offersFor,
     pinnedFor: (part) => (list.money ? choiceOf(list, part).pinnedOfferId : null),
@@ -251,13 +253,7 @@ export function PartsWorkbench(props: WorkbenchProps) {
             : "No line fits what is looked for."}
         </p>
       )}
-      <p className="type-label mt-4 text-ink-2 max-tablet:hidden">
-        Enter edits a cell, or on a line’s number opens all of its fields. Arrow keys move. Shift and arrow
-        select. Ctrl and C copies with units
-        {canEdit
-          ? "; Ctrl and V pastes a block. Insert begins a line, Alt and arrow moves one, Delete empties cells."
-          : "."}
-      </p>
+      <p className="type-label mt-4 text-ink-2 max-tablet:hidden">{keyWords(list.money, canEdit)}</p>
       {opened && list.money && (
         <LineForm
           list={list}
@@ -271,6 +267,17 @@ export function PartsWorkbench(props: WorkbenchProps) {
       )}
     </div>
   );
+}
+
+function keyWords(canOpen: boolean, canEdit: boolean): string {
+  const words = ["Arrow keys move. Shift and arrow select. Ctrl and C copies with units."];
+  if (canEdit) words.unshift("Enter edits a cell.");
+  if (canOpen) words.push("Enter on a line’s number opens all of its fields.");
+  if (canEdit)
+    words.push(
+      "Ctrl and V pastes a block, Ctrl and D fills down. Insert begins a line, Alt and arrow moves one, Delete empties cells.",
+    );
+  return words.join(" ");
 }
 
 function basis({ plan }: Bought): string {

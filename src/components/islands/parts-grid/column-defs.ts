@@ -49,15 +49,15 @@ const EXAMPLES: DraftCells = {
 /** The name of a column, as its head says it; with several editions each has a column under its own name. */
 export function columnHead(key: ColumnKey, editions: readonly { id: string; name: string }[]): string {
   if (!key.startsWith("quantity:")) return HEADS[key] ?? "";
-  if (editions.length === 1) return "Qty";
+  if (editions.length < 2) return "Qty";
   return editions.find(({ id }) => id === key.slice(9))?.name ?? "";
 }
 
 const WIDTHS: Partial<Record<ColumnKey, Partial<Def>>> = {
   place: { width: 52 },
   designators: { width: 104 },
-  part: { flex: 1, minWidth: 170 },
-  bands: { width: 80 },
+  part: { flex: 1, minWidth: 160 },
+  bands: { width: 88 },
   package: { width: 120 },
   drawer: { width: 70 },
   supplier: { width: 162 },
@@ -187,10 +187,10 @@ function boughtOf(row: GridRow | undefined): number {
 
 /** On a phone: who it is, how many, what, and what it costs; a line is opened to be edited. */
 const PHONE_WIDTHS: Partial<Record<ColumnKey, Partial<Def>>> = {
-  designators: { width: 92, wrapText: true },
+  designators: { width: 90, wrapText: true },
   part: { flex: 1, minWidth: 96, autoHeight: true },
-  bands: { width: 70 },
-  perKit: { width: 74 },
+  bands: { width: 64 },
+  perKit: { width: 66 },
   state: { width: 110 },
 };
 
@@ -205,9 +205,9 @@ export interface ColumnsWanted {
 export function columnDefs({ keys, editions, phone, sortable }: ColumnsWanted): Def[] {
   const at = new Map<string, number>(keys.map((key, place) => [key, place]));
   return keys.map((key): Def => {
-    const head = columnHead(key, editions);
+    const head = columnHead(key, phone ? [] : editions);
     const width = phone ? (PHONE_WIDTHS[key] ?? { width: 52 }) : (WIDTHS[key] ?? {});
-    const quantity = phone ? 50 : editions.length > 1 ? 74 : 56;
+    const quantity = phone ? 42 : editions.length > 1 ? 74 : 56;
     return {
       colId: key,
       headerName: head,

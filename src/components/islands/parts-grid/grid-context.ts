@@ -26,6 +26,8 @@ export interface GridContext {
   range: CellRange | null;
   draft: DraftCells;
   canEdit: boolean;
+  /** Whether a line's form can be opened: it shows how its part is bought. */
+  canOpen: boolean;
   canChoose: boolean;
   offersFor: (part: string) => OfferChoice[];
   pinnedFor: (part: string) => string | null;

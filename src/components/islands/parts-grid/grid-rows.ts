@@ -174,6 +174,15 @@ export function piecesIn(list: PartsList, edition: string): number {
     .reduce((sum: number, { quantities }) => sum + (quantities[edition] ?? 0), 0);
 }
 
+/** The edition with most pieces, which stands for the kit where there are several. */
+export function fullestEdition(list: PartsList): { id: string; name: string; pieces: number } | undefined {
+  const all = list.editions.map(({ id, name }) => ({ id, name, pieces: piecesIn(list, id) }));
+  return all.reduce<(typeof all)[number] | undefined>(
+    (most, one) => (most === undefined || one.pieces > most.pieces ? one : most),
+    undefined,
+  );
+}
+
 /** What all parts cost: for the run, and in one kit, as all that is spent on them without freight. */
 export interface PartsTotal {
   run: string;
