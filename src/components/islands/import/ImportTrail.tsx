@@ -33,12 +33,14 @@ function stages({ matched, leftOut, open, taken }: TrailCounts): TrailStop[] {
     open > 0
       ? { name: "Rows", href: "#rows", state: { kind: "to-settle", count: open }, here: true }
       : { name: "Rows", href: "#rows", state: { kind: "done" }, words: "settled" },
-    {
-      name: "Bring in",
-      href: "#bring-in",
-      state: { kind: "not-started" },
-      words: "not yet",
-      here: open === 0,
-    },
+    taken
+      ? { name: "Bring in", href: "#main", state: { kind: "done" }, words: "brought in", here: true }
+      : {
+          name: "Bring in",
+          href: "#bring-in",
+          state: { kind: "not-started" },
+          words: "not yet",
+          here: open === 0,
+        },
   ];
 }
