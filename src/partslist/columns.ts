@@ -1,85 +1,15 @@
-import { type ColumnCells, holdsDesignators, lookAtColumn } from "./column-cells.ts";
-import { suits } from "./column-fit.ts";
-import { readDesignators } from "./designators.ts";
+import { type ColumnCells, lookAtColumn } from "./column-cells.ts";
+import { findHeading } from "./find-heading.ts";
 import { currencyOf, type HeadingMatch, matchHeading, plainHeading } from "./headings.ts";
-import type { ColumnGuess, ColumnGuesses, ColumnMapping, ColumnMeaning, GuessReason } from "./mapping.ts";
+import type { ColumnGuess, ColumnGuesses, ColumnMapping, ColumnMeaning } from "./mapping.ts";
 import { MEANINGS, type Meaning, REPEATABLE_MEANINGS } from "./meanings.ts";
 import { decimalMarkOf } from "./numbers.ts";
+import { agreements, type Scored, scoreColumn } from "./score-columns.ts";
 import type { SheetRecord } from "./sheet.ts";
 
-const HEADING_SEARCHED = 400;
 const ROWS_LOOKED_AT = 250;
 /** Least score at which a meaning is given to a column. */
 const LEAST = 2.5;
-
-/**
- * The heading row: the record whose cells the vocabulary knows best. Without one, a record of short words
- * over rows of another kind. `null` where the list begins with parts at once.
- */
-export function findHeading(records: readonly SheetRecord[]): number | null {
-  let best: { record: number; score: number } | null = null;
-  let searched = 0;
-  for (const { record, cells } of records) {
-    if (searched++ > HEADING_SEARCHED) break;
-    const score = headingScore(cells);
-    if (score >= 2 && (best === null || score > best.score)) best = { record, score };
-    // A heading stands over its table: once a good one is found, only a clearly better one replaces it.
-    else if (best && searched - best.record > 60) break;
-  }
-  return best ? best.record : unknownHeading(records);
-}
-
-function headingScore(cells: readonly string[]): number {
-  const filled = cells.filter((cell) => cell.trim() !== "");
-  if (filled.length < 2 || filled.some((cell) => cell.length > 80 && !cell.includes("\n"))) return 0;
-  const breaks = risingBreaks(filled);
-  let known = 0;
-  let unlikely = 0;
-  const seen = new Set<Meaning>();
-  for (const cell of filled) {
-    const match = matchHeading(cell)[0];
-    if (match && !seen.has(match.meaning)) {
-      known += match.weight >= 5 ? 1.5 : 1;
-      seen.add(match.meaning);
-    } else if ((!breaks && /^[\d.,\s€$£%]+$/.test(cell)) || (!match && holdsDesignators(cell.trim())))
-      unlikely++;
-  }
-  return seen.size < 2 ? 0 : known - unlikely * 1.5 - (filled.length - known > known * 2 ? 1 : 0);
-}
-
-/** Headings such as 1, 10, 100: two and more bare whole numbers that rise. */
-function risingBreaks(filled: readonly string[]): boolean {
-  const numbers = filled
-    .filter((cell) => /^\s*\d{1,6}\s*\+?\s*$/.test(cell))
-    .map((cell) => Number.parseInt(cell, 10));
-  return numbers.length > 1 && numbers.every((number, at) => at === 0 || number > (numbers[at - 1] ?? 0));
-}
-
-/** A heading in words the vocabulary does not know, told from the rows under it. */
-function unknownHeading(records: readonly SheetRecord[]): number | null {
-  const filled = records
-    .filter(({ cells }) => cells.filter((cell) => cell.trim() !== "").length > 1)
-    .slice(0, 40);
-  const first = filled[0];
-  if (!first || filled.length < 3) return null;
-  const below = filled.slice(1);
-  let differs = 0;
-  first.cells.forEach((heading, column) => {
-    const cells = lookAtColumn(below.map((record) => record.cells[column] ?? ""));
-    const head = lookAtColumn([heading]);
-    if (head.filled && cells.designators >= 0.6 && head.designators === 0) differs++;
-    if (
-      head.filled &&
-      cells.integers + cells.decimals + cells.money >= 0.8 &&
-      head.integers + head.decimals + head.money === 0
-    )
-      differs++;
-  });
-  const plain = first.cells.every((cell) => cell.length < 30 && !/^\d/.test(cell.trim()));
-  return plain && differs > 0 && !first.cells.some((cell) => holdsDesignators(cell.trim()))
-    ? first.record
-    : null;
-}
 
 /** The rows under the heading that show what a column holds. */
 function sampleRows(records: readonly SheetRecord[], header: number | null): string[][] {
@@ -96,83 +26,6 @@ function sampleRows(records: readonly SheetRecord[], header: number | null): str
 
 function key(cells: readonly string[]): string {
   return cells.map((cell) => cell.trim().toLowerCase()).join("\u001f");
-}
-
-interface Scored {
-  column: number;
-  match: HeadingMatch;
-  score: number;
-  reason: GuessReason;
-}
-
-function scoreColumn(column: number, heading: string, cells: ColumnCells, agreement: number): Scored[] {
-  const matches = matchHeading(heading);
-  const scored: Scored[] = [];
-  for (const meaning of MEANINGS) {
-    const match = matches.find((one) => one.meaning === meaning);
-    const fit = suits(meaning, cells, agreement);
-    const weight = match?.weight ?? 0;
-    if (
-      weight === 0 &&
-      (fit.alone === 0 || (matches.some((one) => one.weight >= 5) && heading.trim() !== ""))
-    )
-      continue;
-    const score = weight === 0 ? fit.alone : weight + fit.fit;
-    const reason: GuessReason = weight === 0 ? "cells" : fit.fit > 1 ? "heading-and-cells" : "heading";
-    scored.push({
-      column,
-      match: match ?? { meaning, weight, supplier: null, breakQuantity: null },
-      score,
-      reason,
-    });
-  }
-  const code = codeUnderAName(column, heading, cells, matches);
-  if (code) scored.push(code);
-  return scored;
-}
-
-/** A column of codes under a name the vocabulary does not know: order codes of the supplier of that name. */
-function codeUnderAName(
-  column: number,
-  heading: string,
-  cells: ColumnCells,
-  matches: readonly HeadingMatch[],
-): Scored | null {
-  const name = heading.trim();
-  if (matches.length > 0 || !/^[\p{L}][\p{L}\p{N} .&'-]{1,29}$/u.test(name) || cells.filled < 1) return null;
-  if (/^[A-Z]{0,3}PN$/i.test(name)) return null;
-  if (cells.codes + cells.integers < 0.6 || cells.distinct < 0.5 || cells.flags > 0.3 || cells.sequence)
-    return null;
-  if (
-    cells.designators > 0.5 ||
-    cells.packages > 0.5 ||
-    (cells.integers > 0.8 && cells.examples.every((cell) => cell.length < 4))
-  )
-    return null;
-  return {
-    column,
-    match: { meaning: "order-code", weight: 0, supplier: name, breakQuantity: null },
-    score: 3,
-    reason: "cells",
-  };
-}
-
-/** How often the number in one column counts the designators of another: a quantity is known by this. */
-function agreements(rows: readonly string[][], designators: number, columns: number): number[] {
-  const counts = rows.map((cells) => readDesignators(cells[designators] ?? "").designators.length);
-  const telling = counts.some((count) => count > 1);
-  return Array.from({ length: columns }, (_, column) => {
-    if (!telling || column === designators) return 0;
-    let agree = 0;
-    let filled = 0;
-    rows.forEach((cells, at) => {
-      const text = (cells[column] ?? "").trim();
-      if (text === "" || counts[at] === 0) return;
-      filled++;
-      if (/^\d+$/.test(text) && Number(text) === counts[at]) agree++;
-    });
-    return filled < 2 ? 0 : agree / filled;
-  });
 }
 
 function assign(scored: Scored[], columns: number): (Scored | null)[] {

@@ -7,10 +7,11 @@ import { listColumns } from "./list-columns.ts";
 import { askAboutTables } from "./list-tables.ts";
 import type { ColumnMapping } from "./mapping.ts";
 import { settle } from "./question-effects.ts";
-import { type ReadValues, readLine } from "./read-line.ts";
+import { readLine } from "./read-line.ts";
 import { type ListShape, listShape, type RowKind, rowKind } from "./row-kind.ts";
 import { type Answers, ask, indexAnswers, type RowWork } from "./row-work.ts";
 import type { SheetRecord } from "./sheet.ts";
+import type { ReadValues } from "./value-cell.ts";
 
 /** Longest text of a row shown in one line. */
 const ROW_TEXT_LENGTH = 200;

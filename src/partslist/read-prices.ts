@@ -1,16 +1,14 @@
 import { guessColumns } from "./columns.ts";
-import type { Answer, Question, ReadPrice } from "./draft.ts";
-import { readLeadTime } from "./lead-time.ts";
-import { cellAt, type ListColumns, listColumns, textAt } from "./list-columns.ts";
+import type { Answer, ReadPrice } from "./draft.ts";
+import { type ListColumns, listColumns } from "./list-columns.ts";
 import type { ColumnGuesses, ColumnMapping } from "./mapping.ts";
-import { indexParts, type Match, matchPart, type PartIndex } from "./match-part.ts";
+import { indexParts, type PartIndex } from "./match-part.ts";
+import { askLadder, askPart, askPrice } from "./offer-questions.ts";
 import type { KnownPart, PriceDraft, PriceReadResult, PriceRow } from "./price-draft.ts";
-import { checkLadder, mendLadder } from "./price-ladder.ts";
-import { askAboutPrice } from "./price-question.ts";
-import { readQuantity } from "./quantities.ts";
-import { type PriceProblem, readOffers } from "./read-offers.ts";
+import { draftOf, keyOf } from "./price-row.ts";
+import type { PriceProblem } from "./read-offers.ts";
 import { type ListShape, listShape, rowKind } from "./row-kind.ts";
-import { type Answers, ask, indexAnswers, type RowWork } from "./row-work.ts";
+import { type Answers, indexAnswers, type RowWork } from "./row-work.ts";
 import type { SheetRecord } from "./sheet.ts";
 
 export interface ReadPricesInput {
@@ -119,167 +117,13 @@ function joinInto(work: PriceWork, into: PriceWork, offer: PriceDraft): PriceWor
   return { ...work, kind: "break", breakOf: into };
 }
 
-/** Rows of one supplier with the same order code, else part number, else description, are one offer. */
-function keyOf(draft: PriceDraft): string | null {
-  const name = draft.orderCode ?? draft.partNumber ?? draft.value ?? draft.description;
-  return name === null
-    ? null
-    : `${draft.supplier ?? ""}\u001f${name.toUpperCase()}\u001f${draft.orderCode === null ? (draft.package ?? "") : ""}`;
-}
-
-function draftOf(
-  record: SheetRecord,
-  columns: ListColumns,
-  supplier: string | null,
-): { draft: PriceDraft; problems: PriceProblem[] } {
-  const { cells, row } = record;
-  const { offers, problems } = readOffers(cells, columns);
-  const [offer] = offers;
-  const leadTime = columns.first("lead-time");
-  const inWeeks = /week|woche|semaine|semana|týd|tyg/i.test(columns.all("lead-time")[0]?.heading ?? "");
-  const draft: PriceDraft = {
-    rows: [row],
-    supplier: offer?.supplier ?? textAt(cells, columns.first("supplier")) ?? supplier,
-    orderCode: offer?.orderCode ?? null,
-    manufacturer: textAt(cells, columns.first("manufacturer")),
-    partNumber: textAt(cells, columns.first("part-number")),
-    description: textAt(cells, columns.first("description")),
-    value: textAt(cells, columns.first("value")),
-    package: textAt(cells, columns.first("package")),
-    currency: offer?.prices[0]?.currency ?? columns.currency,
-    breaks: offer?.prices ?? [],
-    minimumOrder: countAt(cells, columns, "minimum-order"),
-    orderMultiple: countAt(cells, columns, "order-multiple"),
-    stockShown: countAt(cells, columns, "stock"),
-    leadTimeDays: leadTime === null ? null : readLeadTime(cellAt(cells, leadTime), inWeeks),
-    part: null,
-    matchedBy: null,
-  };
-  return { draft, problems };
-}
-
-function countAt(
-  cells: readonly string[],
-  columns: ListColumns,
-  meaning: "minimum-order" | "order-multiple" | "stock",
-): number | null {
-  const column = columns.first(meaning);
-  const read = readQuantity(
-    cellAt(cells, column).replace(/^[>≥<≤+]\s*|\s*\+$/g, ""),
-    column === null ? null : columns.mark(column),
-  );
-  return read.kind === "number" || read.kind === "measure" ? read.quantity : null;
-}
-
 function finishOffer(work: PriceWork, offer: PriceDraft, index: PartIndex, answers: Answers): void {
   const settled = [
-    askPrice(work, offer, answers),
+    askPrice(work, work.problems[0], offer, answers),
     askLadder(work, offer, answers),
     askPart(work, offer, index, answers),
   ];
   if (settled.includes("leave-row-out")) work.offer = null;
-}
-
-/** The choice that holds for a question: the answer, else the suggestion. */
-function choiceOf(question: Question): string {
-  return question.answer ?? question.suggested.choice;
-}
-
-function askPrice(work: PriceWork, offer: PriceDraft, answers: Answers): string | null {
-  const [problem] = work.problems;
-  if (problem === undefined) {
-    if (offer.breaks.length > 0) return null;
-    return choiceOf(
-      ask(
-        work,
-        {
-          code: "price-missing",
-          level: "look",
-          columns: [],
-          facts: {},
-          choices: ["keep-offer", "leave-row-out"],
-        },
-        answers,
-      ),
-    );
-  }
-  const { per } = problem;
-  const choice = choiceOf(askAboutPrice(work, problem, offer.breaks, answers));
-  if (per !== null && choice !== "leave-price-out")
-    offer.breaks.push({
-      quantity: per.per,
-      amount: choice === "read-from" ? per.amount : per.each,
-      currency: per.currency ?? offer.currency,
-    });
-  return choice;
-}
-
-function askLadder(work: PriceWork, offer: PriceDraft, answers: Answers): string | null {
-  const { breaks, problem } = checkLadder(offer.breaks);
-  offer.breaks = breaks;
-  if (problem === null) return null;
-  const { code, ...facts } = problem;
-  const must = code === "ladder-not-rising";
-  const choices = must
-    ? ["keep-lower", "keep-higher", "leave-row-out"]
-    : ["keep-prices", "drop-step", "leave-row-out"];
-  const choice = choiceOf(
-    ask(
-      work,
-      {
-        code,
-        level: must ? "must" : "look",
-        columns: [],
-        facts: { ...facts, currency: offer.currency },
-        choices,
-      },
-      answers,
-    ),
-  );
-  offer.breaks = mendLadder(breaks, problem, choice);
-  return choice;
-}
-
-/** A person may name any part of the workshop, not only those offered: `take-part:<id>`. */
-function askPart(work: PriceWork, offer: PriceDraft, index: PartIndex, answers: Answers): string | null {
-  const match = matchPart(offer, index);
-  if (match.kind === "one") {
-    offer.part = match.part.id;
-    offer.matchedBy = match.by;
-    return null;
-  }
-  const question = askWhichPart(work, offer, match, index, answers);
-  const id = choiceOf(question).replace(/^take-part:/, "");
-  if (!index.byId.has(id)) return choiceOf(question);
-  offer.part = id;
-  offer.matchedBy = "answer";
-  return null;
-}
-
-function askWhichPart(
-  work: PriceWork,
-  offer: PriceDraft,
-  match: Match & { kind: "several" | "none" },
-  index: PartIndex,
-  answers: Answers,
-): Question {
-  const offered = match.kind === "several" ? match.parts : match.near;
-  const code = match.kind === "several" ? "part-found-twice" : "part-not-found";
-  const given = answers.get(`${work.record.row} ${code}`)?.choice ?? "";
-  const named = index.byId.get(given.replace(/^take-part:/, ""));
-  const parts = named && !offered.includes(named) ? [...offered, named] : offered;
-  const facts = {
-    text:
-      [offer.orderCode, offer.partNumber, offer.value, offer.description].find((text) => text !== null) ?? "",
-    names: parts.map((part) => part.name),
-  };
-  const choices = ["leave-row-out", ...parts.map((part) => `take-part:${part.id}`)];
-  const question = ask(work, { code, level: "look", columns: [], facts, choices }, answers);
-  question.alternatives = question.alternatives.map((choice) => ({
-    choice: choice.choice,
-    facts: { name: index.byId.get(choice.choice.replace(/^take-part:/, ""))?.name ?? "" },
-  }));
-  return question;
 }
 
 function rowOf(work: PriceWork): PriceRow {
