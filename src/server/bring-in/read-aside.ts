@@ -27,8 +27,8 @@ let lastId = 0;
 
 /** The thread is started at the first large list and kept; it does not keep the process alive. */
 function startAside(): Aside {
-  const file = join(process.cwd(), "src/server/bring-in/reading-worker.ts");
-  const started: Aside = { worker: new Worker(file, { execArgv: ["--import", "tsx"] }), waiting: new Map() };
+  const file = join(process.cwd(), "src/server/bring-in/reading-thread.mjs");
+  const started: Aside = { worker: new Worker(file), waiting: new Map() };
   started.worker.unref();
   started.worker.on("message", ({ id, result, fault }: Reply) => {
     const waiter = started.waiting.get(id);
