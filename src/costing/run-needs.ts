@@ -40,16 +40,16 @@ export function need(code: NeedCode, at: Place[]): Need {
 
 /** Joins lists of needs: one entry a code, places in order of first mention, each once. */
 export function joinNeeds(...lists: readonly (readonly Need[])[]): Need[] {
-  const joined = new Map<NeedCode, Need>();
+  const joined = new Map<NeedCode, { page: SourcePage; at: Map<string, Place> }>();
   for (const { code, at, page } of lists.flat()) {
-    const known = joined.get(code) ?? { code, at: [], page };
-    const texts = new Set(known.at.map((place) => JSON.stringify(place)));
-    joined.set(code, {
-      ...known,
-      at: [...known.at, ...at.filter((place) => !texts.has(JSON.stringify(place)))],
-    });
+    const known = joined.get(code) ?? { page, at: new Map<string, Place>() };
+    joined.set(code, known);
+    for (const place of at) {
+      const text = JSON.stringify(place);
+      if (!known.at.has(text)) known.at.set(text, place);
+    }
   }
-  return [...joined.values()];
+  return [...joined].map(([code, { page, at }]) => ({ code, at: [...at.values()], page }));
 }
 
 /** Why a run's figures are not known, by the bits of `MISSING` they depend on. */
