@@ -22,7 +22,9 @@ function addressOf(file: string): string {
 
 /** The doc comment above a method's export, as one line of text. */
 export function summaryIn(source: string, method: string): string {
-  const found = new RegExp(`/\\*\\*((?:(?!\\*/)[\\s\\S])*)\\*/\\s*export const ${method}\\b`).exec(source);
+  const found = new RegExp(`^/\\*\\*((?:(?!\\*/)[\\s\\S])*)\\*/\\s*export const ${method}\\b`, "m").exec(
+    source,
+  );
   const lines = (found?.[1] ?? "").split("\n").map((line) => line.replace(/^\s*\*? ?/, "").trim());
   return lines.join(" ").trim();
 }
