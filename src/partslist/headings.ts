@@ -65,7 +65,7 @@ const PARTS: readonly (readonly [RegExp, Meaning])[] = [
     "part-number",
   ],
   [
-    /\b(?:supplier|vendor|distributor|lieferant|lief|fournisseur|proveedor|fornitore|leverancier|dodavatel|shop|store|stock)\b.*\b(?:part|no|nr|nummer|number|num|pn|code|ref|reference|referencia|codice|sku|id)\b/,
+    /\b(?:supplier|supp|vendor|distributor|distrib|dist|lieferant|lief|fournisseur|proveedor|fornitore|leverancier|dodavatel|shop|store|stock)\b.*\b(?:part|no|nr|nummer|number|num|pn|code|ref|reference|referencia|codice|sku|id)\b/,
     "order-code",
   ],
   [

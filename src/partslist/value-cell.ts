@@ -71,12 +71,13 @@ function ownValue(value: string | null, partClass: PartClass, columns: ListColum
 }
 
 function bareValue(written: string, partClass: PartClass, mark: DecimalMark | null): ValueReading | null {
-  const number = partClass === "capacitor" ? guessBareCapacitance(firstWord(written)) : null;
+  const number = partClass === "capacitor" ? guessBareCapacitance(firstNumber(written)) : null;
   return number ?? guessSlippedValue(written, partClass, mark);
 }
 
-function firstWord(text: string): string {
-  return /^\S+/.exec(text)?.[0] ?? text;
+/** The number a cell begins with: "104" of "104/50V". */
+function firstNumber(text: string): string {
+  return /^\d*[.,]?\d+[A-Z]?(?=$|[\s/;,])/.exec(text)?.[0] ?? text;
 }
 
 /** A part-number cell that holds "47R" or "470ohm PTH" instead of a part number. */

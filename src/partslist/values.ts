@@ -64,7 +64,7 @@ interface Grammar {
 }
 
 const BEFORE = "(?<![A-Za-z0-9.,/+*])";
-const NUMBER = "(\\d{1,3}(?:[ ,.]\\d{3})+(?:[.,]\\d+)?|\\d+(?:[.,]\\d+)?|[.,]\\d+)";
+const NUMBER = "(\\d{1,3}(?:[,.]\\d{3})+(?:[.,]\\d+)?|\\d+(?:[.,]\\d+)?|[.,]\\d+)";
 const AFTER = "(?![A-Za-z0-9Ω%])";
 
 function grammar(codeLetters: string, prefixes: string, unit: string, bare: string): Grammar {
@@ -180,6 +180,7 @@ export function findValue(text: string, partClass: PartClass, mark: DecimalMark 
   const plain = plainUnits(text)
     .replace(/_/g, " ")
     .replace(/^[~≈]\s*/, "")
+    .replace(/^(\d{1,3}) (\d{3})(?=\s?[A-Za-zΩ]{0,3}$)/, "$1$2")
     .trim();
   const tidy = kind === "resistance" ? resistanceSpelling(plain) : plain;
   const rules = GRAMMARS[kind];
@@ -193,6 +194,7 @@ export function findValue(text: string, partClass: PartClass, mark: DecimalMark 
 /** "2kR" is 2 kΩ, "B10k" a potentiometer's 10k, "680,1W" a value and a power. */
 function resistanceSpelling(text: string): string {
   return text
+    .replace(/(\d\s?[kKM])[\s-]?(?:lin|log)\b/gi, "$1 ")
     .replace(/(\d\s?[kKM])R\b/g, "$1Ω")
     .replace(/(\d\s?m)R\b/g, "$1Ω")
     .replace(/(^|[\s(])[ABCabc](\d+(?:[.,]\d+)?\s?[kKM])/g, "$1$2")

@@ -7,15 +7,7 @@ import { readCells } from "#src/partslist/cells.ts";
 import { guessColumns, mappingOf } from "#src/partslist/columns.ts";
 import { readList } from "#src/partslist/read-list.ts";
 import { decodeUpload } from "#src/server/decode-upload.ts";
-
-export interface BenchRow {
-  name: string;
-  /** Milliseconds of ours and of what it is compared with; medians of several runs. */
-  ours: number;
-  baseline: number;
-  ratio: number;
-  aim: string;
-}
+import type { BenchRow } from "./bench-row.ts";
 
 const ROWS = 10_000;
 const RUNS = 9;
@@ -71,9 +63,7 @@ function readAll(bytes: Uint8Array): void {
     throw new Error(`${counts.linesWithSuggestions} lines instead of ${ROWS}`);
 }
 
-function row(name: string, ours: number, baseline: number, aim: string): BenchRow {
-  return { name, ours, baseline, ratio: ours / baseline, aim };
-}
+const AIM = 3;
 
 /** Reading a list of ten thousand rows, from bytes to lines with their questions, against the bare grammar and bare inserts. */
 export async function run(): Promise<BenchRow[]> {
@@ -82,13 +72,16 @@ export async function run(): Promise<BenchRow[]> {
   const ours = median(() => readAll(bytes));
   const parsing = median(() => void Papa.parse<string[]>(text));
   const inserting = insertAll(Papa.parse<string[]>(text.trimEnd()).data);
+  const times = ours / (parsing + inserting);
+  const split = `${ours.toFixed(0)} ms; PapaParse alone ${parsing.toFixed(0)} ms, inserts into SQLite ${inserting.toFixed(0)} ms`;
   return [
-    row("Import of 10,000 rows: bytes to lines, against PapaParse alone", ours, parsing, "told, no aim"),
-    row(
-      "Import of 10,000 rows: bytes to lines, against PapaParse and SQLite inserts",
-      ours,
-      parsing + inserting,
-      "at most 3",
-    ),
+    {
+      what: "Import of 10,000 rows, bytes to lines, against PapaParse and raw inserts together",
+      value: Number(times.toFixed(2)),
+      unit: "times",
+      aim: `at most ${AIM} times`,
+      met: times <= AIM,
+      note: `${split}. Medians of ${RUNS}; every row has a description of its own.`,
+    },
   ];
 }

@@ -110,3 +110,13 @@ function decimal(number: number, places: number): string {
   const point = text.length + places;
   return `${text.slice(0, point)}.${text.slice(point)}`.replace(/0+$/, "").replace(/\.$/, "");
 }
+
+describe("numbers beside values", () => {
+  it("are not drawn into them", () => {
+    expect(si("CF-25 220R", "resistor")).toBe("220");
+    expect(si("RM 5 100n", "capacitor")).toBe("0.0000001");
+    expect(si("10 000 pF", "capacitor")).toBe("0.00000001");
+    expect(si("10 000", "resistor")).toBe("10000");
+    expect(si("10KLIN", "potentiometer")).toBe("10000");
+  });
+});
