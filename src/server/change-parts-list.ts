@@ -1,6 +1,7 @@
 import type { PartsChange } from "#src/shapes/parts-change.ts";
+import type { ChangingParts, PartsBatch } from "./parts-batch.ts";
 import { partsListOf } from "./parts-list.ts";
-import { type ChangingParts, type PartsBatch, takeStep } from "./parts-steps.ts";
+import { takeStep } from "./parts-steps.ts";
 import { type ChoiceView, type LineView, type PricedPartView, pricedPartsList } from "./present.ts";
 import { type FieldError, Problem } from "./problem.ts";
 import { editionsOf } from "./store/edition.ts";
@@ -55,6 +56,7 @@ function begun(given: ChangingParts): PartsBatch {
     lines: new Set(),
     parts: new Set(),
     removed: [],
+    known: null,
   };
 }
 

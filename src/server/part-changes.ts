@@ -1,6 +1,6 @@
 import type { PartChange } from "#src/shapes/part.ts";
 import type { Changing as ChangingSomewhere } from "./note-change.ts";
-import { changeSeenPart } from "./parts-steps.ts";
+import { changeSeenPart } from "./part-steps.ts";
 import { Problem } from "./problem.ts";
 import type { WorkshopRow } from "./store/membership.ts";
 import { partOf } from "./store/part.ts";

@@ -81,7 +81,7 @@ describe("a batch", () => {
     );
     expect(answer.status).toBe(422);
     expect(answer.problem?.errors?.map((error) => error.at)).toEqual([
-      "changes.1.quantities.elsewhere",
+      "changes.1.set.quantities.elsewhere",
       "changes.2.designators",
     ]);
     expect((await read(at)).lines).toMatchObject([{ note: "", version: 1 }]);

@@ -68,28 +68,6 @@ export function partsOf(db: Db, workshopId: string): PartRow[] {
     .all();
 }
 
-/** What two parts must share to be one and the same: what people read on the bag. */
-type PartIdentity = Pick<PartRow, "class" | "name" | "spec" | "package" | "manufacturerPartNumber">;
-
-/** The workshop's part that reads the same, if there is one, so that nobody buys it twice. */
-export function samePart(db: Db, workshopId: string, like: PartIdentity): PartRow | undefined {
-  return db
-    .select()
-    .from(parts)
-    .where(
-      and(
-        eq(parts.workshopId, workshopId),
-        eq(parts.class, like.class),
-        eq(parts.name, like.name),
-        eq(parts.spec, like.spec),
-        eq(parts.package, like.package),
-        eq(parts.manufacturerPartNumber, like.manufacturerPartNumber),
-      ),
-    )
-    .orderBy(asc(parts.createdAt))
-    .get();
-}
-
 export function addParts(db: Db, rows: NewPart[]): void {
   for (const chunk of inChunks(rows)) db.insert(parts).values(chunk).run();
 }

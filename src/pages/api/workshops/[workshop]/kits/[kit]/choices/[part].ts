@@ -1,4 +1,4 @@
-import { choosePart } from "#src/server/parts-steps.ts";
+import { choosePart } from "#src/server/part-steps.ts";
 import { route } from "#src/server/route.ts";
 import { inTransaction } from "#src/server/transaction.ts";
 import { PartChoiceChange } from "#src/shapes/part-choice.ts";
