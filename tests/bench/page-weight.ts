@@ -2,14 +2,12 @@ import { type Browser, chromium } from "@playwright/test";
 import { seedId, WORKSHOP_ID } from "#db/seed/load.ts";
 import { CHROMIUM } from "#tests/support/chromium.ts";
 import { demoPassword, startServer } from "#tests/support/running-server.ts";
+import type { BenchRow } from "./bench-row.ts";
 
-/** JavaScript that a page makes the browser fetch, compressed, in kB, by script. */
-export interface PageWeight {
-  page: string;
-  kilobytes: number;
+interface Weight {
+  /** Kilobytes of script the page makes the browser fetch, compressed. */
+  all: number;
   libraries: number;
-  aim: string;
-  met: boolean;
 }
 
 const KIT = `/workshops/${WORKSHOP_ID}/kits/${seedId("kit", "Dew Lantern")}`;
@@ -28,12 +26,7 @@ const PAGES = [
 /** Chunks that hold the grid, the charts and React are told by what is written in them. */
 const LIBRARY = /ag-grid|recharts|react\.transitional\.element|ModuleRegistry/;
 
-async function weigh(
-  browser: Browser,
-  origin: string,
-  cookie: string,
-  page: string,
-): Promise<{ all: number; libraries: number }> {
+async function weigh(browser: Browser, origin: string, cookie: string, page: string): Promise<Weight> {
   const context = await browser.newContext({ baseURL: origin, extraHTTPHeaders: cookie ? { cookie } : {} });
   const tab = await context.newPage();
   const devtools = await context.newCDPSession(tab);
@@ -70,25 +63,28 @@ async function signIn(origin: string, dataFolder: string): Promise<string> {
   return reply.headers.getSetCookie()[0]?.split(";")[0] ?? "";
 }
 
-/** Measures every page of the built server once, with an empty cache. */
-export async function weighPages(): Promise<PageWeight[]> {
+function rowOf({ page, most, besideLibraries }: (typeof PAGES)[number], weight: Weight): BenchRow {
+  const counted = besideLibraries ? weight.all - weight.libraries : weight.all;
+  return {
+    what: `JavaScript of ${page}, compressed${besideLibraries ? ", beside its libraries" : ""}`,
+    value: Math.round(counted),
+    unit: "kB",
+    aim: `at most ${most} kB`,
+    met: counted <= most,
+    note: `${Math.round(weight.all)} kB in all, of which grid, chart and React libraries ${Math.round(weight.libraries)} kB.`,
+  };
+}
+
+/** Weighs every page of the built server once, with an empty cache. */
+export async function run(): Promise<BenchRow[]> {
   const server = await startServer(4361);
   const browser = await chromium.launch(CHROMIUM);
   try {
     const cookie = await signIn(server.origin, server.dataFolder);
-    const weights: PageWeight[] = [];
-    for (const { page, most, besideLibraries, stranger } of PAGES) {
-      const { all, libraries } = await weigh(browser, server.origin, stranger ? "" : cookie, page);
-      const counted = besideLibraries ? all - libraries : all;
-      weights.push({
-        page,
-        kilobytes: Math.round(all),
-        libraries: Math.round(libraries),
-        aim: besideLibraries ? `libraries + ${most} kB` : `${most} kB`,
-        met: counted <= most,
-      });
-    }
-    return weights;
+    const rows: BenchRow[] = [];
+    for (const page of PAGES)
+      rows.push(rowOf(page, await weigh(browser, server.origin, page.stranger ? "" : cookie, page.page)));
+    return rows;
   } finally {
     await browser.close();
     await server.stop();

@@ -5,7 +5,7 @@ const line = (id: string, designators: string, perKit: number, mark = "in-kit") 
   id,
   designators,
   mark,
-  quantities: perKit > 0 ? { full: perKit, bare: 0 } : {},
+  quantities: (perKit > 0 ? { full: perKit, bare: 0 } : {}) as Record<string, number>,
 });
 
 it("finds lines without a quantity, at odds with their designators, and named twice", () => {
