@@ -10,6 +10,8 @@ const SIGNS = { comma: ",", semicolon: ";", tab: "\t", pipe: "|" } as const;
 type Sign = keyof typeof SIGNS;
 
 const SAMPLE_LINES = 400;
+/** Characters in which a habit of writing blanks before quotes shows. */
+const SPACED_QUOTES_SOUGHT = 20_000;
 /** How often an unclosed quote may be taken as a plain character before quotes are given up. */
 const QUOTE_REPAIRS_MOST = 40;
 
@@ -108,7 +110,8 @@ function bestSign(sample: string): { sign: Sign; width: number; share: number; s
 function closeUpQuotes(text: string, sign: string): string {
   const escaped = sign === "|" ? "\\|" : sign;
   const spaced = new RegExp(`(^|${escaped}) +(?="[^"\\r\\n]*" *(?:${escaped}|\\r?$))`, "gm");
-  return sign !== "\t" && spaced.test(text) ? text.replace(spaced, "$1") : text;
+  const seen = sign !== "\t" && spaced.test(text.slice(0, SPACED_QUOTES_SOUGHT));
+  return seen ? text.replace(spaced, "$1") : text;
 }
 
 function delimited(text: string, sign: Sign): Grid {
@@ -121,6 +124,7 @@ function delimited(text: string, sign: Sign): Grid {
 
 /** Each whole line in quotes of its own, as a spreadsheet writes a list that was pasted into one column. */
 function unwrapLines(text: string): string {
+  if (!text.startsWith('"')) return text;
   const lines = text.split(/\r?\n/);
   const filled = lines.filter((line) => line.trim() !== "");
   const wrapped = filled.filter((line) => /^"(?:[^"]|"")*[,;\t](?:[^"]|"")*"[,;]*$/.test(line));
@@ -144,7 +148,7 @@ function chooseGrid(text: string): Grid {
   const declared = /^(?:\s*)"?sep=(.)"?\s*?(?:\r?\n|$)/i.exec(text)?.[1];
   for (const sign of Object.keys(SIGNS) as Sign[]) if (SIGNS[sign] === declared) return delimited(text, sign);
   const sample = text.split("\n", SAMPLE_LINES).join("\n");
-  const drawn = drawnTable(text);
+  const drawn = drawnTable(sample) === null ? null : drawnTable(text);
   if (drawn) return { delimiter: "drawn-table", rows: drawn.rows, lines: drawn.lines };
   const best = bestSign(sample);
   if (best && best.width >= 3 && best.share >= 0.6) {

@@ -24,14 +24,12 @@ function joined(
 }
 
 export function textsOf(cells: readonly string[], columns: ListColumns): Texts {
-  const text = (meaning: "value" | "part-number" | "package" | "class") =>
-    textAt(cells, columns.first(meaning));
   return {
-    value: text("value"),
+    value: textAt(cells, columns.first("value")),
     description: joined(cells, columns, "description"),
-    partNumber: text("part-number"),
-    package: text("package"),
-    kind: text("class"),
+    partNumber: textAt(cells, columns.first("part-number")),
+    package: textAt(cells, columns.first("package")),
+    kind: textAt(cells, columns.first("class")),
     note: joined(cells, columns, "note"),
   };
 }
