@@ -53,7 +53,7 @@ export function QuoteTable(props: QuoteTableProps) {
               {head}
             </th>
           ))}
-          <th scope="col" className={HEAD_CELL}>
+          <th scope="col" className={`${HEAD_CELL} ${WIDE}`}>
             <span className="heard-only">State</span>
           </th>
           {canChange && (
@@ -99,6 +99,11 @@ function Row({
 }: QuoteTableProps & { row: QuoteRow }) {
   const opens = useOpens();
   const mark = quoteMark(quote, result, today);
+  const state = (
+    <Chip kind={mark.kind} className="align-middle">
+      {mark.word}
+    </Chip>
+  );
   const change = (
     <QuietButton onClick={() => onEdit(quote)} aria-label={`Change the quote of ${quote.boardHouse}`}>
       Change
@@ -117,6 +122,10 @@ function Row({
             />
           )}
           {quote.boardHouse}
+        </span>
+        <span className="mt-1 flex flex-wrap items-center gap-x-4 pl-[34px] tablet:hidden">
+          {state}
+          {canChange && change}
         </span>
       </th>
       <td className={`${CELL} ${WIDE}`}>{orderWords(result)}</td>
@@ -141,12 +150,7 @@ function Row({
         {quote.leadTimeDays === null ? "not known" : spanText(quote.leadTimeDays)}
       </td>
       <td className={`${CELL} text-ink-2 ${WIDE}`}>{boardWords(quote)}</td>
-      <td className={CELL}>
-        <Chip kind={mark.kind} className="align-middle">
-          {mark.word}
-        </Chip>
-        {canChange && <span className="mt-1 block tablet:hidden">{change}</span>}
-      </td>
+      <td className={`${CELL} ${WIDE}`}>{state}</td>
       {canChange && <td className={`${CELL} ${WIDE}`}>{change}</td>}
     </tr>
   );

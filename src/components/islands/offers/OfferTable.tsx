@@ -67,7 +67,7 @@ export function OfferTable(props: OfferTableProps) {
           <th scope="col" className={`${HEAD_CELL} ${WIDE}`}>
             Seen
           </th>
-          <th scope="col" className={HEAD_CELL}>
+          <th scope="col" className={`${HEAD_CELL} ${WIDE}`}>
             <span className="heard-only">State</span>
           </th>
           {canChange && (
@@ -107,10 +107,24 @@ function Row({ row, ...props }: OfferTableProps & { row: OfferRow }) {
   const mark = offerMark(offer, considered, today);
   const lead = offer.leadTimeDays ?? supplier?.leadTimeDays ?? null;
   const name = `${supplier?.name ?? "Nobody"} ${offer.orderCode}`.trim();
+  const state = (
+    <Chip kind={mark.kind} className="align-middle">
+      {mark.word}
+    </Chip>
+  );
+  const change = (
+    <QuietButton onClick={() => onEdit(offer)} aria-label={`Change the offer of ${name}`}>
+      Change
+    </QuietButton>
+  );
   return (
     <tr data-chosen={considered.chosen || undefined} className={rowLook("two-lines", considered.chosen)}>
       <th scope="row" className={`${CELL} font-normal`}>
         <Who row={row} name={name} {...props} />
+        <span className="mt-1 flex flex-wrap items-center gap-x-4 pl-[34px] tablet:hidden">
+          {state}
+          {canChange && change}
+        </span>
       </th>
       <td className={`${CELL} ${WIDE}`}>
         <Breaks offer={offer} reached={considered.quantity} />
@@ -130,25 +144,8 @@ function Row({ row, ...props }: OfferTableProps & { row: OfferRow }) {
       </td>
       <td className={`${CELL} ${WIDE}`}>{lead === null ? "not known" : spanText(lead)}</td>
       <td className={`${CELL} text-ink-2 ${WIDE}`}>{seenText(offer, today)}</td>
-      <td className={CELL}>
-        <Chip kind={mark.kind} className="align-middle">
-          {mark.word}
-        </Chip>
-        {canChange && (
-          <span className="mt-1 block tablet:hidden">
-            <QuietButton onClick={() => onEdit(offer)} aria-label={`Change the offer of ${name}`}>
-              Change
-            </QuietButton>
-          </span>
-        )}
-      </td>
-      {canChange && (
-        <td className={`${CELL} ${WIDE}`}>
-          <QuietButton onClick={() => onEdit(offer)} aria-label={`Change the offer of ${name}`}>
-            Change
-          </QuietButton>
-        </td>
-      )}
+      <td className={`${CELL} ${WIDE}`}>{state}</td>
+      {canChange && <td className={`${CELL} ${WIDE}`}>{change}</td>}
     </tr>
   );
 }
