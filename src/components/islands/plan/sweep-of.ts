@@ -8,7 +8,7 @@ import { moduleStore } from "./module-store.ts";
 /** A frame, less what drawing takes; a sweep that took longer goes to the worker the next time. */
 const FRAME_MS = 10;
 /** Before anything was timed: parts times run sizes that surely fit into a frame. */
-const SURELY_QUICK = 2_000;
+const SURELY_QUICK = 20_000;
 
 export interface SweepState {
   /** The last sweep reckoned, and the plan it belongs to; null before the first. */
@@ -19,6 +19,8 @@ export interface SweepState {
 }
 
 export const NO_SWEEP: SweepState = { plan: null, sweep: null, workingOut: false };
+
+/** What the worker reckoned last, and whether it is at work. */
 export const sweepState = moduleStore<SweepState>(NO_SWEEP);
 
 let worker: Worker | undefined;
@@ -26,6 +28,8 @@ let worker: Worker | undefined;
 let ordered = 0;
 let orderedPlan: Plan | null = null;
 let busy = false;
+/** The last sweep of all, wherever it was reckoned. */
+let last: { plan: Plan; sweep: SweepResult } | null = null;
 let tookMs: number | null = null;
 
 /** Whether two plans differ at most in the size of the run, on which no other run size depends. */
@@ -46,11 +50,19 @@ function isQuick(plan: Plan): boolean {
   return tookMs === null ? (plan.parts.length + 1) * plan.run.sweepTo < SURELY_QUICK : tookMs < FRAME_MS;
 }
 
-function sweepHere(plan: Plan): void {
-  const began = performance.now();
-  const sweep = sweepRuns(plan);
-  tookMs = performance.now() - began;
-  sweepState.put({ plan, sweep, workingOut: false });
+/**
+ * The sweep of a plan, if it is at hand or can be reckoned within a frame; else null, and it is the worker's.
+ * A plan object is never changed, only replaced, so this may be called while a page is rendered.
+ */
+export function sweepAtOnce(plan: Plan): SweepResult | null {
+  if (last?.plan === plan) return last.sweep;
+  if (last && sameButRun(last.plan, plan)) last = { plan, sweep: forRun(last.sweep, plan) };
+  else if (isQuick(plan)) {
+    const began = performance.now();
+    last = { plan, sweep: sweepRuns(plan) };
+    tookMs = performance.now() - began;
+  } else return null;
+  return last.sweep;
 }
 
 function startWorker(): Worker {
@@ -58,7 +70,8 @@ function startWorker(): Worker {
   started.addEventListener("message", ({ data }: MessageEvent<SweepDone>) => {
     busy = false;
     if (data.number !== ordered || !orderedPlan) return orderedPlan ? send(orderedPlan) : undefined;
-    sweepState.put({ plan: orderedPlan, sweep: forRun(data.sweep, orderedPlan), workingOut: false });
+    last = { plan: orderedPlan, sweep: forRun(data.sweep, orderedPlan) };
+    sweepState.put({ ...last, workingOut: false });
   });
   return started;
 }
@@ -71,28 +84,13 @@ function send(plan: Plan): void {
   worker.postMessage(order);
 }
 
-function sweepAway(plan: Plan): void {
+/** Has the worker reckon the sweep of a plan; the last figures stay meanwhile. */
+export function sweepAway(plan: Plan): void {
   const { workingOut } = sweepState.now();
   const same = workingOut && orderedPlan !== null && sameButRun(orderedPlan, plan);
   orderedPlan = plan;
   if (same) return;
   ordered += 1;
-  sweepState.change((state) => ({ ...state, workingOut: true }));
+  sweepState.put({ plan: last?.plan ?? null, sweep: last?.sweep ?? null, workingOut: true });
   if (!busy) send(plan);
-}
-
-/**
- * Sees to it that the sweep of this plan is, or soon will be, in `sweepState`. A small plan is reckoned at
- * once; a large one by a worker, and the last figures stay meanwhile.
- */
-export function orderSweep(plan: Plan): void {
-  const { plan: swept, sweep } = sweepState.now();
-  if (swept === plan) return;
-  if (swept && sweep && sameButRun(swept, plan)) {
-    orderedPlan = null;
-    sweepState.put({ plan, sweep: forRun(sweep, plan), workingOut: false });
-  } else if (isQuick(plan)) {
-    orderedPlan = null;
-    sweepHere(plan);
-  } else sweepAway(plan);
 }

@@ -12,13 +12,15 @@ export interface BrokenLineProps {
   points?: readonly DrawnPoint[];
   stroke?: string;
   strokeWidth?: number | string;
+  /** Drawn without breaks: takings do not step when cost does. */
+  whole?: boolean;
 }
 
 type Placed = { x: number; y: number; breaks: boolean };
 
-function placed(points: readonly DrawnPoint[]): (Placed | null)[] {
+function placed(points: readonly DrawnPoint[], whole: boolean): (Placed | null)[] {
   return points.map(({ x, y, payload }) =>
-    x === null || y === null ? null : { x, y, breaks: payload?.breaksAfter ?? false },
+    x === null || y === null ? null : { x, y, breaks: !whole && (payload?.breaksAfter ?? false) },
   );
 }
 
@@ -37,8 +39,8 @@ function paths(points: readonly (Placed | null)[]): { line: string; steps: [Plac
 }
 
 /** A line that breaks where cost goes up in a step, its two ends joined by a fine dashed one. */
-export function BrokenLine({ points = [], stroke, strokeWidth }: BrokenLineProps) {
-  const { line, steps } = paths(placed(points));
+export function BrokenLine({ points = [], stroke, strokeWidth, whole = false }: BrokenLineProps) {
+  const { line, steps } = paths(placed(points, whole));
   return (
     <g>
       {steps.map(([from, to]) => (

@@ -1,3 +1,4 @@
+import { useCallback } from "react";
 import { CartesianGrid, Line, LineChart, ReferenceLine, Tooltip, XAxis, YAxis } from "recharts";
 import {
   axisTitle,
@@ -17,13 +18,14 @@ import {
   X_AXIS,
   Y_AXIS,
 } from "#src/components/islands/chart-theme.ts";
-import { axisMoney, money } from "#src/components/written.ts";
+import { money } from "#src/components/written.ts";
 import { BrokenLine } from "./BrokenLine.tsx";
 import { ChartTip } from "./ChartTip.tsx";
 import { useChartScale } from "./chart-scale.ts";
 import { type CostPoint, pixels, type Span, unitCostRange } from "./cost-points.ts";
 import { labelsWithRoom } from "./label-room.ts";
 import { axisTicks, roundTicks } from "./round-ticks.ts";
+import { useAxisMoney, useStable } from "./stable.ts";
 
 export interface NamedSpot {
   kits: number;
@@ -51,56 +53,67 @@ export interface CostChartProps {
   view: string;
 }
 
+const TITLE = axisTitle("kits in the run");
+const MARGIN = { top: 12, right: 20, bottom: 0, left: 0 };
+const NARROW_MARGIN = { ...MARGIN, right: 8 };
+const drawLine = (line: object) => <BrokenLine {...line} />;
+
 /** Cost of one kit against run size. */
 export function CostChart(props: CostChartProps) {
-  const { points, span, run, width, narrow, currency } = props;
+  const { points, span, run, width, narrow } = props;
   const brings = pixels(props.brings);
   const range = unitCostRange(points, run, brings);
-  const yTicks = axisTicks(range.low, range.high, 6);
-  const written = (value: string | null) => (value === null ? "not known" : money(value, currency));
+  const yTicks = useStable(axisTicks(range.low, range.high, 6));
+  const top = yTicks.at(-1) ?? 0;
   return (
     <LineChart
       width={width}
       height={narrow ? 330 : CHART_HEIGHT.cost}
       data={points as CostPoint[]}
-      margin={{ top: 12, right: narrow ? 8 : 20, bottom: 0, left: 0 }}
+      margin={narrow ? NARROW_MARGIN : MARGIN}
       aria-label={props.label}
     >
       <CartesianGrid {...GRID} />
       <XAxis
         {...X_AXIS}
         dataKey="kits"
-        domain={[span.from, span.to]}
-        ticks={roundTicks(span.from, span.to, narrow ? 4 : 9)}
-        label={axisTitle("kits in the run")}
+        domain={useStable([span.from, span.to])}
+        ticks={useStable(roundTicks(span.from, span.to, narrow ? 4 : 9))}
+        label={TITLE}
       />
       <YAxis
         {...Y_AXIS}
-        domain={[yTicks[0] ?? 0, yTicks.at(-1) ?? 0]}
+        domain={useStable([yTicks[0] ?? 0, top])}
         ticks={yTicks}
         width={narrow ? 46 : Y_AXIS.width}
         allowDataOverflow
-        tickFormatter={(value: number) => axisMoney(value, yTicks, currency)}
+        tickFormatter={useAxisMoney(yTicks, props.currency)}
       />
       {brings !== null && <ReferenceLine y={brings} {...NET_LINE} />}
       {run >= span.from && run <= span.to && <ReferenceLine x={run} {...RUN_LINE} />}
-      <Line {...COST_LINE} dataKey="perKit" shape={(line: object) => <BrokenLine {...line} />} />
-      <CostMarks {...props} top={yTicks.at(-1) ?? 0} />
-      <Tooltip
-        cursor={CURSOR}
-        isAnimationActive={false}
-        content={(tip) => (
-          <ChartTip
-            {...(tip as object)}
-            lines={({ exact }) => [
-              { name: `One kit, ${props.view}`, figure: written(exact.perKit) },
-              { name: `The run, ${props.view}`, figure: written(exact.total) },
-              { name: "One kit brings", figure: written(props.brings) },
-            ]}
-          />
-        )}
-      />
+      <Line {...COST_LINE} dataKey="perKit" shape={drawLine} />
+      <CostMarks {...props} top={top} />
+      <Tooltip cursor={CURSOR} isAnimationActive={false} content={useTip(props)} />
     </LineChart>
+  );
+}
+
+function useTip({ view, brings, currency }: CostChartProps) {
+  return useCallback(
+    (tip: object) => {
+      const written = (value: string | null) => (value === null ? "not known" : money(value, currency));
+      return (
+        <ChartTip
+          {...tip}
+          lines={({ exact }) => [
+            { name: `One kit, ${view}`, figure: written(exact.perKit) },
+            { name: `The run, ${view}`, figure: written(exact.total) },
+            { name: "One kit brings", figure: written(brings) },
+          ]}
+        />
+      );
+    },
+    [view, brings, currency],
   );
 }
 

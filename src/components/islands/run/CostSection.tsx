@@ -1,4 +1,4 @@
-import { useState } from "react";
+import { useMemo, useState } from "react";
 import { FilterGroup } from "#src/components/islands/parts/FilterGroup.tsx";
 import { Section } from "#src/components/islands/parts/Section.tsx";
 import { ShowWorking } from "#src/components/islands/parts/ShowWorking.tsx";
@@ -59,7 +59,8 @@ export function CostSection({ plan, run, sweep, columns, narrow, opens, partial 
   const differ = viewsDiffer(columns);
   const shown = differ ? view : "used";
   const span = whole ? { from: 1, to: sweep.to } : spanAround(run.kits, sweep.to);
-  const points = costPoints(columns, shown, span);
+  const { from, to } = span;
+  const points = useMemo(() => costPoints(columns, shown, { from, to }), [columns, shown, from, to]);
   const next = sweep.sweetSpots.find(({ kits }) => kits === run.kits);
   const name = "What one kit costs, by run size";
   const spots = sweep.sweetSpots.map(({ kits }) => ({

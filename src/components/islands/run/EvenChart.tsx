@@ -1,3 +1,4 @@
+import { useCallback } from "react";
 import { CartesianGrid, Line, LineChart, Tooltip, XAxis, YAxis } from "recharts";
 import {
   axisTitle,
@@ -10,12 +11,13 @@ import {
   Y_AXIS,
 } from "#src/components/islands/chart-theme.ts";
 import { HatchDefs } from "#src/components/islands/parts/HatchDefs.tsx";
-import { axisMoney, money } from "#src/components/written.ts";
+import { money } from "#src/components/written.ts";
 import { BrokenLine } from "./BrokenLine.tsx";
 import { ChartTip } from "./ChartTip.tsx";
 import type { CostPoint, Span } from "./cost-points.ts";
 import { EvenAreas, EvenMarks } from "./EvenMarks.tsx";
 import { axisTicks, roundTicks } from "./round-ticks.ts";
+import { useAxisMoney, useStable } from "./stable.ts";
 
 /** A place where takings and cost cross, with its letter. */
 export interface LetteredCrossing {
@@ -36,19 +38,24 @@ export interface EvenChartProps {
   label: string;
 }
 
+const TITLE = axisTitle("kits made and sold");
+const MARGIN = { top: 12, right: 20, bottom: 0, left: 0 };
+const NARROW_MARGIN = { ...MARGIN, right: 8 };
+const drawLine = (line: object) => <BrokenLine {...line} />;
+const drawWhole = (line: object) => <BrokenLine {...line} whole />;
+
 /** Takings against total cost, if every kit sells. */
 export function EvenChart(props: EvenChartProps) {
   const { points, span, width, narrow, currency } = props;
   const top = Math.max(1, ...points.flatMap(({ total, kept }) => [total ?? 0, kept ?? 0]));
   const low = Math.min(0, ...points.map(({ kept }) => kept ?? 0));
-  const ticks = axisTicks(low, top, 7);
-  const written = (value: string | null) => (value === null ? "not known" : money(value, currency));
+  const ticks = useStable(axisTicks(low, top, 7));
   return (
     <LineChart
       width={width}
       height={narrow ? 360 : CHART_HEIGHT.breakEven}
       data={points as CostPoint[]}
-      margin={{ top: 12, right: narrow ? 8 : 20, bottom: 0, left: 0 }}
+      margin={narrow ? NARROW_MARGIN : MARGIN}
       aria-label={props.label}
     >
       <defs>
@@ -58,34 +65,40 @@ export function EvenChart(props: EvenChartProps) {
       <XAxis
         {...X_AXIS}
         dataKey="kits"
-        domain={[span.from, span.to]}
-        ticks={roundTicks(span.from, span.to, narrow ? 4 : 8)}
-        label={axisTitle("kits made and sold")}
+        domain={useStable([span.from, span.to])}
+        ticks={useStable(roundTicks(span.from, span.to, narrow ? 4 : 8))}
+        label={TITLE}
       />
       <YAxis
         {...Y_AXIS}
-        domain={[ticks[0] ?? 0, ticks.at(-1) ?? 0]}
+        domain={useStable([ticks[0] ?? 0, ticks.at(-1) ?? 0])}
         ticks={ticks}
         width={narrow ? 54 : Y_AXIS.width}
-        tickFormatter={(value: number) => axisMoney(value, ticks, currency)}
+        tickFormatter={useAxisMoney(ticks, currency)}
       />
       <EvenAreas points={points} />
-      <Line {...TAKINGS_LINE} dataKey="kept" />
-      <Line {...COST_LINE} dataKey="total" shape={(line: object) => <BrokenLine {...line} />} />
+      <Line {...TAKINGS_LINE} dataKey="kept" shape={drawWhole} />
+      <Line {...COST_LINE} dataKey="total" shape={drawLine} />
       <EvenMarks {...props} />
-      <Tooltip
-        cursor={CURSOR}
-        isAnimationActive={false}
-        content={(tip) => (
-          <ChartTip
-            {...(tip as object)}
-            lines={({ exact }) => [
-              { name: "Takings", figure: written(exact.kept) },
-              { name: "Total cost, used", figure: written(exact.total) },
-            ]}
-          />
-        )}
-      />
+      <Tooltip cursor={CURSOR} isAnimationActive={false} content={useTip(currency)} />
     </LineChart>
+  );
+}
+
+function useTip(currency: string) {
+  return useCallback(
+    (tip: object) => {
+      const written = (value: string | null) => (value === null ? "not known" : money(value, currency));
+      return (
+        <ChartTip
+          {...tip}
+          lines={({ exact }) => [
+            { name: "Takings", figure: written(exact.kept) },
+            { name: "Total cost, used", figure: written(exact.total) },
+          ]}
+        />
+      );
+    },
+    [currency],
   );
 }

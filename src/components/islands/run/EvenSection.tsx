@@ -1,3 +1,4 @@
+import { useMemo } from "react";
 import { Section } from "#src/components/islands/parts/Section.tsx";
 import { ShowWorking } from "#src/components/islands/parts/ShowWorking.tsx";
 import { count, money } from "#src/components/written.ts";
@@ -41,6 +42,8 @@ export function EvenSection({ plan, run, sweep, columns, narrow, opens, partial 
     crossings.map(({ kits }) => kits),
     sweep.to,
   );
+  const { from, to } = span;
+  const points = useMemo(() => costPoints(columns, "used", { from, to }), [columns, from, to]);
   const name = "Takings against total cost, if every kit sells";
   const figure = breakEven.safe === null ? "even-after" : "safe-even";
   return (
@@ -57,7 +60,7 @@ export function EvenSection({ plan, run, sweep, columns, narrow, opens, partial 
       >
         {(width) => (
           <EvenChart
-            points={costPoints(columns, "used", span)}
+            points={points}
             span={span}
             run={run.kits}
             width={width}

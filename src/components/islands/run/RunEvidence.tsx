@@ -1,3 +1,4 @@
+import { useMemo } from "react";
 import type { KitAddress } from "#src/components/islands/kit-address.ts";
 import { BusyIcon } from "#src/components/islands/parts/Icons.tsx";
 import { MarginNote, Pair } from "#src/components/islands/parts/Pair.tsx";
@@ -115,7 +116,7 @@ function Compared({
   partial,
 }: EvidenceProps & { partial: string | null }) {
   const known = run.perKit.used.known;
-  const points = costPoints(columns, "used", { from: 1, to: sweep.to });
+  const points = useMemo(() => costPoints(columns, "used", { from: 1, to: sweep.to }), [columns, sweep.to]);
   const rows = worthALook(sweep, columns, points, run.kits);
   return (
     <RunsWorthALook

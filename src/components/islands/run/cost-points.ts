@@ -40,8 +40,11 @@ export function drawnColumns(sweep: SweepResult): { columns: SweepColumns; parti
     : { columns: sweep.without, partial: true };
 }
 
-/** The points of a span, one for every whole number of kits. */
-export function costPoints(columns: SweepColumns, view: CostView, { from, to }: Span): CostPoint[] {
+/**
+ * The points of a span, one for every whole number of kits. Frozen: a chart's store would otherwise freeze every
+ * point one by one.
+ */
+export function costPoints(columns: SweepColumns, view: CostView, { from, to }: Span): readonly CostPoint[] {
   const totals = view === "used" ? columns.used : columns.spent;
   const perKit = view === "used" ? columns.perKitUsed : columns.perKitSpent;
   const sizes = Array.from({ length: Math.max(0, to - from + 1) }, (_, place) => from + place);
@@ -61,10 +64,11 @@ export function costPoints(columns: SweepColumns, view: CostView, { from, to }: 
     return total === null || next === null || next === undefined ? 0 : next - total;
   });
   const usual = Math.abs(middle(rises));
-  return points.map((point, place) => {
+  const drawn = points.map((point, place) => {
     const rise = Math.abs(rises[place] ?? 0);
     return { ...point, breaksAfter: rise > STEP_MONEY && rise > STEP_TIMES * usual };
   });
+  return Object.freeze(drawn);
 }
 
 /** From two fifths of the run to about twice the run: where the decision lies. */
