@@ -68,7 +68,7 @@ function viewOf(given: InKit, row: ImportRow, read: ReturnType<typeof summariseP
 }
 
 /** Begins to bring in a parts list. */
-export function beginPartsImport(given: InKit, name: string, bytes: Uint8Array): { id: string } {
+export function beginPartsImport(given: InKit, name: string, bytes: Uint8Array): Promise<{ id: string }> {
   return beginDraft(given, { kind: "parts-list", kitId: given.kit.id }, name, bytes);
 }
 

@@ -130,7 +130,11 @@ function viewOf(
 }
 
 /** Begins to bring in a price list. */
-export function beginPriceImport(given: InWorkshop, name: string, bytes: Uint8Array): { id: string } {
+export function beginPriceImport(
+  given: InWorkshop,
+  name: string,
+  bytes: Uint8Array,
+): Promise<{ id: string }> {
   return beginDraft(given, { kind: "price-list", kitId: null }, name, bytes);
 }
 

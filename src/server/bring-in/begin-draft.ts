@@ -1,12 +1,12 @@
 import { createHash } from "node:crypto";
-import { readCells } from "#src/partslist/cells.ts";
 import { type ImportKind, NAME_LENGTH, UPLOAD_COLUMNS, UPLOAD_ROWS } from "#src/shapes/limits.ts";
 import { decodeUpload } from "../decode-upload.ts";
 import { newId } from "../new-id.ts";
 import type { Changing } from "../note-change.ts";
 import { Problem } from "../problem.ts";
 import { addImport, type ImportPlace } from "../store/import.ts";
-import { guessFor, NO_DECISIONS } from "./list-draft.ts";
+import { type ListShape, NO_DECISIONS } from "./list-draft.ts";
+import { readAside } from "./read-aside.ts";
 
 export const PASTED_NAME = "Pasted cells";
 
@@ -31,13 +31,14 @@ function tooLong(name: string, found: number, what: string, most: number): Probl
   return new Problem("upload-too-long", { parameters: { name, found, what, most } });
 }
 
-function shapeOf(kind: ImportKind, name: string, text: string): { rowCount: number; fingerprint: string } {
+/** Refuses what is no list, or more than can be read. */
+async function shapeOf(kind: ImportKind, name: string, text: string): Promise<ListShape> {
   // Signs alone, such as the commas of empty cells, are no row.
   if (!/[\p{L}\p{N}]/u.test(text)) throw new Problem("upload-empty", { parameters: { name } });
-  const sheet = readCells(text);
-  if (sheet.records.length > UPLOAD_ROWS) throw tooLong(name, sheet.records.length, "rows", UPLOAD_ROWS);
-  if (sheet.columns > UPLOAD_COLUMNS) throw tooLong(name, sheet.columns, "columns", UPLOAD_COLUMNS);
-  return { rowCount: sheet.records.length, fingerprint: guessFor(kind, sheet).fingerprint };
+  const shape = await readAside("shape", { kind, text }, text.split("\n", UPLOAD_ROWS).length);
+  if (shape.rows > UPLOAD_ROWS) throw tooLong(name, shape.rows, "rows", UPLOAD_ROWS);
+  if (shape.columns > UPLOAD_COLUMNS) throw tooLong(name, shape.columns, "columns", UPLOAD_COLUMNS);
+  return shape;
 }
 
 /**
@@ -45,18 +46,19 @@ function shapeOf(kind: ImportKind, name: string, text: string): { rowCount: numb
  *
  * @throws Problem upload-… for what is no list in plain text, or has more rows or columns than can be read.
  */
-export function beginDraft(
+export async function beginDraft(
   { db, now, user, workshop }: Changing,
   place: Pick<ImportPlace, "kind" | "kitId">,
   name: string,
   bytes: Uint8Array,
-): { id: string } {
+): Promise<{ id: string }> {
   const decodedList = decodeUpload(bytes);
   if (!decodedList.ok) {
     if (decodedList.code === "upload-too-large")
       throw new Problem("too-large", { parameters: { limit: "5 MB" } });
     throw new Problem(decodedList.code, { parameters: { name } });
   }
+  const { rows, fingerprint } = await shapeOf(place.kind, name, decodedList.text);
   const id = newId();
   addImport(db, {
     id,
@@ -68,7 +70,8 @@ export function beginDraft(
     encoding: decodedList.encoding,
     contentHash: createHash("sha256").update(bytes).digest("hex"),
     content: decodedList.text,
-    ...shapeOf(place.kind, name, decodedList.text),
+    rowCount: rows,
+    fingerprint,
     answers: NO_DECISIONS,
     createdBy: user.id,
     createdAt: now,

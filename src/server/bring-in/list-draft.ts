@@ -50,6 +50,23 @@ export function guessFor(kind: ImportKind, sheet: Sheet, header?: number | null)
     : guessColumns(sheet.records, header);
 }
 
+/** How large a list is, and which lists are of its shape. */
+export interface ListShape {
+  rows: number;
+  columns: number;
+  fingerprint: string;
+}
+
+/** The shape of a text that has just come. */
+export function shapeOfList({ kind, text }: { kind: ImportKind; text: string }): ListShape {
+  const sheet = readCells(text);
+  return {
+    rows: sheet.records.length,
+    columns: sheet.columns,
+    fingerprint: guessFor(kind, sheet).fingerprint,
+  };
+}
+
 /** Opens a list: reads its cells and says what its columns mean. */
 export function openList(source: ListSource): ListDraft {
   const sheet = sheetOf(source);
