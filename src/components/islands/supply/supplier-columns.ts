@@ -95,6 +95,16 @@ export function supplierColumns(base: string): Column[] {
       text: ({ name }) => name,
       read: (entry) => ({ ok: true, change: { name: entry } }),
     },
+    // Beside the name, because it leads to the supplier and must be in reach on a phone.
+    {
+      key: "offers",
+      head: "Offers",
+      width: 96,
+      number: true,
+      text: ({ offers }) => String(offers),
+      shown: ({ offers }) => (offers === 1 ? "1 offer" : `${offers} offers`),
+      href: ({ id }) => `${base}/${id}`,
+    },
     {
       key: "currency",
       head: "Currency",
@@ -130,15 +140,6 @@ export function supplierColumns(base: string): Column[] {
       text: ({ leadTimeDays }) => (leadTimeDays === null ? "" : String(leadTimeDays)),
       shown: ({ leadTimeDays }) => (leadTimeDays === null ? "not known" : String(leadTimeDays)),
       read: (entry) => entryFor(readWhole(entry, 0), (leadTimeDays) => ({ leadTimeDays })),
-    },
-    {
-      key: "offers",
-      head: "Offers",
-      width: 96,
-      number: true,
-      text: ({ offers }) => String(offers),
-      shown: ({ offers }) => (offers === 1 ? "1 offer" : `${offers} offers`),
-      href: ({ id }) => `${base}/${id}`,
     },
   ];
 }
