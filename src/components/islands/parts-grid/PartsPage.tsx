@@ -1,4 +1,4 @@
-import { useEffect, useMemo } from "react";
+import { useEffect, useMemo, useRef } from "react";
 import { moneyText } from "#src/components/amount-text.ts";
 import { buttonLook } from "#src/components/button-look.ts";
 import { counted } from "#src/components/count-words.ts";
@@ -15,7 +15,7 @@ import { compareLists } from "#src/partslist/since-revision.ts";
 import type { PartsList } from "#src/server/present.ts";
 import type { Plan } from "#src/shapes/plan.ts";
 import { EmptyParts } from "./EmptyParts.tsx";
-import { fullestEdition, lineRows, partsTotal } from "./grid-rows.ts";
+import { fullestEdition, type LineRow, lineRows, partsTotal } from "./grid-rows.ts";
 import { watchLeaving } from "./list-editor.ts";
 import { PartsWorkbench } from "./PartsWorkbench.tsx";
 import { useLastRevision, usePartsList } from "./use-parts-list.ts";
@@ -68,13 +68,14 @@ function Parts(props: PartsProps & { bought: Bought | null }) {
   useEffect(() => watchLeaving(window, address), [address]);
 
   const lines = list?.lines.length ?? first.lines;
+  const rows = useRows(list, bought);
   return (
     <>
       <Question
         question="What goes into one kit?"
         actions={canEdit && lines > 0 && <Actions address={address} />}
       >
-        <Answer list={list} lines={lines} bought={bought} canEdit={canEdit} />
+        <Answer list={list} rows={rows} lines={lines} bought={bought} canEdit={canEdit} />
       </Question>
       {lines === 0 ? (
         <EmptyParts
@@ -88,6 +89,7 @@ function Parts(props: PartsProps & { bought: Bought | null }) {
         <PartsWorkbench
           {...props}
           list={list}
+          rows={rows}
           changed={changed}
           lastRevision={last?.revision ?? null}
           addLine={addLine}
@@ -126,18 +128,28 @@ function Actions({ address }: { address: KitAddress }) {
   );
 }
 
+/** The rows of the list; those that read as before stay the same objects. */
+function useRows(list: PartsList | undefined, bought: Bought | null): LineRow[] {
+  const before = useRef<LineRow[]>([]);
+  return useMemo(() => {
+    before.current = list ? lineRows(list, bought, before.current) : [];
+    return before.current;
+  }, [list, bought]);
+}
+
 function Answer({
   list,
+  rows,
   lines,
   bought,
   canEdit,
 }: {
   list: PartsList | undefined;
+  rows: readonly LineRow[];
   lines: number;
   bought: Bought | null;
   canEdit: boolean;
 }) {
-  const rows = useMemo(() => (list ? lineRows(list, bought) : []), [list, bought]);
   if (lines === 0)
     return (
       <>

@@ -22,7 +22,7 @@ import {
   type GridRow,
   groupedRows,
   type LineFilter,
-  lineRows,
+  type LineRow,
   partsTotal,
   piecesIn,
   type TotalRow,
@@ -73,6 +73,7 @@ function shownColumns(all: ColumnKey[], list: PartsList, phone: boolean, money: 
 
 export interface WorkbenchProps extends PartsProps {
   list: PartsList;
+  rows: readonly LineRow[];
   bought: Bought | null;
   changed: ReadonlySet<string>;
   lastRevision: string | null;
@@ -82,7 +83,18 @@ export interface WorkbenchProps extends PartsProps {
 
 /** The parts list to work in: find, filter, group, choose, edit. */
 export function PartsWorkbench(props: WorkbenchProps) {
-  const { address, list, bought, changed, lastRevision, canEdit, canChoose, styleNonce, addLine } = props;
+  const {
+    address,
+    list,
+    rows: all,
+    bought,
+    changed,
+    lastRevision,
+    canEdit,
+    canChoose,
+    styleNonce,
+    addLine,
+  } = props;
   const Grid = useGrid();
   const phone = usePhone();
   const [filter, setFilter] = useState<LineFilter>("all");
@@ -96,7 +108,6 @@ export function PartsWorkbench(props: WorkbenchProps) {
   const work = usePartsWork(address, list);
   const { deeds, draft } = work;
 
-  const all = useMemo(() => lineRows(list, bought), [list, bought]);
   const rows = useMemo(() => filteredRows(all, filter, wanted, changed), [all, filter, wanted, changed]);
   const columns = useMemo(
     () => shownColumns(columnKeys(list.editions, list.money, more), list, phone, list.money),

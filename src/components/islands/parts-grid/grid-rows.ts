@@ -87,35 +87,64 @@ interface Bought {
   run: RunResult;
 }
 
-/** For each line its row: number, colour code, state, and what the reckoning says of its part. */
-export function lineRows(list: PartsList, bought: Bought | null): LineRow[] {
+/** What follows from a line alone; reckoned once for as long as the line is not replaced. */
+interface Derived {
+  designators: string;
+  bands: ResistorBands | null;
+}
+const derivedFrom = new WeakMap<AnyLine, Derived>();
+
+function derived(line: AnyLine): Derived {
+  const known = derivedFrom.get(line);
+  if (known) return known;
+  const { value, unit, tolerance, spec } = line.part;
+  const isResistor = line.part.class === "resistor" && unit === "ohm" && value !== null;
+  const made = {
+    designators: line.designators === "" ? "" : compressDesignators(line.designators.split(", ")),
+    bands: isResistor ? resistorBands(value, tolerance ?? toleranceIn(spec)) : null,
+  };
+  derivedFrom.set(line, made);
+  return made;
+}
+
+function sameRow(one: LineRow, other: LineRow): boolean {
+  return (
+    one.line === other.line &&
+    one.place === other.place &&
+    one.state.word === other.state.word &&
+    JSON.stringify(one.money) === JSON.stringify(other.money)
+  );
+}
+
+/**
+ * For each line its row: number, colour code, state, and what the reckoning says of its part. A row that reads as
+ * it did in `before` is the same object, so that the grid draws only what is new.
+ */
+export function lineRows(list: PartsList, bought: Bought | null, before: readonly LineRow[] = []): LineRow[] {
   const faults = lineFaults(list.lines);
   const planParts = new Map(bought?.plan.parts.map((part) => [part.id, part]));
   const partLines = new Map(bought?.run.parts.map((part) => [part.id, part]));
+  const old = new Map(before.map((row) => [row.id, row]));
   const firstLines = new Map<string, string>();
   return list.lines.map((line: AnyLine, place): LineRow => {
     const own = listState(line, faults.get(line.id));
     const [planned, reckoned] = [planParts.get(line.part.id), partLines.get(line.part.id)];
     const isBought = line.mark === "in-kit" || line.mark === "option";
-    const state =
-      own ?? (bought && planned && reckoned ? buyingState(bought.plan, planned, reckoned) : IN_ORDER);
-    const { value, unit, tolerance } = line.part;
     const first = isBought ? firstLines.get(line.part.id) : undefined;
     if (isBought && first === undefined)
       firstLines.set(line.part.id, line.designators || `line ${place + 1}`);
-    return {
+    const buying = bought && planned && reckoned ? buyingState(bought.plan, planned, reckoned) : IN_ORDER;
+    const row: LineRow = {
       kind: "line",
       id: line.id,
       place: place + 1,
       line,
-      designators: line.designators === "" ? "" : compressDesignators(line.designators.split(", ")),
-      bands:
-        line.part.class === "resistor" && unit === "ohm" && value !== null
-          ? resistorBands(value, tolerance ?? toleranceIn(line.part.spec))
-          : null,
-      state,
+      ...derived(line),
+      state: own ?? buying,
       money: bought && reckoned && isBought ? moneyOf(bought.plan, reckoned, first ?? null) : null,
     };
+    const known = old.get(line.id);
+    return known && sameRow(known, row) ? known : row;
   });
 }
 
