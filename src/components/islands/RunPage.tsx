@@ -1,6 +1,7 @@
-import { lazy, Suspense } from "react";
+import { lazy, memo, Suspense, useDeferredValue, useMemo } from "react";
 import { PAIRS } from "#src/components/page-look.ts";
 import type { KitPlan } from "#src/server/kit-plan.ts";
+import type { Plan } from "#src/shapes/plan.ts";
 import { CallFailed } from "./call.ts";
 import type { KitAddress } from "./kit-address.ts";
 import { Button } from "./parts/Button.tsx";
@@ -32,7 +33,7 @@ export interface RunPageProps {
 
 /** How many kits should we make? The answer, its evidence, and everything it rests on. */
 export function RunPage({ workshop, kit, first, may }: RunPageProps) {
-  const address = { workshop, kit };
+  const address = useMemo(() => ({ workshop, kit }), [workshop, kit]);
   const { held, error, retry } = usePlan(address);
   if (held) return <Reckoned address={address} held={held} may={may} />;
   return (
@@ -63,13 +64,9 @@ interface ReckonedProps {
 function Reckoned({ address, held, may }: ReckonedProps) {
   const { plan } = held;
   const run = runOf(plan);
-  const opens = useOpens();
-  const { sweep, workingOut } = useSweep(plan);
-  const choose = (kits: number) =>
-    take({ address, row: { kind: "run" }, field: "kits", currency: plan.currency }, kits);
   return (
     <>
-      <RunAnswer run={run} opens={opens} />
+      <RunAnswer run={run} opens={useOpens()} />
       <div className={PAIRS}>
         {!run.perKit.used.known && (
           <Pair>
@@ -82,17 +79,8 @@ function Reckoned({ address, held, may }: ReckonedProps) {
             />
           </Pair>
         )}
-        <Suspense fallback={<Loading what="charts" rows={8} />}>
-          {sweep ? (
-            <RunEvidence
-              {...{ address, plan, run, sweep, workingOut, may, opens }}
-              {...evidenceColumns(sweep)}
-              onChoose={choose}
-            />
-          ) : (
-            <Loading what="every run size" rows={8} />
-          )}
-        </Suspense>
+        {/* Answer, strip and the field that is typed in come first; the charts follow and may be interrupted. */}
+        <Evidence address={address} plan={useDeferredValue(plan)} may={may} />
         <Pair>
           <Inputs address={address} held={held} run={run} may={may} />
         </Pair>
@@ -104,7 +92,25 @@ function Reckoned({ address, held, may }: ReckonedProps) {
   );
 }
 
-function evidenceColumns(sweep: Parameters<typeof drawnColumns>[0]) {
+const Evidence = memo(function Evidence({
+  address,
+  plan,
+  may,
+}: Omit<ReckonedProps, "held"> & { plan: Plan }) {
+  const opens = useOpens();
+  const { sweep, workingOut } = useSweep(plan);
+  if (!sweep) return <Loading what="every run size" rows={8} />;
   const { columns, partial } = drawnColumns(sweep);
-  return { columns, isPartial: partial };
-}
+  return (
+    <Suspense fallback={<Loading what="charts" rows={8} />}>
+      <RunEvidence
+        {...{ address, plan, sweep, columns, workingOut, may, opens }}
+        run={runOf(plan)}
+        isPartial={partial}
+        onChoose={(kits) =>
+          take({ address, row: { kind: "run" }, field: "kits", currency: plan.currency }, kits)
+        }
+      />
+    </Suspense>
+  );
+});
