@@ -191,3 +191,14 @@ describe("a price list", () => {
     expect(answer.status).toBe(404);
   });
 });
+
+it("refuses more offers than a part can have, naming the row", async () => {
+  const desk = await priceDesk();
+  const rows = Array.from({ length: 41 }, (_, at) => `Ebbing,EB-${at},RC-10K,0.02`);
+  const id = await desk.upload(`Supplier,Order code,MPN,Price\n${rows.join("\n")}\n`);
+  const refused = await desk.take(id);
+  expect(refused.problem?.errors).toEqual([
+    { at: "rows.42", message: "A part has at most 40 offers. Leave this row out." },
+  ]);
+  expect(desk.kit.standing()).toMatchObject({ offers: [], suppliers: [] });
+});

@@ -3,7 +3,7 @@ import type { PricesFrom } from "#src/shapes/import.ts";
 import type { Changing } from "../note-change.ts";
 import type { ImportRow } from "../store/import.ts";
 import { suppliersOf } from "../store/supplier.ts";
-import { type OfferFault, offerFaults, supplierKey, type Terms, type WantedOffer } from "./take-offers.ts";
+import { type OfferFault, offerFaults, supplierKey, type Terms, type WantedOffer } from "./wanted-offer.ts";
 
 /** A line of a list with the row it stands in. */
 export interface OfferedLine {

@@ -10,7 +10,7 @@ import {
   told,
   toldOf,
   type WantedOffer,
-} from "./take-offers.ts";
+} from "./wanted-offer.ts";
 
 /** One offer of a price list beside what stands: `was` is `null` for a new one. */
 export interface OfferDifference {

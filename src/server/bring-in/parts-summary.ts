@@ -4,7 +4,6 @@ import type { PricesFrom } from "#src/shapes/import.ts";
 import { type DifferenceView, differenceView, seenStamp } from "./difference-view.ts";
 import { type OffersRead, offersRead } from "./list-offers.ts";
 import { type PartsReading, type PartsSource, readParts } from "./read-parts.ts";
-import type { Terms } from "./take-offers.ts";
 import {
   type ColumnsView,
   columnsView,
@@ -17,6 +16,7 @@ import {
   sheetView,
   skippedView,
 } from "./view.ts";
+import type { Terms } from "./wanted-offer.ts";
 
 /** A reading in the size of a page: all counts, and of each kind of row as many as can be looked at. */
 export interface PartsSummary {

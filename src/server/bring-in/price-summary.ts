@@ -7,7 +7,6 @@ import { editedDecisions, editedMapping, editsColumns } from "./edit-draft.ts";
 import { openList } from "./list-draft.ts";
 import { type OfferDifferences, offerDifferences, type Supply } from "./offer-difference.ts";
 import { type PricesReading, type PricesSource, readPriceList } from "./read-price-list.ts";
-import { type OfferFault, offerFaults, supplierKey, type Terms, type WantedOffer } from "./take-offers.ts";
 import {
   type ColumnsView,
   columnsView,
@@ -18,6 +17,7 @@ import {
   sheetView,
   skippedView,
 } from "./view.ts";
+import { type OfferFault, offerFaults, supplierKey, type Terms, type WantedOffer } from "./wanted-offer.ts";
 
 /** A reading of a price list in the size of a page. */
 export interface PriceSummary {

@@ -2,7 +2,7 @@ import type { KnownPart, PriceDraft, PriceReadResult } from "#src/partslist/pric
 import { readPrices } from "#src/partslist/read-prices.ts";
 import { NAME_LENGTH } from "#src/shapes/limits.ts";
 import { type ListDraft, type ListSource, openList } from "./list-draft.ts";
-import type { WantedOffer } from "./take-offers.ts";
+import type { WantedOffer } from "./wanted-offer.ts";
 
 /** A price list, the parts it may speak of, and whose it is where no column says. */
 export interface PricesSource extends ListSource {
