@@ -191,7 +191,7 @@ function Who({
           "No supplier"
         )}
       </span>
-      <span className="block break-all text-ink-2 type-label">{offer.orderCode || "no order code"}</span>
+      <span className="block wrap-anywhere text-ink-2 type-label">{offer.orderCode || "no order code"}</span>
     </span>
   );
   if (!canChoose) return words;
