@@ -47,7 +47,7 @@ async function makeWorkshopAndKit(page: Page): Promise<string> {
 }
 
 async function bringIn(page: Page, kit: string): Promise<void> {
-  await page.goto(`${kit}/parts/bring-in`);
+  await page.goto(`${kit}/parts/bring-in`, { waitUntil: "networkidle" });
   await page.locator('input[type="file"]').setInputFiles("samples/stueckliste-dew-lantern-rev-c.csv");
   await page.waitForURL(/\/bring-in\/\w+$/);
   await expect(page.getByRole("button", { name: /^Bring in 24 lines/ })).toHaveAttribute(
@@ -61,10 +61,11 @@ async function bringIn(page: Page, kit: string): Promise<void> {
 }
 
 async function setFreight(page: Page, kit: string, supplier: string, amount: string): Promise<void> {
-  await page.goto(kit.replace(/\/kits\/.*$/, "/suppliers"));
+  await page.goto(kit.replace(/\/kits\/.*$/, "/suppliers"), { waitUntil: "networkidle" });
   const link = page.locator(".ag-row", { hasText: supplier }).getByRole("link");
   await link.click();
   await page.waitForURL(/\/suppliers\/\w+$/);
+  await page.waitForLoadState("networkidle");
   await money(page, "Freight for an order", amount);
   const saved = page.waitForResponse((reply) => reply.request().method() === "PATCH" && reply.ok());
   await page.getByRole("button", { name: /^Save/ }).click();
@@ -72,7 +73,7 @@ async function setFreight(page: Page, kit: string, supplier: string, amount: str
 }
 
 async function addBoardQuote(page: Page, kit: string): Promise<void> {
-  await page.goto(`${kit}/boards`);
+  await page.goto(`${kit}/boards`, { waitUntil: "networkidle" });
   const add = page.getByRole("button", { name: "Add a quote" }).first();
   if (!(await page.getByLabel("Board house", { exact: true }).isVisible())) await add.click();
   await page.getByLabel("Board house", { exact: true }).fill("Kilnside");
@@ -89,7 +90,7 @@ async function addBoardQuote(page: Page, kit: string): Promise<void> {
 }
 
 async function planRun(page: Page, kit: string): Promise<void> {
-  await page.goto(`${kit}/run`);
+  await page.goto(`${kit}/run`, { waitUntil: "networkidle" });
   await page.getByRole("button", { name: "Run of 50, type another" }).first().click();
   await page
     .getByRole("group", { name: "Run of" })
@@ -118,7 +119,7 @@ function figure(page: Page, label: string, value: string) {
 
 for (const width of [1440, 390])
   test(`from a parts list to the break-even point, ${width} wide`, async ({ page }) => {
-    test.setTimeout(180_000);
+    test.setTimeout(300_000);
     await page.setViewportSize({ width, height: width === 390 ? 844 : 900 });
     await signIn(page, OWNER);
     const kit = await makeWorkshopAndKit(page);
