@@ -31,7 +31,12 @@ it.each(lists)("%s brought in twice changes nothing the second time", async (nam
   const before = kit.standing();
   const second = await suggested(kit, bytes, name);
   const { added, removed, changed, revalued } = second.view.difference;
-  expect({ added, removed, changed, revalued }).toEqual({ added: [], removed: [], changed: [], revalued: [] });
+  expect({ added, removed, changed, revalued }).toEqual({
+    added: [],
+    removed: [],
+    changed: [],
+    revalued: [],
+  });
   expect((await kit.take(second.id, second.view)).problem?.code).toBe("nothing-to-bring-in");
   expect(kit.standing()).toEqual(before);
 });

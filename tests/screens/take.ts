@@ -1,8 +1,8 @@
 import { mkdirSync, rmSync } from "node:fs";
 import { type Browser, chromium, type Page } from "@playwright/test";
-import { ensureBuilt } from "../../src/server/ready.mjs";
 import { CHROMIUM } from "#tests/support/chromium.ts";
 import { demoPassword, type RunningServer, startServer } from "#tests/support/running-server.ts";
+import { ensureBuilt } from "../../src/server/ready.mjs";
 import { PAGES } from "./pages.ts";
 
 /** `npm run screens`: a picture of every page at both widths and in both themes, into `screens/`. */
@@ -11,7 +11,12 @@ const FOLDER = "screens";
 const WIDTHS = [1440, 390] as const;
 const THEMES = ["light", "dark"] as const;
 
-async function signedIn(browser: Browser, server: RunningServer, width: number, theme: "light" | "dark"): Promise<Page> {
+async function signedIn(
+  browser: Browser,
+  server: RunningServer,
+  width: number,
+  theme: "light" | "dark",
+): Promise<Page> {
   const viewport = { width, height: width > 720 ? 900 : 844 };
   const context = await browser.newContext({ viewport, colorScheme: theme, baseURL: server.origin });
   const email = "ines@example.org";
@@ -21,7 +26,12 @@ async function signedIn(browser: Browser, server: RunningServer, width: number, 
   return context.newPage();
 }
 
-async function take(browser: Browser, server: RunningServer, width: number, theme: "light" | "dark"): Promise<void> {
+async function take(
+  browser: Browser,
+  server: RunningServer,
+  width: number,
+  theme: "light" | "dark",
+): Promise<void> {
   const inside = await signedIn(browser, server, width, theme);
   const outside = await (
     await browser.newContext({ viewport: { width, height: 900 }, colorScheme: theme, baseURL: server.origin })

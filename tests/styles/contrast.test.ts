@@ -50,7 +50,7 @@ describe.each<Theme>(["light", "dark"])("contrast in the %s theme", (theme) => {
     "%s on %s is seen",
     (line, ground) => {
       // 3.00 to two decimals, as the design states it for rule-2 on tin.
-    expect(contrast(token(line, theme), token(ground, theme))).toBeGreaterThanOrEqual(2.995);
+      expect(contrast(token(line, theme), token(ground, theme))).toBeGreaterThanOrEqual(2.995);
     },
   );
 
