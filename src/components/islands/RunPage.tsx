@@ -1,4 +1,4 @@
-import { lazy, memo, Suspense, useDeferredValue, useMemo } from "react";
+import { lazy, memo, Suspense, useMemo } from "react";
 import { PAIRS } from "#src/components/page-look.ts";
 import type { KitPlan } from "#src/server/kit-plan.ts";
 import type { Plan } from "#src/shapes/plan.ts";
@@ -79,8 +79,7 @@ function Reckoned({ address, held, may }: ReckonedProps) {
             />
           </Pair>
         )}
-        {/* Answer, strip and the field that is typed in come first; the charts follow and may be interrupted. */}
-        <Evidence address={address} plan={useDeferredValue(plan)} may={may} />
+        <Evidence address={address} plan={plan} may={may} />
         <Pair>
           <Inputs address={address} held={held} run={run} may={may} />
         </Pair>
