@@ -99,7 +99,7 @@ describe("the ladder of an offer", () => {
     await save();
     expect(quantity(2).getAttribute("aria-invalid")).toBe("true");
     expect(quantity(1).getAttribute("aria-invalid")).toBeNull();
-    fireEvent.click(screen.getByRole("link", { name: message }));
+    fireEvent.click(screen.getByRole("link", { name: `Row 2: ${message}` }));
     expect(document.activeElement).toBe(quantity(2));
     type(quantity(2), "100");
     await save();

@@ -27,7 +27,7 @@ export function FormFaults<Fields>({ form, title, differences }: FormFaultsProps
         <ul>
           {faults.map(({ at, message }) => (
             <li key={at + message}>
-              <FaultLink id={form.words(at).id}>{message}</FaultLink>
+              <FaultLink id={form.words(at).id}>{placeOf(at) + message}</FaultLink>
             </li>
           ))}
           {clash && differences?.(form.fields, clash).map((line) => <li key={line}>{line}</li>)}
@@ -45,6 +45,12 @@ export function FormFaults<Fields>({ form, title, differences }: FormFaultsProps
       </ErrorBox>
     </div>
   );
+}
+
+/** Rows that look alike are told apart by their place: "Row 2: ". */
+function placeOf(at: string): string {
+  const place = /\.(\d+)(\.|$)/.exec(at)?.[1];
+  return place === undefined ? "" : `Row ${Number(place) + 1}: `;
 }
 
 /** A link that puts the focus into the field, where there is one. */

@@ -84,8 +84,8 @@ export function LadderEditor<Fields extends LadderFields>({ form }: { form: Form
     <fieldset>
       <legend className="type-table mb-2 font-semibold">{lots ? "Lots" : "Price breaks"}</legend>
       <div aria-hidden="true" className="type-label mb-1 flex gap-4 text-ink-2">
-        <span className="w-36">{lots ? "A lot of" : "From"}</span>
-        <span>{lots ? "costs" : "each costs"}</span>
+        <span className="w-52 max-tablet:w-full">{lots ? "A lot of" : "From"}</span>
+        <span className="max-tablet:hidden">{lots ? "costs" : "each costs"}</span>
       </div>
       <ul ref={list} className="flex flex-col gap-3">
         {breaks.map((rung, place) => (
@@ -98,7 +98,7 @@ export function LadderEditor<Fields extends LadderFields>({ form }: { form: Form
               autoComplete="off"
               value={rung.quantity}
               onChange={(typed) => change(rung.key, { quantity: typed.currentTarget.value })}
-              className="w-36"
+              className="w-52 max-tablet:w-full"
             />
             <MoneyField
               label={`${lots ? "Costs" : "Price each"}, ${lots ? "lot" : "break"} ${place + 1}`}

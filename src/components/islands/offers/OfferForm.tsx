@@ -25,9 +25,9 @@ type Draft = Omit<
 };
 
 const MODELS: readonly { value: PriceModel; label: string }[] = [
-  { value: "whole-order", label: "The whole order, at the break reached" },
-  { value: "by-slice", label: "Each slice at its own price" },
-  { value: "lots", label: "Lots at a fixed price" },
+  { value: "whole-order", label: "The whole order" },
+  { value: "by-slice", label: "Each slice" },
+  { value: "lots", label: "A lot" },
 ];
 
 function draftOf(offer: OfferFields): Draft {
