@@ -12,7 +12,8 @@ let failed = 0;
 
 function command(words, env = {}) {
   return (
-    spawnSync(words[0], words.slice(1), { stdio: "inherit", env: { ...process.env, ...env } }).status === 0
+    spawnSync(words[0], words.slice(1), { stdio: "inherit", env: { ...process.env, NO_COLOR: "1", ...env } })
+      .status === 0
   );
 }
 
