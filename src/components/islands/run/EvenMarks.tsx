@@ -16,7 +16,7 @@ import type { CostPoint } from "./cost-points.ts";
 import type { EvenChartProps } from "./EvenChart.tsx";
 import { EvenWindow } from "./EvenWindow.tsx";
 import { type ChartPlace, crowded, type GainArea, gainAreas, meeting } from "./even-shapes.ts";
-import { freePlace, type NameBox } from "./label-room.ts";
+import { freePlace, labelsWithRoom, type NameBox } from "./label-room.ts";
 
 type Scale = (place: ChartPlace) => { x: number; y: number };
 
@@ -72,6 +72,10 @@ export function EvenMarks(props: EvenChartProps) {
     perKit,
     APART,
   );
+  const alone = placed
+    .filter(({ kits }) => narrow || !near.includes(kits))
+    .map(({ letter, place }) => ({ letter, at: scale(place).x, half: 8, rank: 0 }));
+  const lettered = new Set(labelsWithRoom(alone).map(({ letter }) => letter));
   return (
     <g>
       <AreaNames
@@ -85,7 +89,7 @@ export function EvenMarks(props: EvenChartProps) {
         <Crossing
           key={letter}
           at={scale(place)}
-          letter={near.includes(kits) ? null : letter}
+          letter={lettered.has(letter) ? letter : null}
           small={near.includes(kits)}
         />
       ))}
@@ -130,17 +134,30 @@ interface NamesProps {
   taken: readonly NameBox[];
 }
 
-/** The area of a kind where it is tallest, with its middle and height in pixels. */
-function tallest(points: readonly CostPoint[], gain: GainArea["gain"], scale: Scale) {
-  let best = { x: 0, y: 0, height: 0 };
-  for (const { kits, total, kept } of points) {
-    if (total === null || kept === null || kept >= total !== (gain === "profit")) continue;
-    const [upper, lower] = [scale({ kits, money: total }), scale({ kits, money: kept })];
-    const height = Math.abs(upper.y - lower.y);
-    if (height > best.height) best = { x: upper.x, y: (upper.y + lower.y) / 2, height };
-  }
-  return best;
+/** The middle of an area where it is tallest, or so far to the side of that as it stays tall enough for a name. */
+function middleOf(points: readonly CostPoint[], gain: GainArea["gain"], scale: Scale, aside: number) {
+  const tall = points.flatMap(({ kits, total, kept }) => {
+    if (total === null || kept === null || kept >= total !== (gain === "profit")) return [];
+    const [one, other] = [scale({ kits, money: total }), scale({ kits, money: kept })];
+    return [{ x: one.x, y: (one.y + other.y) / 2, height: Math.abs(one.y - other.y) }];
+  });
+  const tallest = tall.reduce((best, place) => (place.height > best.height ? place : best), {
+    x: 0,
+    y: 0,
+    height: 0,
+  });
+  const wanted = tallest.x + aside;
+  const near = tall
+    .filter(({ height }) => height > NAME_HEIGHT)
+    .reduce(
+      (best, place) => (Math.abs(place.x - wanted) < Math.abs(best.x - wanted) ? place : best),
+      tallest,
+    );
+  return near.height > NAME_HEIGHT ? near : null;
 }
+
+/** An area lower than this has no room for its name. */
+const NAME_HEIGHT = 30;
 
 /** Where along the span the cost line has room beside it for its name. */
 function costNameAt({ points, scale }: NamesProps, taken: readonly NameBox[]) {
@@ -165,21 +182,21 @@ function costNameAt({ points, scale }: NamesProps, taken: readonly NameBox[]) {
 /** Names stand in their areas and at their lines. */
 function AreaNames(props: NamesProps) {
   const { points, scale, narrow, taken } = props;
-  const [loss, profit] = [tallest(points, "loss", scale), tallest(points, "profit", scale)];
+  const loss = middleOf(points, "loss", scale, narrow ? 22 : 40);
+  const profit = middleOf(points, "profit", scale, narrow ? -44 : -110);
   const costAt = costNameAt(props, taken);
   const last = points.findLast(({ kept }) => kept !== null);
   const takingsAt = last && scale({ kits: last.kits, money: last.kept ?? 0 });
-  const profitShift = narrow ? 44 : 110;
   return (
     <g>
-      {loss.height > 30 && (
-        <text x={loss.x + (narrow ? 22 : 40)} y={loss.y + 5} {...LINE_NAME} textAnchor="middle" fill={BAD}>
+      {loss && (
+        <text x={loss.x} y={loss.y + 5} {...LINE_NAME} textAnchor="middle" fill={BAD}>
           Loss
         </text>
       )}
-      {profit.height > 60 && (
+      {profit && (
         <text
-          x={profit.x - profitShift}
+          x={profit.x}
           y={profit.y + 5}
           {...LINE_NAME}
           stroke={PETROL_WASH}

@@ -12,6 +12,7 @@ import {
 import type { CostPoint } from "./cost-points.ts";
 import { areaFill, areaPath, type PlacedCrossing } from "./EvenMarks.tsx";
 import { type ChartPlace, gainAreas } from "./even-shapes.ts";
+import { labelsWithRoom } from "./label-room.ts";
 
 interface EvenWindowProps {
   points: readonly CostPoint[];
@@ -126,24 +127,29 @@ export function EvenWindow({ points, crossings, scale, plot }: EvenWindowProps) 
         stroke={COST_LINE.stroke}
         strokeWidth={COST_LINE.strokeWidth}
       />
-      {crossings.map(({ letter, kits, place }) => {
+      {labelsWithRoom(
+        crossings.map(({ kits, place }) => ({ kits, at: within(place).x, half: 15, rank: 0 })),
+      ).map(({ kits, at }) => (
+        <text
+          key={kits}
+          x={at}
+          y={foot - 9}
+          {...LINE_NAME}
+          stroke={SHEET}
+          fontWeight={400}
+          textAnchor="middle"
+          fill={INK_2}
+        >
+          {kits}
+        </text>
+      ))}
+      {crossings.map(({ letter, place }) => {
         const { x, y } = within(place);
         return (
           <g key={letter}>
             <circle cx={x} cy={y} {...SPOT_RING} />
             <text x={x - 8} y={y - 14} {...LINE_NAME} stroke={SHEET} textAnchor="end" fill={INK}>
               {letter}
-            </text>
-            <text
-              x={x}
-              y={foot - 9}
-              {...LINE_NAME}
-              stroke={SHEET}
-              fontWeight={400}
-              textAnchor="middle"
-              fill={INK_2}
-            >
-              {kits}
             </text>
           </g>
         );
