@@ -1,3 +1,5 @@
+import { useId } from "react";
+import { usePlotArea } from "recharts";
 import { STEP_SEGMENT } from "#src/components/islands/chart-theme.ts";
 import type { CostPoint } from "./cost-points.ts";
 
@@ -41,8 +43,15 @@ function paths(points: readonly (Placed | null)[]): { line: string; steps: [Plac
 /** A line that breaks where cost goes up in a step, its two ends joined by a fine dashed one. */
 export function BrokenLine({ points = [], stroke, strokeWidth, whole = false }: BrokenLineProps) {
   const { line, steps } = paths(placed(points, whole));
+  const plot = usePlotArea();
+  const clip = useId();
   return (
-    <g>
+    <g clipPath={plot && `url(#${clip})`}>
+      {plot && (
+        <clipPath id={clip}>
+          <rect x={plot.x} y={plot.y} width={plot.width} height={plot.height + 2} />
+        </clipPath>
+      )}
       {steps.map(([from, to]) => (
         <path key={from.x} d={`M${from.x} ${from.y}L${to.x} ${to.y}`} fill="none" {...STEP_SEGMENT} />
       ))}

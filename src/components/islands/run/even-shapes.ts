@@ -33,52 +33,66 @@ interface Pair {
   takings: number;
 }
 
-/** What follows a run size on the way to the next: both ends of a step, or the crossing between the two. */
-function between(point: CostPoint, next: CostPoint): { last: Pair; turns: boolean } | null {
-  const [gap, nextGap] = [gapOf(point), gapOf(next)];
-  if (gap === null || nextGap === null) return null;
-  const turns = Math.sign(gap) * Math.sign(nextGap) < 0;
-  // The old cost holds until the step, where the area closes on the vertical.
-  if (point.breaksAfter)
-    return {
-      last: { kits: next.kits, cost: point.total as number, takings: next.kept as number },
-      turns,
-    };
-  const cross = turns ? meeting(point, next) : null;
-  return cross && { last: { kits: cross.kits, cost: cross.money, takings: cross.money }, turns };
+function gapOf({ cost, takings }: Pair): number {
+  return takings - cost;
 }
 
-function gapOf({ total, kept }: CostPoint): number | null {
-  return total === null || kept === null ? null : kept - total;
+/** The unbroken courses of cost and takings, with both ends of every step; what is not known parts them. */
+function courses(points: readonly CostPoint[]): Pair[][] {
+  const all: Pair[][] = [[]];
+  for (const [place, { kits, total, kept, breaksAfter }] of points.entries()) {
+    if (total === null || kept === null) {
+      all.push([]);
+      continue;
+    }
+    const next = points[place + 1];
+    all.at(-1)?.push({ kits, cost: total, takings: kept });
+    // The old cost holds until the step, where the area closes on the vertical.
+    if (breaksAfter && next && next.total !== null && next.kept !== null)
+      all.at(-1)?.push({ kits: next.kits, cost: total, takings: next.kept });
+  }
+  return all;
 }
 
-/** Cost and takings along the span, cut where the lines cross, with both ends of every step. */
-function stretches(points: readonly CostPoint[]): Pair[][] {
+/** Where the two lines cross between two places; on the vertical of a step they only change sides. */
+function crossingOf(before: Pair, after: Pair): Pair | null {
+  if (before.kits === after.kits) return null;
+  const share = gapOf(before) / (gapOf(before) - gapOf(after));
+  const money = before.takings + share * (after.takings - before.takings);
+  return { kits: before.kits + share * (after.kits - before.kits), cost: money, takings: money };
+}
+
+/** A course cut where cost and takings change sides, and where they touch. */
+function cut(course: readonly Pair[]): Pair[][] {
   const all: Pair[][] = [];
   let open: Pair[] = [];
-  for (const [place, point] of points.entries()) {
-    const next = points[place + 1];
-    if (gapOf(point) !== null)
-      open.push({ kits: point.kits, cost: point.total as number, takings: point.kept as number });
-    const way = next ? between(point, next) : null;
-    if (way) open.push(way.last);
-    if (!way?.turns && gapOf(point) !== null && next && gapOf(next) !== null) continue;
+  for (const pair of course) {
+    const before = open.at(-1);
+    if (before && gapOf(before) * gapOf(pair) < 0) {
+      const cross = crossingOf(before, pair);
+      all.push(cross ? [...open, cross] : open);
+      open = cross ? [cross] : [];
+    }
+    open.push(pair);
+    if (gapOf(pair) !== 0) continue;
     all.push(open);
-    open = way && !point.breaksAfter ? [way.last] : [];
+    open = [pair];
   }
   return [...all, open].filter((stretch) => stretch.length > 1);
 }
 
 /** The areas of loss and profit, in order, each closed where the lines cross. */
 export function gainAreas(points: readonly CostPoint[]): GainArea[] {
-  return stretches(points).map((run) => {
-    const gap = run.reduce((sum, { cost, takings }) => sum + takings - cost, 0);
-    const costs = run.map(({ kits, cost }) => ({ kits, money: cost }));
-    const takings = run.map(({ kits, takings: money }) => ({ kits, money }));
-    return gap >= 0
-      ? { gain: "profit", upper: takings, lower: costs }
-      : { gain: "loss", upper: costs, lower: takings };
-  });
+  return courses(points)
+    .flatMap(cut)
+    .map((run) => {
+      const gap = run.reduce((sum, { cost, takings }) => sum + takings - cost, 0);
+      const costs = run.map(({ kits, cost }) => ({ kits, money: cost }));
+      const takings = run.map(({ kits, takings: money }) => ({ kits, money }));
+      return gap >= 0
+        ? { gain: "profit", upper: takings, lower: costs }
+        : { gain: "loss", upper: costs, lower: takings };
+    });
 }
 
 /** A, B, C …; after Z comes AA. */
