@@ -24,6 +24,17 @@ export function toMinor(amount: string, currency: string): bigint {
 }
 
 /**
+ * The least whole number of minor units that reaches a threshold. Goods are whole minor units, the
+ * threshold need not be: 4 yen do not reach free freight from 4.10.
+ *
+ * @example minorReaching("4.10", "JPY") === 5n; minorReaching("75", "EUR") === 7500n
+ */
+export function minorReaching(threshold: string, currency: string): bigint {
+  const unit = 10n ** BigInt(12 - minorDecimals(currency));
+  return (scaled(threshold, 12) + unit - 1n) / unit;
+}
+
+/**
  * Minor units as decimal text with all the currency's decimals.
  *
  * @example minorText(6200, "EUR") === "62.00"

@@ -5,7 +5,7 @@ import { currencyDecimals } from "./currencies.ts";
 import { grains, scaled } from "./grains.ts";
 import { saleOf } from "./kept-per-sale.ts";
 import { factorSums } from "./learning.ts";
-import { toMinor } from "./money.ts";
+import { minorReaching, toMinor } from "./money.ts";
 import { spareOf } from "./need.ts";
 import { prepareOffers } from "./prepare-offers.ts";
 import { prepareQuote } from "./prepare-quote.ts";
@@ -84,6 +84,7 @@ function prepareSupplier(
   worthOf: Preparing["worthOf"],
 ): PreparedSupplier {
   const minor = (amount: string) => Number(toMinor(amount, terms.currency));
+  const reaching = (threshold: string) => Number(minorReaching(threshold, terms.currency));
   const { freight, belowMinimum } = terms;
   return {
     id: terms.id,
@@ -91,9 +92,9 @@ function prepareSupplier(
     terms,
     worth: worthOf(terms.currency),
     freight: freight.model === "not-known" ? null : freight.model === "none" ? 0 : minor(freight.amount),
-    freeFrom: terms.freeFreightFrom === null ? Number.POSITIVE_INFINITY : minor(terms.freeFreightFrom),
+    freeFrom: terms.freeFreightFrom === null ? Number.POSITIVE_INFINITY : reaching(terms.freeFreightFrom),
     handling: minor(terms.handlingFee),
-    minimum: terms.minimumOrderValue === null ? 0 : minor(terms.minimumOrderValue),
+    minimum: terms.minimumOrderValue === null ? 0 : reaching(terms.minimumOrderValue),
     fee: belowMinimum.term === "fee" ? minor(belowMinimum.fee) : 0,
     refusesSmall: belowMinimum.term === "refused",
     shutOut: plan.shutOutSuppliers.includes(terms.id),

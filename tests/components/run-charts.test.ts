@@ -119,6 +119,11 @@ describe("areas of loss and profit", () => {
     expect(gainAreas(points)).toHaveLength(2);
   });
 
+  it("part where the lines only touch", () => {
+    const areas = gainAreas([point(1, 1, 0), point(2, 0, 0), point(3, 0, 1)]);
+    expect(areas.map(({ gain }) => gain)).toEqual(["loss", "profit"]);
+  });
+
   it("never mix loss and profit, whatever the lines do", () => {
     const sums = fc.array(fc.tuple(fc.nat(200), fc.nat(200)), { minLength: 2, maxLength: 30 });
     fc.assert(
