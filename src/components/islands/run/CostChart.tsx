@@ -1,5 +1,15 @@
 import { useCallback } from "react";
-import { CartesianGrid, Line, LineChart, ReferenceLine, Tooltip, XAxis, YAxis } from "recharts";
+import {
+  CartesianGrid,
+  DefaultZIndexes,
+  Line,
+  LineChart,
+  ReferenceLine,
+  Tooltip,
+  XAxis,
+  YAxis,
+  ZIndexLayer,
+} from "recharts";
 import {
   axisTitle,
   CHART_HEIGHT,
@@ -92,7 +102,9 @@ export function CostChart(props: CostChartProps) {
       {brings !== null && <ReferenceLine y={brings} {...NET_LINE} />}
       {run >= span.from && run <= span.to && <ReferenceLine x={run} {...RUN_LINE} />}
       <Line {...COST_LINE} dataKey="perKit" shape={drawLine} />
-      <CostMarks {...props} top={top} />
+      <ZIndexLayer zIndex={DefaultZIndexes.scatter}>
+        <CostMarks {...props} top={top} />
+      </ZIndexLayer>
       <Tooltip cursor={CURSOR} isAnimationActive={false} content={useTip(props)} />
     </LineChart>
   );

@@ -1,5 +1,14 @@
 import { useCallback } from "react";
-import { CartesianGrid, Line, LineChart, Tooltip, XAxis, YAxis } from "recharts";
+import {
+  CartesianGrid,
+  DefaultZIndexes,
+  Line,
+  LineChart,
+  Tooltip,
+  XAxis,
+  YAxis,
+  ZIndexLayer,
+} from "recharts";
 import {
   axisTitle,
   CHART_HEIGHT,
@@ -79,7 +88,9 @@ export function EvenChart(props: EvenChartProps) {
       <EvenAreas points={points} />
       <Line {...TAKINGS_LINE} dataKey="kept" shape={drawWhole} />
       <Line {...COST_LINE} dataKey="total" shape={drawLine} />
-      <EvenMarks {...props} />
+      <ZIndexLayer zIndex={DefaultZIndexes.scatter}>
+        <EvenMarks {...props} />
+      </ZIndexLayer>
       <Tooltip cursor={CURSOR} isAnimationActive={false} content={useTip(currency)} />
     </LineChart>
   );
