@@ -27,6 +27,7 @@ export const PAGES: readonly PictureOf[] = [
   { name: "account", path: "/account" },
   { name: "parts", path: kit("Dew Lantern", "parts") },
   { name: "parts-empty", path: kit("Moth Lamp", "parts") },
+  { name: "details", path: kit("Dew Lantern", "details") },
   { name: "bring-in", path: kit("Dew Lantern", "parts/bring-in") },
   { name: "offers", path: kit("Dew Lantern", "offers") },
   { name: "offer", path: kit("Dew Lantern", `offers/${seedId("part", "ledww")}`) },

@@ -120,7 +120,8 @@ export default function PartsGrid(props: PartsGridProps) {
     press.preventDefault();
     press.stopPropagation();
     grid.stopEditing();
-    deeds.nextDraft();
+    // The grid hands over what was typed in a task of its own.
+    setTimeout(() => deeds.nextDraft());
   }
 
   function pressed(press: KeyboardEvent) {
@@ -152,6 +153,7 @@ export default function PartsGrid(props: PartsGridProps) {
 
   function edited({ data, colDef, newValue }: CellEditRequestEvent<GridRow, string>) {
     const column = colDef.colId as ColumnKey;
+    setRange(null);
     if (data.kind === "draft") deeds.writeDraft(column, String(newValue ?? ""));
     else if (data.kind === "line") deeds.edit(data, column, String(newValue ?? ""));
   }
@@ -174,7 +176,7 @@ export default function PartsGrid(props: PartsGridProps) {
       onKeyDownCapture={pressed}
       onCopy={copy}
       onPaste={paste}
-      className={`[&_.ag-cell-focus:not(.ag-cell-inline-editing)]:outline-3 [&_.ag-cell-focus:not(.ag-cell-inline-editing)]:-outline-offset-3 [&_.ag-cell-focus:not(.ag-cell-inline-editing)]:outline-petrol ${whole ? "" : "h-[max(480px,calc(100vh-250px))]"}`}
+      className={`[&_.ag-cell-focus:not(.ag-cell-inline-editing)]:[box-shadow:inset_0_0_0_3px_var(--color-petrol)] ${whole ? "" : "h-[max(480px,calc(100vh-250px))]"}`}
     >
       <AgGridReact<GridRow>
         theme={phone ? phoneTheme : theme}
@@ -207,6 +209,7 @@ export default function PartsGrid(props: PartsGridProps) {
         }
         selectionColumnDef={{ pinned: "left", width: 38, suppressMovable: true }}
         onSelectionChanged={({ api: grid }) => deeds.select(grid.getSelectedRows().map(({ id }) => id))}
+        animateRows={false}
         readOnlyEdit
         stopEditingWhenCellsLoseFocus
         enterNavigatesVerticallyAfterEdit

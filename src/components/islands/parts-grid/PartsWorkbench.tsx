@@ -154,12 +154,35 @@ export function PartsWorkbench(props: WorkbenchProps) {
     return () => cancelAnimationFrame(frame);
   }, [asked, wish]);
 
+  /** So many lines must stand in the grid before the empty line has its new place and can be gone to. */
+  const awaited = useRef<number | null>(null);
+  useEffect(() => {
+    if (awaited.current === null || all.length < awaited.current) return;
+    awaited.current = null;
+    setWish((count) => count + 1);
+  }, [all]);
+
+  /** A line that was moved keeps the focus, so that the same key moves it on. */
+  const follow = useRef<{ line: string; column: string } | null>(null);
+  // biome-ignore lint/correctness/useExhaustiveDependencies: the line is gone after when the rows have changed.
+  useEffect(() => {
+    const node = follow.current && grid.current?.getRowNode(follow.current.line);
+    if (node?.rowIndex == null || !follow.current) return;
+    grid.current?.setFocusedCell(node.rowIndex, follow.current.column);
+    follow.current = null;
+  }, [shown]);
+
   const gridDeeds: GridDeeds = {
     ...deeds,
+    move: (row, by) => {
+      const column = grid.current?.getFocusedCell()?.column.getColId() ?? "designators";
+      follow.current = { line: row.id, column };
+      deeds.move(row, by);
+    },
     leaveDraft: () => void deeds.commitDraft(),
     nextDraft: () => {
-      deeds.commitDraft();
-      setWish((count) => count + 1);
+      if (deeds.commitDraft()) awaited.current = all.length + 1;
+      else setWish((count) => count + 1);
     },
     insertAt: (row) => {
       deeds.insertAt(row);

@@ -1,6 +1,7 @@
 import { CallFailed, call } from "#src/components/islands/call.ts";
 import { type KitAddress, kitApi, kitKeys } from "#src/components/islands/kit-address.ts";
 import { showToast } from "#src/components/islands/parts/toasts.ts";
+import { keepEdit } from "#src/components/islands/plan/edit-log.ts";
 import { moduleStore } from "#src/components/islands/plan/module-store.ts";
 import { saving } from "#src/components/islands/plan/saving.ts";
 import { queryClient } from "#src/components/islands/query-client.ts";
@@ -171,7 +172,9 @@ function merged(list: PricedPartsList, reply: PartsChanged): PricedPartsList {
   };
 }
 
+/** Forgets an edit that was not taken: it cannot be undone, and the strip no longer tells of it. */
 function drop(edit: Edit): void {
+  keepEdit();
   waiting = waiting.filter((one) => one !== edit);
   saving.change((now) => ({ ...now, waiting: waiting.length }));
   const without = (stack: readonly Edit[]) => stack.filter((one) => one !== edit);
