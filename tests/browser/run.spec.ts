@@ -44,7 +44,8 @@ test("the run can be changed, shows what that did, is saved and can be taken bac
   await expect(figure(page, "Cost per kit")).toHaveText(before ?? "");
   await expect(strip(page)).not.toContainText("Run changed");
   await saved(page, async () => page.keyboard.press("Alt+="));
-  await page.reload();
+  await page.reload({ waitUntil: "networkidle" });
+  await expect(page.getByRole("application").first()).toBeVisible();
   await expect(page.getByRole("slider", { name: "Run" })).toHaveAttribute("aria-valuenow", String(run + 1));
   await saved(page, async () => page.keyboard.press("Alt+-"));
 });
