@@ -55,7 +55,8 @@ async function send(form: HTMLFormElement): Promise<void> {
   form.querySelector("[data-done]")?.setAttribute("hidden", "");
   const { body, faults } = readForm(form);
   if (faults.length > 0) return showFaults(form, { ...NOT_ALL, errors: faults });
-  const path = new URL(form.action).pathname;
+  const { pathname, search } = new URL(form.action);
+  const path = pathname + search;
   const input = form.dataset.bodiless === undefined ? body : undefined;
   showBusy(form, true);
   try {
