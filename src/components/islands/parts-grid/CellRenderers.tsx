@@ -65,7 +65,8 @@ export function SupplierCell({ data, value }: CellProps) {
 
 /** What one kit's share costs: opens its working. */
 export function PerKitCell({ data, value, node, context }: CellProps) {
-  if (node.rowPinned) return value && <span className="rule-result inline-block pl-3">{value}</span>;
+  if (node.rowPinned)
+    return value && <span className="rule-result inline-block pl-3 leading-6">{value}</span>;
   if (data?.kind !== "line" || !value) return null;
   return (
     <button

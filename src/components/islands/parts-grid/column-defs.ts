@@ -72,6 +72,9 @@ const WIDTHS: Partial<Record<ColumnKey, Partial<Def>>> = {
   stock: { width: 100 },
 };
 
+/** With one edition there is room for what the other editions' columns would take. */
+const ROOMY: Partial<Record<ColumnKey, Partial<Def>>> = { package: { width: 150 }, supplier: { width: 200 } };
+
 const RENDERERS: Partial<Record<ColumnKey, Def["cellRenderer"]>> = {
   place: PlaceCell,
   part: PartCell,
@@ -206,7 +209,9 @@ export function columnDefs({ keys, editions, phone, sortable }: ColumnsWanted): 
   const at = new Map<string, number>(keys.map((key, place) => [key, place]));
   return keys.map((key): Def => {
     const head = columnHead(key, phone ? [] : editions);
-    const width = phone ? (PHONE_WIDTHS[key] ?? { width: 52 }) : (WIDTHS[key] ?? {});
+    const width = phone
+      ? (PHONE_WIDTHS[key] ?? { width: 52 })
+      : ((editions.length === 1 ? ROOMY[key] : undefined) ?? WIDTHS[key] ?? {});
     const quantity = phone ? 42 : editions.length > 1 ? 74 : 56;
     return {
       colId: key,
