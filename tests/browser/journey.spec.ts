@@ -131,6 +131,9 @@ for (const width of [1440, 390])
     await addBoardQuote(page, kit);
     await planRun(page, kit);
     await expect(page.getByRole("main")).toContainText(`One kit costs ${BY_HAND.costPerKit}`);
+    await expect(page.getByRole("main")).toContainText(`each earns ${BY_HAND.earnsPerKit}`);
+    // The header says when the server has everything; only then is a reload a test of what it keeps.
+    await expect(page.getByText(/^Saved \d\d:\d\d$/)).toHaveCount(1);
     await page.reload();
     await expect(page.getByRole("main")).toContainText(`One kit costs ${BY_HAND.costPerKit}`);
     await expect(page.getByRole("main")).toContainText(`each earns ${BY_HAND.earnsPerKit}`);
