@@ -2,6 +2,7 @@ import { expect, test } from "vitest";
 import { migrateDb, openDb } from "#db/client.ts";
 import { KITS } from "#db/seed/kits.ts";
 import { loadDemonstration, seedId, WORKSHOP_ID } from "#db/seed/load.ts";
+import { sweepRuns } from "#src/costing/sweep.ts";
 import { planOf } from "#src/server/plan.ts";
 import { kitsOf } from "#src/server/store/kit.ts";
 import { membershipOf } from "#src/server/store/membership.ts";
@@ -37,4 +38,13 @@ test("quantities agree with designators in every line that has designators", () 
   for (const kit of KITS)
     for (const line of kit.lines.filter(({ designators }) => designators !== ""))
       expect(Math.max(...line.perKit)).toBe(line.designators.split(", ").length);
+});
+
+test("Dew Lantern crosses break-even three times, and its run is the last kit before a step in cost", () => {
+  const db = loaded();
+  const workshop = membershipOf(db, WORKSHOP_ID, seedId("user", "ines"))?.workshop;
+  const kit = kitsOf(db, WORKSHOP_ID).find(({ name }) => name === "Dew Lantern");
+  const { breakEven, sweetSpots } = sweepRuns(planOf(db, workshop as never, kit as never, "2026-03-09"));
+  expect(breakEven.crossings.map(({ way }) => way)).toEqual(["up", "down", "up"]);
+  expect(sweetSpots.map(({ kits }) => kits)).toContain(KITS[0]?.run.kits);
 });
