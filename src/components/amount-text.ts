@@ -1,72 +1,87 @@
 import { roundedText } from "#src/costing/decimal.ts";
 import { minorDecimals } from "#src/costing/money.ts";
 
-/** How amounts and quantities are written on screen. Exact text comes in; rounding here is for reading only. */
+/** How figures are written on pages: DESIGN's rules for money, counts and shares, in one place. */
 
-/** Parts thousands and currency codes without letting the line break there. */
 const NO_BREAK = "\u00a0";
 const MINUS = "\u2212";
-const SIGNS: Readonly<Record<string, string>> = { EUR: "€", USD: "$", GBP: "£", JPY: "¥" };
 
-/** "€" or, for a currency without a sign of its own here, "CHF". */
+/** Signs that stand before the figure without a space; any other currency is written by its letters. */
+const SIGNS: Record<string, string> = { EUR: "€", USD: "$", GBP: "£", JPY: "¥", INR: "₹", KRW: "₩" };
+
 export function currencySign(currency: string): string {
   return SIGNS[currency] ?? currency;
 }
 
-function grouped(whole: string): string {
-  return whole.replace(/\B(?=(\d{3})+$)/g, NO_BREAK);
+/** Thousands parted by a no-break space: "1 793.65". */
+function parted(unsigned: string): string {
+  const [whole = "0", part] = unsigned.split(".");
+  const groups = whole.replace(/\B(?=(\d{3})+(?!\d))/g, NO_BREAK);
+  return part === undefined ? groups : `${groups}.${part}`;
 }
 
-function withSign(digits: string, currency: string): string {
-  const negative = digits.startsWith("-");
-  const [whole = "0", part] = (negative ? digits.slice(1) : digits).split(".");
-  const sign = SIGNS[currency] ?? `${currency}${NO_BREAK}`;
-  return `${negative ? MINUS : ""}${sign}${grouped(whole)}${part === undefined ? "" : `.${part}`}`;
+function withSign(rounded: string, currency: string | null, plus: boolean): string {
+  const negative = rounded.startsWith("-");
+  const sign = negative ? MINUS : plus ? "+" : "";
+  const symbol = currency === null ? "" : (SIGNS[currency] ?? `${currency}${NO_BREAK}`);
+  return `${sign}${symbol}${parted(negative ? rounded.slice(1) : rounded)}`;
 }
 
-/**
- * Money to the minor unit of its currency.
- *
- * @example moneyText("1793.647", "EUR") === "€1 793.65"
- */
-export function moneyText(value: string, currency: string): string {
-  return withSign(roundedText(value, minorDecimals(currency)), currency);
+/** Exact decimal text as money, rounded to the currency's minor unit: "€1 793.65", "−€2.14". */
+export function moneyText(amount: string, currency: string): string {
+  return withSign(roundedText(amount, minorDecimals(currency)), currency, false);
 }
 
-/** Money without cents, for axes and forecasts. */
-export function roundMoneyText(value: string, currency: string): string {
-  return withSign(roundedText(value, 0), currency);
+/** A change, always with its sign: "+€84.94". */
+export function changeText(amount: string, currency: string): string {
+  return withSign(roundedText(amount, minorDecimals(currency)), currency, true);
 }
 
-/** A change with its sign, always: "+€0.11", "−€2.14". */
-export function changeText(value: string, currency: string): string {
-  const text = moneyText(value, currency);
-  return text.startsWith(MINUS) ? text : `+${text}`;
+/** Money without cents, for axes and forecasts: "€1 500". */
+export function roundMoneyText(amount: string, currency: string): string {
+  return withSign(roundedText(amount, 0), currency, false);
 }
 
-/** The price of one piece as it was quoted: at least three decimals, more where it has more. */
-export function unitPriceText(value: string, currency: string): string {
-  const [whole = "0", part = ""] = value.split(".");
-  return withSign(`${whole}.${part.replace(/0+$/, "").padEnd(3, "0")}`, currency);
+/** A figure of a money axis: without cents, unless the axis counts in less than a whole unit. */
+export function axisMoneyText(value: number, ticks: readonly number[], currency: string): string {
+  const whole = ticks.every(Number.isInteger);
+  return whole ? roundMoneyText(String(value), currency) : moneyText(String(value), currency);
 }
 
-/** A quantity: "1 000". */
-export function countText(count: number): string {
-  return `${count < 0 ? MINUS : ""}${grouped(String(Math.abs(count)))}`;
+/** A unit price: three decimals, more where the price has them: "€0.062", "€0.0043". */
+export function unitPriceText(amount: string, currency: string): string {
+  const places = Math.max(3, minorDecimals(currency), (amount.split(".")[1] ?? "").replace(/0+$/, "").length);
+  return withSign(roundedText(amount, Math.min(places, 6)), currency, false);
 }
 
-/**
- * A share as it is spoken of: "0.975" is "97.5 %".
- */
-export function shareText(share: string): string {
-  const [whole = "0", part = ""] = roundedText(shiftedTwo(share), 4).split(".");
-  const rest = part.replace(/0+$/, "");
-  return `${whole}${rest === "" ? "" : `.${rest}`}${NO_BREAK}%`;
+/** An amount without its currency, for columns whose head names it. */
+export function plainMoneyText(amount: string, currency: string): string {
+  return withSign(roundedText(amount, minorDecimals(currency)), null, false);
 }
 
-/** The same digits with the point two places on: times a hundred, exactly. */
-function shiftedTwo(share: string): string {
-  const [whole = "0", part = ""] = share.split(".");
-  const padded = part.padEnd(2, "0");
-  return `${whole}${padded.slice(0, 2)}.${padded.slice(2) || "0"}`;
+/** A count: "1 000". */
+export function countText(whole: number | string): string {
+  return withSign(roundedText(String(whole), 0), null, false);
+}
+
+export function signedCountText(whole: string): string {
+  return withSign(roundedText(whole, 0), null, true);
+}
+
+/** A share of 0 to 1 in whole hundredths: "43 %". */
+export function shareText(part: string): string {
+  return `${roundedText(shifted(part), 0)}${NO_BREAK}%`;
+}
+
+/** A rate as it was entered: "0.029" is "2.9 %". */
+export function rateText(part: string): string {
+  return `${roundedText(shifted(part), 4).replace(/\.?0+$/, "")}${NO_BREAK}%`;
+}
+
+/** Decimal text times 100, by moving its point. */
+function shifted(part: string): string {
+  const [, sign = "", whole = "", after = ""] = /^(-?)(\d*)\.?(\d*)$/.exec(part) ?? [];
+  const digits = `${whole}${after.padEnd(2, "0")}`;
+  const point = whole.length + 2;
+  return `${sign}${digits.slice(0, point) || "0"}.${digits.slice(point) || "0"}`;
 }

@@ -1,6 +1,6 @@
+import { countText, moneyText } from "#src/components/amount-text.ts";
 import type { BoardPicture } from "#src/components/board-picture.ts";
 import type { KitLabelProps } from "#src/components/islands/parts/KitLabel.tsx";
-import { count, money } from "#src/components/written.ts";
 import type { Figure } from "#src/costing/figure.ts";
 import type { Problem } from "#src/costing/problem.ts";
 import type { Tally } from "#src/costing/tally.ts";
@@ -50,7 +50,7 @@ export function nextStep({ stops, empty, money: seesMoney }: HomeKit, base: stri
 }
 
 function written(figure: Figure, currency: string): string {
-  return figure.known ? money(figure.value, currency) : "not known";
+  return figure.known ? moneyText(figure.value, currency) : "not known";
 }
 
 /** Four figures as written; what a figure needs stands beside the labels, under "Waiting for you". */
@@ -59,16 +59,16 @@ export function kitFigures(tally: Tally, empty: boolean): KitLabelProps["figures
   if (empty)
     return [
       { label: "Cost per kit", value: "needs parts" },
-      { label: "Price", value: price.known ? money(price.value, currency) : "not set" },
+      { label: "Price", value: price.known ? moneyText(price.value, currency) : "not set" },
       { label: "Even after", value: "needs parts" },
       { label: "Earns per kit", value: "needs parts" },
     ];
   return [
     { label: "Cost per kit", value: written(costPerKit, currency) },
-    { label: "Price", value: price.known ? money(price.value, currency) : "not set" },
+    { label: "Price", value: price.known ? moneyText(price.value, currency) : "not set" },
     {
       label: "Even after",
-      value: evenAfter.known ? `${count(evenAfter.value)} sold` : "not known",
+      value: evenAfter.known ? `${countText(evenAfter.value)} sold` : "not known",
     },
     { label: "Earns per kit", value: written(earnsPerKit, currency) },
   ];
@@ -90,10 +90,12 @@ export function boardPicture({
   boardShape,
   boardWidth,
   boardHeight,
+  boardMarks,
 }: KitRow): BoardPicture | null {
   const height = boardShape === "round" ? boardWidth : boardHeight;
   if (!boardNeeded || boardWidth === null || height === null) return null;
-  return { shape: boardShape, widthMm: Number(boardWidth), heightMm: Number(height) };
+  const marks = boardMarks ?? undefined;
+  return { shape: boardShape, widthMm: Number(boardWidth), heightMm: Number(height), marks };
 }
 
 /** The page on which a problem is settled. */

@@ -1,5 +1,5 @@
 import { useEffect } from "react";
-import { money } from "#src/components/written.ts";
+import { moneyText } from "#src/components/amount-text.ts";
 import type { Tally as TallyFigures } from "#src/costing/tally.ts";
 import { tallyChanges } from "#src/costing/tally-change.ts";
 import type { KitPlan } from "#src/server/kit-plan.ts";
@@ -48,7 +48,7 @@ function noteOf(
   if (before.costPerKit.known && !now.costPerKit.known)
     return {
       edit: edit.name,
-      text: `At ${before.run} one kit cost ${money(before.costPerKit.value, before.currency)}.`,
+      text: `At ${before.run} one kit cost ${moneyText(before.costPerKit.value, before.currency)}.`,
       actions: [before.run === now.run ? undo : { ...undo, label: `Go back to ${before.run}` }],
     };
   return {

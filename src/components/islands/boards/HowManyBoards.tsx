@@ -1,5 +1,5 @@
 import { useState } from "react";
-import { countText, moneyText, shareText, unitPriceText } from "#src/components/amount-text.ts";
+import { countText, moneyText, rateText, unitPriceText } from "#src/components/amount-text.ts";
 import type { KitAddress } from "#src/components/islands/kit-address.ts";
 import { ShowWorking } from "#src/components/islands/parts/ShowWorking.tsx";
 import { type Column, Table } from "#src/components/islands/parts/Table.tsx";
@@ -38,7 +38,7 @@ export function HowManyBoards({ address, plan, boards, canChoose }: HowManyBoard
               row: { kind: "run" },
               field: "boardYield",
               value,
-              name: (from) => `Yield changed from ${shareText(String(from))} to ${shareText(value)}.`,
+              name: (from) => `Yield changed from ${rateText(String(from))} to ${rateText(value)}.`,
             })
           }
         />
@@ -53,7 +53,7 @@ export function HowManyBoards({ address, plan, boards, canChoose }: HowManyBoard
                 row: { kind: "run" },
                 field: "boardConfidence",
                 value,
-                name: (from) => `Boards: sure to ${shareText(value)} instead of ${shareText(String(from))}.`,
+                name: (from) => `Boards: sure to ${rateText(value)} instead of ${rateText(String(from))}.`,
               })
             }
           />
@@ -80,7 +80,7 @@ function inWords({ required, toOrder, yield: good, confidence }: BoardsResult): 
   if (toOrder === null)
     return `${countText(required)} boards go into the kits. With this yield no number is enough.`;
   if (toOrder === required) return `${countText(required)} boards go into the kits, and as many are ordered.`;
-  const hundredth = (share: string) => shareText(share).replace("\u00a0%", "");
+  const hundredth = (share: string) => rateText(share).replace("\u00a0%", "");
   return `${countText(required)} boards go into the kits. When ${hundredth(good)} of 100 are good, ${countText(toOrder)} must be ordered to have enough in ${hundredth(confidence)} of 100 runs.`;
 }
 
@@ -98,7 +98,7 @@ interface HundredthsFieldProps {
 /** A share in hundredths, up to four decimals of them. */
 function HundredthsField({ label, share, below, off, hint, onShare }: HundredthsFieldProps) {
   const [draft, setDraft] = useState<string | null>(null);
-  const shown = shareText(share).replace("\u00a0%", "");
+  const shown = rateText(share).replace("\u00a0%", "");
   const share_ = draft === null ? share : readHundredths(draft, below === true);
   const wrong =
     share_ === null

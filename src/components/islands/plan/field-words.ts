@@ -1,4 +1,4 @@
-import { count, money, rate } from "#src/components/written.ts";
+import { countText, moneyText, rateText } from "#src/components/amount-text.ts";
 import type { PlanRow } from "./plan-rows.ts";
 
 const MONEY = [
@@ -53,9 +53,9 @@ const NAMES: Record<string, string> = {
 /** A value of a field as it is written in a sentence. */
 export function fieldValue(field: string, value: unknown, currency: string): string {
   if (value === null || value === undefined) return "not set";
-  if (MONEY.includes(field)) return money(String(value), currency);
-  if (RATES.includes(field)) return rate(String(value));
-  if (typeof value === "number") return count(value);
+  if (MONEY.includes(field)) return moneyText(String(value), currency);
+  if (RATES.includes(field)) return rateText(String(value));
+  if (typeof value === "number") return countText(value);
   if (Array.isArray(value)) return value.length === 1 ? "one edition" : `${value.length} editions`;
   return String(value);
 }

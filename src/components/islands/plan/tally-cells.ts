@@ -1,6 +1,6 @@
+import { changeText, countText, moneyText, signedCountText } from "#src/components/amount-text.ts";
 import type { KitAddress } from "#src/components/islands/kit-address.ts";
 import type { TallyCell } from "#src/components/islands/parts/TallyStrip.tsx";
-import { count, money, signedCount, signedMoney } from "#src/components/written.ts";
 import type { Figure } from "#src/costing/figure.ts";
 import { needWords } from "#src/costing/problem-words.ts";
 import type { Tally } from "#src/costing/tally.ts";
@@ -58,13 +58,13 @@ export function tallyCells(tally: Tally, context: CellContext): TallyCell[] {
     return {
       key,
       label: LABELS[key],
-      value: figure.known ? (isCount ? count(figure.value) : money(figure.value, currency)) : null,
+      value: figure.known ? (isCount ? countText(figure.value) : moneyText(figure.value, currency)) : null,
       ...needs(figure, address),
       ...(isCount && { after: "sold" }),
       onPhone: key === "costPerKit" || key === "earnsPerKit",
       ...(change && {
         change: {
-          amount: isCount ? signedCount(change.by) : signedMoney(change.by, currency),
+          amount: isCount ? signedCountText(change.by) : changeText(change.by, currency),
           turn: change.turn,
         },
       }),
@@ -80,7 +80,7 @@ export function spokenChange(tally: Tally, changes: readonly TallyChange[]): str
   const figure = tally[change.figure];
   if (!figure.known) return "";
   const isCount = change.figure === "evenAfter";
-  const write = (value: string) => (isCount ? count(value) : money(value, tally.currency));
+  const write = (value: string) => (isCount ? countText(value) : moneyText(value, tally.currency));
   const less = change.by.startsWith("-");
   const by = write(less ? change.by.slice(1) : change.by);
   return `${LABELS[change.figure]} ${write(figure.value)}, ${by} ${less ? "less" : "more"}.`;

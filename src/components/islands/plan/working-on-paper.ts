@@ -1,6 +1,12 @@
+import {
+  countText,
+  moneyText,
+  plainMoneyText,
+  rateText,
+  unitPriceText,
+} from "#src/components/amount-text.ts";
 import type { KitAddress } from "#src/components/islands/kit-address.ts";
 import type { Paper, PaperLine, PaperSub } from "#src/components/working-paper.ts";
-import { count, money, plainMoney, rate, unitPrice } from "#src/components/written.ts";
 import { roundedText } from "#src/costing/decimal.ts";
 import { needWords } from "#src/costing/problem-words.ts";
 import type {
@@ -33,14 +39,14 @@ function trimmed(value: string): string {
 function written(amount: WorkingAmount, currency: string): string {
   switch (amount.kind) {
     case "money":
-      if (amount.places !== undefined) return unitPrice(amount.value, amount.currency);
+      if (amount.places !== undefined) return unitPriceText(amount.value, amount.currency);
       return amount.currency === currency
-        ? plainMoney(amount.value, currency)
-        : money(amount.value, amount.currency);
+        ? plainMoneyText(amount.value, currency)
+        : moneyText(amount.value, amount.currency);
     case "count":
-      return amount.unit ? `${count(amount.value)} ${amount.unit}` : count(amount.value);
+      return amount.unit ? `${countText(amount.value)} ${amount.unit}` : countText(amount.value);
     case "rate":
-      return rate(amount.value);
+      return rateText(amount.value);
     case "number":
       return amount.unit ? `${trimmed(amount.value)} ${amount.unit}` : trimmed(amount.value);
     case "words":

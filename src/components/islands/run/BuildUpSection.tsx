@@ -1,10 +1,10 @@
+import { moneyText, roundMoneyText, shareText } from "#src/components/amount-text.ts";
 import { hatchFill } from "#src/components/islands/chart-theme.ts";
 import { Figure } from "#src/components/islands/parts/Figure.tsx";
 import { HatchDefs } from "#src/components/islands/parts/HatchDefs.tsx";
 import { Section } from "#src/components/islands/parts/Section.tsx";
 import { ShowWorking } from "#src/components/islands/parts/ShowWorking.tsx";
 import type { useOpens } from "#src/components/islands/plan/open-working.ts";
-import { money, share, wholeMoney } from "#src/components/written.ts";
 import { needWords } from "#src/costing/problem-words.ts";
 import type { RunResult } from "#src/costing/run-result.ts";
 import { type BarKind, type BuildUpRow, buildUp } from "./build-up-rows.ts";
@@ -24,7 +24,7 @@ export function BuildUpSection({ run, opens }: { run: RunResult; opens: ReturnTy
   return (
     <Section
       title={`One kit of ${run.kits}, built up`}
-      aside={`each thin line is ${step < 1 ? money(String(step), run.currency) : wholeMoney(String(step), run.currency)}`}
+      aside={`each thin line is ${step < 1 ? moneyText(String(step), run.currency) : roundMoneyText(String(step), run.currency)}`}
       actions={<ShowWorking of="the cost of one kit" onClick={opens("per-kit-used").onOpen} />}
     >
       <svg width={0} height={0} aria-hidden="true" className="absolute">
@@ -45,7 +45,7 @@ export function BuildUpSection({ run, opens }: { run: RunResult; opens: ReturnTy
           Used counts what keeps on the shelf as not spent. In money spent one kit costs{" "}
           <Figure
             label="Cost per kit, spent"
-            value={run.perKit.spent.known ? money(run.perKit.spent.value, run.currency) : ""}
+            value={run.perKit.spent.known ? moneyText(run.perKit.spent.value, run.currency) : ""}
             {...opens("per-kit-spent")}
           />
           .
@@ -79,13 +79,13 @@ function BuildUpLine({ row, lines, currency, opens }: LineProps) {
       </td>
       <td className={`w-[12%] pl-4 text-right whitespace-nowrap ${weight} max-tablet:w-auto`}>
         {figure.known ? (
-          <Figure label={label} value={money(figure.value, currency)} {...opens(row.opens)} />
+          <Figure label={label} value={moneyText(figure.value, currency)} {...opens(row.opens)} />
         ) : (
           <span className="font-medium text-ink-2">{needWords(figure.needs)}</span>
         )}
       </td>
       <td className="w-[7%] pl-3 text-right whitespace-nowrap text-ink-2 type-label max-tablet:hidden">
-        {row.share === null ? "" : share(row.share)}
+        {row.share === null ? "" : shareText(row.share)}
       </td>
     </tr>
   );

@@ -10,6 +10,7 @@ import {
   YAxis,
   ZIndexLayer,
 } from "recharts";
+import { moneyText } from "#src/components/amount-text.ts";
 import {
   axisTitle,
   CHART_HEIGHT,
@@ -28,7 +29,6 @@ import {
   X_AXIS,
   Y_AXIS,
 } from "#src/components/islands/chart-theme.ts";
-import { money } from "#src/components/written.ts";
 import { BrokenLine } from "./BrokenLine.tsx";
 import { ChartTip } from "./ChartTip.tsx";
 import { useChartScale } from "./chart-scale.ts";
@@ -113,7 +113,7 @@ export function CostChart(props: CostChartProps) {
 function useTip({ view, brings, currency }: CostChartProps) {
   return useCallback(
     (tip: object) => {
-      const written = (value: string | null) => (value === null ? "not known" : money(value, currency));
+      const written = (value: string | null) => (value === null ? "not known" : moneyText(value, currency));
       return (
         <ChartTip
           {...tip}
@@ -195,7 +195,7 @@ function SpotNames({ chosen, rings, narrow, currency }: SpotNamesProps) {
         {rank === 0 ? `${kits} kits` : kits}
       </tspan>
       <tspan x={x - 8} dy={19} fill={rank === 0 ? INK : INK_2} fontWeight={rank === 0 ? 700 : 400}>
-        {money(perKit, currency)}
+        {moneyText(perKit, currency)}
       </tspan>
     </text>
   ));
@@ -210,7 +210,7 @@ function BringsName({ span, brings, currency, narrow, scale }: BringsNameProps) 
   const { x, y } = scale({ kits: span.to, money: Number(brings) });
   return (
     <text x={x} y={y - 9} {...LINE_NAME} textAnchor="end" fill={PETROL}>
-      One kit brings in {money(brings, currency)}
+      One kit brings in {moneyText(brings, currency)}
       {narrow ? "" : " after tax, fees and postage"}
     </text>
   );
@@ -236,7 +236,7 @@ function EarnsName({
       {...LINE_NAME}
       fill={PETROL}
     >
-      {lost ? "loses" : "earns"} {money(lost ? earns.slice(1) : earns, currency)}
+      {lost ? "loses" : "earns"} {moneyText(lost ? earns.slice(1) : earns, currency)}
     </text>
   );
 }

@@ -1,9 +1,9 @@
 import { useMemo, useState } from "react";
+import { moneyText } from "#src/components/amount-text.ts";
 import { FilterGroup } from "#src/components/islands/parts/FilterGroup.tsx";
 import { Section } from "#src/components/islands/parts/Section.tsx";
 import { ShowWorking } from "#src/components/islands/parts/ShowWorking.tsx";
 import type { useOpens } from "#src/components/islands/plan/open-working.ts";
-import { money } from "#src/components/written.ts";
 import type { RunResult } from "#src/costing/run-result.ts";
 import type { SweepColumns, SweepResult } from "#src/costing/sweep-result.ts";
 import type { Plan } from "#src/shapes/plan.ts";
@@ -45,7 +45,7 @@ function costTable(columns: SweepColumns, span: Span, currency: string): ChartTa
     rows: sizes.map((kits) => [
       String(kits),
       ...of(kits - 1).map((value) =>
-        value === null || value === undefined ? "not known" : money(value, currency),
+        value === null || value === undefined ? "not known" : moneyText(value, currency),
       ),
     ]),
     fileRows: columns.used.map((_, place) => [String(place + 1), ...of(place).map((value) => value ?? "")]),
@@ -132,7 +132,7 @@ export function ordinal(whole: number): string {
 
 function nextKitNote(plan: Plan, run: RunResult, spot: SweepResult["sweetSpots"][number]) {
   return {
-    title: `The ${ordinal(run.kits + 1)} kit costs ${money(spot.nextKit, run.currency)}:`,
+    title: `The ${ordinal(run.kits + 1)} kit costs ${moneyText(spot.nextKit, run.currency)}:`,
     reason: `${changesInWords(plan, spot.changes)}.`,
   };
 }

@@ -1,8 +1,8 @@
+import { countText, moneyText } from "#src/components/amount-text.ts";
 import { Figure } from "#src/components/islands/parts/Figure.tsx";
 import { Section } from "#src/components/islands/parts/Section.tsx";
 import { type Column, Table } from "#src/components/islands/parts/Table.tsx";
 import type { useOpens } from "#src/components/islands/plan/open-working.ts";
-import { count, money } from "#src/components/written.ts";
 import type { Figure as CostFigure } from "#src/costing/figure.ts";
 import { figureLess } from "#src/costing/figure-less.ts";
 import { needWords } from "#src/costing/problem-words.ts";
@@ -14,19 +14,19 @@ export function EditionsSection({ run, opens }: { run: RunResult; opens: ReturnT
   const { currency } = run;
   const written = (label: string, figure: CostFigure, figureId?: FigureId) =>
     figure.known ? (
-      <Figure label={label} value={money(figure.value, currency)} {...(figureId && opens(figureId))} />
+      <Figure label={label} value={moneyText(figure.value, currency)} {...(figureId && opens(figureId))} />
     ) : (
       <span className="text-ink-2">{needWords(figure.needs)}</span>
     );
   const columns: Column<EditionResult>[] = [
     { key: "name", head: "Edition", names: true, cell: ({ name }) => name },
-    { key: "kits", head: "Kits", number: true, cell: ({ kits }) => count(kits) },
+    { key: "kits", head: "Kits", number: true, cell: ({ kits }) => countText(kits) },
     {
       key: "price",
       head: "Price",
       number: true,
       wide: true,
-      cell: ({ sale }) => (sale.price === null ? "not set" : money(sale.price, currency)),
+      cell: ({ sale }) => (sale.price === null ? "not set" : moneyText(sale.price, currency)),
     },
     {
       key: "brings",

@@ -9,6 +9,7 @@ import {
   YAxis,
   ZIndexLayer,
 } from "recharts";
+import { moneyText } from "#src/components/amount-text.ts";
 import {
   axisTitle,
   CHART_HEIGHT,
@@ -20,7 +21,6 @@ import {
   Y_AXIS,
 } from "#src/components/islands/chart-theme.ts";
 import { HatchDefs } from "#src/components/islands/parts/HatchDefs.tsx";
-import { money } from "#src/components/written.ts";
 import { BrokenLine } from "./BrokenLine.tsx";
 import { ChartTip } from "./ChartTip.tsx";
 import type { CostPoint, Span } from "./cost-points.ts";
@@ -99,7 +99,7 @@ export function EvenChart(props: EvenChartProps) {
 function useTip(currency: string) {
   return useCallback(
     (tip: object) => {
-      const written = (value: string | null) => (value === null ? "not known" : money(value, currency));
+      const written = (value: string | null) => (value === null ? "not known" : moneyText(value, currency));
       return (
         <ChartTip
           {...tip}

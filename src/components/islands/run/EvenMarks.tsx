@@ -1,4 +1,5 @@
 import { type PlotArea, usePlotArea } from "recharts";
+import { moneyText } from "#src/components/amount-text.ts";
 import {
   BAD,
   hatchFill,
@@ -10,7 +11,6 @@ import {
   RUN_RING,
   SPOT_RING,
 } from "#src/components/islands/chart-theme.ts";
-import { money } from "#src/components/written.ts";
 import { useChartScale } from "./chart-scale.ts";
 import type { CostPoint } from "./cost-points.ts";
 import type { EvenChartProps } from "./EvenChart.tsx";
@@ -288,7 +288,7 @@ function PaidBack({ paid, run, soldToPay, currency }: PaidBackProps) {
       )}
       <circle cx={ring.x} cy={ring.y} {...RUN_RING} />
       <text x={runName.x} y={runName.y} {...LINE_NAME} fill={INK} textAnchor={runName.anchor}>
-        {run} cost {money(cost, currency)}
+        {run} cost {moneyText(cost, currency)}
       </text>
     </g>
   );

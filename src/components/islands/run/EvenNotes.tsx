@@ -1,7 +1,7 @@
+import { shareText } from "#src/components/amount-text.ts";
 import { Figure } from "#src/components/islands/parts/Figure.tsx";
 import { MarginNote } from "#src/components/islands/parts/Pair.tsx";
 import type { useOpens } from "#src/components/islands/plan/open-working.ts";
-import { share } from "#src/components/written.ts";
 import type { SweepResult } from "#src/costing/sweep-result.ts";
 import type { Plan } from "#src/shapes/plan.ts";
 import { breakEvenWords, crossingWords } from "./crossing-words.ts";
@@ -52,7 +52,7 @@ export function EvenNotes({ plan, sweep, run, opens }: EvenNotesProps) {
       )}
       {margin !== null && !margin.startsWith("-") && (
         <p className="text-ink-2">
-          The run could be {share(margin)} smaller and still pay for itself: its margin of safety.
+          The run could be {shareText(margin)} smaller and still pay for itself: its margin of safety.
         </p>
       )}
     </MarginNote>

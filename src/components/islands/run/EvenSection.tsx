@@ -1,7 +1,7 @@
 import { useMemo } from "react";
+import { countText, moneyText } from "#src/components/amount-text.ts";
 import { Section } from "#src/components/islands/parts/Section.tsx";
 import { ShowWorking } from "#src/components/islands/parts/ShowWorking.tsx";
-import { count, money } from "#src/components/written.ts";
 import type { SweepColumns } from "#src/costing/sweep-result.ts";
 import { ChartFrame, type ChartTable } from "./ChartFrame.tsx";
 import type { SectionProps } from "./CostSection.tsx";
@@ -13,7 +13,7 @@ import { fileName } from "./file-name.ts";
 function evenTable(columns: SweepColumns, span: Span, currency: string): ChartTable {
   const sizes = Array.from({ length: span.to - span.from + 1 }, (_, place) => span.from + place);
   const written = (value: string | null | undefined) =>
-    value === null || value === undefined ? "not known" : money(value, currency);
+    value === null || value === undefined ? "not known" : moneyText(value, currency);
   return {
     head: ["Run", "Takings", "Total cost, used", "Left", "Sold to pay for it"],
     rows: sizes.map((kits) => [
@@ -21,7 +21,7 @@ function evenTable(columns: SweepColumns, span: Span, currency: string): ChartTa
       written(columns.kept[kits - 1]),
       written(columns.used[kits - 1]),
       written(columns.profit[kits - 1]),
-      columns.soldToPay[kits - 1] == null ? "–" : count(columns.soldToPay[kits - 1] ?? 0),
+      columns.soldToPay[kits - 1] == null ? "–" : countText(columns.soldToPay[kits - 1] ?? 0),
     ]),
     fileRows: columns.used.map((used, place) => [
       String(place + 1),

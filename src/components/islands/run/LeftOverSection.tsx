@@ -1,10 +1,10 @@
+import { countText, moneyText, shareText } from "#src/components/amount-text.ts";
 import { type KitAddress, kitPath } from "#src/components/islands/kit-address.ts";
 import { Figure } from "#src/components/islands/parts/Figure.tsx";
 import { Section } from "#src/components/islands/parts/Section.tsx";
 import { ShowWorking } from "#src/components/islands/parts/ShowWorking.tsx";
 import { type Column, Table } from "#src/components/islands/parts/Table.tsx";
 import type { useOpens } from "#src/components/islands/plan/open-working.ts";
-import { count, money, share } from "#src/components/written.ts";
 import type { Figure as CostFigure } from "#src/costing/figure.ts";
 import { needWords } from "#src/costing/problem-words.ts";
 import type { PartLine, RunResult } from "#src/costing/run-result.ts";
@@ -29,7 +29,7 @@ export function LeftOverSection({ address, plan, run, opens }: LeftOverProps) {
   const { currency } = run;
   const left = run.parts.filter(({ leftOver }) => leftOver > 0).sort(byValue);
   const written = (figure: CostFigure) =>
-    figure.known ? money(figure.value, currency) : needWords(figure.needs);
+    figure.known ? moneyText(figure.value, currency) : needWords(figure.needs);
   const keep = (id: string) => plan.parts.find((part) => part.id === id)?.keepShare ?? "0";
   const columns: Column<PartLine>[] = [
     {
@@ -51,10 +51,10 @@ export function LeftOverSection({ address, plan, run, opens }: LeftOverProps) {
       head: "Ordered",
       number: true,
       wide: true,
-      cell: ({ ordered }) => count(ordered),
+      cell: ({ ordered }) => countText(ordered),
       total: "",
     },
-    { key: "left", head: "Left", number: true, cell: ({ leftOver }) => count(leftOver), total: "" },
+    { key: "left", head: "Left", number: true, cell: ({ leftOver }) => countText(leftOver), total: "" },
     {
       key: "value",
       head: "Value",
@@ -64,7 +64,14 @@ export function LeftOverSection({ address, plan, run, opens }: LeftOverProps) {
         <Figure label={`${name} left over`} value={written(leftOverValue)} {...opens(`part:${id}`)} />
       ),
     },
-    { key: "share", head: "Keeps", number: true, wide: true, cell: ({ id }) => share(keep(id)), total: "" },
+    {
+      key: "share",
+      head: "Keeps",
+      number: true,
+      wide: true,
+      cell: ({ id }) => shareText(keep(id)),
+      total: "",
+    },
     {
       key: "kept",
       head: "Kept value",

@@ -1,4 +1,5 @@
 import { useState } from "react";
+import { countText, moneyText } from "#src/components/amount-text.ts";
 import { buttonLook } from "#src/components/button-look.ts";
 import { CallFailed, call } from "#src/components/islands/call.ts";
 import { type KitAddress, kitApi } from "#src/components/islands/kit-address.ts";
@@ -6,7 +7,6 @@ import { DropArea } from "#src/components/islands/parts/DropArea.tsx";
 import { ErrorBox } from "#src/components/islands/parts/ErrorBox.tsx";
 import { Section } from "#src/components/islands/parts/Section.tsx";
 import { Table } from "#src/components/islands/parts/Table.tsx";
-import { count, money } from "#src/components/written.ts";
 import type { Figure } from "#src/costing/figure.ts";
 import { needWords } from "#src/costing/problem-words.ts";
 import type { RunResult } from "#src/costing/run-result.ts";
@@ -96,7 +96,7 @@ function OutcomeOf({ outcome }: { outcome: Outcome }) {
 
 function FileFigures({ file, run }: { file: string; run: RunResult }) {
   const written = (figure: Figure) =>
-    figure.known ? money(figure.value, run.currency) : needWords(figure.needs);
+    figure.known ? moneyText(figure.value, run.currency) : needWords(figure.needs);
   const rows: [string, string][] = [
     ["Cost per kit, used", written(run.perKit.used)],
     ["Cost per kit, spent", written(run.perKit.spent)],
@@ -104,7 +104,7 @@ function FileFigures({ file, run }: { file: string; run: RunResult }) {
     ["Earns per kit", written(run.earnsPerKit)],
     [
       "Even after",
-      run.evenAfter.known ? `${count(run.evenAfter.value)} sold` : needWords(run.evenAfter.needs),
+      run.evenAfter.known ? `${countText(run.evenAfter.value)} sold` : needWords(run.evenAfter.needs),
     ],
     ["Cash needed", written(run.spent)],
   ];

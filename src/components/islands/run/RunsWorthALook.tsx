@@ -1,8 +1,8 @@
+import { countText, moneyText, roundMoneyText } from "#src/components/amount-text.ts";
 import { RunBands } from "#src/components/islands/parts/Bands.tsx";
 import { QuietButton } from "#src/components/islands/parts/QuietButton.tsx";
 import { Section } from "#src/components/islands/parts/Section.tsx";
 import { type Column, Table } from "#src/components/islands/parts/Table.tsx";
-import { count, money, wholeMoney } from "#src/components/written.ts";
 import type { WhyShown, WorthALook } from "./worth-a-look.ts";
 
 const WHY: Record<WhyShown, string> = {
@@ -50,26 +50,26 @@ export function RunsWorthALook({
       wide: true,
       cell: ({ why }) => <span className="text-ink-2">{WHY[why]}</span>,
     },
-    { key: "cost", head: "Cost per kit", number: true, cell: ({ perKit }) => known(perKit, money) },
+    { key: "cost", head: "Cost per kit", number: true, cell: ({ perKit }) => known(perKit, moneyText) },
     {
       key: "cash",
       head: "Cash needed",
       number: true,
       wide: true,
-      cell: ({ cash }) => known(cash, wholeMoney),
+      cell: ({ cash }) => known(cash, roundMoneyText),
     },
     {
       key: "even",
       head: "Even after",
       number: true,
       wide: true,
-      cell: ({ evenAfter }) => (evenAfter === null ? "–" : count(evenAfter)),
+      cell: ({ evenAfter }) => (evenAfter === null ? "–" : countText(evenAfter)),
     },
     {
       key: "profit",
       head: "Left if all sell",
       number: true,
-      cell: ({ profit }) => known(profit, wholeMoney),
+      cell: ({ profit }) => known(profit, roundMoneyText),
     },
     {
       key: "choose",

@@ -1,5 +1,5 @@
+import { moneyText } from "#src/components/amount-text.ts";
 import { MarginNote } from "#src/components/islands/parts/Pair.tsx";
-import { money } from "#src/components/written.ts";
 import type { SweepResult } from "#src/costing/sweep-result.ts";
 import type { Plan } from "#src/shapes/plan.ts";
 import { asSentence, changesInWords } from "./change-words.ts";
@@ -31,9 +31,9 @@ export function SweetSpotNotes({ plan, sweep, run }: { plan: Plan; sweep: SweepR
             <ul>
               {spots.map(({ kits, perKit, nextKit, changes }) => (
                 <li key={kits} className="hairline-b py-1.5 last:border-b-0">
-                  <b>{kits}</b> at {money(perKit, sweep.currency)}
+                  <b>{kits}</b> at {moneyText(perKit, sweep.currency)}
                   <span className="block text-ink-2">
-                    the next kit costs {money(nextKit, sweep.currency)}
+                    the next kit costs {moneyText(nextKit, sweep.currency)}
                     {changes.length > 0 && `: ${changesInWords(plan, changes)}`}
                   </span>
                 </li>
@@ -47,7 +47,8 @@ export function SweetSpotNotes({ plan, sweep, run }: { plan: Plan; sweep: SweepR
           <ul>
             {steps.map(({ kits, perKit, fellBy, changes }) => (
               <li key={kits} className="hairline-b py-1.5 last:border-b-0">
-                <b>From {kits}</b> at {money(perKit, sweep.currency)}, {money(fellBy, sweep.currency)} less
+                <b>From {kits}</b> at {moneyText(perKit, sweep.currency)}, {moneyText(fellBy, sweep.currency)}{" "}
+                less
                 <span className="block text-ink-2">{asSentence(changesInWords(plan, changes))}</span>
               </li>
             ))}

@@ -1,7 +1,7 @@
 import { useMemo } from "react";
+import { moneyText, shareText } from "#src/components/amount-text.ts";
 import { MarginNote } from "#src/components/islands/parts/Pair.tsx";
 import { runOf } from "#src/components/islands/plan/run-of.ts";
-import { money, share } from "#src/components/written.ts";
 import type { HeadId, RunResult } from "#src/costing/run-result.ts";
 import type { Plan } from "#src/shapes/plan.ts";
 
@@ -32,19 +32,19 @@ export function WeighsMost({ plan, run }: { plan: Plan; run: RunResult }) {
   return (
     <MarginNote title="What weighs most">
       <p>
-        {name} {verb} {share(largest.share)} of a kit.
+        {name} {verb} {shareText(largest.share)} of a kit.
         {again?.perKit.used.known && (
           <>
             {" "}
             A second run of {run.kits} would not carry the once-only costs:{" "}
-            {money(again.perKit.used.value, run.currency)} a kit.
+            {moneyText(again.perKit.used.value, run.currency)} a kit.
           </>
         )}
       </p>
       {run.earnedPerHour.known && (
         <p>
-          Your work comes to {money(run.earnedPerHour.value, run.currency)} an hour if all are sold, whatever
-          you count an hour at.
+          Your work comes to {moneyText(run.earnedPerHour.value, run.currency)} an hour if all are sold,
+          whatever you count an hour at.
         </p>
       )}
     </MarginNote>

@@ -1,7 +1,7 @@
+import { moneyText } from "#src/components/amount-text.ts";
 import { Figure } from "#src/components/islands/parts/Figure.tsx";
 import { MarginNote } from "#src/components/islands/parts/Pair.tsx";
 import type { useOpens } from "#src/components/islands/plan/open-working.ts";
-import { money } from "#src/components/written.ts";
 import type { RunResult } from "#src/costing/run-result.ts";
 import type { SweepColumns, SweepResult } from "#src/costing/sweep-result.ts";
 import type { Plan } from "#src/shapes/plan.ts";
@@ -31,14 +31,14 @@ export function WhyThisRun({ plan, run, sweep, columns, opens }: WhyProps) {
       ) : (
         <p>
           It is no sweet spot.
-          {next && ` The next is ${next.kits}, at ${money(next.perKit, currency)} a kit.`}
+          {next && ` The next is ${next.kits}, at ${moneyText(next.perKit, currency)} a kit.`}
           {next && next.changes.length > 0 && ` With one more ${changesInWords(plan, next.changes)}.`}
         </p>
       )}
       {nextKit !== null && (
         <p>
           One kit more costs{" "}
-          <Figure label="One kit more costs" value={money(nextKit, currency)} {...opens("next-kit")} />.
+          <Figure label="One kit more costs" value={moneyText(nextKit, currency)} {...opens("next-kit")} />.
         </p>
       )}
     </MarginNote>

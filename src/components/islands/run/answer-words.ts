@@ -1,4 +1,4 @@
-import { count, money } from "#src/components/written.ts";
+import { countText, moneyText } from "#src/components/amount-text.ts";
 import type { Figure } from "#src/costing/figure.ts";
 import { needWords } from "#src/costing/problem-words.ts";
 import type { RunResult } from "#src/costing/run-result.ts";
@@ -46,7 +46,7 @@ function positive(amount: string): string {
  */
 export function runAnswer(figures: AnswerFigures): AnswerPiece[] {
   const { kits, costPerKit, bringsPerKit, earnsPerKit, evenAfter, spent, currency } = figures;
-  const write = (amount: string) => money(amount, currency);
+  const write = (amount: string) => moneyText(amount, currency);
   if (!costPerKit.known)
     return [bold(`${kits} cannot be worked out yet.`), plain(` The cost ${needWords(costPerKit.needs)}.`)];
   const cost = `One kit costs ${write(costPerKit.value)}`;
@@ -72,7 +72,7 @@ export function runAnswer(figures: AnswerFigures): AnswerPiece[] {
     plain(` ${brings}, so each earns `),
     bold(write(earns)),
     plain(
-      evenAfter.known ? `. The run is paid for after ${count(evenAfter.value)} sold.${cash}` : `.${cash}`,
+      evenAfter.known ? `. The run is paid for after ${countText(evenAfter.value)} sold.${cash}` : `.${cash}`,
     ),
   ];
 }

@@ -1,4 +1,4 @@
-import { count } from "#src/components/written.ts";
+import { countText } from "#src/components/amount-text.ts";
 import type { Change } from "#src/costing/sweep-result.ts";
 import type { Plan } from "#src/shapes/plan.ts";
 
@@ -22,17 +22,17 @@ function offerSupplier(plan: Plan, id: string | null): string | null {
 export function changeClause(plan: Plan, change: Change): string {
   switch (change.what) {
     case "board-lots":
-      return `it takes ${count(change.to)} boards instead of ${count(change.from)}`;
+      return `it takes ${countText(change.to)} boards instead of ${countText(change.from)}`;
     case "board-break":
       return change.to > change.from
-        ? `boards reach the price from ${count(change.to)}`
-        : `boards fall back to the price from ${count(change.to)}`;
+        ? `boards reach the price from ${countText(change.to)}`
+        : `boards fall back to the price from ${countText(change.to)}`;
     case "board-quote":
       return `boards come from ${houseName(plan, change.to)}`;
     case "break":
       return change.to > change.from
-        ? `${partName(plan, change.part)} reaches the price from ${count(change.to)}`
-        : `${partName(plan, change.part)} falls back to the price from ${count(change.to)}`;
+        ? `${partName(plan, change.part)} reaches the price from ${countText(change.to)}`
+        : `${partName(plan, change.part)} falls back to the price from ${countText(change.to)}`;
     case "offer": {
       const supplier = offerSupplier(plan, change.to);
       return supplier
@@ -42,8 +42,8 @@ export function changeClause(plan: Plan, change: Change): string {
     case "pack":
     case "lots":
       return change.to > change.from
-        ? `it takes ${count(change.to)} of ${partName(plan, change.part)} instead of ${count(change.from)}`
-        : `${count(change.to)} of ${partName(plan, change.part)} are enough`;
+        ? `it takes ${countText(change.to)} of ${partName(plan, change.part)} instead of ${countText(change.from)}`
+        : `${countText(change.to)} of ${partName(plan, change.part)} are enough`;
     case "split":
       return `${partName(plan, change.part)} comes from two offers`;
     case "parcel-more":

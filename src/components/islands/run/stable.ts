@@ -1,5 +1,5 @@
 import { useCallback, useRef } from "react";
-import { axisMoney } from "#src/components/written.ts";
+import { axisMoneyText } from "#src/components/amount-text.ts";
 
 /** The same array as long as it holds the same values: a chart compares by identity what it is given. */
 export function useStable<T>(values: readonly T[]): T[] {
@@ -13,5 +13,5 @@ export function useStable<T>(values: readonly T[]): T[] {
 
 /** How the figures of a money axis are written; the same function as long as its ticks are the same. */
 export function useAxisMoney(ticks: readonly number[], currency: string): (value: number) => string {
-  return useCallback((value: number) => axisMoney(value, ticks, currency), [ticks, currency]);
+  return useCallback((value: number) => axisMoneyText(value, ticks, currency), [ticks, currency]);
 }

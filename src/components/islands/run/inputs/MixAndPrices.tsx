@@ -1,4 +1,4 @@
-import { count } from "#src/components/written.ts";
+import { countText } from "#src/components/amount-text.ts";
 import { EntryTable } from "./EntryTable.tsx";
 import { AmountEntry, NumberEntry } from "./fields.tsx";
 import type { InputProps } from "./input-props.ts";
@@ -42,7 +42,7 @@ export function MixAndPrices({ address, held, run, may }: InputProps) {
           head: `Kits of ${run.kits}`,
           number: true,
           className: "w-28",
-          cell: ({ id }) => <span className="block pt-2 text-right">{count(made(id))}</span>,
+          cell: ({ id }) => <span className="block pt-2 text-right">{countText(made(id))}</span>,
         },
         {
           head: "Price, tax included",

@@ -1,9 +1,9 @@
+import { currencySign } from "#src/components/amount-text.ts";
 import type { FieldWords } from "#src/components/islands/parts/Field.tsx";
 import { MeasureField } from "#src/components/islands/parts/MeasureField.tsx";
 import { MoneyField } from "#src/components/islands/parts/MoneyField.tsx";
 import type { MoneyPlaces } from "#src/components/money-entry.ts";
 import { fromPercent, toPercent } from "#src/components/percent.ts";
-import { currencySign } from "#src/components/written.ts";
 import { type Entry, take } from "./entry.ts";
 
 type Common = FieldWords & {
