@@ -140,7 +140,7 @@ const TEXTS: readonly (readonly [RegExp, PartClass])[] = inAnyAlphabet([
     "led",
   ],
   [
-    /\b(?:trim(?:mer|pot)s?|potentiometer|potentiomètre|potenciómetro|potenziometro|poti|potmeter|potencjometr|rheostat|variable resistor|res_adj|res-adj|потенциометр|可変抵抗|电位器)|^pot\b/i,
+    /\b(?:trim(?:mer|pot)s?|potentiometer|potentiomètre|potenciómetro|potenziometro|poti|potmeter|potencjometr|rheostat|variable resistor|res_adj|res-adj|потенциометр|可変抵抗|电位器)|^pot\b|\d\s?[km]?(?:Ω|ohms?)?[ -]?(?:lin|log)\b|\b[abc]\d{1,3}k\b/i,
     "potentiometer",
   ],
   [
@@ -164,19 +164,19 @@ const TEXTS: readonly (readonly [RegExp, PartClass])[] = inAnyAlphabet([
     "inductor",
   ],
   [
-    /\b(?:transistor|mosfet|bjt|npn|pnp|jfet|igbt|thyristor|triac|tranzystor|tranzistor|транзистор|トランジスタ|三极管)\b/i,
+    /\b(?:transistors?|mosfets?|bjt|npn|pnp|jfet|igbt|thyristor|triac|tranzystor|tranzistor|транзистор|トランジスタ|三极管)\b/i,
     "transistor",
   ],
   [
-    /\b(?:diode|diodo|rectifier|zener|schottky|dioda|gleichrichter|диод|ダイオード|二极管|1n400\d|1n4148|1n58\d\d)\b/i,
+    /\b(?:diodes?|dioden|diodo|rectifier|zener|schottky|dioda|gleichrichter|диод|ダイオード|二极管|1n400\d|1n4148|1n58\d\d)\b/i,
     "diode",
   ],
   [
-    /\b(?:push ?button|switch|taster|schalter|tact(?:ile)?|drucktaster|interrupteur|poussoir|interruptor|pulsador|interruttore|pulsante|schakelaar|przełącznik|przycisk|přepínač|tlačítko|strömbrytare|переключатель|кнопка|スイッチ|开关|encoder)\b/i,
+    /\b(?:push ?buttons?|switch(?:es)?|taster|schalter|tact(?:ile)?|drucktaster|interrupteur|poussoir|interruptor|pulsador|interruttore|pulsante|schakelaar|przełącznik|przycisk|přepínač|tlačítko|strömbrytare|переключатель|кнопка|スイッチ|开关|encoder)\b/i,
     "switch",
   ],
   [
-    /\b(?:microcontroller|mikrocontroller|op-?amp|regulator|spannungsregler|integrated circuit|ic|mcu|eprom|eeprom|flash|timer|driver|amplifier|régulateur|regulador|regolatore|микросхема|マイコン|集成电路)\b/i,
+    /\b(?:microcontroller|mikrocontroller|op-?amp|regulator|spannungsregler|integrated circuits?|ics?|mcu|eprom|eeprom|flash|timer|driver|amplifier|régulateur|regulador|regolatore|микросхема|マイコン|集成电路)\b/i,
     "integrated-circuit",
   ],
   [

@@ -70,11 +70,11 @@ function lettersBetween(
   );
 }
 
-/** Joins "C  2" to C2 and splits at commas, semicolons, blanks, slashes between designators. */
+/** Joins "C  2" to C2 and splits at commas, semicolons, blanks, and at slashes and pluses between designators. */
 function tokens(text: string): string[] {
   return text
     .replace(/(^|[\s,;])([A-Za-z]{1,4})\s+(?=\d{1,4}(?:$|[\s,;]))/g, "$1$2")
-    .replace(/([A-Za-z]\d+[A-Za-z]?)\s*[/&|]\s*(?=[A-Za-z]{1,5}\d)/g, "$1,")
+    .replace(/([A-Za-z]\d+[A-Za-z]?)\s*[/&|+]\s*(?=[A-Za-z]{1,5}\d)/g, "$1,")
     .split(/[\s,;]+/)
     .filter((token) => token !== "");
 }

@@ -61,11 +61,11 @@ const PARTS: readonly (readonly [RegExp, Meaning])[] = [
     "do-not-place",
   ],
   [
-    /\b(?:manufacturer|mfr|mfg|mfgr|manf|manuf|maker|hersteller|herst|fabricant|fabricante|produttore|costruttore|producenta|vyrobce)\b.*\b(?:part|parts|no|nr|nummer|number|num|pn|code|ref|reference|referencia|codice|teilenummer|id)\b/,
+    /\b(?:manufacturer|mfr|mfg|mfgr|manf|manuf|maker|hersteller|herst|fabricant|fabricante|produttore|costruttore|producenta|vyrobce)\b.*\b(?:part|parts|no|nr|nummer|number|num|pn|p n|code|ref|reference|referencia|codice|teilenummer|id)\b/,
     "part-number",
   ],
   [
-    /\b(?:supplier|supp|vendor|distributor|distrib|dist|lieferant|lief|fournisseur|proveedor|fornitore|leverancier|dodavatel|shop|store|stock)\b.*\b(?:part|no|nr|nummer|number|num|pn|code|ref|reference|referencia|codice|sku|id)\b/,
+    /\b(?:supplier|supp|vendor|distributor|distrib|dist|lieferant|lief|fournisseur|proveedor|fornitore|leverancier|dodavatel|shop|store|stock)\b.*\b(?:part|no|nr|nummer|number|num|pn|p n|code|ref|reference|referencia|codice|sku|id)\b/,
     "order-code",
   ],
   [

@@ -9,6 +9,7 @@ import { recogniseProperties } from "./properties.ts";
 import { type ReadQuantity, readQuantity } from "./quantities.ts";
 import { type PriceProblem, readOffers } from "./read-offers.ts";
 import { type Texts, textsOf, wordsOf } from "./row-texts.ts";
+import { classFromUnit } from "./unit-class.ts";
 import { type ReadValues, valueIn } from "./value-cell.ts";
 import { valueKind } from "./values.ts";
 
@@ -28,11 +29,14 @@ function classOf(
   texts: Texts,
   designators: readonly string[],
   words: string,
+  section: PartClass | null,
 ): Pick<DraftLine, "class" | "classFrom"> {
   const guess = guessClass(designators, [words, texts.partNumber]);
   const column = texts.kind === null ? null : classFromColumn(texts.kind);
   if (column !== null && guess.from !== "designator") return { class: column, classFrom: "column" };
-  return { class: guess.class, classFrom: guess.from };
+  if (guess.from !== "nothing") return { class: guess.class, classFrom: guess.from };
+  const said = (texts.value === null ? null : classFromUnit(texts.value)) ?? section;
+  return said === null ? { class: guess.class, classFrom: "nothing" } : { class: said, classFrom: "text" };
 }
 
 function ownProperties(
@@ -72,11 +76,15 @@ function quantityOf(
   return { quantity: null, quantityFrom: "nothing" };
 }
 
-/** Reads one row that is a part. Cells that are empty stay "not known"; nothing is filled in from elsewhere. */
+/**
+ * Reads one row that is a part. Cells that are empty stay "not known"; nothing is filled in from elsewhere.
+ * `section` is the class that the title over the row names; it counts where the row itself says none.
+ */
 export function readLine(
   cells: readonly string[],
   columns: ListColumns,
   values: ReadValues = new Map(),
+  section: PartClass | null = null,
 ): ReadLine {
   const texts = textsOf(cells, columns);
   const designatorText = cellAt(cells, columns.first("designators"));
@@ -87,7 +95,7 @@ export function readLine(
     quantityColumn === null ? null : columns.mark(quantityColumn),
   );
   const words = wordsOf(texts);
-  const kind = classOf(texts, designators, words);
+  const kind = classOf(texts, designators, words, section);
   const part = valueIn(texts, kind.class, columns, values);
   const marked = markOf(cells, columns, texts);
   const own = ownProperties(cells, columns);

@@ -1,3 +1,5 @@
+import type { PartClass } from "#src/shapes/limits.ts";
+import { classFromColumn } from "./classes.ts";
 import { joinContinuations } from "./continuation-rows.ts";
 import { askAboutTwoRows } from "./cross-questions.ts";
 import type { Answer, ExistingLine, Question, ReadResult, Row, RowCounts } from "./draft.ts";
@@ -38,7 +40,8 @@ export function readList(input: ReadListInput): ReadResult {
   const { records, into } = joinContinuations(input.records, columns);
   const shape = listShape(records, columns);
   const values: ReadValues = new Map();
-  const works = records.map((record) => startRow(record, into.get(record.record), shape, values, answers));
+  const reading: Reading = { shape, values, answers, section: null };
+  const works = records.map((record) => startRow(record, into.get(record.record), reading));
   const context: QuestionContext = {
     answers,
     columns,
@@ -73,19 +76,25 @@ function keptBothTables(works: readonly RowWork[]): boolean {
   );
 }
 
-function startRow(
-  record: SheetRecord,
-  into: number | undefined,
-  shape: ListShape,
-  values: ReadValues,
-  answers: Answers,
-): RowWork {
+/** What the rows of a list have in common while they are read one after the other. */
+interface Reading {
+  shape: ListShape;
+  values: ReadValues;
+  answers: Answers;
+  /** The class that the last section title names: what stands under "Resistors" is one. */
+  section: PartClass | null;
+}
+
+function startRow(record: SheetRecord, into: number | undefined, reading: Reading): RowWork {
   if (into !== undefined) return { record, line: null, reason: null, read: null, questions: [], into };
-  const kind = rowKind(record, shape);
-  if (kind.kind === "skip") return { record, line: null, reason: kind.reason, read: null, questions: [] };
-  const read = readLine(record.cells, shape.columns, values);
+  const kind = rowKind(record, reading.shape);
+  if (kind.kind === "skip") {
+    if (kind.reason === "section-title") reading.section = classFromColumn(rowText(record));
+    return { record, line: null, reason: kind.reason, read: null, questions: [] };
+  }
+  const read = readLine(record.cells, reading.shape.columns, reading.values, reading.section);
   const work: RowWork = { record, line: read.line, reason: null, read, questions: [] };
-  if (kind.kind === "doubtful") askWhetherAPart(work, kind, answers);
+  if (kind.kind === "doubtful") askWhetherAPart(work, kind, reading.answers);
   return work;
 }
 

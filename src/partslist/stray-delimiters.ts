@@ -113,13 +113,19 @@ function bestStart(
     const joined = row.slice(start, start + many);
     if (joined.some((cell) => cell.trim() === "")) continue;
     const cells = [...row.slice(0, start), joined.join(sign), ...row.slice(start + many)];
-    const score = cells.reduce((sum, cell, column) => sum + suits(cell, profiles[column] ?? EMPTY), 0);
+    const fit = cells.reduce((sum, cell, column) => sum + suits(cell, profiles[column] ?? EMPTY), 0);
+    const score = joined.every(looksLikeDesignators) && mostlyDesignators(profiles[start]) ? fit + 1 : fit;
     if (best === null || score > best.score) {
       second = best?.score ?? second;
       best = { start, score };
     } else second = Math.max(second, score);
   }
   return best && best.score > 0 && best.score - second >= 0.8 ? best.start : null;
+}
+
+/** Designators torn apart belong together rather than the first of them to the words before it. */
+function mostlyDesignators(kind: Profile | undefined): boolean {
+  return kind !== undefined && kind.designators > kind.filled * 0.5;
 }
 
 const EMPTY: Profile = { designators: 0, numbers: 0, whole: 0, empty: 1, filled: 0, length: 0 };

@@ -179,6 +179,7 @@ export function findValue(text: string, partClass: PartClass, mark: DecimalMark 
   if (kind === null || !/\p{Nd}/u.test(text)) return null;
   const plain = plainUnits(text)
     .replace(/_/g, " ")
+    .replace(/(?<=[A-Za-z%]),(?=\d)/g, ", ")
     .replace(/^[~≈]\s*/, "")
     .replace(/^(\d{1,3}) (\d{3})(?=\s?[A-Za-zΩ]{0,3}$)/, "$1$2")
     .trim();

@@ -268,4 +268,47 @@ export const MESSY_LISTS: MessyList[] = [
     asks: ["same-parts-twice"],
     skips: ["heading", "other-table", "other-table", "other-table", "other-table"],
   },
+  {
+    name: "sections that name the class, no designators",
+    text: "Component\tPcs\nResistors\t\n10k\t4\n1k\t2\nCapacitors\t\n100nF\t3\nMisc\t\nPCB\t1\n",
+    heading: 0,
+    lines: [
+      ["", 4, "10000"],
+      ["", 2, "1000"],
+      ["", 3, "0.0000001"],
+      ["", 1, null],
+    ],
+    skips: ["heading", "section-title", "section-title", "section-title"],
+  },
+  {
+    name: "Dutch, a potentiometer under P, designators joined by a plus",
+    text: "Aantal;Onderdeel;Waarde\n3x;R1/R2/R3;10K 1%\n1x;P1;50k lin\n2x;C1+C2;2u2/63V\n",
+    heading: 0,
+    lines: [
+      ["R1 R2 R3", 3, "10000"],
+      ["P1", 1, "50000"],
+      ["C1 C2", 2, "0.0000022"],
+    ],
+  },
+  {
+    name: "designators parted by the delimiter in the last column",
+    text: "No;Qty.;Description;Location\n1;10;Resistor 330R 0.25W;R1...R10\n2;2;Elco 100 µF/25V RM2.5;C1;C2\n3;1;Platine;\n",
+    heading: 0,
+    lines: [
+      ["R1 R2 R3 R4 R5 R6 R7 R8 R9 R10", 10, "330"],
+      ["C1 C2", 2, "0.0001"],
+      ["", 1, null],
+    ],
+  },
+  {
+    name: "descriptions with commas and no blanks, a consumable as required",
+    text: "Part Number\tDescription\tRef Designator\tQty Per\tUM\n100-0001\tRES,CF,10K,1/4W,5%\tR1,R3\t2\tEA\n100-0002\tCAP,ELEC,47UF,25V\tC1\t1\tEA\n300-0005\tSOLDER\t\tAR\tGM\n",
+    heading: 0,
+    lines: [
+      ["R1 R3", 2, "10000"],
+      ["C1", 1, "0.000047"],
+      ["", null, null],
+    ],
+    asks: ["quantity-not-a-number"],
+  },
 ];
