@@ -16,11 +16,13 @@ export const imports = sqliteTable(
     state: text("state", { enum: IMPORT_STATES }).notNull(),
     fileName: text("file_name").notNull(),
     byteLength: integer("byte_length").notNull(),
-    /** Name of the text encoding it was read in. */
+    /** Name of the text encoding it was read in, or of the kind of workbook. */
     encoding: text("encoding").notNull(),
+    /** Of a workbook: the sheet that was taken, and the others that hold something, as JSON. */
+    sheets: text("sheets", { mode: "json" }).$type<{ taken: string; others: string[] }>(),
     /** SHA-256 of the bytes: the same file twice is recognised. */
     contentHash: text("content_hash").notNull(),
-    /** The decoded text itself. */
+    /** The decoded text itself; of a workbook the cells of its sheet, set out with tabs. */
     content: text("content").notNull(),
     /** Records of the text, blank ones too, for naming a list without reading it again. */
     rowCount: integer("row_count").notNull(),

@@ -1,6 +1,7 @@
 import { index, integer, sqliteTable, text, uniqueIndex } from "drizzle-orm/sqlite-core";
 import { amount, amountText, id, moment, oneOf, version, wholeNumber } from "#db/columns.ts";
 import { ofWorkshop } from "#db/of-workshop.ts";
+import type { BoardMarks } from "#src/drawings/board-marks.ts";
 import { BOARD_SHAPES } from "#src/shapes/limits.ts";
 
 export const kits = sqliteTable(
@@ -18,6 +19,8 @@ export const kits = sqliteTable(
     /** Millimetres; null: not drawn yet. A round board's diameter is its width. */
     boardWidth: amount("board_width"),
     boardHeight: amount("board_height"),
+    /** What is drawn on the board, as JSON; null: the plain shape. Goes when the board gets another shape or size. */
+    boardMarks: text("board_marks", { mode: "json" }).$type<BoardMarks>(),
     createdAt: moment("created_at").notNull(),
     closedAt: moment("closed_at"),
     version: version(),

@@ -19,6 +19,8 @@ export const users = sqliteTable(
     /** Last time step accepted, so that a code works once. */
     totpLastStep: integer("totp_last_step"),
     singleKeys: integer("single_keys", { mode: "boolean" }).notNull().default(true),
+    /** The workshop they were in last, where signing in leads; null, or one they have left, leads to the first by name. */
+    lastWorkshopId: id("last_workshop_id"),
     createdAt: moment("created_at").notNull(),
     version: version(),
   },

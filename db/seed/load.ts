@@ -8,6 +8,7 @@ import { charges, packingItems, runPlans, tasks } from "#db/schema/runs.ts";
 import { currencyRates, offerBreaks, offers, suppliers } from "#db/schema/supply.ts";
 import { memberships, workshops } from "#db/schema/workshops.ts";
 import type { Db } from "../client.ts";
+import { MARKS } from "./board-marks.ts";
 import { KITS } from "./kits.ts";
 import { PEOPLE, RATES, SUPPLIERS, WORKSHOP } from "./marsh-lane.ts";
 import { PARTS } from "./parts.ts";
@@ -261,6 +262,7 @@ function loadKit(db: Db, kit: SeedKit, now: number): void {
       boardShape: kit.board?.shape ?? "rectangle",
       boardWidth: kit.board?.width ?? null,
       boardHeight: kit.board?.height ?? null,
+      boardMarks: MARKS[kit.name] ?? null,
       createdAt: now + KITS.indexOf(kit),
     })
     .run();

@@ -45,13 +45,20 @@ export function makeKit(given: Changing, entry: KitEntry): KitRow {
   });
 }
 
+/** Whether the board's shape or size changes, so that what is drawn on it is no longer so. */
+function isAnotherBoard(before: KitRow, fields: Omit<KitChange, "version" | "closed">): boolean {
+  const sides = ["boardShape", "boardWidth", "boardHeight"] as const;
+  return sides.some((side) => fields[side] !== undefined && fields[side] !== before[side]);
+}
+
 /** Changes a kit's name, summary or board, closes it or opens it again. */
 export function setKit(given: ChangingKit, { version, closed, ...fields }: KitChange): KitRow {
   const { db, workshop, kit: before, now } = given;
   return inTransaction(db, () => {
     if (fields.name !== undefined) refuseTakenName(db, workshop.id, fields.name, before.id);
     const closedAt = closed === undefined ? {} : { closedAt: closed ? now : null };
-    const after = changeKit(db, workshop.id, before.id, version, { ...fields, ...closedAt });
+    const plain = isAnotherBoard(before, fields) ? { boardMarks: null } : {};
+    const after = changeKit(db, workshop.id, before.id, version, { ...fields, ...closedAt, ...plain });
     if (!after) throw clash(given, before.id, before);
     const names = Object.keys(fields) as (keyof KitRow)[];
     const detail = Object.fromEntries(names.map((name) => [name, [before[name], after[name]]]));

@@ -8,6 +8,7 @@ import {
 import { POST as endRevision } from "#src/pages/api/workshops/[workshop]/kits/[kit]/revisions/index.ts";
 import { GET as kitList, POST as newKit } from "#src/pages/api/workshops/[workshop]/kits/index.ts";
 import { activitySince } from "#src/server/store/activity.ts";
+import { changeKit, kitOf } from "#src/server/store/kit.ts";
 import { runPlanOf } from "#src/server/store/run-plan.ts";
 import { call, testApp } from "#tests/support/app.ts";
 
@@ -79,6 +80,18 @@ describe("changing a kit", () => {
     const noted = activitySince(app.db, at.workshop.id, 0, null, 10).map(({ action, by }) => [action, by]);
     expect(noted).toContainEqual(["kit.change", at.as.name]);
     expect(kit.version).toBe(1);
+  });
+
+  it("keeps what is drawn on the board until the board has another shape or size", async () => {
+    const at = place();
+    const { kit, asking } = await begin(at);
+    const marks = { pads: [[2, 3]] as const };
+    changeKit(app.db, at.workshop.id, kit.id, 1, { boardWidth: "58", boardHeight: "42", boardMarks: marks });
+    const drawn = () => kitOf(app.db, at.workshop.id, kit.id)?.boardMarks;
+    await call(PATCH, { ...asking, body: { version: 2, summary: "Blinks", boardWidth: "58" } });
+    expect(drawn()).toEqual(marks);
+    await call(PATCH, { ...asking, body: { version: 3, boardWidth: "60" } });
+    expect(drawn()).toBeNull();
   });
 
   it("closes it and opens it again", async () => {

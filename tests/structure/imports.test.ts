@@ -14,7 +14,7 @@ interface Rule {
 
 const PURE = [/^src\/(costing|partslist|shapes\/(limits|revision-letter)\.ts)/];
 const REACT = [/^(react|react-dom|@tanstack\/react-query|ag-grid-community|ag-grid-react|recharts)$/];
-const ISLAND_STATE = [/^src\/components\//, /^src\/access\.ts$/, ...PURE];
+const ISLAND_STATE = [/^src\/(components|drawings)\//, /^src\/access\.ts$/, ...PURE];
 
 const RULES: readonly Rule[] = [
   { folder: "src/costing/decimal.ts", may: [/^decimal\.js$/] },
@@ -43,10 +43,11 @@ const RULES: readonly Rule[] = [
     ],
     types: [/^src\/costing\//],
   },
+  { folder: "src/drawings/", may: [/^src\/drawings\//] },
   { folder: "src/access.ts", may: [], types: [/^src\/shapes\/limits\.ts$/] },
   {
     folder: "db/",
-    may: [/^db\//, /^drizzle-orm$/, /^better-sqlite3$/, /^node:$/, /^src\/shapes\/limits\.ts$/],
+    may: [/^db\//, /^drizzle-orm$/, /^better-sqlite3$/, /^node:$/, /^src\/(shapes\/limits\.ts$|drawings\/)/],
     types: [/^src\/shapes\//],
   },
   {
@@ -66,7 +67,7 @@ const RULES: readonly Rule[] = [
   {
     folder: "src/pages/",
     may: [
-      /^src\/(server|access|layouts|components|costing|partslist|shapes\/(limits|revision-letter))/,
+      /^src\/(server|access|layouts|components|drawings|costing|partslist|shapes\/(limits|revision-letter))/,
       /^astro/,
     ],
   },

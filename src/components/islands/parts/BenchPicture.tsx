@@ -1,4 +1,4 @@
-import { DEW_LANTERN } from "#src/components/dew-lantern-board.ts";
+import { DEW_LANTERN } from "#src/drawings/dew-lantern.ts";
 import type { BandColour } from "#src/partslist/run-bands.ts";
 import { BoardShape } from "./Board.tsx";
 import {
@@ -61,7 +61,7 @@ export function BenchPicture({ className }: { className?: string }) {
         <Disc />
       </g>
       <g transform={at(86.2, 76)}>
-        <BoardShape board={DEW_LANTERN} />
+        <BoardShape board={{ shape: "rectangle", widthMm: 58, heightMm: 42, marks: DEW_LANTERN }} />
       </g>
       <g transform={at(87.4, 128)}>
         <DipChip marking="4093" />

@@ -30,7 +30,9 @@ export function BoardShape({ board }: { board: BoardPicture }) {
   const outline = { strokeWidth: 0.35, className: "fill-mask stroke-outline" };
   return (
     <g>
-      {shape === "round" ? (
+      {marks.outline ? (
+        <path d={marks.outline} {...outline} />
+      ) : shape === "round" ? (
         <ellipse cx={widthMm / 2} cy={heightMm / 2} rx={widthMm / 2} ry={heightMm / 2} {...outline} />
       ) : (
         <rect width={widthMm} height={heightMm} rx={Math.min(4, widthMm / 8, heightMm / 8)} {...outline} />
