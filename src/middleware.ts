@@ -9,7 +9,9 @@ import { Problem, problemReply } from "./server/problem.ts";
 import { placeOf } from "./server/route.ts";
 import { addSecurityHeaders, contentSecurityPolicy } from "./server/security-headers.ts";
 import { sessionOf } from "./server/session.ts";
+import { setLastWorkshop } from "./server/store/user.ts";
 import { kitStops } from "./server/trail.ts";
+import { notTaken } from "./server/wrong-method.ts";
 
 /** Sends somebody who is not signed in to the sign-in page, and back here afterwards. */
 function toSignIn(context: APIContext): Response {
@@ -28,6 +30,8 @@ function enter(context: APIContext): Response | undefined {
   if (!locals.user) return toSignIn(context);
   const place = placeOf(db, locals.user, params.workshop, params.kit);
   Object.assign(locals, place);
+  if (locals.user.lastWorkshopId !== place.workshop.id)
+    setLastWorkshop(db, locals.user.id, place.workshop.id);
   if (place.kit) {
     locals.state = kitState(db, place.workshop, place.kit, today());
     locals.stops = kitStops(place.role, locals.state);
@@ -53,11 +57,19 @@ async function page(context: APIContext, next: () => Promise<Response>): Promise
   }
 }
 
-async function api(next: () => Promise<Response>): Promise<Response> {
+/** Every address below /api by its file, so that a method it does not take is told from an address that is none. */
+const addresses = import.meta.glob<Record<string, unknown>>("./pages/api/**/*.ts");
+
+async function unanswered({ request, routePattern }: APIContext): Promise<Response> {
+  const load = addresses[`./pages${routePattern}.ts`] ?? addresses[`./pages${routePattern}/index.ts`];
+  return problemReply(notTaken(request.method, await load?.()));
+}
+
+async function api(context: APIContext, next: () => Promise<Response>): Promise<Response> {
   try {
     const response = await next();
     const isOurs = response.headers.get("content-type")?.includes("json") ?? false;
-    return response.status === 404 && !isOurs ? problemReply(new Problem("not-found")) : response;
+    return response.status === 404 && !isOurs ? unanswered(context) : response;
   } catch (error) {
     console.error(error);
     return problemReply(new Problem("our-mistake"));
@@ -66,7 +78,9 @@ async function api(next: () => Promise<Response>): Promise<Response> {
 
 export const onRequest = defineMiddleware(async (context, next) => {
   context.locals.styleNonce = randomBytes(16).toString("base64");
-  const response = context.url.pathname.startsWith("/api/") ? await api(next) : await page(context, next);
+  const response = context.url.pathname.startsWith("/api/")
+    ? await api(context, next)
+    : await page(context, next);
   const policy = response.headers.get("content-security-policy");
   if (policy)
     response.headers.set("content-security-policy", contentSecurityPolicy(policy, context.locals.styleNonce));

@@ -34,6 +34,11 @@ export function changeUser(db: Db, id: string, changes: Changes): UserRow | unde
     .get();
 }
 
+/** Notes the workshop a person is in now; nobody edits that, so the version stays. */
+export function setLastWorkshop(db: Db, id: string, lastWorkshopId: string): void {
+  db.update(users).set({ lastWorkshopId }).where(eq(users.id, id)).run();
+}
+
 /** Changes a person if they are still at the version seen; `undefined` where they are not. */
 export function changeUserAt(db: Db, id: string, version: number, changes: Changes): UserRow | undefined {
   return db
