@@ -1,6 +1,9 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
+import { freePlace, labelsWithRoom } from "#src/components/islands/charts/label-room.ts";
+import { axisTicks, roundStep, roundTicks } from "#src/components/islands/charts/round-ticks.ts";
 import { buildUp } from "#src/components/islands/run/build-up-rows.ts";
+import { ringNames } from "#src/components/islands/run/cost-names.ts";
 import {
   type CostPoint,
   costPoints,
@@ -9,8 +12,6 @@ import {
   unitCostRange,
 } from "#src/components/islands/run/cost-points.ts";
 import { crossingLetter, crowded, gainAreas, meeting } from "#src/components/islands/run/even-shapes.ts";
-import { freePlace, labelsWithRoom } from "#src/components/islands/run/label-room.ts";
-import { axisTicks, roundStep, roundTicks } from "#src/components/islands/run/round-ticks.ts";
 import { worthALook } from "#src/components/islands/run/worth-a-look.ts";
 import { costRun } from "#src/costing/cost-run.ts";
 import { sweepRuns } from "#src/costing/sweep.ts";
@@ -87,10 +88,19 @@ describe("points of a sweep", () => {
   });
 
   it("leave room for what a kit brings, and cut off the dearest few", () => {
+    // 100, 50, 33.3 and 25 a kit: the axis ends at three times the last, and begins below it.
     const points = [1, 2, 3, 4].map((kits) => ({ ...point(kits, null, null), perKit: 100 / kits }));
-    const { low, high } = unitCostRange(points, 4, 30);
-    expect(high).toBe(75);
+    const { low, high, brings } = unitCostRange(points, 4, 30);
+    expect({ high, brings }).toEqual({ high: 75, brings: "drawn" });
     expect(low).toBeLessThan(25);
+  });
+
+  it("leave out what a kit brings where it lies too far off", () => {
+    // Costs from 10 to 12 are 2 apart: 15 is within two and a half times that above the cheapest, 16 is not.
+    const points = [1, 2, 3].map((kits) => ({ ...point(kits, null, null), perKit: 13 - kits }));
+    expect(unitCostRange(points, 3, 15).brings).toBe("drawn");
+    expect(unitCostRange(points, 3, 16)).toMatchObject({ brings: "above", high: 12 });
+    expect(unitCostRange(points, 3, 6)).toMatchObject({ brings: "below", high: 12 });
   });
 });
 
@@ -154,6 +164,29 @@ describe("names and letters", () => {
     const box = (left: number) => ({ left, right: left + 80, top: 0, bottom: 20 });
     expect(freePlace([box(0), box(200)], [box(40)])).toEqual(box(200));
     expect(freePlace([box(0)], [box(40)])).toEqual(box(0));
+  });
+});
+
+describe("names of rings", () => {
+  const plot = { left: 60, right: 400, top: 0, bottom: 300 };
+  const ring = (x: number, y: number, rank: number) => ({ kits: x, x, y, figure: "€10.00", rank });
+
+  it("stand below left, above right where the axis is too near, and not at all where neither has room", () => {
+    const names = ringNames([ring(200, 100, 0), ring(70, 100, 1), ring(70, 20, 2)], plot, []);
+    expect(names.map(({ x, y, anchor }) => [x, y, anchor])).toEqual([
+      [200, 100, "end"],
+      [70, 100, "start"],
+    ]);
+  });
+
+  it("keep off what is taken, the run first", () => {
+    const names = ringNames([ring(210, 105, 1), ring(200, 100, 0)], plot, []);
+    expect(names.map(({ x, anchor }) => [x, anchor])).toEqual([
+      [200, "end"],
+      [210, "start"],
+    ]);
+    const all = { left: 0, right: 400, top: 0, bottom: 300 };
+    expect(ringNames([ring(200, 100, 0)], plot, [all])).toEqual([]);
   });
 });
 

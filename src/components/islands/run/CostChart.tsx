@@ -17,31 +17,18 @@ import {
   COST_LINE,
   CURSOR,
   GRID,
-  INK,
-  INK_2,
-  LINE_NAME,
   NET_LINE,
-  PETROL,
-  RULE_2,
   RUN_LINE,
-  RUN_RING,
-  SPOT_RING,
   X_AXIS,
   Y_AXIS,
 } from "#src/components/islands/chart-theme.ts";
+import { roundTicks } from "#src/components/islands/charts/round-ticks.ts";
+import { useAxisMoney, useStable } from "#src/components/islands/charts/stable.ts";
 import { BrokenLine } from "./BrokenLine.tsx";
 import { ChartTip } from "./ChartTip.tsx";
-import { useChartScale } from "./chart-scale.ts";
+import { CostMarks } from "./CostMarks.tsx";
 import { type CostPoint, pixels, type Span, unitCostRange } from "./cost-points.ts";
-import { labelsWithRoom } from "./label-room.ts";
-import { axisTicks, roundTicks } from "./round-ticks.ts";
-import { useAxisMoney, useStable } from "./stable.ts";
-
-export interface NamedSpot {
-  kits: number;
-  /** Exact. */
-  perKit: string;
-}
+import type { StepNote } from "./step-note.ts";
 
 export interface CostChartProps {
   points: readonly CostPoint[];
@@ -54,9 +41,10 @@ export interface CostChartProps {
   brings: string | null;
   /** What one kit of the run earns; exact, null while not known. */
   earns: string | null;
-  spots: readonly NamedSpot[];
-  /** What the kit after the run costs, and why that is worth a note: "it opens a third set of panels". */
-  nextKit: { title: string; reason: string } | null;
+  /** Run sizes that get a ring. */
+  spots: readonly number[];
+  /** The step at the run or after it. */
+  note: StepNote | null;
   /** One sentence that says what is to be seen. */
   label: string;
   /** "used" or "spent": the named view. */
@@ -73,8 +61,7 @@ export function CostChart(props: CostChartProps) {
   const { points, span, run, width, narrow } = props;
   const brings = pixels(props.brings);
   const range = unitCostRange(points, run, brings);
-  const yTicks = useStable(axisTicks(range.low, range.high, 6));
-  const top = yTicks.at(-1) ?? 0;
+  const yTicks = useStable(roundTicks(range.low, range.high, 6));
   return (
     <LineChart
       width={width}
@@ -93,17 +80,17 @@ export function CostChart(props: CostChartProps) {
       />
       <YAxis
         {...Y_AXIS}
-        domain={useStable([yTicks[0] ?? 0, top])}
+        domain={useStable([range.low, range.high])}
         ticks={yTicks}
         width={narrow ? 46 : Y_AXIS.width}
         allowDataOverflow
         tickFormatter={useAxisMoney(yTicks, props.currency)}
       />
-      {brings !== null && <ReferenceLine y={brings} {...NET_LINE} />}
+      {brings !== null && range.brings === "drawn" && <ReferenceLine y={brings} {...NET_LINE} />}
       {run >= span.from && run <= span.to && <ReferenceLine x={run} {...RUN_LINE} />}
       <Line {...COST_LINE} dataKey="perKit" shape={drawLine} />
       <ZIndexLayer zIndex={DefaultZIndexes.scatter}>
-        <CostMarks {...props} top={top} />
+        <CostMarks {...props} range={range} />
       </ZIndexLayer>
       <Tooltip cursor={CURSOR} isAnimationActive={false} content={useTip(props)} />
     </LineChart>
@@ -126,146 +113,5 @@ function useTip({ view, brings, currency }: CostChartProps) {
       );
     },
     [view, brings, currency],
-  );
-}
-
-interface PlacedSpot extends NamedSpot {
-  x: number;
-  y: number;
-}
-
-type Scale = NonNullable<ReturnType<typeof useChartScale>>;
-
-function placed({ kits, perKit }: NamedSpot, scale: Scale): PlacedSpot {
-  return { kits, perKit, ...scale({ kits, money: Number(perKit) }) };
-}
-
-/** Rings and names over the line. */
-function CostMarks(props: CostChartProps & { top: number }) {
-  const scale = useChartScale();
-  if (!scale) return null;
-  const { points, span, run, brings, currency, spots, narrow, top } = props;
-  const exactAt = (kits: number) => points.find((point) => point.kits === kits)?.exact.perKit ?? null;
-  const perKit = exactAt(run);
-  const chosen = perKit === null ? null : placed({ kits: run, perKit }, scale);
-  const rings = spots
-    .filter(
-      ({ kits, perKit }) => kits !== run && kits >= span.from && kits <= span.to && Number(perKit) <= top,
-    )
-    .map((spot) => placed(spot, scale));
-  return (
-    <g>
-      {brings !== null && <BringsName span={span} brings={brings} {...{ currency, narrow, scale }} />}
-      {chosen && <EarnsName {...props} chosen={chosen} scale={scale} />}
-      {rings.map(({ kits, x, y }) => (
-        <circle key={kits} cx={x} cy={y} {...SPOT_RING} />
-      ))}
-      {chosen && <circle cx={chosen.x} cy={chosen.y} {...RUN_RING} />}
-      <SpotNames chosen={chosen} rings={rings} narrow={narrow} currency={currency} />
-      {!narrow && chosen && props.nextKit && (
-        <NextKitNote
-          note={props.nextKit}
-          end={scale({ kits: span.to, money: 0 }).x}
-          from={scale({ kits: Math.min(run + 1, span.to), money: Number(exactAt(run + 1) ?? chosen.perKit) })}
-        />
-      )}
-    </g>
-  );
-}
-
-interface SpotNamesProps {
-  chosen: PlacedSpot | null;
-  rings: readonly PlacedSpot[];
-  narrow: boolean;
-  currency: string;
-}
-
-/** Run and cost, below left of each ring that has the room. */
-function SpotNames({ chosen, rings, narrow, currency }: SpotNamesProps) {
-  const half = narrow ? 26 : 30;
-  const wanted = [...(chosen ? [chosen] : []), ...rings].map((spot) => ({
-    ...spot,
-    at: spot.x,
-    half,
-    rank: spot === chosen ? 0 : 1,
-  }));
-  return labelsWithRoom(wanted).map(({ kits, perKit, x, y, rank }) => (
-    <text key={kits} y={y + 24} {...LINE_NAME} textAnchor="end">
-      <tspan x={x - 8} fill={INK} fontWeight={rank === 0 ? 700 : 600}>
-        {rank === 0 ? `${kits} kits` : kits}
-      </tspan>
-      <tspan x={x - 8} dy={19} fill={rank === 0 ? INK : INK_2} fontWeight={rank === 0 ? 700 : 400}>
-        {moneyText(perKit, currency)}
-      </tspan>
-    </text>
-  ));
-}
-
-type BringsNameProps = Pick<CostChartProps, "span" | "currency" | "narrow"> & {
-  brings: string;
-  scale: Scale;
-};
-
-function BringsName({ span, brings, currency, narrow, scale }: BringsNameProps) {
-  const { x, y } = scale({ kits: span.to, money: Number(brings) });
-  return (
-    <text x={x} y={y - 9} {...LINE_NAME} textAnchor="end" fill={PETROL}>
-      One kit brings in {moneyText(brings, currency)}
-      {narrow ? "" : " after tax, fees and postage"}
-    </text>
-  );
-}
-
-/** Between the line of the run and what a kit brings. */
-function EarnsName({
-  brings,
-  earns,
-  currency,
-  chosen,
-  scale,
-}: CostChartProps & { chosen: PlacedSpot; scale: Scale }) {
-  if (brings === null || earns === null) return null;
-  const { y } = scale({ kits: chosen.kits, money: Number(brings) });
-  const room = Math.abs(chosen.y - y);
-  if (room < 44) return null;
-  const lost = earns.startsWith("-");
-  return (
-    <text
-      x={chosen.x + 10}
-      y={Math.min(chosen.y, y) + Math.min(room / 2 + 5, 44)}
-      {...LINE_NAME}
-      fill={PETROL}
-    >
-      {lost ? "loses" : "earns"} {moneyText(lost ? earns.slice(1) : earns, currency)}
-    </text>
-  );
-}
-
-interface NextKitNoteProps {
-  note: { title: string; reason: string };
-  from: { x: number; y: number };
-  end: number;
-}
-
-/** What one kit more sets off, with a leader to the place where the line goes on. */
-function NextKitNote({ note, from, end }: NextKitNoteProps) {
-  const x = from.x + 44;
-  const y = Math.max(from.y - 56, 40);
-  if (end - x < 260) return null;
-  return (
-    <g>
-      <path
-        d={`M${from.x + 6} ${from.y - 3}L${x - 4} ${y + 14}`}
-        stroke={RULE_2}
-        strokeWidth={1.25}
-        fill="none"
-      />
-      <text y={y} {...LINE_NAME} fill={INK}>
-        <tspan x={x}>{note.title}</tspan>
-        <tspan x={x} dy={20} fontWeight={400} fill={INK_2}>
-          {note.reason}
-        </tspan>
-      </text>
-    </g>
   );
 }

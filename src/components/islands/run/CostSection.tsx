@@ -1,5 +1,7 @@
 import { useMemo, useState } from "react";
 import { moneyText } from "#src/components/amount-text.ts";
+import { ChartFrame, type ChartTable } from "#src/components/islands/charts/ChartFrame.tsx";
+import { fileName } from "#src/components/islands/charts/file-name.ts";
 import { FilterGroup } from "#src/components/islands/parts/FilterGroup.tsx";
 import { Section } from "#src/components/islands/parts/Section.tsx";
 import { ShowWorking } from "#src/components/islands/parts/ShowWorking.tsx";
@@ -7,11 +9,9 @@ import type { useOpens } from "#src/components/islands/plan/open-working.ts";
 import type { RunResult } from "#src/costing/run-result.ts";
 import type { SweepColumns, SweepResult } from "#src/costing/sweep-result.ts";
 import type { Plan } from "#src/shapes/plan.ts";
-import { ChartFrame, type ChartTable } from "./ChartFrame.tsx";
 import { CostChart } from "./CostChart.tsx";
-import { changesInWords } from "./change-words.ts";
 import { type CostView, costPoints, type Span, spanAround } from "./cost-points.ts";
-import { fileName } from "./file-name.ts";
+import { stepNote } from "./step-note.ts";
 
 export interface SectionProps {
   plan: Plan;
@@ -61,12 +61,7 @@ export function CostSection({ plan, run, sweep, columns, narrow, opens, partial 
   const span = whole ? { from: 1, to: sweep.to } : spanAround(run.kits, sweep.to);
   const { from, to } = span;
   const points = useMemo(() => costPoints(columns, shown, { from, to }), [columns, shown, from, to]);
-  const next = sweep.sweetSpots.find(({ kits }) => kits === run.kits);
   const name = "What one kit costs, by run size";
-  const spots = sweep.sweetSpots.map(({ kits }) => ({
-    kits,
-    perKit: (shown === "used" ? columns.perKitUsed : columns.perKitSpent)[kits - 1] ?? "0",
-  }));
   return (
     <Section
       title={name}
@@ -100,6 +95,7 @@ export function CostSection({ plan, run, sweep, columns, narrow, opens, partial 
         file={fileName(plan.kit, "cost-per-kit")}
         height={narrow ? 330 : 430}
         table={() => costTable(columns, span, run.currency)}
+        chosen={String(run.kits)}
       >
         {(width) => (
           <CostChart
@@ -111,8 +107,8 @@ export function CostSection({ plan, run, sweep, columns, narrow, opens, partial 
             currency={run.currency}
             brings={run.keptPerKit.known ? run.keptPerKit.value : null}
             earns={shown === "used" && run.earnsPerKit.known ? run.earnsPerKit.value : null}
-            spots={spots}
-            nextKit={next ? nextKitNote(plan, run, next) : null}
+            spots={sweep.sweetSpots.map(({ kits }) => kits)}
+            note={shown === "used" && partial === null ? stepNote(plan, sweep, run.kits, to) : null}
             view={shown}
             label={`${name}: from ${span.from} to ${span.to} kits. Arrow keys go from run size to run size.`}
           />
@@ -120,19 +116,4 @@ export function CostSection({ plan, run, sweep, columns, narrow, opens, partial 
       </ChartFrame>
     </Section>
   );
-}
-
-const ORDINALS: Record<string, string> = { one: "st", two: "nd", few: "rd", other: "th" };
-const ordinalRules = new Intl.PluralRules("en", { type: "ordinal" });
-
-/** "121st" */
-export function ordinal(whole: number): string {
-  return `${whole}${ORDINALS[ordinalRules.select(whole)] ?? "th"}`;
-}
-
-function nextKitNote(plan: Plan, run: RunResult, spot: SweepResult["sweetSpots"][number]) {
-  return {
-    title: `The ${ordinal(run.kits + 1)} kit costs ${moneyText(spot.nextKit, run.currency)}:`,
-    reason: `${changesInWords(plan, spot.changes)}.`,
-  };
 }

@@ -20,13 +20,14 @@ import {
   X_AXIS,
   Y_AXIS,
 } from "#src/components/islands/chart-theme.ts";
+import { axisTicks, roundTicks } from "#src/components/islands/charts/round-ticks.ts";
+import { useAxisMoney, useStable } from "#src/components/islands/charts/stable.ts";
 import { HatchDefs } from "#src/components/islands/parts/HatchDefs.tsx";
 import { BrokenLine } from "./BrokenLine.tsx";
 import { ChartTip } from "./ChartTip.tsx";
 import type { CostPoint, Span } from "./cost-points.ts";
-import { EvenAreas, EvenMarks } from "./EvenMarks.tsx";
-import { axisTicks, roundTicks } from "./round-ticks.ts";
-import { useAxisMoney, useStable } from "./stable.ts";
+import { EvenAreas } from "./EvenAreas.tsx";
+import { EvenMarks } from "./EvenMarks.tsx";
 
 /** A place where takings and cost cross, with its letter. */
 export interface LetteredCrossing {

@@ -1,14 +1,14 @@
 import { useMemo } from "react";
 import { countText, moneyText } from "#src/components/amount-text.ts";
+import { ChartFrame, type ChartTable } from "#src/components/islands/charts/ChartFrame.tsx";
+import { fileName } from "#src/components/islands/charts/file-name.ts";
 import { Section } from "#src/components/islands/parts/Section.tsx";
 import { ShowWorking } from "#src/components/islands/parts/ShowWorking.tsx";
 import type { SweepColumns } from "#src/costing/sweep-result.ts";
-import { ChartFrame, type ChartTable } from "./ChartFrame.tsx";
 import type { SectionProps } from "./CostSection.tsx";
 import { costPoints, type Span, spanOfCrossings } from "./cost-points.ts";
 import { crossingWords } from "./crossing-words.ts";
 import { EvenChart } from "./EvenChart.tsx";
-import { fileName } from "./file-name.ts";
 
 function evenTable(columns: SweepColumns, span: Span, currency: string): ChartTable {
   const sizes = Array.from({ length: span.to - span.from + 1 }, (_, place) => span.from + place);
@@ -57,6 +57,7 @@ export function EvenSection({ plan, run, sweep, columns, narrow, opens, partial 
         file={fileName(plan.kit, "break-even")}
         height={narrow ? 360 : 500}
         table={() => evenTable(columns, span, run.currency)}
+        chosen={String(run.kits)}
       >
         {(width) => (
           <EvenChart

@@ -9,15 +9,17 @@ import {
   SPOT_RING,
   TAKINGS_LINE,
 } from "#src/components/islands/chart-theme.ts";
+import { labelsWithRoom } from "#src/components/islands/charts/label-room.ts";
+import type { ChartScale } from "./chart-scale.ts";
 import type { CostPoint } from "./cost-points.ts";
-import { areaFill, areaPath, type PlacedCrossing } from "./EvenMarks.tsx";
-import { type ChartPlace, gainAreas } from "./even-shapes.ts";
-import { labelsWithRoom } from "./label-room.ts";
+import { GainAreas } from "./EvenAreas.tsx";
+import type { PlacedCrossing } from "./even-places.ts";
+import type { ChartPlace } from "./even-shapes.ts";
 
 interface EvenWindowProps {
   points: readonly CostPoint[];
   crossings: readonly PlacedCrossing[];
-  scale: (place: ChartPlace) => { x: number; y: number };
+  scale: ChartScale;
   plot: PlotArea;
 }
 
@@ -63,7 +65,7 @@ function stepped(points: readonly CostPoint[]): ChartPlace[] {
   });
 }
 
-const path = (places: readonly ChartPlace[], scale: EvenWindowProps["scale"]) =>
+const path = (places: readonly ChartPlace[], scale: ChartScale) =>
   places
     .map(scale)
     .map(({ x, y }, place) => `${place === 0 ? "M" : "L"}${x.toFixed(2)} ${y.toFixed(2)}`)
@@ -109,9 +111,7 @@ export function EvenWindow({ points, crossings, scale, plot }: EvenWindowProps) 
       <text x={frame.x + 12} y={frame.y + 20} {...LINE_NAME} stroke={SHEET} fontWeight={400} fill={INK_2}>
         enlarged
       </text>
-      {gainAreas(part).map((area) => (
-        <path key={area.upper[0]?.kits} d={areaPath(area, within)} fill={areaFill(area)} />
-      ))}
+      <GainAreas points={part} scale={within} />
       <path
         d={path(
           part.map(({ kits, kept }) => ({ kits, money: kept ?? 0 })),

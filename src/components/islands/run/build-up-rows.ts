@@ -1,7 +1,7 @@
+import { roundStep } from "#src/components/islands/charts/round-ticks.ts";
 import type { Figure } from "#src/costing/figure.ts";
 import type { HeadId, RunResult } from "#src/costing/run-result.ts";
 import type { FigureId } from "#src/costing/working-tree.ts";
-import { roundStep } from "./round-ticks.ts";
 
 export type BarKind = "part" | "cost" | "brings" | "left";
 

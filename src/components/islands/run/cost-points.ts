@@ -87,21 +87,42 @@ export function spanOfCrossings(run: number, crossings: readonly number[], end: 
   return { from: Math.max(1, Math.floor((first * 0.35) / 10) * 10), to };
 }
 
+/** The money axis of unit costs, and whether what a kit brings in lies within it. */
+export interface UnitCostRange {
+  low: number;
+  high: number;
+  brings: "drawn" | "above" | "below";
+}
+
+/** The line of what a kit brings in is drawn where the costs still get two fifths of the height. */
+const NEAR = 2.5;
+/** Below the cheapest kit there is room for the name of a ring. */
+const ROOM = 0.16;
+
 /**
- * The money axis of unit costs, as its lowest and highest value. The smallest runs cost many times the usual
- * kit; the axis ends at three times the cost at the run, and the line leaves at the top. It begins a little
- * below the cheapest kit, so that steps of a few cents are to be seen.
+ * The money axis of unit costs. The smallest runs cost many times the usual kit; the axis ends at three times
+ * the cost at the run, and the line leaves at the top. What a kit brings in widens it unless it lies so far off
+ * that the steps would no longer be seen.
  */
 export function unitCostRange(
   points: readonly CostPoint[],
   run: number,
   brings: number | null,
-): { low: number; high: number } {
+): UnitCostRange {
   const known = points.flatMap(({ perKit }) => (perKit === null ? [] : [perKit]));
   const atRun = points.find(({ kits }) => kits === run)?.perKit ?? middle(known);
-  const highest = Math.max(0, ...known);
-  const lowest = Math.min(...known, brings ?? Number.POSITIVE_INFINITY);
-  const high = Math.max(Math.min(highest, atRun * 3), (brings ?? 0) * 1.06, atRun * 1.1);
-  const low = Number.isFinite(lowest) ? Math.max(0, lowest - (high - lowest) * 0.22) : 0;
-  return { low: low < high * 0.2 ? 0 : low, high };
+  const dearest = Math.min(Math.max(0, ...known), atRun * 3);
+  const cheapest = known.length > 0 ? Math.min(...known) : 0;
+  const height = Math.max(dearest - cheapest, atRun * 0.05);
+  const off = brings === null ? "drawn" : placeOf(brings, cheapest, dearest, height * NEAR);
+  const drawn = brings === null || off !== "drawn" ? [] : [brings];
+  const high = Math.max(dearest, ...drawn.map((net) => net + (net - cheapest) * 0.06), atRun * 1.02);
+  const lowest = Math.min(cheapest, ...drawn);
+  const low = Math.max(0, lowest - (high - lowest) * ROOM);
+  return { low: low < high * 0.15 ? 0 : low, high: Math.max(high, 0.01), brings: off };
+}
+
+function placeOf(net: number, cheapest: number, dearest: number, reach: number): UnitCostRange["brings"] {
+  if (net > cheapest + reach) return "above";
+  return net < dearest - reach ? "below" : "drawn";
 }
