@@ -100,7 +100,7 @@ export const shutOutSuppliers = sqliteTable(
   (t) => [primaryKey({ columns: [t.kitId, t.supplierId] })],
 );
 
-/** Reporting units per one foreign unit, by hand, with its day. */
+/** Reporting units per one foreign unit from a day on, by hand or from a file of rates. */
 export const currencyRates = sqliteTable(
   "currency_rates",
   {
@@ -111,5 +111,5 @@ export const currencyRates = sqliteTable(
     setAt: moment("set_at").notNull(),
     version: version(),
   },
-  (t) => [primaryKey({ columns: [t.workshopId, t.currency] }), amountText(t.perForeignUnit)],
+  (t) => [primaryKey({ columns: [t.workshopId, t.currency, t.dated] }), amountText(t.perForeignUnit)],
 );

@@ -20,6 +20,7 @@ const Environment = z
     TINPENNY_SMTP_URL: optional(z.url({ protocol: /^smtps?$/ })),
     TINPENNY_MAIL_FROM: z.string().min(3).default("Tinpenny <tinpenny@localhost>"),
     TINPENNY_LETTERS_PORT: port.default(4325),
+    TINPENNY_RATES_URL: optional(z.url({ protocol: /^https?$/ })),
     TINPENNY_IDENTITY_NAME: optional(z.string().min(1).max(40)),
     TINPENNY_IDENTITY_ISSUER: optional(url),
     TINPENNY_IDENTITY_CLIENT: optional(z.string().min(1)),
@@ -51,6 +52,8 @@ export interface Config {
   smtpUrl: string | null;
   mailFrom: string;
   lettersPort: number;
+  /** Where reference rates can be fetched from; `null`: they come as files or by hand. */
+  ratesUrl: string | null;
   identityProvider: IdentityProviderSettings | null;
 }
 
@@ -88,6 +91,7 @@ export function readConfig(variables: Record<string, string | undefined>): Confi
     smtpUrl: env.TINPENNY_SMTP_URL ?? null,
     mailFrom: env.TINPENNY_MAIL_FROM,
     lettersPort: env.TINPENNY_LETTERS_PORT,
+    ratesUrl: env.TINPENNY_RATES_URL ?? null,
     identityProvider: identityProvider(env),
   };
 }

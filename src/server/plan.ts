@@ -3,7 +3,7 @@ import { groupBy } from "#db/group-by.ts";
 import type { Plan, PlanOffer, PlanPart, PlanSupplier } from "#src/shapes/plan.ts";
 import { revisionLetter } from "#src/shapes/revision-letter.ts";
 import { boardQuotesOf, type QuoteWithBreaks } from "./store/board-quote.ts";
-import { currencyRatesOf } from "./store/currency-rate.ts";
+import { type CurrencyRateRow, currencyRatesOf } from "./store/currency-rate.ts";
 import { editionsOf } from "./store/edition.ts";
 import type { KitRow } from "./store/kit.ts";
 import { type LineQuantityRow, type LineRow, lineQuantitiesOf, linesOf } from "./store/line.ts";
@@ -133,6 +133,19 @@ function planParts(db: Db, workshopId: string, kitId: string, run: RunPlanRow): 
   });
 }
 
+/** The rate of each currency that holds on a day: the newest that is not later. */
+function ratesOn(day: string, rows: readonly CurrencyRateRow[]): Plan["rates"] {
+  const holding = groupBy(
+    rows.filter(({ dated }) => dated <= day),
+    ({ currency }) => currency,
+  );
+  return [...holding.values()].flatMap(([newest]) => {
+    if (newest === undefined) return [];
+    const { currency, perForeignUnit, dated } = newest;
+    return [{ currency, perForeignUnit, dated }];
+  });
+}
+
 function sale(run: RunPlanRow): Plan["sale"] {
   return {
     taxRate: run.taxRate,
@@ -154,11 +167,7 @@ export function planOf(db: Db, workshop: WorkshopRow, kit: KitRow, asOf: string)
     kit: kit.name,
     revision: revisionLetter(kit.revision),
     currency: workshop.currency,
-    rates: currencyRatesOf(db, workshop.id).map(({ currency, perForeignUnit, dated }) => ({
-      currency,
-      perForeignUnit,
-      dated,
-    })),
+    rates: ratesOn(asOf, currencyRatesOf(db, workshop.id)),
     asOf,
     run: { kits: run.kits, sweepTo: run.sweepTo },
     editions: editionsOf(db, kit.id).map(({ id, name, weight, boardsPerKit, price }) => ({

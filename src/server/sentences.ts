@@ -140,6 +140,27 @@ export const SENTENCES = {
     title: "That {provider} account belongs to somebody else here.",
     detail: "Sign in with it to see whose it is.",
   },
+  "rates-file-unreadable": {
+    status: 422,
+    title: "This is no file of reference rates.",
+    detail:
+      "Bring in the XML file of euro reference rates as the European Central Bank publishes it. Nothing was changed.",
+  },
+  "rates-lack-own-currency": {
+    status: 422,
+    title: "The file gives no rate for {currency}, in which the workshop reckons.",
+    detail: "Set the rates by hand. Nothing was changed.",
+  },
+  "rates-not-configured": {
+    status: 409,
+    title: "No address of reference rates is set.",
+    detail: "Bring in the file, or ask whoever runs this installation to set TINPENNY_RATES_URL.",
+  },
+  "rates-unreachable": {
+    status: 502,
+    title: "{host} gave no reference rates.",
+    detail: "Try again later, or bring in the file. Nothing was changed.",
+  },
   "upload-empty": {
     status: 422,
     title: "{name} holds no rows.",

@@ -3,6 +3,7 @@ import { can } from "#src/access.ts";
 import type { Role } from "#src/shapes/limits.ts";
 import { boards } from "./board-changes.ts";
 import { today } from "./clock.ts";
+import { config } from "./config.ts";
 import { type RateView, rates } from "./currency-rate-changes.ts";
 import { kitOffers, type OfferPart } from "./kit-offers.ts";
 import { kitPlan } from "./kit-plan.ts";
@@ -30,6 +31,7 @@ export interface SuppliersPage {
   quoted: string[];
   today: string;
   canChange: boolean;
+  canFetchRates: boolean;
 }
 
 /** All that the page of suppliers shows. */
@@ -43,6 +45,7 @@ export function suppliersPage({ db, workshop, role }: Asking): SuppliersPage {
     quoted: quotedCurrencies(db, workshop.id),
     today: today(),
     canChange: can(role, "change-supply"),
+    canFetchRates: config().ratesUrl !== null,
   };
 }
 

@@ -38,6 +38,23 @@ export type BoardPriceModel = (typeof BOARD_PRICE_MODELS)[number];
 export const BOARD_SHAPES = ["rectangle", "round"] as const;
 export type BoardShape = (typeof BOARD_SHAPES)[number];
 
+/** How the boards of a panel are parted: scored from edge to edge, or routed but for breaking tabs. */
+export const SEPARATIONS = ["v-score", "routed"] as const;
+export type Separation = (typeof SEPARATIONS)[number];
+
+/** Which sides of a board house's largest panel carry a rail. */
+export const RAIL_SIDES = ["none", "long", "short", "all"] as const;
+export type RailSides = (typeof RAIL_SIDES)[number];
+
+/** What a board house's area rate is for. */
+export const AREA_UNITS = ["dm2", "m2"] as const;
+export type AreaUnit = (typeof AREA_UNITS)[number];
+
+/** Millimetres: a panel's side, and the least side of a board on one. Beyond both, a slip of the pen. */
+export const PANEL_SIDE_MOST = 2000;
+export const PANEL_BOARD_LEAST = 1;
+export const BOARDS_PER_PANEL_MOST = 2000;
+
 /** SI units a part's value may have. */
 export const VALUE_UNITS = ["ohm", "F", "H", "Hz", "V", "A", "m"] as const;
 export type ValueUnit = (typeof VALUE_UNITS)[number];
@@ -90,6 +107,8 @@ export const PASSWORD_DIFFERENT_LEAST = 5;
 export const TOKEN_DAYS_MOST = 366;
 export const TOKENS_MOST = 50;
 
+/** A day of reference rates takes 2 kB; a file of many years 10 MB, and only its newest day is read. */
+export const RATES_FILE_BYTES = 1024 * 1024;
 export const UPLOAD_BYTES = 5 * 1024 * 1024;
 /** Pasted cells travel as JSON, which escapes tabs and line ends. */
 export const PASTED_BYTES = 2 * UPLOAD_BYTES;

@@ -46,6 +46,8 @@ const DECISIONS: Record<string, May> = {
   "POST /workshops/[workshop]/access-tokens": "member",
   "DELETE /workshops/[workshop]/access-tokens/[token]": "member",
   "GET /workshops/[workshop]/currency-rates": "see-money",
+  "POST /workshops/[workshop]/currency-rates/fetch": "change-supply",
+  "POST /workshops/[workshop]/currency-rates/file": "change-supply",
   "PUT /workshops/[workshop]/currency-rates/[currency]": "change-supply",
   "DELETE /workshops/[workshop]/currency-rates/[currency]": "change-supply",
   "PATCH /workshops/[workshop]/hour-rate": "change-run",

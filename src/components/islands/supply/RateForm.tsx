@@ -19,6 +19,8 @@ interface RateFormProps {
   /** What the workshop reckons in. */
   reporting: string;
   rate: Partial<RateView> & { currency: string };
+  /** The version of the rate a currency has for a day, if it has one. */
+  versionOf: (currency: string, day: string) => number | null;
   today: string;
   /** The currency is settled: the rate is set anew, or a supplier needs it. */
   fixed: boolean;
@@ -27,14 +29,14 @@ interface RateFormProps {
 }
 
 /** What one unit of a foreign currency is worth, and as of when. */
-export function RateForm({ reporting, rate, today, fixed, onSave, onLeave }: RateFormProps) {
+export function RateForm({ reporting, rate, versionOf, today, fixed, onSave, onLeave }: RateFormProps) {
   const first = { currency: rate.currency, perForeignUnit: rate.perForeignUnit ?? "", dated: today };
-  const save = ({ currency, perForeignUnit, dated }: RateFields, version: number) => {
+  const save = ({ currency, perForeignUnit, dated }: RateFields, settled: number) => {
     // What is no number goes to the server as it is: its sentence is the one that is shown.
     const rate = readNumber(perForeignUnit, null) ?? perForeignUnit;
-    return onSave(currency, { perForeignUnit: rate, dated, version: version || null });
+    return onSave(currency, { perForeignUnit: rate, dated, version: settled || versionOf(currency, dated) });
   };
-  const form = useForm<RateFields>(first, rate.version ?? 0, save);
+  const form = useForm<RateFields>(first, 0, save);
   const { fields, set, words } = form;
   return (
     <form onSubmit={form.submit} noValidate className="flex flex-col gap-5 py-4">

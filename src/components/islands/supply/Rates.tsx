@@ -1,18 +1,14 @@
 import { useState } from "react";
-import { ageText, daysBetween, dayText } from "#src/components/day-text.ts";
 import { CallFailed } from "#src/components/islands/call.ts";
 import { Button } from "#src/components/islands/parts/Button.tsx";
-import { Chip } from "#src/components/islands/parts/Chip.tsx";
-import { QuietButton } from "#src/components/islands/parts/QuietButton.tsx";
 import { Section } from "#src/components/islands/parts/Section.tsx";
-import { type Column, Table } from "#src/components/islands/parts/Table.tsx";
+import { Table } from "#src/components/islands/parts/Table.tsx";
 import { showToast } from "#src/components/islands/parts/toasts.ts";
 import type { RateView } from "#src/server/currency-rate-changes.ts";
 import { RateForm } from "./RateForm.tsx";
+import { RatesSource } from "./RatesSource.tsx";
+import { type RateRow, rateColumns } from "./rate-columns.tsx";
 import { removeRate, setRate } from "./rates-store.ts";
-
-/** A rate older than this is worth a look before money is spent. */
-const OLD_DAYS = 30;
 
 interface RatesProps {
   workshop: string;
@@ -22,34 +18,48 @@ interface RatesProps {
   used: readonly string[];
   today: string;
   canChange: boolean;
+  /** Whether the settings name an address of reference rates. */
+  canFetch: boolean;
 }
 
-type Row = { currency: string; rate: RateView | undefined };
+/** Rows in the order shown: what lacks a rate, then each currency with its newest, and its older ones if unfolded. */
+function rowsOf(rates: readonly RateView[], missing: readonly string[], unfolded: string | null): RateRow[] {
+  const rows: RateRow[] = missing.map((currency) => ({ currency, rate: undefined, earlier: 0 }));
+  for (const rate of rates) {
+    const { currency } = rate;
+    const isNewest = rows.at(-1)?.currency !== currency;
+    const count = rates.filter((one) => one.currency === currency).length;
+    if (isNewest) rows.push({ currency, rate, earlier: count - 1 });
+    else if (unfolded === currency) rows.push({ currency, rate, earlier: null });
+  }
+  return rows;
+}
 
-/** Currency rates by hand: one row for each that is set or needed. */
-export function Rates({ workshop, reporting, rates, used, today, canChange }: RatesProps) {
+/** Currency rates, each from its day on: those that hold, and those that are needed. */
+export function Rates({ workshop, reporting, rates, used, today, canChange, canFetch }: RatesProps) {
   const [open, setOpen] = useState<{ currency: string; fixed: boolean } | null>(null);
+  const [unfolded, setUnfolded] = useState<string | null>(null);
   const missing = used.filter(
     (currency) => currency !== reporting && !rates.some((rate) => rate.currency === currency),
   );
-  const rows: Row[] = [
-    ...missing.map((currency) => ({ currency, rate: undefined })),
-    ...rates.map((rate) => ({ currency: rate.currency, rate })),
-  ];
-  const change = (currency: string) => setOpen({ currency, fixed: true });
+  const rows = rowsOf(rates, missing, unfolded);
+  const newest = (currency: string) => rates.find((rate) => rate.currency === currency);
   return (
     <Section
       title="Currency rates"
-      aside={`what one unit is worth in ${reporting}, written down by hand`}
+      aside={`what one unit is worth in ${reporting}, from a day on`}
       id="rates"
       actions={
         canChange && (
-          <Button
-            size="small"
-            onClick={() => setOpen({ currency: reporting === "USD" ? "EUR" : "USD", fixed: false })}
-          >
-            Add a rate
-          </Button>
+          <>
+            <RatesSource {...{ workshop, canFetch }} />
+            <Button
+              size="small"
+              onClick={() => setOpen({ currency: reporting === "USD" ? "EUR" : "USD", fixed: false })}
+            >
+              Add a rate
+            </Button>
+          </>
         )
       }
     >
@@ -58,7 +68,10 @@ export function Rates({ workshop, reporting, rates, used, today, canChange }: Ra
           key={open.currency + open.fixed}
           {...{ reporting, today }}
           fixed={open.fixed}
-          rate={rates.find(({ currency }) => currency === open.currency) ?? { currency: open.currency }}
+          rate={newest(open.currency) ?? { currency: open.currency }}
+          versionOf={(currency, day) =>
+            rates.find((rate) => rate.currency === currency && rate.dated === day)?.version ?? null
+          }
           onLeave={() => setOpen(null)}
           onSave={async (currency, input) => {
             await setRate(workshop, currency, input);
@@ -72,59 +85,17 @@ export function Rates({ workshop, reporting, rates, used, today, canChange }: Ra
         <Table
           caption="Currency rates"
           rows={rows}
-          keyOf={({ currency }) => currency}
-          columns={columns({ workshop, reporting, today, canChange, change })}
+          keyOf={({ currency, rate }) => `${currency} ${rate?.dated}`}
+          columns={rateColumns({
+            ...{ reporting, today, canChange, unfolded },
+            change: (currency) => setOpen({ currency, fixed: true }),
+            remove: (rate) => void drop(workshop, rate),
+            unfold: (currency) => setUnfolded(unfolded === currency ? null : currency),
+          })}
         />
       )}
     </Section>
   );
-}
-
-interface Doing extends Pick<RatesProps, "workshop" | "reporting" | "today" | "canChange"> {
-  change: (currency: string) => void;
-}
-
-function columns({ workshop, reporting, today, canChange, change }: Doing): Column<Row>[] {
-  const columns: Column<Row>[] = [
-    { key: "currency", head: "Currency", names: true, cell: ({ currency }) => currency },
-    {
-      key: "rate",
-      head: `One is worth, in ${reporting}`,
-      number: true,
-      cell: ({ rate }) => rate?.perForeignUnit ?? "not known",
-    },
-    { key: "dated", head: "As of", wide: true, cell: ({ rate }) => (rate ? dayText(rate.dated) : "") },
-    { key: "age", head: "State", cell: ({ rate }) => <Age rate={rate} today={today} /> },
-  ];
-  if (!canChange) return columns;
-  return [
-    ...columns,
-    {
-      key: "do",
-      head: <span className="heard-only">Change</span>,
-      cell: ({ currency, rate }) => (
-        <span className="flex gap-4">
-          <QuietButton onClick={() => change(currency)} aria-label={`Set the rate of ${currency}`}>
-            {rate ? "Set anew" : "Set it"}
-          </QuietButton>
-          {rate && (
-            <QuietButton
-              onClick={() => void drop(workshop, rate)}
-              aria-label={`Remove the rate of ${currency}`}
-            >
-              Remove
-            </QuietButton>
-          )}
-        </span>
-      ),
-    },
-  ];
-}
-
-function Age({ rate, today }: { rate: RateView | undefined; today: string }) {
-  if (!rate) return <Chip kind="bad">No rate</Chip>;
-  const age = ageText(rate.dated, today);
-  return daysBetween(rate.dated, today) > OLD_DAYS ? <Chip kind="caution">{age}</Chip> : age;
 }
 
 /** Taken back by the toast: a rate is soon written again. */

@@ -24,6 +24,8 @@ export interface SuppliersProps {
   quoted: string[];
   today: string;
   canChange: boolean;
+  /** Whether the settings name an address of reference rates. */
+  canFetchRates: boolean;
   styleNonce: string;
 }
 
@@ -73,7 +75,10 @@ export default function Suppliers(props: SuppliersProps) {
         )}
         <div className={PAIRS}>
           <Pair note={<RateNote />}>
-            <Rates {...{ workshop, reporting, rates, used, today, canChange }} />
+            <Rates
+              {...{ workshop, reporting, rates, used, today, canChange }}
+              canFetch={props.canFetchRates}
+            />
           </Pair>
         </div>
       </div>
@@ -113,8 +118,8 @@ function RateNote() {
   return (
     <MarginNote title="Rates are yours">
       <p>
-        Nothing is fetched. A rate is what you will really pay, with the day you read it, so a figure can be
-        redone later.
+        A rate holds from its day until the next. Reference rates come as the XML file of the European Central
+        Bank; what your bank charges may differ, and a rate you set yourself says so.
       </p>
     </MarginNote>
   );

@@ -1,8 +1,9 @@
 import { FakeIdentityProvider } from "./identity-provider.ts";
+import { FakeReferenceRates } from "./reference-rates.ts";
 
 /**
- * `npx tsx tests/fakes/dev-with-identity.ts`: the development server with the fake identity provider beside
- * it, on the port after that of the letter box.
+ * `npx tsx tests/fakes/dev-with-outsiders.ts`: the development server with the fake identity provider beside
+ * it, on the port after that of the letter box, and with the fake address of reference rates.
  */
 const provider = await new FakeIdentityProvider({
   port: Number(process.env.TINPENNY_LETTERS_PORT ?? 4325) + 1,
@@ -15,6 +16,7 @@ const provider = await new FakeIdentityProvider({
   ],
 }).start();
 
+process.env.TINPENNY_RATES_URL = (await new FakeReferenceRates().start()).address;
 process.env.TINPENNY_IDENTITY_NAME = "Fake provider";
 process.env.TINPENNY_IDENTITY_ISSUER = provider.issuer;
 process.env.TINPENNY_IDENTITY_CLIENT = provider.settings.clientId;
