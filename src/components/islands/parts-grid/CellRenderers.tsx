@@ -24,15 +24,26 @@ export function PlaceCell({ data, context }: CellProps) {
   );
 }
 
-/** A part: what it is called, then the rest more quietly. On a phone below each other. */
-export function PartCell({ data, value, valueFormatted }: CellProps) {
+/** Two lines of a row, the lower smaller; on a phone the cell grows with its words. */
+const STACKED =
+  "flex flex-col py-2 leading-[1.1875rem] whitespace-normal *:last:text-[0.9375rem] max-tablet:py-1.5";
+
+/** Words that go on in a second line where a row has two. */
+export function WordsCell({ valueFormatted, value, context }: CellProps) {
+  const words = valueFormatted ?? value;
+  if (!context.folded) return <span>{words}</span>;
+  return <span className="block py-2 leading-[1.1875rem] whitespace-normal max-tablet:py-1.5">{words}</span>;
+}
+
+/** A part: what it is called, then the rest more quietly; where there is little room below each other. */
+export function PartCell({ data, value, valueFormatted, context }: CellProps) {
   if (data?.kind !== "line") return <span>{valueFormatted}</span>;
   const { name, spec } = data.line.part;
   if (value !== (spec === "" ? name : `${name}, ${spec}`)) return <span>{value}</span>;
   return (
-    <span className="max-tablet:flex max-tablet:flex-col max-tablet:py-1.5 max-tablet:leading-[1.1875rem] max-tablet:whitespace-normal">
+    <span className={context.folded ? STACKED : undefined}>
       <b className="font-semibold">{name}</b>{" "}
-      <span className="text-ink-2 tablet:ml-1.5 max-tablet:text-[0.9375rem]">{spec}</span>
+      <span className={`text-ink-2 ${context.folded ? "" : "ml-1.5"}`}>{spec}</span>
     </span>
   );
 }
@@ -43,22 +54,30 @@ export function BandsCell({ data }: CellProps) {
     <Bands
       colours={data.bands.colours}
       tolerance={data.bands.tolerance}
-      width={64}
+      width={52}
       className="align-middle"
     />
   );
 }
 
 /** Supplier, then the order code more quietly. A pinned offer says so. */
-export function SupplierCell({ data, value }: CellProps) {
-  if (data?.kind === "total") return <span className="block text-right">{value}</span>;
+export function SupplierCell({ data, value, context }: CellProps) {
+  if (data?.kind === "total")
+    return (
+      <span className={`block text-right ${context.folded ? "leading-5 whitespace-normal" : ""}`}>
+        {value}
+      </span>
+    );
   if (data?.kind !== "line" || !data.money) return null;
   const { supplier, orderCode, pinned } = data.money;
   if (supplier === "") return <span className="text-ink-2">{value}</span>;
   return (
-    <span>
-      {supplier} <span className="text-ink-2">{orderCode}</span>
-      {pinned && <span className="text-ink-2">, pinned</span>}
+    <span className={context.folded ? STACKED : undefined}>
+      <span>{supplier}</span>{" "}
+      <span className="text-ink-2">
+        {orderCode}
+        {pinned && ", pinned"}
+      </span>
     </span>
   );
 }

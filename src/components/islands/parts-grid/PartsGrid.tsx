@@ -29,6 +29,7 @@ import type { ColumnKey } from "./cell-text.ts";
 import { columnDefs } from "./column-defs.ts";
 import type { GridContext } from "./grid-context.ts";
 import { focusedPlace, handleKey, type KeyDeeds, rowAt, selectedBlock } from "./grid-keys.ts";
+import { CHECK_BOX, type GridLayout } from "./grid-layout.ts";
 import type { GridRow, LineRow, TotalRow } from "./grid-rows.ts";
 
 const MODULES = [
@@ -52,9 +53,13 @@ const MODULES = [
 /** Up to so many rows stand on the page as a table does; more scroll inside the grid, which draws only those in view. */
 const ROWS_IN_FULL = 60;
 const ROW = 37;
+const ROW_OF_TWO = 54;
 
 /** As every grid, but for the marks between heads: the columns here are many and narrow. */
-const theme = gridTheme.withParams({ headerColumnResizeHandleColor: "transparent" });
+const theme = gridTheme.withParams({
+  headerColumnResizeHandleColor: "transparent",
+  cellHorizontalPadding: 7,
+});
 const phoneTheme = theme.withParams({ cellHorizontalPadding: 6 });
 
 /** Where a block is to be pasted, as the grid is seen. */
@@ -80,7 +85,7 @@ export interface PartsGridProps {
   label: string;
   rows: readonly GridRow[];
   total: TotalRow;
-  columns: readonly ColumnKey[];
+  layout: GridLayout;
   editions: readonly { id: string; name: string }[];
   context: Omit<GridContext, "range">;
   grouped: boolean;
@@ -96,14 +101,15 @@ function inField(target: EventTarget): boolean {
 
 /** The parts list as a grid of cells. It holds nothing itself: what is done goes out, what is shown comes in. */
 export default function PartsGrid(props: PartsGridProps) {
-  const { rows, columns, editions, grouped, phone, deeds, styleNonce } = props;
+  const { rows, layout, editions, grouped, phone, deeds, styleNonce } = props;
+  const { keys: columns, folded } = layout;
   const [range, setRange] = useState<CellRange | null>(null);
   const api = useRef<GridApi<GridRow> | null>(null);
   const context = useRef<GridContext>({ ...props.context, range });
   Object.assign(context.current, props.context, { range });
   const definitions = useMemo(
-    () => columnDefs({ keys: columns, editions, phone, sortable: !grouped }),
-    [columns, editions, phone, grouped],
+    () => columnDefs({ ...layout, editions, phone, sortable: !grouped }),
+    [layout, editions, phone, grouped],
   );
   // biome-ignore lint/correctness/useExhaustiveDependencies: the cells read these through the context.
   useEffect(() => {
@@ -179,6 +185,7 @@ export default function PartsGrid(props: PartsGridProps) {
       className={`[&_.ag-cell-focus:not(.ag-cell-inline-editing)]:[box-shadow:inset_0_0_0_3px_var(--color-petrol)] ${whole ? "" : "h-[max(480px,calc(100vh-250px))]"}`}
     >
       <AgGridReact<GridRow>
+        key={folded ? "folded" : "flat"}
         theme={phone ? phoneTheme : theme}
         modules={MODULES}
         styleNonce={styleNonce}
@@ -194,7 +201,7 @@ export default function PartsGrid(props: PartsGridProps) {
           autoHeaderHeight: true,
         }}
         domLayout={whole ? "autoHeight" : "normal"}
-        rowHeight={ROW}
+        rowHeight={folded && !phone ? ROW_OF_TWO : ROW}
         isFullWidthRow={({ rowNode }) => rowNode.data?.kind === "group"}
         fullWidthCellRenderer={GroupCell}
         rowSelection={
@@ -207,7 +214,7 @@ export default function PartsGrid(props: PartsGridProps) {
               }
             : undefined
         }
-        selectionColumnDef={{ pinned: "left", width: 38, suppressMovable: true }}
+        selectionColumnDef={{ pinned: "left", width: CHECK_BOX, suppressMovable: true }}
         onSelectionChanged={({ api: grid }) => deeds.select(grid.getSelectedRows().map(({ id }) => id))}
         animateRows={false}
         readOnlyEdit

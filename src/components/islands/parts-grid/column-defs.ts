@@ -10,10 +10,12 @@ import {
   PlaceCell,
   StateCell,
   SupplierCell,
+  WordsCell,
 } from "./CellRenderers.tsx";
 import { isInRange } from "./cell-range.ts";
 import { type ColumnKey, cellText, isCellColumn } from "./cell-text.ts";
 import { faultKey, type GridContext } from "./grid-context.ts";
+import type { GridLayout } from "./grid-layout.ts";
 import type { GridRow, LineRow } from "./grid-rows.ts";
 import type { CellColumn, DraftCells } from "./read-cell.ts";
 
@@ -53,30 +55,10 @@ export function columnHead(key: ColumnKey, editions: readonly { id: string; name
   return editions.find(({ id }) => id === key.slice(9))?.name ?? "";
 }
 
-const WIDTHS: Partial<Record<ColumnKey, Partial<Def>>> = {
-  place: { width: 52 },
-  designators: { width: 104 },
-  part: { flex: 1, minWidth: 160 },
-  bands: { width: 88 },
-  package: { width: 120 },
-  drawer: { width: 70 },
-  supplier: { width: 162 },
-  buy: { width: 64 },
-  each: { width: 72 },
-  perKit: { width: 74 },
-  state: { width: 116 },
-  mark: { width: 110 },
-  class: { width: 150 },
-  note: { width: 180 },
-  partNumber: { width: 170 },
-  stock: { width: 100 },
-};
-
-/** With one edition there is room for what the other editions' columns would take. */
-const ROOMY: Partial<Record<ColumnKey, Partial<Def>>> = { package: { width: 150 }, supplier: { width: 200 } };
-
 const RENDERERS: Partial<Record<ColumnKey, Def["cellRenderer"]>> = {
   place: PlaceCell,
+  designators: WordsCell,
+  package: WordsCell,
   part: PartCell,
   bands: BandsCell,
   supplier: SupplierCell,
@@ -190,34 +172,40 @@ function boughtOf(row: GridRow | undefined): number {
 
 /** On a phone: who it is, how many, what, and what it costs; a line is opened to be edited. */
 const PHONE_WIDTHS: Partial<Record<ColumnKey, Partial<Def>>> = {
-  designators: { width: 90, wrapText: true },
+  designators: { width: 88, wrapText: true },
   part: { flex: 1, minWidth: 96, autoHeight: true },
   bands: { width: 64 },
-  perKit: { width: 66 },
+  perKit: { width: 64 },
   state: { width: 110 },
 };
 
-export interface ColumnsWanted {
-  keys: readonly ColumnKey[];
+export interface ColumnsWanted extends GridLayout {
   editions: readonly { id: string; name: string }[];
   phone: boolean;
   sortable: boolean;
 }
 
+function sizeOf(key: ColumnKey, phone: boolean, { width, folded }: GridLayout): Partial<Def> {
+  if (phone) return PHONE_WIDTHS[key] ?? { width: 42 };
+  const autoHeight = folded && (key === "part" || key === "supplier");
+  return key === "part" ? { flex: 1, minWidth: width(key), autoHeight } : { width: width(key), autoHeight };
+}
+
 /** The grid's columns. */
-export function columnDefs({ keys, editions, phone, sortable }: ColumnsWanted): Def[] {
+export function columnDefs({ keys, width, folded, editions, phone, sortable }: ColumnsWanted): Def[] {
   const at = new Map<string, number>(keys.map((key, place) => [key, place]));
   return keys.map((key): Def => {
     const head = columnHead(key, phone ? [] : editions);
-    const width = phone
-      ? (PHONE_WIDTHS[key] ?? { width: 52 })
-      : ((editions.length === 1 ? ROOMY[key] : undefined) ?? WIDTHS[key] ?? {});
-    const quantity = phone ? 42 : editions.length > 1 ? 74 : 56;
+    const ofEdition = key.startsWith("quantity:");
     return {
       colId: key,
       headerName: head,
-      headerTooltip: key.startsWith("quantity:") && editions.length > 1 ? `Pieces in one ${head}` : undefined,
-      ...(key.startsWith("quantity:") ? { width: quantity } : width),
+      headerTooltip: ofEdition && editions.length > 1 ? `Pieces in one ${head}` : undefined,
+      ...sizeOf(key, phone, { keys, width, folded }),
+      ...(ofEdition && {
+        cellClass: "ag-right-aligned-cell px-1!",
+        headerClass: "ag-right-aligned-header px-1!",
+      }),
       sortable: sortable && !phone,
       ...comparatorOf(key),
       pinned: !phone && (key === "place" || key === "designators") ? "left" : undefined,
@@ -238,5 +226,6 @@ export function columnDefs({ keys, editions, phone, sortable }: ColumnsWanted): 
 
 /** In the total row the words for the whole run take the room of the columns before "Per kit". */
 function spanOf(key: ColumnKey, total: boolean, keys: readonly ColumnKey[]): number {
-  return total && key === "supplier" && keys.includes("perKit") ? 3 : 1;
+  const perKit = keys.indexOf("perKit");
+  return total && key === "supplier" && perKit >= 0 ? perKit - keys.indexOf("supplier") : 1;
 }

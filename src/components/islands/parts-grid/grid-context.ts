@@ -25,6 +25,8 @@ export interface GridContext {
   faults: ReadonlyMap<string, CellFault>;
   range: CellRange | null;
   draft: DraftCells;
+  /** Whether part and offer stand on two lines. */
+  folded: boolean;
   canEdit: boolean;
   /** Whether a line's form can be opened: it shows how its part is bought. */
   canOpen: boolean;

@@ -2,6 +2,7 @@ import { describe, expect, it } from "vitest";
 import { grownRange, isInRange, rectangleOf } from "#src/components/islands/parts-grid/cell-range.ts";
 import { cellText, columnKeys } from "#src/components/islands/parts-grid/cell-text.ts";
 import { columnDefs } from "#src/components/islands/parts-grid/column-defs.ts";
+import { gridLayout } from "#src/components/islands/parts-grid/grid-layout.ts";
 import {
   filteredRows,
   groupedRows,
@@ -39,9 +40,12 @@ describe("columns", () => {
 
   it("are named by their edition where there are several", () => {
     const heads = (editions: { id: string; name: string }[]) =>
-      columnDefs({ keys: columnKeys(editions, false, []), editions, phone: false, sortable: true }).map(
-        ({ headerName }) => headerName,
-      );
+      columnDefs({
+        ...gridLayout(columnKeys(editions, false, []), 1344),
+        editions,
+        phone: false,
+        sortable: true,
+      }).map(({ headerName }) => headerName);
     expect(heads([{ id: "a", name: "Full kit" }])).toContain("Qty");
     expect(heads(listOf().editions)).toEqual(expect.arrayContaining(["Full kit", "Bare board"]));
   });
