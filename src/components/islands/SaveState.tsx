@@ -1,5 +1,5 @@
+import { clockTime } from "#src/components/clock-time.ts";
 import { useStore } from "./plan/module-store.ts";
-import { clockTime } from "./plan/SavingNotes.tsx";
 import { NOTHING_SAVED, saving } from "./plan/saving.ts";
 
 /** How saving stands, for the header of a kit's pages: "Saving", "Saved 14:32", or nothing yet. */

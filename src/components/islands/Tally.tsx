@@ -13,7 +13,7 @@ import { useStore } from "./plan/module-store.ts";
 import { useOpens } from "./plan/open-working.ts";
 import { tallyAt } from "./plan/run-of.ts";
 import { Clashes, LostConnection } from "./plan/SavingNotes.tsx";
-import { watchPage } from "./plan/save-edits.ts";
+import { takeUpEdits, watchPage } from "./plan/save-edits.ts";
 import { spokenChange, tallyCells } from "./plan/tally-cells.ts";
 import { usePlan } from "./plan/use-plan.ts";
 import { useQuiet } from "./plan/use-quiet.ts";
@@ -63,7 +63,11 @@ export function Tally({ workshop, kit, first, may, singleKeys = true }: TallyPro
   const address = { workshop, kit };
   const { held } = usePlan(address);
   const { sweep } = useSweep(held?.plan);
-  useEffect(() => watchPage(window), []);
+  const isThere = held !== undefined;
+  useEffect(() => watchPage({ workshop, kit }), [workshop, kit]);
+  useEffect(() => {
+    if (isThere) takeUpEdits({ workshop, kit });
+  }, [isThere, workshop, kit]);
   return (
     <>
       <LostConnection />

@@ -31,8 +31,31 @@ async function send(method: string, path: string, init: RequestInit): Promise<un
   return reply;
 }
 
-/** A change this small still arrives when the page is left at once; browsers keep 64 KiB in all. */
-const KEPT_ALIVE_CHARACTERS = 16_000;
+/**
+ * A request that is kept alive still arrives when the page is left at once. Browsers keep 64 KiB of bodies in all
+ * and refuse what is more (Fetch standard, HTTP-network-or-cache fetch, in-flight keepalive bytes).
+ */
+const KEPT_ALIVE_BYTES = 60_000;
+let keptAlive = 0;
+let atRisk = 0;
+
+/** Whether a change is under way that is lost if the page is left now. */
+export function callsAtRisk(): boolean {
+  return atRisk > 0;
+}
+
+/** Sends a change so that it outlives the page, as long as there is room for it. */
+async function sendChange(method: string, path: string, init: RequestInit, bytes: number): Promise<unknown> {
+  const keepalive = keptAlive + bytes <= KEPT_ALIVE_BYTES;
+  if (keepalive) keptAlive += bytes;
+  else atRisk += 1;
+  try {
+    return await send(method, path, { ...init, keepalive });
+  } finally {
+    if (keepalive) keptAlive -= bytes;
+    else atRisk -= 1;
+  }
+}
 
 type Method = "GET" | "POST" | "PATCH" | "PUT" | "DELETE";
 
@@ -47,14 +70,11 @@ export async function call<Route>(
   path: string,
   input?: InputOf<Route>,
 ): Promise<ReplyOf<Route>> {
-  if (input === undefined) return (await send(method, path, {})) as ReplyOf<Route>;
+  if (method === "GET") return (await send(method, path, {})) as ReplyOf<Route>;
+  if (input === undefined) return (await sendChange(method, path, {}, 0)) as ReplyOf<Route>;
   const body = JSON.stringify(input);
-  const init = {
-    body,
-    headers: { "content-type": "application/json" },
-    keepalive: body.length < KEPT_ALIVE_CHARACTERS,
-  };
-  return (await send(method, path, init)) as ReplyOf<Route>;
+  const init = { body, headers: { "content-type": "application/json" } };
+  return (await sendChange(method, path, init, new Blob([body]).size)) as ReplyOf<Route>;
 }
 
 /** Sends a file's bytes to a route that takes bytes; its name travels in a header. */

@@ -4,6 +4,7 @@ import { describe, expect, it } from "vitest";
 import { CallFailed } from "#src/components/islands/call.ts";
 import type { CellColumn, RowChange } from "#src/components/islands/cells/cell-column.ts";
 import { type SheetStore, useSheet } from "#src/components/islands/cells/use-sheet.ts";
+import { saving } from "#src/components/islands/plan/saving.ts";
 
 interface Row {
   id: string;
@@ -157,5 +158,18 @@ describe("edits of a sheet", () => {
     const [clash] = sheet.current.clashes;
     if (clash) await act(async () => sheet.current.takeTheirs(clash));
     expect(rows()[0]).toMatchObject({ price: "15", version: 2 });
+  });
+
+  it("that meet no connection stay as they are shown, and are sent when there is one", async () => {
+    const lost = failure({ code: "no-connection", status: 0 });
+    const { sheet, sent, rows } = sheetWith(lost);
+    await act(async () => sheet.current.take([{ row: "a", column: "price", entry: "11" }]));
+    expect(rows()[0]).toMatchObject({ price: "11", version: 1 });
+    expect(saving.now()).toMatchObject({ waiting: 1 });
+    expect(saving.now().lostAt).not.toBeNull();
+    await act(async () => window.dispatchEvent(new Event("online")));
+    expect(sent).toHaveLength(2);
+    expect(rows()[0]).toMatchObject({ price: "11", version: 2 });
+    expect(saving.now()).toMatchObject({ waiting: 0, lostAt: null });
   });
 });

@@ -1,6 +1,9 @@
-import { useRef, useState } from "react";
+import { useEffect, useRef, useState } from "react";
 import { CallFailed } from "#src/components/islands/call.ts";
 import { showToast } from "#src/components/islands/parts/toasts.ts";
+import { connected, connectionTried, lostConnection } from "#src/components/islands/plan/connection.ts";
+import { watchLeaving } from "#src/components/islands/plan/leaving.ts";
+import { countUnsaved } from "#src/components/islands/plan/saving.ts";
 import {
   type CellColumn,
   type CellEdit,
@@ -42,12 +45,34 @@ interface SheetOf<Row extends CellRow, Fields> {
 type Settled<Row, Fields> = Pick<SheetClash<Row, Fields>, "change" | "current">;
 type Undoing<Fields> = Omit<RowChange<Fields>, "version">[];
 
+/** Counts a sheet's edits that have not been answered, and has the browser ask before those that wait are left. */
+function useUnsavedCount(asks: boolean): { add: (edits: 1 | -1) => void } {
+  const count = useRef({ held: 0, asks });
+  count.current.asks = asks;
+  useEffect(
+    () =>
+      watchLeaving({
+        flush() {},
+        holds: () => count.current.held > 0,
+        atRisk: () => count.current.held > 1 || count.current.asks,
+      }),
+    [],
+  );
+  return {
+    add(edits) {
+      count.current.held += edits;
+      countUnsaved("sheet", count.current.held);
+    },
+  };
+}
+
 /** Edits of a sheet: shown at once, saved one action after the other, taken back where the server refuses. */
 export function useSheet<Row extends CellRow, Fields>({ columns, store }: SheetOf<Row, Fields>) {
   const [faults, setFaults] = useState<ReadonlyMap<string, CellFault>>(new Map());
   const [clashes, setClashes] = useState<SheetClash<Row, Fields>[]>([]);
   const history = useRef({ undo: [] as Undoing<Fields>[], redo: [] as Undoing<Fields>[] });
   const queue = useRef<Promise<void>>(Promise.resolve());
+  const unsaved = useUnsavedCount(clashes.length > 0);
 
   function mark(edits: readonly CellEdit[], found: readonly CellFault[]): void {
     setFaults((before) => {
@@ -69,10 +94,25 @@ export function useSheet<Row extends CellRow, Fields>({ columns, store }: SheetO
       return true;
     } catch (error) {
       if (!(error instanceof CallFailed)) throw error;
+      if (error.problem.code === "no-connection") return sendLater(changes, before, error);
       store.put(before);
       failed(current, error);
       return false;
     }
+  }
+
+  /** What met no connection stays on the screen and is sent when there is one. */
+  async function sendLater(
+    changes: RowChange<Fields>[],
+    before: readonly Row[],
+    { problem }: CallFailed,
+  ): Promise<boolean> {
+    if (lostConnection())
+      showToast({ kind: "caution", text: `${problem.title} Your changes are kept here.` });
+    await connectionTried();
+    const isSaved = await send(changes, before);
+    if (isSaved) connected();
+    return isSaved;
   }
 
   function failed(changes: RowChange<Fields>[], { problem }: CallFailed): void {
@@ -109,8 +149,10 @@ export function useSheet<Row extends CellRow, Fields>({ columns, store }: SheetO
     const before = store.now().filter(({ id }) => changes.some((change) => change.id === id));
     const back = changes.map((change) => takenBack(change, before));
     store.put(before.map((row) => ({ ...row, ...changes.find(({ id }) => id === row.id)?.change })));
+    unsaved.add(1);
     queue.current = queue.current.then(async () => {
       if (await send(changes, before)) history.current[inverse].push(back);
+      unsaved.add(-1);
     });
   }
 

@@ -1,10 +1,12 @@
 import { useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
+import { useEffect } from "react";
 import type { PATCH as PATCH_PARTS } from "#src/pages/api/workshops/[workshop]/kits/[kit]/imports/[import].ts";
 import type { PartsImportView } from "#src/server/parts-import.ts";
 import type { PriceImportView } from "#src/server/price-import.ts";
 import type { DraftEdit } from "#src/shapes/import.ts";
 import { CallFailed, call } from "../call.ts";
 import { showToast } from "../parts/toasts.ts";
+import { watchLeaving } from "../plan/leaving.ts";
 import { answeredAtOnce } from "./answered-at-once.ts";
 import { type ImportPlace, importKeys, importsApi } from "./import-place.ts";
 
@@ -37,6 +39,7 @@ export function useDraft(place: ImportPlace, initial: ImportView): DraftHandle {
   });
 
   const mutation = useMutation({
+    mutationKey: key,
     scope: { id: path },
     mutationFn: (edit: Edit) => {
       const { version } = (queryClient.getQueryData<ImportView>(key) ?? view).file;
@@ -56,6 +59,11 @@ export function useDraft(place: ImportPlace, initial: ImportView): DraftHandle {
         showToast({ kind: "fault", text: `${error.problem.title} ${error.problem.detail}` });
     },
   });
+
+  useEffect(() => {
+    const edits = () => queryClient.isMutating({ mutationKey: importKeys.one(initial.file.id) });
+    return watchLeaving({ flush() {}, holds: () => edits() > 0, atRisk: () => edits() > 1 });
+  }, [queryClient, initial.file.id]);
 
   const { error } = mutation;
   return {

@@ -16,7 +16,7 @@ import type { PartsList } from "#src/server/present.ts";
 import type { Plan } from "#src/shapes/plan.ts";
 import { EmptyParts } from "./EmptyParts.tsx";
 import { fullestEdition, type LineRow, lineRows, partsTotal } from "./grid-rows.ts";
-import { watchLeaving } from "./list-editor.ts";
+import { takeUpList, watchList } from "./list-editor.ts";
 import { PartsWorkbench } from "./PartsWorkbench.tsx";
 import { useLastRevision, usePartsList } from "./use-parts-list.ts";
 
@@ -65,7 +65,11 @@ function Parts(props: PartsProps & { bought: Bought | null }) {
     );
     return new Set([...change.added.map(({ id }) => id), ...change.changed.map(({ after }) => after.id)]);
   }, [list, last]);
-  useEffect(() => watchLeaving(window, address), [address]);
+  const isThere = list !== undefined;
+  useEffect(() => watchList(address), [address]);
+  useEffect(() => {
+    if (isThere) takeUpList(address);
+  }, [isThere, address]);
 
   const lines = list?.lines.length ?? first.lines;
   const rows = useRows(list, bought);

@@ -1,9 +1,12 @@
 import { CallFailed, call } from "#src/components/islands/call.ts";
 import { type KitAddress, kitApi, kitKeys } from "#src/components/islands/kit-address.ts";
 import { showToast } from "#src/components/islands/parts/toasts.ts";
+import { lostConnection, RETRY_MS } from "#src/components/islands/plan/connection.ts";
 import { keepEdit } from "#src/components/islands/plan/edit-log.ts";
+import { keepEdits, keptEdits } from "#src/components/islands/plan/kept-edits.ts";
+import { watchLeaving } from "#src/components/islands/plan/leaving.ts";
 import { moduleStore } from "#src/components/islands/plan/module-store.ts";
-import { saving } from "#src/components/islands/plan/saving.ts";
+import { countUnsaved, saving } from "#src/components/islands/plan/saving.ts";
 import { queryClient } from "#src/components/islands/query-client.ts";
 import type { PATCH as CHOOSE } from "#src/pages/api/workshops/[workshop]/kits/[kit]/choices/[part].ts";
 import type { GET, PATCH } from "#src/pages/api/workshops/[workshop]/kits/[kit]/lines/index.ts";
@@ -41,7 +44,6 @@ export const NOTHING_EDITED: EditorState = { undo: [], redo: [], clash: null };
 /** The stacks of undo and redo, and what two people changed at once: for the buttons and boxes of the page. */
 export const editorState = moduleStore<EditorState>(NOTHING_EDITED);
 
-const RETRY_MS = 10_000;
 const STACK_MOST = 200;
 
 let confirmed: PricedPartsList | null = null;
@@ -87,6 +89,7 @@ export function editList(address: KitAddress, name: string, steps: readonly Step
 function enqueue(address: KitAddress, edit: Edit): void {
   void queryClient.cancelQueries({ queryKey: kitKeys.lines(address.kit) });
   waiting.push(edit);
+  countUnsaved("lines", waiting.length);
   if (!edit.travels) editorState.change((now) => ({ ...now, undo: push(now.undo, edit), redo: [] }));
   show(address);
   void sendNext(address);
@@ -121,11 +124,11 @@ async function sendNext(address: KitAddress): Promise<void> {
   const edit = waiting[0];
   if (sending || !edit || !confirmed) return;
   sending = true;
-  saving.change((now) => ({ ...now, waiting: Math.max(now.waiting, waiting.length) }));
   try {
     confirmed = await saved(address, confirmed, edit.steps);
     waiting = waiting.slice(1);
-    saving.change((now) => ({ ...now, waiting: waiting.length, savedAt: Date.now(), lostAt: null }));
+    countUnsaved("lines", waiting.length);
+    saving.change((now) => ({ ...now, savedAt: Date.now(), lostAt: null }));
     show(address);
     void queryClient.invalidateQueries({ queryKey: kitKeys.plan(address.kit) });
   } catch (error) {
@@ -176,14 +179,14 @@ function merged(list: PricedPartsList, reply: PartsChanged): PricedPartsList {
 function drop(edit: Edit): void {
   keepEdit();
   waiting = waiting.filter((one) => one !== edit);
-  saving.change((now) => ({ ...now, waiting: waiting.length }));
+  countUnsaved("lines", waiting.length);
   const without = (stack: readonly Edit[]) => stack.filter((one) => one !== edit);
   editorState.change((now) => ({ ...now, undo: without(now.undo), redo: without(now.redo) }));
 }
 
 async function failed(address: KitAddress, edit: Edit, { problem }: CallFailed): Promise<void> {
   if (problem.code === "no-connection") {
-    saving.change((now) => ({ ...now, lostAt: now.lostAt ?? Date.now() }));
+    lostConnection();
     setTimeout(() => resume(address), RETRY_MS);
     return;
   }
@@ -233,16 +236,31 @@ export function resume(address: KitAddress): void {
   void sendNext(address);
 }
 
-/** Asks before a page is left that holds edits the server has not. Called once by the island that edits. */
-export function watchLeaving(page: Window, address: KitAddress): () => void {
-  const leave = (event: BeforeUnloadEvent) => waiting.length > 0 && event.preventDefault();
+/** Takes up what the page before had not heard of when it was left, once the list is there. */
+export function takeUpList(address: KitAddress): void {
+  const kept = keptEdits<Edit>("lines", address.kit);
+  const steps = joinSteps(kept.flatMap((edit) => edit.steps));
+  const [first] = kept;
+  if (!first || !confirmed || stillOurs(confirmed, steps)) return;
+  meetOther(address, { ...first, steps, travels: false }, undefined);
+}
+
+/** Sees to edits the server has not when the page is left. Called once by the island that edits. */
+export function watchList(address: KitAddress): () => void {
   const online = () => resume(address);
-  page.addEventListener("beforeunload", leave);
-  page.addEventListener("online", online);
-  const stop = saving.watch(() => saving.now().lostAt === null && void sendNext(address));
+  const stops = [
+    watchLeaving({
+      flush: () => void sendNext(address),
+      holds: () => waiting.length > 0,
+      atRisk: () =>
+        waiting.length > 1 || (waiting.length > 0 && !sending) || editorState.now().clash !== null,
+      keep: () => keepEdits("lines", address.kit, waiting),
+    }),
+    saving.watch(() => saving.now().lostAt === null && void sendNext(address)),
+  ];
+  addEventListener("online", online);
   return () => {
-    page.removeEventListener("beforeunload", leave);
-    page.removeEventListener("online", online);
-    stop();
+    for (const stop of stops) stop();
+    removeEventListener("online", online);
   };
 }

@@ -1,3 +1,4 @@
+import { clockTime } from "#src/components/clock-time.ts";
 import type { KitAddress } from "#src/components/islands/kit-address.ts";
 import { Banner } from "#src/components/islands/parts/Banner.tsx";
 import { Button } from "#src/components/islands/parts/Button.tsx";
@@ -8,11 +9,6 @@ import { useStore } from "./module-store.ts";
 import type { PlanRow } from "./plan-rows.ts";
 import { sendAll, settleClash } from "./save-edits.ts";
 import { type Clash, NOTHING_SAVED, saving } from "./saving.ts";
-
-/** Hours and minutes of a moment: "14:41". */
-export function clockTime(at: number): string {
-  return new Date(at).toLocaleTimeString("en-GB", { hour: "2-digit", minute: "2-digit" });
-}
 
 /** The lost connection, while it is lost. */
 export function LostConnection() {

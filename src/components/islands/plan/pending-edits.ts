@@ -1,11 +1,13 @@
 import type { KitPlan } from "#src/server/kit-plan.ts";
-import { type Fields, type PlanRow, withFields } from "./plan-rows.ts";
+import { type Fields, fieldsNow, type PlanRow, withFields } from "./plan-rows.ts";
 
 /** An edit that has not reached the server; `base` is what stood there when the person began. */
 export interface PendingEdit {
   row: PlanRow;
   fields: Fields;
   base: Fields;
+  /** The version it was sent with by a page that is gone; else it names the one that is held. */
+  seen?: number;
 }
 
 function sameRow(one: PlanRow, other: PlanRow): boolean {
@@ -20,6 +22,7 @@ export function withEdit(waiting: readonly PendingEdit[], edit: PendingEdit): Pe
     row: edit.row,
     fields: { ...before.fields, ...edit.fields },
     base: { ...edit.base, ...before.base },
+    ...(before.seen !== undefined && { seen: before.seen }),
   };
   return waiting.map((one) => (one === before ? joined : one));
 }
@@ -49,4 +52,9 @@ export function merged(edit: PendingEdit, current: Fields): Merged {
     else result.both.push({ field, yours, theirs });
   }
   return result;
+}
+
+/** Whether a plan has everything an edit set. */
+export function arrived(held: KitPlan, { row, fields }: PendingEdit): boolean {
+  return same(fieldsNow(held, row, Object.keys(fields)), fields);
 }

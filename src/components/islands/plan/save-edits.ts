@@ -3,7 +3,10 @@ import { type KitAddress, kitApi, kitKeys } from "#src/components/islands/kit-ad
 import { showToast } from "#src/components/islands/parts/toasts.ts";
 import { queryClient } from "#src/components/islands/query-client.ts";
 import type { KitPlan } from "#src/server/kit-plan.ts";
-import { merged, type PendingEdit, withEdit, withPending } from "./pending-edits.ts";
+import { lostConnection, RETRY_MS } from "./connection.ts";
+import { keepEdits, keptEdits } from "./kept-edits.ts";
+import { watchLeaving } from "./leaving.ts";
+import { arrived, merged, type PendingEdit, withEdit, withPending } from "./pending-edits.ts";
 import {
   addressOf,
   type Fields,
@@ -14,11 +17,10 @@ import {
   withFields,
   withVersion,
 } from "./plan-rows.ts";
-import { type Clash, saving } from "./saving.ts";
+import { type Clash, countUnsaved, saving } from "./saving.ts";
 
 /** An edit is sent when nothing was typed for so long; holding a key makes one request, not twenty. */
 const QUIET_MS = 400;
-const RETRY_MS = 10_000;
 
 /** Edits of one version holder, sent one after the other. */
 interface Line {
@@ -58,21 +60,19 @@ export function holdPlan({ kit }: KitAddress, how: (held: KitPlan) => KitPlan): 
   queryClient.setQueryData<KitPlan>(kitKeys.plan(kit), (held) => held && how(held));
 }
 
+/** Edits that are not known to have arrived, of one line or of all, in the order they were made. */
+function unsaved(own: Iterable<Line> = lines.values()): PendingEdit[] {
+  return [...own].flatMap(({ sent, waiting }) => (sent ? [sent, ...waiting] : waiting));
+}
+
 /** A plan from the server with this page's unsaved edits on top. */
 export function overlaid({ kit }: KitAddress, fresh: KitPlan): KitPlan {
   const own = [...lines.values()].filter((line) => line.address.kit === kit);
-  return withPending(
-    fresh,
-    own.flatMap(({ sent, waiting }) => (sent ? [sent, ...waiting] : waiting)),
-  );
+  return withPending(fresh, unsaved(own));
 }
 
 function countWaiting(): void {
-  const waiting = [...lines.values()].reduce(
-    (sum, line) => sum + line.waiting.length + (line.sent ? 1 : 0),
-    0,
-  );
-  saving.change((now) => ({ ...now, waiting }));
+  countUnsaved("plan", unsaved().length);
 }
 
 /** Changes fields of a row on this screen at once, and on the server soon. */
@@ -102,7 +102,7 @@ function sendNext(line: Line): void {
 async function send(line: Line, next: PendingEdit, held: KitPlan): Promise<void> {
   const { of, path } = addressOf(next.row);
   const base = of === "kit" ? kitApi(line.address) : `/api/workshops/${line.address.workshop}`;
-  const body = { ...next.fields, version: versionOf(held.versions, line.holder) };
+  const body = { ...next.fields, version: next.seen ?? versionOf(held.versions, line.holder) };
   try {
     const reply = (await call<never>("PATCH", base + path, body as never)) as { version: number };
     holdPlan(line.address, (now) => ({
@@ -132,7 +132,7 @@ export async function settledRow(address: KitAddress, row: PlanRow): Promise<voi
 function failed(line: Line, edit: PendingEdit, { problem }: CallFailed): void {
   if (problem.code === "no-connection") {
     line.waiting = line.waiting.reduce(withEdit, [edit]);
-    saving.change((now) => ({ ...now, lostAt: now.lostAt ?? Date.now() }));
+    lostConnection();
     line.timer = setTimeout(sendAll, RETRY_MS);
   } else if (problem.code === "changed-meanwhile") meetOther(line, edit, problem.current as Fields);
   else {
@@ -149,7 +149,9 @@ function meetOther(line: Line, edit: PendingEdit, current: Fields): void {
     ...now,
     versions: withVersion(now.versions, line.holder, current.version as number),
   }));
-  if (Object.keys(ours).length > 0) line.waiting = line.waiting.reduce(withEdit, [{ ...edit, fields: ours }]);
+  const { row, base } = edit;
+  if (Object.keys(ours).length > 0)
+    line.waiting = line.waiting.reduce(withEdit, [{ row, base, fields: ours }]);
   const from = { by: current.changedBy as string | null, at: current.changedAt as number | null };
   const clashes = both.map((field): Clash => ({ row: edit.row, ...field, ...from }));
   saving.change((now) => ({ ...now, clashes: [...now.clashes, ...clashes] }));
@@ -173,20 +175,46 @@ export function sendAll(): void {
   }
 }
 
+/** Sends without delay; what is known to be without connection is left for the next try. */
+function flush(): void {
+  if (saving.now().lostAt === null) sendAll();
+}
+
+/** Puts by the edits of a kit, each with the version its request named or would name. */
+function keep(address: KitAddress): void {
+  const versions = heldPlan(address)?.versions;
+  if (!versions) return;
+  const kept = unsaved().map((edit) => ({ seen: versionOf(versions, holderOf(edit.row)), ...edit }));
+  keepEdits("plan", address.kit, kept);
+}
+
+/** Takes up what the page before had not heard of when it was left, once the plan is there. */
+export function takeUpEdits(address: KitAddress): void {
+  const fresh = heldPlan(address);
+  if (!fresh) return;
+  for (const edit of keptEdits<PendingEdit>("plan", address.kit)) {
+    if (arrived(fresh, edit)) continue;
+    holdPlan(address, (held) => withFields(held, edit.row, edit.fields));
+    const line = lineOf(address, holderOf(edit.row));
+    // Not joined: each meets the answer to the one before it.
+    line.waiting = [...line.waiting, edit];
+  }
+  countWaiting();
+  sendAll();
+}
+
 /** Sends what waits when the page is left or the connection comes back. Called once by the island that edits. */
-export function watchPage(page: Window): () => void {
-  const hide = () => page.document.visibilityState === "hidden" && sendAll();
-  const leave = (event: BeforeUnloadEvent) => {
-    if (saving.now().lostAt !== null && saving.now().waiting > 0) event.preventDefault();
-  };
-  page.addEventListener("online", sendAll);
-  page.addEventListener("pagehide", sendAll);
-  page.addEventListener("beforeunload", leave);
-  page.document.addEventListener("visibilitychange", hide);
+export function watchPage(address: KitAddress): () => void {
+  const stop = watchLeaving({
+    flush,
+    holds: () => unsaved().length > 0,
+    atRisk: () =>
+      saving.now().clashes.length > 0 || [...lines.values()].some(({ waiting }) => waiting.length > 0),
+    keep: () => keep(address),
+  });
+  addEventListener("online", sendAll);
   return () => {
-    page.removeEventListener("online", sendAll);
-    page.removeEventListener("pagehide", sendAll);
-    page.removeEventListener("beforeunload", leave);
-    page.document.removeEventListener("visibilitychange", hide);
+    stop();
+    removeEventListener("online", sendAll);
   };
 }

@@ -26,3 +26,12 @@ export const NOTHING_SAVED: Saving = { waiting: 0, savedAt: null, lostAt: null, 
 
 /** How saving stands, for the header, the banner and the boxes that show a clash. */
 export const saving = moduleStore<Saving>(NOTHING_SAVED);
+
+const counts = new Map<string, number>();
+
+/** Says how many edits one saver holds that have not reached the server; `waiting` is the sum over all savers. */
+export function countUnsaved(saver: string, held: number): void {
+  counts.set(saver, held);
+  const waiting = [...counts.values()].reduce((sum, one) => sum + one, 0);
+  saving.change((now) => (now.waiting === waiting ? now : { ...now, waiting }));
+}
