@@ -1,6 +1,8 @@
 import { CallFailed, call } from "#src/components/islands/call.ts";
 import type { Route } from "#src/server/route.ts";
+import { meetOther } from "./meet-other.ts";
 import { readForm } from "./read-form.ts";
+import { type CurrentRow, showClash } from "./show-clash.ts";
 import { clearFaults, type Faults, showFaults } from "./show-faults.ts";
 
 type AnyRoute = Route<unknown, unknown>;
@@ -50,6 +52,14 @@ function sayDone(form: HTMLFormElement): void {
   showBusy(form, false);
 }
 
+/** Somebody was quicker. What only one of us changed is settled; what both changed is for the person to choose. */
+function meet(form: HTMLFormElement, current: CurrentRow): void {
+  const differences = meetOther(form, current);
+  const again = () => void send(form);
+  if (differences.length > 0) showClash(form, current, differences, again);
+  else again();
+}
+
 async function send(form: HTMLFormElement): Promise<void> {
   clearFaults(form);
   form.querySelector("[data-done]")?.setAttribute("hidden", "");
@@ -68,7 +78,9 @@ async function send(form: HTMLFormElement): Promise<void> {
     else showBusy(form, false);
   } catch (error) {
     showBusy(form, false);
-    showFaults(form, faultsOf(error));
+    if (error instanceof CallFailed && error.problem.code === "changed-meanwhile" && error.problem.current)
+      meet(form, error.problem.current as CurrentRow);
+    else showFaults(form, faultsOf(error));
   }
 }
 

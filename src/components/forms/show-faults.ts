@@ -33,7 +33,7 @@ export function clearFaults(form: HTMLFormElement): void {
     control.classList.remove(...WRONG);
     tie(control, `${control.id}-wrong`, false);
   }
-  form.querySelector("[data-fault]")?.setAttribute("hidden", "");
+  for (const box of form.querySelectorAll("[data-fault], [data-settle]")) box.setAttribute("hidden", "");
 }
 
 /** The sentence below a field, tied to it. Its sign is that of the box above. */

@@ -19,6 +19,7 @@ import type { GET, POST, PUT } from "#src/pages/api/workshops/[workshop]/kits/[k
 import type { EditionLoss } from "#src/server/edition-changes.ts";
 import type { EditionView } from "#src/server/present.ts";
 import { EDITIONS_MOST } from "#src/shapes/limits.ts";
+import { EditionClash, type EditionField, type MetEdition } from "./EditionClash.tsx";
 import { lossWords } from "./loss-words.ts";
 
 export interface EditionsProps {
@@ -41,6 +42,7 @@ function refusal(error: unknown): string {
 /** The editions of a kit: names, shares of the run, boards; added, reordered, removed. */
 export default function Editions({ address, first, canEdit }: EditionsProps) {
   const [editions, setEditions] = useState(first);
+  const [met, setMet] = useState<MetEdition | null>(null);
   const [leaving, setLeaving] = useState<{ edition: EditionView; loss: EditionLoss } | null>(null);
   const path = (id: string) => kitApi(address, `/editions/${id}`);
   const saved = () => saving.change((now) => ({ ...now, savedAt: Date.now() }));
@@ -49,23 +51,33 @@ export default function Editions({ address, first, canEdit }: EditionsProps) {
     setEditions(await call<typeof GET>("GET", kitApi(address, "/editions")));
   }
 
+  const put = (after: EditionView) =>
+    setEditions((now) => now.map((one) => (one.id === after.id ? after : one)));
+
   async function change(
     edition: EditionView,
-    fields: Partial<Pick<EditionView, "name" | "weight" | "boardsPerKit">>,
-  ) {
+    field: EditionField,
+    yours: string | number,
+  ): Promise<string | null> {
     try {
-      const after = await call<typeof PATCH>("PATCH", path(edition.id), {
-        ...fields,
-        version: edition.version,
-      });
-      setEditions((now) => now.map((one) => (after && one.id === edition.id ? after : one)));
+      const body = { [field]: yours, version: edition.version };
+      const after = await call<typeof PATCH>("PATCH", path(edition.id), body);
+      if (after) put(after);
       saved();
       return null;
     } catch (error) {
-      const message = refusal(error);
-      if (error instanceof CallFailed && error.problem.code === "changed-meanwhile") await reload();
-      return message;
+      if (!(error instanceof CallFailed) || error.problem.code !== "changed-meanwhile") return refusal(error);
+      return meetOther(edition, { field, yours, current: error.problem.current as MetEdition["current"] });
     }
+  }
+
+  /** Somebody was quicker. Another field of theirs is no matter; the same one is for the person to choose. */
+  async function meetOther(before: EditionView, one: MetEdition): Promise<string | null> {
+    const { current, field } = one;
+    put(current);
+    if (current[field] === before[field]) return change(current, field, one.yours);
+    if (current[field] !== one.yours) setMet(one);
+    return null;
   }
 
   async function move(place: number, by: 1 | -1) {
@@ -108,7 +120,7 @@ export default function Editions({ address, first, canEdit }: EditionsProps) {
               className="w-full tablet:w-64"
               value={edition.name}
               off={!canEdit}
-              save={(text) => change(edition, { name: text })}
+              save={(text) => change(edition, "name", text)}
             />
             <SavedField
               label="Share of the run"
@@ -120,7 +132,7 @@ export default function Editions({ address, first, canEdit }: EditionsProps) {
                 const weight = whole(text);
                 return weight === null
                   ? "Write a whole number; 0 makes none of it."
-                  : change(edition, { weight });
+                  : change(edition, "weight", weight);
               }}
             />
             <SavedField
@@ -133,7 +145,7 @@ export default function Editions({ address, first, canEdit }: EditionsProps) {
                 const boardsPerKit = whole(text);
                 return boardsPerKit === null || boardsPerKit > 100
                   ? "Write a whole number up to 100."
-                  : change(edition, { boardsPerKit });
+                  : change(edition, "boardsPerKit", boardsPerKit);
               }}
             />
             {canEdit && (
@@ -159,6 +171,16 @@ export default function Editions({ address, first, canEdit }: EditionsProps) {
           </li>
         ))}
       </ul>
+      {met && (
+        <EditionClash
+          met={met}
+          onKeepYours={() => {
+            setMet(null);
+            void change(met.current, met.field, met.yours);
+          }}
+          onTakeTheirs={() => setMet(null)}
+        />
+      )}
       {canEdit && editions.length < EDITIONS_MOST && (
         <NewEdition
           address={address}
