@@ -4,7 +4,17 @@ const WAIT_MS = 300;
 const BARS = ["w-3/5", "w-4/5", "w-1/2", "w-3/4"];
 
 /** Nothing for 300 ms, then the section's ruled lines with bars where text will stand. It does not move. */
-export function Loading({ rows = 3, what }: { rows?: number /** "Offers". */; what: string }) {
+export function Loading({
+  rows = 3,
+  what,
+  frame,
+}: {
+  rows?: number;
+  /** "Offers". */
+  what: string;
+  /** Classes of the box around the lines, where what is fetched will lie over the page. */
+  frame?: string;
+}) {
   const [late, setLate] = useState(false);
   useEffect(() => {
     const timer = setTimeout(() => setLate(true), WAIT_MS);
@@ -13,7 +23,11 @@ export function Loading({ rows = 3, what }: { rows?: number /** "Offers". */; wh
   return (
     <div role="status" aria-busy="true">
       <span className="heard-only">Loading: {what}</span>
-      {late && <LoadingLines rows={rows} />}
+      {late && (
+        <div className={frame}>
+          <LoadingLines rows={rows} />
+        </div>
+      )}
     </div>
   );
 }

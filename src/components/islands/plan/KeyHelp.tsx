@@ -1,19 +1,10 @@
-import { useEffect, useRef, useState } from "react";
-import { Button } from "#src/components/islands/parts/Button.tsx";
-import { holdFocus, useModal } from "#src/components/islands/parts/held-focus.ts";
+import { useEffect, useState } from "react";
+import { Later } from "#src/components/islands/parts/Later.tsx";
+import { laterPart } from "#src/components/islands/parts/later-part.ts";
 
-const KEYS: readonly [string, string][] = [
-  ["Alt and +, Alt and −", "one kit more or less, from anywhere"],
-  ["Arrow keys on the ruler", "one kit more or less"],
-  ["Shift and arrow on the ruler", "the next sweet spot"],
-  ["Page up, Page down on the ruler", "ten kits more or less"],
-  ["Home, End on the ruler", "10 kits, 500 kits"],
-  ["Arrow up, arrow down in an amount", "0.10 more or less; with Shift 1.00"],
-  ["Arrow keys in a chart", "from run size to run size, read out"],
-  ["Enter on a figure with a dotted foot", "its working"],
-  ["Escape", "closes the working; leaves a field as it was"],
-  ["?", "these keys"],
-];
+const KeyDialog = laterPart<{ onClose: () => void }>(async () => (await import("./KeyDialog.tsx")).KeyDialog);
+const OVERLAY =
+  "fixed inset-x-0 top-24 z-30 mx-auto w-[min(560px,calc(100vw-2rem))] border-2 border-ink bg-paper p-6";
 
 function isTyping(target: EventTarget | null): boolean {
   return (
@@ -24,8 +15,6 @@ function isTyping(target: EventTarget | null): boolean {
 /** Lists the keys when somebody presses the question mark; single-letter keys can be turned off. */
 export function KeyHelp({ on }: { on: boolean }) {
   const [open, setOpen] = useState(false);
-  const close = useRef<HTMLButtonElement>(null);
-  const box = useModal(open, close);
   useEffect(() => {
     if (!on) return;
     const onKey = (press: KeyboardEvent) => {
@@ -37,35 +26,7 @@ export function KeyHelp({ on }: { on: boolean }) {
     addEventListener("keydown", onKey);
     return () => removeEventListener("keydown", onKey);
   }, [on]);
-  return (
-    <dialog
-      ref={box}
-      aria-label="Keys"
-      onKeyDown={holdFocus}
-      onCancel={(cancel) => {
-        cancel.preventDefault();
-        setOpen(false);
-      }}
-      className="m-auto w-[min(560px,calc(100vw-2rem))] rounded-control border-2 border-ink bg-paper px-6 py-5 text-ink"
-    >
-      {open && (
-        <>
-          <div className="flex items-center justify-between gap-4">
-            <h2 className="type-h2">Keys</h2>
-            <Button ref={close} size="small" onClick={() => setOpen(false)}>
-              Close
-            </Button>
-          </div>
-          <dl className="mt-3 type-table">
-            {KEYS.map(([keys, what]) => (
-              <div key={keys} className="hairline-b flex flex-wrap justify-between gap-x-6 py-2">
-                <dt className="font-semibold">{keys}</dt>
-                <dd className="text-ink-2">{what}</dd>
-              </div>
-            ))}
-          </dl>
-        </>
-      )}
-    </dialog>
-  );
+  return open ? (
+    <Later part={KeyDialog} give={{ onClose: () => setOpen(false) }} what="Keys" frame={OVERLAY} />
+  ) : null;
 }

@@ -1,38 +1,38 @@
-import { useEffect, useMemo } from "react";
+import { useEffect } from "react";
 import type { KitAddress } from "#src/components/islands/kit-address.ts";
-import { WorkingPanel } from "#src/components/islands/parts/WorkingPanel.tsx";
-import { working } from "#src/costing/working.ts";
+import { Later } from "#src/components/islands/parts/Later.tsx";
+import { laterPart } from "#src/components/islands/parts/later-part.ts";
 import type { Plan } from "#src/shapes/plan.ts";
 import { useStore } from "./module-store.ts";
-import { type OpenWorking, openWorking, WORKING_PANEL } from "./open-working.ts";
-import { workingOnPaper } from "./working-on-paper.ts";
+import { type OpenWorking, openWorking } from "./open-working.ts";
 
-function clock(): string {
-  return new Date().toLocaleTimeString("en-GB", { hour: "2-digit", minute: "2-digit" });
+const OVERLAY =
+  "fixed right-0 bottom-0 z-30 h-[70vh] w-[min(588px,100vw)] border-t-2 border-l-2 border-ink bg-paper p-6";
+
+const OpenPanel = laterPart<{ address: KitAddress; plan: Plan; open: OpenWorking }>(
+  async () => (await import("./OpenPanel.tsx")).OpenPanel,
+);
+
+/** Whatever opens a working says so in its name, wherever on the page it is drawn. */
+const OPENERS = 'button[aria-label$="show the working"]';
+
+function fetchSoon({ target }: Event): void {
+  if (target instanceof Element && target.closest(OPENERS)) OpenPanel.preload();
 }
 
 /** Shows the working of whichever figure of the page is open; it follows edits. One per page. */
 export function WorkingHost({ address, plan }: { address: KitAddress; plan: Plan | undefined }) {
   const open = useStore(openWorking, null);
-  return open && plan ? <OpenPanel address={address} plan={plan} open={open} /> : null;
-}
-
-function OpenPanel({ address, plan, open }: { address: KitAddress; plan: Plan; open: OpenWorking }) {
-  const kits = open.kits ?? plan.run.kits;
-  const tree = useMemo(() => working(plan, kits, open.figure), [plan, kits, open.figure]);
-  const close = () => openWorking.put(null);
-  // A figure that is no more, such as the order to a supplier no longer used, closes its working.
-  const gone = tree === null;
   useEffect(() => {
-    if (gone) openWorking.put(null);
-  }, [gone]);
-  const paper =
-    tree &&
-    workingOnPaper(tree, {
-      address,
-      currency: plan.currency,
-      time: clock(),
-      open: (figure) => openWorking.put({ figure, kits: open.kits }),
-    });
-  return gone ? null : <WorkingPanel id={WORKING_PANEL} paper={paper} onClose={close} />;
+    addEventListener("pointerover", fetchSoon);
+    addEventListener("focusin", fetchSoon);
+    return () => {
+      removeEventListener("pointerover", fetchSoon);
+      removeEventListener("focusin", fetchSoon);
+    };
+  }, []);
+  if (!open || !plan) return null;
+  return (
+    <Later part={OpenPanel} give={{ address, plan, open }} what="The working" rows={9} frame={OVERLAY} />
+  );
 }
