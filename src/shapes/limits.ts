@@ -114,6 +114,8 @@ export const UPLOAD_BYTES = 5 * 1024 * 1024;
 export const PASTED_BYTES = 2 * UPLOAD_BYTES;
 export const UPLOAD_ROWS = 20_000;
 export const UPLOAD_COLUMNS = 200;
+/** A workbook is an archive: what it holds may be ten times what is sent. */
+export const WORKBOOK_BYTES = 10 * UPLOAD_BYTES;
 export const JSON_BYTES = 256 * 1024;
 /** A change of a long parts list at once, such as a pasted block. */
 export const LIST_CHANGE_BYTES = 4 * 1024 * 1024;
