@@ -80,9 +80,7 @@ function Reckoned({ address, held, may }: ReckonedProps) {
           </Pair>
         )}
         <Evidence address={address} plan={plan} may={may} />
-        <Pair>
-          <Inputs address={address} held={held} run={run} may={may} />
-        </Pair>
+        <Inputs address={address} held={held} run={run} may={may} />
         <Pair>
           <PlanFile address={address} />
         </Pair>

@@ -31,7 +31,7 @@ function inline(from: Element, to: Element): void {
     const value = style.getPropertyValue(name);
     if (value !== "") to.setAttribute(name, withoutPage(value));
   }
-  for (const name of ["class", "style", "tabindex", "role"]) to.removeAttribute(name);
+  for (const name of ["class", "style", "tabindex", "role", "aria-hidden"]) to.removeAttribute(name);
   [...from.children].forEach((child, place) => {
     const copy = to.children[place];
     if (copy) inline(child, copy);

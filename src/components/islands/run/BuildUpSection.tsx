@@ -1,57 +1,67 @@
-import { moneyText, roundMoneyText, shareText } from "#src/components/amount-text.ts";
-import { hatchFill } from "#src/components/islands/chart-theme.ts";
+import { useRef } from "react";
+import { axisMoneyText, moneyText, shareText } from "#src/components/amount-text.ts";
+import { fileName } from "#src/components/islands/charts/file-name.ts";
+import { SaveChart } from "#src/components/islands/charts/SaveChart.tsx";
 import { Figure } from "#src/components/islands/parts/Figure.tsx";
-import { HatchDefs } from "#src/components/islands/parts/HatchDefs.tsx";
 import { Section } from "#src/components/islands/parts/Section.tsx";
 import { ShowWorking } from "#src/components/islands/parts/ShowWorking.tsx";
 import type { useOpens } from "#src/components/islands/plan/open-working.ts";
 import { needWords } from "#src/costing/problem-words.ts";
 import type { RunResult } from "#src/costing/run-result.ts";
-import { type BarKind, type BuildUpRow, buildUp } from "./build-up-rows.ts";
-
-const FILLS: Record<BarKind, string> = {
-  part: "var(--color-copper-metal)",
-  cost: "var(--color-ink)",
-  brings: "var(--color-petrol)",
-  left: hatchFill("left"),
-};
+import { BuildUpDrawing } from "./BuildUpDrawing.tsx";
+import { buildUpFill } from "./build-up-fill.ts";
+import { type BuildUpRow, buildUp, buildUpList } from "./build-up-rows.ts";
 
 /** One kit of the run: what makes up its cost, what it brings in and what is left, on one scale. */
 export function BuildUpSection({ run, opens }: { run: RunResult; opens: ReturnType<typeof useOpens> }) {
-  const { rows, lines, step } = buildUp(run);
-  const differs =
-    run.perKit.spent.known && run.perKit.used.known && run.perKit.spent.value !== run.perKit.used.value;
+  const built = buildUp(run);
+  const { rows, lines, step } = built;
+  const drawing = useRef<SVGSVGElement>(null);
+  const name = `One kit of ${run.kits}, built up`;
   return (
     <Section
-      title={`One kit of ${run.kits}, built up`}
-      aside={`each thin line is ${step < 1 ? moneyText(String(step), run.currency) : roundMoneyText(String(step), run.currency)}`}
+      title={name}
+      aside={`each thin line is ${axisMoneyText(step, [step], run.currency)}`}
       actions={<ShowWorking of="the cost of one kit" onClick={opens("per-kit-used").onOpen} />}
     >
-      <svg width={0} height={0} aria-hidden="true" className="absolute">
-        <defs>
-          <HatchDefs />
-        </defs>
-      </svg>
+      <div className="heard-only" aria-hidden="true">
+        <BuildUpDrawing built={built} currency={run.currency} drawing={drawing} />
+      </div>
       <table className="type-table w-full border-collapse max-tablet:block">
-        <caption className="heard-only">One kit of {run.kits}, built up</caption>
+        <caption className="heard-only">{name}</caption>
         <tbody className="max-tablet:block">
           {rows.map((row) => (
             <BuildUpLine key={row.key} row={row} lines={lines} currency={run.currency} opens={opens} />
           ))}
         </tbody>
       </table>
-      {differs && (
-        <p className="type-note mt-3 text-ink-2">
-          Used counts what keeps on the shelf as not spent. In money spent one kit costs{" "}
-          <Figure
-            label="Cost per kit, spent"
-            value={run.perKit.spent.known ? moneyText(run.perKit.spent.value, run.currency) : ""}
-            {...opens("per-kit-spent")}
-          />
-          .
-        </p>
-      )}
+      <InSpent run={run} opens={opens} />
+      <p className="mt-3 flex flex-wrap items-center gap-x-5 gap-y-1 type-label" data-screen-only>
+        <SaveChart
+          name={name}
+          file={fileName(run.kit, "built-up")}
+          drawn={() => drawing.current}
+          rows={() => buildUpList(built)}
+        />
+      </p>
     </Section>
+  );
+}
+
+/** The same kit in money spent, where that is another figure. */
+function InSpent({ run, opens }: { run: RunResult; opens: ReturnType<typeof useOpens> }) {
+  const { spent, used } = run.perKit;
+  if (!spent.known || !used.known || spent.value === used.value) return null;
+  return (
+    <p className="type-note mt-3 text-ink-2">
+      Used counts what keeps on the shelf as not spent. In money spent one kit costs{" "}
+      <Figure
+        label="Cost per kit, spent"
+        value={moneyText(spent.value, run.currency)}
+        {...opens("per-kit-spent")}
+      />
+      .
+    </p>
   );
 }
 
@@ -69,12 +79,15 @@ function BuildUpLine({ row, lines, currency, opens }: LineProps) {
     kind === "left" ? "border-b-4 border-double border-ink" : kind === "cost" ? "rule-head" : "hairline-b";
   return (
     <tr
-      className={`h-[37px] ${foot} max-tablet:grid max-tablet:h-auto max-tablet:grid-cols-[1fr_auto] max-tablet:py-1`}
+      className={`h-[37px] ${foot} max-tablet:grid max-tablet:h-auto max-tablet:grid-cols-[1fr_auto] max-tablet:pt-1`}
     >
-      <th scope="row" className={`w-[27%] py-1 pr-3 text-left ${weight || "font-normal"} max-tablet:w-auto`}>
+      <th
+        scope="row"
+        className={`w-[27%] py-1 pr-3 text-left ${weight || "font-normal"} max-tablet:w-auto max-tablet:pb-0`}
+      >
         {label}
       </th>
-      <td className="relative p-0 max-tablet:order-3 max-tablet:col-span-2 max-tablet:h-6">
+      <td className="relative p-0 max-tablet:order-3 max-tablet:col-span-2">
         <Bar row={row} lines={lines} />
       </td>
       <td className={`w-[12%] pl-4 text-right whitespace-nowrap ${weight} max-tablet:w-auto`}>
@@ -92,23 +105,19 @@ function BuildUpLine({ row, lines, currency, opens }: LineProps) {
 }
 
 function Bar({ row, lines }: { row: BuildUpRow; lines: readonly number[] }) {
-  const { bar, kind, figure } = row;
+  const { bar } = row;
   return (
-    <svg width="100%" height={37} className="block overflow-visible max-tablet:h-6" aria-hidden="true">
+    <svg width="100%" className="block h-[37px] overflow-visible max-tablet:h-6" aria-hidden="true">
       {lines.map((at) => (
-        <line key={at} x1={`${at}%`} x2={`${at}%`} y1={0} y2={37} stroke="var(--color-rule)" />
+        <line key={at} x1={`${at}%`} x2={`${at}%`} y1={0} y2="100%" stroke="var(--color-rule)" />
       ))}
       {bar && (
         <rect
           x={`${bar.from}%`}
           width={`${Math.max(0.3, bar.to - bar.from)}%`}
-          y={9}
-          height={19}
-          fill={FILLS[kind]}
-          stroke={kind === "left" ? "var(--color-petrol)" : figure.known ? "none" : "var(--color-rule-2)"}
-          strokeWidth={kind === "left" ? 1.5 : 1}
-          fillOpacity={figure.known ? 1 : 0.45}
-          strokeDasharray={figure.known ? undefined : "3 3"}
+          y="24%"
+          height="52%"
+          {...buildUpFill(row)}
         />
       )}
     </svg>

@@ -70,12 +70,12 @@ export function CostChart(props: CostChartProps) {
       margin={narrow ? NARROW_MARGIN : MARGIN}
       aria-label={props.label}
     >
-      <CartesianGrid {...GRID} />
+      <CartesianGrid {...GRID} syncWithTicks />
       <XAxis
         {...X_AXIS}
         dataKey="kits"
         domain={useStable([span.from, span.to])}
-        ticks={useStable(roundTicks(span.from, span.to, narrow ? 4 : 9))}
+        ticks={useStable(roundTicks(span.from, span.to, narrow ? 5 : 9))}
         label={TITLE}
       />
       <YAxis

@@ -27,7 +27,12 @@ export function CostMarks(props: CostMarksProps) {
   const area = usePlotArea();
   if (!scale || !area) return null;
   const { points, span, run, brings, currency, spots, narrow, range, note } = props;
-  const plot = { left: area.x - 2, right: area.x + area.width, top: area.y, bottom: area.y + area.height };
+  const plot = {
+    left: area.x - 2,
+    right: area.x + area.width,
+    top: area.y - 12,
+    bottom: area.y + area.height,
+  };
   const at = (kits: number) => {
     const exact = points.find((point) => point.kits === kits)?.exact.perKit ?? null;
     return exact === null ? null : { kits, exact, ...scale({ kits, money: Number(exact) }) };
@@ -35,7 +40,7 @@ export function CostMarks(props: CostMarksProps) {
   const chosen = at(run);
   const rings = spots.flatMap((kits) => {
     const ring = kits === run || kits < span.from || kits > span.to ? null : at(kits);
-    return ring && ring.y >= plot.top ? [ring] : [];
+    return ring && ring.y >= area.y ? [ring] : [];
   });
   const net = brings === null ? null : netLine(range, scale({ kits: run, money: Number(brings) }).y, plot);
   const start = !narrow && note ? at(note.kits) : null;
@@ -46,7 +51,9 @@ export function CostMarks(props: CostMarksProps) {
       (ring) => ({ ...ring, figure: moneyText(ring.exact, currency) }),
     ),
     plot,
-    taken,
+    chosen
+      ? [...taken, { left: chosen.x - 3, right: chosen.x + 3, top: plot.top, bottom: plot.bottom }]
+      : taken,
   );
   return (
     <g>
@@ -81,7 +88,7 @@ function RingName({ name: { kits, figure, rank, box, anchor } }: { name: PlacedN
 
 /** Where the name of what a kit brings in stands: at its line, or at the edge behind which the line lies. */
 function netLine({ brings }: UnitCostRange, y: number, plot: NameBox) {
-  if (brings === "above") return { y: plot.top, name: plot.top + 16 };
+  if (brings === "above") return { y: plot.top, name: plot.top + 28 };
   if (brings === "below") return { y: plot.bottom, name: plot.bottom - 9 };
   return { y, name: y - 9 };
 }

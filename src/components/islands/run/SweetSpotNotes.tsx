@@ -15,8 +15,8 @@ function nearest<T extends { kits: number }>(all: readonly T[], run: number, mos
 
 /** Sweet spots near the run, each with what the next kit costs, and the step-downs. */
 export function SweetSpotNotes({ plan, sweep, run }: { plan: Plan; sweep: SweepResult; run: number }) {
-  const spots = nearest(sweep.sweetSpots, run, 5);
-  const steps = nearest(sweep.stepDowns, run, 4);
+  const spots = nearest(sweep.sweetSpots, run, 4);
+  const steps = nearest(sweep.stepDowns, run, 3);
   return (
     <>
       <MarginNote title="Sweet spots">

@@ -103,3 +103,14 @@ export function buildUp(run: RunResult): BuildUp {
   const lines = Array.from({ length: Math.floor(end / step) + 1 }, (_, place) => at(place * step));
   return { rows, lines, step };
 }
+
+/** The build-up as rows of a file: exact amounts, empty where not known. */
+export function buildUpList({ rows }: BuildUp): string[][] {
+  const head = ["Of one kit", "Amount", "Share of the cost"];
+  const row = ({ label, figure, share }: BuildUpRow) => [
+    label,
+    figure.known ? figure.value : "",
+    share ?? "",
+  ];
+  return [head, ...rows.map(row)];
+}

@@ -48,7 +48,9 @@ function places(ring: NamedRing): { box: NameBox; anchor: "start" | "end" }[] {
   ];
 }
 
-/** Names of rings inside the plot that touch neither each other nor what is taken; one without room is left out. */
+const ringBox = ({ x, y }: NamedRing): NameBox => ({ left: x - 9, right: x + 9, top: y - 9, bottom: y + 9 });
+
+/** Names of rings inside the plot that touch no other name or ring and nothing that is taken; the rest are left out. */
 export function ringNames(
   rings: readonly NamedRing[],
   plot: NameBox,
@@ -56,13 +58,14 @@ export function ringNames(
 ): PlacedName[] {
   const named: PlacedName[] = [];
   for (const ring of [...rings].sort((one, other) => one.rank - other.rank || one.x - other.x)) {
+    const others = rings.filter((other) => other !== ring).map(ringBox);
     const place = places(ring).find(
       ({ box }) =>
         box.left >= plot.left &&
         box.right <= plot.right &&
         box.top >= plot.top &&
         box.bottom <= plot.bottom &&
-        [...taken, ...named.map((other) => other.box)].every((other) => !overlaps(box, other)),
+        [...taken, ...others, ...named.map((other) => other.box)].every((other) => !overlaps(box, other)),
     );
     if (place) named.push({ ...ring, ...place });
   }

@@ -97,7 +97,7 @@ export interface UnitCostRange {
 /** The line of what a kit brings in is drawn where the costs still get two fifths of the height. */
 const NEAR = 2.5;
 /** Below the cheapest kit there is room for the name of a ring. */
-const ROOM = 0.16;
+const ROOM = 0.24;
 
 /**
  * The money axis of unit costs. The smallest runs cost many times the usual kit; the axis ends at three times

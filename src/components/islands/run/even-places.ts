@@ -51,19 +51,22 @@ export function middleOf(
   return near.height > NAME_HEIGHT ? near : null;
 }
 
-/** Where the cost line stands lowest on the screen between two places across. */
-function costFoot(points: readonly CostPoint[], scale: ChartScale, left: number, right: number): number {
+/** How high and how low on the screen the cost line stands between two places across. */
+function costReach(points: readonly CostPoint[], scale: ChartScale, left: number, right: number) {
   const within = points.flatMap(({ kits, total }) => {
     const at = total === null ? null : scale({ kits, money: total });
     return at && at.x >= left - 6 && at.x <= right + 6 ? [at.y] : [];
   });
-  return Math.max(0, ...within);
+  return { head: Math.min(...within), foot: Math.max(0, ...within) };
 }
 
 /** The box of a name of one line by its baseline. */
 function named(left: number, right: number, baseline: number): NameBox {
   return { left, right, top: baseline - 15, bottom: baseline + 5 };
 }
+
+/** Half of the room that the name of the cost line takes. */
+const HALF = 38;
 
 /** Where along the span the cost line has room below it, or above, for its name. */
 export function costNamePlace(
@@ -72,14 +75,21 @@ export function costNamePlace(
   taken: readonly NameBox[],
 ): Pixels | undefined {
   const known = points.filter(({ total }) => total !== null);
-  const at = [0.62, 0.8, 0.48, 0.3, 0.2].flatMap((share) => {
-    const point = known[Math.floor((known.length - 1) * share)];
-    return point ? [scale({ kits: point.kits, money: point.total ?? 0 })] : [];
-  });
-  const below = at.map(({ x }) => ({ x, y: costFoot(points, scale, x - 40, x + 40) + 22 }));
-  const above = at.map(({ x, y }) => ({ x, y: y - 14 }));
+  const first = known[0];
+  if (!first) return undefined;
+  const start = scale({ kits: first.kits, money: 0 }).x + HALF;
+  const across = (share: number) => {
+    const point = known[Math.floor((known.length - 1) * share)] ?? first;
+    return Math.max(start, scale({ kits: point.kits, money: 0 }).x);
+  };
+  const reach = (x: number) => costReach(points, scale, x - HALF, x + HALF);
+  const below = [0.62, 0.8, 0.48].map(across).map((x) => ({ x, y: reach(x).foot + 22 }));
+  const above = [0.1, 0.2, 0.3]
+    .map(across)
+    .flatMap((x) => [12, 34].map((away) => ({ x, y: reach(x).head - away })));
+  const places = [...below, ...above];
   return freePlace(
-    [...below, ...above].map((place) => ({ ...place, ...named(place.x - 40, place.x + 40, place.y) })),
+    places.map((place) => ({ ...place, ...named(place.x - HALF, place.x + HALF, place.y) })),
     taken,
   );
 }
@@ -111,10 +121,12 @@ export function paidBack(
   const width = nameWidth(words);
   const fits = ring.x + 12 + width <= plot.x + plot.width;
   const [left, right] = fits ? [ring.x + 12, ring.x + 12 + width] : [ring.x + 8 - width, ring.x + 8];
-  const below = Math.max(ring.y + 26, costFoot(points, scale, left, right) + 22);
+  const below = Math.max(ring.y + 26, costReach(points, scale, left, right).foot + 22);
   // Below the line where there is room above the names at the foot; else above the ring.
   const y = below < foot - 66 ? below : ring.y - 16;
-  const taken = [named(left, right, y)];
+  const runBox = named(left, right, y);
+  // Two names one below the other would read as one.
+  const taken = [{ ...runBox, top: runBox.top - 8, bottom: runBox.bottom + 8 }];
   if (back)
     taken.push(
       { left: back.x - 4, right: back.x + 140, top: foot - 54, bottom: foot },

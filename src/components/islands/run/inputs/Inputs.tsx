@@ -1,30 +1,33 @@
 import { memo, type ReactNode } from "react";
 import { rolesThatCan } from "#src/access.ts";
+import { kitPath } from "#src/components/islands/kit-address.ts";
+import { Pair } from "#src/components/islands/parts/Pair.tsx";
 import { Section } from "#src/components/islands/parts/Section.tsx";
 import { Allowances } from "./Allowances.tsx";
 import { Charges } from "./Charges.tsx";
+import { AllowancesNote, ChargesNote, MixNote, PackingNote, SaleNote, WorkNote } from "./InputNotes.tsx";
 import type { InputProps } from "./input-props.ts";
 import { MixAndPrices } from "./MixAndPrices.tsx";
 import { Packing } from "./Packing.tsx";
 import { SaleTerms } from "./SaleTerms.tsx";
 import { Work } from "./Work.tsx";
 
-function Group({
-  id,
-  title,
-  aside,
-  children,
-}: {
+interface GroupProps {
   id: string;
   title: string;
   aside?: string;
+  note: ReactNode;
   children: ReactNode;
-}) {
+}
+
+function Group({ id, title, aside, note, children }: GroupProps) {
   return (
     <div id={id} className="scroll-mt-40">
-      <Section title={title} aside={aside}>
-        {children}
-      </Section>
+      <Pair note={note}>
+        <Section title={title} aside={aside}>
+          {children}
+        </Section>
+      </Pair>
     </div>
   );
 }
@@ -64,27 +67,41 @@ const Spares = memo(
 
 /** What the figures rest on: every entry of the run, followed by the figures while one types. */
 export function Inputs(props: InputProps) {
-  const pricesAside = props.may.changePrice
+  const { address, held, may } = props;
+  const pricesAside = may.changePrice
     ? undefined
     : `${rolesThatCan("change-price").join(" and ")} change these; you see them`;
   return (
     <div id="inputs" className="flex scroll-mt-40 flex-col gap-11">
-      <Group id="prices" title="Mix and prices" aside={pricesAside}>
+      <Group id="prices" title="Mix and prices" aside={pricesAside} note={<MixNote />}>
         <Mix {...props} />
       </Group>
-      <Group id="sale" title="What goes off a sale" aside={pricesAside}>
+      <Group id="sale" title="What goes off a sale" aside={pricesAside} note={<SaleNote />}>
         <Sale {...props} />
       </Group>
-      <Group id="work" title="Work at the table">
+      <Group id="work" title="Work at the table" note={<WorkNote />}>
         <Tasks {...props} />
       </Group>
-      <Group id="packing" title="Packing">
+      <Group
+        id="packing"
+        title="Packing"
+        note={held.plan.editions.length > 1 && held.plan.packing.length > 0 && <PackingNote />}
+      >
         <Items {...props} />
       </Group>
-      <Group id="charges" title="Once-only costs" aside="left empty, this run bears all of it">
+      <Group
+        id="charges"
+        title="Once-only costs"
+        aside="left empty, this run bears all of it"
+        note={<ChargesNote />}
+      >
         <Once {...props} />
       </Group>
-      <Group id="allowances" title="Spares, boards and replacements">
+      <Group
+        id="allowances"
+        title="Spares, boards and replacements"
+        note={<AllowancesNote boardsHref={held.plan.boards.needed ? kitPath(address, "/boards") : null} />}
+      >
         <Spares {...props} />
       </Group>
     </div>
