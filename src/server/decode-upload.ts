@@ -5,7 +5,7 @@ import { UPLOAD_BYTES } from "#src/shapes/limits.ts";
 export type DecodeProblem =
   | "upload-empty"
   | "upload-too-large"
-  | "upload-spreadsheet"
+  | "upload-archive"
   | "upload-old-spreadsheet"
   | "upload-not-text";
 
@@ -14,9 +14,9 @@ export type Decoded = { ok: true; text: string; encoding: string } | { ok: false
 /** Bytes looked at for control characters and for telling 8-bit encodings apart. */
 const SAMPLE = 64 * 1024;
 
-/** First bytes of files that are no text. A ZIP is XLSX or ODS; OLE2 is XLS. */
+/** First bytes of files that are no text. A ZIP may be XLSX or ODS; OLE2 is XLS, or a workbook behind a password. */
 const SIGNATURES: readonly (readonly [number[], DecodeProblem])[] = [
-  [[0x50, 0x4b, 0x03, 0x04], "upload-spreadsheet"],
+  [[0x50, 0x4b, 0x03, 0x04], "upload-archive"],
   [[0xd0, 0xcf, 0x11, 0xe0], "upload-old-spreadsheet"],
   [[0x25, 0x50, 0x44, 0x46], "upload-not-text"],
   [[0x89, 0x50, 0x4e, 0x47], "upload-not-text"],

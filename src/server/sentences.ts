@@ -166,20 +166,26 @@ export const SENTENCES = {
     title: "{name} holds no rows.",
     detail: "Choose a list with at least one row that is not blank.",
   },
-  "upload-spreadsheet": {
+  "upload-no-workbook": {
     status: 415,
-    title: "{name} is a spreadsheet workbook.",
-    detail: "Save it as CSV in your spreadsheet and bring in that file, or copy the cells and paste them.",
+    title: "{name} is no workbook that can be read.",
+    detail: "XLSX and ODS can. Save the list as one of these or as CSV, or copy the cells and paste them.",
+  },
+  "upload-too-packed": {
+    status: 413,
+    title: "{name} is too large to unpack.",
+    detail:
+      "At most {most} can be read. Save the sheet with the list alone, or copy its cells and paste them.",
   },
   "upload-old-spreadsheet": {
     status: 415,
-    title: "{name} is an old spreadsheet workbook.",
-    detail: "Save it as CSV in your spreadsheet and bring in that file, or copy the cells and paste them.",
+    title: "{name} is an old workbook, or locked with a password.",
+    detail: "Save it as XLSX, ODS or CSV without a password, or copy the cells and paste them.",
   },
   "upload-not-text": {
     status: 415,
     title: "{name} is not plain text.",
-    detail: "Bring in the list as CSV, TSV or another plain text, or copy its cells and paste them.",
+    detail: "Bring in the list as CSV, TSV, XLSX or ODS, or copy its cells and paste them.",
   },
   "upload-too-long": {
     status: 413,

@@ -1,3 +1,4 @@
+import { utils, write } from "@e965/xlsx";
 import { describe, expect, it } from "vitest";
 import { openDb } from "#db/client.ts";
 import { activity } from "#db/schema/activity.ts";
@@ -44,7 +45,13 @@ describe("an upload", () => {
   it.each([
     ["nothing at all", "", 422, "upload-empty", "parts.csv holds no rows."],
     ["blank rows", "\n \n,,\n", 422, "upload-empty", "parts.csv holds no rows."],
-    ["a packed spreadsheet", zip, 415, "upload-spreadsheet", "parts.csv is a spreadsheet workbook."],
+    [
+      "an archive that is no workbook",
+      zip,
+      415,
+      "upload-no-workbook",
+      "parts.csv is no workbook that can be read.",
+    ],
     ["a picture", png, 415, "upload-not-text", "parts.csv is not plain text."],
     ["a document", pdf, 415, "upload-not-text", "parts.csv is not plain text."],
     ["bytes that are no text", noise, 415, "upload-not-text", "parts.csv is not plain text."],
@@ -78,6 +85,21 @@ describe("an upload", () => {
     expect(answer.status).toBe(413);
     expect(answer.problem?.title).toBe("This is larger than 5 MB.");
     expect(counted().imports).toBe(0);
+  });
+
+  it("can be a workbook; its page says which sheet was read, and rows keep the numbers they have there", async () => {
+    const kit = importKit(app);
+    const book = utils.book_new();
+    const cells = [["Gate Bell"], [], ["Ref", "Qty", "Value"], ["R1, R2", 2, "10k"], ["C1", 3, "100nF"]];
+    utils.book_append_sheet(book, utils.aoa_to_sheet(cells), "List");
+    utils.book_append_sheet(book, utils.aoa_to_sheet([["to do"]]), "Notes");
+    const bytes = new Uint8Array(write(book, { type: "array", bookType: "xlsx" }) as ArrayBuffer);
+    const { id } = (await kit.upload(bytes, "list.xlsx")).body;
+    const { file, counts, questions } = (await kit.look(id)).body;
+    expect(file).toMatchObject({ encoding: "XLSX", sheets: { taken: "List", others: ["Notes"] } });
+    expect(counts.lines).toBe(1);
+    // C1 alone is one piece; the sheet says 3 in its fifth row.
+    expect(questions.open.map(({ row }) => row)).toEqual([5]);
   });
 
   it("keeps the name of the file, without its folders", async () => {

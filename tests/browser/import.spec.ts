@@ -36,8 +36,8 @@ test("a file that is no list says what it is and what to do, and changes nothing
   await open(page, `${kit}/parts/bring-in`);
   await choose(page, "parts.xlsx", Buffer.from([0x50, 0x4b, 3, 4, 20, 0]));
   const fault = page.getByRole("alert").filter({ hasText: "parts.xlsx" });
-  await expect(fault).toContainText("parts.xlsx is a spreadsheet workbook.");
-  await expect(fault).toContainText("Save it as CSV in your spreadsheet");
+  await expect(fault).toContainText("parts.xlsx is no workbook that can be read.");
+  await expect(fault).toContainText("XLSX and ODS can.");
   await choose(page, "nothing.csv", "");
   await expect(page.getByRole("alert").filter({ hasText: "nothing.csv holds no rows." })).toBeVisible();
   await choose(page, "huge.csv", Buffer.alloc(6 * 1024 * 1024, 65));

@@ -54,7 +54,7 @@ describe("what is no list", () => {
   it.each([
     ["upload-empty", new Uint8Array()],
     ["upload-empty", bytes(" \r\n\r\n", "utf8")],
-    ["upload-spreadsheet", Uint8Array.from([0x50, 0x4b, 0x03, 0x04, 20, 0, 6, 0])],
+    ["upload-archive", Uint8Array.from([0x50, 0x4b, 0x03, 0x04, 20, 0, 6, 0])],
     ["upload-old-spreadsheet", Uint8Array.from([0xd0, 0xcf, 0x11, 0xe0, 0xa1, 0xb1])],
     ["upload-not-text", bytes("%PDF-1.7\n1 0 obj", "ascii")],
     ["upload-not-text", Uint8Array.from({ length: 400 }, (_, at) => (at * 37) % 256)],

@@ -4,9 +4,10 @@ import { decodeUpload } from "../decode-upload.ts";
 import { newId } from "../new-id.ts";
 import type { Changing } from "../note-change.ts";
 import { Problem } from "../problem.ts";
-import { addImport, type ImportPlace } from "../store/import.ts";
+import { addImport, type ImportPlace, type NewImport } from "../store/import.ts";
 import { type ListShape, NO_DECISIONS } from "./list-draft.ts";
 import { readAside } from "./read-aside.ts";
+import { readWorkbookAside } from "./workbook-aside.ts";
 
 export const PASTED_NAME = "Pasted cells";
 
@@ -41,10 +42,24 @@ async function shapeOf(kind: ImportKind, name: string, text: string): Promise<Li
   return shape;
 }
 
+type UploadedText = Pick<NewImport, "content" | "encoding" | "sheets">;
+
+/** The text of an upload, or the cells of its first sheet with something in it. */
+async function readUpload(name: string, bytes: Uint8Array): Promise<UploadedText> {
+  const decodedList = decodeUpload(bytes);
+  if (decodedList.ok) return { content: decodedList.text, encoding: decodedList.encoding };
+  if (decodedList.code === "upload-too-large")
+    throw new Problem("too-large", { parameters: { limit: "5 MB" } });
+  if (decodedList.code !== "upload-archive") throw new Problem(decodedList.code, { parameters: { name } });
+  const book = await readWorkbookAside(bytes);
+  if (!book.ok) throw new Problem(book.code, { parameters: { name, most: "50 MB" } });
+  return { content: book.text, encoding: book.kind, sheets: { taken: book.taken, others: book.others } };
+}
+
 /**
  * Begins to bring in a list: its bytes are decoded and kept as a draft; nothing else is changed.
  *
- * @throws Problem upload-… for what is no list in plain text, or has more rows or columns than can be read.
+ * @throws Problem upload-… for what is neither a list in plain text nor a workbook, or has more rows or columns than can be read.
  */
 export async function beginDraft(
   { db, now, user, workshop }: Changing,
@@ -52,13 +67,8 @@ export async function beginDraft(
   name: string,
   bytes: Uint8Array,
 ): Promise<{ id: string }> {
-  const decodedList = decodeUpload(bytes);
-  if (!decodedList.ok) {
-    if (decodedList.code === "upload-too-large")
-      throw new Problem("too-large", { parameters: { limit: "5 MB" } });
-    throw new Problem(decodedList.code, { parameters: { name } });
-  }
-  const { rows, fingerprint } = await shapeOf(place.kind, name, decodedList.text);
+  const list = await readUpload(name, bytes);
+  const { rows, fingerprint } = await shapeOf(place.kind, name, list.content);
   const id = newId();
   addImport(db, {
     id,
@@ -67,9 +77,8 @@ export async function beginDraft(
     state: "draft",
     fileName: name,
     byteLength: bytes.byteLength,
-    encoding: decodedList.encoding,
+    ...list,
     contentHash: createHash("sha256").update(bytes).digest("hex"),
-    content: decodedList.text,
     rowCount: rows,
     fingerprint,
     answers: NO_DECISIONS,

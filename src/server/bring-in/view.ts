@@ -28,6 +28,8 @@ export interface FileView extends SheetView {
   name: string;
   bytes: number;
   encoding: string;
+  /** Of a workbook: the sheet that was read, and the others that hold something. */
+  sheets: { taken: string; others: string[] } | null;
   /** The list that was taken last, where this is the same text. */
   sameAs: { name: string; takenAt: number | null } | null;
 }
@@ -88,6 +90,7 @@ export function fileView(row: ImportHead, sheet: SheetView, last: ImportHead | u
     name: row.fileName,
     bytes: row.byteLength,
     encoding: row.encoding,
+    sheets: row.sheets,
     sameAs: same ? { name: last.fileName, takenAt: last.takenAt } : null,
   };
 }

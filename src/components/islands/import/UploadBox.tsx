@@ -18,7 +18,8 @@ type Step =
   | { kind: "sending"; name: string; progress: Sent | null }
   | { kind: "failed"; title: string; detail: string };
 
-const ACCEPT = ".csv,.tsv,.txt,.tab,.asc,text/csv,text/plain,text/tab-separated-values";
+const ACCEPT =
+  ".csv,.tsv,.txt,.tab,.asc,.xlsx,.xlsm,.ods,text/csv,text/plain,text/tab-separated-values,application/vnd.openxmlformats-officedocument.spreadsheetml.sheet,application/vnd.oasis.opendocument.spreadsheet";
 
 function tooLarge(file: File): string {
   return `${file.name} has ${sizeWords(file.size)}. At most 5 MB can be read.`;
@@ -92,8 +93,8 @@ export function UploadBox({
         picture={kits !== null && <DrawersPicture kits={kits} />}
       >
         <p>
-          {words.what} Any columns in any order; you say what each means. CSV, TSV or another plain text, to 5
-          MB and 20 000 rows. From a spreadsheet: save it as CSV, or copy the cells and paste them.
+          {words.what} Any columns in any order; you say what each means. CSV, TSV, XLSX or ODS, to{" "}
+          {"5\u00a0MB and 20\u00a0000 rows"}.
         </p>
       </DropArea>
       {pasting && <PasteBox onText={sendText} onLeave={() => setPasting(false)} />}

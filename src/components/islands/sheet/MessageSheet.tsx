@@ -168,8 +168,8 @@ export function MessageSheet() {
         onPaste={nothing}
         picture={<DrawersPicture kits={50} />}
       >
-        A bill of materials from your drawing program, or a spreadsheet saved as CSV or TSV, to 5 MB. Any
-        columns in any order; you say what each means.
+        A bill of materials from your drawing program, or a spreadsheet. Any columns in any order; you say
+        what each means. CSV, TSV, XLSX or ODS, to {"5\u00a0MB and 20\u00a0000 rows"}.
       </DropArea>
     </>
   );
