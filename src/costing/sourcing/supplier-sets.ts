@@ -1,0 +1,101 @@
+import type { Column } from "./columns.ts";
+import { fillSet } from "./fill-set.ts";
+import { isBeaten, type Search, spend } from "./search.ts";
+import { setNode } from "./set-node.ts";
+
+/**
+ * Goes through the sets of suppliers, depth first, passing over every branch whose bound leaves no room for a better
+ * plan: the least count of each part among the suppliers taken and those still to be decided, and the floors of
+ * those taken (and, where they lie below nothing, of those still to be decided).
+ *
+ * @param done a set, as a list of suppliers ascending, that was filled before
+ */
+export function searchSets(search: Search, columns: readonly Column[], done: string | null): void {
+  const { parts } = search.market;
+  const rest = restMinima(search, columns);
+  const taken = columns.map(() => new Float64Array(parts));
+  taken.push(new Float64Array(parts));
+  const start = taken[0] as Float64Array;
+  for (let part = 0; part < parts; part += 1)
+    start[part] = search.market.needed[part] === 1 ? search.omitted : 0;
+  const spare = columns.map((_, depth) =>
+    columns.slice(depth).reduce((sum, { line }) => sum + Math.min(0, line.floor), 0),
+  );
+  const chosen: Column[] = [];
+  const visit = (depth: number, least: Float64Array, floor: number, bound: number): void => {
+    if (chosen.length + columns.length - depth < search.leastParcels) return;
+    if (isBeaten(search, bound) || !spend(search, 1, bound)) return;
+    const column = columns[depth];
+    if (column === undefined) {
+      fillChosen(search, chosen, bound, done);
+      return;
+    }
+    const next = taken[depth + 1] as Float64Array;
+    const later = floor + (spare[depth + 1] ?? 0);
+    if (chosen.length < search.mostParcels) {
+      chosen.push(column);
+      const withIt = takeColumn(least, column.counts, rest[depth + 1] as Float64Array, next);
+      visit(depth + 1, next, floor + column.line.floor, later + column.line.floor + withIt);
+      chosen.pop();
+    }
+    next.set(least);
+    visit(depth + 1, next, floor, later + sumOfLeast(least, rest[depth + 1] as Float64Array));
+  };
+  visit(0, start, 0, (spare[0] ?? 0) + sumOfLeast(start, rest[0] as Float64Array));
+}
+
+/** From each depth on, the least count of every part among the suppliers still to be decided. */
+function restMinima(search: Search, columns: readonly Column[]): Float64Array[] {
+  const rest = [new Float64Array(search.market.parts).fill(search.omitted)];
+  for (const { counts } of columns.toReversed()) {
+    const after = rest[0] as Float64Array;
+    rest.unshift(after.map((least, part) => Math.min(least, counts[part] as number)));
+  }
+  return rest;
+}
+
+/** Adds a column to the least counts so far, and gives the sum of the least with those still to come. */
+function takeColumn(
+  least: Float64Array,
+  counts: Float64Array,
+  rest: Float64Array,
+  next: Float64Array,
+): number {
+  let sum = 0;
+  for (let part = 0; part < least.length; part += 1) {
+    const now = Math.min(least[part] as number, counts[part] as number);
+    next[part] = now;
+    sum += Math.min(now, rest[part] as number);
+  }
+  return sum;
+}
+
+function sumOfLeast(least: Float64Array, rest: Float64Array): number {
+  let sum = 0;
+  for (let part = 0; part < least.length; part += 1)
+    sum += Math.min(least[part] as number, rest[part] as number);
+  return sum;
+}
+
+function fillChosen(search: Search, chosen: readonly Column[], bound: number, done: string | null): void {
+  if (done === setKey(chosen)) return;
+  const sorted = chosen.toSorted((a, b) => a.reach.supplier - b.reach.supplier);
+  const reaches = sorted.map(({ reach }) => reach);
+  fillSet(
+    search,
+    setNode(
+      search,
+      reaches,
+      sorted.map(({ line }) => line),
+      bound,
+    ),
+  );
+}
+
+/** A set by its suppliers, ascending. */
+export function setKey(columns: readonly Column[]): string {
+  return columns
+    .map(({ reach }) => reach.supplier)
+    .sort((a, b) => a - b)
+    .join();
+}
