@@ -24,10 +24,16 @@ export interface NameBox {
   bottom: number;
 }
 
-const overlap = (one: NameBox, other: NameBox) =>
-  one.left < other.right && other.left < one.right && one.top < other.bottom && other.top < one.bottom;
+/** Room for a name of one or more lines at 15 px, by its longest line. */
+export function nameWidth(...lines: readonly string[]): number {
+  return Math.max(...lines.map(({ length }) => length)) * 7.8;
+}
+
+export function overlaps(one: NameBox, other: NameBox): boolean {
+  return one.left < other.right && other.left < one.right && one.top < other.bottom && other.top < one.bottom;
+}
 
 /** The first of the wanted places whose box is free of all that is taken; the first where none is. */
 export function freePlace<T extends NameBox>(wanted: readonly T[], taken: readonly NameBox[]): T | undefined {
-  return wanted.find((box) => taken.every((other) => !overlap(box, other))) ?? wanted[0];
+  return wanted.find((box) => taken.every((other) => !overlaps(box, other))) ?? wanted[0];
 }

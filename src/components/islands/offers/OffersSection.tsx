@@ -15,7 +15,7 @@ import type { OfferView } from "#src/server/offer-changes.ts";
 import { chooseFor } from "./choose-offer.ts";
 import type { KitSupply, KitSupplyProps } from "./kit-supply.ts";
 import { blankOffer, OfferForm, offerFields } from "./OfferForm.tsx";
-import { type OfferRow, OfferTable } from "./OfferTable.tsx";
+import { OfferTable, type ReckonedOffer } from "./OfferTable.tsx";
 import { lineText } from "./offer-words.ts";
 import { addOffer, changeOffer, removeOffer } from "./offers-store.ts";
 
@@ -95,7 +95,7 @@ export function OffersSection({ props, supply, part, line }: OffersSectionProps)
 }
 
 /** In the order of the reckoning; an offer it has not seen yet comes last. */
-function rowsOf(supply: KitSupply, line: PartLine, part: OfferPart): OfferRow[] {
+function rowsOf(supply: KitSupply, line: PartLine, part: OfferPart): ReckonedOffer[] {
   return line.considered.flatMap((considered) => {
     const offer = supply.offers.find(({ id, partId }) => id === considered.offer && partId === part.id);
     return offer ? [{ offer, considered, supplier: supply.supplier(offer.supplierId) }] : [];

@@ -16,45 +16,24 @@ export interface CurveRow {
 /** Enough points that a straight line between two is the price. */
 const POINTS = 240;
 
-/** Round steps of an axis, so that there are four to seven of them. */
-function roundStep(reach: number): number {
-  const size = 10 ** Math.floor(Math.log10(reach / 4));
-  return ([1, 2, 5, 10].find((step) => reach / (step * size) <= 7) ?? 10) * size;
+/** How far the chart goes: the numbers one would think of, past what is needed and what is ordered. */
+export function curveEnd(need: number, ordered: number): number {
+  return Math.max(Math.ceil(Math.max(need, ordered) * 1.6), 10);
 }
 
-/** Ticks of an axis from 0 to at least `reach`, at least `least` apart. */
-export function roundTicks(reach: number, least = 1): number[] {
-  const step = Math.max(least, roundStep(Math.max(reach, least)));
-  return Array.from({ length: Math.ceil(reach / step) + 1 }, (_, place) => place * step);
-}
-
-/** How far the chart goes: past what is ordered and past the next break. */
-export function curveEnd(terms: LadderTerms, need: number, ordered: number): number {
-  const next = terms.breaks.map(({ quantity }) => quantity).filter((quantity) => quantity > ordered);
-  return Math.max(need * 1.6, ordered * 1.6, Math.min(...next, ordered * 2), 10);
-}
-
-/** Quantities at which the chart has points: even steps, each break, and the last piece before it. */
+/** Numbers that can be bought, and have a point: whole packs, or even steps with each break and the last piece before it. */
 function quantitiesUpTo(terms: LadderTerms, end: number): number[] {
-  const step = Math.max(1, Math.floor(end / POINTS));
-  const even = Array.from({ length: Math.floor(end / step) + 1 }, (_, place) => place * step);
-  const edges = terms.breaks.flatMap(({ quantity }) => [quantity - 1, quantity, quantity + 1]);
-  return [...new Set([1, ...even, ...edges, ...packEdges(terms, end), end])]
-    .filter((quantity) => quantity >= 1 && quantity <= end)
+  const { orderMultiple, minimumOrder, breaks } = terms;
+  const pack = orderMultiple * Math.max(1, Math.ceil(end / orderMultiple / POINTS));
+  const even = Array.from({ length: Math.floor(end / pack) }, (_, place) => (place + 1) * pack);
+  const edges =
+    orderMultiple > 1 ? [] : breaks.flatMap(({ quantity }) => [quantity - 1, quantity, quantity + 1]);
+  return [...new Set([minimumOrder, ...even, ...edges])]
+    .filter((quantity) => quantity >= minimumOrder && quantity <= end && quantity % orderMultiple === 0)
     .sort((a, b) => a - b);
 }
 
-/** The ends of packs, where the cost steps up; none where the packs are too small to be seen. */
-function packEdges({ orderMultiple }: LadderTerms, end: number): number[] {
-  const packs = Math.floor(end / orderMultiple);
-  if (orderMultiple === 1 || packs > POINTS / 2) return [];
-  return Array.from({ length: packs }, (_, place) => (place + 1) * orderMultiple).flatMap((pack) => [
-    pack,
-    pack + 1,
-  ]);
-}
-
-/** What any number costs, from one piece to `end`. */
+/** What any number that can be bought costs, up to `end` pieces. */
 export function curveRows(terms: LadderTerms, end: number): CurveRow[] {
   const rows = orderCurve(terms, quantitiesUpTo(terms, end)).map((point): CurveRow => {
     const [pays, listed] = [Number(point.pays), Number(point.listed)];
@@ -69,11 +48,30 @@ export function curveRows(terms: LadderTerms, end: number): CurveRow[] {
       listedText: point.listed,
     };
   });
-  // The area begins and ends on the line of what is paid.
+  // The area begins on the line of what is paid, and ends upright at the break.
   return rows.map((row, place) => {
-    const before = rows[place - 1]?.saved ?? null;
-    const after = rows[place + 1]?.saved ?? null;
-    if (row.saved || (!before && !after)) return row;
+    if (row.saved || !rows[place + 1]?.saved) return row;
     return { ...row, listed: row.pays, saved: [row.pays, row.pays] };
+  });
+}
+
+/** A stretch of the line on which each piece costs the same. */
+export interface PriceStretch {
+  price: string;
+  from: number;
+  to: number;
+}
+
+/** Where the price of each break is paid, piece by piece, up to `end`; none where prices are not for the whole order. */
+export function priceStretches(terms: LadderTerms, rows: readonly CurveRow[]): PriceStretch[] {
+  if (terms.priceModel !== "whole-order") return [];
+  const rungs = terms.breaks.toSorted((a, b) => a.quantity - b.quantity);
+  return rungs.flatMap(({ quantity, price }, place) => {
+    const next = rungs[place + 1]?.quantity ?? Number.POSITIVE_INFINITY;
+    const own = rows.filter(
+      (row) => row.quantity >= quantity && row.quantity < next && row.order === row.quantity,
+    );
+    const [first, last] = [own[0], own.at(-1)];
+    return first && last && first !== last ? [{ price, from: first.quantity, to: last.quantity }] : [];
   });
 }

@@ -52,7 +52,7 @@ export interface CostChartProps {
 }
 
 const TITLE = axisTitle("kits in the run");
-const MARGIN = { top: 12, right: 20, bottom: 0, left: 0 };
+const MARGIN = { top: 12, right: 20, bottom: 4, left: 0 };
 const NARROW_MARGIN = { ...MARGIN, right: 8 };
 const drawLine = (line: object) => <BrokenLine {...line} />;
 

@@ -9,11 +9,11 @@ import {
   RUN_RING,
   SPOT_RING,
 } from "#src/components/islands/chart-theme.ts";
-import type { NameBox } from "#src/components/islands/charts/label-room.ts";
+import { type NameBox, nameWidth } from "#src/components/islands/charts/label-room.ts";
 import type { Pixels } from "#src/components/islands/charts/pixels.ts";
 import type { CostChartProps } from "./CostChart.tsx";
 import { useChartScale } from "./chart-scale.ts";
-import { nameWidth, type PlacedName, ringNames } from "./cost-names.ts";
+import { type PlacedName, ringNames } from "./cost-names.ts";
 import type { UnitCostRange } from "./cost-points.ts";
 import type { StepNote } from "./step-note.ts";
 

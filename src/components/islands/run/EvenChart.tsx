@@ -49,7 +49,7 @@ export interface EvenChartProps {
 }
 
 const TITLE = axisTitle("kits made and sold");
-const MARGIN = { top: 12, right: 20, bottom: 0, left: 0 };
+const MARGIN = { top: 12, right: 20, bottom: 4, left: 0 };
 const NARROW_MARGIN = { ...MARGIN, right: 8 };
 const drawLine = (line: object) => <BrokenLine {...line} />;
 const drawWhole = (line: object) => <BrokenLine {...line} whole />;

@@ -1,4 +1,4 @@
-import type { NameBox } from "#src/components/islands/charts/label-room.ts";
+import { type NameBox, nameWidth, overlaps } from "#src/components/islands/charts/label-room.ts";
 import type { Pixels } from "#src/components/islands/charts/pixels.ts";
 
 /** A ring whose run and cost want to stand beside it. */
@@ -17,15 +17,6 @@ export interface PlacedName extends NamedRing {
 }
 
 const HEIGHT = 38;
-
-/** Room for a name of so many letters at 15 px. */
-export function nameWidth(...lines: readonly string[]): number {
-  return Math.max(...lines.map(({ length }) => length)) * 7.8;
-}
-
-export function overlaps(one: NameBox, other: NameBox): boolean {
-  return one.left < other.right && other.left < one.right && one.top < other.bottom && other.top < one.bottom;
-}
 
 /** Below left of a ring, where a falling line leaves room; else above right. */
 function places(ring: NamedRing): { box: NameBox; anchor: "start" | "end" }[] {

@@ -1,8 +1,7 @@
 import { moneyText } from "#src/components/amount-text.ts";
-import { freePlace, type NameBox } from "#src/components/islands/charts/label-room.ts";
+import { freePlace, type NameBox, nameWidth } from "#src/components/islands/charts/label-room.ts";
 import type { Pixels } from "#src/components/islands/charts/pixels.ts";
 import type { ChartScale } from "./chart-scale.ts";
-import { nameWidth } from "./cost-names.ts";
 import type { CostPoint } from "./cost-points.ts";
 import type { EvenChartProps } from "./EvenChart.tsx";
 import { type ChartPlace, type GainArea, meeting } from "./even-shapes.ts";
