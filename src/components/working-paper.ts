@@ -28,6 +28,8 @@ export type Paper = {
   lines: readonly PaperLine[];
   /** Rounding and rules, once each, in words. */
   notes: readonly string[];
+  /** Pages that explain the rules it follows. */
+  methods: readonly PaperSource[];
   /** "Worked at 14:32 from rev C and the prices of 9 March." */
   foot: string;
 };

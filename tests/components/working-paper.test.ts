@@ -21,6 +21,7 @@ const PAPER: Paper = {
     { letter: "e", label: "Cost per kit", sign: "=", amount: "14.95", result: true },
   ],
   notes: ["c ÷ d is 14.9471, written to the nearest cent."],
+  methods: [],
   foot: "Worked at 14:32.",
 };
 

@@ -6,6 +6,7 @@ import {
   unitPriceText,
 } from "#src/components/amount-text.ts";
 import type { KitAddress } from "#src/components/islands/kit-address.ts";
+import { methodLinks } from "#src/components/method-links.ts";
 import type { Paper, PaperLine, PaperSub } from "#src/components/working-paper.ts";
 import { roundedText } from "#src/costing/decimal.ts";
 import { needWords } from "#src/costing/problem-words.ts";
@@ -20,12 +21,13 @@ import type {
 import { pageLink } from "./page-links.ts";
 
 export interface PaperContext {
-  address: KitAddress;
+  /** The kit whose pages the amounts come from; `null`: they lead nowhere. */
+  address: KitAddress | null;
   currency: string;
-  /** "14:32". */
-  time: string;
-  /** Opens another figure from a line. */
-  open: (figure: FigureId) => void;
+  /** "14:32"; `null` where it was not worked out for anybody in particular. */
+  time: string | null;
+  /** Opens another figure from a line; `null`: none opens. */
+  open: ((figure: FigureId) => void) | null;
 }
 
 /** Decimals of a plain number such as hours or a learning factor. */
@@ -57,10 +59,11 @@ function written(amount: WorkingAmount, currency: string): string {
 }
 
 function source(from: WorkingSource | null, { address }: PaperContext) {
-  return from ? pageLink(address, from.page) : undefined;
+  return from && address ? pageLink(address, from.page) : undefined;
 }
 
-const opener = (opens: FigureId | null, { open }: PaperContext) => (opens ? () => open(opens) : undefined);
+const opener = (opens: FigureId | null, { open }: PaperContext) =>
+  opens && open ? () => open(opens) : undefined;
 
 function paperSub(sub: WorkingSub, context: PaperContext): PaperSub {
   return {
@@ -117,6 +120,7 @@ export function workingOnPaper(tree: WorkingTree, context: PaperContext): Paper 
     basis: tree.basis,
     lines: tree.lines.map((line, place) => paperLine(line, tree.lines[place - 1], context)),
     notes: tree.notes,
-    foot: `Worked at ${context.time}${from.length > 0 ? ` from ${from.join(" and ")}` : ""}.`,
+    methods: methodLinks(tree.lines.map(({ rule }) => rule)),
+    foot: `Worked ${[context.time && `at ${context.time}`, from.length > 0 && `from ${from.join(" and ")}`].filter(Boolean).join(" ")}.`,
   };
 }

@@ -1,4 +1,5 @@
 import { useState } from "react";
+import { methodLinks } from "#src/components/method-links.ts";
 import type { Paper } from "#src/components/working-paper.ts";
 import { Button } from "../parts/Button.tsx";
 import { type TallyCell, TallyStrip } from "../parts/TallyStrip.tsx";
@@ -55,6 +56,7 @@ const PAPER: Paper = {
     { letter: "h", label: "Cost per kit", sign: "=", amount: "14.95", result: true },
   ],
   notes: ["f ÷ g is 14.9471, written to the nearest cent."],
+  methods: methodLinks(["8"]),
   foot: "Worked at 14:32 from rev C and the prices of 9 March.",
 };
 
