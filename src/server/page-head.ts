@@ -36,6 +36,7 @@ function yours(db: Db, user: UserRow, here: string): PageHead["yours"] {
   const others = workshopsOf(db, user.id).filter(({ workshop }) => workshop.id !== here);
   return [
     { label: "Your account", href: "/account" },
+    { label: "How it is reckoned", href: "/methods" },
     ...others.map(({ workshop }) => ({ label: workshop.name, href: `/workshops/${workshop.id}` })),
   ];
 }
