@@ -1,5 +1,5 @@
 import { useState } from "react";
-import { countText, moneyText, rateText, unitPriceText } from "#src/components/amount-text.ts";
+import { countText, rateText } from "#src/components/amount-text.ts";
 import type { KitAddress } from "#src/components/islands/kit-address.ts";
 import { ShowWorking } from "#src/components/islands/parts/ShowWorking.tsx";
 import { type Column, Table } from "#src/components/islands/parts/Table.tsx";
@@ -8,7 +8,6 @@ import { editField } from "#src/components/islands/plan/edit-plan.ts";
 import { useOpens } from "#src/components/islands/plan/open-working.ts";
 import { exact, roundedText } from "#src/costing/decimal.ts";
 import { enoughGood } from "#src/costing/enough-boards.ts";
-import { type NextBoards, nextBoards } from "#src/costing/next-boards.ts";
 import type { BoardsResult } from "#src/costing/run-result.ts";
 import { shiftDecimal } from "#src/partslist/exact-decimal.ts";
 import { readNumber } from "#src/partslist/numbers.ts";
@@ -139,7 +138,7 @@ function ChanceTable({ boards, toOrder }: { boards: BoardsResult; toOrder: numbe
   const first = Math.max(boards.required, toOrder - 2);
   const rows = Array.from({ length: 5 }, (_, place) => first + place);
   const columns: Column<number>[] = [
-    { key: "ordered", head: "Boards ordered", number: true, names: true, cell: countText },
+    { key: "ordered", head: "Boards ordered", names: true, cell: countText },
     {
       key: "chance",
       head: "Enough are good",
@@ -148,7 +147,7 @@ function ChanceTable({ boards, toOrder }: { boards: BoardsResult; toOrder: numbe
     },
   ];
   return (
-    <div className="max-w-[420px]">
+    <div className="max-w-[360px]">
       <Table
         caption="Chance that enough boards are good"
         height="dense"
@@ -166,55 +165,4 @@ function inHundred(chance: string): string {
   const hundredths = exact(chance).times(100).toFixed();
   if (exact(hundredths).lte(99)) return `${roundedText(hundredths, 0)} in 100`;
   return exact(hundredths).gte("99.95") ? "all but surely" : `${roundedText(hundredths, 1)} in 100`;
-}
-
-/** What the next lots would really add; often the first extra boards cost nothing. */
-export function NextLots({ plan, boards }: { plan: Plan; boards: BoardsResult }) {
-  const chosen = boards.quotes.find(({ id }) => id === boards.chosen);
-  const quote = plan.boards.quotes.find(({ id }) => id === boards.chosen);
-  if (!chosen?.ordered || !quote || boards.toOrder === null) return null;
-  const free = chosen.ordered - boards.toOrder;
-  const rows = nextBoards(quote, chosen.ordered, 3);
-  const { currency } = quote;
-  const columns: Column<NextBoards>[] = [
-    {
-      key: "ordered",
-      head: "Order instead",
-      number: true,
-      names: true,
-      cell: ({ ordered }) => countText(ordered),
-    },
-    { key: "more", head: "More boards", number: true, cell: ({ more }) => countText(more) },
-    {
-      key: "total",
-      head: "In all",
-      number: true,
-      wide: true,
-      cell: ({ total }) => moneyText(total, currency),
-    },
-    { key: "adds", head: "Adds", number: true, cell: ({ adds }) => moneyText(adds, currency) },
-    {
-      key: "each",
-      head: "Each of them",
-      number: true,
-      cell: ({ addsEach }) => unitPriceText(roundedText(addsEach, 3), currency),
-    },
-  ];
-  return (
-    <>
-      <p className="mb-3">
-        {free > 0
-          ? `${countText(free)} more than must be ordered come with it, at no extra cost: ${countText(chosen.ordered)} are the cheapest way to have ${countText(boards.toOrder)}.`
-          : `${countText(chosen.ordered)} are ordered, exactly as many as must be.`}
-      </p>
-      {rows.length > 0 && (
-        <Table
-          caption="The next larger orders"
-          rows={rows}
-          columns={columns}
-          keyOf={({ ordered }) => String(ordered)}
-        />
-      )}
-    </>
-  );
 }

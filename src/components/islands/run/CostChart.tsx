@@ -22,10 +22,10 @@ import {
   X_AXIS,
   Y_AXIS,
 } from "#src/components/islands/chart-theme.ts";
+import { BrokenLine } from "#src/components/islands/charts/BrokenLine.tsx";
+import { ChartTip } from "#src/components/islands/charts/ChartTip.tsx";
 import { roundTicks } from "#src/components/islands/charts/round-ticks.ts";
 import { useAxisMoney, useStable } from "#src/components/islands/charts/stable.ts";
-import { BrokenLine } from "./BrokenLine.tsx";
-import { ChartTip } from "./ChartTip.tsx";
 import { CostMarks } from "./CostMarks.tsx";
 import { type CostPoint, pixels, type Span, unitCostRange } from "./cost-points.ts";
 import type { StepNote } from "./step-note.ts";
@@ -54,7 +54,9 @@ export interface CostChartProps {
 const TITLE = axisTitle("kits in the run");
 const MARGIN = { top: 12, right: 20, bottom: 4, left: 0 };
 const NARROW_MARGIN = { ...MARGIN, right: 8 };
-const drawLine = (line: object) => <BrokenLine {...line} />;
+const drawLine = (line: object) => (
+  <BrokenLine {...line} breaksAfter={(row) => (row as CostPoint).breaksAfter} />
+);
 
 /** Cost of one kit against run size. */
 export function CostChart(props: CostChartProps) {
@@ -102,7 +104,7 @@ function useTip({ view, brings, currency }: CostChartProps) {
     (tip: object) => {
       const written = (value: string | null) => (value === null ? "not known" : moneyText(value, currency));
       return (
-        <ChartTip
+        <ChartTip<CostPoint>
           {...tip}
           lines={({ exact }) => [
             { name: `One kit, ${view}`, figure: written(exact.perKit) },

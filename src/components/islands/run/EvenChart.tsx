@@ -20,11 +20,11 @@ import {
   X_AXIS,
   Y_AXIS,
 } from "#src/components/islands/chart-theme.ts";
+import { BrokenLine } from "#src/components/islands/charts/BrokenLine.tsx";
+import { ChartTip } from "#src/components/islands/charts/ChartTip.tsx";
 import { axisTicks, roundTicks } from "#src/components/islands/charts/round-ticks.ts";
 import { useAxisMoney, useStable } from "#src/components/islands/charts/stable.ts";
 import { HatchDefs } from "#src/components/islands/parts/HatchDefs.tsx";
-import { BrokenLine } from "./BrokenLine.tsx";
-import { ChartTip } from "./ChartTip.tsx";
 import type { CostPoint, Span } from "./cost-points.ts";
 import { EvenAreas } from "./EvenAreas.tsx";
 import { EvenMarks } from "./EvenMarks.tsx";
@@ -51,8 +51,10 @@ export interface EvenChartProps {
 const TITLE = axisTitle("kits made and sold");
 const MARGIN = { top: 12, right: 20, bottom: 4, left: 0 };
 const NARROW_MARGIN = { ...MARGIN, right: 8 };
-const drawLine = (line: object) => <BrokenLine {...line} />;
-const drawWhole = (line: object) => <BrokenLine {...line} whole />;
+const drawLine = (line: object) => (
+  <BrokenLine {...line} breaksAfter={(row) => (row as CostPoint).breaksAfter} />
+);
+const drawWhole = (line: object) => <BrokenLine {...line} />;
 
 /** Takings against total cost, if every kit sells. */
 export function EvenChart(props: EvenChartProps) {
@@ -102,7 +104,7 @@ function useTip(currency: string) {
     (tip: object) => {
       const written = (value: string | null) => (value === null ? "not known" : moneyText(value, currency));
       return (
-        <ChartTip
+        <ChartTip<CostPoint>
           {...tip}
           lines={({ exact }) => [
             { name: "Takings", figure: written(exact.kept) },

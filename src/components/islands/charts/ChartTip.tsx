@@ -1,6 +1,5 @@
 import { TOOLTIP_LOOK } from "#src/components/islands/chart-theme.ts";
 import { RunBands } from "#src/components/islands/parts/Bands.tsx";
-import type { CostPoint } from "./cost-points.ts";
 
 export interface TipLine {
   name: string;
@@ -8,17 +7,17 @@ export interface TipLine {
 }
 
 /** What Recharts hands to the content of a tooltip, as far as it is used here. */
-export interface TipProps {
+export interface TipProps<Point> {
   active?: boolean;
-  payload?: readonly { payload?: CostPoint }[];
+  payload?: readonly { payload?: Point }[];
 }
 
 /** The figures of the run size under the cursor; it follows the arrow keys too and is read out. */
-export function ChartTip({
+export function ChartTip<Point extends { kits: number }>({
   active,
   payload,
   lines,
-}: TipProps & { lines: (point: CostPoint) => readonly TipLine[] }) {
+}: TipProps<Point> & { lines: (point: Point) => readonly TipLine[] }) {
   const point = payload?.[0]?.payload;
   if (!active || !point) return null;
   return (

@@ -1,12 +1,12 @@
 import { useId } from "react";
 import { usePlotArea } from "recharts";
 import { STEP_SEGMENT } from "#src/components/islands/chart-theme.ts";
-import type { CostPoint } from "./cost-points.ts";
 
 interface DrawnPoint {
   x: number | null;
   y: number | null;
-  payload?: CostPoint;
+  /** The row that the point is drawn from; it may say that the line breaks after it. */
+  payload?: object;
 }
 
 /** What Recharts hands to the shape of a line. */
@@ -14,15 +14,18 @@ export interface BrokenLineProps {
   points?: readonly DrawnPoint[];
   stroke?: string;
   strokeWidth?: number | string;
-  /** Drawn without breaks: takings do not step when cost does. */
-  whole?: boolean;
+  /** Whether the line breaks after a row of the data; left out, it never does. */
+  breaksAfter?: (row: object) => boolean;
 }
 
 type Placed = { x: number; y: number; breaks: boolean };
 
-function placed(points: readonly DrawnPoint[], whole: boolean): (Placed | null)[] {
+function placed(
+  points: readonly DrawnPoint[],
+  breaksAfter: BrokenLineProps["breaksAfter"],
+): (Placed | null)[] {
   return points.map(({ x, y, payload }) =>
-    x === null || y === null ? null : { x, y, breaks: !whole && (payload?.breaksAfter ?? false) },
+    x === null || y === null ? null : { x, y, breaks: (payload && breaksAfter?.(payload)) ?? false },
   );
 }
 
@@ -41,8 +44,8 @@ function paths(points: readonly (Placed | null)[]): { line: string; steps: [Plac
 }
 
 /** A line that breaks where cost goes up in a step, its two ends joined by a fine dashed one. */
-export function BrokenLine({ points = [], stroke, strokeWidth, whole = false }: BrokenLineProps) {
-  const { line, steps } = paths(placed(points, whole));
+export function BrokenLine({ points = [], stroke, strokeWidth, breaksAfter }: BrokenLineProps) {
+  const { line, steps } = paths(placed(points, breaksAfter));
   const plot = usePlotArea();
   const clip = useId();
   return (

@@ -1,0 +1,118 @@
+import { useCallback } from "react";
+import {
+  CartesianGrid,
+  DefaultZIndexes,
+  Line,
+  LineChart,
+  ReferenceLine,
+  Tooltip,
+  XAxis,
+  YAxis,
+  ZIndexLayer,
+} from "recharts";
+import { moneyText } from "#src/components/amount-text.ts";
+import {
+  axisTitle,
+  COST_LINE,
+  CURSOR,
+  GRID,
+  INK,
+  INK_2,
+  RUN_LINE,
+  X_AXIS,
+  Y_AXIS,
+} from "#src/components/islands/chart-theme.ts";
+import { BrokenLine } from "#src/components/islands/charts/BrokenLine.tsx";
+import { ChartTip } from "#src/components/islands/charts/ChartTip.tsx";
+import { nameWidth } from "#src/components/islands/charts/label-room.ts";
+import { roundTicks } from "#src/components/islands/charts/round-ticks.ts";
+import { useAxisMoney, useStable } from "#src/components/islands/charts/stable.ts";
+import { BoardsMarks } from "./BoardsMarks.tsx";
+import { type BoardsPoint, type BoardsPoints, boardsTop } from "./boards-points.ts";
+
+export interface BoardsChartProps extends BoardsPoints {
+  span: { from: number; to: number };
+  run: number;
+  width: number;
+  height: number;
+  narrow: boolean;
+  currency: string;
+}
+
+const TITLE = axisTitle("kits in the run");
+/** Names stand at the ends of their lines; a longer one is cut. */
+const NAME_MOST = 16;
+
+export function shortName(name: string): string {
+  return name.length > NAME_MOST ? `${name.slice(0, NAME_MOST - 2)} …` : name;
+}
+
+/** Landed cost of one board in a kit by run size, a line for each board house. */
+export default function BoardsChart(props: BoardsChartProps) {
+  const { lines, points, span, run, width, height, narrow } = props;
+  const top = boardsTop(props, run);
+  const ticks = useStable(roundTicks(0, top, 6));
+  const names = nameWidth("", ...lines.map(({ name }) => shortName(name)));
+  return (
+    <LineChart
+      {...{ width, height }}
+      data={points as BoardsPoint[]}
+      margin={{ top: 12, right: names + 14, bottom: 4, left: 0 }}
+      aria-label={`A board at any run, from ${span.from} to ${span.to} kits. Arrow keys go from run size to run size.`}
+    >
+      <CartesianGrid {...GRID} syncWithTicks />
+      <XAxis
+        {...X_AXIS}
+        dataKey="kits"
+        domain={useStable([span.from, span.to])}
+        ticks={useStable(roundTicks(span.from, span.to, narrow ? 4 : 9))}
+        label={TITLE}
+      />
+      <YAxis
+        {...Y_AXIS}
+        domain={useStable([0, top])}
+        ticks={ticks}
+        width={narrow ? 46 : Y_AXIS.width}
+        allowDataOverflow
+        tickFormatter={useAxisMoney(ticks, props.currency)}
+      />
+      <ReferenceLine x={run} {...RUN_LINE} />
+      {[...lines]
+        .sort((one, other) => Number(one.chosen) - Number(other.chosen))
+        .map(({ id, chosen }) => (
+          <Line
+            key={id}
+            {...COST_LINE}
+            name={id}
+            dataKey={({ each }: BoardsPoint) => each[id]}
+            stroke={chosen ? INK : INK_2}
+            strokeWidth={chosen ? COST_LINE.strokeWidth : 1.25}
+            shape={(line: object) => (
+              <BrokenLine {...line} breaksAfter={(row) => (row as BoardsPoint).breaks[id] ?? false} />
+            )}
+          />
+        ))}
+      <ZIndexLayer zIndex={DefaultZIndexes.scatter}>
+        <BoardsMarks {...props} />
+      </ZIndexLayer>
+      <Tooltip cursor={CURSOR} isAnimationActive={false} content={useTip(props)} />
+    </LineChart>
+  );
+}
+
+function useTip({ lines, currency }: BoardsChartProps) {
+  return useCallback(
+    (tip: object) => (
+      <ChartTip<BoardsPoint>
+        {...tip}
+        lines={({ exact }) =>
+          lines.map(({ id, name }) => {
+            const value = exact[id] ?? null;
+            return { name, figure: value === null ? "not known" : moneyText(value, currency) };
+          })
+        }
+      />
+    ),
+    [lines, currency],
+  );
+}
