@@ -44,12 +44,15 @@ export function orderBoards(quote: PreparedQuote, toOrder: number): BoardChoice 
 
 function better(a: BoardChoice, b: BoardChoice): boolean {
   if ((a.quote.freight === null) !== (b.quote.freight === null)) return a.quote.freight !== null;
-  const [left, right] = [a, b].map(({ charged, quote }) => charged + (quote.freight ?? 0)) as [
-    number,
-    number,
-  ];
-  const byCost = compareWorth(left, a.quote.worth as MinorWorth, right, b.quote.worth as MinorWorth);
-  const byNames = () =>
-    byText(a.quote.quote.boardHouse, b.quote.quote.boardHouse) || byText(a.quote.quote.id, b.quote.quote.id);
-  return (byCost || a.order.quantity - b.order.quantity || byNames()) < 0;
+  const byCost = compareWorth(
+    a.charged + (a.quote.freight ?? 0),
+    a.quote.worth as MinorWorth,
+    b.charged + (b.quote.freight ?? 0),
+    b.quote.worth as MinorWorth,
+  );
+  return (byCost || a.order.quantity - b.order.quantity || byHouse(a.quote, b.quote)) < 0;
+}
+
+function byHouse(a: PreparedQuote, b: PreparedQuote): number {
+  return byText(a.quote.boardHouse, b.quote.boardHouse) || byText(a.quote.id, b.quote.id);
 }

@@ -53,18 +53,15 @@ function added(a: readonly bigint[], b: readonly bigint[]): bigint[] {
 }
 
 function directCosts(prepared: PreparedPlan, sheet: RunSheet): Record<DirectCost, bigint[]> {
-  const { plan } = prepared;
   const { kitsOf, money } = sheet;
   const none = kitsOf.map(() => 0n);
-  const has = (editions: readonly string[] | null) =>
-    plan.editions.map(({ id }) => Number(editions === null || editions.includes(id)));
   return {
     boards: shared(money.boards, kitsOf, prepared.boardsPerKit),
     parts: prepared.parts
       .map(({ perKit }, index) => shared(partMoney(prepared, sheet, index).goods, kitsOf, perKit))
       .reduce(added, none),
-    packing: plan.packing
-      .map((item) => shared(packingCost(plan, item, kitsOf) ?? 0n, kitsOf, has(item.editions)))
+    packing: prepared.packing
+      .map((packing) => shared(packingCost(packing, kitsOf) ?? 0n, kitsOf, packing.applies.map(Number)))
       .reduce(added, none),
     making: prepared.tasks
       .map((task) => shared(makingCost(prepared, sheet, task), kitsOf, task.applies.map(Number)))
@@ -74,11 +71,11 @@ function directCosts(prepared: PreparedPlan, sheet: RunSheet): Record<DirectCost
 }
 
 function makingCost(
-  { plan }: PreparedPlan,
+  { hourRate }: PreparedPlan,
   { kitsOf }: RunSheet,
   task: PreparedPlan["tasks"][number],
 ): bigint {
-  return workCost(plan, taskMinutes(task, kitsOf).making) ?? 0n;
+  return workCost(hourRate, taskMinutes(task, kitsOf).making) ?? 0n;
 }
 
 /** Cost of setting up: what work costs beyond making. */

@@ -26,9 +26,19 @@ export function grains(text: string): bigint {
  */
 export function scaled(text: string, places: number): bigint {
   const negative = text.startsWith("-");
-  const [whole = "0", fraction = ""] = (negative ? text.slice(1) : text).split(".");
-  const value = BigInt(whole + fraction.padEnd(places, "0"));
+  const value = BigInt(scaledDigits(negative ? text.slice(1) : text, places));
   return negative ? -value : value;
+}
+
+/**
+ * The digits of decimal text without sign times 10^places.
+ *
+ * @example scaledDigits("0.062", 6) === "0062000"
+ */
+export function scaledDigits(text: string, places: number): string {
+  const point = text.indexOf(".");
+  if (point < 0) return text + "0".repeat(places);
+  return text.slice(0, point) + text.slice(point + 1).padEnd(places, "0");
 }
 
 /**

@@ -57,20 +57,21 @@ function headLines(
   id: HeadId,
   baskets: readonly Basket[],
 ): HeadLine[] {
-  const { plan } = prepared;
   if (id === "boards") return boardLines(sheet);
   if (id === "parts") return partLines(prepared, sheet);
   if (id === "freight") return freightLines(sheet, baskets);
   if (id === "packing") {
-    return plan.packing.map((item) =>
-      line(item, costOf(packingCost(plan, item, sheet.kitsOf), "no-packing-cost", item.id)),
+    return prepared.packing.map((packing) =>
+      line(packing.item, costOf(packingCost(packing, sheet.kitsOf), "no-packing-cost", packing.item.id)),
     );
   }
   if (id === "work") {
     return prepared.tasks.map((task) => line(task, taskCost(prepared, sheet, task)));
   }
   if (id === "one-off")
-    return plan.charges.map((charge) => line(charge, figureOf(chargeShare(charge, sheet.kits), [])));
+    return prepared.charges.map((charge) =>
+      line(charge.charge, figureOf(chargeShare(charge, sheet.kits), [])),
+    );
   return [];
 }
 
@@ -89,7 +90,7 @@ export function taskCost(
   task: PreparedPlan["tasks"][number],
 ): Figure {
   const { minutes } = taskMinutes(task, sheet.kitsOf);
-  const cost = minutes === 0n ? 0n : workCost(prepared.plan, minutes);
+  const cost = minutes === 0n ? 0n : workCost(prepared.hourRate, minutes);
   return wholeFigure(cost, cost === null ? [need("no-hourly-rate", [{}])] : []);
 }
 

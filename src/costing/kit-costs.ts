@@ -1,7 +1,12 @@
-import type { Plan, PlanCharge } from "#src/shapes/plan.ts";
-import { grainShare, grains, scaled } from "./grains.ts";
+import { grainShare } from "./grains.ts";
 import { FACTOR_PLACES } from "./learning.ts";
-import type { PreparedPlan, PreparedTask } from "./prepared-plan.ts";
+import type {
+  PreparedCharge,
+  PreparedPacking,
+  PreparedPlan,
+  PreparedReplacements,
+  PreparedTask,
+} from "./prepared-plan.ts";
 import { MISSING, type RunSheet } from "./run-sheet.ts";
 
 const FACTOR_UNIT = 10n ** BigInt(FACTOR_PLACES);
@@ -9,11 +14,10 @@ const MILLION = 1_000_000n;
 
 /** Packing, work, one-off charges and replacements of the run (sections 7 and 8), in grains. */
 export function kitCosts(prepared: PreparedPlan, sheet: RunSheet): void {
-  const { plan } = prepared;
   const { money } = sheet;
   money.packing = 0n;
-  for (const item of plan.packing) {
-    const cost = packingCost(plan, item, sheet.kitsOf);
+  for (const packing of prepared.packing) {
+    const cost = packingCost(packing, sheet.kitsOf);
     if (cost === null) sheet.missing |= MISSING.packing;
     else money.packing += cost;
   }
@@ -22,21 +26,18 @@ export function kitCosts(prepared: PreparedPlan, sheet: RunSheet): void {
   for (const task of prepared.tasks) {
     const { minutes } = taskMinutes(task, sheet.kitsOf);
     money.minutes += minutes;
-    money.work += workCost(plan, minutes) ?? 0n;
+    money.work += workCost(prepared.hourRate, minutes) ?? 0n;
   }
-  if (money.minutes > 0n && plan.work.ratePerHour === null) sheet.missing |= MISSING.rate;
-  money.oneOff = plan.charges.reduce((sum, charge) => sum + chargeShare(charge, sheet.kits), 0n);
-  const replacements = replacementCost(plan, sheet.kits);
+  if (money.minutes > 0n && prepared.hourRate === null) sheet.missing |= MISSING.rate;
+  money.oneOff = prepared.charges.reduce((sum, charge) => sum + chargeShare(charge, sheet.kits), 0n);
+  const replacements = replacementCost(prepared.replacements, sheet.kits);
   if (replacements === null) sheet.missing |= MISSING.replacement;
   money.replacements = replacements ?? 0n;
 }
 
-/** Kits of the run that have a packing item or a task; `editions` null: all. */
-export function kitsIn(plan: Plan, editions: readonly string[] | null, kitsOf: readonly number[]): number {
-  return plan.editions.reduce(
-    (sum, { id }, index) => sum + (editions === null || editions.includes(id) ? (kitsOf[index] ?? 0) : 0),
-    0,
-  );
+/** Kits of the run that have a packing item or a task, by which editions it applies to. */
+export function kitsWith(applies: readonly boolean[], kitsOf: readonly number[]): number {
+  return kitsOf.reduce((sum, count, index) => sum + (applies[index] ? count : 0), 0);
 }
 
 /**
@@ -45,13 +46,12 @@ export function kitsIn(plan: Plan, editions: readonly string[] | null, kitsOf: r
  * @example 1.20 a kit, 30 kits → 36.00
  */
 export function packingCost(
-  plan: Plan,
-  item: Plan["packing"][number],
+  { applies, costPerKit }: PreparedPacking,
   kitsOf: readonly number[],
 ): bigint | null {
-  const kits = kitsIn(plan, item.editions, kitsOf);
+  const kits = kitsWith(applies, kitsOf);
   if (kits === 0) return 0n;
-  return item.costPerKit === null ? null : grains(item.costPerKit) * BigInt(kits);
+  return costPerKit === null ? null : costPerKit * BigInt(kits);
 }
 
 /**
@@ -62,7 +62,7 @@ export function packingCost(
  * @example 6 minutes, 10 kits, no learning, 60 to set up → 120 minutes
  */
 export function taskMinutes(task: PreparedTask, kitsOf: readonly number[]) {
-  const kits = kitsOf.reduce((sum, count, index) => sum + (task.applies[index] ? count : 0), 0);
+  const kits = kitsWith(task.applies, kitsOf);
   const factorSum = task.factorSums[kits] ?? 0n;
   const making = (task.minutesPerKit * factorSum) / FACTOR_UNIT;
   const settingUp = kits === 0 ? 0n : task.setUpMinutes;
@@ -74,9 +74,8 @@ export function taskMinutes(task: PreparedTask, kitsOf: readonly number[]) {
  *
  * @example 120 minutes at 18.00 an hour → 36.00
  */
-export function workCost(plan: Plan, minutes: bigint): bigint | null {
-  const { ratePerHour } = plan.work;
-  return ratePerHour === null ? null : grainShare(minutes, scaled(ratePerHour, 6), 60n * MILLION);
+export function workCost(hourRate: PreparedPlan["hourRate"], minutes: bigint): bigint | null {
+  return hourRate === null ? null : grainShare(minutes, hourRate, 60n * MILLION);
 }
 
 /**
@@ -85,8 +84,7 @@ export function workCost(plan: Plan, minutes: bigint): bigint | null {
  *
  * @example 240.00 spread over 120 kits, run of 40: 80.00
  */
-export function chargeShare(charge: PlanCharge, kits: number): bigint {
-  const amount = grains(charge.amount);
+export function chargeShare({ charge, amount }: PreparedCharge, kits: number): bigint {
   if (charge.spreadOver === null || kits >= charge.spreadOver) return amount;
   return grainShare(amount, BigInt(kits), BigInt(charge.spreadOver));
 }
@@ -96,11 +94,13 @@ export function chargeShare(charge: PlanCharge, kits: number): bigint {
  *
  * @example 120 kits, 2 %, 3.50 each → 8.40
  */
-export function replacementCost(plan: Plan, kits: number): bigint | null {
-  const { share, costEach } = plan.replacements;
-  const expected = scaled(share, 6) * BigInt(kits);
+export function replacementCost(
+  { shareMillionths, costEach }: PreparedReplacements,
+  kits: number,
+): bigint | null {
+  const expected = shareMillionths * BigInt(kits);
   if (expected === 0n) return 0n;
-  return costEach === null ? null : (expected * grains(costEach)) / MILLION;
+  return costEach === null ? null : (expected * costEach) / MILLION;
 }
 
 /** What the run brings if every kit sells (sections 10 and 11): `Σ kits of the edition × kept per sale`. */

@@ -41,20 +41,24 @@ export function quantityProblems(terms: Omit<LadderTerms, "currency">): LadderPr
   const problems: LadderProblem[] = [];
   const { breaks, minimumOrder, orderMultiple, priceModel } = terms;
   const first = new Map<number, number>();
-  for (const [at, { quantity }] of breaks.entries()) {
-    const found = (code: LadderProblemCode, other: number | null = null) =>
-      problems.push({ code, refused: true, at, with: other });
+  for (let at = 0; at < breaks.length; at += 1) {
+    const { quantity } = breaks[at] as Break;
     const same = first.get(quantity);
     if (same !== undefined) {
-      found("quantity-repeats", same);
+      problems.push(refused("quantity-repeats", at, same));
       continue;
     }
     first.set(quantity, at);
-    if (priceModel === "lots" && quantity % orderMultiple !== 0) found("lot-not-multiple");
-    if (priceModel !== "lots" && quantity < minimumOrder) found("break-below-minimum");
-    if ((breaks[at - 1]?.quantity ?? 0) > quantity) found("not-ascending", at - 1);
+    if (priceModel === "lots" && quantity % orderMultiple !== 0)
+      problems.push(refused("lot-not-multiple", at));
+    if (priceModel !== "lots" && quantity < minimumOrder) problems.push(refused("break-below-minimum", at));
+    if ((breaks[at - 1]?.quantity ?? 0) > quantity) problems.push(refused("not-ascending", at, at - 1));
   }
   return problems;
+}
+
+function refused(code: LadderProblemCode, at: number, other: number | null = null): LadderProblem {
+  return { code, refused: true, at, with: other };
 }
 
 type Break = LadderTerms["breaks"][number];

@@ -1,4 +1,4 @@
-import { scaled } from "./grains.ts";
+import { scaled, scaledDigits } from "./grains.ts";
 import { type LotTable, lotTable } from "./lots.ts";
 import { minorDecimals } from "./money.ts";
 import { divideBigHalfAway, divideHalfUp, ORDER_MOST, SAFE, upToMultiple } from "./whole.ts";
@@ -32,18 +32,24 @@ export interface Price {
  */
 export interface Ladder {
   model: LadderTerms["priceModel"];
-  from: number[];
-  prices: Price[];
+  /** In ascending order. */
+  rungs: Rung[];
   minimum: number;
   multiple: number;
   /** Most pieces one order may take: Infinity, or the stock shown. */
   cap: number;
+  /** Millionths of a unit in a minor unit. */
   divisor: number;
-  /** By slice: cost in millionths of all full slices below each break. */
-  below: bigint[];
-  /** Whole order: the cheapest first-permitted order among this break and those above it. */
-  onward: (Order | null)[];
   lots: LotTable | null;
+}
+
+/** One break of a ladder. */
+export interface Rung extends Price {
+  from: number;
+  /** By slice: cost in millionths of all full slices below. */
+  below: bigint;
+  /** Whole order: the cheapest first-permitted order among the breaks above. */
+  higher: Order | null;
 }
 
 /**
@@ -53,22 +59,19 @@ export interface Ladder {
  */
 export function prepareLadder(terms: LadderTerms, cap: number, quantityMost: number): Ladder {
   const breaks = terms.breaks.toSorted((a, b) => a.quantity - b.quantity);
-  const prices = breaks.map(({ price }) => priceOf(price));
   const ladder: Ladder = {
     model: terms.priceModel,
-    from: breaks.map(({ quantity }) => quantity),
-    prices,
+    rungs: breaks.map(rungOf),
     minimum: Math.max(terms.minimumOrder, terms.priceModel === "lots" ? 1 : (breaks[0]?.quantity ?? 1)),
     multiple: terms.orderMultiple,
     cap,
     divisor: 10 ** (6 - minorDecimals(terms.currency)),
-    below: terms.priceModel === "by-slice" ? fullSlices(breaks, prices) : [],
-    onward: [],
     lots: null,
   };
   if (terms.priceModel === "lots")
     ladder.lots = lotTable(breaks, terms.currency, cap, Math.max(quantityMost, ladder.minimum));
-  if (terms.priceModel === "whole-order") ladder.onward = cheapestOnward(ladder);
+  if (terms.priceModel === "whole-order") setHigher(ladder);
+  if (terms.priceModel === "by-slice") setBelow(ladder.rungs);
   return ladder;
 }
 
@@ -82,14 +85,31 @@ export function prepareLadder(terms: LadderTerms, cap: number, quantityMost: num
  * @example 735 LEDs in bags of 100 from breaks 500 at 0.094, 1000 at 0.062 → 1000 for 6200 cents
  */
 export function cheapestOrder(ladder: Ladder, quantity: number): Order | null {
-  if (ladder.lots) return cheapestLots(ladder, ladder.lots, quantity);
+  const order = { quantity: 0, cost: 0, tier: -1 };
+  return findOrder(ladder, quantity, order) ? order : null;
+}
+
+/**
+ * The same, written into an order that exists, for asking thousands of quantities; false: the offer
+ * cannot cover the quantity, and the order is left as it was.
+ */
+export function findOrder(ladder: Ladder, quantity: number, into: Order): boolean {
+  if (ladder.lots) return findLots(ladder, ladder.lots, quantity, into);
   const least = upToMultiple(Math.max(quantity, ladder.minimum), ladder.multiple);
-  if (least > ladder.cap) return null;
+  if (least > ladder.cap) return false;
   const tier = tierOf(ladder, least);
   const cost = costOf(ladder, tier, least);
-  const higher = ladder.onward[tier + 1];
-  if (higher && higher.cost < cost) return higher;
-  return { quantity: least, cost, tier };
+  const { higher } = ladder.rungs[tier] as Rung;
+  return higher !== null && higher.cost < cost
+    ? setOrder(into, higher.quantity, higher.cost, higher.tier)
+    : setOrder(into, least, cost, tier);
+}
+
+function setOrder(into: Order, quantity: number, cost: number, tier: number): true {
+  into.quantity = quantity;
+  into.cost = cost;
+  into.tier = tier;
+  return true;
 }
 
 /**
@@ -98,9 +118,14 @@ export function cheapestOrder(ladder: Ladder, quantity: number): Order | null {
  * @example breaks 100, 500, 1000: 735 pieces reach index 1
  */
 export function tierOf(ladder: Ladder, quantity: number): number {
-  let tier = ladder.from.length - 1;
-  while (tier > 0 && (ladder.from[tier] ?? 0) > quantity) tier -= 1;
+  let tier = ladder.rungs.length - 1;
+  while (tier > 0 && fromOf(ladder, tier) > quantity) tier -= 1;
   return tier;
+}
+
+/** Quantity from which a break counts; 0 for an index the ladder does not have. */
+export function fromOf(ladder: Ladder, tier: number): number {
+  return ladder.rungs[tier]?.from ?? 0;
 }
 
 /**
@@ -109,52 +134,55 @@ export function tierOf(ladder: Ladder, quantity: number): number {
  * @example 800 at 0.094 → 7520 cents
  */
 export function costOf(ladder: Ladder, tier: number, quantity: number): number {
-  const price = ladder.prices[tier] as Price;
+  const rung = ladder.rungs[tier] as Rung;
   if (ladder.model === "whole-order") {
-    const product = price.millionths * quantity;
+    const product = rung.millionths * quantity;
     if (product < SAFE) return divideHalfUp(product, ladder.divisor);
-    return bounded(divideBigHalfAway(exactPrice(price) * BigInt(quantity), BigInt(ladder.divisor)));
+    return bounded(divideBigHalfAway(exactPrice(rung) * BigInt(quantity), BigInt(ladder.divisor)));
   }
-  const inTier = tier === 0 ? quantity : quantity - (ladder.from[tier] ?? 0) + 1;
-  const exact = (ladder.below[tier] ?? 0n) + exactPrice(price) * BigInt(inTier);
+  const inTier = tier === 0 ? quantity : quantity - rung.from + 1;
+  const exact = rung.below + exactPrice(rung) * BigInt(inTier);
   return bounded(divideBigHalfAway(exact, BigInt(ladder.divisor)));
 }
 
-function cheapestLots(ladder: Ladder, lots: LotTable, quantity: number): Order | null {
+function findLots(ladder: Ladder, lots: LotTable, quantity: number, into: Order): boolean {
   const found = lots.cover(Math.max(quantity, ladder.minimum));
-  return found && { ...found, tier: -1 };
+  return found !== null && setOrder(into, found.quantity, found.cost, -1);
 }
 
-function cheapestOnward(ladder: Ladder): (Order | null)[] {
-  const onward: (Order | null)[] = ladder.from.map(() => null);
+/** From the top down: the best of the first permitted orders above each break. */
+function setHigher(ladder: Ladder): void {
   let best: Order | null = null;
-  for (let tier = ladder.from.length - 1; tier >= 0; tier -= 1) {
-    const least = upToMultiple(Math.max(ladder.from[tier] ?? 0, ladder.minimum), ladder.multiple);
-    const next = ladder.from[tier + 1] ?? Number.POSITIVE_INFINITY;
+  let next = Number.POSITIVE_INFINITY;
+  for (let tier = ladder.rungs.length - 1; tier >= 0; tier -= 1) {
+    const rung = ladder.rungs[tier] as Rung;
+    rung.higher = best;
+    const least = upToMultiple(Math.max(rung.from, ladder.minimum), ladder.multiple);
     if (least < next && least <= ladder.cap) {
       const cost = costOf(ladder, tier, least);
       if (best === null || cost <= best.cost) best = { quantity: least, cost, tier };
     }
-    onward[tier] = best;
+    next = rung.from;
   }
-  return onward;
 }
 
-/** Pieces below each break at their own prices, in millionths; below the first break its price holds. */
-function fullSlices(breaks: readonly { quantity: number }[], prices: readonly Price[]): bigint[] {
-  let sum = 0n;
-  return breaks.map(({ quantity }, tier) => {
-    const before = breaks[tier - 1];
-    if (before === undefined) return 0n;
-    const pieces = tier === 1 ? quantity - 1 : quantity - before.quantity;
-    sum += exactPrice(prices[tier - 1] as Price) * BigInt(pieces);
-    return sum;
-  });
+/** Pieces below each break at their own prices; below the first break its price holds. */
+function setBelow(rungs: readonly Rung[]): void {
+  for (let tier = 1; tier < rungs.length; tier += 1) {
+    const [before, rung] = [rungs[tier - 1] as Rung, rungs[tier] as Rung];
+    const pieces = tier === 1 ? rung.from - 1 : rung.from - before.from;
+    rung.below = before.below + exactPrice(before) * BigInt(pieces);
+  }
 }
 
-function priceOf(text: string): Price {
-  const [whole = "0", fraction = ""] = text.split(".");
-  const millionths = Number(whole + fraction.padEnd(6, "0"));
+function rungOf({ quantity, price }: LadderTerms["breaks"][number]): Rung {
+  const { millionths, text } = priceOf(price);
+  return { from: quantity, millionths, text, below: 0n, higher: null };
+}
+
+/** Decimal text with at most six decimals as a price. */
+export function priceOf(text: string): Price {
+  const millionths = Number(scaledDigits(text, 6));
   return { text, millionths: millionths < SAFE ? millionths : Number.POSITIVE_INFINITY };
 }
 

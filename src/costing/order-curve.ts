@@ -1,5 +1,13 @@
 import { exact } from "./decimal.ts";
-import { cheapestOrder, costOf, type Ladder, type LadderTerms, prepareLadder, tierOf } from "./ladder.ts";
+import {
+  cheapestOrder,
+  costOf,
+  fromOf,
+  type Ladder,
+  type LadderTerms,
+  prepareLadder,
+  tierOf,
+} from "./ladder.ts";
 import { minorText } from "./money.ts";
 import { upToMultiple } from "./whole.ts";
 
@@ -71,9 +79,9 @@ export function neverWorthBuying(terms: LadderTerms): NeverWorth[] {
   if (terms.priceModel !== "whole-order" || terms.breaks.length < 2) return [];
   const ladder = prepareLadder(terms, ANY, 1);
   const ranges: NeverWorth[] = [];
-  for (let tier = 0; tier < ladder.from.length - 1; tier += 1) {
-    const least = leastOrder(ladder, ladder.from[tier] ?? 1);
-    const last = lastBelow(ladder, ladder.from[tier + 1] ?? 1);
+  for (let tier = 0; tier < ladder.rungs.length - 1; tier += 1) {
+    const least = leastOrder(ladder, fromOf(ladder, tier));
+    const last = lastBelow(ladder, fromOf(ladder, tier + 1));
     const from = firstDearer(ladder, tier, least, last);
     if (from !== null) joinRange(ranges, { from, to: last }, ladder.multiple);
   }
@@ -85,7 +93,7 @@ function lastBelow(ladder: Ladder, quantity: number): number {
 }
 
 function firstDearer(ladder: Ladder, tier: number, least: number, last: number): number | null {
-  const rival = ladder.onward[tier + 1];
+  const rival = ladder.rungs[tier]?.higher;
   if (!rival || least > last || costOf(ladder, tier, last) <= rival.cost) return null;
   let [low, high] = [0, (last - least) / ladder.multiple];
   while (low < high) {

@@ -64,17 +64,17 @@ function orderPart(
   barred: ReadonlySet<number>,
 ): void {
   const toBuy = sheet.toBuy[index] as number;
+  const part = prepared.parts[index] as PreparedPart;
+  const best = toBuy === 0 ? null : chooseOffer(part, toBuy, barred);
+  if (best !== null) {
+    take(sheet, index, best);
+    return;
+  }
   sheet.chosen[index] = null;
   sheet.quantity[index] = 0;
   sheet.cost[index] = 0;
-  if (toBuy === 0) {
-    sheet.state[index] = sheet.required[index] === 0 ? NOT_NEEDED : SETTLED;
-    return;
-  }
-  const part = prepared.parts[index] as PreparedPart;
-  const best = chooseOffer(part, toBuy, barred);
-  if (best !== null) take(sheet, index, best);
-  else sheet.state[index] = takeSplit(sheet, index, part, barred);
+  if (toBuy > 0) sheet.state[index] = takeSplit(sheet, index, part, barred);
+  else sheet.state[index] = sheet.required[index] === 0 ? NOT_NEEDED : SETTLED;
 }
 
 function take(sheet: RunSheet, index: number, { offer, order }: WeighedOffer): void {

@@ -3,6 +3,7 @@ import { convertMinor } from "./conversion.ts";
 import type { Figure } from "./figure.ts";
 import { figureOf, figurePer, wholeFigure } from "./figure-of.ts";
 import { grainText } from "./grains.ts";
+import { exactPrice } from "./ladder.ts";
 import { minorText } from "./money.ts";
 import { boughtUp, breakReached, lotsTaken } from "./order-details.ts";
 import { ordersOf } from "./order-parts.ts";
@@ -40,7 +41,8 @@ export function partMoney(prepared: PreparedPlan, sheet: RunSheet, index: number
     money.left += left;
     money.kept += keptOf(left, prepared.buckets[offer.bucket]?.keepMillionths ?? 0n);
   }
-  money.stock = BigInt(sheet.fromStock[index] as number) * (part.bookMillionths ?? 0n) * 10n ** 18n;
+  money.stock =
+    BigInt(sheet.fromStock[index] as number) * (part.book === null ? 0n : exactPrice(part.book)) * 10n ** 18n;
   return money;
 }
 
@@ -95,8 +97,8 @@ function perKit(value: bigint, kits: number, needs: Need[]): Figure {
   return needs.length > 0 ? wholeFigure(null, needs) : figurePer(value, kits, needs);
 }
 
-function stockNeedsOf({ part, bookMillionths }: PreparedPart, sheet: RunSheet, index: number): Need[] {
-  const missing = bookMillionths === null && (sheet.fromStock[index] as number) > 0;
+function stockNeedsOf({ part, book }: PreparedPart, sheet: RunSheet, index: number): Need[] {
+  const missing = book === null && (sheet.fromStock[index] as number) > 0;
   return missing ? [need("no-stock-cost", [{ part: part.id }])] : [];
 }
 

@@ -1,21 +1,17 @@
 import type { Plan, PlanPart } from "#src/shapes/plan.ts";
 import { byNameAndId } from "./by-name.ts";
+import { emptyMemory } from "./choice-memory.ts";
 import { type MinorWorth, minorWorth } from "./conversion.ts";
 import { currencyDecimals } from "./currencies.ts";
 import { grains, scaled } from "./grains.ts";
 import { saleOf } from "./kept-per-sale.ts";
+import { priceOf } from "./ladder.ts";
 import { factorSums } from "./learning.ts";
 import { minorReaching, toMinor } from "./money.ts";
 import { spareOf } from "./need.ts";
 import { prepareOffers } from "./prepare-offers.ts";
 import { prepareQuote } from "./prepare-quote.ts";
-import type {
-  ChoiceMemory,
-  PreparedPart,
-  PreparedPlan,
-  PreparedSupplier,
-  PreparedTask,
-} from "./prepared-plan.ts";
+import type { PreparedPart, PreparedPlan, PreparedSupplier, PreparedTask } from "./prepared-plan.ts";
 import type { Problem } from "./problem.ts";
 
 /** Where worths and buckets of a plan are looked up while it is prepared. */
@@ -69,6 +65,7 @@ export function preparePlan(plan: Plan, kitsMost: number): PreparedPlan {
     parts: plan.parts.map((part) => preparePart(part, preparing)),
     quotes: plan.boards.quotes.map((quote) => prepareQuote(quote, preparing)),
     tasks: prepareTasks(plan, kitsMost),
+    ...prepareKitCosts(plan),
     keptPerSale: plan.editions.map((edition) => saleOf(plan, edition).kept),
     weights: plan.editions.map(({ weight }) => weight),
     boardsPerKit: plan.editions.map(({ boardsPerKit }) => boardsPerKit),
@@ -107,49 +104,63 @@ function preparePart(part: PlanPart, preparing: Preparing): PreparedPart {
     part.quantities.reduce((sum, { edition, perKit: pieces }) => sum + (edition === id ? pieces : 0), 0),
   );
   const rate = Number(scaled(part.spareRate, 6));
-  const spare = { spareWhole: Math.trunc(rate / 1_000_000), spareMillionths: rate % 1_000_000 };
+  const spare = {
+    spareWhole: Math.trunc(rate / 1_000_000),
+    spareMillionths: rate % 1_000_000,
+    leastSpare: part.leastSpare,
+  };
   const needMost = preparing.kitsMost * Math.max(0, ...perKit);
-  const buyMost = needMost === 0 ? 0 : needMost + spareOf(needMost, spare, part.leastSpare);
-  const { bookCost } = part.freeStock;
+  const buyMost = needMost === 0 ? 0 : needMost + spareOf(needMost, spare);
+  const { quantity: stock, bookCost } = part.freeStock;
   const { offers, usable } = prepareOffers(part, buyMost, preparing);
-  const book = bookCost === null ? null : scaled(bookCost, 6);
   return {
     part,
     perKit,
     ...spare,
+    stock,
     usable,
     offers,
     buyMost,
-    bookMillionths: book,
+    book: bookCost === null ? null : priceOf(bookCost),
     split: null,
     choice: emptyMemory(usable.length),
   };
 }
 
-function emptyMemory(offers: number): ChoiceMemory {
-  const never = Number.POSITIVE_INFINITY;
-  const from = new Float64Array(offers).fill(never);
-  return {
-    best: null,
-    quantity: 0,
-    from,
-    floor: new Float64Array(offers),
-    rivalsFrom: never,
-    rivalsFloor: 0,
-  };
-}
-
 function prepareTasks(plan: Plan, kitsMost: number): PreparedTask[] {
-  const { work, editions } = plan;
+  const { work } = plan;
   const sums = work.tasks.length === 0 ? [] : factorSums(work.learningSlope, work.kitsMadeBefore, kitsMost);
   return work.tasks.map((task) => ({
     id: task.id,
     name: task.name,
-    applies: editions.map(({ id }) => task.editions === null || task.editions.includes(id)),
+    applies: appliesTo(plan, task.editions),
     minutesPerKit: grains(task.minutesPerKit),
     setUpMinutes: grains(task.setUpMinutes),
     factorSums: sums,
   }));
+}
+
+function prepareKitCosts(plan: Plan) {
+  const { work, replacements } = plan;
+  const grainsOf = (amount: string | null) => (amount === null ? null : grains(amount));
+  return {
+    packing: plan.packing.map((item) => ({
+      item,
+      applies: appliesTo(plan, item.editions),
+      costPerKit: grainsOf(item.costPerKit),
+    })),
+    charges: plan.charges.map((charge) => ({ charge, amount: grains(charge.amount) })),
+    hourRate: work.ratePerHour === null ? null : scaled(work.ratePerHour, 6),
+    replacements: {
+      shareMillionths: scaled(replacements.share, 6),
+      costEach: grainsOf(replacements.costEach),
+    },
+  };
+}
+
+/** By index of edition: whether it is among `editions`; null: all are. */
+function appliesTo(plan: Plan, editions: readonly string[] | null): boolean[] {
+  return plan.editions.map(({ id }) => editions === null || editions.includes(id));
 }
 
 function unlistedCurrencies(plan: Plan): Problem[] {

@@ -1,17 +1,19 @@
 import type {
   Plan,
   PlanBoardQuote,
+  PlanCharge,
   PlanEdition,
   PlanOffer,
+  PlanPacking,
   PlanPart,
   PlanSupplier,
 } from "#src/shapes/plan.ts";
+import type { ChoiceMemory } from "./choice-memory.ts";
 import type { MinorWorth } from "./conversion.ts";
-import type { Ladder } from "./ladder.ts";
+import type { Ladder, Price } from "./ladder.ts";
 import type { Problem } from "./problem.ts";
 import type { OfferStanding } from "./run-result.ts";
 import type { SplitTable } from "./split-order.ts";
-import type { WeighedOffer } from "./supplier-choice.ts";
 
 /** A plan with every text read once, so that a thousand run sizes can be reckoned from it. */
 export interface PreparedPlan {
@@ -23,6 +25,11 @@ export interface PreparedPlan {
   parts: PreparedPart[];
   quotes: PreparedQuote[];
   tasks: PreparedTask[];
+  packing: PreparedPacking[];
+  charges: PreparedCharge[];
+  /** Own work in 10^-6 of the plan's currency an hour; null: not decided. */
+  hourRate: bigint | null;
+  replacements: PreparedReplacements;
   /** Per edition: what one sale keeps, in grains; null while not known. */
   keptPerSale: (bigint | null)[];
   weights: number[];
@@ -55,28 +62,19 @@ export interface PreparedPart {
   perKit: number[];
   spareWhole: number;
   spareMillionths: number;
+  leastSpare: number;
+  /** Pieces of free stock. */
+  stock: number;
   /** Offers that may be used, in the order that settles ties. */
   usable: PreparedOffer[];
   /** All offers of the plan, in its order, with how they stand. */
   offers: { offer: PlanOffer; standing: OfferStanding; prepared: PreparedOffer | null }[];
   /** Largest number that may have to be bought up to `kitsMost`. */
   buyMost: number;
-  bookMillionths: bigint | null;
+  /** Book cost of a piece of its free stock; null: not known. */
+  book: Price | null;
   split: SplitTable | null;
   choice: ChoiceMemory;
-}
-
-/** What the last choice for a part tells about the next one; see `chooseOffer`. */
-export interface ChoiceMemory {
-  /** The last choice and the quantity it was made for. */
-  best: WeighedOffer | null;
-  quantity: number;
-  /** By rank: the last quantity weighed, and what no quantity from there upward can be worth less than. */
-  from: Float64Array;
-  floor: Float64Array;
-  /** The least floor among all but the winner, and the quantity from which they all hold. */
-  rivalsFrom: number;
-  rivalsFloor: number;
 }
 
 export interface PreparedOffer {
@@ -109,6 +107,26 @@ export interface PreparedTask {
   minutesPerKit: bigint;
   setUpMinutes: bigint;
   factorSums: bigint[];
+}
+
+export interface PreparedPacking {
+  item: PlanPacking;
+  /** By index of edition: whether its kits have this item. */
+  applies: boolean[];
+  /** In grains; null: not known. */
+  costPerKit: bigint | null;
+}
+
+export interface PreparedCharge {
+  charge: PlanCharge;
+  /** In grains. */
+  amount: bigint;
+}
+
+export interface PreparedReplacements {
+  shareMillionths: bigint;
+  /** In grains; null: not known. */
+  costEach: bigint | null;
 }
 
 /** Editions in the plan's order. */

@@ -3,7 +3,7 @@ import { convertMinor } from "./conversion.ts";
 import { kitCosts, takings } from "./kit-costs.ts";
 import { needOf, spareOf } from "./need.ts";
 import { basketCharges, orderParts } from "./order-parts.ts";
-import type { PreparedPlan } from "./prepared-plan.ts";
+import type { PreparedPart, PreparedPlan } from "./prepared-plan.ts";
 import { MISSING, type RunSheet } from "./run-sheet.ts";
 import { shelfValues } from "./shelf.ts";
 import { splitKits } from "./split-kits.ts";
@@ -42,11 +42,10 @@ export function reckonRun(prepared: PreparedPlan, kits: number, sheet: RunSheet)
 function setNeeds(prepared: PreparedPlan, sheet: RunSheet): void {
   const { parts } = prepared;
   for (let index = 0; index < parts.length; index += 1) {
-    const prepared = parts[index] as (typeof parts)[number];
-    const { leastSpare, freeStock } = prepared.part;
-    const need = needOf(sheet.kitsOf, prepared.perKit);
-    const required = need + spareOf(need, prepared, leastSpare);
-    const fromStock = Math.min(freeStock.quantity, required);
+    const part = parts[index] as PreparedPart;
+    const need = needOf(sheet.kitsOf, part.perKit);
+    const required = need + spareOf(need, part);
+    const fromStock = Math.min(part.stock, required);
     sheet.need[index] = need;
     sheet.required[index] = required;
     sheet.fromStock[index] = fromStock;

@@ -1,6 +1,6 @@
 import type { PlanSale } from "#src/shapes/plan.ts";
 import { SALE_NEEDS } from "./kept-per-sale.ts";
-import { kitsIn } from "./kit-costs.ts";
+import { kitsWith } from "./kit-costs.ts";
 import type { PreparedPart, PreparedPlan } from "./prepared-plan.ts";
 import type { Need, NeedCode, Place, SourcePage } from "./problem.ts";
 import { MISSING, REFUSED, type RunSheet, SETTLED, SHORT, TOO_LARGE } from "./run-sheet.ts";
@@ -129,15 +129,15 @@ function boardNeeds(prepared: PreparedPlan, sheet: RunSheet, missing: number): N
   return [need("no-board-quote", chosenQuote === null ? [{}] : [{ quote: chosenQuote }])];
 }
 
-function packingNeeds({ plan }: PreparedPlan, sheet: RunSheet): Need[] {
-  return plan.packing
-    .filter(({ costPerKit, editions }) => costPerKit === null && kitsIn(plan, editions, sheet.kitsOf) > 0)
-    .map(({ id }) => need("no-packing-cost", [{ packing: id }]));
+function packingNeeds({ packing }: PreparedPlan, sheet: RunSheet): Need[] {
+  return packing
+    .filter(({ costPerKit, applies }) => costPerKit === null && kitsWith(applies, sheet.kitsOf) > 0)
+    .map(({ item }) => need("no-packing-cost", [{ packing: item.id }]));
 }
 
 function stockNeeds(prepared: PreparedPlan, sheet: RunSheet): Need[] {
   return prepared.parts
-    .filter((part, index) => part.bookMillionths === null && (sheet.fromStock[index] as number) > 0)
+    .filter((part, index) => part.book === null && (sheet.fromStock[index] as number) > 0)
     .map(({ part }) => need("no-stock-cost", [{ part: part.id }]));
 }
 

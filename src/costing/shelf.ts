@@ -1,10 +1,10 @@
 import { convertMinor } from "./conversion.ts";
 import { grainShare } from "./grains.ts";
-import { exactPrice, type Price } from "./ladder.ts";
+import { exactPrice, type Price, type Rung } from "./ladder.ts";
 import { ordersOf } from "./order-parts.ts";
 import type { PreparedOffer, PreparedPart, PreparedPlan } from "./prepared-plan.ts";
 import { MISSING, type RunSheet } from "./run-sheet.ts";
-import { addProduct, clearSum, sumOf } from "./whole-sum.ts";
+import { addProduct, clearSum, sumOf, type WholeSum } from "./whole-sum.ts";
 
 const MILLION = 1_000_000n;
 
@@ -46,18 +46,18 @@ export function leftValue(
 ): bigint {
   const { ladder, worth } = offer;
   if (ladder.model === "whole-order") {
-    return BigInt(left) * exactPrice(ladder.prices[tier] as Price) * worth.millionth;
+    return BigInt(left) * exactPrice(ladder.rungs[tier] as Rung) * worth.millionth;
   }
   return grainShare(convertMinor(cost, worth), BigInt(left), BigInt(quantity));
 }
 
 function takeStock(sheet: RunSheet, part: PreparedPart, fromStock: number): void {
-  if (part.bookMillionths === null) sheet.missing |= MISSING.stock;
-  else addBook(sheet, fromStock, part.bookMillionths);
+  if (part.book === null) sheet.missing |= MISSING.stock;
+  else addPriced(sheet.stock, fromStock, part.book);
 }
 
-function addBook(sheet: RunSheet, fromStock: number, millionths: bigint): void {
-  addProduct(sheet.stock, fromStock, Number(millionths), () => millionths);
+function addPriced(sum: WholeSum, pieces: number, price: Price): void {
+  addProduct(sum, pieces, price.millionths, () => exactPrice(price));
 }
 
 /** Prices by the piece are summed as whole millionths for each currency and keep share. */
@@ -69,10 +69,9 @@ function leave(
   index: number,
 ): void {
   const tier = sheet.tier[index] as number;
-  const price = offer.ladder.prices[tier];
-  const sum = sheet.left[offer.bucket];
-  if (offer.ladder.model === "whole-order" && price !== undefined && sum !== undefined) {
-    addProduct(sum, left, price.millionths, () => exactPrice(price));
+  const { ladder } = offer;
+  if (ladder.model === "whole-order") {
+    addPriced(sheet.left[offer.bucket] as WholeSum, left, ladder.rungs[tier] as Rung);
     return;
   }
   const value = leftValue(offer, tier, sheet.quantity[index] as number, sheet.cost[index] as number, left);

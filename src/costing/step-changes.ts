@@ -1,3 +1,4 @@
+import { fromOf } from "./ladder.ts";
 import { ordersOf } from "./order-parts.ts";
 import type { PreparedOffer, PreparedPlan, PreparedSupplier } from "./prepared-plan.ts";
 import type { RunSheet } from "./run-sheet.ts";
@@ -44,7 +45,7 @@ function boardChanges(before: RunSheet, after: RunSheet): Change[] {
     return less === more ? [] : [{ what: "board-lots", quote, from: less, to: more }];
   }
   if (from.order.tier === to.order.tier) return [];
-  const breakOf = (tier: number) => to.quote.ladder?.from[tier] ?? 0;
+  const breakOf = (tier: number) => (to.quote.ladder === null ? 0 : fromOf(to.quote.ladder, tier));
   return [{ what: "board-break", quote, from: breakOf(from.order.tier), to: breakOf(to.order.tier) }];
 }
 
@@ -88,8 +89,7 @@ function orderChanges(
   if (from === to) return [];
   if (ladder.model === "lots") return [{ what: "lots", ...at, from, to }];
   const [low, high] = [before.tier[index] as number, after.tier[index] as number];
-  if (low !== high)
-    return [{ what: "break", ...at, from: ladder.from[low] ?? 0, to: ladder.from[high] ?? 0 }];
+  if (low !== high) return [{ what: "break", ...at, from: fromOf(ladder, low), to: fromOf(ladder, high) }];
   return ladder.multiple > 1 ? [{ what: "pack", ...at, from, to }] : [];
 }
 

@@ -1,6 +1,7 @@
+import { type Floor, floorAt, isBelow, leastRival, setFloor } from "./choice-memory.ts";
 import { compareWorth } from "./conversion.ts";
-import { cheapestOrder, type Order } from "./ladder.ts";
-import type { ChoiceMemory, PreparedOffer, PreparedPart, PreparedSupplier } from "./prepared-plan.ts";
+import { findOrder, type Order } from "./ladder.ts";
+import type { PreparedOffer, PreparedPart, PreparedSupplier } from "./prepared-plan.ts";
 
 /** An offer with the order it would get for a quantity. */
 export interface WeighedOffer {
@@ -27,10 +28,22 @@ export function freightFor(supplier: PreparedSupplier, goods: number): number | 
  * @example 1000 LEDs for 6200 cents with freight 490 → alone 6690
  */
 export function weigh(offer: PreparedOffer, quantity: number): WeighedOffer | null {
-  const order = cheapestOrder(offer.ladder, quantity);
-  if (order === null || order.cost === Number.POSITIVE_INFINITY) return null;
+  const weighed = unweighed(offer);
+  return weighInto(weighed, offer, quantity) ? weighed : null;
+}
+
+function unweighed(offer: PreparedOffer): WeighedOffer {
+  return { offer, order: { quantity: 0, cost: 0, tier: -1 }, alone: 0, freightKnown: false };
+}
+
+function weighInto(into: WeighedOffer, offer: PreparedOffer, quantity: number): boolean {
+  const { order } = into;
+  if (!findOrder(offer.ladder, quantity, order) || order.cost === Number.POSITIVE_INFINITY) return false;
   const freight = freightFor(offer.supplier, order.cost);
-  return { offer, order, alone: order.cost + (freight ?? 0), freightKnown: freight !== null };
+  into.offer = offer;
+  into.alone = order.cost + (freight ?? 0);
+  into.freightKnown = freight !== null;
+  return true;
 }
 
 /**
@@ -40,7 +53,7 @@ export function weigh(offer: PreparedOffer, quantity: number): WeighedOffer | nu
  * supplier. A pinned offer is the only one in `usable`. Minor units, compared exactly.
  *
  * The joint choice over all parts takes the same arguments for all parts at once and gives the same
- * answer per part.
+ * answer per part. What is answered is written over by the next choice for the same part.
  *
  * @param barred suppliers, by index, that turned the run's basket down (section 4.1)
  *
@@ -59,7 +72,7 @@ export function chooseOffer(
   }
   const { choice } = part;
   const winner = choice.best === null ? null : weighAgain(choice.best, choice.quantity, quantity);
-  const holds = winner?.freightKnown && quantity >= choice.rivalsFrom && isBelow(winner, choice.rivalsFloor);
+  const holds = winner?.freightKnown && quantity >= choice.rivalsFrom && isBelow(winner, choice.rivals);
   choice.best = holds ? winner : chooseAnew(part, quantity, winner);
   choice.quantity = quantity;
   return choice.best;
@@ -68,7 +81,7 @@ export function chooseOffer(
 /** An order that already holds a larger quantity is still the cheapest for it: it was so among more. */
 function weighAgain(last: WeighedOffer, lastQuantity: number, quantity: number): WeighedOffer | null {
   if (quantity >= lastQuantity && quantity <= last.order.quantity) return last;
-  return weigh(last.offer, quantity);
+  return weighInto(last, last.offer, quantity) ? last : null;
 }
 
 function bestOf(offers: readonly PreparedOffer[], quantity: number): WeighedOffer | null {
@@ -87,52 +100,24 @@ export function better(a: WeighedOffer, b: WeighedOffer): boolean {
   return (byWorth || a.order.quantity - b.order.quantity || a.offer.rank - b.offer.rank) < 0;
 }
 
-/**
- * An order of more pieces never costs less, so what an offer cost at some quantity holds for all
- * larger ones. From one run size to the next quantities grow a little, and most offers stay too dear
- * for many sizes: they are passed over without being weighed again.
- */
+/** Weighs anew only those offers whose floor does not keep them above the best. */
 function chooseAnew(part: PreparedPart, quantity: number, winner: WeighedOffer | null): WeighedOffer | null {
   const { choice, usable } = part;
   let best = winner;
-  if (winner !== null) setFloor(choice, winner.offer, quantity, winner);
+  if (winner !== null) setFloor(choice.floors[winner.offer.rank] as Floor, winner.offer, quantity, winner);
   for (const offer of usable) {
     if (offer === winner?.offer) continue;
-    const holds = quantity >= (choice.from[offer.rank] as number);
-    if (holds && best?.freightKnown && isBelow(best, choice.floor[offer.rank] as number)) continue;
-    const weighed = weigh(offer, quantity);
-    setFloor(choice, offer, quantity, weighed);
-    if (weighed !== null && (best === null || better(weighed, best))) best = weighed;
+    const floor = choice.floors[offer.rank] as Floor;
+    if (best?.freightKnown && isBelow(best, floorAt(floor, quantity))) continue;
+    const rival = choice.spare ?? unweighed(offer);
+    const covers = weighInto(rival, offer, quantity);
+    setFloor(floor, offer, quantity, covers ? rival : null);
+    if (covers && (best === null || better(rival, best))) {
+      choice.spare = best;
+      best = rival;
+    } else choice.spare = rival;
   }
-  rememberRivals(choice, best);
+  choice.rivalsFrom = quantity;
+  choice.rivals = leastRival(choice, quantity, best?.offer.rank);
   return best;
-}
-
-/** Plainly below, with a billionth of margin for the rounding of the comparison. */
-function isBelow({ alone, offer }: WeighedOffer, floor: number): boolean {
-  return alone * offer.worth.near < floor * (1 - 1e-9);
-}
-
-/** At least goods and freight, unless more goods reach the value from which freight is free. */
-function setFloor(
-  choice: ChoiceMemory,
-  offer: PreparedOffer,
-  quantity: number,
-  weighed: WeighedOffer | null,
-): void {
-  const { supplier, worth, rank } = offer;
-  const goods = weighed === null ? Number.POSITIVE_INFINITY : weighed.order.cost;
-  const least = Math.min(goods + (supplier.freight ?? 0), Math.max(goods, supplier.freeFrom));
-  choice.from[rank] = quantity;
-  choice.floor[rank] = least * worth.near;
-}
-
-function rememberRivals(choice: ChoiceMemory, best: WeighedOffer | null): void {
-  choice.rivalsFrom = 0;
-  choice.rivalsFloor = Number.POSITIVE_INFINITY;
-  for (let rank = 0; rank < choice.from.length; rank += 1) {
-    if (rank === best?.offer.rank) continue;
-    choice.rivalsFrom = Math.max(choice.rivalsFrom, choice.from[rank] as number);
-    choice.rivalsFloor = Math.min(choice.rivalsFloor, choice.floor[rank] as number);
-  }
 }

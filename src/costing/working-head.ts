@@ -1,6 +1,6 @@
 import { roundedText } from "./decimal.ts";
 import { scaled } from "./grains.ts";
-import { kitsIn } from "./kit-costs.ts";
+import { kitsWith } from "./kit-costs.ts";
 import type { Head, HeadId } from "./run-result.ts";
 import type { WorkingContext } from "./working.ts";
 import { count, from, money, number, rate, type Sheet, type Step, step, summed } from "./working-lines.ts";
@@ -44,9 +44,9 @@ function labelOf({ prepared, sheet }: WorkingContext, head: HeadId, line: Head["
   if (head === "boards")
     return `${line.name}, ${line.id.endsWith(":boards") ? "boards" : "engineering and stencil"}`;
   if (head === "packing") {
-    const item = plan.packing.find(({ id }) => id === line.id);
-    const kits = item ? kitsIn(plan, item.editions, sheet.kitsOf) : 0;
-    return item?.costPerKit ? `${line.name}, ${kits} kits at ${item.costPerKit}` : line.name;
+    const packing = prepared.packing.find(({ item }) => item.id === line.id);
+    const kits = packing ? kitsWith(packing.applies, sheet.kitsOf) : 0;
+    return packing?.item.costPerKit ? `${line.name}, ${kits} kits at ${packing.item.costPerKit}` : line.name;
   }
   if (head === "one-off") {
     const charge = plan.charges.find(({ id }) => id === line.id);

@@ -67,16 +67,16 @@ describe("splitKits", () => {
 });
 
 describe("need and spare", () => {
-  const rate = (text: string) => {
-    const millionths = Math.round(Number(text) * 1e6);
-    return { spareWhole: Math.floor(millionths / 1e6), spareMillionths: millionths % 1e6 };
+  const terms = (rate: string, leastSpare: number) => {
+    const millionths = Math.round(Number(rate) * 1e6);
+    return { spareWhole: Math.floor(millionths / 1e6), spareMillionths: millionths % 1e6, leastSpare };
   };
 
   test("2 % of 720 is 14.4, so 15; at least the least spare; nothing of what is not needed", () => {
-    expect(spareOf(720, rate("0.02"), 1)).toBe(15);
-    expect(spareOf(720, rate("0.02"), 20)).toBe(20);
-    expect(spareOf(50, rate("0.02"), 0)).toBe(1);
-    expect(spareOf(0, rate("0.02"), 20)).toBe(0);
+    expect(spareOf(720, terms("0.02", 1))).toBe(15);
+    expect(spareOf(720, terms("0.02", 20))).toBe(20);
+    expect(spareOf(50, terms("0.02", 0))).toBe(1);
+    expect(spareOf(0, terms("0.02", 20))).toBe(0);
     expect(needOf([60, 60], [6, 5])).toBe(660);
   });
 
@@ -88,7 +88,7 @@ describe("need and spare", () => {
         (need, millionths) => {
           const exactly = (BigInt(millionths) * BigInt(need) + 999_999n) / 1_000_000n;
           const parts = { spareWhole: Math.floor(millionths / 1e6), spareMillionths: millionths % 1e6 };
-          expect(spareOf(need, parts, 0)).toBe(Number(exactly));
+          expect(spareOf(need, { ...parts, leastSpare: 0 })).toBe(Number(exactly));
         },
       ),
     );
