@@ -1,5 +1,5 @@
-import { roundedText } from "#src/costing/decimal.ts";
 import { minorDecimals } from "#src/costing/money.ts";
+import { roundedText } from "#src/costing/rounded-text.ts";
 
 /** How figures are written on pages: DESIGN's rules for money, counts and shares, in one place. */
 

@@ -20,13 +20,3 @@ export type Exact = Decimal;
 export function exact(value: string | number): Exact {
   return new Exact(value);
 }
-
-/**
- * Rounds once, halves away from zero, and writes exactly `places` decimals (section 1.3).
- *
- * @example roundedText("14.947083", 2) === "14.95"; roundedText("-0.125", 2) === "-0.13"
- */
-export function roundedText(value: string, places: number): string {
-  const rounded = exact(value).toDecimalPlaces(places, Decimal.ROUND_HALF_UP);
-  return (rounded.isZero() ? rounded.abs() : rounded).toFixed(places);
-}

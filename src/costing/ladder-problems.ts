@@ -1,4 +1,4 @@
-import { exact } from "./decimal.ts";
+import { grains } from "./grains.ts";
 import type { LadderTerms } from "./ladder.ts";
 
 export type LadderProblemCode =
@@ -65,6 +65,7 @@ type Break = LadderTerms["breaks"][number];
 
 /** Lots state a total, so their price per piece is compared. */
 function dearer(model: LadderTerms["priceModel"], before: Break, after: Break): boolean {
-  if (model !== "lots") return exact(after.price).gt(before.price);
-  return exact(after.price).times(before.quantity).gt(exact(before.price).times(after.quantity));
+  const [first, second] = [grains(before.price), grains(after.price)];
+  if (model !== "lots") return second > first;
+  return second * BigInt(before.quantity) > first * BigInt(after.quantity);
 }

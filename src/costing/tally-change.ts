@@ -1,6 +1,7 @@
-import { exact } from "./decimal.ts";
 import type { Figure } from "./figure.ts";
+import { grains, grainText } from "./grains.ts";
 import { minorDecimals } from "./money.ts";
+import { roundedText } from "./rounded-text.ts";
 import type { Tally } from "./tally.ts";
 
 /** The figures of the strip that can change. */
@@ -32,7 +33,7 @@ const BETTER: Record<TallyFigure, "less" | "more" | null> = {
 export function tallyChanges(before: Tally, after: Tally): TallyChange[] {
   return TALLY_FIGURES.flatMap((figure) => {
     const by = difference(before[figure], after[figure], after.currency, figure);
-    if (by === null || exact(by).isZero()) return [];
+    if (by === null || Number(by) === 0) return [];
     const went = by.startsWith("-") ? "less" : "more";
     const better = BETTER[figure];
     return [
@@ -44,5 +45,5 @@ export function tallyChanges(before: Tally, after: Tally): TallyChange[] {
 function difference(before: Figure, after: Figure, currency: string, figure: TallyFigure): string | null {
   if (!before.known || !after.known) return null;
   const places = figure === "evenAfter" ? 0 : minorDecimals(currency);
-  return exact(after.value).minus(before.value).toDecimalPlaces(places).toFixed(places);
+  return roundedText(grainText(grains(after.value) - grains(before.value)), places);
 }

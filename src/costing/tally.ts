@@ -1,7 +1,8 @@
 import type { Plan } from "#src/shapes/plan.ts";
 import { costRun } from "./cost-run.ts";
-import { exact } from "./decimal.ts";
 import type { Figure } from "./figure.ts";
+import { figurePer } from "./figure-of.ts";
+import { grains } from "./grains.ts";
 import { need } from "./run-needs.ts";
 import type { RunResult } from "./run-result.ts";
 
@@ -42,7 +43,7 @@ export function tallyOf(result: RunResult): Tally {
   };
 }
 
-/** `Σ kits of the edition × its price ÷ kits`, to 40 significant digits. */
+/** `Σ kits of the edition × its price ÷ kits`, to the nearest grain. */
 function meanPrice({ editions, kits }: RunResult): Figure {
   const sold = editions.filter((edition) => edition.kits > 0);
   const unpriced = sold.filter(({ sale }) => sale.price === null).map(({ id }) => ({ edition: id }));
@@ -60,8 +61,8 @@ function meanPrice({ editions, kits }: RunResult): Figure {
     };
   }
   const total = sold.reduce(
-    (sum, edition) => sum.plus(exact(edition.sale.price ?? "0").times(edition.kits)),
-    exact(0),
+    (sum, edition) => sum + grains(edition.sale.price ?? "0") * BigInt(edition.kits),
+    0n,
   );
-  return { known: true, value: total.div(kits).toFixed() };
+  return figurePer(total, kits, []);
 }

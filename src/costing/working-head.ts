@@ -1,6 +1,6 @@
-import { roundedText } from "./decimal.ts";
 import { scaled } from "./grains.ts";
 import { kitsWith } from "./kit-costs.ts";
+import { roundedText } from "./rounded-text.ts";
 import type { Head, HeadId } from "./run-result.ts";
 import type { WorkingContext } from "./working.ts";
 import { count, from, money, number, rate, type Sheet, type Step, step, summed } from "./working-lines.ts";

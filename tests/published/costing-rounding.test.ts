@@ -1,6 +1,7 @@
 import { describe, expect, test } from "vitest";
-import { exact, roundedText } from "#src/costing/decimal.ts";
+import { exact } from "#src/costing/decimal.ts";
 import { toMinor } from "#src/costing/money.ts";
+import { roundedText } from "#src/costing/rounded-text.ts";
 import { divideBigHalfAway, divideHalfUp } from "#src/costing/whole.ts";
 import { HALF_UP_CASES } from "./rounding-half-up.ts";
 

@@ -1,7 +1,7 @@
 import { countText, moneyText, unitPriceText } from "#src/components/amount-text.ts";
 import { type Column, Table } from "#src/components/islands/parts/Table.tsx";
-import { roundedText } from "#src/costing/decimal.ts";
 import { type NextBoards, nextBoards } from "#src/costing/next-boards.ts";
+import { roundedText } from "#src/costing/rounded-text.ts";
 import type { BoardsResult } from "#src/costing/run-result.ts";
 import type { Plan } from "#src/shapes/plan.ts";
 

@@ -1,8 +1,8 @@
 import { countText, moneyText, unitPriceText } from "#src/components/amount-text.ts";
 import { Chip } from "#src/components/islands/parts/Chip.tsx";
 import { CELL, HEAD_CELL, HEAD_ROW, NUMBER, rowLook, TABLE, TOTAL_ROW } from "#src/components/table-look.ts";
-import { roundedText } from "#src/costing/decimal.ts";
 import { orderPerKit, type RungOrder } from "#src/costing/order-curve.ts";
+import { roundedText } from "#src/costing/rounded-text.ts";
 import type { PartOrder } from "#src/costing/run-result.ts";
 
 export interface IfYouBuyProps {

@@ -1,6 +1,6 @@
 import { moneyText, unitPriceText } from "#src/components/amount-text.ts";
 import { CLASS_WORDS, CLASSES_IN_ORDER } from "#src/components/part-words.ts";
-import { roundedText } from "#src/costing/decimal.ts";
+import { roundedText } from "#src/costing/rounded-text.ts";
 import type { PartLine, RunResult } from "#src/costing/run-result.ts";
 import { compressDesignators } from "#src/partslist/designators.ts";
 import { lineFaults } from "#src/partslist/line-faults.ts";

@@ -8,8 +8,8 @@ import {
 import type { KitAddress } from "#src/components/islands/kit-address.ts";
 import { methodLinks } from "#src/components/method-links.ts";
 import type { Paper, PaperLine, PaperSub } from "#src/components/working-paper.ts";
-import { roundedText } from "#src/costing/decimal.ts";
 import { needWords } from "#src/costing/problem-words.ts";
+import { roundedText } from "#src/costing/rounded-text.ts";
 import type {
   FigureId,
   WorkingAmount,
