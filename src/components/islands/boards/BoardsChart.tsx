@@ -43,6 +43,9 @@ const TITLE = axisTitle("kits in the run");
 /** Names stand at the ends of their lines; a longer one is cut. */
 const NAME_MOST = 16;
 
+/** Lines that are not chosen are told apart by their dashes too. */
+const DASHES = [undefined, "10 4", "3 3", "12 4 3 4"];
+
 export function shortName(name: string): string {
   return name.length > NAME_MOST ? `${name.slice(0, NAME_MOST - 2)} …` : name;
 }
@@ -52,6 +55,7 @@ export default function BoardsChart(props: BoardsChartProps) {
   const { lines, points, span, run, width, height, narrow } = props;
   const top = boardsTop(props, run);
   const ticks = useStable(roundTicks(0, top, 6));
+  const others = lines.flatMap(({ id, chosen }) => (chosen ? [] : [id]));
   const names = nameWidth("", ...lines.map(({ name }) => shortName(name)));
   return (
     <LineChart
@@ -87,6 +91,7 @@ export default function BoardsChart(props: BoardsChartProps) {
             dataKey={({ each }: BoardsPoint) => each[id]}
             stroke={chosen ? INK : INK_2}
             strokeWidth={chosen ? COST_LINE.strokeWidth : 1.25}
+            strokeDasharray={chosen ? undefined : DASHES[others.indexOf(id) % DASHES.length]}
             shape={(line: object) => (
               <BrokenLine {...line} breaksAfter={(row) => (row as BoardsPoint).breaks[id] ?? false} />
             )}

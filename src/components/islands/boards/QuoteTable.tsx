@@ -33,14 +33,14 @@ const WIDE = "max-tablet:hidden";
 
 /** Board houses side by side for this run. */
 export function QuoteTable(props: QuoteTableProps) {
-  const { rows, chosen, canChoose, canChange, onChoose } = props;
+  const { rows, chosen, canChoose, onChoose } = props;
   const heads = [
     { head: "Board house", look: "" },
     { head: "You order", look: WIDE },
     { head: "Boards", look: `${NUMBER} ${WIDE}` },
     { head: "Landed", look: NUMBER },
     { head: "Each", look: NUMBER },
-    { head: "Made and sent", look: WIDE },
+    { head: "Made and sent", look: `whitespace-nowrap ${WIDE}` },
     { head: "Board", look: WIDE },
   ];
   return (
@@ -56,17 +56,12 @@ export function QuoteTable(props: QuoteTableProps) {
           <th scope="col" className={`${HEAD_CELL} ${WIDE}`}>
             <span className="heard-only">State</span>
           </th>
-          {canChange && (
-            <th scope="col" className={`${HEAD_CELL} ${WIDE}`}>
-              <span className="heard-only">Change</span>
-            </th>
-          )}
         </tr>
       </thead>
       <tbody>
         {canChoose && (
           <tr className={rowLook("ordinary")}>
-            <td colSpan={9} className={CELL}>
+            <td colSpan={8} className={CELL}>
               <label htmlFor="quote-none" className="inline-flex min-h-10 items-center gap-3">
                 <RadioDot
                   id="quote-none"
@@ -100,19 +95,21 @@ function Row({
   const opens = useOpens();
   const mark = quoteMark(quote, result, today);
   const state = (
-    <Chip kind={mark.kind} className="align-middle">
-      {mark.word}
-    </Chip>
-  );
-  const change = (
-    <QuietButton onClick={() => onEdit(quote)} aria-label={`Change the quote of ${quote.boardHouse}`}>
-      Change
-    </QuietButton>
+    <>
+      <Chip kind={mark.kind} className="align-middle">
+        {mark.word}
+      </Chip>
+      {canChange && (
+        <QuietButton onClick={() => onEdit(quote)} aria-label={`Change the quote of ${quote.boardHouse}`}>
+          Change
+        </QuietButton>
+      )}
+    </>
   );
   return (
-    <tr data-chosen={result.chosen || undefined} className={rowLook("ordinary", result.chosen)}>
+    <tr data-chosen={result.chosen || undefined} className={rowLook("two-lines", result.chosen)}>
       <th scope="row" className={`${CELL} ${result.chosen ? "font-semibold" : "font-normal"}`}>
-        <span className="flex items-center gap-3">
+        <span className="flex items-center gap-3 tablet:whitespace-nowrap">
           {canChoose && (
             <RadioDot
               name="quote"
@@ -123,10 +120,7 @@ function Row({
           )}
           {quote.boardHouse}
         </span>
-        <span className="mt-1 flex flex-wrap items-center gap-x-4 pl-[34px] tablet:hidden">
-          {state}
-          {canChange && change}
-        </span>
+        <span className="mt-1 flex flex-wrap items-center gap-x-4 pl-[34px] tablet:hidden">{state}</span>
       </th>
       <td className={`${CELL} ${WIDE}`}>{orderWords(result)}</td>
       <td className={`${CELL} ${NUMBER} ${WIDE}`}>
@@ -149,9 +143,10 @@ function Row({
       <td className={`${CELL} ${WIDE}`}>
         {quote.leadTimeDays === null ? "not known" : spanText(quote.leadTimeDays)}
       </td>
-      <td className={`${CELL} text-ink-2 ${WIDE}`}>{boardWords(quote)}</td>
-      <td className={`${CELL} ${WIDE}`}>{state}</td>
-      {canChange && <td className={`${CELL} ${WIDE}`}>{change}</td>}
+      <td className={`${CELL} type-label text-ink-2 ${WIDE}`}>{boardWords(quote)}</td>
+      <td className={`${CELL} ${WIDE}`}>
+        <span className="flex flex-col items-start gap-1">{state}</span>
+      </td>
     </tr>
   );
 }

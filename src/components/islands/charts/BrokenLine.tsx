@@ -14,6 +14,7 @@ export interface BrokenLineProps {
   points?: readonly DrawnPoint[];
   stroke?: string;
   strokeWidth?: number | string;
+  strokeDasharray?: string | number;
   /** Whether the line breaks after a row of the data; left out, it never does. */
   breaksAfter?: (row: object) => boolean;
 }
@@ -44,7 +45,13 @@ function paths(points: readonly (Placed | null)[]): { line: string; steps: [Plac
 }
 
 /** A line that breaks where cost goes up in a step, its two ends joined by a fine dashed one. */
-export function BrokenLine({ points = [], stroke, strokeWidth, breaksAfter }: BrokenLineProps) {
+export function BrokenLine({
+  points = [],
+  stroke,
+  strokeWidth,
+  strokeDasharray,
+  breaksAfter,
+}: BrokenLineProps) {
   const { line, steps } = paths(placed(points, breaksAfter));
   const plot = usePlotArea();
   const clip = useId();
@@ -58,7 +65,7 @@ export function BrokenLine({ points = [], stroke, strokeWidth, breaksAfter }: Br
       {steps.map(([from, to]) => (
         <path key={from.x} d={`M${from.x} ${from.y}L${to.x} ${to.y}`} fill="none" {...STEP_SEGMENT} />
       ))}
-      <path d={line} fill="none" stroke={stroke} strokeWidth={strokeWidth} strokeLinejoin="round" />
+      <path d={line} fill="none" {...{ stroke, strokeWidth, strokeDasharray }} strokeLinejoin="round" />
     </g>
   );
 }

@@ -18,6 +18,6 @@ export function pageLink(address: KitAddress, page: SourcePage): { label: string
 /** Where a missing thing is entered; currency rates belong to the workshop. */
 export function needLink(address: KitAddress, need: { code: NeedCode; page: SourcePage }): string {
   return need.code === "no-rate"
-    ? `/workshops/${address.workshop}/suppliers`
+    ? `/workshops/${address.workshop}/suppliers#rates`
     : pageLink(address, need.page).href;
 }

@@ -10,8 +10,9 @@ import type { Plan } from "#src/shapes/plan.ts";
 function place(address: KitAddress, { at }: Problem): { label: string; href: string } | null {
   if (at.part) return { label: "Offers", href: kitPath(address, `/offers/${at.part}`) };
   if (at.quote) return { label: "Boards", href: kitPath(address, "/boards") };
-  if (at.supplier || at.currency)
-    return { label: "Suppliers", href: `/workshops/${address.workshop}/suppliers` };
+  const suppliers = `/workshops/${address.workshop}/suppliers`;
+  if (at.supplier) return { label: "Suppliers", href: `${suppliers}/${at.supplier}` };
+  if (at.currency) return { label: "Currency rates", href: `${suppliers}#rates` };
   return null;
 }
 
