@@ -146,7 +146,7 @@ function Rule() {
   const ticks = Array.from({ length: 269 }, (_, mm) => mm);
   return (
     <g>
-      <rect width={280} height={13} strokeWidth={0.35} className="fill-tin stroke-outline" />
+      <rect width={280} height={13} strokeWidth={0.35} className="fill-tin stroke-edge" />
       <path
         d={ticks.map((mm) => `M${6 + mm} 0v${mm % 10 === 0 ? 5 : mm % 5 === 0 ? 3.2 : 2}`).join("")}
         strokeWidth={0.2}

@@ -27,7 +27,7 @@ export function Board({ board }: { board: BoardPicture | null }) {
 /** The board as part of a larger drawing in millimetres, at its upper left corner. */
 export function BoardShape({ board }: { board: BoardPicture }) {
   const { shape, widthMm, heightMm, marks = {} } = board;
-  const outline = { strokeWidth: 0.35, className: "fill-mask stroke-outline" };
+  const outline = { strokeWidth: 0.35, className: "fill-mask stroke-edge" };
   return (
     <g>
       {marks.outline ? (

@@ -46,7 +46,7 @@ export function Diode({ power, length = 30 }: { power?: boolean; length?: number
           height={2.7}
           rx={0.3}
           {...line}
-          className="fill-chip-body stroke-outline"
+          className="fill-chip-body stroke-edge"
         />
       ) : (
         <rect
@@ -135,18 +135,15 @@ export function Capacitor({ marking, film, short }: { marking: string; film?: bo
     <g>
       <path d={`M-2.5 ${foot}V${foot + (short ? 6 : 13)}M2.5 ${foot}V${foot + (short ? 6 : 13)}`} {...lead} />
       {film ? (
-        <rect
-          x={-3.6}
-          width={7.2}
-          height={6.6}
-          rx={0.5}
-          {...line}
-          className="fill-copper-wash stroke-outline"
-        />
+        <rect x={-3.6} width={7.2} height={6.6} rx={0.5} {...line} className="fill-copper-wash stroke-edge" />
       ) : (
         <circle cy={3} r={3} fill="#e0b56c" strokeWidth={0.3} className="stroke-outline" />
       )}
-      <text y={film ? 4 : 3.6} textAnchor="middle" className="fill-outline text-[1.7px] font-semibold">
+      <text
+        y={film ? 4 : 3.6}
+        textAnchor="middle"
+        className={`text-[1.7px] font-semibold ${film ? "fill-ink" : "fill-outline"}`}
+      >
         {marking}
       </text>
     </g>
@@ -159,7 +156,7 @@ export function Transistor({ short }: { short?: boolean }) {
   return (
     <g>
       <path d={`M-1.27 4.6V${foot}M0 4.6V${foot}M1.27 4.6V${foot}`} {...lead} strokeWidth={0.45} />
-      <rect x={-2.4} width={4.8} height={4.9} rx={0.4} {...line} className="fill-chip-body stroke-outline" />
+      <rect x={-2.4} width={4.8} height={4.9} rx={0.4} {...line} className="fill-chip-body stroke-edge" />
     </g>
   );
 }
@@ -176,7 +173,7 @@ export function DipChip({ marking, pins = 14 }: { marking: string; pins?: number
       <path
         d={`M.3 0H${across - 0.3}Q${across} 0 ${across} .3V6.1Q${across} 6.4 ${across - 0.3} 6.4H.3Q0 6.4 0 6.1V4.2A1 1 0 0 0 0 2.2V.3Q0 0 .3 0Z`}
         {...line}
-        className="fill-chip-body stroke-outline"
+        className="fill-chip-body stroke-edge"
       />
       <circle cx={2} cy={5.1} r={0.4} className="fill-silk" />
       <text x={across / 2} y={3.9} textAnchor="middle" className="fill-silk text-[2px] font-semibold">
@@ -192,8 +189,8 @@ export function Socket({ pins = 14 }: { pins?: number }) {
   const feet = Array.from({ length: pins / 2 }, (_, place) => 2.02 + place * 2.54);
   return (
     <g>
-      <rect width={across} height={10.2} {...line} className="fill-tin stroke-outline" />
-      <rect x={3} y={3.2} width={across - 6} height={3.8} {...line} className="fill-sheet stroke-outline" />
+      <rect width={across} height={10.2} {...line} className="fill-tin stroke-edge" />
+      <rect x={3} y={3.2} width={across - 6} height={3.8} {...line} className="fill-sheet stroke-edge" />
       {feet.flatMap((x) => [
         <circle
           key={`${x}a`}
@@ -221,7 +218,7 @@ export function LightSensor({ short }: { short?: boolean }) {
   return (
     <g>
       <path d={`M-1.7 2V${short ? 10 : 14.8}M1.7 2V${short ? 10 : 14.8}`} {...lead} strokeWidth={0.4} />
-      <circle r={2.55} {...line} className="fill-copper-wash stroke-outline" />
+      <circle r={2.55} {...line} className="fill-copper-wash stroke-edge" />
       <path
         d="M-1.6-1.1H1.5V-.2H-1.5V.7H1.6"
         fill="none"
@@ -243,10 +240,10 @@ export function Trimmer() {
         height={6.2}
         rx={0.3}
         {...line}
-        className="fill-frosted stroke-outline"
+        className="fill-frosted stroke-edge"
       />
-      <circle r={2} {...line} className="fill-sheet stroke-outline" />
-      <path d="M-1.2-1.2L1.2 1.2" strokeWidth={0.6} className="stroke-outline" />
+      <circle r={2} {...line} className="fill-sheet stroke-edge" />
+      <path d="M-1.2-1.2L1.2 1.2" strokeWidth={0.6} className="stroke-edge" />
     </g>
   );
 }
@@ -256,7 +253,7 @@ export function SlideSwitch() {
   return (
     <g>
       <path d="M-2.54 2.2V4.9M0 2.2V4.9M2.54 2.2V4.9" {...lead} />
-      <rect x={-1.1} y={-4.3} width={2.3} height={2.6} {...line} className="fill-chip-body stroke-outline" />
+      <rect x={-1.1} y={-4.3} width={2.3} height={2.6} {...line} className="fill-chip-body stroke-edge" />
       <rect x={-4.3} y={-2.2} width={8.6} height={4.4} {...line} className="fill-tin-metal stroke-outline" />
     </g>
   );
@@ -266,7 +263,7 @@ export function SlideSwitch() {
 export function ScrewTerminal() {
   return (
     <g>
-      <rect x={-5.1} y={-4} width={10.2} height={8} rx={0.3} {...line} className="fill-mask stroke-outline" />
+      <rect x={-5.1} y={-4} width={10.2} height={8} rx={0.3} {...line} className="fill-mask stroke-edge" />
       {[-2.54, 2.54].map((x) => (
         <g key={x}>
           <circle cx={x} r={1.8} {...line} className="fill-tin-metal stroke-outline" />
@@ -291,9 +288,9 @@ export function BatteryHolder() {
         d="M58 43C63 45.5 66 42 71 42.2S79 48 86 47.3"
         fill="none"
         strokeWidth={0.8}
-        className="stroke-outline"
+        className="stroke-edge"
       />
-      <rect width={58.2} height={48} rx={1.5} {...line} className="fill-tin stroke-outline" />
+      <rect width={58.2} height={48} rx={1.5} {...line} className="fill-tin stroke-edge" />
       {[2.4, 17, 31.7].map((y, place) => (
         <g key={y}>
           <rect
@@ -303,7 +300,7 @@ export function BatteryHolder() {
             height={13.9}
             rx={6.9}
             {...line}
-            className="fill-sheet stroke-outline"
+            className="fill-sheet stroke-edge"
           />
           <path
             d={place === 1 ? "M3.6 20.5Q5.4 24 3.6 27.4" : `M54.4 ${y + 3.5}Q52.6 ${y + 7} 54.4 ${y + 10.4}`}
@@ -315,7 +312,7 @@ export function BatteryHolder() {
             d={`M${place === 1 ? 48.5 : 5} ${y + 7}h3M${place === 1 ? 50 : 6.5} ${y + 5.5}v3M${place === 1 ? 5 : 47} ${y + 7}h3`}
             fill="none"
             strokeWidth={0.3}
-            className="stroke-outline"
+            className="stroke-edge"
           />
         </g>
       ))}
@@ -328,7 +325,7 @@ export function Disc({ across = 64 }: { across?: number }) {
   const r = across / 2;
   return (
     <g>
-      <circle r={r} {...line} className="fill-frosted stroke-outline" />
+      <circle r={r} {...line} className="fill-frosted stroke-edge" />
       <circle r={r - 1.6} fill="none" strokeWidth={0.2} className="stroke-tin-metal" />
       <path
         d={`M${-r * 0.62}-${r * 0.45}A${r * 0.78} ${r * 0.78} 0 0 1-${r * 0.1}-${r * 0.77}`}
@@ -345,13 +342,13 @@ export function Disc({ across = 64 }: { across?: number }) {
 export function Booklet() {
   return (
     <g>
-      <rect width={74} height={105} {...line} className="fill-sheet stroke-outline" />
+      <rect width={74} height={105} {...line} className="fill-sheet stroke-edge" />
       <path d="M2.4 0V105" strokeWidth={0.4} className="stroke-tin-metal" />
       <path d="M9 13H49V15.2H9ZM9 20.1H35V22.3H9Z" className="fill-ink" />
       <path
         d="M37 34C42 44 51 51 51 60A14 14 0 0 1 23 60C23 51 32 44 37 34Z"
         {...line}
-        className="fill-petrol-wash stroke-outline"
+        className="fill-petrol-wash stroke-edge"
       />
       <circle cx={37} cy={61} r={5.4} {...line} className="fill-lens stroke-outline" />
       <path d="M9 88H59M9 92H53M9 96H37" strokeWidth={0.5} className="stroke-rule-2" />
