@@ -1,3 +1,4 @@
+import { evenRuns } from "./even-runs.ts";
 import { grainShare, grainText, ONE } from "./grains.ts";
 import { KEPT_NEEDS, USED_NEEDS } from "./run-sheet.ts";
 import type { BreakEven, Crossing } from "./sweep-result.ts";
@@ -13,23 +14,16 @@ import type { Swept } from "./swept.ts";
 export function breakEvenOf(swept: Swept, planned: number): BreakEven {
   const upTo = knownUpTo(swept);
   const profit = (kits: number) => (swept.kept[kits] as bigint) - (swept.used[kits] as bigint);
-  const crossings: Crossing[] = [];
-  let first: number | null = null;
-  let safe: number | null = null;
-  for (let kits = 1; kits <= upTo; kits += 1) {
-    const pays = profit(kits) >= 0n;
-    if (pays && first === null) first = kits;
-    safe = pays ? (safe ?? kits) : null;
-    if (kits > 1 && pays !== profit(kits - 1) >= 0n) {
-      crossings.push({
-        kits,
-        way: pays ? "up" : "down",
-        profitBefore: grainText(profit(kits - 1)),
-        profit: grainText(profit(kits)),
-        changes: swept.changesAt(kits),
-      });
-    }
-  }
+  const { turns, first, safe } = evenRuns(profit, upTo);
+  const crossings = turns.map(
+    ({ kits, way }): Crossing => ({
+      kits,
+      way,
+      profitBefore: grainText(profit(kits - 1)),
+      profit: grainText(profit(kits)),
+      changes: swept.changesAt(kits),
+    }),
+  );
   return { known: upTo > 0, crossings, first, safe, upTo, marginOfSafety: marginOfSafety(planned, safe) };
 }
 

@@ -1,8 +1,8 @@
 import type { Plan, PlanEdition, PlanSale } from "#src/shapes/plan.ts";
 import { grains, ONE, scaled } from "./grains.ts";
 import { minorDecimals } from "./money.ts";
+import { feeOn, taxInside } from "./price/charged.ts";
 import type { NeedCode } from "./problem.ts";
-import { divideBigHalfAway } from "./whole.ts";
 
 /** One sale in grains of the plan's currency; null where a term it needs is not known. */
 export interface Sale {
@@ -35,31 +35,13 @@ export function saleOf(plan: Plan, edition: Pick<PlanEdition, "price">): Sale {
   const minorUnit = ONE / 10n ** BigInt(minorDecimals(plan.currency));
   const charged =
     edition.price === null || postageCharged === null ? null : grains(edition.price) + grains(postageCharged);
-  const taxInside = charged === null || taxRate === null ? null : taxIn(charged, taxRate, minorUnit);
+  const tax = charged === null || taxRate === null ? null : taxInside(charged, scaled(taxRate, 6), minorUnit);
   const fee =
     charged === null || feeRate === null || feeFixed === null
       ? null
-      : feeOn(charged, feeRate, feeFixed, minorUnit);
+      : feeOn(charged, scaled(feeRate, 6), grains(feeFixed), minorUnit);
   const paid = postagePaid === null ? null : grains(postagePaid);
   const kept =
-    charged === null || taxInside === null || fee === null || paid === null
-      ? null
-      : charged - taxInside - fee - paid;
-  return { charged, taxInside, fee, postagePaid: paid, kept };
-}
-
-/** Tax inside a sum that includes it, `sum · t/(1 + t)`, rounded to the minor unit. */
-function taxIn(sum: bigint, rate: string, unit: bigint): bigint {
-  const tax = scaled(rate, 6);
-  return toUnit(sum * tax, 1_000_000n + tax, unit);
-}
-
-/** Fee on a sum, `f · sum + k`, rounded to the minor unit. */
-function feeOn(sum: bigint, rate: string, fixed: string, unit: bigint): bigint {
-  return toUnit(sum * scaled(rate, 6) + grains(fixed) * 1_000_000n, 1_000_000n, unit);
-}
-
-/** `amount ÷ divisor`, rounded once to whole units, halves away from zero. */
-function toUnit(amount: bigint, divisor: bigint, unit: bigint): bigint {
-  return divideBigHalfAway(amount, divisor * unit) * unit;
+    charged === null || tax === null || fee === null || paid === null ? null : charged - tax - fee - paid;
+  return { charged, taxInside: tax, fee, postagePaid: paid, kept };
 }

@@ -20,11 +20,18 @@ export function soldToPayFor(prepared: PreparedPlan, swept: Swept, known: boolea
   return answers;
 }
 
-/** Highest takings from at most m sales: by the mix one sale more can bring less, where an edition loses. */
 function highestTakings(prepared: PreparedPlan, to: number): bigint[] | null {
+  return highestOf((sold) => keptFromSales(prepared, splitKits(sold, prepared.weights)), to);
+}
+
+/**
+ * Highest takings from at most 0, 1 … `to` sales, where `brings` is what so many bring: by the mix one
+ * sale more can bring less, where an edition loses. Null where takings are not known.
+ */
+export function highestOf(brings: (sold: number) => bigint | null, to: number): bigint[] | null {
   const highest: bigint[] = [0n];
   for (let sold = 1; sold <= to; sold += 1) {
-    const kept = keptFromSales(prepared, splitKits(sold, prepared.weights));
+    const kept = brings(sold);
     if (kept === null) return null;
     const before = highest[sold - 1] as bigint;
     highest.push(kept > before ? kept : before);
@@ -42,7 +49,12 @@ export function soldToPay(prepared: PreparedPlan, cost: bigint, kits: number): n
   return highest === null ? null : leastSold(highest, cost, kits);
 }
 
-function leastSold(highest: readonly bigint[], cost: bigint, kits: number): number | null {
+/**
+ * Least number sold of `kits` made that pays for `cost`; null: not even all of them.
+ *
+ * @example leastSold([0n, 10n, 20n], 15n, 2) === 2
+ */
+export function leastSold(highest: readonly bigint[], cost: bigint, kits: number): number | null {
   if ((highest[kits] as bigint) < cost) return null;
   let [low, high] = [0, kits];
   while (low < high) {

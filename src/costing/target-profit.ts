@@ -1,5 +1,5 @@
 import { exact } from "./decimal.ts";
-import type { SweepResult } from "./sweep-result.ts";
+import type { SweepColumns } from "./sweep-result.ts";
 
 /** Runs that reach a profit: the first that does, and the one from which every larger one does. */
 export interface TargetRuns {
@@ -18,12 +18,22 @@ export function profitBeforeTax(afterTax: string, taxRate: string): string {
 }
 
 /**
+ * What a profit leaves after tax: `profit × (1 − rate)`, exact; a loss is not taxed and stays as it is.
+ *
+ * @example profitAfterTax("900000", "0.4") === "540000"
+ */
+export function profitAfterTax(profit: string, taxRate: string): string {
+  const before = exact(profit);
+  return before.isNegative() ? before.toFixed() : before.times(exact(1).minus(taxRate)).toFixed();
+}
+
+/**
  * Run sizes with at least a target profit before tax, from a sweep; null: none up to its end, or
  * profit is not known. As with break-even, costs go up in steps, so a larger run may miss it again.
  *
  * @example fixed 50 000, price 250, variable 150: runsForProfit(sweep, "30000").first === 800
  */
-export function runsForProfit(sweep: SweepResult, target: string): TargetRuns {
+export function runsForProfit(sweep: { columns: Pick<SweepColumns, "profit"> }, target: string): TargetRuns {
   const wanted = exact(target);
   const { profit } = sweep.columns;
   const end = profit.indexOf(null);
