@@ -1,5 +1,5 @@
 import type { Plan } from "#src/shapes/plan.ts";
-import type { CautionCode, Need, NeedCode, Place, Problem } from "./problem.ts";
+import type { AimProblem, CautionCode, Need, NeedCode, Place, Problem } from "./problem.ts";
 
 /** The one table that turns codes of the reckoning into words; what a second language would replace. */
 
@@ -24,6 +24,11 @@ const SHORT: Record<NeedCode, (n: number, codes: string) => string> = {
   "no-fixed-fee": () => "needs the fee per order",
   "no-postage-charged": () => "needs the postage charged",
   "no-postage-paid": () => "needs the postage paid",
+  "no-order-packing": () => "needs the packing of an order",
+  "no-other-cost": () => "needs what else selling costs",
+  "no-order-minutes": () => "needs the time to sell",
+  "not-sold": () => "sold nowhere",
+  "costs-nothing": () => "costs nothing",
   "no-work": () => "needs work",
   "not-in-run": () => "not in this run",
   "nothing-made": () => "nothing to make",
@@ -88,6 +93,11 @@ const SENTENCES: Record<
   "no-fixed-fee": () => "The fixed fee per order is not set. Write it; 0 if there is none.",
   "no-postage-charged": () => "The postage charged to the buyer is not set. Write it; 0 if it is free.",
   "no-postage-paid": () => "The postage you pay is not set. Write it; 0 if you pay none.",
+  "no-order-packing": () => "What the packing of an order costs is not known. Write it in; 0 if nothing.",
+  "no-other-cost": () => "What else selling costs is not known. Write it in; 0 if nothing.",
+  "no-order-minutes": () => "How long it takes to sell and send an order is not known. Write the minutes.",
+  "not-sold": ({ edition }) => `No channel sells ${edition}. Let one sell it, with a share above 0.`,
+  "costs-nothing": ({ edition }) => `${edition} costs nothing in this run, so there is no mark-up on it.`,
   "no-work": () => "No task has any minutes, so nothing is earned per hour. Add a task.",
   "not-in-run": ({ edition }) => `${edition} has no kits in this run.`,
   "nothing-made": () => "Nothing of it is made in this run.",
@@ -122,6 +132,27 @@ const SENTENCES: Record<
   "pinned-quote-unusable": ({ quote }) =>
     `The quote of ${quote} is chosen and cannot be used. Choose another.`,
 };
+
+/** Why no price does it, and what would help. `most`: a share as text. */
+const NO_PRICE: Record<AimProblem["code"], (edition: string, most: string) => string> = {
+  "nothing-kept": (edition) =>
+    `Tax and fees take what a higher price of ${edition} brings, so no price reaches this. Lower the fee.`,
+  "margin-too-high": (edition, most) =>
+    `After tax and fees at most ${most} of a higher price of ${edition} is kept, so no price reaches this margin. Aim lower.`,
+  "price-fixed": (edition) =>
+    `Every channel has its own price for ${edition}, so its list price changes nothing. Clear one of them.`,
+  "price-too-large": (edition) => `${edition} would need a price too large to write. Aim lower.`,
+  "no-such-ending": () => "The currency has no amount with this ending. Choose another.",
+};
+
+/**
+ * Why no price reaches an aim, as a sentence. `most` is written by the caller, as shares are on the page.
+ *
+ * @example aimSentence(problem, "Full kit", "95.00 %") for margin-too-high
+ */
+export function aimSentence({ code }: AimProblem, edition: string, most = ""): string {
+  return NO_PRICE[code](edition, most);
+}
 
 /**
  * Why a figure is not known, for its place: the first need, and how many more there are.

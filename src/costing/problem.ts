@@ -24,6 +24,11 @@ export const NEED_CODES = [
   "no-fixed-fee",
   "no-postage-charged",
   "no-postage-paid",
+  "no-order-packing",
+  "no-other-cost",
+  "no-order-minutes",
+  "not-sold",
+  "costs-nothing",
   "no-work",
   "not-in-run",
   "nothing-made",
@@ -59,6 +64,7 @@ export interface Place {
   quote?: string;
   edition?: string;
   packing?: string;
+  channel?: string;
   currency?: string;
 }
 
@@ -81,6 +87,24 @@ export interface Need {
   code: NeedCode;
   at: Place[];
   page: SourcePage;
+}
+
+/** Why no price reaches an aim; which input stands in the way. */
+export const AIM_PROBLEM_CODES = [
+  "nothing-kept",
+  "margin-too-high",
+  "price-fixed",
+  "price-too-large",
+  "no-such-ending",
+] as const;
+
+/** `most`: no margin comes up to this share. `channel` null: over all channels. */
+export interface AimProblem {
+  code: (typeof AIM_PROBLEM_CODES)[number];
+  /** The field in the way: of the aim, the ending asked for, or of the channels. */
+  field: "aim" | "ending" | "feeRate" | "ownPrices";
+  at: { edition: string; channel: string | null };
+  most?: string;
 }
 
 /** Pages of a kit on which an input stands. */
