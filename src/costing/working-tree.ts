@@ -1,3 +1,4 @@
+import type { PriceFigureId } from "./price/price-figures.ts";
 import type { Need, SourcePage } from "./problem.ts";
 import type { HeadId } from "./run-result.ts";
 
@@ -25,7 +26,8 @@ export type FigureId =
   | `task:${string}`
   | `sale:${string}`
   | `edition:${string}`
-  | `crossing:${number}`;
+  | `crossing:${number}`
+  | PriceFigureId;
 
 export type WorkingAmount =
   /** Exact decimal text; shown to the minor unit, or to `places` where a unit price needs more. */

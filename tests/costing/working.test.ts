@@ -1,49 +1,14 @@
-import { Decimal } from "decimal.js";
 import fc from "fast-check";
 import { describe, expect, test, vi } from "vitest";
 import { figuresOf, reckoned, working, workingOf } from "#src/costing/working.ts";
-import type { WorkingAmount, WorkingTree } from "#src/costing/working-tree.ts";
+import type { WorkingTree } from "#src/costing/working-tree.ts";
 import { bigPlan } from "#tests/bench/big-plan.ts";
 import { MANY_CASES } from "#tests/support/slow.ts";
 import { edition, frozen, offer, part, plan, quote, supplier } from "./plans.ts";
 import { completePlan } from "./random-plans.ts";
+import { redo } from "./redo-working.ts";
 
 vi.setConfig({ testTimeout: MANY_CASES });
-
-const D = Decimal.clone({ precision: 80, rounding: Decimal.ROUND_HALF_UP });
-
-function figureIn(amount: WorkingAmount | null): Decimal | null {
-  return amount === null || amount.kind === "not-known" || amount.kind === "words"
-    ? null
-    : new D(amount.value);
-}
-
-/** Redoes a working by hand: carries each sum down and demands that every "=" says what comes out. */
-function redo(tree: WorkingTree): number {
-  let carried: Decimal | null = null;
-  let results = 0;
-  for (const line of tree.lines) {
-    const figure = figureIn(line.amount);
-    if (figure === null) {
-      if (line.amount !== null) carried = null;
-      continue;
-    }
-    if (line.sign === null) carried = figure;
-    else if (carried === null) continue;
-    else if (line.sign === "+") carried = carried.plus(figure);
-    else if (line.sign === "−") carried = carried.minus(figure);
-    else if (line.sign === "×") carried = carried.times(figure);
-    else if (line.sign === "÷") carried = carried.div(figure);
-    else {
-      const sum: Decimal = line.rounds === null ? carried : carried.toDecimalPlaces(line.rounds);
-      const where = `${tree.figure}, line ${line.letter} ${line.label}: ${sum.toFixed()} and ${figure.toFixed()}`;
-      expect(sum.minus(figure).abs().lt("1e-19"), where).toBe(true);
-      carried = figure;
-      results += 1;
-    }
-  }
-  return results;
-}
 
 describe("working", () => {
   test("every figure of a run can be redone by hand from its lines", () => {
