@@ -81,9 +81,11 @@ function Reckoned({ address, held, may }: ReckonedProps) {
         )}
         <Evidence address={address} plan={plan} may={may} />
         <Inputs address={address} held={held} run={run} may={may} />
-        <Pair>
-          <PlanFile address={address} />
-        </Pair>
+        <div data-screen-only>
+          <Pair>
+            <PlanFile address={address} />
+          </Pair>
+        </div>
       </div>
     </>
   );

@@ -45,7 +45,7 @@ export function LadderSection({ supply, line, shown }: LadderSectionProps) {
         ) : (
           <div className="flex flex-wrap items-center justify-between gap-x-8 gap-y-6">
             <LadderDrawing rungs={rungs} need={line.toBuy} order={order} currency={offer.currency} />
-            <div className="w-full grow desktop:w-auto desktop:max-w-[320px]">
+            <div className="w-full grow tablet:w-auto tablet:max-w-[320px]">
               {line.toBuy > 0 && (
                 <IfYouBuy
                   {...{ rungs, order }}

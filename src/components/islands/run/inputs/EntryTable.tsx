@@ -111,7 +111,7 @@ function AddRow({ add, onAdd }: { add: string; onAdd: (name: string) => Promise<
     void put();
   };
   return (
-    <div className="mt-3 flex max-w-md items-end gap-3">
+    <div className="mt-3 flex max-w-md items-end gap-3" data-screen-only>
       <TextField
         label={add}
         labelHidden
