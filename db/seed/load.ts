@@ -1,4 +1,3 @@
-import { createHash } from "node:crypto";
 import { boardQuoteBreaks, boardQuotes } from "#db/schema/boards.ts";
 import { kitGuests } from "#db/schema/guests.ts";
 import { editions, kits } from "#db/schema/kits.ts";
@@ -11,20 +10,12 @@ import type { Db } from "../client.ts";
 import { MARKS } from "./board-marks.ts";
 import { KITS } from "./kits.ts";
 import { PEOPLE, RATES, SUPPLIERS, WORKSHOP } from "./marsh-lane.ts";
+import { loadNews } from "./news.ts";
 import { PARTS } from "./parts.ts";
 import type { SeedKit, SeedOffer, SeedPart, SeedQuote, SeedSupplier } from "./seed-data.ts";
+import { seedId, WORKSHOP_ID } from "./seed-id.ts";
 
 const DAY = 24 * 60 * 60 * 1000;
-const ALPHABET = "abcdefghijklmnopqrstuvwxyz234567";
-
-/** An id that is the same each time for the same words, so that links into the demonstration keep. */
-export function seedId(...words: string[]): string {
-  const bytes = createHash("sha256").update(words.join("\n")).digest().subarray(0, 16);
-  return [...bytes].map((byte) => ALPHABET[byte % 32]).join("");
-}
-
-export const WORKSHOP_ID = seedId("workshop", WORKSHOP.name);
-
 function dayFrom(now: number, days: number): string {
   return new Date(now + days * DAY).toISOString().slice(0, 10);
 }
@@ -303,4 +294,5 @@ export function loadDemonstration(db: Db, hashes: PasswordHashes, now: number): 
   for (const part of PARTS) loadPart(db, part, now);
   for (const kit of KITS) loadKit(db, kit, now);
   loadGuests(db);
+  loadNews(db, now);
 }

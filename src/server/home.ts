@@ -1,33 +1,30 @@
 import type { Db } from "#db/client.ts";
 import { can } from "#src/access.ts";
-import type { Problem } from "#src/costing/problem.ts";
 import { type Tally, tallyOf } from "#src/costing/tally.ts";
+import type { OpenThing } from "#src/costing/to-settle.ts";
 import type { Role } from "#src/shapes/limits.ts";
 import type { Plan } from "#src/shapes/plan.ts";
 import { kitState } from "./kit-state.ts";
-import { type ActivityEntry, activitySince } from "./store/activity.ts";
+import { type NewsEntry, newsFor } from "./news.ts";
 import type { KitRow } from "./store/kit.ts";
 import type { WorkshopRow } from "./store/membership.ts";
 import type { UserRow } from "./store/session.ts";
-import { type KitStop, kitStops, waitingProblems } from "./trail.ts";
+import { type KitStop, kitStops, waitingThings } from "./trail.ts";
 import { visibleKits } from "./visible-kits.ts";
-
-const DAY = 24 * 60 * 60 * 1000;
-const NEWS_MOST = 8;
 
 /** A kit as the home page shows it; figures only for a role that may see money. */
 export interface HomeKit {
   kit: KitRow;
   empty: boolean;
   stops: KitStop[];
-  money: { tally: Tally; plan: Plan; waiting: Problem[] } | null;
+  money: { tally: Tally; plan: Plan; waiting: OpenThing[] } | null;
 }
 
 export interface Home {
   kits: HomeKit[];
   closed: KitRow[];
   /** What other people did since yesterday, the newest first. */
-  news: ActivityEntry[];
+  news: NewsEntry[];
 }
 
 function homeKit(db: Db, workshop: WorkshopRow, role: Role, kit: KitRow, asOf: string): HomeKit {
@@ -35,9 +32,9 @@ function homeKit(db: Db, workshop: WorkshopRow, role: Role, kit: KitRow, asOf: s
   const { plan, result } = state;
   return {
     kit,
-    empty: state.lines === 0,
+    empty: plan.lines === 0,
     stops: kitStops(role, state),
-    money: can(role, "see-money") ? { tally: tallyOf(result), plan, waiting: waitingProblems(state) } : null,
+    money: can(role, "see-money") ? { tally: tallyOf(result), plan, waiting: waitingThings(state) } : null,
   };
 }
 
@@ -51,13 +48,12 @@ export function home(
   asOf: string,
 ): Home {
   const kits = visibleKits(db, workshop.id, role, user.id);
-  const ids = kits.map(({ id }) => id);
-  const news = can(role, "see-money") ? activitySince(db, workshop.id, now - DAY, ids, NEWS_MOST * 4) : [];
+  const kitIds = kits.map(({ id }) => id);
   return {
     kits: kits
       .filter(({ closedAt }) => closedAt === null)
       .map((kit) => homeKit(db, workshop, role, kit, asOf)),
     closed: kits.filter(({ closedAt }) => closedAt !== null),
-    news: news.filter(({ userId }) => userId !== user.id).slice(0, NEWS_MOST),
+    news: newsFor(db, { workshopId: workshop.id, role, userId: user.id, kitIds }, now),
   };
 }

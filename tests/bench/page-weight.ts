@@ -1,5 +1,5 @@
 import { type Browser, chromium } from "@playwright/test";
-import { seedId, WORKSHOP_ID } from "#db/seed/load.ts";
+import { seedId, WORKSHOP_ID } from "#db/seed/seed-id.ts";
 import { CHROMIUM } from "#tests/support/chromium.ts";
 import { demoPassword, startServer } from "#tests/support/running-server.ts";
 import type { BenchRow } from "./bench-row.ts";

@@ -1,7 +1,8 @@
 import { expect, test } from "vitest";
 import { migrateDb, openDb } from "#db/client.ts";
 import { KITS } from "#db/seed/kits.ts";
-import { loadDemonstration, seedId, WORKSHOP_ID } from "#db/seed/load.ts";
+import { loadDemonstration } from "#db/seed/load.ts";
+import { seedId, WORKSHOP_ID } from "#db/seed/seed-id.ts";
 import { sweepRuns } from "#src/costing/sweep.ts";
 import { planOf } from "#src/server/plan.ts";
 import { kitsOf } from "#src/server/store/kit.ts";

@@ -1,4 +1,4 @@
-import { seedId, WORKSHOP_ID } from "#db/seed/load.ts";
+import { seedId, WORKSHOP_ID } from "#db/seed/seed-id.ts";
 
 /** Every page that `npm run screens` takes a picture of, signed in as the owner unless `stranger`. */
 export interface PictureOf {

@@ -36,6 +36,7 @@ export function partsView(questions: QuestionsView, over: Partial<PartsImportVie
       rows: 26,
       columns: 8,
       dialect: { delimiter: "semicolon", decimalMark: "comma", repaired: false },
+      sheets: null,
       sameAs: null,
     },
     columns: { columns: [], headerRecord: 0, headings: [], currency: null, sample: [] },
