@@ -24,21 +24,24 @@ export function tabsBetween(
 ): Rect[] {
   if (!routed) return [];
   const pieces = [...boards, ...rails];
-  return boards.flatMap((board, place) =>
-    pieces
-      .slice(place + 1)
-      .flatMap((other) => [
-        ...across(board, other, gap, round),
-        ...across(lying(board), lying(other), gap, round).map(lying),
-      ]),
-  );
+  return [...across(pieces, gap, round), ...across(pieces.map(lying), gap, round).map(lying)];
 }
 
-/** Tabs between two pieces side by side, whichever lies left; none where they are not a gap apart. */
-function across(one: Rect, other: Rect, gap: number, round: boolean): Rect[] {
-  const [left, right] = one.x < other.x ? [one, other] : [other, one];
-  const x = left.x + left.width;
-  if (right.x - x !== gap) return [];
+/** Tabs between all pieces that stand side by side a gap apart. */
+function across(pieces: readonly Rect[], gap: number, round: boolean): Rect[] {
+  const startingAt = new Map<number, Rect[]>();
+  for (const piece of pieces) {
+    const held = startingAt.get(piece.x);
+    if (held) held.push(piece);
+    else startingAt.set(piece.x, [piece]);
+  }
+  return pieces.flatMap((left) => {
+    const x = left.x + left.width;
+    return (startingAt.get(x + gap) ?? []).flatMap((right) => tabsAt(x, left, right, gap, round));
+  });
+}
+
+function tabsAt(x: number, left: Rect, right: Rect, gap: number, round: boolean): Rect[] {
   const from = Math.max(left.y, right.y);
   const facing = Math.min(left.y + left.height, right.y + right.height) - from;
   if (facing < Math.min(TAB_WIDTH, left.height, right.height)) return [];

@@ -71,6 +71,19 @@ describe("scored panels", () => {
     const panel = panelOf(board(30, 20), bare(40, 30, { rails: { sides: "all", width: "5" } }));
     // 40 × 30 less 30 × 20: 12 − 6 = 6 cm².
     expect(panel.areas).toMatchObject({ boards: "6", rails: "6", gaps: "0", panel: "12", used: "0.5" });
+    // Holes of 3 mm in the corners' middles: 1 mm clear of the scores at 5 and 35 mm.
+    expect(panel.rails.map(({ holes }) => holes.map(({ x, y }) => [x, y]))).toEqual([
+      [
+        [2_500, 2_500],
+        [37_500, 2_500],
+      ],
+      [
+        [2_500, 27_500],
+        [37_500, 27_500],
+      ],
+      [],
+      [],
+    ]);
   });
 });
 
