@@ -1,10 +1,5 @@
 import { useSyncExternalStore } from "react";
-
-function words(moment: number, timeZone: string | undefined): string {
-  const date = new Date(moment);
-  const day = date.toLocaleDateString("en-GB", { day: "numeric", month: "long", year: "numeric", timeZone });
-  return `${day}, ${date.toLocaleTimeString("en-GB", { hour: "2-digit", minute: "2-digit", timeZone })}`;
-}
+import { momentText } from "#src/components/moment-text.ts";
 
 const never = () => () => {};
 
@@ -12,8 +7,8 @@ const never = () => () => {};
 export function Moment({ at }: { at: number }) {
   const text = useSyncExternalStore(
     never,
-    () => words(at, undefined),
-    () => words(at, "UTC"),
+    () => momentText(at, "time"),
+    () => `${momentText(at, "time", "UTC")} UTC`,
   );
   return <time dateTime={new Date(at).toISOString()}>{text}</time>;
 }

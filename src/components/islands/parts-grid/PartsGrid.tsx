@@ -182,7 +182,7 @@ export default function PartsGrid(props: PartsGridProps) {
       onKeyDownCapture={pressed}
       onCopy={copy}
       onPaste={paste}
-      className={`[&_.ag-cell-focus:not(.ag-cell-inline-editing)]:[box-shadow:inset_0_0_0_3px_var(--color-petrol)] ${whole ? "" : "h-[max(480px,calc(100vh-250px))]"}`}
+      className={whole ? undefined : "h-[max(480px,calc(100vh-250px))]"}
     >
       <AgGridReact<GridRow>
         key={folded ? "folded" : "flat"}
