@@ -15,8 +15,15 @@ import { type ClipboardEvent, useEffect, useMemo, useRef } from "react";
 import { gridTheme } from "#src/components/islands/grid-theme.ts";
 import { usePhone } from "#src/components/islands/parts/phone.ts";
 import { showToast } from "#src/components/islands/parts/toasts.ts";
-import { layBlock, readBlock, writeBlock } from "./block.ts";
-import { type CellColumn, type CellEdit, type CellFault, type CellRow, cellKey } from "./cell-column.ts";
+import { layBlock, newRows, readBlock, writeBlock } from "./block.ts";
+import {
+  type CellColumn,
+  type CellEdit,
+  type CellFault,
+  type CellRow,
+  cellKey,
+  type PastedRow,
+} from "./cell-column.ts";
 
 const MODULES = [
   ClientSideRowModelModule,
@@ -32,6 +39,14 @@ const MODULES = [
 const ROWS_IN_FULL = 18;
 const ROW = 37;
 
+/** A row that is not there yet. */
+export interface NextRow<Row> {
+  row: Row;
+  /** What stands in it: "Paste new offers here". */
+  words: string;
+  onRows: (rows: PastedRow[]) => void;
+}
+
 export interface CellGridProps<Row extends CellRow, Fields> {
   /** What the sheet holds: "Suppliers". */
   label: string;
@@ -43,18 +58,21 @@ export interface CellGridProps<Row extends CellRow, Fields> {
   onEdits: (edits: CellEdit[]) => void;
   onUndo: () => void;
   onRedo: () => void;
+  /** The row that is not there yet, shown last and empty; a block pasted on it makes new rows. */
+  next?: NextRow<Row>;
 }
 
 /** A sheet of cells: arrows move, Enter edits, Escape leaves as it was, Ctrl and C, V, Z, Y do what they do everywhere. */
 export default function CellGrid<Row extends CellRow, Fields>(props: CellGridProps<Row, Fields>) {
-  const { label, rows, columns, faults, canEdit, styleNonce, onEdits } = props;
+  const { label, columns, faults, canEdit, styleNonce, onEdits, next } = props;
+  const rows = useMemo(() => (next ? [...props.rows, next.row] : props.rows), [props.rows, next]);
   const grid = useRef<AgGridReact<Row>>(null);
   const shown = useRef(faults);
   shown.current = faults;
   const phone = usePhone();
   const definitions = useMemo(
-    () => columns.map((column) => definition(column, canEdit, !phone, () => shown.current)),
-    [columns, canEdit, phone],
+    () => columns.map((column) => definition(column, canEdit, !phone, () => shown.current, next)),
+    [columns, canEdit, phone, next],
   );
   // biome-ignore lint/correctness/useExhaustiveDependencies: the cells read faults through a ref.
   useEffect(() => grid.current?.api?.refreshCells({ force: true }), [faults]);
@@ -67,8 +85,10 @@ export default function CellGrid<Row extends CellRow, Fields>(props: CellGridPro
     const at = focusedCell(grid.current?.api, event);
     if (!at || !canEdit) return;
     event.preventDefault();
-    const ids = rows.map(({ id }) => id);
-    const { edits, past } = layBlock(readBlock(event.clipboardData.getData("text/plain")), ids, keys, at);
+    const block = readBlock(event.clipboardData.getData("text/plain"));
+    if (next && at.row === next.row.id) return next.onRows(newRows(block, keys, at.column));
+    const ids = props.rows.map(({ id }) => id);
+    const { edits, past } = layBlock(block, ids, keys, at);
     if (past > 0)
       showToast({ kind: "caution", text: `${past} cells reached past the end and were left out.` });
     onEdits(edits);
@@ -124,16 +144,20 @@ function definition<Row extends CellRow, Fields>(
   canEdit: boolean,
   holds: boolean,
   faults: () => ReadonlyMap<string, CellFault>,
+  next: NextRow<Row> | undefined,
 ): ColDef<Row> {
   const faultIn = (row: Row) => faults().get(cellKey({ row: row.id, column: column.key }));
+  const isNext = (row: Row | undefined) => row !== undefined && row.id === next?.row.id;
+  const invitation = column.held ? (next?.words ?? "") : "";
   const { choices } = column;
   return {
     colId: column.key,
     headerName: column.head,
-    editable: canEdit && column.read !== undefined,
-    valueGetter: ({ data }) => data && (faultIn(data)?.entry ?? column.text(data)),
+    editable: ({ data }) => canEdit && column.read !== undefined && !isNext(data),
+    valueGetter: ({ data }) =>
+      data && (isNext(data) ? invitation : (faultIn(data)?.entry ?? column.text(data))),
     valueFormatter: ({ data, value }) =>
-      data && !faultIn(data) ? (column.shown ?? column.text)(data) : value,
+      data && !isNext(data) && !faultIn(data) ? (column.shown ?? column.text)(data) : value,
     // The entry is read by the column, not by the grid.
     valueParser: ({ newValue }) => newValue,
     cellEditor: choices ? "agSelectCellEditor" : "agTextCellEditor",
@@ -141,10 +165,11 @@ function definition<Row extends CellRow, Fields>(
     cellClassRules: {
       "bg-bad-wash": ({ data }) => data !== undefined && faultIn(data) !== undefined,
       "text-right": () => column.number === true,
-      "font-semibold": () => column.held === true,
+      "font-semibold": ({ data }) => column.held === true && !isNext(data),
+      "text-ink-2": ({ data }) => isNext(data),
     },
     headerClass: column.number ? "ag-right-aligned-header" : "",
-    cellRenderer: column.href ? linkRenderer(column.href) : undefined,
+    cellRenderer: column.href ? linkRenderer(column.href, isNext) : undefined,
     width: column.width ?? 120,
     flex: column.grows ? 1 : undefined,
     minWidth: column.grows ? column.width : undefined,
@@ -153,12 +178,15 @@ function definition<Row extends CellRow, Fields>(
   };
 }
 
-function linkRenderer<Row>(href: (row: Row) => string) {
-  return ({ data, valueFormatted }: { data: Row; valueFormatted: string }) => (
-    <a href={href(data)} tabIndex={-1}>
-      {valueFormatted}
-    </a>
-  );
+function linkRenderer<Row>(href: (row: Row) => string, isNext: (row: Row) => boolean) {
+  return ({ data, valueFormatted }: { data: Row; valueFormatted: string }) =>
+    isNext(data) ? (
+      valueFormatted
+    ) : (
+      <a href={href(data)} tabIndex={-1}>
+        {valueFormatted}
+      </a>
+    );
 }
 
 /** The cell that has the focus, unless it is being edited: then the clipboard is the field's. */

@@ -16,6 +16,8 @@ export interface SheetProps<Row extends CellRow, Fields> {
   store: SheetStore<Row, Fields>;
   canEdit: boolean;
   styleNonce: string;
+  /** The row below the last one, on which new rows can be pasted. */
+  next?: CellGridProps<Row, Fields>["next"];
 }
 
 /** The grid is fetched when it is needed: it is the largest thing on the page. */
@@ -29,7 +31,7 @@ function useGrid<Row extends CellRow, Fields>() {
 
 /** A sheet with what went wrong below it: entries that cannot be taken, and rows that two people changed. */
 export function Sheet<Row extends CellRow, Fields>(props: SheetProps<Row, Fields>) {
-  const { label, rows, columns, nameOf, canEdit, styleNonce } = props;
+  const { label, rows, columns, nameOf, canEdit, styleNonce, next } = props;
   const Grid = useGrid<Row, Fields>();
   const sheet = useSheet(props);
   const nameIn = (id: string) => {
@@ -41,7 +43,7 @@ export function Sheet<Row extends CellRow, Fields>(props: SheetProps<Row, Fields
     <div className="flex flex-col gap-4">
       {Grid ? (
         <Grid
-          {...{ label, rows, columns, canEdit, styleNonce }}
+          {...{ label, rows, columns, canEdit, styleNonce, next }}
           faults={sheet.faults}
           onEdits={sheet.take}
           onUndo={sheet.undo}

@@ -1,4 +1,4 @@
-import type { CellEdit } from "./cell-column.ts";
+import type { CellEdit, PastedRow } from "./cell-column.ts";
 
 /**
  * Cells copied from a spreadsheet: tabs between cells, a line for each row, quotes round a cell that holds
@@ -59,4 +59,23 @@ export function layBlock(
       else past += 1;
     }
   return { edits, past };
+}
+
+/** A block as new rows, its first cell in `column`; empty rows are none, and what reaches past the last column is left out. */
+export function newRows(
+  block: readonly (readonly string[])[],
+  columns: readonly string[],
+  column: string,
+): PastedRow[] {
+  const left = columns.indexOf(column);
+  return block
+    .filter((cells) => cells.some((cell) => cell !== ""))
+    .map((cells) =>
+      Object.fromEntries(
+        cells.flatMap((entry, across) => {
+          const key = columns[left + across];
+          return key === undefined ? [] : [[key, entry]];
+        }),
+      ),
+    );
 }

@@ -39,6 +39,9 @@ export interface CellEdit {
   entry: string;
 }
 
+/** A row that is pasted below the last one: its entries by column. */
+export type PastedRow = Readonly<Record<string, string>>;
+
 /** An entry that cannot be taken; it stays in its cell until it is put right or dropped. */
 export interface CellFault extends CellEdit {
   sentence: string;

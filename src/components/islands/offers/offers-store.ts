@@ -84,7 +84,11 @@ export async function removeOffer(
 export async function saveBatch(address: KitAddress, batch: OfferBatch): Promise<BatchView> {
   const saved = await call<typeof POST_BATCH>("POST", api(address, "/offers"), batch);
   put(address, saved.changed);
-  holdOffers(address, (held) => ({ ...held, offers: [...held.offers, ...saved.added] }));
+  const gone = new Set(batch.remove?.map(({ id }) => id));
+  holdOffers(address, (held) => ({
+    ...held,
+    offers: [...held.offers.filter(({ id }) => !gone.has(id)), ...saved.added],
+  }));
   offersSaved(address);
   return saved;
 }
