@@ -1,13 +1,9 @@
-import { type FormEvent, useState } from "react";
+import { useState } from "react";
 import { CallFailed, call } from "#src/components/islands/call.ts";
 import { SavedField } from "#src/components/islands/forms/SavedField.tsx";
 import { type KitAddress, kitApi } from "#src/components/islands/kit-address.ts";
-import { Button } from "#src/components/islands/parts/Button.tsx";
-import { ChoiceField } from "#src/components/islands/parts/ChoiceField.tsx";
 import { Dialog } from "#src/components/islands/parts/Dialog.tsx";
-import { DownIcon, UpIcon } from "#src/components/islands/parts/Icons.tsx";
 import { QuietButton } from "#src/components/islands/parts/QuietButton.tsx";
-import { TextField } from "#src/components/islands/parts/TextField.tsx";
 import { showToast } from "#src/components/islands/parts/toasts.ts";
 import { saving } from "#src/components/islands/plan/saving.ts";
 import type {
@@ -15,12 +11,15 @@ import type {
   GET as LOSS,
   PATCH,
 } from "#src/pages/api/workshops/[workshop]/kits/[kit]/editions/[edition]/index.ts";
-import type { GET, POST, PUT } from "#src/pages/api/workshops/[workshop]/kits/[kit]/editions/index.ts";
+import type { GET, PUT } from "#src/pages/api/workshops/[workshop]/kits/[kit]/editions/index.ts";
 import type { EditionLoss } from "#src/server/edition-changes.ts";
 import type { EditionView } from "#src/server/present.ts";
 import { EDITIONS_MOST } from "#src/shapes/limits.ts";
 import { EditionClash, type EditionField, type MetEdition } from "./EditionClash.tsx";
+import { refusal } from "./edition-refusal.ts";
 import { lossWords } from "./loss-words.ts";
+import { NewEdition } from "./NewEdition.tsx";
+import { OrderKey } from "./OrderKey.tsx";
 
 export interface EditionsProps {
   address: KitAddress;
@@ -30,13 +29,6 @@ export interface EditionsProps {
 
 function whole(text: string): number | null {
   return /^\d{1,7}$/.test(text.trim()) ? Number(text.trim()) : null;
-}
-
-/** What the server says of a change it refuses: its first sentence for a field, or what happened. */
-function refusal(error: unknown): string {
-  if (!(error instanceof CallFailed)) throw error;
-  const { title, detail, errors } = error.problem;
-  return errors?.[0]?.message ?? `${title} ${detail}`;
 }
 
 /** The editions of a kit: names, shares of the run, boards; added, reordered, removed. */
@@ -149,7 +141,7 @@ export default function Editions({ address, first, canEdit }: EditionsProps) {
               }}
             />
             {canEdit && (
-              <div className="flex items-center gap-2 tablet:mt-[30px]">
+              <div className="flex items-center gap-2 tablet:mt-[28px]">
                 <OrderKey
                   label={`${edition.name}, up`}
                   off={place === 0}
@@ -197,86 +189,5 @@ export default function Editions({ address, first, canEdit }: EditionsProps) {
         {leaving && <p>{lossWords(leaving.loss)}</p>}
       </Dialog>
     </div>
-  );
-}
-
-function OrderKey({
-  label,
-  off,
-  onPress,
-  up,
-}: {
-  label: string;
-  off: boolean;
-  onPress: () => void;
-  up?: boolean;
-}) {
-  const Icon = up ? UpIcon : DownIcon;
-  return (
-    <button
-      type="button"
-      aria-label={label}
-      aria-disabled={off || undefined}
-      onClick={off ? undefined : onPress}
-      className={`flex size-10 items-center justify-center rounded-control border-[1.5px] ${off ? "border-dashed border-rule-2 bg-tint text-ink-2" : "border-ink bg-sheet hover:bg-petrol-wash"}`}
-    >
-      <Icon />
-    </button>
-  );
-}
-
-function NewEdition({
-  address,
-  editions,
-  onMade,
-}: {
-  address: KitAddress;
-  editions: readonly EditionView[];
-  onMade: (edition: EditionView) => void;
-}) {
-  const [name, setName] = useState("");
-  const [like, setLike] = useState(editions[0]?.id ?? "");
-  const [wrong, setWrong] = useState<string>();
-  const pattern = editions.find(({ id }) => id === like);
-
-  async function add(submit: FormEvent) {
-    submit.preventDefault();
-    try {
-      const boardsPerKit = pattern?.boardsPerKit ?? editions[0]?.boardsPerKit ?? 1;
-      const body = { name, weight: 1, boardsPerKit, like: pattern ? like : null };
-      const made = await call<typeof POST>("POST", kitApi(address, "/editions"), body);
-      setName("");
-      setWrong(undefined);
-      if (made) onMade(made);
-      saving.change((now) => ({ ...now, savedAt: Date.now() }));
-    } catch (error) {
-      setWrong(refusal(error));
-    }
-  }
-
-  return (
-    <form onSubmit={(submit) => void add(submit)} className="mt-5 flex flex-wrap items-start gap-x-5 gap-y-3">
-      <TextField
-        label="Another edition"
-        className="w-full tablet:w-64"
-        placeholder="Bare board"
-        value={name}
-        wrong={wrong}
-        onChange={({ currentTarget }) => setName(currentTarget.value)}
-      />
-      <ChoiceField
-        label="Begins with"
-        className="w-full tablet:w-72"
-        value={like}
-        choices={[
-          ...editions.map(({ id, name: called }) => ({ value: id, label: `what is in ${called}` })),
-          { value: "", label: "nothing" },
-        ]}
-        onChange={({ currentTarget }) => setLike(currentTarget.value)}
-      />
-      <Button type="submit" className="tablet:mt-[30px]">
-        Add the edition
-      </Button>
-    </form>
   );
 }
