@@ -1,10 +1,12 @@
 import type { Plan } from "#src/shapes/plan.ts";
+import { dayWords } from "./day-words.ts";
 import type { AimProblem, CautionCode, Need, NeedCode, Place, Problem } from "./problem.ts";
 
 /** The one table that turns codes of the reckoning into words; what a second language would replace. */
 
 /** Short, for where a figure would stand: "needs 2 prices". `n` places, `codes` of currencies. */
 const SHORT: Record<NeedCode, (n: number, codes: string) => string> = {
+  "no-parts": () => "needs parts",
   "no-mix": () => "needs a mix of editions",
   "unpriced-part": (n) => (n === 1 ? "needs 1 price" : `needs ${n} prices`),
   "short-part": (n) => (n === 1 ? "1 part is short" : `${n} parts are short`),
@@ -38,6 +40,7 @@ const SHORT: Record<NeedCode, (n: number, codes: string) => string> = {
 
 /** What a partial total leaves out: "without 3 unpriced lines". */
 const LEFT_OUT: Partial<Record<NeedCode, (n: number, codes: string) => string>> = {
+  "no-parts": () => "parts",
   "unpriced-part": (n) => (n === 1 ? "1 unpriced line" : `${n} unpriced lines`),
   "short-part": (n) => (n === 1 ? "1 line that is short" : `${n} lines that are short`),
   "order-refused": (n) => (n === 1 ? "1 line whose order is refused" : `${n} lines whose orders are refused`),
@@ -68,6 +71,7 @@ const SENTENCES: Record<
   NeedCode | CautionCode,
   (at: Named, f: Record<"by" | "amount" | "day", string>) => string
 > = {
+  "no-parts": () => "There are no parts yet. Bring in a parts list, or write the first line.",
   "no-mix": () => "No edition has a share in the run. Give at least one of them a weight.",
   "unpriced-part": ({ part }) => `${part} has no price that can be used. Add an offer with a price.`,
   "short-part": ({ part }, { by }) =>
@@ -114,6 +118,12 @@ const SENTENCES: Record<
     `The offer for ${part} is in ${currency}, which is not the currency of ${supplier}, and is not used. Change one of the two.`,
   "offer-stock-not-known": ({ part, supplier }) =>
     `${part} is to be bought only from stock, and what ${supplier} has is not known. Write it in, or allow orders beyond it.`,
+  "price-old": ({ part, supplier }, { day }) =>
+    day === ""
+      ? `The price of ${supplier} for ${part} has no day. Ask again, or write when it was seen.`
+      : `The price of ${supplier} for ${part} is of ${day}. Ask again, or write the new day.`,
+  "stock-short": ({ part, supplier }, { by }) =>
+    `${supplier} shows ${by} fewer of ${part} than are ordered. Ask when more come, or take another offer.`,
   "offer-impossible-ladder": ({ part, supplier, quote }) =>
     `The price breaks of ${quote || `${supplier} for ${part}`} repeat a quantity or do not fit the order multiple. Correct them.`,
   "offer-without-supplier": ({ part }) =>
@@ -169,6 +179,29 @@ export function needWords(needs: readonly Need[]): string {
 }
 
 /**
+ * The same for a narrow cell. A kit without parts is told that first; of several other things their number.
+ *
+ * @example no parts and no price → "needs both"
+ */
+export function needsInShort(needs: readonly Need[]): string {
+  const codes = needs.map(({ code }) => code);
+  if (codes.includes("no-parts")) return codes.includes("no-price") ? "needs both" : "needs parts";
+  return needs.length > 1 ? `needs ${needs.length} things` : needWords(needs);
+}
+
+/**
+ * What stands in the place of a price.
+ *
+ * @example one edition without a price → "not set"
+ */
+export function priceNeeds(needs: readonly Need[]): string {
+  const [first] = needs;
+  return needs.length === 1 && first?.code === "no-price" && first.at.length === 1
+    ? "not set"
+    : needsInShort(needs);
+}
+
+/**
  * The label of a partial total: all that it leaves out.
  *
  * @example "without 3 unpriced lines and work"
@@ -190,7 +223,7 @@ export function problemSentence({ code, at, facts }: Problem, plan: Plan): strin
   return SENTENCES[code](namesOf(at, plan), {
     by: facts.by === undefined ? "some" : facts.by.toString(),
     amount,
-    day: facts.day ?? "",
+    day: facts.day === undefined ? "" : dayWords(facts.day),
   });
 }
 

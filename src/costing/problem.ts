@@ -5,6 +5,7 @@
 
 /** What is missing or impossible; figures that depend on it are not known. */
 export const NEED_CODES = [
+  "no-parts",
   "no-mix",
   "unpriced-part",
   "short-part",
@@ -44,6 +45,8 @@ export const CAUTION_CODES = [
   "offer-without-price",
   "offer-other-currency",
   "offer-stock-not-known",
+  "price-old",
+  "stock-short",
   "offer-impossible-ladder",
   "offer-without-supplier",
   "supplier-shut-out",

@@ -19,7 +19,8 @@ export function reckonRun(prepared: PreparedPlan, kits: number, sheet: RunSheet)
   const { money } = sheet;
   sheet.kits = kits;
   sheet.kitsOf = splitKits(kits, prepared.weights);
-  sheet.missing = prepared.weights.every((weight) => weight === 0) ? MISSING.mix : 0;
+  sheet.missing = prepared.plan.lines === 0 ? MISSING.parts : 0;
+  if (prepared.weights.every((weight) => weight === 0)) sheet.missing |= MISSING.mix;
   setNeeds(prepared, sheet);
   orderParts(prepared, sheet);
   reckonBaskets(prepared, sheet);

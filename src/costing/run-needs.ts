@@ -7,6 +7,7 @@ import { MISSING, REFUSED, type RunSheet, SETTLED, SHORT, TOO_LARGE } from "./ru
 
 /** The page on which each need is settled. */
 const PAGE_OF: Record<NeedCode, SourcePage> = {
+  "no-parts": "parts",
   "no-mix": "run",
   "unpriced-part": "offers",
   "short-part": "offers",
@@ -62,7 +63,7 @@ export function needsOf(prepared: PreparedPlan, sheet: RunSheet, bits: number): 
   const missing = sheet.missing & bits;
   if (missing === 0) return [];
   const { plan } = prepared;
-  const found: Need[] = [];
+  const found: Need[] = missing & MISSING.parts ? [need("no-parts", [{}])] : [];
   if (missing & MISSING.mix)
     found.push(
       need(
@@ -74,7 +75,8 @@ export function needsOf(prepared: PreparedPlan, sheet: RunSheet, bits: number): 
     found.push(...prepared.parts.flatMap((_, index) => partNeeds(prepared, sheet, index)));
   }
   if (missing & MISSING.freight) found.push(...freightNeeds(prepared, sheet));
-  if (missing & (MISSING.boards | MISSING.boardFreight)) found.push(...boardNeeds(prepared, sheet, missing));
+  if (missing & (MISSING.boards | MISSING.boardFreight) && !(missing & MISSING.parts))
+    found.push(...boardNeeds(prepared, sheet, missing));
   if (missing & MISSING.packing) found.push(...packingNeeds(prepared, sheet));
   if (missing & MISSING.rate) found.push(need("no-hourly-rate", [{}]));
   if (missing & MISSING.replacement) found.push(need("no-replacement-cost", [{}]));

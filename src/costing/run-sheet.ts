@@ -23,9 +23,11 @@ export const MISSING = {
   replacement: 128,
   stock: 256,
   sale: 512,
+  parts: 1024,
 } as const;
 
 export const SPENT_NEEDS =
+  MISSING.parts |
   MISSING.mix |
   MISSING.goods |
   MISSING.freight |

@@ -32,5 +32,5 @@ export function columnsOf(prepared: PreparedPlan, swept: Swept, known: boolean):
   };
 }
 
-/** Without a mix or a price there are no takings, not even partial ones. */
-const NEVER_PARTIAL = MISSING.mix | MISSING.sale;
+/** Without parts there are no costs, and without a mix or a price no takings, not even partial ones. */
+const NEVER_PARTIAL = MISSING.parts | MISSING.mix | MISSING.sale;

@@ -1,3 +1,4 @@
+import { dayWords } from "./day-words.ts";
 import type { QuoteResult } from "./run-result.ts";
 import type { WorkingContext } from "./working.ts";
 import {
@@ -66,7 +67,7 @@ type Rate = { perForeignUnit: string; dated: string } | null;
 function rateSteps(to: string, of: string, rate: Rate, converted: Step["amount"]): Step[] {
   if (rate === null) return [];
   return [
-    step("×", `Rate of ${rate.dated}`, number(rate.perForeignUnit, `${to} for one ${of}`), "1.4", {
+    step("×", `Rate of ${dayWords(rate.dated)}`, number(rate.perForeignUnit, `${to} for one ${of}`), "1.4", {
       source: from("offers"),
     }),
     step("=", "Converted", converted, "1.4", { result: true }),

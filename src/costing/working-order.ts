@@ -1,3 +1,4 @@
+import { dayWords } from "./day-words.ts";
 import type { PartLine, PartOrder } from "./run-result.ts";
 import type { WorkingContext } from "./working.ts";
 import { count, from, money, notKnown, number, type Step, step } from "./working-lines.ts";
@@ -26,7 +27,7 @@ export function orderSteps({ prepared, result }: WorkingContext, part: PartLine,
     ? [
         step(
           "×",
-          `Rate of ${supplier.rate.dated}`,
+          `Rate of ${dayWords(supplier.rate.dated)}`,
           number(supplier.rate.perForeignUnit, `${result.currency} for one ${order.currency}`),
           "1.4",
           { source: from("offers") },

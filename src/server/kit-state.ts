@@ -1,10 +1,10 @@
 import type { Db } from "#db/client.ts";
 import { costRun } from "#src/costing/cost-run.ts";
+import { toSettle } from "#src/costing/to-settle.ts";
 import { lineFaults } from "#src/partslist/line-faults.ts";
 import { partsListOf } from "./parts-list.ts";
 import { planOf } from "./plan.ts";
 import type { KitRow } from "./store/kit.ts";
-import { linesOf } from "./store/line.ts";
 import type { WorkshopRow } from "./store/membership.ts";
 import type { KitState } from "./trail.ts";
 
@@ -17,10 +17,11 @@ function linesToSettle(db: Db, kit: KitRow): number {
 /** Reckons a kit as it stands on the day `asOf`: its plan, the run's figures, and what is open in its list. */
 export function kitState(db: Db, workshop: WorkshopRow, kit: KitRow, asOf: string): KitState {
   const plan = planOf(db, workshop, kit, asOf);
+  const result = costRun(plan);
   return {
     plan,
-    result: costRun(plan),
-    lines: linesOf(db, kit.id).length,
+    result,
+    open: toSettle(plan, result),
     linesToSettle: linesToSettle(db, kit),
   };
 }

@@ -114,13 +114,15 @@ function planPart(use: PartUse, run: RunPlanRow, perLine: Map<string, LineQuanti
   };
 }
 
-function planParts(db: Db, workshopId: string, kitId: string, run: RunPlanRow): PlanPart[] {
+/** The kit's list as the plan has it: how many lines there are, and the parts that are bought. */
+function planList(db: Db, workshopId: string, kitId: string, run: RunPlanRow): Pick<Plan, "lines" | "parts"> {
   const perLine = groupBy(lineQuantitiesOf(db, kitId), (row) => row.lineId);
   const choices = new Map(partChoicesOf(db, kitId).map((row) => [row.partId, row]));
   const offers = groupBy(offersForKit(db, kitId), ({ offer }) => offer.partId);
   const elsewhere = partsUsedElsewhere(db, workshopId, kitId);
-  const bought = linesOf(db, kitId).filter(({ line }) => BOUGHT.includes(line.mark));
-  return [...groupBy(bought, ({ part }) => part.id).values()].map((group) => {
+  const lines = linesOf(db, kitId);
+  const bought = lines.filter(({ line }) => BOUGHT.includes(line.mark));
+  const parts = [...groupBy(bought, ({ part }) => part.id).values()].map((group) => {
     const part = (group[0] as { part: PartRow }).part;
     const use = {
       part,
@@ -131,6 +133,7 @@ function planParts(db: Db, workshopId: string, kitId: string, run: RunPlanRow): 
     };
     return planPart(use, run, perLine);
   });
+  return { lines: lines.length, parts };
 }
 
 /** The rate of each currency that holds on a day: the newest that is not later. */
@@ -177,7 +180,7 @@ export function planOf(db: Db, workshop: WorkshopRow, kit: KitRow, asOf: string)
       boardsPerKit,
       price,
     })),
-    parts: planParts(db, workshop.id, kit.id, run),
+    ...planList(db, workshop.id, kit.id, run),
     suppliers: suppliersOf(db, workshop.id).map(planSupplier),
     shutOutSuppliers: shutOutOf(db, kit.id),
     boards: {

@@ -1,7 +1,6 @@
 import { can } from "#src/access.ts";
-import { type CAUTION_CODES, NEED_CODES, type NeedCode, type Problem } from "#src/costing/problem.ts";
-import { need } from "#src/costing/run-needs.ts";
 import type { RunResult } from "#src/costing/run-result.ts";
+import type { OpenThing } from "#src/costing/to-settle.ts";
 import type { Role } from "#src/shapes/limits.ts";
 import type { Plan } from "#src/shapes/plan.ts";
 
@@ -21,46 +20,23 @@ export interface KitStop {
 export interface KitState {
   plan: Plan;
   result: RunResult;
+  /** What somebody must see to about the run. */
+  open: OpenThing[];
   /** Lines that somebody must see to, whatever they cost: without a quantity, named twice, at odds. */
   linesToSettle: number;
-  lines: number;
 }
 
-/** Cautions that wait for a person; the others only say what the reckoning did. */
-const TO_SETTLE: readonly (typeof CAUTION_CODES)[number][] = [
-  "offer-expired",
-  "pinned-offer-unusable",
-  "quote-expired",
-  "pinned-quote-unusable",
-];
-
-function isNeed(code: Problem["code"]): code is NeedCode {
-  return (NEED_CODES as readonly string[]).includes(code);
-}
-
-/** The stop on which a problem is settled; prices stand on the run page. */
-function stopOf({ code, at }: Problem): StopKey | null {
-  if (isNeed(code)) {
-    const { page } = need(code, []);
-    return page === "price" ? "run" : page;
-  }
-  if (!TO_SETTLE.includes(code)) return null;
-  return at.quote ? "boards" : "offers";
-}
-
-/** Things to settle at a stop: a part with two problems is one thing. */
-function countAt(stop: StopKey, problems: readonly Problem[]): number {
-  const things = problems
-    .filter((problem) => stopOf(problem) === stop)
-    .map(({ code, at }) => at.part ?? at.quote ?? at.supplier ?? at.currency ?? code);
-  return new Set(things).size;
+/** The stop on which a thing is settled; prices stand on the run page. */
+function stopOf({ page }: OpenThing): StopKey {
+  return page === "price" ? "run" : page;
 }
 
 function settled(count: number): StopState {
   return count > 0 ? { kind: "to-settle", count } : { kind: "done" };
 }
 
-function stateOf(stop: StopKey, { plan, result, lines, linesToSettle }: KitState): StopState {
+function stateOf(stop: StopKey, { plan, open, linesToSettle }: KitState): StopState {
+  const { lines } = plan;
   const begun: Record<StopKey, boolean> = {
     parts: lines > 0,
     offers: plan.parts.some(({ offers }) => offers.length > 0),
@@ -68,14 +44,13 @@ function stateOf(stop: StopKey, { plan, result, lines, linesToSettle }: KitState
     run: lines > 0 && plan.parts.length > 0,
   };
   if (!begun[stop]) return { kind: "not-started" };
-  return settled(countAt(stop, result.problems) + (stop === "parts" ? linesToSettle : 0));
+  const count = open.filter((thing) => stopOf(thing) === stop).length;
+  return settled(count + (stop === "parts" ? linesToSettle : 0));
 }
 
 /** What waits for a person, in the order of the stops; nothing for a kit that is not begun. */
-export function waitingProblems({ result, lines }: KitState): Problem[] {
-  if (lines === 0) return [];
-  const order: readonly StopKey[] = ["parts", "offers", "boards", "run"];
-  return order.flatMap((stop) => result.problems.filter((problem) => stopOf(problem) === stop));
+export function waitingThings({ open, plan }: KitState): OpenThing[] {
+  return plan.lines === 0 ? [] : open;
 }
 
 const NAMES: Record<StopKey, string> = { parts: "Parts", offers: "Offers", boards: "Boards", run: "Run" };

@@ -154,6 +154,8 @@ export const Plan = z.strictObject({
     sweepTo: z.int().min(limits.RUN_LEAST).max(limits.RUN_MOST),
   }),
   editions: z.array(PlanEdition).min(1).max(limits.EDITIONS_MOST),
+  /** Lines of the parts list, those that are not bought as well; 0: the list is not begun, and nothing is known. */
+  lines: Count,
   parts: z.array(PlanPart).max(limits.PARTS_MOST),
   suppliers: z.array(PlanSupplier).max(limits.SUPPLIERS_MOST),
   shutOutSuppliers: z.array(Id).max(limits.SUPPLIERS_MOST),

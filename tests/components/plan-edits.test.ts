@@ -137,7 +137,7 @@ describe("signed changes of the strip", () => {
     const cells = tallyCells(tally(unpriced), { address, currency: "EUR", editions: [], changes: [] });
     expect(cells[1]).toMatchObject({
       value: null,
-      needs: "needs a price",
+      needs: "not set",
       needsHref: "/workshops/w/kits/k/run#prices",
     });
   });

@@ -1,9 +1,9 @@
 import { describe, expect, it } from "vitest";
+import { fileName } from "#src/components/islands/charts/file-name.ts";
 import { missingThings } from "#src/components/islands/plan/missing-things.ts";
 import { answerFigures, runAnswer } from "#src/components/islands/run/answer-words.ts";
 import { changesInWords } from "#src/components/islands/run/change-words.ts";
 import { breakEvenWords, crossingWords } from "#src/components/islands/run/crossing-words.ts";
-import { fileName } from "#src/components/islands/run/file-name.ts";
 import { costRun } from "#src/costing/cost-run.ts";
 import type { Plan } from "#src/shapes/plan.ts";
 import { smallPlan } from "#tests/support/small-plan.ts";
@@ -37,6 +37,14 @@ describe("the answer", () => {
     );
   });
 
+  it("leads to the parts where there are none", () => {
+    const pieces = runAnswer(answerFigures(costRun({ ...smallPlan(), lines: 0, parts: [] })));
+    expect(pieces.map(({ text }) => text).join("")).toBe(
+      "There are no parts yet. What a kit costs is known once there is a list: bring in a parts list.",
+    );
+    expect(pieces.flatMap(({ page }) => page ?? [])).toEqual(["parts"]);
+  });
+
   it("says what the cost needs", () => {
     const plan = smallPlan();
     const unpriced = { ...plan, parts: plan.parts.map((part) => ({ ...part, offers: [] })) };
@@ -45,6 +53,16 @@ describe("the answer", () => {
 });
 
 describe("what is missing", () => {
+  it("is the parts before anything else", () => {
+    const plan = { ...smallPlan(), lines: 0, parts: [], work: { ...smallPlan().work, ratePerHour: null } };
+    const { used } = costRun(plan).perKit;
+    const things = missingThings(plan, used.known ? [] : used.needs, { workshop: "w", kit: "k" });
+    expect(things.map(({ reason, way }) => [reason, way.label, way.href])).toEqual([
+      ["There are no parts yet.", "Go to Parts", "/workshops/w/kits/k/parts"],
+      ["There is no hourly rate.", "Set the rate", "/workshops/w/kits/k/run#inputs"],
+    ]);
+  });
+
   it("is named place by place, with the way to its field and, where that can be, the way to say none", () => {
     const plan = smallPlan();
     const open = {

@@ -91,6 +91,7 @@ export function plan(over: Partial<Plan> = {}): Plan {
     asOf: "2026-03-09",
     run: { kits: 10, sweepTo: 50 },
     editions: [edition()],
+    lines: 1,
     parts: [],
     suppliers: [supplier()],
     shutOutSuppliers: [],

@@ -1,9 +1,18 @@
 import { describe, expect, test } from "vitest";
 import { costRun } from "#src/costing/cost-run.ts";
 import { NEED_CODES } from "#src/costing/problem.ts";
-import { needWords, problemSentence, withoutWords } from "#src/costing/problem-words.ts";
+import {
+  needsInShort,
+  needWords,
+  priceNeeds,
+  problemSentence,
+  withoutWords,
+} from "#src/costing/problem-words.ts";
+import { sweepRuns } from "#src/costing/sweep.ts";
 import { tally } from "#src/costing/tally.ts";
-import { edition, offer, part, plan, supplier } from "./plans.ts";
+import { edition, offer, part, plan, quote, supplier } from "./plans.ts";
+
+const TASK = { id: "t", name: "Counting", editions: null, minutesPerKit: "5", setUpMinutes: "0" };
 
 describe("the figures of the strip", () => {
   const made = plan({
@@ -47,6 +56,29 @@ describe("the figures of the strip", () => {
     ]);
     expect(open.costPerKit.known ? "" : withoutWords(open.costPerKit.needs)).toBe("without 2 unpriced lines");
   });
+
+  test("a list that is not begun needs parts, whatever else is open; a price needs itself", () => {
+    const boards = { ...made.boards, needed: true };
+    const empty = tally(plan({ lines: 0, boards, work: { ...made.work, tasks: [TASK] } }), 50);
+    const cells = [empty.costPerKit, empty.earnsPerKit, empty.evenAfter, empty.cashNeeded].map((figure) =>
+      figure.known ? "" : needsInShort(figure.needs),
+    );
+    expect(cells).toEqual(["needs parts", "needs both", "needs both", "needs parts"]);
+    expect(empty.price.known ? "" : priceNeeds(empty.price.needs)).toBe("not set");
+    const priced = tally(plan({ lines: 0, editions: [edition({ price: "9" })] }));
+    expect(priced.earnsPerKit.known ? "" : needsInShort(priced.earnsPerKit.needs)).toBe("needs parts");
+  });
+
+  test("a quote alone makes no cost of a kit without a list", () => {
+    const quoted = plan({ lines: 0, boards: { ...made.boards, needed: true, quotes: [quote()] } });
+    const run = costRun(quoted);
+    expect(run.perKit.used.known ? [] : run.perKit.used.needs.map(({ code, page }) => [code, page])).toEqual([
+      ["no-parts", "parts"],
+    ]);
+    expect(run.problems[0]).toEqual({ code: "no-parts", at: {}, facts: {} });
+    expect(sweepRuns(quoted).columns.used.every((used) => used === null)).toBe(true);
+    expect(costRun({ ...quoted, lines: 1 }).perKit.used).toEqual({ known: true, value: "2" });
+  });
 });
 
 describe("words for needs and cautions", () => {
@@ -67,7 +99,7 @@ describe("words for needs and cautions", () => {
       editions: [edition({ price: "3" })],
     });
     expect(costRun(made).problems.map((problem) => problemSentence(problem, made))).toEqual([
-      "The offer of Tamsin for LED, warm white was valid until 2026-02-28 and is not used. Ask again, or write the new date.",
+      "The offer of Tamsin for LED, warm white was valid until 28 February 2026 and is not used. Ask again, or write the new date.",
       "The order to Tamsin is 19.00 EUR below its minimum, so a small-order fee is added.",
     ]);
   });

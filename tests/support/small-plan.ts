@@ -46,6 +46,7 @@ export function smallPlan(): Plan {
     asOf: "2026-03-09",
     run: { kits: 40, sweepTo: 200 },
     editions: [{ id: "kit", name: "Kit", weight: 1, boardsPerKit: 0, price: "12" }],
+    lines: 2,
     parts: [
       part("resistor", "R", 2, [offer({ id: "r", breaks: [{ quantity: 1, price: "0.773875" }] })]),
       part("lamp", "LA", 1, [offer({ id: "l", breaks: [{ quantity: 1, price: "0" }] })]),

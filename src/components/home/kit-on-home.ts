@@ -2,7 +2,7 @@ import { countText, moneyText } from "#src/components/amount-text.ts";
 import type { BoardPicture } from "#src/components/board-picture.ts";
 import type { KitLabelProps } from "#src/components/islands/parts/KitLabel.tsx";
 import type { Figure } from "#src/costing/figure.ts";
-import type { Problem } from "#src/costing/problem.ts";
+import { needsInShort, priceNeeds } from "#src/costing/problem-words.ts";
 import type { Tally } from "#src/costing/tally.ts";
 import type { HomeKit } from "#src/server/home.ts";
 import type { KitRow } from "#src/server/store/kit.ts";
@@ -49,28 +49,24 @@ export function nextStep({ stops, empty, money: seesMoney }: HomeKit, base: stri
     : { label: "See the run", href: `${base}/run` };
 }
 
-function written(figure: Figure, currency: string): string {
-  return figure.known ? moneyText(figure.value, currency) : "not known";
+function written(figure: Figure, write: (value: string) => string): string {
+  return figure.known ? write(figure.value) : needsInShort(figure.needs);
 }
 
-/** Four figures as written; what a figure needs stands beside the labels, under "Waiting for you". */
-export function kitFigures(tally: Tally, empty: boolean): KitLabelProps["figures"] {
-  const { currency, costPerKit, price, evenAfter, earnsPerKit } = tally;
-  if (empty)
-    return [
-      { label: "Cost per kit", value: "needs parts" },
-      { label: "Price", value: price.known ? moneyText(price.value, currency) : "not set" },
-      { label: "Even after", value: "needs parts" },
-      { label: "Earns per kit", value: "needs parts" },
-    ];
+/** Four figures as written, or what they need, in the words of the strip. */
+export function kitFigures({
+  currency,
+  costPerKit,
+  price,
+  evenAfter,
+  earnsPerKit,
+}: Tally): KitLabelProps["figures"] {
+  const money = (value: string) => moneyText(value, currency);
   return [
-    { label: "Cost per kit", value: written(costPerKit, currency) },
-    { label: "Price", value: price.known ? moneyText(price.value, currency) : "not set" },
-    {
-      label: "Even after",
-      value: evenAfter.known ? `${countText(evenAfter.value)} sold` : "not known",
-    },
-    { label: "Earns per kit", value: written(earnsPerKit, currency) },
+    { label: "Cost per kit", value: written(costPerKit, money) },
+    { label: "Price", value: price.known ? money(price.value) : priceNeeds(price.needs) },
+    { label: "Even after", value: written(evenAfter, (value) => `${countText(value)} sold`) },
+    { label: "Earns per kit", value: written(earnsPerKit, money) },
   ];
 }
 
@@ -96,10 +92,4 @@ export function boardPicture({
   if (!boardNeeded || boardWidth === null || height === null) return null;
   const marks = boardMarks ?? undefined;
   return { shape: boardShape, widthMm: Number(boardWidth), heightMm: Number(height), marks };
-}
-
-/** The page on which a problem is settled. */
-export function problemHref(base: string, { at }: Problem): string {
-  if (at.part) return `${base}/offers/${at.part}`;
-  return at.quote ? `${base}/boards` : `${base}/run#inputs`;
 }

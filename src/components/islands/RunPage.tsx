@@ -38,7 +38,7 @@ export function RunPage({ workshop, kit, first, may }: RunPageProps) {
   if (held) return <Reckoned address={address} held={held} may={may} />;
   return (
     <>
-      <FirstAnswer figures={first} />
+      <FirstAnswer address={address} figures={first} />
       {error ? (
         <ErrorBox title="The plan could not be fetched" alert>
           <p>
@@ -66,7 +66,7 @@ function Reckoned({ address, held, may }: ReckonedProps) {
   const run = runOf(plan);
   return (
     <>
-      <RunAnswer run={run} opens={useOpens()} />
+      <RunAnswer address={address} run={run} opens={useOpens()} />
       <div className={PAIRS}>
         {!run.perKit.used.known && (
           <Pair>

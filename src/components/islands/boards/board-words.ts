@@ -1,7 +1,8 @@
 import { countText, moneyText, unitPriceText } from "#src/components/amount-text.ts";
-import { shortDayText } from "#src/components/day-text.ts";
 import type { Answer } from "#src/components/islands/offers/offer-answer.ts";
-import { isOldPrice, type Mark } from "#src/components/islands/offers/offer-words.ts";
+import type { Mark } from "#src/components/islands/offers/offer-words.ts";
+import { shortDayWords } from "#src/costing/day-words.ts";
+import { isOldPrice } from "#src/costing/order-cautions.ts";
 import { needWords } from "#src/costing/problem-words.ts";
 import type { BoardsResult, OfferStanding, QuoteResult } from "#src/costing/run-result.ts";
 import type { BoardQuoteView } from "#src/server/board-changes.ts";
@@ -28,7 +29,7 @@ const WORDS: Partial<Record<OfferStanding, Mark>> = {
 export function quoteMark(quote: BoardQuoteView, result: QuoteResult, today: string): Mark {
   const { standing, chosen } = result;
   if (standing === "expired")
-    return { kind: "bad", word: quote.validUntil ? `Ended ${shortDayText(quote.validUntil)}` : "Ended" };
+    return { kind: "bad", word: quote.validUntil ? `Ended ${shortDayWords(quote.validUntil)}` : "Ended" };
   if (standing === "no-rate") return { kind: "bad", word: `No rate for ${quote.currency}` };
   const said = WORDS[standing];
   if (said) return said;

@@ -3,6 +3,7 @@ import { SettleList } from "#src/components/islands/parts/SettleList.tsx";
 export interface WaitingThing {
   key: string;
   kit: string;
+  kind: "bad" | "caution";
   words: string;
   href: string;
 }
@@ -13,9 +14,9 @@ export function WaitingList({ things, more }: { things: readonly WaitingThing[];
     <>
       <SettleList
         label="Waiting for you"
-        items={things.map(({ key, kit, words, href }) => ({
+        items={things.map(({ key, kit, kind, words, href }) => ({
           key,
-          kind: "caution",
+          kind,
           over: kit,
           text: <a href={href}>{words}</a>,
         }))}

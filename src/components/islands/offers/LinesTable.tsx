@@ -4,10 +4,11 @@ import { Figure } from "#src/components/islands/parts/Figure.tsx";
 import { type Column, Table } from "#src/components/islands/parts/Table.tsx";
 import { useOpens } from "#src/components/islands/plan/open-working.ts";
 import type { PartLine } from "#src/costing/run-result.ts";
+import type { OpenThing } from "#src/costing/to-settle.ts";
 import { compressDesignators } from "#src/partslist/designators.ts";
 import type { OfferPart } from "#src/server/kit-offers.ts";
 import type { KitSupply } from "./kit-supply.ts";
-import { isOldPrice, type Mark, stockShort } from "./offer-words.ts";
+import type { Mark } from "./offer-words.ts";
 
 interface Row {
   part: OfferPart;
@@ -17,11 +18,11 @@ interface Row {
 interface LinesTableProps {
   supply: KitSupply;
   parts: readonly OfferPart[];
-  today: string;
+  things: readonly OpenThing[];
 }
 
 /** The lines of a kit, each with the offer that is taken, how many are bought, and what is paid. */
-export function LinesTable({ supply, parts, today }: LinesTableProps) {
+export function LinesTable({ supply, parts, things }: LinesTableProps) {
   const opens = useOpens();
   const rows = parts.flatMap((part): Row[] => {
     const line = supply.run.parts.find(({ id }) => id === part.id);
@@ -66,7 +67,14 @@ export function LinesTable({ supply, parts, today }: LinesTableProps) {
       key: "state",
       head: "State",
       wide: true,
-      cell: ({ line }) => <LineChip mark={lineMark(supply, line, today)} />,
+      cell: ({ line }) => (
+        <LineChip
+          mark={lineMark(
+            line,
+            things.find(({ at }) => at.part === line.id),
+          )}
+        />
+      ),
     },
   ];
   return (
@@ -96,18 +104,22 @@ function LineChip({ mark }: { mark: Mark }) {
   return <Chip kind={mark.kind}>{mark.word}</Chip>;
 }
 
-/** What a line's chip says: the worst that is true of it. */
-export function lineMark(supply: KitSupply, line: PartLine, today: string): Mark {
+/** What a line's chip says: the worst that is true of it. `thing`: what is to settle about its part. */
+export function lineMark(line: PartLine, thing: OpenThing | undefined): Mark {
   if (line.state === "unpriced") return { kind: "bad", word: "No price" };
   if (line.state === "short") return { kind: "bad", word: `${countText(line.shortBy)} short` };
   if (line.state === "refused") return { kind: "bad", word: "Order too small" };
-  if (line.state === "not-needed") return { kind: "neutral", word: "Not needed" };
-  const used = line.orders.flatMap((order) => {
-    const offer = supply.offers.find(({ id }) => id === order.offer);
-    return offer ? [{ offer, quantity: order.quantity }] : [];
-  });
-  const lacks = used.reduce((sum, { offer, quantity }) => sum + stockShort(offer, quantity), 0);
-  if (lacks > 0) return { kind: "caution", word: `${countText(lacks)} not in stock` };
-  if (used.some(({ offer }) => isOldPrice(offer, today))) return { kind: "caution", word: "Old price" };
-  return { kind: "plain", word: "Settled" };
+  if (thing !== undefined) return { kind: "caution", word: doubt(thing) };
+  return line.state === "not-needed"
+    ? { kind: "neutral", word: "Not needed" }
+    : { kind: "plain", word: "Settled" };
+}
+
+function doubt({ problems }: OpenThing): string {
+  const lacks = problems.reduce(
+    (sum, { code, facts }) => sum + (code === "stock-short" ? (facts.by ?? 0) : 0),
+    0,
+  );
+  if (lacks > 0) return `${countText(lacks)} not in stock`;
+  return problems.some(({ code }) => code === "price-old") ? "Old price" : "To settle";
 }

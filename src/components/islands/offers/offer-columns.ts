@@ -1,7 +1,7 @@
 import { moneyText, unitPriceText } from "#src/components/amount-text.ts";
-import { shortDayText } from "#src/components/day-text.ts";
 import type { CellColumn, CellEntry } from "#src/components/islands/cells/cell-column.ts";
 import { type Entry, readAmount, readDay, readWhole } from "#src/components/islands/cells/entries.ts";
+import { shortDayWords } from "#src/costing/day-words.ts";
 import type { KitOffers } from "#src/server/kit-offers.ts";
 import type { OfferView } from "#src/server/offer-changes.ts";
 import type { OfferFields } from "#src/shapes/offer.ts";
@@ -92,7 +92,7 @@ function dayColumn(key: "pricedOn" | "validUntil", head: string): Column {
     width: 116,
     fields: [key],
     text: (row) => row[key] ?? "",
-    shown: (row) => (row[key] === null ? "" : shortDayText(row[key])),
+    shown: (row) => (row[key] === null ? "" : shortDayWords(row[key])),
     read: (entry) => entryFor(readDay(entry), (day) => ({ [key]: day })),
   };
 }

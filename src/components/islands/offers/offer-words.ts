@@ -1,11 +1,12 @@
 import { countText } from "#src/components/amount-text.ts";
-import { ageText, daysBetween, shortDayText } from "#src/components/day-text.ts";
+import { ageText } from "#src/components/day-text.ts";
 import type { ChipKind } from "#src/components/islands/parts/Chip.tsx";
 import { CLASS_WORDS } from "#src/components/part-words.ts";
+import { shortDayWords } from "#src/costing/day-words.ts";
+import { isOldPrice, stockShort } from "#src/costing/order-cautions.ts";
 import type { ConsideredOffer, OfferStanding } from "#src/costing/run-result.ts";
 import type { OfferPart } from "#src/server/kit-offers.ts";
 import type { OfferView } from "#src/server/offer-changes.ts";
-import { OLD_PRICE_DAYS } from "#src/shapes/limits.ts";
 import type { PlanOffer } from "#src/shapes/plan.ts";
 
 /** A chip: its kind and its word, which says what is wrong. */
@@ -27,22 +28,11 @@ const WORDS: Record<Standing, Mark> = {
   "amount-too-large": { kind: "bad", word: "Too large" },
 };
 
-/** Pieces that the stock shown lacks for an order; 0 where no stock is shown. */
-export function stockShort(offer: Pick<PlanOffer, "stockShown">, quantity: number | null): number {
-  if (offer.stockShown === null || quantity === null) return 0;
-  return Math.max(0, quantity - offer.stockShown);
-}
-
-/** Whether a price is old on a day; a price without a day is not known to be fresh. */
-export function isOldPrice({ pricedOn }: Pick<PlanOffer, "pricedOn">, today: string): boolean {
-  return pricedOn === null || daysBetween(pricedOn, today) > OLD_PRICE_DAYS;
-}
-
 /** The chip of an offer in the table of a part. */
 export function offerMark(offer: OfferView, considered: ConsideredOffer, today: string): Mark {
   const { standing, chosen, quantity, shortBy } = considered;
   if (standing === "expired")
-    return { kind: "bad", word: offer.validUntil ? `Ended ${shortDayText(offer.validUntil)}` : "Ended" };
+    return { kind: "bad", word: offer.validUntil ? `Ended ${shortDayWords(offer.validUntil)}` : "Ended" };
   if (standing === "no-rate") return { kind: "bad", word: `No rate for ${offer.currency}` };
   if (standing === "short") return { kind: "bad", word: `${countText(shortBy)} short` };
   if (standing !== "usable") return WORDS[standing];

@@ -1,4 +1,4 @@
-import { isOldPrice } from "#src/components/islands/offers/offer-words.ts";
+import { isOldPrice } from "#src/costing/order-cautions.ts";
 import type { PartLine } from "#src/costing/run-result.ts";
 import type { LineFault } from "#src/partslist/line-faults.ts";
 import type { LineView } from "#src/server/present.ts";

@@ -8,6 +8,7 @@ import type { PlanRow } from "./plan-rows.ts";
 
 /** The way to the field that settles a need, in the words of its button. */
 const WAYS: Record<NeedCode, string> = {
+  "no-parts": "Go to Parts",
   "no-mix": "Give an edition a share",
   "unpriced-part": "Add a price",
   "short-part": "Find another offer",

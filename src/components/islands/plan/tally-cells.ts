@@ -2,7 +2,7 @@ import { changeText, countText, moneyText, signedCountText } from "#src/componen
 import type { KitAddress } from "#src/components/islands/kit-address.ts";
 import type { TallyCell } from "#src/components/islands/parts/TallyStrip.tsx";
 import type { Figure } from "#src/costing/figure.ts";
-import { needWords } from "#src/costing/problem-words.ts";
+import { needsInShort, priceNeeds } from "#src/costing/problem-words.ts";
 import type { Tally } from "#src/costing/tally.ts";
 import type { TallyChange, TallyFigure } from "#src/costing/tally-change.ts";
 import type { FigureId } from "#src/costing/working-tree.ts";
@@ -40,11 +40,15 @@ export interface CellContext {
   opens?: (figure: FigureId) => { open: boolean; onOpen: () => void };
 }
 
-/** A cell is narrow: one kind of need by its name, several by their number. */
-function needs(figure: Figure, address: KitAddress): Pick<TallyCell, "needs" | "needsHref"> {
+/** What stands in a figure's place, and the way to the first thing it needs. */
+function needs(
+  key: TallyFigure,
+  figure: Figure,
+  address: KitAddress,
+): Pick<TallyCell, "needs" | "needsHref"> {
   if (figure.known) return {};
-  const [first, ...more] = figure.needs;
-  const words = more.length === 0 ? needWords(figure.needs) : `needs ${figure.needs.length} things`;
+  const [first] = figure.needs;
+  const words = key === "price" ? priceNeeds(figure.needs) : needsInShort(figure.needs);
   return { needs: words, needsHref: first && needLink(address, first) };
 }
 
@@ -59,7 +63,7 @@ export function tallyCells(tally: Tally, context: CellContext): TallyCell[] {
       key,
       label: LABELS[key],
       value: figure.known ? (isCount ? countText(figure.value) : moneyText(figure.value, currency)) : null,
-      ...needs(figure, address),
+      ...needs(key, figure, address),
       ...(isCount && { after: "sold" }),
       onPhone: key === "costPerKit" || key === "earnsPerKit",
       ...(change && {

@@ -5,7 +5,9 @@ import { type Column, Table } from "#src/components/islands/parts/Table.tsx";
 import type { useOpens } from "#src/components/islands/plan/open-working.ts";
 import type { Figure as CostFigure } from "#src/costing/figure.ts";
 import { figureLess } from "#src/costing/figure-less.ts";
+import type { Need } from "#src/costing/problem.ts";
 import { needWords } from "#src/costing/problem-words.ts";
+import { joinNeeds } from "#src/costing/run-needs.ts";
 import type { EditionResult, RunResult } from "#src/costing/run-result.ts";
 import type { FigureId } from "#src/costing/working-tree.ts";
 
@@ -16,7 +18,7 @@ export function EditionsSection({ run, opens }: { run: RunResult; opens: ReturnT
     figure.known ? (
       <Figure label={label} value={moneyText(figure.value, currency)} {...(figureId && opens(figureId))} />
     ) : (
-      <span className="text-ink-2">{needWords(figure.needs)}</span>
+      <span className="text-ink-2">{unknownWord(figure.needs)}</span>
     );
   const columns: Column<EditionResult>[] = [
     { key: "name", head: "Edition", names: true, cell: ({ name }) => name },
@@ -54,6 +56,12 @@ export function EditionsSection({ run, opens }: { run: RunResult; opens: ReturnT
       cell: ({ name, sale, perKit }) => written(`${name} earns`, figureLess(sale.kept, perKit.used)),
     },
   ];
+  const needs = joinNeeds(
+    ...run.editions
+      .filter(({ kits }) => kits > 0)
+      .flatMap(({ sale, perKit }) => [sale.kept, perKit.used, perKit.spent])
+      .map((figure) => (figure.known ? [] : figure.needs)),
+  );
   return (
     <Section title="Edition by edition" aside={`one kit of each, in a run of ${run.kits}`}>
       <Table
@@ -63,6 +71,17 @@ export function EditionsSection({ run, opens }: { run: RunResult; opens: ReturnT
         keyOf={({ id }) => id}
         scrolls
       />
+      {needs.length > 0 && <p className="type-note pt-3 text-ink-2">{notKnownWords(needs)}</p>}
     </Section>
   );
+}
+
+/** Instead of a figure; the cost of an edition of which none is made does not apply. */
+function unknownWord(needs: readonly Need[]): string {
+  return needs.every(({ code }) => code === "not-in-run") ? "–" : "not known";
+}
+
+/** What the figures that are not known wait for, once for all of them: "Not known: needs 2 prices; needs the tax rate." */
+function notKnownWords(needs: readonly Need[]): string {
+  return `Not known: ${needs.map((one) => needWords([one])).join("; ")}.`;
 }

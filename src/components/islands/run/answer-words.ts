@@ -1,12 +1,14 @@
 import { countText, moneyText } from "#src/components/amount-text.ts";
 import type { Figure } from "#src/costing/figure.ts";
+import type { SourcePage } from "#src/costing/problem.ts";
 import { needWords } from "#src/costing/problem-words.ts";
 import type { RunResult } from "#src/costing/run-result.ts";
 
-/** A piece of the answer; deciding figures are bold. */
+/** A piece of the answer; deciding figures are bold, and what is to be done leads to its page. */
 export interface AnswerPiece {
   text: string;
   bold?: boolean;
+  page?: SourcePage;
 }
 
 /** The figures of a run that its answer is made of. */
@@ -47,6 +49,13 @@ function positive(amount: string): string {
 export function runAnswer(figures: AnswerFigures): AnswerPiece[] {
   const { kits, costPerKit, bringsPerKit, earnsPerKit, evenAfter, spent, currency } = figures;
   const write = (amount: string) => moneyText(amount, currency);
+  if (!costPerKit.known && costPerKit.needs.some(({ code }) => code === "no-parts"))
+    return [
+      bold("There are no parts yet."),
+      plain(" What a kit costs is known once there is a list: "),
+      { text: "bring in a parts list", page: "parts" },
+      plain("."),
+    ];
   if (!costPerKit.known)
     return [bold(`${kits} cannot be worked out yet.`), plain(` The cost ${needWords(costPerKit.needs)}.`)];
   const cost = `One kit costs ${write(costPerKit.value)}`;

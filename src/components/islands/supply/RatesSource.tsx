@@ -1,15 +1,15 @@
 import { useRef, useState } from "react";
-import { dayText } from "#src/components/day-text.ts";
 import { CallFailed } from "#src/components/islands/call.ts";
 import { Button } from "#src/components/islands/parts/Button.tsx";
 import { showToast } from "#src/components/islands/parts/toasts.ts";
+import { dayWords } from "#src/costing/day-words.ts";
 import type { RatesTaken } from "#src/server/take-reference-rates.ts";
 import { fetchRates, takeRatesFile } from "./rates-store.ts";
 
 function takenWords({ day, set, same, left }: RatesTaken): string {
   const rates = set.length === 1 ? "1 rate" : `${set.length} rates`;
   const done =
-    set.length === 0 ? `The rates of ${dayText(day)} were in already` : `${rates} of ${dayText(day)} set`;
+    set.length === 0 ? `The rates of ${dayWords(day)} were in already` : `${rates} of ${dayWords(day)} set`;
   const kept = set.length > 0 && same.length > 0 ? `, ${same.length} were in already` : "";
   return `${done}${kept}.${left.length > 0 ? ` Not read: ${left.join(", ")}.` : ""}`;
 }

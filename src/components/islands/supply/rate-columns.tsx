@@ -1,7 +1,9 @@
-import { ageText, daysBetween, dayText } from "#src/components/day-text.ts";
+import { ageText } from "#src/components/day-text.ts";
 import { Chip } from "#src/components/islands/parts/Chip.tsx";
 import { QuietButton } from "#src/components/islands/parts/QuietButton.tsx";
 import type { Column } from "#src/components/islands/parts/Table.tsx";
+import { daysBetween } from "#src/costing/calendar/days.ts";
+import { dayWords } from "#src/costing/day-words.ts";
 import type { RateView } from "#src/server/currency-rate-changes.ts";
 
 /** A rate older than this is worth a look before money is spent. */
@@ -42,7 +44,7 @@ export function rateColumns(doing: Doing): Column<RateRow>[] {
       number: true,
       cell: ({ rate }) => rate?.perForeignUnit ?? "not known",
     },
-    { key: "dated", head: "From", wide: true, cell: ({ rate }) => (rate ? dayText(rate.dated) : "") },
+    { key: "dated", head: "From", wide: true, cell: ({ rate }) => (rate ? dayWords(rate.dated) : "") },
     { key: "age", head: "State", cell: ({ rate, earlier }) => <Age {...{ rate, earlier, today }} /> },
     { key: "earlier", head: "Earlier", cell: (row) => <Earlier {...row} {...doing} /> },
   ];
@@ -86,7 +88,7 @@ function Ways({ currency, rate, earlier, change, remove }: RateRow & Doing) {
       {rate && (
         <QuietButton
           onClick={() => remove(rate)}
-          aria-label={`Remove the rate of ${currency} from ${dayText(rate.dated)}`}
+          aria-label={`Remove the rate of ${currency} from ${dayWords(rate.dated)}`}
         >
           Remove
         </QuietButton>
