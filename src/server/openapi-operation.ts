@@ -82,8 +82,8 @@ function failures(address: string, route: Route): (typeof FAILURES)[number][] {
   return FAILURES.filter((status) => can[status]);
 }
 
-function replies(address: string, route: Route, reply: Json | undefined): Json {
-  const json = { "application/json": { schema: reply ?? {} } };
+function replies(address: string, route: Route, reply: z.ZodType | undefined): Json {
+  const json = { "application/json": { schema: reply ? schema(reply) : {} } };
   const refusals = failures(address, route).map((status) => [
     status,
     { $ref: `#/components/responses/${status}` },
@@ -104,7 +104,7 @@ function body(route: Route): Json | undefined {
 /** The operation of a route: who may, what it takes, how it can refuse. */
 export function operation(
   { address, method, route, summary }: DescribedRoute,
-  reply: Json | undefined,
+  reply: z.ZodType | undefined,
 ): Json {
   const parameters = [...pathParameters(address), ...queryParameters(route)];
   const requestBody = body(route);

@@ -1,3 +1,5 @@
+import type { z } from "zod";
+import { ReckoningReply } from "#src/shapes/reckoning.ts";
 import { type DescribedRoute, FAILURES, type Json, operation } from "./openapi-operation.ts";
 import type { Route } from "./route.ts";
 import { SENTENCES } from "./sentences.ts";
@@ -32,6 +34,9 @@ export function summaryIn(source: string, method: string): string {
 function isRoute(value: unknown): value is Route {
   return typeof value === "function" && "may" in value;
 }
+
+/** Replies that have a shape of their own; what the others send is what the routes return. */
+const REPLIES: Readonly<Record<string, z.ZodType>> = { "POST /api/costing": ReckoningReply };
 
 function described(modules: readonly ApiModule[]): DescribedRoute[] {
   return modules.flatMap(({ file, routes, source }) =>
@@ -79,16 +84,12 @@ const PROBLEM: Json = {
 
 /**
  * The description of every address below /api, in OpenAPI 3.1: built from the routes themselves, so that it
- * cannot say anything else than they do. `replyShapes` describes replies, keyed "POST /api/costing".
+ * cannot say anything else than they do.
  */
-export function openApi(
-  modules: readonly ApiModule[],
-  origin: string,
-  replyShapes: Record<string, Json> = {},
-): Json {
+export function openApi(modules: readonly ApiModule[], origin: string): Json {
   const paths: Record<string, Json> = {};
   for (const one of described(modules)) {
-    const reply = replyShapes[`${one.method} ${one.address}`];
+    const reply = REPLIES[`${one.method} ${one.address}`];
     paths[one.address] = { ...paths[one.address], [one.method.toLowerCase()]: operation(one, reply) };
   }
   return {

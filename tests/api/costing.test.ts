@@ -6,6 +6,7 @@ import { newId } from "#src/server/new-id.ts";
 import { tokenHash } from "#src/server/secret-token.ts";
 import { addAccessToken } from "#src/server/store/access-token.ts";
 import type { Plan } from "#src/shapes/plan.ts";
+import { ReckoningReply } from "#src/shapes/reckoning.ts";
 import { call, testApp } from "#tests/support/app.ts";
 import { runKit } from "#tests/support/run-kit.ts";
 
@@ -52,6 +53,16 @@ describe("costing a plan that is sent", () => {
     expect(strange.problem?.errors).toEqual([
       { at: "working", message: 'This run has no figure "happiness".' },
     ]);
+  });
+
+  it("is answered as the description of the API says, known or not", async () => {
+    const { as, plan } = await downloaded();
+    const withoutPrices = { ...plan, parts: plan.parts.map((part) => ({ ...part, offers: [] })) };
+    for (const body of [plan, withoutPrices]) {
+      const query = { sweep: "1", working: "all" };
+      const reply: ReckoningReply = (await call(costing, { as, body, query })).body;
+      expect(ReckoningReply.safeParse(reply).error).toBeUndefined();
+    }
   });
 
   it("reckons another run size and every run size on request", async () => {

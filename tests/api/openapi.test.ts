@@ -107,6 +107,15 @@ describe("the description of the API", () => {
     expect(JSON.stringify(schema.properties.feeFixed)).toContain("pattern");
   });
 
+  it("says what costing a plan answers, down to the lines of a working", () => {
+    const replies = document.paths["/api/costing"]?.post?.responses["200"] as {
+      content: Record<string, { schema: { properties: Record<string, Json> } }>;
+    };
+    const { run, workings } = replies.content["application/json"]?.schema.properties ?? {};
+    expect(run).toMatchObject({ type: "object", properties: { spent: { anyOf: expect.any(Array) } } });
+    expect(workings).toMatchObject({ items: { properties: { lines: { type: "array" } } } });
+  });
+
   it("names the roles of a permission", () => {
     const run = document.paths["/api/workshops/{workshop}/kits/{kit}/run"]?.patch;
     expect(run?.description).toContain(PERMISSIONS["change-run"].roles.join(", "));
