@@ -1,32 +1,12 @@
 import { useCallback } from "react";
-import {
-  CartesianGrid,
-  DefaultZIndexes,
-  Line,
-  LineChart,
-  ReferenceLine,
-  Tooltip,
-  XAxis,
-  YAxis,
-  ZIndexLayer,
-} from "recharts";
+import { DefaultZIndexes, Line, LineChart, ReferenceLine, Tooltip, ZIndexLayer } from "recharts";
 import { moneyText } from "#src/components/amount-text.ts";
-import {
-  axisTitle,
-  COST_LINE,
-  CURSOR,
-  GRID,
-  INK,
-  INK_2,
-  RUN_LINE,
-  X_AXIS,
-  Y_AXIS,
-} from "#src/components/islands/chart-theme.ts";
+import { COST_LINE, CURSOR, INK, INK_2, RUN_LINE } from "#src/components/islands/chart-theme.ts";
 import { BrokenLine } from "#src/components/islands/charts/BrokenLine.tsx";
 import { ChartTip } from "#src/components/islands/charts/ChartTip.tsx";
 import { nameWidth } from "#src/components/islands/charts/label-room.ts";
+import { RunAxes } from "#src/components/islands/charts/RunAxes.tsx";
 import { roundTicks } from "#src/components/islands/charts/round-ticks.ts";
-import { useAxisMoney, useStable } from "#src/components/islands/charts/stable.ts";
 import { BoardsMarks } from "./BoardsMarks.tsx";
 import { type BoardsPoint, type BoardsPoints, boardsTop } from "./boards-points.ts";
 
@@ -39,7 +19,6 @@ export interface BoardsChartProps extends BoardsPoints {
   currency: string;
 }
 
-const TITLE = axisTitle("kits in the run");
 /** Names stand at the ends of their lines; a longer one is cut. */
 const NAME_MOST = 16;
 
@@ -52,9 +31,9 @@ export function shortName(name: string): string {
 
 /** Landed cost of one board in a kit by run size, a line for each board house. */
 export default function BoardsChart(props: BoardsChartProps) {
-  const { lines, points, span, run, width, height, narrow } = props;
+  const { lines, points, span, run, width, height, narrow, currency } = props;
   const top = boardsTop(props, run);
-  const ticks = useStable(roundTicks(0, top, 6));
+  const ticks = roundTicks(0, top, 6);
   const others = lines.flatMap(({ id, chosen }) => (chosen ? [] : [id]));
   const names = nameWidth("", ...lines.map(({ name }) => shortName(name)));
   return (
@@ -64,22 +43,7 @@ export default function BoardsChart(props: BoardsChartProps) {
       margin={{ top: 12, right: names + 14, bottom: 4, left: 0 }}
       aria-label={`A board at any run, from ${span.from} to ${span.to} kits. Arrow keys go from run size to run size.`}
     >
-      <CartesianGrid {...GRID} syncWithTicks />
-      <XAxis
-        {...X_AXIS}
-        dataKey="kits"
-        domain={useStable([span.from, span.to])}
-        ticks={useStable(roundTicks(span.from, span.to, narrow ? 4 : 9))}
-        label={TITLE}
-      />
-      <YAxis
-        {...Y_AXIS}
-        domain={useStable([0, top])}
-        ticks={ticks}
-        width={narrow ? 46 : Y_AXIS.width}
-        allowDataOverflow
-        tickFormatter={useAxisMoney(ticks, props.currency)}
-      />
+      <RunAxes {...{ span, ticks, narrow, currency }} range={[0, top]} title="kits in the run" />
       <ReferenceLine x={run} {...RUN_LINE} />
       {[...lines]
         .sort((one, other) => Number(one.chosen) - Number(other.chosen))

@@ -1,11 +1,12 @@
 import { countText, moneyText } from "#src/components/amount-text.ts";
 import { spanText } from "#src/components/day-text.ts";
+import { type ChoiceHead, ChoiceTable, WIDE } from "#src/components/islands/offers/ChoiceTable.tsx";
 import { Chip } from "#src/components/islands/parts/Chip.tsx";
 import { Figure } from "#src/components/islands/parts/Figure.tsx";
 import { QuietButton } from "#src/components/islands/parts/QuietButton.tsx";
 import { RadioDot } from "#src/components/islands/parts/RadioGroup.tsx";
 import { useOpens } from "#src/components/islands/plan/open-working.ts";
-import { CELL, HEAD_CELL, HEAD_ROW, NUMBER, rowLook, TABLE } from "#src/components/table-look.ts";
+import { CELL, NUMBER, rowLook } from "#src/components/table-look.ts";
 import { needWords } from "#src/costing/problem-words.ts";
 import type { QuoteResult } from "#src/costing/run-result.ts";
 import type { BoardQuoteView } from "#src/server/board-changes.ts";
@@ -29,56 +30,31 @@ export interface QuoteTableProps {
   onEdit: (quote: BoardQuoteView) => void;
 }
 
-const WIDE = "max-tablet:hidden";
+const HEADS: readonly ChoiceHead[] = [
+  { head: "Board house" },
+  { head: "You order", wide: true },
+  { head: "Boards", number: true, wide: true },
+  { head: "Landed", number: true },
+  { head: "Each", number: true },
+  { head: "Made and sent", wide: true },
+  { head: "Board", wide: true },
+];
 
 /** Board houses side by side for this run. */
 export function QuoteTable(props: QuoteTableProps) {
   const { rows, chosen, canChoose, onChoose } = props;
-  const heads = [
-    { head: "Board house", look: "" },
-    { head: "You order", look: WIDE },
-    { head: "Boards", look: `${NUMBER} ${WIDE}` },
-    { head: "Landed", look: NUMBER },
-    { head: "Each", look: NUMBER },
-    { head: "Made and sent", look: `whitespace-nowrap ${WIDE}` },
-    { head: "Board", look: WIDE },
-  ];
+  const cheapest = {
+    name: "quote",
+    id: "quote-none",
+    checked: chosen === null,
+    onChoose: () => onChoose(null),
+  };
   return (
-    <table className={TABLE}>
-      <caption className="heard-only">Quotes of board houses</caption>
-      <thead>
-        <tr className={HEAD_ROW}>
-          {heads.map(({ head, look }) => (
-            <th key={head} scope="col" className={`${HEAD_CELL} ${look}`}>
-              {head}
-            </th>
-          ))}
-          <th scope="col" className={`${HEAD_CELL} ${WIDE}`}>
-            <span className="heard-only">State</span>
-          </th>
-        </tr>
-      </thead>
-      <tbody>
-        {canChoose && (
-          <tr className={rowLook("ordinary")}>
-            <td colSpan={8} className={CELL}>
-              <label htmlFor="quote-none" className="inline-flex min-h-10 items-center gap-3">
-                <RadioDot
-                  id="quote-none"
-                  name="quote"
-                  checked={chosen === null}
-                  onChange={() => onChoose(null)}
-                />
-                The cheapest, worked out for every run
-              </label>
-            </td>
-          </tr>
-        )}
-        {rows.map((row) => (
-          <Row key={row.quote.id} row={row} {...props} />
-        ))}
-      </tbody>
-    </table>
+    <ChoiceTable caption="Quotes of board houses" heads={HEADS} cheapest={canChoose ? cheapest : undefined}>
+      {rows.map((row) => (
+        <Row key={row.quote.id} row={row} {...props} />
+      ))}
+    </ChoiceTable>
   );
 }
 

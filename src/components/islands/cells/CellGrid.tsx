@@ -110,7 +110,7 @@ export default function CellGrid<Row extends CellRow, Fields>(props: CellGridPro
       onCopy={copy}
       onKeyDown={(press) => pressed(press, grid.current?.api, props)}
       // A scroll bar that lies over the grid would cover its last row.
-      className="[&_.ag-layout-auto-height.ag-grid-viewport]:pb-4"
+      className="[&_.ag-grid-viewport]:pb-4"
       style={rows.length > ROWS_IN_FULL ? { height: ROW * ROWS_IN_FULL } : undefined}
     >
       <AgGridReact<Row>

@@ -3,7 +3,6 @@ import { BusyIcon } from "#src/components/islands/parts/Icons.tsx";
 import { QuietButton } from "#src/components/islands/parts/QuietButton.tsx";
 import { showToast } from "#src/components/islands/parts/toasts.ts";
 import { writeList } from "#src/partslist/write-list.ts";
-import { chartSvg, giveFile, svgPng } from "./chart-files.ts";
 
 const KINDS = ["png", "svg", "csv"] as const;
 type Kind = (typeof KINDS)[number];
@@ -18,10 +17,14 @@ export interface SaveChartProps {
   rows: () => readonly (readonly string[])[];
 }
 
+/** Fetched when somebody comes to the buttons. */
+const files = () => import("./chart-files.ts");
+
 async function content(kind: Kind, { name, drawn, rows }: SaveChartProps): Promise<Blob> {
   if (kind === "csv") return new Blob([writeList(rows(), { byteOrderMark: true })], { type: "text/csv" });
   const drawing = drawn();
   if (!drawing) throw new Error("No chart is drawn.");
+  const { chartSvg, svgPng } = await files();
   const svg = await chartSvg(drawing, name);
   return kind === "png" ? svgPng(svg) : new Blob([svg], { type: "image/svg+xml" });
 }
@@ -33,7 +36,8 @@ export function SaveChart(props: SaveChartProps) {
   async function save(kind: Kind) {
     setBusy(true);
     try {
-      giveFile(await content(kind, props), `${file}.${kind}`);
+      const blob = await content(kind, props);
+      (await files()).giveFile(blob, `${file}.${kind}`);
     } catch {
       showToast({ kind: "fault", text: `The ${kind.toUpperCase()} could not be made. Try another kind.` });
     } finally {
@@ -47,6 +51,7 @@ export function SaveChart(props: SaveChartProps) {
         <QuietButton
           key={kind}
           onClick={() => void save(kind)}
+          onPointerEnter={() => void files().catch(() => {})}
           aria-label={`Save as ${kind.toUpperCase()}: ${name}`}
         >
           {kind.toUpperCase()}

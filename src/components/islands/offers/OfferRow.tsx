@@ -6,13 +6,12 @@ import { QuietButton } from "#src/components/islands/parts/QuietButton.tsx";
 import { RadioDot } from "#src/components/islands/parts/RadioGroup.tsx";
 import { CELL, NUMBER, rowLook } from "#src/components/table-look.ts";
 import { exact } from "#src/costing/decimal.ts";
+import { WIDE } from "./ChoiceTable.tsx";
 import { OfferBreaks } from "./OfferBreaks.tsx";
 import type { OfferTableProps, ReckonedOffer } from "./OfferTable.tsx";
 import { offerMark, seenText } from "./offer-words.ts";
 
 type RowProps = OfferTableProps & { row: ReckonedOffer };
-
-const WIDE = "max-tablet:hidden";
 
 /** One offer: who, its ladder, what it comes to, and what the reckoning makes of it. */
 export function OfferRow({ row, ...props }: RowProps) {
@@ -35,7 +34,7 @@ export function OfferRow({ row, ...props }: RowProps) {
         {considered.quantity === null ? "" : countText(considered.quantity)}
       </td>
       <td className={`${CELL} ${NUMBER}`}>
-        <Pays row={row} {...props} />
+        <Pays row={row} name={name} {...props} />
       </td>
       <td className={`${CELL} ${NUMBER} ${WIDE}`}>
         {offer.stockShown === null ? (
@@ -72,14 +71,24 @@ function State({ row: { offer, considered }, name, today, canChange, onEdit }: R
   );
 }
 
-/** In the offer's currency, and below it in the run's where that is another. The chosen one opens its working. */
-function Pays({ row: { offer, considered }, reporting, rateOf, working }: RowProps) {
-  const { extended, chosen } = considered;
+/** In the offer's currency, and below it in the run's where that is another; opens its working. */
+function Pays({
+  row: { offer, considered },
+  name,
+  reporting,
+  rateOf,
+  workingOf,
+}: RowProps & { name: string }) {
+  const { extended } = considered;
   if (extended === null) return null;
   const rate = offer.currency === reporting ? null : rateOf(offer.currency);
   return (
     <>
-      <Figure label="You pay" value={moneyText(extended, offer.currency)} {...(chosen ? working : {})} />
+      <Figure
+        label={`You pay ${name}`}
+        value={moneyText(extended, offer.currency)}
+        {...workingOf(considered)}
+      />
       {rate !== null && (
         <span className="block text-ink-2 type-label">
           {moneyText(exact(extended).times(rate).toFixed(), reporting)}

@@ -1,31 +1,11 @@
 import { useCallback } from "react";
-import {
-  CartesianGrid,
-  DefaultZIndexes,
-  Line,
-  LineChart,
-  ReferenceLine,
-  Tooltip,
-  XAxis,
-  YAxis,
-  ZIndexLayer,
-} from "recharts";
+import { DefaultZIndexes, Line, LineChart, ReferenceLine, Tooltip, ZIndexLayer } from "recharts";
 import { moneyText } from "#src/components/amount-text.ts";
-import {
-  axisTitle,
-  CHART_HEIGHT,
-  COST_LINE,
-  CURSOR,
-  GRID,
-  NET_LINE,
-  RUN_LINE,
-  X_AXIS,
-  Y_AXIS,
-} from "#src/components/islands/chart-theme.ts";
+import { CHART_HEIGHT, COST_LINE, CURSOR, NET_LINE, RUN_LINE } from "#src/components/islands/chart-theme.ts";
 import { BrokenLine } from "#src/components/islands/charts/BrokenLine.tsx";
 import { ChartTip } from "#src/components/islands/charts/ChartTip.tsx";
+import { RunAxes } from "#src/components/islands/charts/RunAxes.tsx";
 import { roundTicks } from "#src/components/islands/charts/round-ticks.ts";
-import { useAxisMoney, useStable } from "#src/components/islands/charts/stable.ts";
 import { CostMarks } from "./CostMarks.tsx";
 import { type CostPoint, pixels, type Span, unitCostRange } from "./cost-points.ts";
 import type { StepNote } from "./step-note.ts";
@@ -51,7 +31,6 @@ export interface CostChartProps {
   view: string;
 }
 
-const TITLE = axisTitle("kits in the run");
 const MARGIN = { top: 12, right: 20, bottom: 4, left: 0 };
 const NARROW_MARGIN = { ...MARGIN, right: 8 };
 const drawLine = (line: object) => (
@@ -60,10 +39,10 @@ const drawLine = (line: object) => (
 
 /** Cost of one kit against run size. */
 export function CostChart(props: CostChartProps) {
-  const { points, span, run, width, narrow } = props;
+  const { points, span, run, width, narrow, currency } = props;
   const brings = pixels(props.brings);
   const range = unitCostRange(points, run, brings);
-  const yTicks = useStable(roundTicks(range.low, range.high, 6));
+  const ticks = roundTicks(range.low, range.high, 6);
   return (
     <LineChart
       width={width}
@@ -72,21 +51,10 @@ export function CostChart(props: CostChartProps) {
       margin={narrow ? NARROW_MARGIN : MARGIN}
       aria-label={props.label}
     >
-      <CartesianGrid {...GRID} syncWithTicks />
-      <XAxis
-        {...X_AXIS}
-        dataKey="kits"
-        domain={useStable([span.from, span.to])}
-        ticks={useStable(roundTicks(span.from, span.to, narrow ? 5 : 9))}
-        label={TITLE}
-      />
-      <YAxis
-        {...Y_AXIS}
-        domain={useStable([range.low, range.high])}
-        ticks={yTicks}
-        width={narrow ? 46 : Y_AXIS.width}
-        allowDataOverflow
-        tickFormatter={useAxisMoney(yTicks, props.currency)}
+      <RunAxes
+        {...{ span, ticks, narrow, currency }}
+        range={[range.low, range.high]}
+        title="kits in the run"
       />
       {brings !== null && range.brings === "drawn" && <ReferenceLine y={brings} {...NET_LINE} />}
       {run >= span.from && run <= span.to && <ReferenceLine x={run} {...RUN_LINE} />}

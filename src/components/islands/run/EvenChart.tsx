@@ -1,29 +1,11 @@
 import { useCallback } from "react";
-import {
-  CartesianGrid,
-  DefaultZIndexes,
-  Line,
-  LineChart,
-  Tooltip,
-  XAxis,
-  YAxis,
-  ZIndexLayer,
-} from "recharts";
+import { DefaultZIndexes, Line, LineChart, Tooltip, ZIndexLayer } from "recharts";
 import { moneyText } from "#src/components/amount-text.ts";
-import {
-  axisTitle,
-  CHART_HEIGHT,
-  COST_LINE,
-  CURSOR,
-  GRID,
-  TAKINGS_LINE,
-  X_AXIS,
-  Y_AXIS,
-} from "#src/components/islands/chart-theme.ts";
+import { CHART_HEIGHT, COST_LINE, CURSOR, TAKINGS_LINE } from "#src/components/islands/chart-theme.ts";
 import { BrokenLine } from "#src/components/islands/charts/BrokenLine.tsx";
 import { ChartTip } from "#src/components/islands/charts/ChartTip.tsx";
-import { axisTicks, roundTicks } from "#src/components/islands/charts/round-ticks.ts";
-import { useAxisMoney, useStable } from "#src/components/islands/charts/stable.ts";
+import { RunAxes } from "#src/components/islands/charts/RunAxes.tsx";
+import { axisTicks } from "#src/components/islands/charts/round-ticks.ts";
 import { HatchDefs } from "#src/components/islands/parts/HatchDefs.tsx";
 import type { CostPoint, Span } from "./cost-points.ts";
 import { EvenAreas } from "./EvenAreas.tsx";
@@ -48,7 +30,6 @@ export interface EvenChartProps {
   label: string;
 }
 
-const TITLE = axisTitle("kits made and sold");
 const MARGIN = { top: 12, right: 20, bottom: 4, left: 0 };
 const NARROW_MARGIN = { ...MARGIN, right: 8 };
 const drawLine = (line: object) => (
@@ -61,7 +42,7 @@ export function EvenChart(props: EvenChartProps) {
   const { points, span, width, narrow, currency } = props;
   const top = Math.max(1, ...points.flatMap(({ total, kept }) => [total ?? 0, kept ?? 0]));
   const low = Math.min(0, ...points.map(({ kept }) => kept ?? 0));
-  const ticks = useStable(axisTicks(low, top, 7));
+  const ticks = axisTicks(low, top, 7);
   return (
     <LineChart
       width={width}
@@ -73,20 +54,10 @@ export function EvenChart(props: EvenChartProps) {
       <defs>
         <HatchDefs />
       </defs>
-      <CartesianGrid {...GRID} />
-      <XAxis
-        {...X_AXIS}
-        dataKey="kits"
-        domain={useStable([span.from, span.to])}
-        ticks={useStable(roundTicks(span.from, span.to, narrow ? 4 : 8))}
-        label={TITLE}
-      />
-      <YAxis
-        {...Y_AXIS}
-        domain={useStable([ticks[0] ?? 0, ticks.at(-1) ?? 0])}
-        ticks={ticks}
-        width={narrow ? 54 : Y_AXIS.width}
-        tickFormatter={useAxisMoney(ticks, currency)}
+      <RunAxes
+        {...{ span, ticks, narrow, currency }}
+        range={[ticks[0] ?? 0, ticks.at(-1) ?? 0]}
+        title="kits made and sold"
       />
       <EvenAreas points={points} />
       <Line {...TAKINGS_LINE} dataKey="kept" shape={drawWhole} />
