@@ -131,6 +131,41 @@ test("cells are edited, pasted and undone by keyboard; what is wrong stays where
   await expect(page.getByRole("alert")).toHaveCount(0);
 });
 
+test("a block pasted below the last offer adds offers, or names the cells that keep all of it out", async ({
+  page,
+  context,
+}) => {
+  await context.grantPermissions(["clipboard-read", "clipboard-write"]);
+  await signIn(page, DESIGNER);
+  const { kit } = await places(page);
+  await page.goto(`${kit}/offers`);
+  await ready(page);
+  const next = page.locator('[row-id="next"] [col-id="part"]');
+  const paste = async (block: string) => {
+    await page.evaluate((text) => navigator.clipboard.writeText(text), block);
+    await next.click();
+    await page.keyboard.press("ControlOrMeta+V");
+  };
+  await page.locator('[row-index="0"] [col-id="orderCode"]').click();
+  await page.keyboard.press("ControlOrMeta+ArrowDown");
+  await expect(next).toHaveText("Paste new offers here");
+
+  await paste("LED1\tTamsin\tT-NEW-1\nX99\tNobody\tT-NEW-2\n");
+  const alert = page.getByRole("alert");
+  await expect(alert).toContainText("No offer is added: 2 cells are not right");
+  await expect(alert).toContainText("It says “X99”.");
+  await alert.getByRole("button", { name: "Close" }).click();
+  await expect(page.getByText("T-NEW-1")).toHaveCount(0);
+
+  await paste("LED1\tTamsin\tT-NEW-1\nD1\tTamsin\tT-NEW-2\n");
+  await expect(page.getByText("2 offers added.")).toBeVisible();
+  await page.getByRole("button", { name: "Undo" }).click();
+  await page.reload();
+  await ready(page);
+  const offers = await page.evaluate(() => document.documentElement.innerHTML);
+  expect(offers).not.toContain("T-NEW-1");
+});
+
 test("boards: a quote with lots, refused where wrong, and the yield that needs more of them", async ({
   page,
 }) => {
