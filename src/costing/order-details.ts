@@ -1,9 +1,30 @@
+import { convertMinor } from "./conversion.ts";
+import { grainText } from "./grains.ts";
 import { costOf, type Ladder, type Order, tierOf } from "./ladder.ts";
 import { minorText } from "./money.ts";
-import type { BoughtUp, PartOrder } from "./run-result.ts";
+import type { PreparedOffer } from "./prepared-plan.ts";
+import type { BoughtUp, PartOrder, PricedOrder } from "./run-result.ts";
 import { upToMultiple } from "./whole.ts";
 
 type Breaks = readonly { quantity: number; price: string }[];
+
+/** An order that covers so many pieces, as its offer states and prices it. */
+export function pricedOrder(offer: PreparedOffer, covers: number, order: Order): PricedOrder {
+  const { breaks, id, orderCode } = offer.offer;
+  const { currency } = offer.worth;
+  return {
+    offer: id,
+    supplier: offer.supplier.id,
+    orderCode,
+    currency,
+    quantity: order.quantity,
+    breakReached: breakReached(offer.ladder, breaks, order),
+    lots: lotsTaken(offer.ladder, breaks, covers),
+    extended: minorText(order.cost, currency),
+    extendedConverted: grainText(convertMinor(order.cost, offer.worth)),
+    boughtUp: boughtUp(offer.ladder, currency, covers, order),
+  };
+}
 
 /** The break an order reaches, as its offer states it; null for lots. */
 export function breakReached(ladder: Ladder, breaks: Breaks, { tier }: Order): PartOrder["breakReached"] {

@@ -2,10 +2,8 @@ import { considered } from "./considered-offers.ts";
 import { convertMinor } from "./conversion.ts";
 import type { Figure } from "./figure.ts";
 import { figureOf, figurePer, wholeFigure } from "./figure-of.ts";
-import { grainText } from "./grains.ts";
 import { exactPrice } from "./ladder.ts";
-import { minorText } from "./money.ts";
-import { boughtUp, breakReached, lotsTaken } from "./order-details.ts";
+import { pricedOrder } from "./order-details.ts";
 import { ordersOf } from "./order-parts.ts";
 import type { PreparedOffer, PreparedPart, PreparedPlan } from "./prepared-plan.ts";
 import type { Need } from "./problem.ts";
@@ -119,21 +117,10 @@ function partOrder(
   { part }: PreparedPart,
   shareOf: (offer: PreparedOffer) => OrderShare,
 ): PartOrder {
-  const goods = convertMinor(order.cost, offer.worth);
   const { share, needs } = shareOf(offer);
-  const currency = offer.worth.currency;
   return {
-    offer: offer.offer.id,
-    supplier: offer.supplier.id,
-    orderCode: offer.offer.orderCode,
-    currency,
-    quantity: order.quantity,
-    breakReached: breakReached(offer.ladder, offer.offer.breaks, order),
-    lots: lotsTaken(offer.ladder, offer.offer.breaks, covers),
-    extended: minorText(order.cost, currency),
-    extendedConverted: grainText(goods),
-    landed: figureOf(goods + share, needs),
+    ...pricedOrder(offer, covers, order),
+    landed: figureOf(convertMinor(order.cost, offer.worth) + share, needs),
     pinned: part.pinnedOffer === offer.offer.id,
-    boughtUp: boughtUp(offer.ladder, currency, covers, order),
   };
 }

@@ -112,7 +112,8 @@ export interface PartLine {
   considered: ConsideredOffer[];
 }
 
-export interface PartOrder {
+/** An order as its supplier prices it. */
+export interface PricedOrder {
   offer: string;
   supplier: string;
   orderCode: string;
@@ -126,10 +127,13 @@ export interface PartOrder {
   extended: string;
   /** Converted, exact. */
   extendedConverted: string;
-  landed: Figure;
-  pinned: boolean;
   /** Why more is ordered than is to buy, because the next break is cheaper; null where it is not so. */
   boughtUp: BoughtUp | null;
+}
+
+export interface PartOrder extends PricedOrder {
+  landed: Figure;
+  pinned: boolean;
 }
 
 /** "100 cost 1.90 less than 84; 16 stay on the shelf". Amounts in the offer's currency. */

@@ -1,7 +1,7 @@
 import type { ConsideredOffer, OfferStanding, PartLine } from "./run-result.ts";
 import type { WorkingContext } from "./working.ts";
 import { count, from, money, type Sheet, type Step, step, summed, words } from "./working-lines.ts";
-import { orderSteps } from "./working-order.ts";
+import { CHOICE_RULE, orderSteps } from "./working-order.ts";
 import { percent } from "./working-run.ts";
 
 /** How a part's purchase comes about: need, spare, stock, order, price, freight (sections 2 to 4). */
@@ -71,7 +71,8 @@ function consideredSteps({ prepared, result }: WorkingContext, part: PartLine): 
     const source = from("offers", part.id);
     if (offer.aloneLanded === null) return step(null, name, words(whyNot(offer)), "5", { source });
     const label = `${name}: ${offer.quantity} with freight as though alone${offer.chosen ? ", chosen" : ""}`;
-    return step(null, label, money(offer.aloneLanded, result.currency), "5", { source });
+    const opens = `offer:${part.id}:${offer.offer}` as const;
+    return step(null, label, money(offer.aloneLanded, result.currency), "5", { source, opens });
   });
 }
 
@@ -97,10 +98,7 @@ function whyNot({ standing, shortBy }: ConsideredOffer): string {
 function notesOf(part: PartLine): string[] {
   const notes = ["An order's extended price is rounded once, to the supplier's minor unit, halves up."];
   if (part.state === "short") notes.push(`All offers together are short by ${part.shortBy}.`);
-  if (part.considered.length > 1)
-    notes.push(
-      "Of several offers the one that is cheapest with its freight, as though the part came alone, is taken; on a tie the one with fewer left over, then by name.",
-    );
+  if (part.considered.length > 1) notes.push(CHOICE_RULE);
   if (part.leftOver > 0) notes.push(`${part.leftOver} are left over.`);
   return notes;
 }

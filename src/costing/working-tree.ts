@@ -21,6 +21,7 @@ export type FigureId =
   | "left-over"
   | `head:${HeadId}`
   | `part:${string}`
+  | `offer:${string}:${string}`
   | `basket:${string}`
   | `quote:${string}`
   | `task:${string}`

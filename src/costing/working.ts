@@ -10,6 +10,7 @@ import { boardsToOrderSheet } from "./working-boards.ts";
 import { crossingSheet, evenAfterSheet, firstOrSafeSheet, nextKitSheet } from "./working-even.ts";
 import { headSheet, taskSheet } from "./working-head.ts";
 import { type Sheet, treeOf } from "./working-lines.ts";
+import { offerSheet } from "./working-offer.ts";
 import { partSheet } from "./working-part.ts";
 import { leftOverSheet, perKitSheet, spentSheet, usedSheet } from "./working-run.ts";
 import { editionSheet, saleSheet } from "./working-sale.ts";
@@ -46,6 +47,7 @@ const PLAIN: Partial<Record<FigureId, (context: WorkingContext) => Sheet>> = {
 const OF_A_THING: Record<string, (context: WorkingContext, id: string) => Sheet | null> = {
   head: (context, id) => (HEADS.some((head) => head === id) ? headSheet(context, id as HeadId) : null),
   part: partSheet,
+  offer: offerSheet,
   basket: basketSheet,
   quote: quoteSheet,
   task: taskSheet,
@@ -106,7 +108,12 @@ export function figuresOf({ result }: WorkingContext): FigureId[] {
   return [
     ...(Object.keys(PLAIN) as FigureId[]),
     ...HEADS.map((id): FigureId => `head:${id}`),
-    ...result.parts.map(({ id }): FigureId => `part:${id}`),
+    ...result.parts.flatMap(({ id, considered }): FigureId[] => [
+      `part:${id}`,
+      ...considered.flatMap(({ offer, extended }): FigureId[] =>
+        extended === null ? [] : [`offer:${id}:${offer}`],
+      ),
+    ]),
     ...result.baskets.map(({ supplier }): FigureId => `basket:${supplier}`),
     ...result.boards.quotes.map(({ id }): FigureId => `quote:${id}`),
     ...result.work.tasks.map(({ id }): FigureId => `task:${id}`),

@@ -67,7 +67,7 @@ export function OffersSection({ props, supply, part, line }: OffersSectionProps)
             supplierHref={supply.supplierHref}
             reporting={supply.plan.currency}
             rateOf={supply.rateOf}
-            working={opens(`part:${part.id}`)}
+            workingOf={({ offer, chosen }) => opens(chosen ? `part:${part.id}` : `offer:${part.id}:${offer}`)}
             onPin={pin}
             onEdit={({ id }) => setOpen(id)}
             {...{ rows, today, canChoose, canChange }}
