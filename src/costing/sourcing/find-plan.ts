@@ -1,11 +1,12 @@
+import { basketBill } from "./basket-bill.ts";
 import { type Column, columnsAt } from "./columns.ts";
-import { fillSet } from "./fill-set.ts";
-import { basketsOf, type HeldPlan } from "./held-plan.ts";
+import { type Baskets, basketsOf, type HeldPlan } from "./held-plan.ts";
 import type { Market } from "./market.ts";
+import { emptyQueue } from "./node-queue.ts";
 import { emptyLines, noPrices, relaxLines } from "./relaxed-lines.ts";
 import { offerPlan, type Search, startSearch } from "./search.ts";
-import { setNode } from "./set-node.ts";
-import { searchSets, setKey } from "./supplier-sets.ts";
+import { queueNode, searchNodes } from "./search-nodes.ts";
+import { nodeOf, searchSets, setKey } from "./supplier-sets.ts";
 
 /** What a plan must keep to, in the terms of the search. */
 export interface SearchLimits {
@@ -27,21 +28,14 @@ export function findPlan(market: Market, limits: SearchLimits, before: HeldPlan 
       (start.goods[a.reach.supplier] as number) * near(search, a),
   );
   const first = columns.filter(({ reach }) => (start.lines[reach.supplier] as number) > 0);
+  const queue = emptyQueue();
   let done: string | null = null;
   if (first.length >= limits.leastParcels && first.length <= limits.mostParcels) {
-    const sorted = first.toSorted((a, b) => a.reach.supplier - b.reach.supplier);
-    fillSet(
-      search,
-      setNode(
-        search,
-        sorted.map(({ reach }) => reach),
-        sorted.map(({ line }) => line),
-        -1,
-      ),
-    );
+    queueNode(search, queue, nodeOf(first, Number.NEGATIVE_INFINITY));
     done = setKey(first);
   }
-  searchSets(search, columns, done);
+  searchSets(search, queue, columns, done);
+  searchNodes(search, queue);
   return search;
 }
 
@@ -49,13 +43,24 @@ function near(search: Search, { reach }: Column): number {
   return search.market.suppliers[reach.supplier]?.near ?? 0;
 }
 
-/** Every part where its goods alone are cheapest. */
-function startLines(search: Search) {
+/**
+ * Every part where its goods alone are cheapest; suppliers that refuse their basket are left out one after the
+ * other, so that a first plan is found.
+ */
+function startLines(search: Search): Baskets {
   const { market } = search;
   const prices = noPrices(market.suppliers.length);
   prices.inSet.fill(1);
   const lines = emptyLines(market);
-  relaxLines(search, prices, lines);
-  offerPlan(search, lines.ways, lines.baskets);
-  return lines.baskets;
+  for (;;) {
+    relaxLines(market, search.omitted, prices, lines);
+    offerPlan(search, lines.ways, lines.baskets);
+    const refused = market.suppliers.findIndex(
+      ({ terms }, index) =>
+        (lines.baskets.lines[index] as number) > 0 &&
+        basketBill(terms, lines.baskets.goods[index] as number, null).refused,
+    );
+    if (refused < 0) return lines.baskets;
+    prices.inSet[refused] = 0;
+  }
 }

@@ -1,3 +1,4 @@
+import { convertMinor } from "#src/costing/conversion.ts";
 import type { BasketCell } from "./basket-cells.ts";
 import { type Baskets, compareBig, emptyBaskets, putWay } from "./held-plan.ts";
 import type { Market, MarketSupplier } from "./market.ts";
@@ -24,6 +25,11 @@ export interface Tracked {
   byWeight: boolean;
   /** Where freight does not go by weight, or by none that is open: a weight to reckon with; null: not known. */
   steadyWeight: number | null;
+  /** The one range the node leaves its basket; null: several. */
+  range: BasketCell | null;
+  /** Within that range: what each unit of goods beyond the place where the node's line touches adds to the bound. */
+  pull: number;
+  touch: number;
   /** Whether it is still to be seen that it gets an order at all, and must. */
   byUse: boolean;
 }
@@ -41,21 +47,19 @@ export interface OpenLines {
 }
 
 /**
- * Sets aside the ways that cost more than the gap between the node's bound and the best plan so far, then, among
- * those left, the ones that another way of the same part beats wherever the rest goes. `value` is the node's bound
- * at the prices in force.
+ * Sets aside the ways that cost more than a gap over the node's bound at the prices in force, then, among
+ * those left, the ones that another way of the same part beats wherever the rest goes.
  */
-export function openLines(search: Search, node: SetNode, value: number): OpenLines {
+export function openLines(search: Search, node: SetNode, gap: number): OpenLines {
   const { market } = search;
-  const gap = search.bestScore - value + 2 * marginAt(search);
   const settled = new Int32Array(market.parts).fill(-1);
   const baskets = emptyBaskets(market.suppliers.length);
   let lines: OpenLine[] = [];
   for (let part = 0; part < market.parts; part += 1) {
     if (market.needed[part] === 0) continue;
-    const ways = waysWithin(market, node, part, gap);
+    const ways = waysWithin(search, part, gap);
     if (ways.length > 1) lines.push({ part, ways });
-    else settle(market, settled, baskets, part, ways[0]?.way ?? (node.relaxed.ways[part] as number));
+    else settle(market, settled, baskets, part, ways[0]?.way ?? (search.relaxed.ways[part] as number));
   }
   const spans = node.reaches.map(({ supplier }) => spanOf(market, lines, baskets, supplier));
   const tracked = trackedOf(search, node, spans, lines, baskets);
@@ -66,7 +70,7 @@ export function openLines(search: Search, node: SetNode, value: number): OpenLin
     if (ways.length > 1) stillOpen.push({ part: line.part, ways });
     else settle(market, settled, baskets, line.part, (ways[0] as OpenWay).way);
   }
-  lines = stillOpen.sort((a, b) => secondOf(b) - secondOf(a) || a.part - b.part);
+  lines = basketByBasket(market, stillOpen, tracked);
   return {
     lines,
     settled,
@@ -76,13 +80,13 @@ export function openLines(search: Search, node: SetNode, value: number): OpenLin
   };
 }
 
-function waysWithin(market: Market, node: SetNode, part: number, gap: number): OpenWay[] {
+function waysWithin({ market, prices, relaxed }: Search, part: number, gap: number): OpenWay[] {
   const ways: OpenWay[] = [];
-  const least = node.relaxed.counts[part] as number;
+  const least = relaxed.counts[part] as number;
   const end = market.first[part + 1] as number;
   for (let way = market.first[part] as number; way < end; way += 1) {
     if (market.open[way] === 0) continue;
-    const excess = countOf(market, node.prices, way) - least;
+    const excess = countOf(market, prices, way) - least;
     if (excess <= gap && excess < Number.POSITIVE_INFINITY) ways.push({ way, excess });
   }
   return ways;
@@ -91,6 +95,34 @@ function waysWithin(market: Market, node: SetNode, part: number, gap: number): O
 function settle(market: Market, settled: Int32Array, baskets: Baskets, part: number, way: number): void {
   settled[part] = way;
   if (way >= 0) putWay(market, way, baskets);
+}
+
+/**
+ * Open lines in the order in which they are best followed: all that may touch one tracked basket, the one with the
+ * fewest, then all that may touch the next, so that one basket after the other is done with; in each, the lines
+ * whose second way is dearest first.
+ */
+function basketByBasket(market: Market, lines: readonly OpenLine[], tracked: readonly Tracked[]): OpenLine[] {
+  const ordered: OpenLine[] = [];
+  let rest = lines.toSorted((a, b) => secondOf(b) - secondOf(a) || a.part - b.part);
+  let baskets = tracked.map(({ supplier }) => ({
+    supplier,
+    touching: rest.filter(({ ways }) => ways.some(({ way }) => broughtTo(market, way, supplier).lines > 0)),
+  }));
+  while (baskets.length > 0) {
+    const left = new Set(rest);
+    const open = baskets.map((basket) => ({
+      ...basket,
+      touching: basket.touching.filter((line) => left.has(line)),
+    }));
+    const next = open.reduce((best, basket) =>
+      basket.touching.length < best.touching.length ? basket : best,
+    );
+    ordered.push(...next.touching);
+    rest = rest.filter((line) => !next.touching.includes(line));
+    baskets = open.filter(({ supplier }) => supplier !== next.supplier);
+  }
+  return [...ordered, ...rest];
 }
 
 function secondOf({ ways }: OpenLine): number {
@@ -167,7 +199,7 @@ function trackedOf(
   if (lines.length === 0) return [];
   return node.reaches.flatMap(({ supplier }, index): Tracked[] => {
     const span = spans[index] as Span;
-    const { cells, terms } = search.market.suppliers[supplier] as MarketSupplier;
+    const { cells, terms, near } = search.market.suppliers[supplier] as MarketSupplier;
     const cell = cellOver(search, span);
     const line = node.lines[index];
     const byUse = mustUseAll(search) && baskets.lines[supplier] === 0 && span.lines === 0;
@@ -175,7 +207,10 @@ function trackedOf(
     if (straight && line?.perWeight === 0 && node.bonus[index] === 0 && !byUse) return [];
     const byWeight = terms.freight.model === "by-weight" && (cell === null || !cell.anyWeight);
     const steadyWeight = cell?.freightUnknown ? null : span.weight[0];
-    return [{ supplier, cells, byWeight, steadyWeight, byUse }];
+    const own = node.reaches[index]?.cells ?? [];
+    const range = own.length === 1 ? (own[0] as BasketCell) : null;
+    const pull = range === null || line === undefined ? 0 : (range.multiple - line.perGoods) * near;
+    return [{ supplier, cells, byWeight, steadyWeight, range, pull, touch: line?.goods ?? 0, byUse }];
   });
 }
 
@@ -244,15 +279,18 @@ function nearOf(market: Market, way: number): number {
   return sum;
 }
 
-/** Goods of one way in grains. */
-export function exactOf(market: Market, way: number): bigint {
+/** Goods of one way in grains, without those of some suppliers. */
+export function exactOf(market: Market, way: number, without: ReadonlySet<number> = NONE): bigint {
   let sum = 0n;
   for (let at = market.orderFrom[way] as number; at < (market.orderTo[way] as number); at += 1) {
-    const { worth } = market.suppliers[market.supplier[at] as number] as MarketSupplier;
-    sum += BigInt(market.cost[at] as number) * worth.grains;
+    const supplier = market.supplier[at] as number;
+    if (without.has(supplier)) continue;
+    sum += convertMinor(market.cost[at] as number, (market.suppliers[supplier] as MarketSupplier).worth);
   }
   return sum;
 }
+
+const NONE: ReadonlySet<number> = new Set();
 
 function plainOf(
   search: Search,

@@ -1,6 +1,5 @@
 import { type Baskets, emptyBaskets, putWay } from "./held-plan.ts";
 import type { Market } from "./market.ts";
-import type { Search } from "./search.ts";
 
 /** What each supplier's orders count for while every part is bought where it is cheapest by itself. */
 export interface Prices {
@@ -64,7 +63,7 @@ export function countOf(market: Market, prices: Prices, way: number): number {
 }
 
 /** Buys every part by itself at these prices; a part none of them sells counts as one not bought. */
-export function relaxLines({ market, omitted }: Search, prices: Prices, lines: RelaxedLines): void {
+export function relaxLines(market: Market, omitted: number, prices: Prices, lines: RelaxedLines): void {
   const { baskets } = lines;
   baskets.goods.fill(0);
   baskets.weight.fill(0);

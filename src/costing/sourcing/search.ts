@@ -1,6 +1,7 @@
 import type { BasketCell } from "./basket-cells.ts";
 import { type Baskets, comparePlans, type HeldPlan, weighPlan } from "./held-plan.ts";
 import type { Market, MarketSupplier } from "./market.ts";
+import { emptyLines, noPrices, type Prices, type RelaxedLines } from "./relaxed-lines.ts";
 
 /** One search for the best plan at one run size: what is sought, the best so far, and what was left unsearched. */
 export interface Search {
@@ -19,6 +20,9 @@ export interface Search {
   /** `best` as one number: its total and what is added for parts not bought and freight unknown. */
   bestScore: number;
   workLeft: number;
+  /** Room in which nodes are evaluated, one after the other. */
+  prices: Prices;
+  relaxed: RelaxedLines;
   /** Least bound of what was left unsearched for want of work; Infinity: nothing was. */
   unsearched: number;
 }
@@ -38,6 +42,8 @@ export function startSearch(market: Market, least: number, most: number, work: n
     best: null,
     bestScore: Number.POSITIVE_INFINITY,
     workLeft: work,
+    prices: noPrices(suppliers.length),
+    relaxed: emptyLines(market),
     unsearched: Number.POSITIVE_INFINITY,
   };
   measure(search);

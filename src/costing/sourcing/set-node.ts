@@ -1,4 +1,4 @@
-import { emptyLines, noPrices, type Prices, type RelaxedLines, relaxLines } from "./relaxed-lines.ts";
+import { relaxLines } from "./relaxed-lines.ts";
 import { isBeaten, marginAt, offerPlan, type Search } from "./search.ts";
 import { lineOf, type Reach, type SupportLine } from "./support-line.ts";
 
@@ -7,31 +7,15 @@ export interface SetNode {
   reaches: readonly Reach[];
   lines: SupportLine[];
   /** What each order of a supplier is let off; only where every supplier of the set must be used. */
-  bonus: Float64Array;
+  bonus: readonly number[];
   bound: number;
-  /** Room shared by the nodes of a set. */
-  prices: Prices;
-  relaxed: RelaxedLines;
+  /** How far above its bound every choice of lines has been followed; 0: none has. */
+  followed: number;
 }
 
 /** The first node of a set. */
-export function setNode(
-  search: Search,
-  reaches: readonly Reach[],
-  lines: SupportLine[],
-  bound: number,
-): SetNode {
-  const { market } = search;
-  const prices = noPrices(market.suppliers.length);
-  for (const { supplier } of reaches) prices.inSet[supplier] = 1;
-  return {
-    reaches,
-    lines,
-    bonus: new Float64Array(reaches.length),
-    bound,
-    prices,
-    relaxed: emptyLines(market),
-  };
+export function setNode(reaches: readonly Reach[], lines: SupportLine[], bound: number): SetNode {
+  return { reaches, lines, bonus: reaches.map(() => 0), bound, followed: 0 };
 }
 
 /** Whether every supplier of the set must get an order, for the sake of a least number of parcels. */
@@ -41,17 +25,19 @@ export function mustUseAll(search: Search): boolean {
 
 /** Buys every part by itself at the node's lines, keeps the plan if it is good, and gives the node's bound. */
 export function evaluate(search: Search, node: SetNode): number {
-  const { prices, relaxed } = node;
+  const { market, omitted, prices, relaxed } = search;
   let floor = 0;
+  prices.inSet.fill(0);
   node.reaches.forEach(({ supplier, cells }, index) => {
     const line = node.lines[index] as SupportLine;
+    prices.inSet[supplier] = 1;
     prices.perGoods[supplier] = line.perGoods;
     prices.perWeight[supplier] = line.perWeight;
     prices.bonus[supplier] = node.bonus[index] as number;
     prices.weighedOnly[supplier] = cells.every(({ anyWeight }) => !anyWeight) ? 1 : 0;
     floor += line.floor + (node.bonus[index] as number);
   });
-  relaxLines(search, prices, relaxed);
+  relaxLines(market, omitted, prices, relaxed);
   if (relaxed.sum < Number.POSITIVE_INFINITY) offerPlan(search, relaxed.ways, relaxed.baskets);
   return relaxed.sum + floor;
 }
@@ -74,13 +60,8 @@ const HALVINGS = 10;
  */
 export function raiseBound(search: Search, node: SetNode, index: number): void {
   const { supplier } = node.reaches[index] as Reach;
-  const touched = node.lines[index] as SupportLine;
-  const goodsOff = Math.abs((node.relaxed.baskets.goods[supplier] as number) - touched.goods);
-  const cell = touched.cell;
-  const heavy = node.relaxed.baskets.weight[supplier] as number;
-  const outside = cell !== null && (heavy < cell.weightFrom || heavy > cell.weightTo);
-  const slope: Slope = outside || goodsOff === 0 ? "perWeight" : "perGoods";
-  let here = tryAt(search, node, index, slope, touched[slope]);
+  const slope = slopeToMove(search, node, index);
+  let here = tryAt(search, node, index, slope, (node.lines[index] as SupportLine)[slope]);
   if (here.rise === 0) return;
   const sign = Math.sign(here.rise);
   let step = slope === "perGoods" ? 0.02 : weightStep(search, node, supplier);
@@ -95,9 +76,23 @@ export function raiseBound(search: Search, node: SetNode, index: number): void {
   tryAt(search, node, index, slope, best.at);
 }
 
+/** The slope that leaves the wider gap between line and basket: a range left comes first. */
+function slopeToMove(search: Search, node: SetNode, index: number): Slope {
+  const { supplier } = node.reaches[index] as Reach;
+  const { cell, goods, weight, perGoods, perWeight } = node.lines[index] as SupportLine;
+  if (cell === null) return "perGoods";
+  const own = search.relaxed.baskets.goods[supplier] as number;
+  const heavy = search.relaxed.baskets.weight[supplier] as number;
+  if (own < cell.goodsFrom || own > cell.goodsTo) return "perGoods";
+  if (heavy < cell.weightFrom || heavy > cell.weightTo) return "perWeight";
+  const near = search.market.suppliers[supplier]?.near ?? 0;
+  const byGoods = Math.abs((cell.multiple - perGoods) * near * (own - goods));
+  return byGoods >= Math.abs(perWeight * (heavy - weight)) ? "perGoods" : "perWeight";
+}
+
 /** A twentieth of what a unit of weight is worth in this basket. */
 function weightStep(search: Search, node: SetNode, supplier: number): number {
-  const { goods, weight } = node.relaxed.baskets;
+  const { goods, weight } = search.relaxed.baskets;
   const near = search.market.suppliers[supplier]?.near ?? 0;
   const worth = Math.max(goods[supplier] as number, 1) * near;
   return worth / Math.max(weight[supplier] as number, 1) / 20;
@@ -129,7 +124,7 @@ function tryAt(search: Search, node: SetNode, index: number, slope: Slope, at: n
   );
   node.lines[index] = line;
   const value = evaluate(search, node);
-  const { goods, weight } = node.relaxed.baskets;
+  const { goods, weight } = search.relaxed.baskets;
   const near = search.market.suppliers[reach.supplier]?.near ?? 0;
   const rise =
     slope === "perGoods"

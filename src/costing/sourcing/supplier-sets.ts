@@ -1,16 +1,22 @@
 import type { Column } from "./columns.ts";
-import { fillSet } from "./fill-set.ts";
+import type { NodeQueue } from "./node-queue.ts";
 import { isBeaten, type Search, spend } from "./search.ts";
-import { setNode } from "./set-node.ts";
+import { queueNode } from "./search-nodes.ts";
+import { type SetNode, setNode } from "./set-node.ts";
 
 /**
- * Goes through the sets of suppliers, depth first, passing over every branch whose bound leaves no room for a better
+ * Queues the sets of suppliers that may hold the best plan: goes through them depth first, passing over every branch whose bound leaves no room for a better
  * plan: the least count of each part among the suppliers taken and those still to be decided, and the floors of
  * those taken (and, where they lie below nothing, of those still to be decided).
  *
- * @param done a set, as a list of suppliers ascending, that was filled before
+ * @param done a set, as a list of suppliers ascending, that is in the queue already
  */
-export function searchSets(search: Search, columns: readonly Column[], done: string | null): void {
+export function searchSets(
+  search: Search,
+  queue: NodeQueue,
+  columns: readonly Column[],
+  done: string | null,
+): void {
   const { parts } = search.market;
   const rest = restMinima(search, columns);
   const taken = columns.map(() => new Float64Array(parts));
@@ -27,7 +33,7 @@ export function searchSets(search: Search, columns: readonly Column[], done: str
     if (isBeaten(search, bound) || !spend(search, 1, bound)) return;
     const column = columns[depth];
     if (column === undefined) {
-      fillChosen(search, chosen, bound, done);
+      if (setKey(chosen) !== done) queueNode(search, queue, nodeOf(chosen, bound));
       return;
     }
     const next = taken[depth + 1] as Float64Array;
@@ -77,18 +83,13 @@ function sumOfLeast(least: Float64Array, rest: Float64Array): number {
   return sum;
 }
 
-function fillChosen(search: Search, chosen: readonly Column[], bound: number, done: string | null): void {
-  if (done === setKey(chosen)) return;
-  const sorted = chosen.toSorted((a, b) => a.reach.supplier - b.reach.supplier);
-  const reaches = sorted.map(({ reach }) => reach);
-  fillSet(
-    search,
-    setNode(
-      search,
-      reaches,
-      sorted.map(({ line }) => line),
-      bound,
-    ),
+/** The node in which a set of suppliers is searched. */
+export function nodeOf(columns: readonly Column[], bound: number): SetNode {
+  const sorted = columns.toSorted((a, b) => a.reach.supplier - b.reach.supplier);
+  return setNode(
+    sorted.map(({ reach }) => reach),
+    sorted.map(({ line }) => line),
+    bound,
   );
 }
 
