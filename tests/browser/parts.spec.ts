@@ -207,3 +207,39 @@ for (const scheme of ["light", "dark"] as const)
       [],
     );
   });
+
+/** The parts page of the demonstration's Dew Lantern, with its list loaded. */
+async function dewLantern(page: Page): Promise<void> {
+  await signIn(page, DESIGNER);
+  await page.getByRole("link", { name: "Dew Lantern", exact: true }).click();
+  await expect(cell(page, 1, "part")).toBeVisible();
+}
+
+test("price and state stay in view on a tablet, and at 400 % nothing is fixed over the page", async ({
+  page,
+}) => {
+  await dewLantern(page);
+  for (const width of [1440, 1024, 768]) {
+    await page.setViewportSize({ width, height: 900 });
+    for (const column of ["perKit", "state"]) {
+      await expect(cell(page, 1, column)).toBeVisible();
+      const box = await cell(page, 1, column).boundingBox();
+      expect((box?.x ?? width) + (box?.width ?? 0)).toBeLessThanOrEqual(width);
+    }
+  }
+  await page.setViewportSize({ width: 360, height: 225 });
+  await expect(page.locator("[data-tally]")).toHaveCSS("position", "static");
+  expect(await page.evaluate(() => document.documentElement.scrollWidth)).toBe(360);
+});
+
+test("on paper the list is a table of all its lines, with colours written", async ({ page }) => {
+  await dewLantern(page);
+  await page.emulateMedia({ media: "print" });
+  const list = page.getByRole("table", { name: "Parts list of Dew Lantern" });
+  // 23 lines between a head and a total.
+  await expect(list.getByRole("row")).toHaveCount(25);
+  await expect(list.getByRole("row").nth(1)).toContainText("brown, black, orange, gold");
+  await expect(page.locator(".ag-root-wrapper")).toBeHidden();
+  await page.emulateMedia({ media: "screen" });
+  await expect(list).toHaveCount(0);
+});

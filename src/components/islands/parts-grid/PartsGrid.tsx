@@ -31,6 +31,8 @@ import type { GridContext } from "./grid-context.ts";
 import { focusedPlace, handleKey, type KeyDeeds, rowAt, selectedBlock } from "./grid-keys.ts";
 import { CHECK_BOX, type GridLayout } from "./grid-layout.ts";
 import type { GridRow, LineRow, TotalRow } from "./grid-rows.ts";
+import { PrintedList } from "./PrintedList.tsx";
+import { usePrinting } from "./use-printing.ts";
 
 const MODULES = [
   ClientSideRowModelModule,
@@ -176,61 +178,73 @@ export default function PartsGrid(props: PartsGridProps) {
     setRange(grown ? { anchor: grown.anchor, head: place } : { anchor: place, head: place });
   }
 
+  const printing = usePrinting();
   const whole = rows.length <= ROWS_IN_FULL;
   return (
-    <div
-      onKeyDownCapture={pressed}
-      onCopy={copy}
-      onPaste={paste}
-      className={whole ? undefined : "h-[max(480px,calc(100vh-250px))]"}
-    >
-      <AgGridReact<GridRow>
-        key={folded ? "folded" : "flat"}
-        theme={phone ? phoneTheme : theme}
-        modules={MODULES}
-        styleNonce={styleNonce}
-        rowData={rows as GridRow[]}
-        pinnedBottomRowData={phone ? undefined : [props.total]}
-        columnDefs={definitions}
-        context={context.current}
-        getRowId={({ data }) => data.id}
-        defaultColDef={{
-          resizable: true,
-          suppressHeaderMenuButton: true,
-          wrapHeaderText: true,
-          autoHeaderHeight: true,
-        }}
-        domLayout={whole ? "autoHeight" : "normal"}
-        rowHeight={folded && !phone ? ROW_OF_TWO : ROW}
-        isFullWidthRow={({ rowNode }) => rowNode.data?.kind === "group"}
-        fullWidthCellRenderer={GroupCell}
-        rowSelection={
-          props.context.canEdit && !phone
-            ? {
-                mode: "multiRow",
-                enableClickSelection: false,
-                isRowSelectable: ({ data }) => data?.kind === "line",
-                hideDisabledCheckboxes: true,
-              }
-            : undefined
-        }
-        selectionColumnDef={{ pinned: "left", width: CHECK_BOX, suppressMovable: true }}
-        onSelectionChanged={({ api: grid }) => deeds.select(grid.getSelectedRows().map(({ id }) => id))}
-        animateRows={false}
-        readOnlyEdit
-        stopEditingWhenCellsLoseFocus
-        enterNavigatesVerticallyAfterEdit
-        suppressNoRowsOverlay
-        tooltipShowDelay={400}
-        onCellEditRequest={edited}
-        onCellFocused={focused}
-        onCellClicked={clicked}
-        onGridReady={({ api: grid }) => {
-          api.current = grid;
-          grid.setGridAriaProperty("label", props.label);
-          props.onReady(grid);
-        }}
-      />
-    </div>
+    <>
+      {printing && (
+        <PrintedList
+          label={props.label}
+          rows={rows}
+          total={props.total}
+          editions={editions}
+          money={props.context.canOpen}
+        />
+      )}
+      <div
+        onKeyDownCapture={pressed}
+        onCopy={copy}
+        onPaste={paste}
+        className={`print:hidden ${whole ? "" : "h-[max(480px,calc(100vh-250px))]"}`}
+      >
+        <AgGridReact<GridRow>
+          key={folded ? "folded" : "flat"}
+          theme={phone ? phoneTheme : theme}
+          modules={MODULES}
+          styleNonce={styleNonce}
+          rowData={rows as GridRow[]}
+          pinnedBottomRowData={phone ? undefined : [props.total]}
+          columnDefs={definitions}
+          context={context.current}
+          getRowId={({ data }) => data.id}
+          defaultColDef={{
+            resizable: true,
+            suppressHeaderMenuButton: true,
+            wrapHeaderText: true,
+            autoHeaderHeight: true,
+          }}
+          domLayout={whole ? "autoHeight" : "normal"}
+          rowHeight={folded && !phone ? ROW_OF_TWO : ROW}
+          isFullWidthRow={({ rowNode }) => rowNode.data?.kind === "group"}
+          fullWidthCellRenderer={GroupCell}
+          rowSelection={
+            props.context.canEdit && !phone
+              ? {
+                  mode: "multiRow",
+                  enableClickSelection: false,
+                  isRowSelectable: ({ data }) => data?.kind === "line",
+                  hideDisabledCheckboxes: true,
+                }
+              : undefined
+          }
+          selectionColumnDef={{ pinned: "left", width: CHECK_BOX, suppressMovable: true }}
+          onSelectionChanged={({ api: grid }) => deeds.select(grid.getSelectedRows().map(({ id }) => id))}
+          animateRows={false}
+          readOnlyEdit
+          stopEditingWhenCellsLoseFocus
+          enterNavigatesVerticallyAfterEdit
+          suppressNoRowsOverlay
+          tooltipShowDelay={400}
+          onCellEditRequest={edited}
+          onCellFocused={focused}
+          onCellClicked={clicked}
+          onGridReady={({ api: grid }) => {
+            api.current = grid;
+            grid.setGridAriaProperty("label", props.label);
+            props.onReady(grid);
+          }}
+        />
+      </div>
+    </>
   );
 }

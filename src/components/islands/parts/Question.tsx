@@ -17,7 +17,7 @@ export function Question({ question, children, actions }: QuestionProps) {
         </h1>
         <p className="type-answer mt-1.5">{children}</p>
       </div>
-      {actions && <div className="flex flex-wrap gap-3">{actions}</div>}
+      {actions && <div className="flex flex-wrap gap-3 print:hidden">{actions}</div>}
     </div>
   );
 }
