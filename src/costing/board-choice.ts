@@ -1,15 +1,15 @@
 import { boardsToOrder } from "./boards-to-order.ts";
 import { byText } from "./by-name.ts";
 import { compareWorth, type MinorWorth } from "./conversion.ts";
-import { cheapestOrder } from "./ladder.ts";
 import { needOf } from "./need.ts";
+import { orderPieces } from "./panels/order-pieces.ts";
 import type { PreparedPlan, PreparedQuote } from "./prepared-plan.ts";
 import { type BoardChoice, MISSING, type RunSheet } from "./run-sheet.ts";
 
 /**
- * Boards of the run (section 6): how many to order for the yield, and of which quote. The quote the
- * user chose, or the one whose landed cost (boards, engineering, stencil, freight) is worth least;
- * quotes without freight come after those with. Ties: fewer boards over, then the house's name.
+ * Boards of the run (section 6): how many to order for the yield, and of which quote, singly or in panels.
+ * The quote the user chose, or the one whose landed cost (boards, engineering, stencil, freight) is worth
+ * least; quotes without freight come after those with. Ties: fewer boards over, then the house's name.
  *
  * @example 20 boards, yield 95 %, confidence 95 % → 23; lots of 10 and 30 → 30
  */
@@ -36,10 +36,8 @@ function cheapestBoards(prepared: PreparedPlan, toOrder: number): BoardChoice | 
 
 /** What a quote would deliver and charge for so many boards; null where it may not be used. */
 export function orderBoards(quote: PreparedQuote, toOrder: number): BoardChoice | null {
-  if (quote.ladder === null) return null;
-  const order = cheapestOrder(quote.ladder, toOrder);
-  if (order === null || order.cost === Number.POSITIVE_INFINITY) return null;
-  return { quote, order, charged: order.cost + quote.engineering + quote.stencil };
+  const order = orderPieces(quote, toOrder);
+  return order === null ? null : { quote, order, charged: order.charged };
 }
 
 function better(a: BoardChoice, b: BoardChoice): boolean {
@@ -50,7 +48,7 @@ function better(a: BoardChoice, b: BoardChoice): boolean {
     b.charged + (b.quote.freight ?? 0),
     b.quote.worth as MinorWorth,
   );
-  return (byCost || a.order.quantity - b.order.quantity || byHouse(a.quote, b.quote)) < 0;
+  return (byCost || a.order.boards - b.order.boards || byHouse(a.quote, b.quote)) < 0;
 }
 
 function byHouse(a: PreparedQuote, b: PreparedQuote): number {

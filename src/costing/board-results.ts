@@ -10,6 +10,7 @@ import type { Need } from "./problem.ts";
 import { need, needsOf } from "./run-needs.ts";
 import type { BoardsResult, QuoteResult } from "./run-result.ts";
 import { type BoardChoice, MISSING, type RunSheet } from "./run-sheet.ts";
+import { divideUp } from "./whole.ts";
 
 /** Boards of a run (section 6): how many, of which quote, and every quote compared at this run size. */
 export function boardResults(prepared: PreparedPlan, sheet: RunSheet): BoardsResult {
@@ -33,7 +34,7 @@ export function boardResults(prepared: PreparedPlan, sheet: RunSheet): BoardsRes
 }
 
 function quoteResult(prepared: PreparedPlan, sheet: RunSheet, quote: PreparedQuote): QuoteResult {
-  const stated = quote.quote;
+  const { stated } = quote;
   const toOrder = sheet.boardsToOrder;
   const choice = toOrder === null || toOrder === 0 ? null : orderBoards(quote, toOrder);
   const minor = (amount: number) => minorText(amount, stated.currency);
@@ -46,12 +47,13 @@ function quoteResult(prepared: PreparedPlan, sheet: RunSheet, quote: PreparedQuo
     currency: stated.currency,
     chosen: sheet.boards?.quote === quote,
     standing: quote.standing === "usable" && choice === null && toOrder ? "amount-too-large" : quote.standing,
-    ordered: choice?.order.quantity ?? null,
-    lots: choice && quote.ladder ? lotsTaken(quote.ladder, stated.breaks, toOrder ?? 0) : [],
-    breakReached: choice && quote.ladder ? breakReached(quote.ladder, stated.breaks, choice.order) : null,
-    goodExpected: choice && goodExpected(choice.order.quantity, prepared.plan.boards.yield),
-    extra: choice && choice.order.quantity - sheet.boardsRequired,
-    boards: choice && minor(choice.order.cost),
+    boardsPerPiece: quote.quote.boardsPerPiece,
+    pieces: choice && choice.order.pieces,
+    ordered: choice && choice.order.boards,
+    ...ladderDetails(quote, choice, toOrder ?? 0),
+    goodExpected: choice && goodExpected(choice.order.boards, prepared.plan.boards.yield),
+    extra: choice && choice.order.boards - sheet.boardsRequired,
+    boards: choice && minor(choice.order.goods),
     engineering: minor(quote.engineering),
     stencil: minor(quote.stencil),
     freight: quote.freight === null ? null : minor(quote.freight),
@@ -59,8 +61,24 @@ function quoteResult(prepared: PreparedPlan, sheet: RunSheet, quote: PreparedQuo
     landed: choice === null ? wholeFigure(null, needs) : figureOf(converted, needs),
     perBoard: choice === null ? wholeFigure(null, needs) : figurePer(converted, sheet.boardsRequired, needs),
     leadTimeDays: stated.leadTimeDays,
-    boughtUp:
-      choice && quote.ladder ? boughtUp(quote.ladder, stated.currency, toOrder ?? 0, choice.order) : null,
+  };
+}
+
+/** Lots or break of an order, and what it goes past because more cost less. */
+function ladderDetails(
+  { ladder, stated, quote: { boardsPerPiece } }: PreparedQuote,
+  choice: BoardChoice | null,
+  toOrder: number,
+): Pick<QuoteResult, "lots" | "breakReached" | "boughtUp"> {
+  if (choice === null || ladder === null) return { lots: [], breakReached: null, boughtUp: null };
+  const { pieces, goods, tier, boards } = choice.order;
+  const least = divideUp(toOrder, boardsPerPiece);
+  const order = { quantity: pieces, cost: goods, tier };
+  const up = boughtUp(ladder, stated.currency, least, order);
+  return {
+    lots: lotsTaken(ladder, stated.breaks, least),
+    breakReached: breakReached(ladder, stated.breaks, order),
+    boughtUp: up && { ...up, insteadOf: up.insteadOf * boardsPerPiece, leftOver: boards - toOrder },
   };
 }
 
@@ -76,6 +94,7 @@ function quoteNeeds(quote: PreparedQuote, choice: BoardChoice | null, toOrder: n
   if (toOrder === null) return [need("no-board-yield", [{}])];
   if (toOrder === 0) return [need("nothing-made", [{}])];
   if (quote.standing === "no-rate") return [need("no-rate", [{ currency: quote.quote.currency }])];
+  if (quote.standing === "no-size") return [need("no-board-size", [at])];
   if (quote.standing !== "usable") return [need("no-board-quote", [at])];
   if (choice === null) return [need("amount-too-large", [at])];
   return quote.freight === null ? [need("no-board-freight", [at])] : [];

@@ -101,8 +101,8 @@ function boardLines({ boards }: RunSheet): HeadLine[] {
   const amount = (minor: number) => figureOf(convertMinor(minor, worth), []);
   const name = quote.quote.boardHouse;
   return [
-    { id: `${quote.quote.id}:boards`, name, amount: amount(order.cost) },
-    { id: `${quote.quote.id}:charges`, name, amount: amount(charged - order.cost) },
+    { id: `${quote.quote.id}:boards`, name, amount: amount(order.goods) },
+    { id: `${quote.quote.id}:charges`, name, amount: amount(charged - order.goods) },
   ];
 }
 

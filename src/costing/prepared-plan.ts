@@ -11,8 +11,9 @@ import type {
 import type { ChoiceMemory } from "./choice-memory.ts";
 import type { MinorWorth } from "./conversion.ts";
 import type { Ladder, Price } from "./ladder.ts";
+import type { PreparedPieces } from "./panels/prepare-pieces.ts";
 import type { Problem } from "./problem.ts";
-import type { OfferStanding } from "./run-result.ts";
+import type { OfferStanding, QuoteStanding } from "./run-result.ts";
 import type { SplitTable } from "./split-order.ts";
 
 /** A plan with every text read once, so that a thousand run sizes can be reckoned from it. */
@@ -88,15 +89,10 @@ export interface PreparedOffer {
   rank: number;
 }
 
-export interface PreparedQuote {
-  quote: PlanBoardQuote;
-  standing: OfferStanding;
-  worth: MinorWorth | null;
-  ladder: Ladder | null;
-  engineering: number;
-  stencil: number;
-  /** Null: not known. */
-  freight: number | null;
+/** A board house's quote: its pieces priced, as the plan states it, and whether it may be used. */
+export interface PreparedQuote extends PreparedPieces {
+  stated: PlanBoardQuote;
+  standing: QuoteStanding;
 }
 
 export interface PreparedTask {

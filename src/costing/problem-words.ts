@@ -16,6 +16,7 @@ const SHORT: Record<NeedCode, (n: number, codes: string) => string> = {
   "no-board-quote": () => "needs a board quote",
   "no-board-freight": () => "needs the boards' freight",
   "no-board-yield": () => "needs a higher yield",
+  "no-board-size": () => "needs the board's size",
   "no-packing-cost": (n) => (n === 1 ? "needs 1 packing cost" : `needs ${n} packing costs`),
   "no-hourly-rate": () => "needs an hourly rate",
   "no-replacement-cost": () => "needs the cost of a replacement",
@@ -49,6 +50,7 @@ const LEFT_OUT: Partial<Record<NeedCode, (n: number, codes: string) => string>> 
   "no-board-quote": () => "boards",
   "no-board-freight": () => "the boards' freight",
   "no-board-yield": () => "boards",
+  "no-board-size": () => "boards",
   "no-packing-cost": (n) => (n === 1 ? "1 packing cost" : `${n} packing costs`),
   "no-hourly-rate": () => "work",
   "no-replacement-cost": () => "replacements",
@@ -85,6 +87,8 @@ const SENTENCES: Record<
   "no-board-freight": ({ quote }) =>
     `The quote of ${quote} says nothing about freight. Write it in; 0 if it is free.`,
   "no-board-yield": () => "With this yield no number of boards is enough. Check the yield.",
+  "no-board-size": ({ quote }) =>
+    `The quote of ${quote} is a formula, and the size of what it prices is not known. Write it in.`,
   "no-packing-cost": ({ packing }) => `${packing} has no cost per kit. Write it in; 0 if it costs nothing.`,
   "no-hourly-rate": () => "There is no hourly rate. Write one; 0 counts the hours at nothing.",
   "no-replacement-cost": () =>
@@ -139,6 +143,8 @@ const SENTENCES: Record<
   "quote-expired": ({ quote }, { day }) =>
     `The quote of ${quote} was valid until ${day} and is not used. Ask again.`,
   "quote-without-price": ({ quote }) => `The quote of ${quote} has no price and is not used.`,
+  "quote-without-size": ({ quote }) =>
+    `The quote of ${quote} prices by area, and its size is not stated, so it is not used. Write it in.`,
   "pinned-quote-unusable": ({ quote }) =>
     `The quote of ${quote} is chosen and cannot be used. Choose another.`,
 };

@@ -15,6 +15,7 @@ export const NEED_CODES = [
   "no-board-quote",
   "no-board-freight",
   "no-board-yield",
+  "no-board-size",
   "no-packing-cost",
   "no-hourly-rate",
   "no-replacement-cost",
@@ -55,6 +56,7 @@ export const CAUTION_CODES = [
   "minimum-not-reached",
   "quote-expired",
   "quote-without-price",
+  "quote-without-size",
   "pinned-quote-unusable",
 ] as const;
 export type CautionCode = (typeof CAUTION_CODES)[number];

@@ -17,6 +17,7 @@ const PAGE_OF: Record<NeedCode, SourcePage> = {
   "no-board-quote": "boards",
   "no-board-freight": "boards",
   "no-board-yield": "boards",
+  "no-board-size": "boards",
   "no-packing-cost": "run",
   "no-hourly-rate": "run",
   "no-replacement-cost": "run",
@@ -133,6 +134,14 @@ function boardNeeds(prepared: PreparedPlan, sheet: RunSheet, missing: number): N
     ];
   }
   if (asked.some(({ standing }) => standing === "usable")) return [need("amount-too-large", [{}])];
+  const withoutSize = asked.filter(({ standing }) => standing === "no-size");
+  if (withoutSize.length > 0 && withoutSize.length === asked.length)
+    return [
+      need(
+        "no-board-size",
+        withoutSize.map(({ quote }) => ({ quote: quote.id })),
+      ),
+    ];
   return [need("no-board-quote", chosenQuote === null ? [{}] : [{ quote: chosenQuote }])];
 }
 

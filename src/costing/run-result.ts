@@ -174,6 +174,9 @@ export type OfferStanding =
   | "minimum-not-reached"
   | "amount-too-large";
 
+/** A formula has no price without the size of what it prices. */
+export type QuoteStanding = OfferStanding | "no-size";
+
 export interface Basket {
   supplier: string;
   name: string;
@@ -213,14 +216,19 @@ export interface QuoteResult {
   boardHouse: string;
   currency: string;
   chosen: boolean;
-  standing: OfferStanding;
+  standing: QuoteStanding;
+  /** Boards to a piece: 1, or those of a panel. */
+  boardsPerPiece: number;
+  /** Single boards or panels ordered, and the boards in them. */
+  pieces: number | null;
   ordered: number | null;
+  /** Quantities of the next two are pieces; prices as stated, without depanelling. */
   lots: { quantity: number; price: string; count: number }[];
   breakReached: { quantity: number; price: string } | null;
   /** `ordered × yield`, exact; and boards ordered beyond those required. */
   goodExpected: string | null;
   extra: number | null;
-  /** In the quote's currency. */
+  /** In the quote's currency; boards with their depanelling. */
   boards: string | null;
   engineering: string;
   stencil: string;
@@ -231,6 +239,7 @@ export interface QuoteResult {
   /** Landed cost over the boards required: what one board in a kit costs. */
   perBoard: Figure;
   leadTimeDays: number | null;
+  /** In boards. */
   boughtUp: BoughtUp | null;
 }
 

@@ -1,4 +1,4 @@
-import type { Order } from "./ladder.ts";
+import type { PieceOrder } from "./panels/order-pieces.ts";
 import type { PreparedOffer, PreparedPlan, PreparedQuote } from "./prepared-plan.ts";
 import type { SplitPart } from "./split-order.ts";
 import { emptySum, type WholeSum } from "./whole-sum.ts";
@@ -42,7 +42,7 @@ export const KEPT_NEEDS = MISSING.mix | MISSING.sale;
 /** The boards of a run: what is ordered of the chosen quote. */
 export interface BoardChoice {
   quote: PreparedQuote;
-  order: Order;
+  order: PieceOrder;
   /** Boards, engineering and stencil, in minor units of the quote's currency. */
   charged: number;
 }

@@ -39,13 +39,14 @@ function boardChanges(before: RunSheet, after: RunSheet): Change[] {
   if (from === null || to === null || from.quote !== to.quote) {
     return [{ what: "board-quote", from: from?.quote.quote.id ?? null, to: to?.quote.quote.id ?? null }];
   }
-  const quote = to.quote.quote.id;
-  if (to.quote.ladder?.model === "lots") {
-    const [less, more] = [from.order.quantity, to.order.quantity];
-    return less === more ? [] : [{ what: "board-lots", quote, from: less, to: more }];
+  const { id: quote, boardsPerPiece } = to.quote.quote;
+  if (from.order.tier === to.order.tier) {
+    const bySteps = to.quote.ladder?.model === "lots" || boardsPerPiece > 1;
+    const [less, more] = [from.order.boards, to.order.boards];
+    return bySteps && less !== more ? [{ what: "board-lots", quote, from: less, to: more }] : [];
   }
-  if (from.order.tier === to.order.tier) return [];
-  const breakOf = (tier: number) => (to.quote.ladder === null ? 0 : fromOf(to.quote.ladder, tier));
+  const breakOf = (tier: number) =>
+    to.quote.ladder === null ? 0 : fromOf(to.quote.ladder, tier) * boardsPerPiece;
   return [{ what: "board-break", quote, from: breakOf(from.order.tier), to: breakOf(to.order.tier) }];
 }
 

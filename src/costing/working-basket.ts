@@ -1,17 +1,6 @@
 import { dayWords } from "./day-words.ts";
-import type { QuoteResult } from "./run-result.ts";
 import type { WorkingContext } from "./working.ts";
-import {
-  count,
-  from,
-  money,
-  notKnown,
-  number,
-  type Sheet,
-  type Step,
-  step,
-  summed,
-} from "./working-lines.ts";
+import { from, money, number, type Sheet, type Step, step, summed } from "./working-lines.ts";
 
 /** One order to one supplier, its charges and each line's share of them (section 4). */
 export function basketSheet({ prepared, result }: WorkingContext, id: string): Sheet | null {
@@ -72,83 +61,4 @@ function rateSteps(to: string, of: string, rate: Rate, converted: Step["amount"]
     }),
     step("=", "Converted", converted, "1.4", { result: true }),
   ];
-}
-
-/** A board house's quote at this run size (section 6). */
-export function quoteSheet(context: WorkingContext, id: string): Sheet | null {
-  const { result, prepared } = context;
-  const quote = result.boards.quotes.find((one) => one.id === id);
-  const worth = prepared.quotes.find((one) => one.quote.id === id)?.worth;
-  if (quote === undefined) return null;
-  const source = from("boards", id);
-  const charges = (["engineering", "stencil", "freight"] as const)
-    .map((name) => step("+", CHARGE_NAMES[name], chargeAmount(quote, name), "6", { source }))
-    .filter(
-      ({ amount }) =>
-        amount?.kind === "not-known" || (amount?.kind === "money" && /[1-9]/.test(amount.value)),
-    );
-  return {
-    title: `${quote.boardHouse}, boards for a run of ${result.kits}`,
-    steps: [
-      step(
-        null,
-        "Boards to order",
-        result.boards.toOrder === null
-          ? notKnown([...needsOf(quote)])
-          : count(result.boards.toOrder, "boards"),
-        "6",
-        { opens: "boards-to-order" },
-      ),
-      ...boardSteps(quote),
-      ...charges,
-      step("=", `${quote.boardHouse} charges`, money(quote.total, quote.currency), "6"),
-      ...rateSteps(
-        result.currency,
-        quote.currency,
-        worth?.rate ?? null,
-        money(quote.landed, result.currency),
-      ).map((one) => ({ ...one, result: false })),
-      step("÷", "Boards in the kits", count(result.boards.required, "boards"), "6"),
-      step("=", "One board", money(quote.perBoard, result.currency), "6", { result: true }),
-    ],
-    notes: quoteNotes(quote),
-    basis: `In ${quote.currency}, without VAT`,
-  };
-}
-
-const CHARGE_NAMES = { engineering: "Engineering", stencil: "Stencil", freight: "Freight" };
-
-function chargeAmount(quote: QuoteResult, name: "engineering" | "stencil" | "freight"): Step["amount"] {
-  const amount = quote[name];
-  return amount === null ? notKnown([...needsOf(quote)]) : money(amount, quote.currency);
-}
-
-function needsOf(quote: QuoteResult) {
-  return quote.landed.known ? [] : quote.landed.needs;
-}
-
-function boardSteps(quote: QuoteResult): Step[] {
-  const { currency, boards, breakReached, ordered } = quote;
-  if (boards === null || ordered === null) return [step(null, "Boards", notKnown([...needsOf(quote)]), "6")];
-  const source = from("boards", quote.id);
-  if (breakReached !== null) {
-    return [
-      step(null, "Boards ordered", count(ordered, "boards"), "3", { source }),
-      step("×", `Price each from ${breakReached.quantity}`, money(breakReached.price, currency, 6), "3", {
-        source,
-      }),
-      step("=", "Boards", money(boards, currency), "1.3", { rounds: boards.split(".")[1]?.length ?? 0 }),
-    ];
-  }
-  const lots = quote.lots.map((lot) => `${lot.count} of ${lot.quantity} for ${lot.price}`).join(", ");
-  return [step(null, `Lots: ${lots}`, money(boards, currency), "3", { source })];
-}
-
-function quoteNotes(quote: QuoteResult): string[] {
-  const notes: string[] = [];
-  if (quote.extra !== null && quote.extra > 0)
-    notes.push(`${quote.ordered} are ordered, ${quote.extra} more than the kits hold.`);
-  if (quote.boughtUp)
-    notes.push(`${quote.ordered} cost ${quote.boughtUp.saves} less than ${quote.boughtUp.insteadOf}.`);
-  return notes;
 }

@@ -24,6 +24,7 @@ export type FigureId =
   | `offer:${string}:${string}`
   | `basket:${string}`
   | `quote:${string}`
+  | `panel:${string}`
   | `task:${string}`
   | `sale:${string}`
   | `edition:${string}`

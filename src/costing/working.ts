@@ -1,17 +1,19 @@
 import type { Plan } from "#src/shapes/plan.ts";
 import { runResult } from "./cost-run.ts";
+import { panelOfQuote } from "./panels/panel-of-quote.ts";
 import { preparePlan } from "./prepare-plan.ts";
 import type { PreparedPlan } from "./prepared-plan.ts";
 import { reckonRun } from "./reckon-run.ts";
 import { HEADS, type HeadId, type RunResult } from "./run-result.ts";
 import { createSheet, type RunSheet } from "./run-sheet.ts";
-import { basketSheet, quoteSheet } from "./working-basket.ts";
+import { basketSheet } from "./working-basket.ts";
 import { boardsToOrderSheet } from "./working-boards.ts";
 import { crossingSheet, evenAfterSheet, firstOrSafeSheet, nextKitSheet } from "./working-even.ts";
 import { headSheet, taskSheet } from "./working-head.ts";
 import { type Sheet, treeOf } from "./working-lines.ts";
 import { offerSheet } from "./working-offer.ts";
 import { partSheet } from "./working-part.ts";
+import { quotedPanelSheet, quoteSheet } from "./working-quote.ts";
 import { leftOverSheet, perKitSheet, spentSheet, usedSheet } from "./working-run.ts";
 import { editionSheet, saleSheet } from "./working-sale.ts";
 import { earnsSheet, keptPerKitSheet, keptSheet, perHourSheet, profitSheet } from "./working-takings.ts";
@@ -50,6 +52,7 @@ const OF_A_THING: Record<string, (context: WorkingContext, id: string) => Sheet 
   offer: offerSheet,
   basket: basketSheet,
   quote: quoteSheet,
+  panel: quotedPanelSheet,
   task: taskSheet,
   sale: saleSheet,
   edition: editionSheet,
@@ -104,7 +107,8 @@ function newestPrice({ prepared, result }: WorkingContext): string | null {
 }
 
 /** Every figure of a run that opens, in reading order: what the endpoint's full working lists. */
-export function figuresOf({ result }: WorkingContext): FigureId[] {
+export function figuresOf(context: WorkingContext): FigureId[] {
+  const { result } = context;
   return [
     ...(Object.keys(PLAIN) as FigureId[]),
     ...HEADS.map((id): FigureId => `head:${id}`),
@@ -116,6 +120,9 @@ export function figuresOf({ result }: WorkingContext): FigureId[] {
     ]),
     ...result.baskets.map(({ supplier }): FigureId => `basket:${supplier}`),
     ...result.boards.quotes.map(({ id }): FigureId => `quote:${id}`),
+    ...result.boards.quotes
+      .filter(({ id }) => panelOfQuote(context.prepared.plan, id) !== null)
+      .map(({ id }): FigureId => `panel:${id}`),
     ...result.work.tasks.map(({ id }): FigureId => `task:${id}`),
     ...result.editions.flatMap(({ id }): FigureId[] => [`sale:${id}`, `edition:${id}`]),
   ];

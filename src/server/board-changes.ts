@@ -3,8 +3,11 @@ import { BoardQuote, type BoardQuoteChange, type BoardQuoteFields } from "#src/s
 import { BOARD_QUOTES_MOST } from "#src/shapes/limits.ts";
 import { beforeAndAfter } from "./before-and-after.ts";
 import { checked } from "./checked.ts";
+import { kitBoard } from "./kit-board.ts";
 import { newId } from "./new-id.ts";
 import { type Changing as ChangingSomewhere, clash, noteChange, type Where } from "./note-change.ts";
+import { refuseQuotedPanel } from "./panel-faults.ts";
+import { type PanelTermsView, viewTerms } from "./panel-terms-changes.ts";
 import { Problem, wrongField } from "./problem.ts";
 import {
   addBoardQuote as addRow,
@@ -16,6 +19,7 @@ import {
   removeBoardQuote as removeRow,
 } from "./store/board-quote.ts";
 import type { KitRow } from "./store/kit.ts";
+import { changePanelTerms, panelTermsOf } from "./store/panel-terms.ts";
 import { changeRunPlan, type RunPlanRow, runPlanOf } from "./store/run-plan.ts";
 import { inTransaction } from "./transaction.ts";
 
@@ -36,6 +40,7 @@ export type BoardChoiceView = Pick<
 export interface BoardsView {
   choice: BoardChoiceView;
   quotes: BoardQuoteView[];
+  panelTerms: PanelTermsView[];
 }
 
 function view({ quote: { workshopId: _, kitId: __, ...row }, breaks }: QuoteWithBreaks): BoardQuoteView {
@@ -47,9 +52,13 @@ function choiceOf(row: RunPlanRow): BoardChoiceView {
   return { chosenQuoteId, boardYield, boardConfidence, version };
 }
 
-/** The kit's quotes and how it orders its boards. */
+/** The kit's quotes, the panels of board houses, and how it orders its boards. */
 export function boards({ db, kit }: Where & { kit: KitRow }): BoardsView {
-  return { choice: choiceOf(runPlanOf(db, kit.id)), quotes: boardQuotesOf(db, kit.id).map(view) };
+  return {
+    choice: choiceOf(runPlanOf(db, kit.id)),
+    quotes: boardQuotesOf(db, kit.id).map(view),
+    panelTerms: panelTermsOf(db, kit.id).map(viewTerms),
+  };
 }
 
 function found({ db, kit }: Changing, quoteId: string): BoardQuoteView {
@@ -62,6 +71,7 @@ function found({ db, kit }: Changing, quoteId: string): BoardQuoteView {
 export function addQuote(given: Changing, input: BoardQuoteFields): BoardQuoteView {
   const { db, workshop, kit } = given;
   const { breaks, ...fields } = checked(BoardQuote, input);
+  refuseQuotedPanel({ ...fields, breaks }, kitBoard(kit));
   return inTransaction(db, () => {
     if (boardQuotesOf(db, kit.id).length >= BOARD_QUOTES_MOST)
       throw wrongField("", `A kit has at most ${BOARD_QUOTES_MOST} quotes. Remove one first.`);
@@ -82,11 +92,22 @@ export function changeQuote(
     if (before.version !== version) throw clash(given, quoteId, before);
     const { id: _, version: __, ...stays } = before;
     const { breaks, ...fields } = checked(BoardQuote, { ...stays, ...changed });
+    refuseQuotedPanel({ ...fields, breaks }, kitBoard(given.kit));
     if (!changeRow(given.db, quoteId, version, fields, breaks)) throw clash(given, quoteId, before);
+    renameHouse(given, before.boardHouse, fields.boardHouse);
     const detail = beforeAndAfter(stays, { ...fields, breaks });
     noteChange(given, { action: "quote.change", subjectId: quoteId, subjectName: before.boardHouse, detail });
     return found(given, quoteId);
   });
+}
+
+/** Panel terms go by the house's name: they follow when its last quote gets another. */
+function renameHouse({ db, kit }: Changing, from: string, to: string): void {
+  const terms = panelTermsOf(db, kit.id);
+  const own = terms.find(({ boardHouse }) => boardHouse === from);
+  if (from === to || !own || terms.some(({ boardHouse }) => boardHouse === to)) return;
+  if (boardQuotesOf(db, kit.id).some(({ quote }) => quote.boardHouse === from)) return;
+  changePanelTerms(db, own.id, own.version, { boardHouse: to });
 }
 
 /** Removes a quote; a kit that had chosen it takes the cheapest again. */

@@ -39,6 +39,7 @@ function strange(
 function ladderFaults(ladder: PlanOffer | PlanBoardQuote, at: string): FieldError[] {
   const { minimumOrder, orderMultiple } = { minimumOrder: 1, orderMultiple: 1, ...ladder };
   const { breaks, priceModel } = ladder;
+  if (priceModel === "formula") return [];
   return ladderProblems({ breaks, priceModel, minimumOrder, orderMultiple })
     .filter(({ refused }) => refused)
     .map(({ code, at: place }) => ({ at: `${at}.breaks.${place}.quantity`, message: LADDER_WORDS[code] }));

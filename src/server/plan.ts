@@ -1,7 +1,9 @@
 import type { Db } from "#db/client.ts";
 import { groupBy } from "#db/group-by.ts";
-import type { Plan, PlanOffer, PlanPart, PlanSupplier } from "#src/shapes/plan.ts";
+import type { Plan, PlanBoardQuote, PlanOffer, PlanPart, PlanSupplier } from "#src/shapes/plan.ts";
 import { revisionLetter } from "#src/shapes/revision-letter.ts";
+import { kitBoard } from "./kit-board.ts";
+import { coreTerms } from "./panel-faults.ts";
 import { boardQuotesOf, type QuoteWithBreaks } from "./store/board-quote.ts";
 import { type CurrencyRateRow, currencyRatesOf } from "./store/currency-rate.ts";
 import { editionsOf } from "./store/edition.ts";
@@ -9,6 +11,7 @@ import type { KitRow } from "./store/kit.ts";
 import { type LineQuantityRow, type LineRow, lineQuantitiesOf, linesOf } from "./store/line.ts";
 import type { WorkshopRow } from "./store/membership.ts";
 import { type OfferWithBreaks, offersForKit } from "./store/offer.ts";
+import { panelTermsOf } from "./store/panel-terms.ts";
 import { type PartChoiceRow, type PartRow, partChoicesOf, partsUsedElsewhere } from "./store/part.ts";
 import { chargesOf, packingItemsOf, type RunPlanRow, runPlanOf, tasksOf } from "./store/run-plan.ts";
 import { type SupplierRow, shutOutOf, suppliersOf } from "./store/supplier.ts";
@@ -60,13 +63,36 @@ function planSupplier(row: SupplierRow): PlanSupplier {
   };
 }
 
-function planQuote({ quote, breaks }: QuoteWithBreaks): Plan["boards"]["quotes"][number] {
+function sizeOf(width: string | null, height: string | null): PlanBoardQuote["pieceSize"] {
+  return width === null || height === null ? null : { width, height };
+}
+
+function formulaOf({
+  priceModel,
+  setUp,
+  areaRate,
+  areaUnit,
+  perBoard,
+}: QuoteWithBreaks["quote"]): PlanBoardQuote["formula"] {
+  if (priceModel !== "formula") return null;
+  if (setUp === null || areaRate === null || areaUnit === null || perBoard === null) return null;
+  return { setUp, areaRate, areaUnit, perBoard };
+}
+
+function planQuote({ quote, breaks }: QuoteWithBreaks): PlanBoardQuote {
   return {
     id: quote.id,
     boardHouse: quote.boardHouse,
     currency: quote.currency,
+    boardsPerPanel: quote.boardsPerPanel,
+    pieceSize:
+      quote.boardsPerPanel === null
+        ? sizeOf(quote.width, quote.height)
+        : sizeOf(quote.panelWidth, quote.panelHeight),
     priceModel: quote.priceModel,
     breaks,
+    formula: formulaOf(quote),
+    depanelling: quote.depanelling,
     engineeringCharge: quote.engineeringCharge,
     stencilCharge: quote.stencilCharge,
     freight: quote.freight,
@@ -185,6 +211,8 @@ export function planOf(db: Db, workshop: WorkshopRow, kit: KitRow, asOf: string)
     shutOutSuppliers: shutOutOf(db, kit.id),
     boards: {
       needed: kit.boardNeeded,
+      size: kitBoard(kit),
+      panelTerms: panelTermsOf(db, kit.id).map((row) => ({ boardHouse: row.boardHouse, ...coreTerms(row) })),
       yield: run.boardYield,
       confidence: run.boardConfidence,
       quotes: boardQuotesOf(db, kit.id).map(planQuote),

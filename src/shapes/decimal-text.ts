@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { MONEY_WHOLE_DIGITS, UNIT_PRICE_PLACES } from "./limits.ts";
+import { MONEY_WHOLE_DIGITS, PANEL_SIDE_MOST, UNIT_PRICE_PLACES } from "./limits.ts";
 
 const whole = `\\d{1,${MONEY_WHOLE_DIGITS}}`;
 
@@ -10,6 +10,15 @@ export const Amount = z
     new RegExp(`^${whole}(\\.\\d{1,${UNIT_PRICE_PLACES}})?$`),
     "Write a number such as 0.062: digits with a point, not negative, at most 6 decimals.",
   );
+
+/** A length in millimetres as decimal text, in whole micrometres, 0 allowed: a router's width, a rail. */
+export const Millimetres = z
+  .string()
+  .regex(/^\d{1,4}(\.\d{1,3})?$/, "Write millimetres such as 2.4: not negative, at most 3 decimals.")
+  .refine((text) => Number(text) <= PANEL_SIDE_MOST, `Write at most ${PANEL_SIDE_MOST} mm.`);
+
+/** The side of a thing in millimetres: more than nothing. */
+export const Side = Millimetres.refine((text) => /[1-9]/.test(text), "Write a measure of more than 0 mm.");
 
 /** A share or rate from 0 up to but not including 1, as decimal text: `"0.029"` is 2.9 %. */
 export const RateBelowOne = z

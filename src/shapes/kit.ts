@@ -1,12 +1,12 @@
 import { z } from "zod";
-import { Amount } from "./decimal-text.ts";
+import { Millimetres } from "./decimal-text.ts";
 import { Name, ShortText, Version } from "./field.ts";
 import { BOARD_SHAPES } from "./limits.ts";
 
 const BOARD_MOST_MM = 1000;
 
 /** A side or diameter of a board in millimetres; null while it is not drawn. */
-const Side = Amount.refine((text) => Number(text) > 0, "A board is wider than 0 mm.")
+const Side = Millimetres.refine((text) => Number(text) > 0, "A board is wider than 0 mm.")
   .refine((text) => Number(text) <= BOARD_MOST_MM, `Write at most ${BOARD_MOST_MM} mm.`)
   .nullable();
 

@@ -31,8 +31,8 @@ export type LineMark = (typeof LINE_MARKS)[number];
 export const PRICE_MODELS = ["whole-order", "by-slice", "lots"] as const;
 export type PriceModel = (typeof PRICE_MODELS)[number];
 
-/** How a board house prices: fixed lots at a total price, or per board at the break reached. */
-export const BOARD_PRICE_MODELS = ["lots", "whole-order"] as const;
+/** How a board house prices boards or panels: fixed lots at a total price, each at the break reached, or by formula. */
+export const BOARD_PRICE_MODELS = ["lots", "whole-order", "formula"] as const;
 export type BoardPriceModel = (typeof BOARD_PRICE_MODELS)[number];
 
 export const BOARD_SHAPES = ["rectangle", "round"] as const;

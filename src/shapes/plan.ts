@@ -1,5 +1,15 @@
 import { z } from "zod";
-import { Amount, ConversionRate, CurrencyCode, Day, Rate, RateBelowOne, Share } from "./decimal-text.ts";
+import {
+  Amount,
+  ConversionRate,
+  CurrencyCode,
+  Day,
+  Millimetres,
+  Rate,
+  RateBelowOne,
+  Share,
+  Side,
+} from "./decimal-text.ts";
 import * as limits from "./limits.ts";
 
 /**
@@ -74,13 +84,35 @@ export const PlanSupplier = z.strictObject({
 });
 export type PlanSupplier = z.infer<typeof PlanSupplier>;
 
-/** A board house's quote (section 6). Lots may be combined; breaks are per board at the break reached. */
+const Size = z.strictObject({ width: Side, height: Side });
+
+/** A board house's formula (section 6): once, a rate for the area of all it makes, and a sum for every board. */
+export const PlanBoardFormula = z.strictObject({
+  setUp: Amount,
+  areaRate: Amount,
+  areaUnit: z.enum(limits.AREA_UNITS),
+  perBoard: Amount,
+});
+export type PlanBoardFormula = z.infer<typeof PlanBoardFormula>;
+
+/**
+ * A board house's quote (section 6) for single boards or for panels, its pieces. Quantities are pieces: lots may be
+ * combined; breaks are for each piece at the break reached. Plans of the first format know single boards only.
+ */
 export const PlanBoardQuote = z.strictObject({
   id: Id,
   boardHouse: Name,
   currency: CurrencyCode,
-  priceModel: z.enum(["lots", "whole-order"]),
+  /** `null`: boards come singly. */
+  boardsPerPanel: z.int().min(2).max(limits.BOARDS_PER_PANEL_MOST).nullable().default(null),
+  /** Outer size of a piece in millimetres, as quoted; a formula needs it. */
+  pieceSize: Size.nullable().default(null),
+  priceModel: z.enum(limits.BOARD_PRICE_MODELS),
   breaks: z.array(PriceBreak).max(limits.BREAKS_PER_OFFER_MOST),
+  /** `null` unless the price model is a formula that is known. */
+  formula: PlanBoardFormula.nullable().default(null),
+  /** For breaking a board out of its panel, for each board delivered. */
+  depanelling: Amount.default("0"),
   engineeringCharge: Amount,
   stencilCharge: Amount,
   freight: Amount.nullable(),
@@ -89,6 +121,18 @@ export const PlanBoardQuote = z.strictObject({
   validUntil: Day.nullable(),
 });
 export type PlanBoardQuote = z.infer<typeof PlanBoardQuote>;
+
+/** What a board house makes panels like (section 6), in millimetres; all its quotes share it. */
+export const PlanPanelTerms = z.strictObject({
+  boardHouse: Name,
+  /** Outer sizes, rails included, either way round; `least` null: none stated. */
+  largest: Size,
+  least: Size.nullable(),
+  separation: z.enum(limits.SEPARATIONS),
+  gap: Millimetres,
+  rails: z.strictObject({ sides: z.enum(limits.RAIL_SIDES), width: Millimetres }),
+});
+export type PlanPanelTerms = z.infer<typeof PlanPanelTerms>;
 
 export const PlanEdition = z.strictObject({
   id: Id,
@@ -162,6 +206,11 @@ export const Plan = z.strictObject({
   boards: z.strictObject({
     /** False for a kit without a board of its own. */
     needed: z.boolean(),
+    /** The board's size in millimetres, as it lies on panels; `null`: not stated. */
+    size: Size.extend({ shape: z.enum(limits.BOARD_SHAPES) })
+      .nullable()
+      .default(null),
+    panelTerms: z.array(PlanPanelTerms).max(limits.BOARD_QUOTES_MOST).default([]),
     yield: Share,
     confidence: RateBelowOne,
     quotes: z.array(PlanBoardQuote).max(limits.BOARD_QUOTES_MOST),

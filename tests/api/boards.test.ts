@@ -22,6 +22,18 @@ const RUN = {
   replacementShare: "0",
 };
 
+/** A panel of 12 boards of 58 × 42 mm: 4 × 58 + 3 × 2 by 3 × 42 + 4 × 2 + 2 × 5. */
+const TWELVE = { boardsPerPanel: 12, panelWidth: "238", panelHeight: "144", depanelling: "0.08" };
+
+const FORMULA = {
+  priceModel: "formula",
+  breaks: [],
+  setUp: "40",
+  areaRate: "1.335",
+  areaUnit: "dm2",
+  perBoard: "0.03",
+} as const;
+
 function ground(workshop: WorkshopRow = app.workshop()) {
   const as = app.person("designer", workshop);
   const kit = app.kit(workshop);
@@ -44,6 +56,7 @@ describe("board quotes", () => {
     expect(await seen()).toEqual({
       choice: { chosenQuoteId: null, boardYield: "1", boardConfidence: "0.95", version: 1 },
       quotes: [body],
+      panelTerms: [],
     });
   });
 
@@ -58,12 +71,28 @@ describe("board quotes", () => {
     ["no layer", { layers: 0 }, "layers"],
     ["an end before its beginning", { validUntil: "2026-02-01" }, "validUntil"],
     ["a currency nobody can pay in", { currency: "XAG" }, "currency"],
+    ["a panel of one board", { boardsPerPanel: 1 }, "boardsPerPanel"],
+    ["a panel's size for single boards", { panelWidth: "100" }, "panelWidth"],
+    ["depanelling of single boards", { depanelling: "0.10" }, "depanelling"],
+    ["half a panel's size", { boardsPerPanel: 12, panelWidth: "238" }, "panelHeight"],
+    ["boards that do not fit on their panel", { ...TWELVE, panelWidth: "200" }, "panelWidth"],
+    ["a board larger than its panel", { ...TWELVE, boardsPerPanel: 2, panelHeight: "41" }, "panelWidth"],
+    ["a measure finer than a micrometre", { width: "58.0001" }, "width"],
+    ["a formula without its rate", { ...FORMULA, areaRate: null }, "areaRate"],
+    ["a formula with breaks", { ...FORMULA, breaks: QUOTE.breaks }, "breaks"],
+    ["a formula's rate where lots are sold", { areaRate: "1.20" }, "areaRate"],
   ])("are refused with %s, and the field is named", async (_, over, at) => {
     const { added, seen } = ground();
     const answer = await added(over);
     expect(answer.status).toBe(422);
     expect(answer.problem?.errors?.map((error) => error.at)).toEqual([at]);
     expect((await seen()).quotes).toEqual([]);
+  });
+
+  it("are taken for panels, and by formula", async () => {
+    const { added } = ground();
+    expect((await added(TWELVE)).body).toMatchObject(TWELVE);
+    expect((await added({ ...TWELVE, ...FORMULA })).body).toMatchObject({ ...TWELVE, ...FORMULA });
   });
 
   it("keep freight that nobody knows apart from freight of nothing", async () => {

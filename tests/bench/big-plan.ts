@@ -43,6 +43,8 @@ export function bigPlan(parts: number, offers: number, breaks: number, sweepTo: 
     parts: Array.from({ length: parts }, (_, index) => bigPart(index, offers, breaks, currencies, pick)),
     boards: {
       needed: true,
+      size: null,
+      panelTerms: [],
       yield: "0.97",
       confidence: "0.95",
       quotes: [

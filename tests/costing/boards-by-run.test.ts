@@ -10,6 +10,10 @@ const quote = (over: Partial<PlanBoardQuote>): PlanBoardQuote => ({
   currency: "EUR",
   priceModel: "lots",
   breaks: [{ quantity: 10, price: "20" }],
+  boardsPerPanel: null,
+  pieceSize: null,
+  formula: null,
+  depanelling: "0",
   engineeringCharge: "0",
   stencilCharge: "0",
   freight: "5",
@@ -32,7 +36,7 @@ function withBoards(): Plan {
   return {
     ...plan,
     editions: plan.editions.map((edition) => ({ ...edition, boardsPerKit: 1 })),
-    boards: { ...plan.boards, needed: true, quotes: [quote({}), each] },
+    boards: { ...plan.boards, needed: true, size: null, panelTerms: [], quotes: [quote({}), each] },
   };
 }
 

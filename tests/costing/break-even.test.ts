@@ -45,6 +45,8 @@ describe("break-even", () => {
       editions: [edition({ price: "10" })],
       boards: {
         needed: true,
+        size: null,
+        panelTerms: [],
         yield: "1",
         confidence: "0.9",
         chosenQuote: null,

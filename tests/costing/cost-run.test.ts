@@ -340,7 +340,14 @@ describe("the shelf", () => {
 });
 
 describe("boards, work and the rest", () => {
-  const boards = { needed: true, yield: "0.95", confidence: "0.95", chosenQuote: null };
+  const boards = {
+    needed: true,
+    size: null,
+    panelTerms: [],
+    yield: "0.95",
+    confidence: "0.95",
+    chosenQuote: null,
+  };
 
   test("every quote is compared at the run's size, and the extra boards of the next lot show at their cost", () => {
     const quotes = [

@@ -154,9 +154,25 @@ export function plainBoards(required: number, yieldShare: string, confidence: st
   }
 }
 
-function boardOrder(quote: PlanBoardQuote, need: number): PlainOrder {
-  if (quote.priceModel === "whole-order")
-    return plainOrder({ ...quote, minimumOrder: 1, orderMultiple: 1 }, need);
+/** Pieces that hold the boards, each priced with the depanelling of its boards. */
+function boardOrder(stated: PlanBoardQuote, boards: number): PlainOrder {
+  const hold = stated.boardsPerPanel ?? 1;
+  const need = Math.ceil(boards / hold);
+  const broken = dec(stated.depanelling).times(hold);
+  if (stated.priceModel === "formula") return { quantity: need, cost: byFormula(stated, need, hold) };
+  const { priceModel } = stated;
+  const quote = {
+    ...stated,
+    priceModel,
+    breaks: stated.breaks.map(({ quantity, price }) => ({
+      quantity,
+      price: broken
+        .times(priceModel === "lots" ? quantity : 1)
+        .plus(price)
+        .toFixed(),
+    })),
+  };
+  if (priceModel === "whole-order") return plainOrder({ ...quote, minimumOrder: 1, orderMultiple: 1 }, need);
   const best: PlainOrder[] = [{ quantity: 0, cost: new D(0) }];
   for (let pieces = 1; pieces <= need; pieces += 1) {
     for (const lot of quote.breaks) {
@@ -176,6 +192,20 @@ function boardOrder(quote: PlanBoardQuote, need: number): PlainOrder {
     }
   }
   return best[need] as PlainOrder;
+}
+
+/** Set-up, area and boards; square millimetres in a square decimetre 10^4, in a square metre 10^6. */
+function byFormula(
+  { formula, pieceSize, depanelling, currency }: PlanBoardQuote,
+  pieces: number,
+  hold: number,
+): D {
+  if (formula === null || pieceSize === null) throw new Error("A formula without its terms.");
+  const area = dec(pieceSize.width)
+    .times(pieceSize.height)
+    .div(formula.areaUnit === "dm2" ? 1e4 : 1e6);
+  const each = area.times(formula.areaRate).plus(dec(formula.perBoard).plus(depanelling).times(hold));
+  return rounded(each.times(pieces).plus(formula.setUp), currency);
 }
 
 /** Σ i^(log2 slope), each factor to 12 decimals, for the kits after those made before. */

@@ -108,6 +108,8 @@ describe("sweet spots", () => {
       editions: [edition()],
       boards: {
         needed: true,
+        size: null,
+        panelTerms: [],
         yield: "1",
         confidence: "0.9",
         chosenQuote: null,

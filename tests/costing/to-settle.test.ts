@@ -44,7 +44,15 @@ describe("what is to settle", () => {
 
   test("a part with two problems is one thing; things stand in the order of the pages", () => {
     const of = made([part({ offers: [offer({ pricedOn: null, stockShown: 3 })] })], {
-      boards: { needed: true, yield: "1", confidence: "0.95", quotes: [quote()], chosenQuote: null },
+      boards: {
+        needed: true,
+        size: null,
+        panelTerms: [],
+        yield: "1",
+        confidence: "0.95",
+        quotes: [quote()],
+        chosenQuote: null,
+      },
       editions: [edition({ price: null })],
     });
     const ended = { ...of.boards, quotes: [quote(), quote({ id: "ended", validUntil: "2026-03-01" })] };

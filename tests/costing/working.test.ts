@@ -127,7 +127,15 @@ describe("working", () => {
 
   test("no such figure, no working", () => {
     const made = plan({
-      boards: { needed: false, yield: "1", confidence: "0.9", quotes: [quote()], chosenQuote: null },
+      boards: {
+        needed: false,
+        size: null,
+        panelTerms: [],
+        yield: "1",
+        confidence: "0.9",
+        quotes: [quote()],
+        chosenQuote: null,
+      },
     });
     expect(working(made, 10, "basket:tamsin")).toBeNull();
     expect(working(made, 10, "part:nothing")).toBeNull();

@@ -1,4 +1,4 @@
-import { mkdirSync, mkdtempSync, rmSync, writeFileSync } from "node:fs";
+import { cpSync, mkdirSync, mkdtempSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
 import { afterEach, beforeEach, expect, test } from "vitest";
@@ -77,4 +77,40 @@ test("what was confirmed is there after the connection is lost: a committed row 
   db.$client.exec("insert into kits values ('k', 'Gate Bell')");
   // No close: as after a crash, the second connection finds what the write-ahead log holds.
   expect(openDb(path).$client.prepare("select name from kits").get()).toEqual({ name: "Gate Bell" });
+});
+
+/** The real migrations up to one of them. */
+function upTo(tag: string): string {
+  const path = join(folder, "up-to");
+  cpSync("db/migrations", path, { recursive: true });
+  const journal = join(path, "meta/_journal.json");
+  const read = JSON.parse(readFileSync(journal, "utf8")) as { entries: { tag: string }[] };
+  const last = read.entries.findIndex((entry) => entry.tag === tag);
+  writeFileSync(journal, JSON.stringify({ ...read, entries: read.entries.slice(0, last + 1) }));
+  return path;
+}
+
+test("board quotes from before panels are for single boards, with their lots", () => {
+  const db = openDb(join(folder, "x.db"));
+  migrateDb(db, upTo("0004_rates-by-day"));
+  db.$client.exec(`
+    insert into workshops (id, name, currency, created_at) values ('w', 'Marsh Lane', 'EUR', 1);
+    insert into kits (id, workshop_id, name, summary, created_at) values ('k', 'w', 'Gate Bell', '', 1);
+    insert into board_quotes (id, workshop_id, kit_id, board_house, currency, width, finish, colour, price_model,
+      engineering_charge, stencil_charge, note)
+      values ('q', 'w', 'k', 'Kilnside', 'EUR', '58', '', '', 'lots', '25', '0', '');
+    insert into board_quote_breaks (workshop_id, quote_id, quantity, price) values ('w', 'q', 50, '90');`);
+  migrateDb(db);
+  const quote = db.$client.prepare("select * from board_quotes").get();
+  expect(quote).toMatchObject({ width: "58", engineering_charge: "25", depanelling: "0", version: 1 });
+  for (const column of [
+    "boards_per_panel",
+    "panel_width",
+    "panel_height",
+    "set_up",
+    "area_rate",
+    "area_unit",
+  ])
+    expect(quote).toHaveProperty(column, null);
+  expect(db.$client.prepare("select quantity from board_quote_breaks").all()).toEqual([{ quantity: 50 }]);
 });

@@ -65,7 +65,15 @@ export function smallPlan(): Plan {
       },
     ],
     shutOutSuppliers: [],
-    boards: { needed: false, yield: "1", confidence: "0.95", quotes: [], chosenQuote: null },
+    boards: {
+      needed: false,
+      size: null,
+      panelTerms: [],
+      yield: "1",
+      confidence: "0.95",
+      quotes: [],
+      chosenQuote: null,
+    },
     work: {
       ratePerHour: "18",
       learningSlope: "1",

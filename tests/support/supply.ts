@@ -58,6 +58,10 @@ export const QUOTE = {
   currency: "EUR",
   width: "58",
   height: "42",
+  boardsPerPanel: null,
+  panelWidth: null,
+  panelHeight: null,
+  depanelling: "0",
   layers: 2,
   finish: "lead-free tin",
   colour: "petrol",
@@ -66,6 +70,10 @@ export const QUOTE = {
     { quantity: 50, price: "90.00" },
     { quantity: 100, price: "140.00" },
   ],
+  setUp: null,
+  areaRate: null,
+  areaUnit: null,
+  perBoard: null,
   engineeringCharge: "25.00",
   stencilCharge: "0",
   freight: "12.50",
@@ -73,4 +81,17 @@ export const QUOTE = {
   pricedOn: "2026-03-01",
   validUntil: "2026-04-01",
   note: "",
+} as const;
+
+/** A house that routes panels with 2 mm between boards and rails of 5 mm along the long sides. */
+export const PANEL_TERMS = {
+  boardHouse: "Kilnside",
+  largestWidth: "250",
+  largestHeight: "200",
+  leastWidth: null,
+  leastHeight: null,
+  separation: "routed",
+  gap: "2",
+  railSides: "long",
+  railWidth: "5",
 } as const;

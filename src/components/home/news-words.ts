@@ -23,6 +23,7 @@ const NOUNS: Readonly<Record<string, [one: string, many: string]>> = {
   packing: ["the packing item", "packing items"],
   charge: ["the charge", "charges"],
   quote: ["the board quote of", "board quotes"],
+  "panel-terms": ["the panels of", "board houses' panels"],
   edition: ["the edition", "editions"],
 };
 

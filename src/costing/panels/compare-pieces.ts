@@ -1,5 +1,5 @@
 import { boardsToOrder } from "#src/costing/boards-to-order.ts";
-import { compareWorth } from "#src/costing/conversion.ts";
+import { compareWorth, type MinorWorth } from "#src/costing/conversion.ts";
 import { totalOf } from "./cost-pieces.ts";
 import { orderPieces } from "./order-pieces.ts";
 import type { PreparedPieces } from "./prepare-pieces.ts";
@@ -32,22 +32,23 @@ export interface RunBoards {
 }
 
 /**
- * Compares boards bought singly with panels at every run size, landed, by exact worth (section 6). Both quotes get
- * the same boards to order. A run size at which either cannot be reckoned, or no board is needed, is in no range.
- * `null` where a freight is not known, or a currency has no rate: then nothing can be said.
+ * Compares the cheapest way to buy boards singly with the cheapest in panels at every run size, landed, by exact
+ * worth (section 6). All quotes get the same boards to order; those whose freight or rate is not known are left out.
+ * A run size at which one of the two ways cannot be reckoned, or no board is needed, is in no range. `null` where
+ * one way has no quote to compare.
  *
  * @example singly 10 + 2 a board, panels of 10 at 12 + 10: panels pay from 7 boards on, not yet at 11, 12 …
  */
 export function comparePieces(
-  singly: PreparedPieces,
-  panelled: PreparedPieces,
+  singly: readonly PreparedPieces[],
+  panelled: readonly PreparedPieces[],
   boards: RunBoards,
 ): PanelsPay | null {
-  if (singly.freight === null || panelled.freight === null) return null;
-  if (singly.worth === null || panelled.worth === null) return null;
+  const [ones, others] = [singly.filter(isKnown), panelled.filter(isKnown)];
+  if (ones.length === 0 || others.length === 0) return null;
   const ranges: CheaperRange[] = [];
   boards.required.forEach((required, index) => {
-    const cheaper = cheaperFor(singly, panelled, boards, required);
+    const cheaper = cheaperFor(ones, others, boards, required);
     const last = ranges.at(-1);
     if (cheaper === null) return;
     if (last?.cheaper === cheaper && last.to === index) last.to = index + 1;
@@ -62,22 +63,41 @@ export function comparePieces(
   };
 }
 
+/** A quote whose every charge is known and has a rate. */
+type Known = PreparedPieces & { worth: MinorWorth };
+
+function isKnown(prepared: PreparedPieces): prepared is Known {
+  return prepared.freight !== null && prepared.worth !== null;
+}
+
 function cheaperFor(
-  singly: PreparedPieces,
-  panelled: PreparedPieces,
+  singly: readonly Known[],
+  panelled: readonly Known[],
   boards: RunBoards,
   required: number,
 ): Cheaper | null {
   const toOrder = required === 0 ? null : boardsToOrder(required, boards.yield, boards.confidence);
-  if (toOrder === null || singly.worth === null || panelled.worth === null) return null;
-  const one = orderPieces(singly, toOrder);
-  const other = orderPieces(panelled, toOrder);
+  if (toOrder === null) return null;
+  const [one, other] = [leastOf(singly, toOrder), leastOf(panelled, toOrder)];
   if (one === null || other === null) return null;
-  const difference = compareWorth(
-    totalOf(singly, one),
-    singly.worth,
-    totalOf(panelled, other),
-    panelled.worth,
-  );
+  const difference = compareWorth(one.total, one.worth, other.total, other.worth);
   return difference > 0 ? "panelled" : difference < 0 ? "singly" : "same";
+}
+
+interface Sum {
+  total: number;
+  worth: MinorWorth;
+}
+
+/** The least that so many boards cost by one of the quotes; null where none has them. */
+function leastOf(quotes: readonly Known[], toOrder: number): Sum | null {
+  let least: Sum | null = null;
+  for (const prepared of quotes) {
+    const order = orderPieces(prepared, toOrder);
+    if (order === null) continue;
+    const { worth } = prepared;
+    const total = totalOf(prepared, order);
+    if (least === null || compareWorth(total, worth, least.total, least.worth) < 0) least = { total, worth };
+  }
+  return least;
 }

@@ -1,7 +1,7 @@
 import { BOARDS_PER_PANEL_MOST } from "#src/shapes/limits.ts";
 import { type Arrangement, asItLies, howMany } from "./arrangement.ts";
 import { gridsIn, waysRound } from "./grids.ts";
-import { sizeWords } from "./micrometres.ts";
+import { type Size, sizeWords } from "./micrometres.ts";
 import { mostByArea } from "./most-boards.ts";
 import { outerOf, reachesLeast, roomIn } from "./panel-frame.ts";
 import { type PanelMeasures, readMeasures } from "./panel-measures.ts";
@@ -41,7 +41,7 @@ export function fitPanels(board: PanelBoard, terms: PanelTerms): PanelsFitted {
   const problem = tooLarge(measures) ?? tooMany(measures);
   if (problem) return { ok: false, problems: [problem] };
   const room = roomIn(measures);
-  const all = [...gridsIn(room, measures), ...(measures.routed ? twoBlocksIn(room, measures) : [])];
+  const all = layoutsIn(room, measures);
   const arrangements = smallestOfEach(all, measures);
   const last = arrangements.at(-1);
   if (last === undefined) return { ok: false, problems: [belowLeast(all, measures)] };
@@ -49,6 +49,15 @@ export function fitPanels(board: PanelBoard, terms: PanelTerms): PanelsFitted {
   const proven = !measures.round && (!measures.routed || last.count === byArea);
   const claim = proven ? "proven" : "best-tried";
   return { ok: true, measures, arrangements, most: last.count, mostByArea: byArea, claim };
+}
+
+/**
+ * Every layout that is tried: grids, and for routed panels two blocks.
+ *
+ * @example V-scored 250 × 190 mm, boards of 58 × 42 mm → the grids 4 × 4 … 1 × 1 and the turned ones
+ */
+export function layoutsIn(room: Size, measures: PanelMeasures): Arrangement[] {
+  return [...gridsIn(room, measures), ...(measures.routed ? twoBlocksIn(room, measures) : [])];
 }
 
 function tooLarge(measures: PanelMeasures): PanelProblem | null {

@@ -11,7 +11,7 @@ import type { PanelMeasures } from "./panel-measures.ts";
  *
  * @example 49 × 28, boards of 8 × 3 without gap → 57
  */
-export function mostByArea(room: Size, { board, gap }: PanelMeasures): number {
+export function mostByArea(room: Size, { board, gap }: Pick<PanelMeasures, "board" | "gap">): number {
   const [width, height] = [board.width + gap, board.height + gap];
   const across = longestSum(room.width + gap, width, height);
   const down = longestSum(room.height + gap, width, height);

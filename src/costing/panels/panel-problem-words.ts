@@ -4,6 +4,7 @@ import type { PanelField, PanelProblem, PanelProblemCode } from "./panel-problem
 const FIELDS: Record<PanelField, string> = {
   board: "the board",
   largest: "the largest panel",
+  quoted: "the quoted panel",
   least: "the least panel",
   "board.width": "the board's width",
   "board.height": "the board's height",
@@ -16,7 +17,11 @@ const FIELDS: Record<PanelField, string> = {
   "rails.width": "the rail's width",
 };
 
-type Said = Required<Record<"board" | "room" | "panel", string>> & { most: number; field: string };
+type Said = Required<Record<"board" | "room" | "panel", string>> & {
+  most: number;
+  count: number;
+  field: string;
+};
 
 const SENTENCES: Record<PanelProblemCode, (said: Said) => string> = {
   "too-fine": ({ field }) => `Write ${field} in whole micrometres: at most 3 decimals of a millimetre.`,
@@ -35,6 +40,8 @@ const SENTENCES: Record<PanelProblemCode, (said: Said) => string> = {
     `The largest panel of this board would be ${panel}, which is below the least size. Widen the rails, or order single boards.`,
   "too-many-boards": ({ most }) =>
     `${most} boards would fit, and more than ${BOARDS_PER_PANEL_MOST} to a panel are not laid out. Check the board's size.`,
+  "quoted-panel-too-small": ({ board, panel, count }) =>
+    `${count} boards of ${board} do not fit on a panel of ${panel}, however they lie. Check its size and the boards on it.`,
 };
 
 /**
@@ -43,5 +50,13 @@ const SENTENCES: Record<PanelProblemCode, (said: Said) => string> = {
  * @example round-v-score → "A round board cannot be V-scored, because a score runs straight from edge to edge. Choose routing."
  */
 export function panelSentence({ code, field, facts }: PanelProblem): string {
-  return SENTENCES[code]({ board: "", room: "", panel: "", most: 0, ...facts, field: FIELDS[field] });
+  return SENTENCES[code]({
+    board: "",
+    room: "",
+    panel: "",
+    most: 0,
+    count: 0,
+    ...facts,
+    field: FIELDS[field],
+  });
 }

@@ -11,6 +11,7 @@ export const PANEL_PROBLEM_CODES = [
   "board-larger-than-panel",
   "below-least",
   "too-many-boards",
+  "quoted-panel-too-small",
 ] as const;
 export type PanelProblemCode = (typeof PANEL_PROBLEM_CODES)[number];
 
@@ -19,17 +20,19 @@ export type PanelField =
   | `${"board" | "largest" | "least"}.${"width" | "height"}`
   | "board"
   | "largest"
+  | "quoted"
   | "least"
   | "separation"
   | "gap"
   | "rails.width";
 
-/** `board`, `room`, `panel`: sizes in words, "58 × 42 mm"; `most`: a count. */
+/** `board`, `room`, `panel`: sizes in words, "58 × 42 mm"; `most`, `count`: of boards. */
 export interface PanelFacts {
   board?: string;
   room?: string;
   panel?: string;
   most?: number;
+  count?: number;
 }
 
 export interface PanelProblem {

@@ -14,7 +14,7 @@ export interface PreparedPieces {
   worth: MinorWorth | null;
   /** Of pieces, each with its depanelling; null for a formula, or where no price is stated. */
   ladder: Ladder | null;
-  /** In grains of the quote's currency: once, and for each piece with its boards. */
+  /** In grains of the quote's currency: once, and for each piece with its boards; null where its size is not known. */
   formula: { once: bigint; perPiece: bigint } | null;
   /** Minor units of the quote's currency; `freight` null: not known. */
   engineering: number;
@@ -43,14 +43,14 @@ export function preparePieces(
     quote,
     worth,
     ladder:
-      price.model === "formula" || price.breaks.length === 0
+      price === null || price.model === "formula" || price.breaks.length === 0
         ? null
         : prepareLadder(
             { ...terms, priceModel: price.model, breaks: withDepanelling(price, quote) },
             Number.POSITIVE_INFINITY,
             divideUp(boardsMost, boardsPerPiece),
           ),
-    formula: price.model === "formula" ? formulaOf(price, quote) : null,
+    formula: price?.model === "formula" ? formulaOf(price, quote) : null,
     engineering: minor(quote.engineeringCharge),
     stencil: minor(quote.stencilCharge),
     freight: freight === null ? null : minor(freight),
@@ -72,6 +72,7 @@ function formulaOf(
   { setUp, areaRate, areaUnit, perBoard }: FormulaPrice,
   { boardsPerPiece, pieceArea, depanelling }: PieceQuote,
 ): PreparedPieces["formula"] {
+  if (pieceArea === null) return null;
   const places = 6 + 8 + UNIT_PLACES[areaUnit];
   const byArea = scaled(areaRate, 6) * scaled(pieceArea, 8) * 10n ** BigInt(GRAIN_PLACES - places);
   const byBoard = (grains(perBoard) + grains(depanelling)) * BigInt(boardsPerPiece);

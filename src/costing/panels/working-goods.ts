@@ -6,7 +6,7 @@ import { divideUp } from "#src/costing/whole.ts";
 import { count, from, money, number, type Step, step } from "#src/costing/working-lines.ts";
 import type { PieceCost } from "./cost-pieces.ts";
 import type { PieceOrder } from "./order-pieces.ts";
-import type { FormulaPrice, PieceQuote } from "./piece-quote.ts";
+import type { FormulaPrice, LadderPrice, PieceQuote } from "./piece-quote.ts";
 import type { PreparedPieces } from "./prepare-pieces.ts";
 
 /**
@@ -24,14 +24,20 @@ export function goodsSteps(
   const words = namesOf(quote);
   const goods = money(cost.goods, quote.currency);
   const result = step("=", words.many, goods, "1.3", { rounds: minorDecimals(quote.currency) });
-  if (quote.price.model === "formula") return [...formulaSteps(prepared, order, quote.price), result];
-  if (ladder === null) return [];
-  if (quote.price.model === "lots") return [lotsStep(prepared, ladder, cost, toOrder)];
-  return [...breakSteps(prepared, ladder, order), result];
+  const { price, pieceArea } = quote;
+  if (price?.model === "formula")
+    return pieceArea === null ? [] : [...formulaSteps(prepared, order, price, pieceArea), result];
+  if (ladder === null || price === null) return [];
+  if (price.model === "lots") return [lotsStep(prepared, ladder, price.breaks, cost, toOrder)];
+  return [...breakSteps(prepared, ladder, price.breaks, order), result];
 }
 
-function breakSteps({ quote }: PreparedPieces, ladder: Ladder, order: PieceOrder): Step[] {
-  const breaks = quote.price.model === "formula" ? [] : quote.price.breaks;
+function breakSteps(
+  { quote }: PreparedPieces,
+  ladder: Ladder,
+  breaks: LadderPrice["breaks"],
+  order: PieceOrder,
+): Step[] {
   const reached = breakReached(ladder, breaks, { ...order, quantity: order.pieces, cost: order.goods });
   const price = reached?.price ?? "0";
   const words = namesOf(quote);
@@ -51,8 +57,13 @@ function breakSteps({ quote }: PreparedPieces, ladder: Ladder, order: PieceOrder
   ];
 }
 
-function lotsStep({ quote }: PreparedPieces, ladder: Ladder, cost: PieceCost, toOrder: number): Step {
-  const breaks = quote.price.model === "formula" ? [] : quote.price.breaks;
+function lotsStep(
+  { quote }: PreparedPieces,
+  ladder: Ladder,
+  breaks: LadderPrice["breaks"],
+  cost: PieceCost,
+  toOrder: number,
+): Step {
   const lots = lotsTaken(ladder, breaks, divideUp(toOrder, quote.boardsPerPiece))
     .map((lot) => `${lot.count} of ${lot.quantity} for ${lot.price}`)
     .join(", ");
@@ -65,12 +76,17 @@ function lotsStep({ quote }: PreparedPieces, ladder: Ladder, cost: PieceCost, to
 const AREA_NAMES = { dm2: "dm²", m2: "m²" };
 const SQUARE_CENTIMETRES = { dm2: 100, m2: 10_000 };
 
-function formulaSteps({ quote }: PreparedPieces, order: PieceOrder, price: FormulaPrice): Step[] {
+function formulaSteps(
+  { quote }: PreparedPieces,
+  order: PieceOrder,
+  price: FormulaPrice,
+  pieceArea: string,
+): Step[] {
   const source = from("boards", quote.id);
   const { currency } = quote;
   const words = namesOf(quote);
   const unit = AREA_NAMES[price.areaUnit];
-  const each = exact(quote.pieceArea).div(SQUARE_CENTIMETRES[price.areaUnit]);
+  const each = exact(pieceArea).div(SQUARE_CENTIMETRES[price.areaUnit]);
   const area = each.times(order.pieces);
   const byArea = area.times(price.areaRate).toFixed();
   const boards = (rate: string) => money(exact(rate).times(order.boards).toFixed(), currency);

@@ -1,5 +1,7 @@
+import { dayWords } from "#src/costing/day-words.ts";
 import { divideUp } from "#src/costing/whole.ts";
 import { count, from, money, number, type Sheet, type Step, step } from "#src/costing/working-lines.ts";
+import type { FigureId } from "#src/costing/working-tree.ts";
 import { type BoardsWanted, costPieces, type PieceCost } from "./cost-pieces.ts";
 import { orderPieces, type PieceOrder } from "./order-pieces.ts";
 import type { PreparedPieces } from "./prepare-pieces.ts";
@@ -7,11 +9,17 @@ import { goodsSteps } from "./working-goods.ts";
 
 /**
  * How the cost of a good board by one quote comes about (section 6), singly or panelled. `null` where `costPieces`
- * has no cost. Money is in the quote's currency, the last lines in `currency`, the plan's.
+ * has no cost. Money is in the quote's currency, the last lines in `currency`, the plan's. `panel`: the figure that
+ * shows how many boards a panel holds.
  *
  * @example 113 boards in panels of 12 at 25.00 → 10 panels, 120 boards, 262.00, with charges 301.00, a board 3.01
  */
-export function piecesSheet(prepared: PreparedPieces, wanted: BoardsWanted, currency: string): Sheet | null {
+export function piecesSheet(
+  prepared: PreparedPieces,
+  wanted: BoardsWanted,
+  currency: string,
+  panel: FigureId | null = null,
+): Sheet | null {
   const { quote } = prepared;
   const cost = costPieces(prepared, wanted);
   const order = orderPieces(prepared, wanted.toOrder);
@@ -19,7 +27,7 @@ export function piecesSheet(prepared: PreparedPieces, wanted: BoardsWanted, curr
   return {
     title: `${quote.boardHouse}, ${quote.boardsPerPiece === 1 ? "single boards" : `panels of ${quote.boardsPerPiece}`}`,
     steps: [
-      ...countSteps(prepared, order, wanted.toOrder),
+      ...countSteps(prepared, order, wanted.toOrder, panel),
       ...goodsSteps(prepared, order, cost, wanted.toOrder),
       ...chargeSteps(prepared, cost),
       ...perBoardSteps(prepared, cost, wanted.required, currency),
@@ -37,7 +45,12 @@ export function piecesSheet(prepared: PreparedPieces, wanted: BoardsWanted, curr
   };
 }
 
-function countSteps({ quote }: PreparedPieces, { pieces, boards }: PieceOrder, toOrder: number): Step[] {
+function countSteps(
+  { quote }: PreparedPieces,
+  { pieces, boards }: PieceOrder,
+  toOrder: number,
+  panel: FigureId | null,
+): Step[] {
   const source = from("boards", quote.id);
   const needed = step("−", "Boards to order", count(toOrder, "boards"), "6", { opens: "boards-to-order" });
   const over = step("=", "Boards over", count(boards - toOrder, "boards"), "6");
@@ -45,7 +58,10 @@ function countSteps({ quote }: PreparedPieces, { pieces, boards }: PieceOrder, t
     return [step(null, "Boards ordered", count(boards, "boards"), "3"), needed, over];
   return [
     step(null, "Panels ordered", count(pieces, "panels"), "3"),
-    step("×", "Boards to a panel", count(quote.boardsPerPiece, "boards"), "6", { source }),
+    step("×", "Boards to a panel", count(quote.boardsPerPiece, "boards"), "6", {
+      source,
+      opens: panel,
+    }),
     step("=", "Boards in them", count(boards, "boards"), "6"),
     needed,
     over,
@@ -82,7 +98,7 @@ function perBoardSteps(
     ? [
         step(
           "×",
-          `Rate of ${rate.dated}`,
+          `Rate of ${dayWords(rate.dated)}`,
           number(rate.perForeignUnit, `${currency} for one ${quote.currency}`),
           "1.4",
           {

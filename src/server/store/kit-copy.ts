@@ -1,6 +1,6 @@
 import { eq } from "drizzle-orm";
 import type { Db } from "#db/client.ts";
-import { boardQuoteBreaks, boardQuotes } from "#db/schema/boards.ts";
+import { boardQuoteBreaks, boardQuotes, panelTerms } from "#db/schema/boards.ts";
 import { editions } from "#db/schema/kits.ts";
 import { lineQuantities, lines, partChoices } from "#db/schema/parts.ts";
 import { charges, packingItems, runPlans, tasks } from "#db/schema/runs.ts";
@@ -9,6 +9,7 @@ import { boardQuotesOf } from "./board-quote.ts";
 import { editionsOf } from "./edition.ts";
 import { inChunks } from "./in-chunks.ts";
 import { lineQuantitiesOf, linesOf } from "./line.ts";
+import { panelTermsOf } from "./panel-terms.ts";
 import { partChoicesOf } from "./part.ts";
 import { chargesOf, packingItemsOf, runPlanOf, tasksOf } from "./run-plan.ts";
 
@@ -50,6 +51,10 @@ function copyQuotes(db: Db, { from, to, idFor }: Copying): void {
         .values({ ...rung, workshopId: quote.workshopId, quoteId: copy.id })
         .run();
   }
+  for (const row of panelTermsOf(db, from))
+    db.insert(panelTerms)
+      .values({ ...row, id: idFor(row.id), kitId: to, version: 1 })
+      .run();
 }
 
 function copyRun(db: Db, { from, to, idFor }: Copying): void {

@@ -118,7 +118,7 @@ describe("singly or panelled, at every run size", () => {
     const singly = prepared({ freight: "10" });
     const breaks = [{ quantity: 1, price: "12" }];
     const panelled = prepared({ boardsPerPiece: 10, price: { model: "whole-order", breaks }, freight: "10" });
-    expect(comparePieces(singly, panelled, { ...ALL_GOOD, required: upTo(35) })).toEqual({
+    expect(comparePieces([singly], [panelled], { ...ALL_GOOD, required: upTo(35) })).toEqual({
       ranges: [
         { from: 1, to: 5, cheaper: "singly" },
         { from: 6, to: 6, cheaper: "same" },
@@ -130,7 +130,7 @@ describe("singly or panelled, at every run size", () => {
       first: 7,
       safe: 13,
     });
-    const short = comparePieces(singly, panelled, { ...ALL_GOOD, required: upTo(11) });
+    const short = comparePieces([singly], [panelled], { ...ALL_GOOD, required: upTo(11) });
     expect(short).toMatchObject({ first: 7, safe: null });
   });
 
@@ -139,15 +139,39 @@ describe("singly or panelled, at every run size", () => {
     const breaks = [{ quantity: 1, price: "39.98" }];
     // Ten single boards 20.00 EUR; a panel 39.98 USD is 19.99 EUR.
     const dollars = { boardsPerPiece: 10, price: { model: "whole-order" as const, breaks }, currency: "USD" };
-    expect(comparePieces(prepared({}), prepared(dollars), boards)?.ranges).toEqual([
+    expect(comparePieces([prepared({})], [prepared(dollars)], boards)?.ranges).toEqual([
       { from: 1, to: 1, cheaper: "panelled" },
     ]);
-    expect(comparePieces(prepared({}), prepared({ ...dollars, freight: null }), boards)).toBeNull();
-    expect(comparePieces(prepared({}), prepared({ ...dollars, currency: "GBP" }), boards)).toBeNull();
+    const against = (...panelled: PieceQuote[]) =>
+      comparePieces(
+        [prepared({})],
+        panelled.map((quote) => prepared(quote)),
+        boards,
+      );
+    const open = quoteOf({ ...dollars, freight: null });
+    expect(against(open)).toBeNull();
+    expect(against(quoteOf({ ...dollars, currency: "GBP" }))).toBeNull();
+    // A quote that cannot be reckoned does not hide another that can.
+    expect(against(open, quoteOf(dollars))?.first).toBe(1);
+  });
+
+  it("takes the cheapest quote of each way at every run", () => {
+    // Singly 3 each, or 20 and 1 each: 3, 6 … 27 to 9 boards, 30 at 10, then 31, 32 …. A panel of ten 25, or 29 alone.
+    const breaks = (price: string) => ({ model: "whole-order" as const, breaks: [{ quantity: 1, price }] });
+    const singly = [prepared({ price: breaks("3") }), prepared({ price: breaks("1"), freight: "20" })];
+    const panel = (price: string) => prepared({ boardsPerPiece: 10, price: breaks(price) });
+    const pays = comparePieces(singly, [panel("29"), panel("25")], { ...ALL_GOOD, required: upTo(20) });
+    // Singly to 8 (24), panels at 9 and 10 (25 against 27 and 30); from 11 on two panels are 50, singly 31 … 40.
+    expect(pays?.ranges.map(({ to, cheaper }) => [to, cheaper])).toEqual([
+      [8, "singly"],
+      [10, "panelled"],
+      [20, "singly"],
+    ]);
+    expect(pays).toMatchObject({ first: 9, safe: null });
   });
 
   it("leaves out runs without boards", () => {
-    const pays = comparePieces(prepared({}), prepared(TWELVE), { ...ALL_GOOD, required: [0, 1, 0, 2] });
+    const pays = comparePieces([prepared({})], [prepared(TWELVE)], { ...ALL_GOOD, required: [0, 1, 0, 2] });
     expect(pays?.ranges.map(({ from, to }) => [from, to])).toEqual([
       [2, 2],
       [4, 4],
@@ -169,7 +193,7 @@ describe("singly or panelled, at every run size", () => {
         const price = { model: "whole-order" as const, breaks: [{ quantity: 1, price: panel }] };
         const panelled = prepared({ boardsPerPiece: hold, price, depanelling, engineeringCharge: fixed });
         const boards = { yield: share, confidence: "0.95", required: upTo(60) };
-        const ranges = comparePieces(singly, panelled, boards)?.ranges ?? [];
+        const ranges = comparePieces([singly], [panelled], boards)?.ranges ?? [];
         for (const kits of boards.required) {
           const toOrder = boardsToOrder(kits, share, "0.95") ?? 0;
           const panels = Math.ceil(toOrder / hold);

@@ -4,7 +4,7 @@ import type { Mark } from "#src/components/islands/offers/offer-words.ts";
 import { shortDayWords } from "#src/costing/day-words.ts";
 import { isOldPrice } from "#src/costing/order-cautions.ts";
 import { needWords } from "#src/costing/problem-words.ts";
-import type { BoardsResult, OfferStanding, QuoteResult } from "#src/costing/run-result.ts";
+import type { BoardsResult, QuoteResult, QuoteStanding } from "#src/costing/run-result.ts";
 import type { BoardQuoteView } from "#src/server/board-changes.ts";
 
 /** "2 lots of 50 and one of 100", or "120 boards at €1.900". */
@@ -19,8 +19,9 @@ export function orderWords({ lots, ordered, breakReached, currency }: QuoteResul
     .join(" and ");
 }
 
-const WORDS: Partial<Record<OfferStanding, Mark>> = {
+const WORDS: Partial<Record<QuoteStanding, Mark>> = {
   "no-price": { kind: "bad", word: "No price" },
+  "no-size": { kind: "bad", word: "No size" },
   "impossible-ladder": { kind: "bad", word: "Lots repeat" },
   "amount-too-large": { kind: "bad", word: "Too large" },
 };

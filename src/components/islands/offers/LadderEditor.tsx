@@ -7,7 +7,7 @@ import { MoneyField } from "#src/components/islands/parts/MoneyField.tsx";
 import { QuietButton } from "#src/components/islands/parts/QuietButton.tsx";
 import { TextField } from "#src/components/islands/parts/TextField.tsx";
 import { ladderProblems } from "#src/costing/ladder-problems.ts";
-import { BREAKS_PER_OFFER_MOST, type PriceModel } from "#src/shapes/limits.ts";
+import { type BoardPriceModel, BREAKS_PER_OFFER_MOST, type PriceModel } from "#src/shapes/limits.ts";
 
 /** A rung while it is typed: the quantity as text, so that nothing typed is lost. */
 export interface RungDraft {
@@ -20,7 +20,7 @@ export interface RungDraft {
 export interface LadderFields {
   breaks: RungDraft[];
   currency: string;
-  priceModel: PriceModel;
+  priceModel: PriceModel | BoardPriceModel;
 }
 
 export function rungDrafts(breaks: readonly { quantity: number; price: string }[]): RungDraft[] {
@@ -41,7 +41,7 @@ export function rungsOf(drafts: readonly RungDraft[]): { quantity: number; price
 function dearerAt({ breaks, priceModel }: LadderFields): ReadonlySet<number> {
   const rungs = rungsOf(breaks);
   const whole = rungs.every(({ quantity, price }) => Number.isInteger(quantity) && /^\d/.test(price));
-  if (!whole) return new Set();
+  if (!whole || priceModel === "formula") return new Set();
   const found = ladderProblems({ breaks: rungs, priceModel, minimumOrder: 1, orderMultiple: 1 });
   return new Set(found.filter(({ code }) => code === "price-rises").map(({ at }) => at));
 }
@@ -58,7 +58,14 @@ function useRungFocus() {
 }
 
 /** The breaks of a ladder, one row each. Enter in the last price adds a row; every row can be removed. */
-export function LadderEditor<Fields extends LadderFields>({ form }: { form: Form<Fields> }) {
+export function LadderEditor<Fields extends LadderFields>({
+  form,
+  things,
+}: {
+  form: Form<Fields>;
+  /** What the quantities count, where that is not plain: "panels". */
+  things?: string;
+}) {
   const { breaks, currency, priceModel } = form.fields;
   const { list, focus } = useRungFocus();
   const dearer = dearerAt(form.fields);
@@ -84,7 +91,7 @@ export function LadderEditor<Fields extends LadderFields>({ form }: { form: Form
     <fieldset>
       <legend className="type-table mb-2 font-semibold">{lots ? "Lots" : "Price breaks"}</legend>
       <div aria-hidden="true" className="type-label mb-1 flex gap-4 text-ink-2">
-        <span className="w-52 max-tablet:w-full">{lots ? "A lot of" : "From"}</span>
+        <span className="w-52 max-tablet:w-full">{[lots ? "A lot of" : "From", things].join(" ")}</span>
         <span className="max-tablet:hidden">{lots ? "costs" : "each costs"}</span>
       </div>
       <ul ref={list} className="flex flex-col gap-3">

@@ -18,6 +18,7 @@ const WAYS: Record<NeedCode, string> = {
   "no-board-quote": "Add a quote",
   "no-board-freight": "Set the freight",
   "no-board-yield": "Change the yield",
+  "no-board-size": "Write its size",
   "no-packing-cost": "Set the cost",
   "no-hourly-rate": "Set the rate",
   "no-replacement-cost": "Set the cost",

@@ -1,0 +1,81 @@
+CREATE TABLE `panel_terms` (
+	`id` text PRIMARY KEY NOT NULL,
+	`workshop_id` text NOT NULL,
+	`kit_id` text NOT NULL,
+	`board_house` text NOT NULL,
+	`largest_width` text NOT NULL,
+	`largest_height` text NOT NULL,
+	`least_width` text,
+	`least_height` text,
+	`separation` text NOT NULL,
+	`gap` text NOT NULL,
+	`rail_sides` text NOT NULL,
+	`rail_width` text NOT NULL,
+	`version` integer DEFAULT 1 NOT NULL,
+	FOREIGN KEY (`workshop_id`) REFERENCES `workshops`(`id`) ON UPDATE no action ON DELETE cascade,
+	FOREIGN KEY (`kit_id`) REFERENCES `kits`(`id`) ON UPDATE no action ON DELETE cascade,
+	CONSTRAINT "separation_rule" CHECK("panel_terms"."separation" is null or ("panel_terms"."separation" in ('v-score', 'routed'))),
+	CONSTRAINT "rail_sides_rule" CHECK("panel_terms"."rail_sides" is null or ("panel_terms"."rail_sides" in ('none', 'long', 'short', 'all'))),
+	CONSTRAINT "largest_width_rule" CHECK("panel_terms"."largest_width" is null or (typeof("panel_terms"."largest_width") = 'text' and "panel_terms"."largest_width" glob '[0-9]*' and "panel_terms"."largest_width" not glob '*[^0-9.]*' and "panel_terms"."largest_width" not glob '*.*.*' and "panel_terms"."largest_width" not glob '*.')),
+	CONSTRAINT "largest_height_rule" CHECK("panel_terms"."largest_height" is null or (typeof("panel_terms"."largest_height") = 'text' and "panel_terms"."largest_height" glob '[0-9]*' and "panel_terms"."largest_height" not glob '*[^0-9.]*' and "panel_terms"."largest_height" not glob '*.*.*' and "panel_terms"."largest_height" not glob '*.')),
+	CONSTRAINT "least_width_rule" CHECK("panel_terms"."least_width" is null or (typeof("panel_terms"."least_width") = 'text' and "panel_terms"."least_width" glob '[0-9]*' and "panel_terms"."least_width" not glob '*[^0-9.]*' and "panel_terms"."least_width" not glob '*.*.*' and "panel_terms"."least_width" not glob '*.')),
+	CONSTRAINT "least_height_rule" CHECK("panel_terms"."least_height" is null or (typeof("panel_terms"."least_height") = 'text' and "panel_terms"."least_height" glob '[0-9]*' and "panel_terms"."least_height" not glob '*[^0-9.]*' and "panel_terms"."least_height" not glob '*.*.*' and "panel_terms"."least_height" not glob '*.')),
+	CONSTRAINT "gap_rule" CHECK("panel_terms"."gap" is null or (typeof("panel_terms"."gap") = 'text' and "panel_terms"."gap" glob '[0-9]*' and "panel_terms"."gap" not glob '*[^0-9.]*' and "panel_terms"."gap" not glob '*.*.*' and "panel_terms"."gap" not glob '*.')),
+	CONSTRAINT "rail_width_rule" CHECK("panel_terms"."rail_width" is null or (typeof("panel_terms"."rail_width") = 'text' and "panel_terms"."rail_width" glob '[0-9]*' and "panel_terms"."rail_width" not glob '*[^0-9.]*' and "panel_terms"."rail_width" not glob '*.*.*' and "panel_terms"."rail_width" not glob '*.'))
+);
+--> statement-breakpoint
+CREATE UNIQUE INDEX `panel_terms_house` ON `panel_terms` (`kit_id`,`board_house`);--> statement-breakpoint
+PRAGMA foreign_keys=OFF;--> statement-breakpoint
+CREATE TABLE `__new_board_quotes` (
+	`id` text PRIMARY KEY NOT NULL,
+	`workshop_id` text NOT NULL,
+	`kit_id` text NOT NULL,
+	`board_house` text NOT NULL,
+	`currency` text NOT NULL,
+	`width` text,
+	`height` text,
+	`boards_per_panel` integer,
+	`panel_width` text,
+	`panel_height` text,
+	`depanelling` text DEFAULT '0' NOT NULL,
+	`layers` integer,
+	`finish` text NOT NULL,
+	`colour` text NOT NULL,
+	`price_model` text NOT NULL,
+	`set_up` text,
+	`area_rate` text,
+	`area_unit` text,
+	`per_board` text,
+	`engineering_charge` text NOT NULL,
+	`stencil_charge` text NOT NULL,
+	`freight` text,
+	`lead_time_days` integer,
+	`priced_on` text,
+	`valid_until` text,
+	`note` text NOT NULL,
+	`version` integer DEFAULT 1 NOT NULL,
+	FOREIGN KEY (`workshop_id`) REFERENCES `workshops`(`id`) ON UPDATE no action ON DELETE cascade,
+	FOREIGN KEY (`kit_id`) REFERENCES `kits`(`id`) ON UPDATE no action ON DELETE cascade,
+	CONSTRAINT "price_model_rule" CHECK("__new_board_quotes"."price_model" is null or ("__new_board_quotes"."price_model" in ('lots', 'whole-order', 'formula'))),
+	CONSTRAINT "area_unit_rule" CHECK("__new_board_quotes"."area_unit" is null or ("__new_board_quotes"."area_unit" in ('dm2', 'm2'))),
+	CONSTRAINT "width_rule" CHECK("__new_board_quotes"."width" is null or (typeof("__new_board_quotes"."width") = 'text' and "__new_board_quotes"."width" glob '[0-9]*' and "__new_board_quotes"."width" not glob '*[^0-9.]*' and "__new_board_quotes"."width" not glob '*.*.*' and "__new_board_quotes"."width" not glob '*.')),
+	CONSTRAINT "height_rule" CHECK("__new_board_quotes"."height" is null or (typeof("__new_board_quotes"."height") = 'text' and "__new_board_quotes"."height" glob '[0-9]*' and "__new_board_quotes"."height" not glob '*[^0-9.]*' and "__new_board_quotes"."height" not glob '*.*.*' and "__new_board_quotes"."height" not glob '*.')),
+	CONSTRAINT "panel_width_rule" CHECK("__new_board_quotes"."panel_width" is null or (typeof("__new_board_quotes"."panel_width") = 'text' and "__new_board_quotes"."panel_width" glob '[0-9]*' and "__new_board_quotes"."panel_width" not glob '*[^0-9.]*' and "__new_board_quotes"."panel_width" not glob '*.*.*' and "__new_board_quotes"."panel_width" not glob '*.')),
+	CONSTRAINT "panel_height_rule" CHECK("__new_board_quotes"."panel_height" is null or (typeof("__new_board_quotes"."panel_height") = 'text' and "__new_board_quotes"."panel_height" glob '[0-9]*' and "__new_board_quotes"."panel_height" not glob '*[^0-9.]*' and "__new_board_quotes"."panel_height" not glob '*.*.*' and "__new_board_quotes"."panel_height" not glob '*.')),
+	CONSTRAINT "depanelling_rule" CHECK("__new_board_quotes"."depanelling" is null or (typeof("__new_board_quotes"."depanelling") = 'text' and "__new_board_quotes"."depanelling" glob '[0-9]*' and "__new_board_quotes"."depanelling" not glob '*[^0-9.]*' and "__new_board_quotes"."depanelling" not glob '*.*.*' and "__new_board_quotes"."depanelling" not glob '*.')),
+	CONSTRAINT "set_up_rule" CHECK("__new_board_quotes"."set_up" is null or (typeof("__new_board_quotes"."set_up") = 'text' and "__new_board_quotes"."set_up" glob '[0-9]*' and "__new_board_quotes"."set_up" not glob '*[^0-9.]*' and "__new_board_quotes"."set_up" not glob '*.*.*' and "__new_board_quotes"."set_up" not glob '*.')),
+	CONSTRAINT "area_rate_rule" CHECK("__new_board_quotes"."area_rate" is null or (typeof("__new_board_quotes"."area_rate") = 'text' and "__new_board_quotes"."area_rate" glob '[0-9]*' and "__new_board_quotes"."area_rate" not glob '*[^0-9.]*' and "__new_board_quotes"."area_rate" not glob '*.*.*' and "__new_board_quotes"."area_rate" not glob '*.')),
+	CONSTRAINT "per_board_rule" CHECK("__new_board_quotes"."per_board" is null or (typeof("__new_board_quotes"."per_board") = 'text' and "__new_board_quotes"."per_board" glob '[0-9]*' and "__new_board_quotes"."per_board" not glob '*[^0-9.]*' and "__new_board_quotes"."per_board" not glob '*.*.*' and "__new_board_quotes"."per_board" not glob '*.')),
+	CONSTRAINT "boards_per_panel_rule" CHECK("__new_board_quotes"."boards_per_panel" is null or (typeof("__new_board_quotes"."boards_per_panel") = 'integer' and "__new_board_quotes"."boards_per_panel" >= 2)),
+	CONSTRAINT "engineering_charge_rule" CHECK("__new_board_quotes"."engineering_charge" is null or (typeof("__new_board_quotes"."engineering_charge") = 'text' and "__new_board_quotes"."engineering_charge" glob '[0-9]*' and "__new_board_quotes"."engineering_charge" not glob '*[^0-9.]*' and "__new_board_quotes"."engineering_charge" not glob '*.*.*' and "__new_board_quotes"."engineering_charge" not glob '*.')),
+	CONSTRAINT "stencil_charge_rule" CHECK("__new_board_quotes"."stencil_charge" is null or (typeof("__new_board_quotes"."stencil_charge") = 'text' and "__new_board_quotes"."stencil_charge" glob '[0-9]*' and "__new_board_quotes"."stencil_charge" not glob '*[^0-9.]*' and "__new_board_quotes"."stencil_charge" not glob '*.*.*' and "__new_board_quotes"."stencil_charge" not glob '*.')),
+	CONSTRAINT "freight_rule" CHECK("__new_board_quotes"."freight" is null or (typeof("__new_board_quotes"."freight") = 'text' and "__new_board_quotes"."freight" glob '[0-9]*' and "__new_board_quotes"."freight" not glob '*[^0-9.]*' and "__new_board_quotes"."freight" not glob '*.*.*' and "__new_board_quotes"."freight" not glob '*.')),
+	CONSTRAINT "layers_rule" CHECK("__new_board_quotes"."layers" is null or (typeof("__new_board_quotes"."layers") = 'integer' and "__new_board_quotes"."layers" >= 1)),
+	CONSTRAINT "lead_time_days_rule" CHECK("__new_board_quotes"."lead_time_days" is null or (typeof("__new_board_quotes"."lead_time_days") = 'integer' and "__new_board_quotes"."lead_time_days" >= 0))
+);
+--> statement-breakpoint
+INSERT INTO `__new_board_quotes`("id", "workshop_id", "kit_id", "board_house", "currency", "width", "height", "layers", "finish", "colour", "price_model", "engineering_charge", "stencil_charge", "freight", "lead_time_days", "priced_on", "valid_until", "note", "version") SELECT "id", "workshop_id", "kit_id", "board_house", "currency", "width", "height", "layers", "finish", "colour", "price_model", "engineering_charge", "stencil_charge", "freight", "lead_time_days", "priced_on", "valid_until", "note", "version" FROM `board_quotes`;--> statement-breakpoint
+DROP TABLE `board_quotes`;--> statement-breakpoint
+ALTER TABLE `__new_board_quotes` RENAME TO `board_quotes`;--> statement-breakpoint
+PRAGMA foreign_keys=ON;--> statement-breakpoint
+CREATE INDEX `board_quotes_kit` ON `board_quotes` (`kit_id`);
