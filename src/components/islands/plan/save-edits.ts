@@ -18,6 +18,7 @@ import {
   withVersion,
 } from "./plan-rows.ts";
 import { type Clash, countUnsaved, saving } from "./saving.ts";
+import { sweepAhead } from "./sweep-of.ts";
 
 /** An edit is sent when nothing was typed for so long; holding a key makes one request, not twenty. */
 const QUIET_MS = 400;
@@ -81,7 +82,9 @@ export function editRow(address: KitAddress, row: PlanRow, fields: Fields): void
   if (!held) return;
   void queryClient.cancelQueries({ queryKey: kitKeys.plan(address.kit) });
   const base = fieldsNow(held, row, Object.keys(fields));
-  holdPlan(address, (now) => withFields(now, row, fields));
+  const edited = withFields(held, row, fields);
+  sweepAhead(edited.plan);
+  holdPlan(address, () => edited);
   const line = lineOf(address, holderOf(row));
   line.waiting = withEdit(line.waiting, { row, fields, base });
   countWaiting();

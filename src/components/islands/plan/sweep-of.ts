@@ -5,16 +5,18 @@ import type { Plan } from "#src/shapes/plan.ts";
 import type { SweepDone, SweepOrder } from "./costing.worker.ts";
 import { moduleStore } from "./module-store.ts";
 
-/** A frame, less what drawing takes; a sweep that took longer goes to the worker the next time. */
-const FRAME_MS = 10;
+/** A frame; where a sweep took longer, the worker does the next. */
+const FRAME_MS = 16;
 /** Before anything was timed: parts times run sizes that surely fit into a frame. */
 const SURELY_QUICK = 20_000;
+/** Waiting that is shorter than this is not shown. */
+const NOTICED_MS = 150;
 
 export interface SweepState {
   /** The last sweep reckoned, and the plan it belongs to; null before the first. */
   plan: Plan | null;
   sweep: SweepResult | null;
-  /** The plan in view has no sweep yet. */
+  /** The plan in view has no sweep yet, and that takes a while. */
   workingOut: boolean;
 }
 
@@ -28,6 +30,8 @@ let worker: Worker | undefined;
 let ordered = 0;
 let orderedPlan: Plan | null = null;
 let busy = false;
+/** Runs while an answer is waited for. */
+let noticed: ReturnType<typeof setTimeout> | undefined;
 /** The last sweep of all, wherever it was reckoned. */
 let last: { plan: Plan; sweep: SweepResult } | null = null;
 let tookMs: number | null = null;
@@ -71,6 +75,8 @@ function startWorker(): Worker {
     busy = false;
     if (data.number !== ordered || !orderedPlan) return orderedPlan ? send(orderedPlan) : undefined;
     last = { plan: orderedPlan, sweep: forRun(data.sweep, orderedPlan) };
+    clearTimeout(noticed);
+    noticed = undefined;
     sweepState.put({ ...last, workingOut: false });
   });
   return started;
@@ -84,13 +90,28 @@ function send(plan: Plan): void {
   worker.postMessage(order);
 }
 
-/** Has the worker reckon the sweep of a plan; the last figures stay meanwhile. */
+/** Shows the last figures while new ones are waited for, and says so once that takes long enough to be noticed. */
+function wait(): void {
+  const shown = { plan: last?.plan ?? null, sweep: last?.sweep ?? null };
+  if (sweepState.now().sweep !== shown.sweep) sweepState.put({ ...shown, workingOut: false });
+  noticed ??= setTimeout(() => sweepState.change((now) => ({ ...now, workingOut: true })), NOTICED_MS);
+}
+
+/** Has the worker reckon the sweep of a plan; the last figures stay meanwhile. Asked again it changes nothing. */
 export function sweepAway(plan: Plan): void {
-  const { workingOut } = sweepState.now();
-  const same = workingOut && orderedPlan !== null && sameButRun(orderedPlan, plan);
+  if (orderedPlan === plan) return;
+  const same = noticed !== undefined && orderedPlan !== null && sameButRun(orderedPlan, plan);
   orderedPlan = plan;
   if (same) return;
   ordered += 1;
-  sweepState.put({ plan: last?.plan ?? null, sweep: last?.sweep ?? null, workingOut: true });
+  wait();
   if (!busy) send(plan);
+}
+
+/**
+ * Has the worker begin on a plan that was edited, before the page draws anything of it: what the page reckons and
+ * draws meanwhile is no loss. Only where a sweep has been handed over before.
+ */
+export function sweepAhead(plan: Plan): void {
+  if (worker && sweepAtOnce(plan) === null) sweepAway(plan);
 }

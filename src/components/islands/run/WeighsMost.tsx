@@ -1,4 +1,4 @@
-import { useMemo } from "react";
+import { useDeferredValue, useMemo } from "react";
 import { moneyText, shareText } from "#src/components/amount-text.ts";
 import { MarginNote } from "#src/components/islands/parts/Pair.tsx";
 import { runOf } from "#src/components/islands/plan/run-of.ts";
@@ -17,9 +17,11 @@ const NAMES: Record<HeadId, [name: string, verb: "is" | "are"]> = {
 
 /** The head that makes up most of a kit; and what a second run, without once-only costs, would cost. */
 export function WeighsMost({ plan, run }: { plan: Plan; run: RunResult }) {
+  // A reckoning of its own: the figures and charts of an edit do not wait for it.
+  const [latePlan, kits] = [useDeferredValue(plan), useDeferredValue(run.kits)];
   const again = useMemo(
-    () => (plan.charges.length > 0 ? runOf({ ...plan, charges: [] }, run.kits) : null),
-    [plan, run.kits],
+    () => (latePlan.charges.length > 0 ? runOf({ ...latePlan, charges: [] }, kits) : null),
+    [latePlan, kits],
   );
   const largest = run.heads
     .flatMap(({ id, share }) => (share.known ? [{ id, share: share.value }] : []))
@@ -36,7 +38,7 @@ export function WeighsMost({ plan, run }: { plan: Plan; run: RunResult }) {
         {again?.perKit.used.known && (
           <>
             {" "}
-            A second run of {run.kits} would not carry the once-only costs:{" "}
+            A second run of {kits} would not carry the once-only costs:{" "}
             {moneyText(again.perKit.used.value, run.currency)} a kit.
           </>
         )}
