@@ -1,4 +1,4 @@
-import { exact } from "./decimal.ts";
+import { convertedEach } from "./converted-each.ts";
 import {
   cheapestOrder,
   costOf,
@@ -130,10 +130,10 @@ export function rungOrders(terms: LadderTerms, quantity: number): RungOrder[] {
 }
 
 /**
- * Cost of an order per kit of the run, in reporting units, exact.
+ * Cost of an order per kit of the run, in reporting units, to the nearest grain.
  *
- * @example orderPerKit("75.20", "1", 120) → "0.62666…" to 40 digits
+ * @example orderPerKit("75.20", "1", 120) → "0.62666…"
  */
 export function orderPerKit(costs: string, perForeignUnit: string, kits: number): string {
-  return exact(costs).times(perForeignUnit).div(kits).toFixed();
+  return convertedEach(costs, perForeignUnit, kits);
 }

@@ -1,6 +1,7 @@
 import { countText, moneyText, unitPriceText } from "#src/components/amount-text.ts";
 import { type Column, Table } from "#src/components/islands/parts/Table.tsx";
-import { exact } from "#src/costing/decimal.ts";
+import { convertedEach } from "#src/costing/converted-each.ts";
+import { roundedText } from "#src/costing/rounded-text.ts";
 import type { PartOrder } from "#src/costing/run-result.ts";
 
 interface LotTableProps {
@@ -20,7 +21,8 @@ export function LotTable({ offer: { breaks, currency }, order }: LotTableProps) 
       key: "each",
       head: "Each",
       number: true,
-      cell: ({ price, quantity }) => unitPriceText(exact(price).div(quantity).toFixed(3), currency),
+      cell: ({ price, quantity }) =>
+        unitPriceText(roundedText(convertedEach(price, "1", quantity), 3), currency),
     },
     {
       key: "taken",

@@ -5,14 +5,13 @@ import { Figure } from "#src/components/islands/parts/Figure.tsx";
 import { QuietButton } from "#src/components/islands/parts/QuietButton.tsx";
 import { RadioDot } from "#src/components/islands/parts/RadioGroup.tsx";
 import { CELL, NUMBER, rowLook } from "#src/components/table-look.ts";
-import { exact } from "#src/costing/decimal.ts";
+import { convertedEach } from "#src/costing/converted-each.ts";
+import { WIDE } from "./ChoiceTable.tsx";
 import { OfferBreaks } from "./OfferBreaks.tsx";
 import type { OfferTableProps, ReckonedOffer } from "./OfferTable.tsx";
 import { offerMark, seenText } from "./offer-words.ts";
 
 type RowProps = OfferTableProps & { row: ReckonedOffer };
-
-const WIDE = "max-tablet:hidden";
 
 /** One offer: who, its ladder, what it comes to, and what the reckoning makes of it. */
 export function OfferRow({ row, ...props }: RowProps) {
@@ -73,7 +72,13 @@ function State({ row: { offer, considered }, name, today, canChange, onEdit }: R
 }
 
 /** In the offer's currency, and below it in the run's where that is another; opens its working. */
-function Pays({ row: { offer, considered }, name, reporting, rateOf, workingOf }: RowProps & { name: string }) {
+function Pays({
+  row: { offer, considered },
+  name,
+  reporting,
+  rateOf,
+  workingOf,
+}: RowProps & { name: string }) {
   const { extended } = considered;
   if (extended === null) return null;
   const rate = offer.currency === reporting ? null : rateOf(offer.currency);
@@ -86,7 +91,7 @@ function Pays({ row: { offer, considered }, name, reporting, rateOf, workingOf }
       />
       {rate !== null && (
         <span className="block text-ink-2 type-label">
-          {moneyText(exact(extended).times(rate).toFixed(), reporting)}
+          {moneyText(convertedEach(extended, rate, 1), reporting)}
         </span>
       )}
     </>
