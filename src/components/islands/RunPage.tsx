@@ -6,14 +6,16 @@ import { CallFailed } from "./call.ts";
 import type { KitAddress } from "./kit-address.ts";
 import { Button } from "./parts/Button.tsx";
 import { ErrorBox } from "./parts/ErrorBox.tsx";
+import { Later } from "./parts/Later.tsx";
 import { Loading } from "./parts/Loading.tsx";
+import { laterPart } from "./parts/later-part.ts";
 import { Pair } from "./parts/Pair.tsx";
 import { useOpens } from "./plan/open-working.ts";
 import { runOf } from "./plan/run-of.ts";
 import { usePlan } from "./plan/use-plan.ts";
 import { useSweep } from "./plan/use-sweep.ts";
 import type { AnswerFigures } from "./run/answer-words.ts";
-import { CannotBeKnown } from "./run/CannotBeKnown.tsx";
+import type { CannotBeKnownProps } from "./run/CannotBeKnown.tsx";
 import { drawnColumns } from "./run/cost-points.ts";
 import { take } from "./run/inputs/entry.ts";
 import { Inputs } from "./run/inputs/Inputs.tsx";
@@ -22,6 +24,10 @@ import { FirstAnswer, RunAnswer } from "./run/RunAnswer.tsx";
 
 /** The charts and their library come when the figures do. */
 const RunEvidence = lazy(async () => ({ default: (await import("./run/RunEvidence.tsx")).RunEvidence }));
+
+const CannotBeKnown = laterPart<CannotBeKnownProps>(
+  async () => (await import("./run/CannotBeKnown.tsx")).CannotBeKnown,
+);
 
 export interface RunPageProps {
   workshop: string;
@@ -70,12 +76,16 @@ function Reckoned({ address, held, may }: ReckonedProps) {
       <div className={PAIRS}>
         {!run.perKit.used.known && (
           <Pair>
-            <CannotBeKnown
-              address={address}
-              plan={plan}
-              title={`${run.kits} cannot be worked out yet`}
-              needs={run.perKit.used.needs}
-              may={may}
+            <Later
+              part={CannotBeKnown}
+              give={{
+                address,
+                plan,
+                title: `${run.kits} cannot be worked out yet`,
+                needs: run.perKit.used.needs,
+                may,
+              }}
+              what="What is missing"
             />
           </Pair>
         )}

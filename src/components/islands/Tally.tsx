@@ -4,16 +4,20 @@ import type { Tally as TallyFigures } from "#src/costing/tally.ts";
 import { tallyChanges } from "#src/costing/tally-change.ts";
 import type { KitPlan } from "#src/server/kit-plan.ts";
 import type { KitAddress } from "./kit-address.ts";
+import { Later } from "./parts/Later.tsx";
+import { laterPart } from "./parts/later-part.ts";
 import { type TallyNote, TallyStrip } from "./parts/TallyStrip.tsx";
+import type { ClashesProps } from "./plan/Clashes.tsx";
 import { keepEdit, type LastEdit, lastEdit, undoEdit } from "./plan/edit-log.ts";
 import { editField } from "./plan/edit-plan.ts";
 import { changeWords } from "./plan/field-words.ts";
 import { KeyHelp } from "./plan/KeyHelp.tsx";
+import { LostConnection } from "./plan/LostConnection.tsx";
 import { useStore } from "./plan/module-store.ts";
 import { useOpens } from "./plan/open-working.ts";
 import { tallyAt } from "./plan/run-of.ts";
-import { Clashes, LostConnection } from "./plan/SavingNotes.tsx";
 import { takeUpEdits, watchPage } from "./plan/save-edits.ts";
+import { NOTHING_SAVED, saving } from "./plan/saving.ts";
 import { spokenChange, tallyCells } from "./plan/tally-cells.ts";
 import { usePlan } from "./plan/use-plan.ts";
 import { useQuiet } from "./plan/use-quiet.ts";
@@ -31,6 +35,8 @@ export interface TallyProps {
 }
 
 const QUIET_MS = 600;
+
+const Clashes = laterPart<ClashesProps>(async () => (await import("./plan/Clashes.tsx")).Clashes);
 
 function setRun(address: KitAddress, kits: number): void {
   const name = (from: unknown) => changeWords("Run", "kits", from, kits, "");
@@ -63,6 +69,7 @@ export function Tally({ workshop, kit, first, may, singleKeys = true }: TallyPro
   const address = { workshop, kit };
   const { held } = usePlan(address);
   const { sweep } = useSweep(held?.plan);
+  const hasClashes = useStore(saving, NOTHING_SAVED).clashes.length > 0;
   const isThere = held !== undefined;
   useEffect(() => watchPage({ workshop, kit }), [workshop, kit]);
   useEffect(() => {
@@ -78,7 +85,9 @@ export function Tally({ workshop, kit, first, may, singleKeys = true }: TallyPro
         fixed={!may.changeRun}
         sweetSpots={sweep?.sweetSpots.map(({ kits }) => kits) ?? []}
       />
-      {held && <Clashes address={address} plan={held.plan} />}
+      {held && hasClashes && (
+        <Later part={Clashes} give={{ address, plan: held.plan }} what="Two values" rows={2} />
+      )}
       <WorkingHost address={address} plan={held?.plan} />
       <KeyHelp on={singleKeys} />
     </>

@@ -2,10 +2,9 @@ import { useState } from "react";
 import { BusyIcon } from "#src/components/islands/parts/Icons.tsx";
 import { QuietButton } from "#src/components/islands/parts/QuietButton.tsx";
 import { showToast } from "#src/components/islands/parts/toasts.ts";
-import { writeList } from "#src/partslist/write-list.ts";
 
 const KINDS = ["png", "svg", "csv"] as const;
-type Kind = (typeof KINDS)[number];
+export type ChartKind = (typeof KINDS)[number];
 
 export interface SaveChartProps {
   /** "What one kit costs, by run size". */
@@ -17,27 +16,16 @@ export interface SaveChartProps {
   rows: () => readonly (readonly string[])[];
 }
 
-/** Fetched when somebody comes to the buttons. */
-const files = () => import("./chart-files.ts");
-
-async function content(kind: Kind, { name, drawn, rows }: SaveChartProps): Promise<Blob> {
-  if (kind === "csv") return new Blob([writeList(rows(), { byteOrderMark: true })], { type: "text/csv" });
-  const drawing = drawn();
-  if (!drawing) throw new Error("No chart is drawn.");
-  const { chartSvg, svgPng } = await files();
-  const svg = await chartSvg(drawing, name);
-  return kind === "png" ? svgPng(svg) : new Blob([svg], { type: "image/svg+xml" });
-}
+const saving = () => import("./save-chart.ts");
 
 /** A drawing as PNG, SVG and CSV. */
 export function SaveChart(props: SaveChartProps) {
-  const { name, file } = props;
+  const { name } = props;
   const [busy, setBusy] = useState(false);
-  async function save(kind: Kind) {
+  async function save(kind: ChartKind) {
     setBusy(true);
     try {
-      const blob = await content(kind, props);
-      (await files()).giveFile(blob, `${file}.${kind}`);
+      await (await saving()).saveChart(kind, props);
     } catch {
       showToast({ kind: "fault", text: `The ${kind.toUpperCase()} could not be made. Try another kind.` });
     } finally {
@@ -51,7 +39,7 @@ export function SaveChart(props: SaveChartProps) {
         <QuietButton
           key={kind}
           onClick={() => void save(kind)}
-          onPointerEnter={() => void files().catch(() => {})}
+          onPointerEnter={() => void saving().catch(() => {})}
           aria-label={`Save as ${kind.toUpperCase()}: ${name}`}
         >
           {kind.toUpperCase()}

@@ -5,7 +5,7 @@ import { ChoiceField } from "#src/components/islands/parts/ChoiceField.tsx";
 import { MeasureField } from "#src/components/islands/parts/MeasureField.tsx";
 import { QuietButton } from "#src/components/islands/parts/QuietButton.tsx";
 import { TextField } from "#src/components/islands/parts/TextField.tsx";
-import { CURRENCY_CHOICES } from "#src/components/islands/supply/SupplierForm.tsx";
+import { CURRENCY_CHOICES } from "#src/components/islands/supply/currency-choices.ts";
 import type { OfferView } from "#src/server/offer-changes.ts";
 import type { SupplierView } from "#src/server/supplier-changes.ts";
 import type { PriceModel } from "#src/shapes/limits.ts";

@@ -36,18 +36,15 @@ function pinSteps(plan: Plan, lines: readonly Line[], supplier: string): Step[] 
   });
 }
 
-/** What can be done to all chosen lines at once. */
-export function ChosenBar({
-  lines,
-  plan,
-  deeds,
-  onDone,
-}: {
+export interface ChosenBarProps {
   lines: readonly Line[];
   plan: Plan | null;
   deeds: PartsDeeds;
   onDone: () => void;
-}) {
+}
+
+/** What can be done to all chosen lines at once. */
+export function ChosenBar({ lines, plan, deeds, onDone }: ChosenBarProps) {
   const [drawer, setDrawer] = useState("");
   const count = lines.length === 1 ? "1 line" : `${lines.length} lines`;
   const suppliers = suppliersOf(plan, lines);

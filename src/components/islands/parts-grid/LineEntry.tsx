@@ -14,16 +14,14 @@ interface EntryField {
   className: string;
 }
 
-/** A new line as a row of fields, ready to type; on a phone below each other. */
-export function LineEntry({
-  address,
-  list,
-  onAdded,
-}: {
+export interface LineEntryProps {
   address: KitAddress;
   list: PricedPartsList;
   onAdded?: () => void;
-}) {
+}
+
+/** A new line as a row of fields, ready to type; on a phone below each other. */
+export function LineEntry({ address, list, onAdded }: LineEntryProps) {
   const [cells, setCells] = useState<DraftCells>({});
   const [wrong, setWrong] = useState<string>();
   const form = useRef<HTMLFormElement>(null);

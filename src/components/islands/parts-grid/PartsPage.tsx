@@ -1,4 +1,4 @@
-import { useEffect, useMemo, useRef } from "react";
+import { lazy, Suspense, useEffect, useMemo, useRef } from "react";
 import { moneyText } from "#src/components/amount-text.ts";
 import { buttonLook } from "#src/components/button-look.ts";
 import { counted } from "#src/components/count-words.ts";
@@ -14,7 +14,6 @@ import type { RunResult } from "#src/costing/run-result.ts";
 import { compareLists } from "#src/partslist/since-revision.ts";
 import type { PartsList } from "#src/server/present.ts";
 import type { Plan } from "#src/shapes/plan.ts";
-import { EmptyParts } from "./EmptyParts.tsx";
 import { fullestEdition, type LineRow, lineRows, partsTotal } from "./grid-rows.ts";
 import { takeUpList, watchList } from "./list-editor.ts";
 import { PartsWorkbench } from "./PartsWorkbench.tsx";
@@ -49,6 +48,9 @@ function PricedParts(props: PartsProps) {
   return <Parts {...props} bought={bought ?? null} />;
 }
 
+/** A kit that has parts needs none of it. */
+const EmptyParts = lazy(async () => ({ default: (await import("./EmptyParts.tsx")).EmptyParts }));
+
 const NO_CHANGE: ReadonlySet<string> = new Set();
 /** The page's own button asks for a line; the grid, which is fetched later, hears it. */
 const addLine = moduleStore(0);
@@ -82,13 +84,15 @@ function Parts(props: PartsProps & { bought: Bought | null }) {
         <Answer list={list} rows={rows} lines={lines} bought={bought} canEdit={canEdit} />
       </Question>
       {lines === 0 ? (
-        <EmptyParts
-          address={address}
-          list={list?.money ? list : null}
-          kits={bought?.plan.run.kits ?? first.kits}
-          canEdit={canEdit}
-          example={props.example}
-        />
+        <Suspense fallback={<Loading what="A first line" rows={4} />}>
+          <EmptyParts
+            address={address}
+            list={list?.money ? list : null}
+            kits={bought?.plan.run.kits ?? first.kits}
+            canEdit={canEdit}
+            example={props.example}
+          />
+        </Suspense>
       ) : list ? (
         <PartsWorkbench
           {...props}

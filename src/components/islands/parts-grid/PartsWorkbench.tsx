@@ -1,19 +1,21 @@
 import type { GridApi } from "ag-grid-community";
 import { type ComponentType, useDeferredValue, useEffect, useMemo, useRef, useState } from "react";
+import { Later } from "#src/components/islands/parts/Later.tsx";
 import { Loading } from "#src/components/islands/parts/Loading.tsx";
+import { laterPart } from "#src/components/islands/parts/later-part.ts";
 import { usePhone } from "#src/components/islands/parts/phone.ts";
 import { Section } from "#src/components/islands/parts/Section.tsx";
 import { useWidth } from "#src/components/islands/parts/use-width.ts";
 import { type ModuleStore, useStore } from "#src/components/islands/plan/module-store.ts";
 import { openWorking } from "#src/components/islands/plan/open-working.ts";
 import type { PartsList } from "#src/server/present.ts";
-import { ChosenBar } from "./ChosenBar.tsx";
+import type { ChosenBarProps } from "./ChosenBar.tsx";
 import { EditorBoxes } from "./EditorBoxes.tsx";
 import type { GridContext, OfferChoice } from "./grid-context.ts";
 import { filteredRows, type GridRow, groupedRows, type LineRow } from "./grid-rows.ts";
 import { basisWords, keyWords } from "./grid-words.ts";
-import { LineEntry } from "./LineEntry.tsx";
-import { LineForm } from "./LineForm.tsx";
+import type { LineEntryProps } from "./LineEntry.tsx";
+import type { LineFormProps } from "./LineForm.tsx";
 import { ListTools, type Looking } from "./ListTools.tsx";
 import { offerChoices } from "./offer-choices.ts";
 import type { GridDeeds, PartsGridProps } from "./PartsGrid.tsx";
@@ -23,6 +25,19 @@ import { totalRow } from "./total-row.ts";
 import { useDraftLine } from "./use-draft-line.ts";
 import { useLayout } from "./use-layout.ts";
 import { usePartsWork } from "./use-parts-work.ts";
+
+const ChosenBar = laterPart<ChosenBarProps>(async () => (await import("./ChosenBar.tsx")).ChosenBar);
+const LineEntry = laterPart<LineEntryProps>(async () => (await import("./LineEntry.tsx")).LineEntry);
+const LineForm = laterPart<LineFormProps>(async () => (await import("./LineForm.tsx")).LineForm);
+
+const OVERLAY =
+  "fixed right-0 bottom-0 z-30 h-dvh w-full border-l-2 border-ink bg-paper p-6 tablet:w-[588px]";
+
+/** What a line or several chosen ones open is fetched when somebody comes to the list. */
+function fetchSoon(): void {
+  LineForm.preload();
+  ChosenBar.preload();
+}
 
 /** The grid is fetched when it is needed: it is the largest thing on the page. */
 function useGrid(): ComponentType<PartsGridProps> | undefined {
@@ -97,7 +112,7 @@ export function PartsWorkbench(props: WorkbenchProps) {
   const gridDeeds: GridDeeds = {
     ...deeds,
     ...followed,
-    paste: (block, place) => deeds.paste(block, place, rows, layout.keys),
+    paste: (block, place) => void deeds.paste(block, place, rows, layout.keys),
     open: (row, column) => {
       if (column === "place") setOpen(row.id);
       else if (column === "perKit" && row.money) context.openWorking(row.line.part.id);
@@ -110,7 +125,8 @@ export function PartsWorkbench(props: WorkbenchProps) {
   const opened = list.money ? list.lines.find(({ id }) => id === open) : undefined;
 
   return (
-    <div ref={box}>
+    // biome-ignore lint/a11y/noStaticElementInteractions: nothing happens that anybody sees.
+    <div ref={box} onPointerOver={fetchSoon} onFocus={fetchSoon}>
       <ListTools
         looking={looking}
         onLook={(change) => setLooking({ ...looking, ...change })}
@@ -124,17 +140,26 @@ export function PartsWorkbench(props: WorkbenchProps) {
       {phone && canEdit && list.money && entered < asked && (
         <Section title="A new line">
           <div className="pb-6">
-            <LineEntry address={address} list={list} onAdded={() => setEntered(asked)} />
+            <Later
+              part={LineEntry}
+              give={{ address, list, onAdded: () => setEntered(asked) }}
+              what="A new line"
+            />
           </div>
         </Section>
       )}
       {list.money && <EditorBoxes address={address} list={list} work={work} />}
       {chosen.length > 0 && (
-        <ChosenBar
-          lines={chosen}
-          plan={bought?.plan ?? null}
-          deeds={deeds}
-          onDone={() => grid.current?.deselectAll()}
+        <Later
+          part={ChosenBar}
+          give={{
+            lines: chosen,
+            plan: bought?.plan ?? null,
+            deeds,
+            onDone: () => grid.current?.deselectAll(),
+          }}
+          what="Chosen lines"
+          rows={1}
         />
       )}
       {Grid && room > 0 ? (
@@ -167,14 +192,20 @@ export function PartsWorkbench(props: WorkbenchProps) {
         {keyWords(list.money, canEdit)}
       </p>
       {opened && list.money && (
-        <LineForm
-          list={list}
-          line={opened}
-          offers={offersFor(opened.part.id)}
-          canEdit={canEdit}
-          canChoose={canChoose}
-          deeds={deeds}
-          onClose={() => setOpen(null)}
+        <Later
+          part={LineForm}
+          give={{
+            list,
+            line: opened,
+            offers: offersFor(opened.part.id),
+            canEdit,
+            canChoose,
+            deeds,
+            onClose: () => setOpen(null),
+          }}
+          what="The line"
+          rows={9}
+          frame={OVERLAY}
         />
       )}
     </div>

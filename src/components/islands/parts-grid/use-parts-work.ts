@@ -14,7 +14,7 @@ import type { LineRow } from "./grid-rows.ts";
 import { editList, redoList, shownList, undoList } from "./list-editor.ts";
 import { newLineId } from "./new-line-id.ts";
 import type { PastePlace } from "./PartsGrid.tsx";
-import { type Misfit, pasteBlock } from "./paste-lines.ts";
+import type { Misfit } from "./paste-lines.ts";
 import { type CellColumn, type DraftCells, lineFromCells, readCell } from "./read-cell.ts";
 import type { Line, Step } from "./steps.ts";
 
@@ -23,6 +23,9 @@ export interface Draft {
   cells: DraftCells;
   at: number | null;
 }
+/** Fetched when the first block is pasted. */
+const pasting = () => import("./paste-lines.ts");
+
 const EMPTY_DRAFT: Draft = { cells: {}, at: null };
 
 /** Makes an edit and tells the strip of figures what it is called and how it is taken back. */
@@ -203,16 +206,24 @@ export function usePartsWork(address: KitAddress, list: PartsList) {
         );
         take(`${rest.length} lines filled from ${lineName(first.line)}.`, steps);
       },
-      paste(block: string[][], place: PastePlace, lines: readonly LineRow[], columns: readonly ColumnKey[]) {
+      async paste(
+        block: string[][],
+        place: PastePlace,
+        lines: readonly LineRow[],
+        columns: readonly ColumnKey[],
+      ) {
+        const reader = await pasting().catch(() => null);
         const shown = now();
-        if (!shown) return;
+        if (!reader)
+          showToast({ kind: "fault", text: "Nothing was pasted. Try again when you are connected." });
+        if (!reader || !shown) return;
         const rows = new Map(lines.map((row) => [row.id, row]));
         const target = { ...place, lines: lines.map(({ id }) => id), columns };
         const textOf = (id: string, column: ColumnKey) => {
           const row = rows.get(id);
           return row ? cellText(row, column) : "";
         };
-        const pasted = pasteBlock(shown, block, target, textOf, newLineId);
+        const pasted = reader.pasteBlock(shown, block, target, textOf, newLineId);
         setMisfits(pasted.misfits);
         if (pasted.misfits.length > 0) return;
         take(pasted.lines === 1 ? "One line pasted." : `${pasted.lines} lines pasted.`, pasted.steps);

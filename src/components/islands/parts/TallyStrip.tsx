@@ -1,14 +1,15 @@
-import { type ReactNode, useEffect, useRef, useState } from "react";
+import { useEffect, useRef, useState } from "react";
 import { RULER_LEAST, RULER_MOST, RUN_LEAST, RUN_MOST } from "#src/shapes/limits.ts";
 import { RunBands } from "./Bands.tsx";
-import { Button } from "./Button.tsx";
+import { CellFigure } from "./CellFigure.tsx";
 import { Change, type ChangeProps } from "./Change.tsx";
-import { Figure } from "./Figure.tsx";
-import { holdFocus, useModal } from "./held-focus.ts";
+import type { FiguresSheetProps } from "./FiguresSheet.tsx";
 import { BusyIcon, UpIcon } from "./Icons.tsx";
-import { QuietButton } from "./QuietButton.tsx";
+import { Later } from "./Later.tsx";
+import { laterPart } from "./later-part.ts";
 import { Ruler } from "./Ruler.tsx";
 import { Stepper } from "./Stepper.tsx";
+import { TallyNoteLine } from "./TallyNoteLine.tsx";
 
 export type TallyCell = {
   key: string;
@@ -51,6 +52,11 @@ export type TallyStripProps = {
   announce?: string;
 };
 
+/** A phone fetches it when it is asked for, a wide screen never. */
+const FiguresSheet = laterPart<FiguresSheetProps>(
+  async () => (await import("./FiguresSheet.tsx")).FiguresSheet,
+);
+
 /** The answers of the chosen run, in view on every page of a kit: at the top, on a phone at the bottom. */
 export function TallyStrip({
   run,
@@ -91,17 +97,26 @@ export function TallyStrip({
             aria-label="Show all figures"
             aria-expanded={sheet}
             onClick={() => setSheet(true)}
+            onPointerDown={FiguresSheet.preload}
+            onFocus={FiguresSheet.preload}
             className="-mr-2 flex h-11 w-8 shrink-0 items-center justify-center tablet:hidden"
           >
             {workingOut ? <BusyIcon /> : <UpIcon />}
           </button>
         </div>
       </div>
-      {note && <NoteLine note={note} className="max-tablet:hidden" />}
+      {note && <TallyNoteLine note={note} className="max-tablet:hidden" />}
       <p role="status" className="heard-only">
         {announce}
       </p>
-      <TallySheet open={sheet} onClose={() => setSheet(false)} cells={cells} note={note} run={run} />
+      {sheet && (
+        <Later
+          part={FiguresSheet}
+          give={{ onClose: () => setSheet(false), cells, note, run }}
+          what="All figures"
+          frame="fixed inset-x-0 bottom-0 border-t-4 border-double border-ink bg-paper px-4 pt-4 pb-6"
+        />
+      )}
     </section>
   );
 }
@@ -149,104 +164,6 @@ function Cell({ cell, workingOut }: { cell: TallyCell; workingOut?: boolean }) {
         {cell.change && <Change {...cell.change} />}
       </span>
     </li>
-  );
-}
-
-function CellFigure({ cell, workingOut }: { cell: TallyCell; workingOut?: boolean }) {
-  if (cell.value === null)
-    return (
-      <span className="block max-w-full overflow-hidden text-[1rem] leading-[1.9375rem] font-medium text-ellipsis whitespace-nowrap text-ink-2 tablet:text-[1.1875rem]">
-        {cell.needsHref ? (
-          <a href={cell.needsHref} className="text-ink-2">
-            {cell.needs ?? "not known"}
-          </a>
-        ) : (
-          (cell.needs ?? "not known")
-        )}
-      </span>
-    );
-  return (
-    <span className="whitespace-nowrap">
-      <Figure
-        label={cell.label}
-        value={cell.value}
-        onOpen={cell.onOpen}
-        open={cell.open}
-        className={`type-tally ${workingOut ? "text-ink-2" : ""}`}
-      />
-      {cell.after && <span className="type-table ml-1.5 font-medium">{cell.after}</span>}
-    </span>
-  );
-}
-
-function NoteLine({ note, className }: { note: TallyNote; className?: string }) {
-  return (
-    <div className={`border-t border-rule-2 bg-sheet ${className ?? ""}`}>
-      <p className="gutters type-label flex min-h-[31px] flex-wrap items-center gap-x-4">
-        <span>
-          <b>{note.edit}</b> {note.text}
-        </span>
-        {note.actions?.map((action) => (
-          <QuietButton key={action.label} onClick={action.run} className="font-normal">
-            {action.label}
-          </QuietButton>
-        ))}
-      </p>
-    </div>
-  );
-}
-
-type SheetProps = Pick<TallyStripProps, "cells" | "note" | "run"> & { open: boolean; onClose: () => void };
-
-/** The phone's sheet with all figures, from the bar upward. */
-function TallySheet({ open, onClose, cells, note, run }: SheetProps) {
-  const closeKey = useRef<HTMLButtonElement>(null);
-  const box = useModal(open, closeKey);
-  return (
-    <dialog
-      ref={box}
-      aria-label={`All figures for a run of ${run}`}
-      onKeyDown={holdFocus}
-      onCancel={(cancel) => {
-        cancel.preventDefault();
-        onClose();
-      }}
-      className="mx-0 mt-auto mb-0 w-full max-w-none border-t-4 border-double border-ink bg-paper px-4 pt-4 pb-6 text-ink"
-    >
-      {open && (
-        <>
-          <div className="flex items-center justify-between gap-3">
-            <h2 className="type-h2">A run of {run}</h2>
-            <Button ref={closeKey} size="small" onClick={onClose}>
-              Close
-            </Button>
-          </div>
-          <dl className="mt-3">
-            {cells.map((cell) => (
-              <SheetRow key={cell.key} cell={cell} onOpen={cell.onOpen && (() => openFrom(cell, onClose))} />
-            ))}
-          </dl>
-          {note && <NoteLine note={note} className="mt-3 py-2 [&>p]:px-3" />}
-        </>
-      )}
-    </dialog>
-  );
-}
-
-function openFrom(cell: TallyCell, close: () => void): void {
-  close();
-  cell.onOpen?.();
-}
-
-function SheetRow({ cell, onOpen }: { cell: TallyCell; onOpen?: () => void }): ReactNode {
-  return (
-    <div className="hairline-b flex min-h-12 items-center justify-between gap-3">
-      <dt className="text-ink-2">{cell.label}</dt>
-      <dd className="flex flex-wrap items-center justify-end gap-2">
-        {cell.change && <Change {...cell.change} />}
-        <CellFigure cell={{ ...cell, onOpen }} />
-      </dd>
-    </div>
   );
 }
 

@@ -7,7 +7,7 @@ import type { Need } from "#src/costing/problem.ts";
 import type { Plan } from "#src/shapes/plan.ts";
 import { take } from "./inputs/entry.ts";
 
-interface CannotBeKnownProps {
+export interface CannotBeKnownProps {
   address: KitAddress;
   plan: Plan;
   /** "One kit of 260 cannot be costed yet". */

@@ -1,50 +1,18 @@
 import { useState } from "react";
-import { countText, moneyText } from "#src/components/amount-text.ts";
 import { buttonLook } from "#src/components/button-look.ts";
-import { CallFailed, call } from "#src/components/islands/call.ts";
 import { type KitAddress, kitApi } from "#src/components/islands/kit-address.ts";
 import { DropArea } from "#src/components/islands/parts/DropArea.tsx";
-import { ErrorBox } from "#src/components/islands/parts/ErrorBox.tsx";
+import { Later } from "#src/components/islands/parts/Later.tsx";
+import { laterPart } from "#src/components/islands/parts/later-part.ts";
 import { Section } from "#src/components/islands/parts/Section.tsx";
-import { Table } from "#src/components/islands/parts/Table.tsx";
-import type { Figure } from "#src/costing/figure.ts";
-import { needWords } from "#src/costing/problem-words.ts";
-import type { RunResult } from "#src/costing/run-result.ts";
-import type { POST } from "#src/pages/api/costing.ts";
-import type { ProblemBody } from "#src/server/problem.ts";
 
-type Outcome =
-  | { state: "none" }
-  | { state: "busy" }
-  | { state: "reckoned"; file: string; run: RunResult }
-  | { state: "refused"; file: string; title: string; detail: string; errors: ProblemBody["errors"] };
-
-async function reckoned(file: File): Promise<Outcome> {
-  try {
-    const plan = JSON.parse(await file.text());
-    const { run } = await call<typeof POST>("POST", "/api/costing?working=", plan);
-    return { state: "reckoned", file: file.name, run };
-  } catch (error) {
-    if (error instanceof CallFailed)
-      return { state: "refused", file: file.name, errors: [], ...error.problem };
-    if (!(error instanceof SyntaxError)) throw error;
-    return {
-      state: "refused",
-      file: file.name,
-      title: "This file is not a plan.",
-      detail: "Choose a file that was downloaded here: its name ends in plan.json.",
-      errors: [],
-    };
-  }
-}
+const PlanFileFigures = laterPart<{ file: File }>(
+  async () => (await import("./PlanFileFigures.tsx")).PlanFileFigures,
+);
 
 /** The plan as a file, and a file's figures worked out again without changing anything here. */
 export function PlanFile({ address }: { address: KitAddress }) {
-  const [outcome, setOutcome] = useState<Outcome>({ state: "none" });
-  async function feed(file: File) {
-    setOutcome({ state: "busy" });
-    setOutcome(await reckoned(file));
-  }
+  const [file, setFile] = useState<File | null>(null);
   return (
     <Section id="plan-file" title="The plan as a file" aside="for scripts, for keeping, for another machine">
       <p className="type-note measure-prose">
@@ -63,65 +31,14 @@ export function PlanFile({ address }: { address: KitAddress }) {
           level={3}
           accept=".json,application/json"
           chooseLabel="Choose a plan file"
-          onFile={(file) => void feed(file)}
+          onFile={setFile}
         >
           Drop a file that was downloaded here. Its figures stand below; nothing is saved.
         </DropArea>
       </div>
       <div aria-live="polite" className="mt-4">
-        <OutcomeOf outcome={outcome} />
+        {file && <Later part={PlanFileFigures} give={{ file }} what="The figures of the file" />}
       </div>
     </Section>
-  );
-}
-
-function OutcomeOf({ outcome }: { outcome: Outcome }) {
-  if (outcome.state === "none") return null;
-  if (outcome.state === "busy") return <p>Working out</p>;
-  if (outcome.state === "refused")
-    return (
-      <ErrorBox
-        title={`${outcome.file} cannot be worked out`}
-        causes={(outcome.errors ?? []).slice(0, 20).map(({ at, message }) => ({
-          key: `${at} ${message}`,
-          what: at || "The plan",
-          reason: message,
-        }))}
-      >
-        {outcome.title} {outcome.detail}
-      </ErrorBox>
-    );
-  return <FileFigures file={outcome.file} run={outcome.run} />;
-}
-
-function FileFigures({ file, run }: { file: string; run: RunResult }) {
-  const written = (figure: Figure) =>
-    figure.known ? moneyText(figure.value, run.currency) : needWords(figure.needs);
-  const rows: [string, string][] = [
-    ["Cost per kit, used", written(run.perKit.used)],
-    ["Cost per kit, spent", written(run.perKit.spent)],
-    ["One kit brings in", written(run.keptPerKit)],
-    ["Earns per kit", written(run.earnsPerKit)],
-    [
-      "Even after",
-      run.evenAfter.known ? `${countText(run.evenAfter.value)} sold` : needWords(run.evenAfter.needs),
-    ],
-    ["Cash needed", written(run.spent)],
-  ];
-  return (
-    <>
-      <p className="type-h3 mb-2">
-        {file}: {run.kit}, a run of {run.kits}
-      </p>
-      <Table
-        caption={`Figures of ${file}`}
-        rows={rows}
-        keyOf={([name]) => name}
-        columns={[
-          { key: "name", head: "Figure", names: true, cell: ([name]) => name },
-          { key: "value", head: run.currency, number: true, cell: ([, value]) => value },
-        ]}
-      />
-    </>
   );
 }

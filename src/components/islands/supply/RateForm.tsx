@@ -7,7 +7,7 @@ import { TextField } from "#src/components/islands/parts/TextField.tsx";
 import { readNumber } from "#src/partslist/numbers.ts";
 import type { RateView } from "#src/server/currency-rate-changes.ts";
 import type { CurrencyRateInput } from "#src/shapes/currency-rate.ts";
-import { CURRENCY_CHOICES } from "./SupplierForm.tsx";
+import { CURRENCY_CHOICES } from "./currency-choices.ts";
 
 interface RateFields {
   currency: string;

@@ -7,9 +7,9 @@ import { MeasureField } from "#src/components/islands/parts/MeasureField.tsx";
 import { MoneyField } from "#src/components/islands/parts/MoneyField.tsx";
 import { QuietButton } from "#src/components/islands/parts/QuietButton.tsx";
 import { LongTextField, TextField } from "#src/components/islands/parts/TextField.tsx";
-import { CURRENCY_DECIMALS } from "#src/costing/currencies.ts";
 import type { FreightTerm, SmallOrderTerm } from "#src/shapes/limits.ts";
 import type { SupplierFields } from "#src/shapes/supplier.ts";
+import { CURRENCY_CHOICES } from "./currency-choices.ts";
 
 /** A supplier about whom nothing is known yet. */
 export function blankSupplier(currency: string): SupplierFields {
@@ -39,10 +39,6 @@ const SMALL_ORDERS: readonly { value: SmallOrderTerm; label: string }[] = [
   { value: "fee", label: "A fee is added" },
   { value: "refused", label: "It is refused" },
 ];
-
-export const CURRENCY_CHOICES = [...CURRENCY_DECIMALS.keys()]
-  .sort()
-  .map((code) => ({ value: code, label: code }));
 
 interface SupplierFormProps {
   first: SupplierFields;

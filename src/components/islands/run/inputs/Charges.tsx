@@ -1,4 +1,4 @@
-import { addRow, removeRow } from "#src/components/islands/plan/edit-plan.ts";
+import { addRow, removeRow } from "#src/components/islands/plan/plan-lists.ts";
 import type { PlanCharge } from "#src/shapes/plan.ts";
 import { EntryTable } from "./EntryTable.tsx";
 import { AmountEntry, NumberEntry } from "./fields.tsx";

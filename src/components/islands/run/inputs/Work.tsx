@@ -1,4 +1,4 @@
-import { addRow, removeRow } from "#src/components/islands/plan/edit-plan.ts";
+import { addRow, removeRow } from "#src/components/islands/plan/plan-lists.ts";
 import type { PlanTask } from "#src/shapes/plan.ts";
 import { EditionsEntry } from "./EditionsEntry.tsx";
 import { EntryTable } from "./EntryTable.tsx";

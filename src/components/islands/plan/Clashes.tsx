@@ -1,31 +1,16 @@
 import { clockTime } from "#src/components/clock-time.ts";
 import type { KitAddress } from "#src/components/islands/kit-address.ts";
-import { Banner } from "#src/components/islands/parts/Banner.tsx";
-import { Button } from "#src/components/islands/parts/Button.tsx";
 import { ConflictBox } from "#src/components/islands/parts/ConflictBox.tsx";
 import type { Plan } from "#src/shapes/plan.ts";
 import { fieldName, fieldValue } from "./field-words.ts";
 import { useStore } from "./module-store.ts";
 import type { PlanRow } from "./plan-rows.ts";
-import { sendAll, settleClash } from "./save-edits.ts";
+import { settleClash } from "./save-edits.ts";
 import { type Clash, NOTHING_SAVED, saving } from "./saving.ts";
 
-/** The lost connection, while it is lost. */
-export function LostConnection() {
-  const { lostAt, waiting } = useStore(saving, NOTHING_SAVED);
-  if (lostAt === null || waiting === 0) return null;
-  return (
-    <Banner
-      lead={`Not saved since ${clockTime(lostAt)}: no connection.`}
-      action={
-        <Button size="small" onClick={sendAll}>
-          Try again now
-        </Button>
-      }
-    >
-      Your changes are kept on this page and will be sent when it is back.
-    </Banner>
-  );
+export interface ClashesProps {
+  address: KitAddress;
+  plan: Plan;
 }
 
 function thing(plan: Plan, row: PlanRow): string | undefined {
@@ -41,7 +26,7 @@ function happened({ by, at, row, field }: Clash, plan: Plan): string {
 }
 
 /** Fields that two people changed: both values, to choose one. */
-export function Clashes({ address, plan }: { address: KitAddress; plan: Plan }) {
+export function Clashes({ address, plan }: ClashesProps) {
   const { clashes } = useStore(saving, NOTHING_SAVED);
   return clashes.map((clash) => (
     <ConflictBox
