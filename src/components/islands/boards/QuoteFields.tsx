@@ -4,7 +4,7 @@ import { ChoiceField } from "#src/components/islands/parts/ChoiceField.tsx";
 import { MeasureField } from "#src/components/islands/parts/MeasureField.tsx";
 import { MoneyField } from "#src/components/islands/parts/MoneyField.tsx";
 import { TextField } from "#src/components/islands/parts/TextField.tsx";
-import { CURRENCY_CHOICES } from "#src/components/islands/supply/SupplierForm.tsx";
+import { CURRENCY_CHOICES } from "#src/components/islands/supply/currency-choices.ts";
 import type { BoardPriceModel } from "#src/shapes/limits.ts";
 import type { QuoteDraft } from "./quote-draft.ts";
 
