@@ -31,17 +31,26 @@ export function basketBill(terms: BasketTerms, goods: number, weight: number | n
   const { belowMinimum, handling, customs } = terms;
   const freight = freightOf(terms, goods, weight);
   const fee = below && belowMinimum.term === "fee" ? belowMinimum.fee : 0;
-  const refused = below && belowMinimum.term === "refused";
-  const bill = { goods, freight, fee, handling, customsValue: 0, duty: 0, importTax: 0, broker: 0, refused };
-  let total = goods + (freight ?? 0) + fee + handling;
+  let [customsValue, duty, importTax, broker, cost] = [0, 0, 0, 0, 0];
   if (customs !== null) {
-    bill.customsValue = goods + (customs.withFreight ? (freight ?? 0) : 0);
-    bill.duty = bill.customsValue > customs.dutyOver ? shareOf(bill.customsValue, customs.dutyMillionths) : 0;
-    bill.importTax = shareOf(bill.customsValue + bill.duty, customs.taxMillionths);
-    bill.broker = customs.broker;
-    total += bill.duty + bill.broker + (customs.taxReclaimed ? 0 : bill.importTax);
+    customsValue = goods + (customs.withFreight ? (freight ?? 0) : 0);
+    duty = customsValue > customs.dutyOver ? shareOf(customsValue, customs.dutyMillionths) : 0;
+    importTax = shareOf(customsValue + duty, customs.taxMillionths);
+    broker = customs.broker;
+    cost = duty + broker + (customs.taxReclaimed ? 0 : importTax);
   }
-  return { ...bill, total };
+  return {
+    goods,
+    freight,
+    fee,
+    handling,
+    customsValue,
+    duty,
+    importTax,
+    broker,
+    refused: below && belowMinimum.term === "refused",
+    total: goods + (freight ?? 0) + fee + handling + cost,
+  };
 }
 
 /**

@@ -3,48 +3,39 @@ import { basketsOf } from "./held-plan.ts";
 import { type Labels, pathOf, startLabels } from "./line-labels.ts";
 import { basketScore } from "./line-score.ts";
 import { nextLayer } from "./next-layer.ts";
-import { type OpenLines, openLines } from "./open-lines.ts";
-import { marginAt, offerPlan, type Search, spend } from "./search.ts";
+import type { OpenLines } from "./open-lines.ts";
+import { marginAt, offerPlan, type Search } from "./search.ts";
 import type { SetNode } from "./set-node.ts";
 
-/** Open lines up to which a node is searched to the end at once. */
-const FEW = 10;
-/** How much of the gap the lines of a node are followed within at first, and by how much it is then widened. */
-const FIRST_SHARE = 1 / 16;
-const WIDER = 2;
-/** Steps in depth after which lines are followed in breadth, where alike choices are merged. */
-const DIVE = 10_000;
-
 /**
- * Searches the lines of a node whose ranges are settled: every choice of ways within some distance of its bound is
- * followed, part by part, and weighed exactly at the end. The distance is a part of the gap to the best plan at
- * first: what is found there is often so good that nothing else is left; otherwise the node goes back into the
- * queue with so much higher a bound.
+ * Searches the lines of a node whose ranges are settled: every choice of ways that leaves room for a better plan is
+ * followed, part by part, and weighed exactly at the end; first in depth, then in breadth, where choices that go on
+ * alike are merged. False: there are too many, and the node is to be parted first.
  *
  * @param value the node's bound at the prices in force
- * @returns the node to be searched further; null: it is done
  */
-export function closeLines(search: Search, node: SetNode, value: number): SetNode | null {
-  const gap = search.bestScore - value + 2 * marginAt(search);
-  const first = gap < Number.POSITIVE_INFINITY ? gap * FIRST_SHARE : Math.abs(value) / 1000 + 1;
-  const within = node.followed === 0 ? first : node.followed * WIDER;
-  let [open, limit] = [openLines(search, node, gap), gap];
-  if (open.lines.length > FEW && within < gap) [open, limit] = [openLines(search, node, within), within];
-  if (open.lines.length === 0) offerPlan(search, open.settled, open.baskets);
-  else if (
-    !diveLines(search, node, value, open, limit, DIVE) &&
-    !followLines(search, node, value, open, limit)
-  )
-    return null;
-  return limit === gap ? null : { ...node, bound: Math.max(node.bound, value + limit), followed: limit };
+export function closeLines(search: Search, node: SetNode, open: OpenLines, value: number): boolean {
+  if (open.lines.length === 0) {
+    offerPlan(search, open.settled, open.baskets);
+    return true;
+  }
+  const rounding = open.tracked.reduce((sum, { range }) => sum + (range?.slack ?? 0), 0);
+  const narrow = search.bestScore - value <= 4 * rounding + 2 * marginAt(search);
+  const { dive, wide, narrow: many, lines } = search.effort;
+  if (!narrow && open.lines.length > lines) return false;
+  const most = narrow ? many : wide;
+  return diveLines(search, node, value, open, dive) || followLines(search, node, value, open, most);
 }
 
-/** False: work ran out. */
-function followLines(search: Search, node: SetNode, value: number, open: OpenLines, gap: number): boolean {
+function followLines(search: Search, node: SetNode, value: number, open: OpenLines, most: number): boolean {
   let labels = startLabels(search, node, open);
+  let made = 0;
   for (let layer = 0; layer < open.lines.length; layer += 1) {
-    if (!spend(search, labels.count, value)) return false;
+    const gap = search.bestScore - value + 2 * marginAt(search);
     labels = nextLayer(search, open, labels, layer, gap);
+    made += labels.count;
+    search.workLeft -= labels.count;
+    if (made > most && layer < open.lines.length - 1) return false;
   }
   offerLabels(search, open, labels);
   return true;

@@ -2,7 +2,7 @@ import { basketsOf } from "./held-plan.ts";
 import { type Ahead, bringsTo, MEASURES, plainOf, startLabels } from "./line-labels.ts";
 import { basketScore } from "./line-score.ts";
 import type { OpenLines } from "./open-lines.ts";
-import { marginAt, offerPlan, type Search, spend } from "./search.ts";
+import { marginAt, offerPlan, type Search } from "./search.ts";
 import type { SetNode } from "./set-node.ts";
 
 /** One way of an open line, with what it adds. */
@@ -18,8 +18,6 @@ interface Dive {
   search: Search;
   open: OpenLines;
   value: number;
-  /** How far above the bound choices are followed. */
-  limit: number;
   steps: Step[][];
   ahead: readonly Ahead[];
   limits: Ahead;
@@ -38,7 +36,6 @@ export function diveLines(
   node: SetNode,
   value: number,
   open: OpenLines,
-  limit: number,
   most: number,
 ): boolean {
   const start = startLabels(search, node, open);
@@ -46,7 +43,6 @@ export function diveLines(
     search,
     open,
     value,
-    limit,
     steps: open.lines.map(({ ways }) =>
       ways
         .map(({ way, excess }) => ({
@@ -64,7 +60,7 @@ export function diveLines(
     left: most,
   };
   visit(dive, 0, 0, 0);
-  spend(search, most - dive.left, value);
+  search.workLeft -= most - dive.left;
   return dive.left > 0;
 }
 
@@ -110,8 +106,8 @@ function leavesRoom(dive: Dive, filled: Float64Array, layer: number, excess: num
   return sum <= roomLeft(dive);
 }
 
-function roomLeft({ search, value, limit }: Dive): number {
-  return Math.min(limit, search.bestScore - value + 2 * marginAt(search));
+function roomLeft({ search, value }: Dive): number {
+  return search.bestScore - value + 2 * marginAt(search);
 }
 
 function offerDive({ search, open, ways }: Dive, filled: Float64Array, plain: number): void {

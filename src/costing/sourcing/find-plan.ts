@@ -2,25 +2,20 @@ import { basketBill } from "./basket-bill.ts";
 import { type Column, columnsAt } from "./columns.ts";
 import { type Baskets, basketsOf, type HeldPlan } from "./held-plan.ts";
 import type { Market } from "./market.ts";
-import { emptyQueue } from "./node-queue.ts";
-import { emptyLines, noPrices, relaxLines } from "./relaxed-lines.ts";
-import { offerPlan, type Search, startSearch } from "./search.ts";
-import { queueNode, searchNodes } from "./search-nodes.ts";
+import { choicesWithin, emptyLines, relaxChoices } from "./node-choices.ts";
+import { addNode, emptyQueue } from "./node-queue.ts";
+import { plainPrices } from "./prices.ts";
+import { offerPlan, type Search, type SearchLimits, startSearch } from "./search.ts";
+import { searchNodes } from "./search-nodes.ts";
+import { evaluate } from "./set-node.ts";
 import { nodeOf, searchSets, setKey } from "./supplier-sets.ts";
-
-/** What a plan must keep to, in the terms of the search. */
-export interface SearchLimits {
-  leastParcels: number;
-  mostParcels: number;
-  work: number;
-}
 
 /**
  * The best plan of a market, proven unless work ran out. `before`: the best plan of a market much like it, such as
  * that of the run size before, where the search then begins.
  */
 export function findPlan(market: Market, limits: SearchLimits, before: HeldPlan | null): Search {
-  const search = startSearch(market, limits.leastParcels, limits.mostParcels, limits.work);
+  const search = startSearch(market, limits);
   const start = before === null ? startLines(search) : basketsOf(market, before.ways);
   const columns = columnsAt(search, start.goods, start.weight).sort(
     (a, b) =>
@@ -31,7 +26,9 @@ export function findPlan(market: Market, limits: SearchLimits, before: HeldPlan 
   const queue = emptyQueue();
   let done: string | null = null;
   if (first.length >= limits.leastParcels && first.length <= limits.mostParcels) {
-    queueNode(search, queue, nodeOf(first, Number.NEGATIVE_INFINITY));
+    const node = nodeOf(first, Number.NEGATIVE_INFINITY);
+    evaluate(search, node);
+    addNode(queue, node);
     done = setKey(first);
   }
   searchSets(search, queue, columns, done);
@@ -49,11 +46,11 @@ function near(search: Search, { reach }: Column): number {
  */
 function startLines(search: Search): Baskets {
   const { market } = search;
-  const prices = noPrices(market.suppliers.length);
-  prices.inSet.fill(1);
+  const prices = plainPrices(market.suppliers.length);
+  const inSet = new Uint8Array(market.suppliers.length).fill(1);
   const lines = emptyLines(market);
   for (;;) {
-    relaxLines(market, search.omitted, prices, lines);
+    relaxChoices(market, search.omitted, prices, choicesWithin(market, inSet), lines);
     offerPlan(search, lines.ways, lines.baskets);
     const refused = market.suppliers.findIndex(
       ({ terms }, index) =>
@@ -61,6 +58,6 @@ function startLines(search: Search): Baskets {
         basketBill(terms, lines.baskets.goods[index] as number, null).refused,
     );
     if (refused < 0) return lines.baskets;
-    prices.inSet[refused] = 0;
+    inSet[refused] = 0;
   }
 }

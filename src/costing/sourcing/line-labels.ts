@@ -1,5 +1,6 @@
+import { broughtTo } from "./line-spans.ts";
 import type { Market } from "./market.ts";
-import { broughtTo, type OpenLine, type OpenLines } from "./open-lines.ts";
+import type { OpenLine, OpenLines } from "./open-lines.ts";
 import type { Search } from "./search.ts";
 import type { SetNode } from "./set-node.ts";
 

@@ -13,8 +13,9 @@ import {
 } from "./line-labels.ts";
 import { trackedBill } from "./line-score.ts";
 import type { MarketSupplier } from "./market.ts";
-import { exactOf, type OpenLine, type OpenLines, type Tracked } from "./open-lines.ts";
+import type { OpenLine, OpenLines, Tracked } from "./open-lines.ts";
 import type { Search } from "./search.ts";
+import { exactOf } from "./undominated.ts";
 
 /** A label that is being made. */
 interface Label {

@@ -1,10 +1,12 @@
-import { convertMinor } from "#src/costing/conversion.ts";
 import type { BasketCell } from "./basket-cells.ts";
-import { type Baskets, compareBig, emptyBaskets, putWay } from "./held-plan.ts";
+import { type Baskets, putWay } from "./held-plan.ts";
+import { broughtTo, cellOver, type Span, spanOf } from "./line-spans.ts";
 import type { Market, MarketSupplier } from "./market.ts";
-import { countOf } from "./relaxed-lines.ts";
-import { marginAt, type Search } from "./search.ts";
-import { mustUseAll, type SetNode } from "./set-node.ts";
+import { copyBaskets, type NodeChoices } from "./node-choices.ts";
+import { countOf } from "./prices.ts";
+import type { Search } from "./search.ts";
+import { choicesFor, mustUseAll, type SetNode } from "./set-node.ts";
+import { kindsOf, undominated } from "./undominated.ts";
 
 /** A way that a part may still be bought, and by how much its count exceeds the part's least. */
 export interface OpenWay {
@@ -42,6 +44,8 @@ export interface OpenLines {
   /** Baskets of the settled lines. */
   baskets: Baskets;
   tracked: Tracked[];
+  /** Parts that are not bought whatever is chosen. */
+  unbought: number;
   /** What the baskets cost that are not tracked, their settled orders included; parts not bought are counted. */
   plain: number;
 }
@@ -52,15 +56,18 @@ export interface OpenLines {
  */
 export function openLines(search: Search, node: SetNode, gap: number): OpenLines {
   const { market } = search;
-  const settled = new Int32Array(market.parts).fill(-1);
-  const baskets = emptyBaskets(market.suppliers.length);
+  const choices = choicesFor(search, node);
+  const settled = choices.settled.slice();
+  const baskets = copyBaskets(choices.baskets);
   let lines: OpenLine[] = [];
-  for (let part = 0; part < market.parts; part += 1) {
-    if (market.needed[part] === 0) continue;
-    const ways = waysWithin(search, part, gap);
+  let { unbought } = choices;
+  choices.parts.forEach((part, index) => {
+    const ways = waysWithin(search, choices, index, gap);
+    const only = ways[0]?.way ?? (search.relaxed.ways[part] as number);
     if (ways.length > 1) lines.push({ part, ways });
-    else settle(market, settled, baskets, part, ways[0]?.way ?? (search.relaxed.ways[part] as number));
-  }
+    else if (only < 0) unbought += 1;
+    else settle(market, settled, baskets, part, only);
+  });
   const spans = node.reaches.map(({ supplier }) => spanOf(market, lines, baskets, supplier));
   const tracked = trackedOf(search, node, spans, lines, baskets);
   const kinds = kindsOf(search, node, spans, tracked);
@@ -76,17 +83,22 @@ export function openLines(search: Search, node: SetNode, gap: number): OpenLines
     settled,
     baskets,
     tracked,
-    plain: plainOf(search, node, spans, tracked, { lines, settled, baskets }),
+    plain: unbought * search.omitted + plainOf(search, node, spans, tracked, baskets),
+    unbought,
   };
 }
 
-function waysWithin({ market, prices, relaxed }: Search, part: number, gap: number): OpenWay[] {
+function waysWithin(
+  { market, prices, relaxed }: Search,
+  choices: NodeChoices,
+  index: number,
+  gap: number,
+): OpenWay[] {
   const ways: OpenWay[] = [];
-  const least = relaxed.counts[part] as number;
-  const end = market.first[part + 1] as number;
-  for (let way = market.first[part] as number; way < end; way += 1) {
-    if (market.open[way] === 0) continue;
-    const excess = countOf(market, prices, way) - least;
+  const end = choices.from[index + 1] as number;
+  for (let at = choices.from[index] as number; at < end; at += 1) {
+    const way = choices.ways[at] as number;
+    const excess = countOf(market, prices, way) - (relaxed.counts[index] as number);
     if (excess <= gap && excess < Number.POSITIVE_INFINITY) ways.push({ way, excess });
   }
   return ways;
@@ -94,7 +106,7 @@ function waysWithin({ market, prices, relaxed }: Search, part: number, gap: numb
 
 function settle(market: Market, settled: Int32Array, baskets: Baskets, part: number, way: number): void {
   settled[part] = way;
-  if (way >= 0) putWay(market, way, baskets);
+  putWay(market, way, baskets);
 }
 
 /**
@@ -126,67 +138,12 @@ function basketByBasket(market: Market, lines: readonly OpenLine[], tracked: rea
 }
 
 function secondOf({ ways }: OpenLine): number {
-  const excesses = ways.map(({ excess }) => excess).sort((a, b) => a - b);
-  return excesses[1] ?? 0;
-}
-
-/** What one way brings to one supplier. */
-export function broughtTo(market: Market, way: number, supplier: number) {
-  const brought = { goods: 0, weight: 0, unweighed: 0, lines: 0 };
-  for (let at = market.orderFrom[way] as number; at < (market.orderTo[way] as number); at += 1) {
-    if (market.supplier[at] !== supplier) continue;
-    const weight = market.weight[at] as number;
-    brought.goods += market.cost[at] as number;
-    if (Number.isNaN(weight)) brought.unweighed = 1;
-    else brought.weight += weight;
-    brought.lines = 1;
+  let [least, second] = [Number.POSITIVE_INFINITY, Number.POSITIVE_INFINITY];
+  for (const { excess } of ways) {
+    if (excess < least) [least, second] = [excess, least];
+    else if (excess < second) second = excess;
   }
-  return brought;
-}
-
-/** The least and the most a basket may come to, and the line its charges then follow if there is only one. */
-interface Span {
-  supplier: number;
-  goods: [number, number];
-  weight: [number, number];
-  unweighed: [number, number];
-  lines: number;
-}
-
-function spanOf(market: Market, lines: readonly OpenLine[], baskets: Baskets, supplier: number): Span {
-  const [goods, weight] = [baskets.goods[supplier] as number, baskets.weight[supplier] as number];
-  const unweighed = baskets.unweighed[supplier] as number;
-  const span: Span = {
-    supplier,
-    goods: [goods, goods],
-    weight: [weight, weight],
-    unweighed: [unweighed, unweighed],
-    lines: baskets.lines[supplier] as number,
-  };
-  for (const { ways } of lines) {
-    const brought = ways.map(({ way }) => broughtTo(market, way, supplier));
-    for (const kind of ["goods", "weight", "unweighed"] as const) {
-      const amounts = brought.map((one) => one[kind]);
-      span[kind][0] += Math.min(...amounts);
-      span[kind][1] += Math.max(...amounts);
-    }
-    span.lines += Math.min(...brought.map((one) => one.lines));
-  }
-  return span;
-}
-
-/** The one range that a span lies in; null: it may reach into several, or weights are partly known. */
-function cellOver(search: Search, { supplier, goods, weight, unweighed }: Span): BasketCell | null {
-  const { cells } = search.market.suppliers[supplier] as MarketSupplier;
-  const over = cells.filter(
-    (cell) =>
-      cell.goodsFrom <= goods[0] &&
-      goods[1] <= cell.goodsTo &&
-      (cell.anyWeight
-        ? !cell.freightUnknown || unweighed[0] > 0 || !cells.some((other) => !other.anyWeight)
-        : unweighed[1] === 0 && cell.weightFrom <= weight[0] && weight[1] <= cell.weightTo),
-  );
-  return over.length === 1 ? (over[0] as BasketCell) : null;
+  return second;
 }
 
 function trackedOf(
@@ -204,7 +161,7 @@ function trackedOf(
     const line = node.lines[index];
     const byUse = mustUseAll(search) && baskets.lines[supplier] === 0 && span.lines === 0;
     const straight = cell !== null && cell.slack === 0 && cell.multiple === line?.perGoods;
-    if (straight && line?.perWeight === 0 && node.bonus[index] === 0 && !byUse) return [];
+    if (straight && line?.perWeight === 0 && !byUse) return [];
     const byWeight = terms.freight.model === "by-weight" && (cell === null || !cell.anyWeight);
     const steadyWeight = cell?.freightUnknown ? null : span.weight[0];
     const own = node.reaches[index]?.cells ?? [];
@@ -214,90 +171,12 @@ function trackedOf(
   });
 }
 
-/** How an order of a supplier may be compared with another: exactly, within bounds, or not by itself. */
-type Kind = { kind: "plain" } | { kind: "rounded"; multiple: number; off: number } | { kind: "tracked" };
-
-function kindsOf(
-  search: Search,
-  node: SetNode,
-  spans: readonly Span[],
-  tracked: readonly Tracked[],
-): Map<number, Kind> {
-  const kinds = new Map<number, Kind>();
-  node.reaches.forEach(({ supplier }, index) => {
-    const held = tracked.find((one) => one.supplier === supplier);
-    const cell = cellOver(search, spans[index] as Span);
-    if (held === undefined) kinds.set(supplier, { kind: "plain" });
-    else if (cell === null || held.byUse) kinds.set(supplier, { kind: "tracked" });
-    else kinds.set(supplier, { kind: "rounded", multiple: cell.multiple, off: 2 * cell.slack });
-  });
-  return kinds;
-}
-
-function undominated(search: Search, ways: readonly OpenWay[], kinds: ReadonlyMap<number, Kind>): OpenWay[] {
-  const judged = ways.map((open) => ({ open, ...worthOf(search.market, open.way, kinds) }));
-  return judged
-    .filter(
-      (one, at) =>
-        !judged.some((other, index) => {
-          if (one.low === null || other.low === null || index === at) return false;
-          if (one.plain && other.plain) return beatsPlainly(search, other.open.way, one.open.way);
-          return other.high < one.low - marginAt(search);
-        }),
-    )
-    .map(({ open }) => open);
-}
-
-function worthOf(market: Market, way: number, kinds: ReadonlyMap<number, Kind>) {
-  let [low, high, plain] = [0, 0, true];
-  for (let at = market.orderFrom[way] as number; at < (market.orderTo[way] as number); at += 1) {
-    const kind = kinds.get(market.supplier[at] as number) ?? { kind: "tracked" };
-    if (kind.kind === "tracked") return { low: null, high: 0, plain: false };
-    const near = market.near[at] as number;
-    const [worth, off] = kind.kind === "plain" ? [near, 0] : [near * kind.multiple, kind.off];
-    low += worth - off;
-    high += worth + off;
-    plain &&= kind.kind === "plain";
-  }
-  return { low, high, plain };
-}
-
-/** Whether one way goes before another of the same part, where nothing but their own worths differs. */
-function beatsPlainly({ market, margin }: Search, a: number, b: number): boolean {
-  const near = nearOf(market, a) - nearOf(market, b);
-  if (Math.abs(near) > margin + 1e-11 * Math.abs(nearOf(market, a))) return near < 0;
-  const exact =
-    compareBig(exactOf(market, a), exactOf(market, b)) ||
-    compareBig(market.leftWorth(a), market.leftWorth(b));
-  return (exact || a - b) < 0;
-}
-
-function nearOf(market: Market, way: number): number {
-  let sum = 0;
-  for (let at = market.orderFrom[way] as number; at < (market.orderTo[way] as number); at += 1)
-    sum += market.near[at] as number;
-  return sum;
-}
-
-/** Goods of one way in grains, without those of some suppliers. */
-export function exactOf(market: Market, way: number, without: ReadonlySet<number> = NONE): bigint {
-  let sum = 0n;
-  for (let at = market.orderFrom[way] as number; at < (market.orderTo[way] as number); at += 1) {
-    const supplier = market.supplier[at] as number;
-    if (without.has(supplier)) continue;
-    sum += convertMinor(market.cost[at] as number, (market.suppliers[supplier] as MarketSupplier).worth);
-  }
-  return sum;
-}
-
-const NONE: ReadonlySet<number> = new Set();
-
 function plainOf(
   search: Search,
   node: SetNode,
   spans: readonly Span[],
   tracked: readonly Tracked[],
-  { lines, settled, baskets }: Pick<OpenLines, "lines" | "settled" | "baskets">,
+  baskets: Baskets,
 ): number {
   const { market } = search;
   let plain = 0;
@@ -309,10 +188,5 @@ function plainOf(
     plain +=
       cell.fixed + (cell.freightUnknown ? search.unknown : 0) + (baskets.goods[supplier] as number) * near;
   });
-  const open = new Set(lines.map(({ part }) => part));
-  for (let part = 0; part < market.parts; part += 1) {
-    const unbought = market.needed[part] === 1 && (settled[part] as number) < 0 && !open.has(part);
-    if (unbought) plain += search.omitted;
-  }
   return plain;
 }

@@ -2,7 +2,7 @@ import { isBeaten, type Search } from "./search.ts";
 import { evaluate, type SetNode } from "./set-node.ts";
 import { lineOf, type Reach, type SupportLine } from "./support-line.ts";
 
-const TURNS = 60;
+const TURNS = 40;
 const PATIENCE = 4;
 /** Share of the way to the best plan so far below which steps are too small to matter. */
 const LEAST_STEP = 1e-3;

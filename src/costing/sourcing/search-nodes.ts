@@ -1,9 +1,13 @@
 import type { BasketCell } from "./basket-cells.ts";
 import { closeLines } from "./close-lines.ts";
+import { improvePlan } from "./improve-plan.ts";
 import { addNode, type NodeQueue, takeNode } from "./node-queue.ts";
+import { openLines } from "./open-lines.ts";
+import { partedLines } from "./part-lines.ts";
 import { polishBound } from "./polish-bound.ts";
-import { isBeaten, type Search, spend } from "./search.ts";
-import { evaluate, raiseBound, type SetNode } from "./set-node.ts";
+import { raiseBound } from "./raise-bound.ts";
+import { isBeaten, marginAt, type Search, spend } from "./search.ts";
+import { evaluate, type SetNode, shrink } from "./set-node.ts";
 import { lineAt, type Reach } from "./support-line.ts";
 
 /** Times that one line of a node is raised by itself before all are together. */
@@ -24,35 +28,36 @@ export function searchNodes(search: Search, queue: NodeQueue): void {
 
 function searchNode(search: Search, queue: NodeQueue, node: SetNode): void {
   let value = evaluate(search, node);
+  if (isBeaten(search, node.bound)) return;
+  shrink(search, node, value);
   let gaps = gapsOf(search, node);
-  for (let round = 0; round < RAISES && node.followed === 0; round += 1) {
+  for (let round = 0; round < RAISES; round += 1) {
     const worst = widest(gaps);
     if (worst === null || partedAt(search, node, worst).length > 1) break;
     raiseBound(search, node, worst);
-    value = evaluate(search, node);
-    node.bound = Math.max(node.bound, value);
     if (isBeaten(search, node.bound)) return;
     gaps = gapsOf(search, node);
   }
   const parted = widest(gaps.map((gap, index) => (partedAt(search, node, index).length > 1 ? gap : 0)));
-  if (parted !== null && node.followed === 0) {
+  if (parted !== null) {
     const children = partedAt(search, node, parted).map((cells) => childOf(search, node, parted, cells));
     for (const child of children) queueNode(search, queue, child);
     return;
   }
-  if (node.followed === 0 && widest(gaps) !== null) {
-    polishBound(search, node);
-    value = evaluate(search, node);
-    node.bound = Math.max(node.bound, value);
-    if (isBeaten(search, node.bound)) return;
-  }
-  const further = closeLines(search, node, value);
-  if (further !== null && !isBeaten(search, further.bound)) addNode(queue, further);
+  if (widest(gaps) !== null) polishBound(search, node);
+  value = evaluate(search, node);
+  if (isBeaten(search, node.bound)) return;
+  shrink(search, node, value);
+  const open = openLines(search, node, search.bestScore - value + 2 * marginAt(search));
+  if (closeLines(search, node, open, value)) return;
+  if (!node.improved) improvePlan(search, node, open);
+  for (const choices of partedLines(search.market, open))
+    queueNode(search, queue, { ...node, lines: node.lines.slice(), choices, improved: true });
 }
 
 /** Evaluates a new node, and queues it unless it is beaten. */
-export function queueNode(search: Search, queue: NodeQueue, node: SetNode): void {
-  node.bound = Math.max(node.bound, evaluate(search, node));
+function queueNode(search: Search, queue: NodeQueue, node: SetNode): void {
+  evaluate(search, node);
   if (!isBeaten(search, node.bound)) addNode(queue, node);
 }
 

@@ -1,13 +1,15 @@
 import type { BasketCell } from "./basket-cells.ts";
-import { type Baskets, comparePlans, type HeldPlan, weighPlan } from "./held-plan.ts";
+import { type Baskets, comparePlans, compareWays, type HeldPlan, weighPlan } from "./held-plan.ts";
 import type { Market, MarketSupplier } from "./market.ts";
-import { emptyLines, noPrices, type Prices, type RelaxedLines } from "./relaxed-lines.ts";
+import { emptyLines, type RelaxedLines } from "./node-choices.ts";
+import { type Prices, plainPrices } from "./prices.ts";
 
 /** One search for the best plan at one run size: what is sought, the best so far, and what was left unsearched. */
 export interface Search {
   market: Market;
   leastParcels: number;
   mostParcels: number;
+  effort: Effort;
   /** By index of supplier: the most goods, in minor units, and weight that its basket can come to. */
   goodsMost: Float64Array;
   weightMost: Float64Array;
@@ -27,13 +29,36 @@ export interface Search {
   unsearched: number;
 }
 
+/** How far the lines of a node are followed before it is parted instead; the answer does not depend on it. */
+export interface Effort {
+  /** Steps in depth. */
+  dive: number;
+  /** Labels in breadth: where the bound leaves room, and where it leaves room for ties and rounding only. */
+  wide: number;
+  narrow: number;
+  /** Open lines above which a node is parted at once unless its bound leaves room for ties and rounding only. */
+  lines: number;
+}
+
+/** What was quickest on the plans measured. */
+export const EFFORT: Effort = { dive: 1500, wide: 200, narrow: 20_000, lines: 24 };
+
+/** What a search must keep to. */
+export interface SearchLimits {
+  leastParcels: number;
+  mostParcels: number;
+  work: number;
+  effort?: Effort;
+}
+
 /** A search over a market that has found nothing yet. */
-export function startSearch(market: Market, least: number, most: number, work: number): Search {
+export function startSearch(market: Market, limits: SearchLimits): Search {
   const { suppliers } = market;
   const search: Search = {
     market,
-    leastParcels: least,
-    mostParcels: most,
+    leastParcels: limits.leastParcels,
+    mostParcels: limits.mostParcels,
+    effort: limits.effort ?? EFFORT,
     goodsMost: new Float64Array(suppliers.length),
     weightMost: new Float64Array(suppliers.length),
     omitted: 0,
@@ -41,8 +66,8 @@ export function startSearch(market: Market, least: number, most: number, work: n
     margin: 0,
     best: null,
     bestScore: Number.POSITIVE_INFINITY,
-    workLeft: work,
-    prices: noPrices(suppliers.length),
+    workLeft: limits.work,
+    prices: plainPrices(suppliers.length),
     relaxed: emptyLines(market),
     unsearched: Number.POSITIVE_INFINITY,
   };
@@ -109,6 +134,7 @@ export function marginAt(search: Search): number {
 
 /** Weighs a choice of ways and keeps it if it is the best so far; the array is copied. */
 export function offerPlan(search: Search, ways: Int32Array, baskets: Baskets): boolean {
+  if (search.best !== null && compareWays(ways, search.best.ways) === 0) return false;
   const held = weighPlan(search.market, ways, baskets);
   if (held === null) return false;
   const parcels = held.used.length;

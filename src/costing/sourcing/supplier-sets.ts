@@ -1,8 +1,7 @@
 import type { Column } from "./columns.ts";
-import type { NodeQueue } from "./node-queue.ts";
+import { addNode, type NodeQueue } from "./node-queue.ts";
 import { isBeaten, type Search, spend } from "./search.ts";
-import { queueNode } from "./search-nodes.ts";
-import { type SetNode, setNode } from "./set-node.ts";
+import type { SetNode } from "./set-node.ts";
 
 /**
  * Queues the sets of suppliers that may hold the best plan: goes through them depth first, passing over every branch whose bound leaves no room for a better
@@ -33,7 +32,7 @@ export function searchSets(
     if (isBeaten(search, bound) || !spend(search, 1, bound)) return;
     const column = columns[depth];
     if (column === undefined) {
-      if (setKey(chosen) !== done) queueNode(search, queue, nodeOf(chosen, bound));
+      if (setKey(chosen) !== done) addNode(queue, nodeOf(chosen, bound));
       return;
     }
     const next = taken[depth + 1] as Float64Array;
@@ -86,11 +85,13 @@ function sumOfLeast(least: Float64Array, rest: Float64Array): number {
 /** The node in which a set of suppliers is searched. */
 export function nodeOf(columns: readonly Column[], bound: number): SetNode {
   const sorted = columns.toSorted((a, b) => a.reach.supplier - b.reach.supplier);
-  return setNode(
-    sorted.map(({ reach }) => reach),
-    sorted.map(({ line }) => line),
+  return {
+    reaches: sorted.map(({ reach }) => reach),
+    lines: sorted.map(({ line }) => line),
     bound,
-  );
+    choices: null,
+    improved: false,
+  };
 }
 
 /** A set by its suppliers, ascending. */

@@ -3,15 +3,20 @@ import { describe, expect, test } from "vitest";
 import { findPlan } from "#src/costing/sourcing/find-plan.ts";
 import { exactTotal, leftWorth } from "#src/costing/sourcing/held-plan.ts";
 import { marketOf, narrowed } from "#src/costing/sourcing/market.ts";
+import { EFFORT, type Effort } from "#src/costing/sourcing/search.ts";
 import type { SourcingInput, SourcingLimits } from "#src/costing/sourcing/sourcing-input.ts";
 import { type PlainPlan, plainBest } from "./plain-sourcing.ts";
 import { sourcing } from "./random-sourcing.ts";
 
-function found(input: SourcingInput, limits: SourcingLimits = {}): PlainPlan | null {
+/** Nothing followed, everything parted; and the other way round. */
+const PARTING: Effort = { dive: 1, wide: 0, narrow: 0, lines: 0 };
+const FOLLOWING: Effort = { dive: 1, wide: 1e9, narrow: 1e9, lines: 1e9 };
+
+function found(input: SourcingInput, limits: SourcingLimits = {}, effort = EFFORT): PlainPlan | null {
   const market = narrowed(marketOf(input), limits.without ?? [], limits.latestDays ?? null);
   const search = findPlan(
     market,
-    { leastParcels: limits.leastParcels ?? 0, mostParcels: limits.mostParcels ?? 99, work: 1e6 },
+    { leastParcels: limits.leastParcels ?? 0, mostParcels: limits.mostParcels ?? 99, work: 1e6, effort },
     null,
   );
   expect(search.unsearched).toBe(Number.POSITIVE_INFINITY);
@@ -40,7 +45,10 @@ describe("the best plan is the best of all choices, ties included", () => {
   test.each(cases)("$name", (sizes) => {
     fc.assert(
       fc.property(sourcing({ ...small, ...sizes }), (input) => {
-        expect(found(input)).toEqual(plainBest(input));
+        const best = plainBest(input);
+        expect(found(input)).toEqual(best);
+        expect(found(input, {}, PARTING)).toEqual(best);
+        expect(found(input, {}, FOLLOWING)).toEqual(best);
       }),
       { numRuns: 1500 },
     );
