@@ -172,7 +172,7 @@ test("several lines are marked at once, and an edition is added with their quant
   await page.getByLabel("Another edition").fill("Bare board");
   await page.getByLabel("Begins with").selectOption("nothing");
   await page.getByRole("button", { name: "Add the edition" }).click();
-  await expect(page.getByLabel("Name", { exact: true })).toHaveCount(2);
+  await expect(page.getByRole("textbox", { name: "Name", exact: true })).toHaveCount(2);
   await page.goto(address);
   await expect(page.getByRole("columnheader", { name: "Bare board" })).toBeVisible();
 });
@@ -211,7 +211,8 @@ for (const scheme of ["light", "dark"] as const)
 /** The parts page of the demonstration's Dew Lantern, with its list loaded. */
 async function dewLantern(page: Page): Promise<void> {
   await signIn(page, DESIGNER);
-  await page.getByRole("link", { name: "Dew Lantern", exact: true }).click();
+  const kit = page.getByRole("link", { name: "Dew Lantern", exact: true });
+  await page.goto(`${await kit.getAttribute("href")}/parts`);
   await expect(cell(page, 1, "part")).toBeVisible();
 }
 
