@@ -43,6 +43,7 @@ export function RunEvidence(props: EvidenceProps) {
   const { address, plan, run, sweep, columns, isPartial, may, opens } = props;
   const narrow = usePhone();
   const partial = isPartial ? withoutWords(sweep.needs) : null;
+  const anyKnown = columns.used.some((value) => value !== null);
   const shared = { plan, run, sweep, columns, narrow, opens, partial };
   return (
     <>
@@ -59,11 +60,13 @@ export function RunEvidence(props: EvidenceProps) {
           </>
         }
       >
-        <Compared {...props} partial={partial} />
+        {anyKnown ? <Compared {...props} partial={partial} /> : <NothingKnown />}
       </Pair>
-      <Pair note={<SweetSpotNotes plan={plan} sweep={sweep} run={run.kits} />}>
-        <CostSection {...shared} />
-      </Pair>
+      {anyKnown && (
+        <Pair note={<SweetSpotNotes plan={plan} sweep={sweep} run={run.kits} />}>
+          <CostSection {...shared} />
+        </Pair>
+      )}
       {columns.kept.some((value) => value !== null) ? (
         <Pair note={<EvenNotes plan={plan} sweep={sweep} run={run.kits} opens={opens} />}>
           <EvenSection {...shared} />
@@ -103,6 +106,14 @@ export function RunEvidence(props: EvidenceProps) {
         <LeftOverSection address={address} plan={plan} run={run} opens={opens} />
       </Pair>
     </>
+  );
+}
+
+function NothingKnown() {
+  return (
+    <Section title="What is still known">
+      <p className="type-note">Nothing yet: no run size can be worked out.</p>
+    </Section>
   );
 }
 
