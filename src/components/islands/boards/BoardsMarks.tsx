@@ -69,7 +69,7 @@ interface RunRingProps extends BoardsChartProps {
 }
 
 /** Below left of the ring, or above it where it stands too low. */
-function RunRing({ run, currency, value, x, y, foot }: RunRingProps) {
+function RunRing({ run, currency, narrow, value, x, y, foot }: RunRingProps) {
   const top = foot - y > 54 ? y + 24 : y - 34;
   return (
     <g>
@@ -77,7 +77,8 @@ function RunRing({ run, currency, value, x, y, foot }: RunRingProps) {
       <text y={top} {...LINE_NAME} textAnchor="end" fontWeight={700} fill={INK}>
         <tspan x={x - 8}>{run} kits</tspan>
         <tspan x={x - 8} dy={19}>
-          {moneyText(value, currency)} a board
+          {moneyText(value, currency)}
+          {narrow ? "" : " a board"}
         </tspan>
       </text>
     </g>
