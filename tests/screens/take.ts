@@ -40,7 +40,7 @@ async function take(
     const page = stranger ? outside : inside;
     const reply = await page.goto(path);
     await page.waitForLoadState("networkidle");
-    await page.waitForTimeout(400);
+    await page.waitForTimeout(1000);
     await page.screenshot({ path: `${FOLDER}/${name}-${width}-${theme}.png`, fullPage: true });
     console.log(`${name} ${width} ${theme}: ${reply?.status()}`);
   }

@@ -172,7 +172,7 @@ function boughtOf(row: GridRow | undefined): number {
 
 /** On a phone: who it is, how many, what, and what it costs; a line is opened to be edited. */
 const PHONE_WIDTHS: Partial<Record<ColumnKey, Partial<Def>>> = {
-  designators: { width: 88, wrapText: true },
+  designators: { width: 92, wrapText: true },
   part: { flex: 1, minWidth: 96, autoHeight: true },
   bands: { width: 64 },
   perKit: { width: 64 },

@@ -31,7 +31,7 @@ const ONE_LINE: Partial<Record<ColumnKey, number>> = {
 /** With two lines to a row the long ones need less. */
 const TWO_LINES: Partial<Record<ColumnKey, number>> = { part: 156, package: 104, supplier: 112 };
 
-const QUANTITY = 52;
+const QUANTITY = 51;
 /** The column of check boxes before the others. */
 export const CHECK_BOX = 32;
 
