@@ -28,6 +28,7 @@ export function sweepRuns(plan: Plan): SweepResult {
   const beyond = windowOf(to);
   const prepared = preparePlan(plan, beyond);
   const { swept, needs } = reckonAll(prepared, to, beyond);
+  const begun = plan.lines > 0;
   const complete = swept.missing.every((bits, kits) => bits === 0 || kits > to);
   return {
     currency: plan.currency,
@@ -35,8 +36,8 @@ export function sweepRuns(plan: Plan): SweepResult {
     columns: columnsOf(prepared, swept, true),
     without: complete ? null : columnsOf(prepared, swept, false),
     needs,
-    stepDowns: stepDowns(swept),
-    sweetSpots: sweetSpots(swept, beyond),
+    stepDowns: begun ? stepDowns(swept) : [],
+    sweetSpots: begun ? sweetSpots(swept, beyond) : [],
     breakEven: breakEvenOf(swept, plan.run.kits),
   };
 }

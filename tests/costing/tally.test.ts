@@ -76,7 +76,9 @@ describe("the figures of the strip", () => {
       ["no-parts", "parts"],
     ]);
     expect(run.problems[0]).toEqual({ code: "no-parts", at: {}, facts: {} });
-    expect(sweepRuns(quoted).columns.used.every((used) => used === null)).toBe(true);
+    const { columns, sweetSpots } = sweepRuns(quoted);
+    expect(columns.used.every((used) => used === null)).toBe(true);
+    expect(sweetSpots).toEqual([]);
     expect(costRun({ ...quoted, lines: 1 }).perKit.used).toEqual({ known: true, value: "2" });
   });
 });

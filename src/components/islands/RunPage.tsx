@@ -89,7 +89,7 @@ function Reckoned({ address, held, may }: ReckonedProps) {
             />
           </Pair>
         )}
-        <Evidence address={address} plan={plan} may={may} />
+        {plan.lines > 0 && <Evidence address={address} plan={plan} may={may} />}
         <Inputs address={address} held={held} run={run} may={may} />
         <div data-screen-only>
           <Pair>

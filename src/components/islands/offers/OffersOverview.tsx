@@ -10,7 +10,6 @@ import { Section } from "#src/components/islands/parts/Section.tsx";
 import { PAIRS } from "#src/components/page-look.ts";
 import { withoutWords } from "#src/costing/problem-words.ts";
 import type { OpenThing } from "#src/costing/to-settle.ts";
-import type { OfferPart } from "#src/server/kit-offers.ts";
 import { EveryOffer } from "./EveryOffer.tsx";
 import { type KitSupply, type KitSupplyProps, useKitSupply } from "./kit-supply.ts";
 import { LinesTable } from "./LinesTable.tsx";
@@ -104,9 +103,8 @@ function Lines({ supply, things }: { supply: KitSupply; things: readonly OpenThi
     ...offerNotes(supply).map(({ at }) => at.part),
     ...singleSourced(supply).map(({ id }) => id),
   ];
-  const isOpen = (part: OfferPart) => things.some(({ at }) => at.part === part.id);
-  const open = supply.parts.filter(isOpen);
-  const notes = supply.parts.filter((part) => noted.includes(part.id) && !isOpen(part));
+  const open = supply.parts.filter(({ id }) => things.some(({ at }) => at.part === id));
+  const notes = supply.parts.filter(({ id }) => noted.includes(id));
   const shown = filter === "all" ? supply.parts : filter === "open" ? open : notes;
   return (
     <Section

@@ -17,13 +17,17 @@ interface RunAnswerProps {
 
 /** The question, the run as a large figure with its bands, and the answer in a sentence or two. */
 export function RunAnswer({ address, run, opens }: RunAnswerProps) {
-  const known = run.perKit.used.known;
+  const { used } = run.perKit;
+  const { known } = used;
+  const begun = known || !used.needs.some(({ code }) => code === "no-parts");
   return (
     <AnswerHead address={address} kits={run.kits} pieces={runAnswer(answerFigures(run))}>
       {known && <Chip kind="good">{run.kits} is your chosen run</Chip>}
-      <a href="#runs" className={buttonLook("secondary", "small")}>
-        Compare other runs
-      </a>
+      {begun && (
+        <a href="#runs" className={buttonLook("secondary", "small")}>
+          Compare other runs
+        </a>
+      )}
       <a href="#inputs" className={buttonLook("secondary", "small")}>
         Change what it rests on
       </a>
