@@ -19,6 +19,8 @@ export interface Import {
   /** Package name, or path from the project's root. */
   target: string;
   typeOnly: boolean;
+  /** Fetched when that line runs, not with the file. */
+  onUse: boolean;
   written: string;
 }
 
@@ -42,6 +44,6 @@ export function importsOf({ path, text }: SourceFile): Import[] {
     const written = (match[2] ?? match[3]) as string;
     const before = text.slice(Math.max(0, (match.index ?? 0) - 12), match.index);
     const typeOnly = match[1] !== undefined || (match[3] !== undefined && !/await\s*$/.test(before));
-    return { target: resolve(path, written), typeOnly, written };
+    return { target: resolve(path, written), typeOnly, onUse: match[3] !== undefined, written };
   });
 }

@@ -1,7 +1,6 @@
 import { BOARDS_MOST } from "#src/costing/boards-to-order.ts";
 import type { MinorWorth } from "#src/costing/conversion.ts";
-import { exact } from "#src/costing/decimal.ts";
-import { GRAIN_PLACES, grains, scaled } from "#src/costing/grains.ts";
+import { GRAIN_PLACES, grains, grainText, scaled } from "#src/costing/grains.ts";
 import { type Ladder, prepareLadder } from "#src/costing/ladder.ts";
 import { toMinor } from "#src/costing/money.ts";
 import { divideUp } from "#src/costing/whole.ts";
@@ -63,7 +62,7 @@ function withDepanelling(
 ): LadderPrice["breaks"] {
   return breaks.map(({ quantity, price }) => {
     const boards = model === "lots" ? quantity * boardsPerPiece : boardsPerPiece;
-    return { quantity, price: exact(depanelling).times(boards).plus(price).toFixed() };
+    return { quantity, price: grainText(grains(depanelling) * BigInt(boards) + grains(price)) };
   });
 }
 
