@@ -2,6 +2,15 @@ import node from "@astrojs/node";
 import react from "@astrojs/react";
 import tailwindcss from "@tailwindcss/vite";
 import { defineConfig, passthroughImageService } from "astro/config";
+import { chunkOf } from "./chunks.mjs";
+import { readyScripts } from "./ready-scripts.mjs";
+
+/** Divides the scripts that browsers get; the server's are left as they are. */
+const divided = {
+  name: "divided-scripts",
+  config: (_, { isSsrBuild }) =>
+    isSsrBuild ? {} : { build: { rollupOptions: { output: { manualChunks: chunkOf(process.cwd()) } } } },
+};
 
 export default defineConfig({
   output: "server",
@@ -15,7 +24,7 @@ export default defineConfig({
   security: { checkOrigin: true, allowedDomains: [{}] },
   experimental: { csp: true },
   vite: {
-    plugins: [tailwindcss()],
+    plugins: [tailwindcss(), divided, readyScripts()],
     // Astro carries its own older zod; ours is bundled so that dev and build use the same one.
     ssr: { noExternal: ["zod"] },
     // Otherwise each write to the database reloads the page in development.

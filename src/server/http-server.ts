@@ -5,8 +5,10 @@ import {
   type Server,
   type ServerResponse,
 } from "node:http";
+import { fileURLToPath } from "node:url";
 import compression from "compression";
 import { type Config, listensOnLoopback } from "./config.ts";
+import { readyFiles } from "./ready-files.ts";
 
 /** No reply needs a request larger than this; each route has its own, smaller limit and counts as it reads. */
 const MOST_BYTES = 16 * 1024 * 1024;
@@ -60,13 +62,17 @@ function tooLarge(request: IncomingMessage, response: ServerResponse): boolean {
   return true;
 }
 
+const BUILT = fileURLToPath(new URL("../../dist/client/_astro/", import.meta.url));
+
 /** The HTTP server in front of Astro's handler: address settled, size capped, replies compressed. */
 export function httpServer(handler: RequestListener, config: Pick<Config, "origin" | "trustProxy">): Server {
   const compress = compression();
+  const sendReady = readyFiles(BUILT);
   const server = createServer((request, response) => {
     if (refusedName(request, response, config.origin)) return;
     settleAddress(request, config);
     if (tooLarge(request, response)) return;
+    if (sendReady(request, response)) return;
     compress(request as never, response as never, () => handler(request, response));
   });
   server.headersTimeout = HEADER_TIME;
