@@ -1,4 +1,4 @@
-import { boardQuoteBreaks, boardQuotes } from "#db/schema/boards.ts";
+import { boardQuoteBreaks, boardQuotes, panelTerms } from "#db/schema/boards.ts";
 import { kitGuests } from "#db/schema/guests.ts";
 import { editions, kits } from "#db/schema/kits.ts";
 import { lineQuantities, lines, partChoices, parts } from "#db/schema/parts.ts";
@@ -12,7 +12,7 @@ import { KITS } from "./kits.ts";
 import { PEOPLE, RATES, SUPPLIERS, WORKSHOP } from "./marsh-lane.ts";
 import { loadNews } from "./news.ts";
 import { PARTS } from "./parts.ts";
-import type { SeedKit, SeedOffer, SeedPart, SeedQuote, SeedSupplier } from "./seed-data.ts";
+import type { SeedKit, SeedOffer, SeedPanels, SeedPart, SeedQuote, SeedSupplier } from "./seed-data.ts";
 import { seedId, WORKSHOP_ID } from "./seed-id.ts";
 
 const DAY = 24 * 60 * 60 * 1000;
@@ -173,8 +173,39 @@ function loadLines(db: Db, kit: SeedKit, owner: Owner): void {
   }
 }
 
+/** Names a quote among others of its house. */
+function quoteId(kit: SeedKit, { boardHouse, panel }: SeedQuote): string {
+  return panel
+    ? seedId("quote", kit.name, boardHouse, String(panel.boards))
+    : seedId("quote", kit.name, boardHouse);
+}
+
+/** "250 × 200" as its two sides. */
+function sides(size: string): [width: string, height: string] {
+  const [width = "", height = ""] = size.split(" × ");
+  return [width, height];
+}
+
+function loadPanels(db: Db, kit: SeedKit, panels: SeedPanels, owner: Owner): void {
+  const { largest, least, ...terms } = panels;
+  const [largestWidth, largestHeight] = sides(largest);
+  const [leastWidth, leastHeight] = least ? sides(least) : [null, null];
+  db.insert(panelTerms)
+    .values({
+      id: seedId("panels", kit.name, panels.boardHouse),
+      ...owner,
+      ...terms,
+      largestWidth,
+      largestHeight,
+      leastWidth,
+      leastHeight,
+    })
+    .run();
+}
+
 function loadQuote(db: Db, kit: SeedKit, quote: SeedQuote, owner: Owner, now: number): void {
-  const id = seedId("quote", kit.name, quote.boardHouse);
+  const id = quoteId(kit, quote);
+  const [panelWidth, panelHeight] = quote.panel ? sides(quote.panel.size) : [null, null];
   db.insert(boardQuotes)
     .values({
       id,
@@ -183,6 +214,11 @@ function loadQuote(db: Db, kit: SeedKit, quote: SeedQuote, owner: Owner, now: nu
       currency: quote.currency,
       width: kit.board?.width ?? null,
       height: kit.board?.height ?? null,
+      boardsPerPanel: quote.panel?.boards ?? null,
+      panelWidth,
+      panelHeight,
+      depanelling: quote.panel?.depanelling ?? "0",
+      ...quote.formula,
       layers: quote.layers,
       finish: quote.finish,
       colour: quote.colour,
@@ -263,8 +299,9 @@ function loadKit(db: Db, kit: SeedKit, now: number): void {
       .run();
   loadLines(db, kit, owner);
   for (const quote of kit.quotes) loadQuote(db, kit, quote, owner, now);
+  for (const panels of kit.panels ?? []) loadPanels(db, kit, panels, owner);
   const chosen = kit.quotes.find((quote) => quote.chosen);
-  const chosenQuoteId = chosen ? seedId("quote", kit.name, chosen.boardHouse) : null;
+  const chosenQuoteId = chosen ? quoteId(kit, chosen) : null;
   db.insert(runPlans)
     .values({ ...owner, ...kit.run, chosenQuoteId })
     .run();

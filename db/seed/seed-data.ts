@@ -1,11 +1,14 @@
 import type {
+  AreaUnit,
   BoardPriceModel,
   BoardShape,
   FreightTerm,
   LineMark,
   PartClass,
   PriceModel,
+  RailSides,
   Role,
+  Separation,
   SmallOrderTerm,
   ValueUnit,
 } from "#src/shapes/limits.ts";
@@ -84,11 +87,26 @@ export interface SeedLine {
   note?: string;
 }
 
+/** What a board house makes panels like, in millimetres: "250 × 200". */
+export interface SeedPanels {
+  boardHouse: string;
+  largest: string;
+  least?: string;
+  separation: Separation;
+  gap: string;
+  railSides: RailSides;
+  railWidth: string;
+}
+
 export interface SeedQuote {
   boardHouse: string;
   currency: string;
+  /** Absent: single boards. `size` of the panel in millimetres: "238 × 144". */
+  panel?: { boards: number; size: string; depanelling: string };
   model: BoardPriceModel;
+  /** Empty for a formula. */
   breaks: string;
+  formula?: { setUp: string; areaRate: string; areaUnit: AreaUnit; perBoard: string };
   engineeringCharge?: string;
   stencilCharge?: string;
   freight: string | null;
@@ -110,6 +128,7 @@ export interface SeedKit {
   editions: readonly { name: string; weight: number; boardsPerKit: number; price: string | null }[];
   lines: readonly SeedLine[];
   quotes: readonly SeedQuote[];
+  panels?: readonly SeedPanels[];
   run: {
     kits: number;
     sweepTo: number;

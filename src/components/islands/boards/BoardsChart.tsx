@@ -19,23 +19,16 @@ export interface BoardsChartProps extends BoardsPoints {
   currency: string;
 }
 
-/** Names stand at the ends of their lines; a longer one is cut. */
-const NAME_MOST = 16;
-
 /** Lines that are not chosen are told apart by their dashes too. */
 const DASHES = [undefined, "10 4", "3 3", "12 4 3 4"];
 
-export function shortName(name: string): string {
-  return name.length > NAME_MOST ? `${name.slice(0, NAME_MOST - 2)} …` : name;
-}
-
-/** Landed cost of one board in a kit by run size, a line for each board house. */
+/** Landed cost of one board in a kit by run size, a line for each quote. */
 export default function BoardsChart(props: BoardsChartProps) {
   const { lines, points, span, run, width, height, narrow, currency } = props;
   const top = boardsTop(props, run);
   const ticks = roundTicks(0, top, 6);
   const others = lines.flatMap(({ id, chosen }) => (chosen ? [] : [id]));
-  const names = nameWidth("", ...lines.map(({ name }) => shortName(name)));
+  const names = nameWidth("", ...lines.map(({ label }) => label));
   return (
     <LineChart
       {...{ width, height }}

@@ -2,7 +2,7 @@ import { usePlotArea } from "recharts";
 import { moneyText } from "#src/components/amount-text.ts";
 import { INK, INK_2, LINE_NAME, RUN_RING } from "#src/components/islands/chart-theme.ts";
 import { usePixels } from "#src/components/islands/charts/pixels.ts";
-import { type BoardsChartProps, shortName } from "./BoardsChart.tsx";
+import type { BoardsChartProps } from "./BoardsChart.tsx";
 
 /** Two names one below the other. */
 const APART = 20;
@@ -23,7 +23,7 @@ export function apart(wanted: readonly number[], foot: number): number[] {
   return order.sort((one, other) => one.place - other.place).map(({ y }) => y);
 }
 
-/** The ring of the run with what a board costs there, and each house's name at the end of its line. */
+/** The ring of the run with what a board costs there, and each quote's name at the end of its line. */
 export function BoardsMarks(props: BoardsChartProps) {
   const pixels = usePixels();
   const plot = usePlotArea();
@@ -42,7 +42,7 @@ export function BoardsMarks(props: BoardsChartProps) {
   const value = chosen && at?.exact[chosen.id];
   return (
     <g>
-      {ends.map(({ line: { id, name, chosen: first } }, place) => (
+      {ends.map(({ line: { id, label, chosen: first } }, place) => (
         <text
           key={id}
           x={plot.x + plot.width + 8}
@@ -51,7 +51,7 @@ export function BoardsMarks(props: BoardsChartProps) {
           fill={first ? INK : INK_2}
           fontWeight={first ? 600 : 400}
         >
-          {shortName(name)}
+          {label}
         </text>
       ))}
       {value && (

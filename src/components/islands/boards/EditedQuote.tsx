@@ -5,10 +5,11 @@ import { Button } from "#src/components/islands/parts/Button.tsx";
 import { Dialog } from "#src/components/islands/parts/Dialog.tsx";
 import { showToast } from "#src/components/islands/parts/toasts.ts";
 import type { BoardQuoteView } from "#src/server/board-changes.ts";
+import { quoteName } from "./board-words.ts";
 import { QuoteForm } from "./QuoteForm.tsx";
 import { changeQuote, removeQuote } from "./quotes-store.ts";
 
-interface EditedQuoteProps {
+export interface EditedQuoteProps {
   address: KitAddress;
   quote: BoardQuoteView;
   onDone: () => void;
@@ -45,7 +46,7 @@ export function EditedQuote({ address, quote, onDone }: EditedQuoteProps) {
       </Button>
       <Dialog
         open={asking}
-        title={`Remove the quote of ${quote.boardHouse}?`}
+        title={`Remove the quote of ${quoteName({ ...quote, boardsPerPiece: quote.boardsPerPanel ?? 1 })}?`}
         safe={{ label: "Keep it", run: () => setAsking(false) }}
         act={{ label: "Remove it", removes: true, run: () => void remove() }}
       >

@@ -13,12 +13,14 @@ export function NextLots({ plan, boards }: { plan: Plan; boards: BoardsResult })
   const free = chosen.ordered - boards.toOrder;
   const rows = nextBoards(quote, chosen.ordered, 3);
   const { currency } = quote;
+  const panelled = quote.boardsPerPanel !== null;
   const columns: Column<NextBoards>[] = [
     {
       key: "ordered",
       head: "Order instead",
       names: true,
-      cell: ({ ordered }) => countText(ordered),
+      cell: ({ ordered, pieces }) =>
+        panelled ? `${countText(pieces)} panels, ${countText(ordered)}` : countText(ordered),
     },
     { key: "more", head: "More boards", number: true, cell: ({ more }) => countText(more) },
     {

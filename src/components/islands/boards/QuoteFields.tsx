@@ -5,17 +5,11 @@ import { MeasureField } from "#src/components/islands/parts/MeasureField.tsx";
 import { MoneyField } from "#src/components/islands/parts/MoneyField.tsx";
 import { TextField } from "#src/components/islands/parts/TextField.tsx";
 import { CURRENCY_CHOICES } from "#src/components/islands/supply/currency-choices.ts";
-import type { BoardPriceModel } from "#src/shapes/limits.ts";
 import type { QuoteDraft } from "./quote-draft.ts";
-
-const MODELS: readonly { value: BoardPriceModel; label: string }[] = [
-  { value: "lots", label: "Lots at a fixed price" },
-  { value: "whole-order", label: "Each board, at the break reached" },
-];
 
 const ROW = "grid gap-x-6 gap-y-5 tablet:grid-cols-2 desktop:grid-cols-4";
 
-/** Who quotes, in what currency, how it is sold and how soon it is here. */
+/** Who quotes, in what currency, and how soon it is here. */
 export function WhoFields({ form: { fields, set, words } }: { form: Form<QuoteDraft> }) {
   return (
     <div className={ROW}>
@@ -32,13 +26,6 @@ export function WhoFields({ form: { fields, set, words } }: { form: Form<QuoteDr
         choices={CURRENCY_CHOICES}
         value={fields.currency}
         onChange={(change) => set({ currency: change.currentTarget.value })}
-      />
-      <ChoiceField
-        label="Boards are sold as"
-        {...words("priceModel")}
-        choices={MODELS}
-        value={fields.priceModel}
-        onChange={(change) => set({ priceModel: change.currentTarget.value as BoardPriceModel })}
       />
       <MeasureField
         label="Made and sent in"

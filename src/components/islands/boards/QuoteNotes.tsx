@@ -5,6 +5,7 @@ import { useOpens } from "#src/components/islands/plan/open-working.ts";
 import { problemSentence } from "#src/costing/problem-words.ts";
 import type { QuoteResult, RunResult } from "#src/costing/run-result.ts";
 import type { Plan } from "#src/shapes/plan.ts";
+import { quoteName } from "./board-words.ts";
 
 /** What the chosen quote is made of, and what the reckoning has to say about the others. */
 export function QuoteNotes({ plan, run }: { plan: Plan; run: RunResult }) {
@@ -33,7 +34,7 @@ interface MadeOfProps {
 }
 
 function MadeOf({ chosen, open, onOpen, controls }: MadeOfProps) {
-  const { currency, ordered, boards, engineering, stencil, freight } = chosen;
+  const { currency, pieces, boardsPerPiece, boards, engineering, stencil, freight } = chosen;
   const charges = [
     ["engineering", engineering],
     ["stencil", stencil],
@@ -42,13 +43,16 @@ function MadeOf({ chosen, open, onOpen, controls }: MadeOfProps) {
   const charged = charges.filter(([, amount]) => /[1-9]/.test(amount));
   const words = charged.map(([name, amount]) => `${name} ${moneyText(amount, currency)}`);
   return (
-    <MarginNote title={`${chosen.boardHouse}, landed`}>
+    <MarginNote title={`${quoteName(chosen)}, landed`}>
       <p>
-        {[`${countText(ordered ?? 0)} boards ${moneyText(boards ?? "0", currency)}`, ...words].join(", ")}
+        {[
+          `${countText(pieces ?? 0)} ${boardsPerPiece > 1 ? "panels" : "boards"} ${moneyText(boards ?? "0", currency)}`,
+          ...words,
+        ].join(", ")}
         {freight === null ? "; freight is not known" : ""}.
       </p>
       <ShowWorking
-        of={`the quote of ${chosen.boardHouse}`}
+        of={`the quote of ${quoteName(chosen)}`}
         open={open}
         onClick={onOpen}
         aria-controls={open ? controls : undefined}

@@ -10,7 +10,7 @@ import { CELL, NUMBER, rowLook } from "#src/components/table-look.ts";
 import { needWords } from "#src/costing/problem-words.ts";
 import type { QuoteResult } from "#src/costing/run-result.ts";
 import type { BoardQuoteView } from "#src/server/board-changes.ts";
-import { boardWords, orderWords, quoteMark } from "./board-words.ts";
+import { boardWords, orderWords, quoteMark, quoteName } from "./board-words.ts";
 
 /** A quote with what the reckoning makes of it at this run. */
 export interface QuoteRow {
@@ -69,6 +69,7 @@ function Row({
   onEdit,
 }: QuoteTableProps & { row: QuoteRow }) {
   const opens = useOpens();
+  const name = quoteName(result);
   const mark = quoteMark(quote, result, today);
   const state = (
     <>
@@ -76,7 +77,7 @@ function Row({
         {mark.word}
       </Chip>
       {canChange && (
-        <QuietButton onClick={() => onEdit(quote)} aria-label={`Change the quote of ${quote.boardHouse}`}>
+        <QuietButton onClick={() => onEdit(quote)} aria-label={`Change the quote of ${name}`}>
           Change
         </QuietButton>
       )}
@@ -91,10 +92,15 @@ function Row({
               name="quote"
               checked={chosen === quote.id}
               onChange={() => onChoose(quote.id)}
-              aria-label={`Always ${quote.boardHouse}`}
+              aria-label={`Always ${name}`}
             />
           )}
-          {quote.boardHouse}
+          <span>
+            {quote.boardHouse}
+            {result.boardsPerPiece > 1 && (
+              <span className="type-label block font-normal">{`panels of ${countText(result.boardsPerPiece)}`}</span>
+            )}
+          </span>
         </span>
         <span className="mt-1 flex flex-wrap items-center gap-x-4 pl-[34px] tablet:hidden">{state}</span>
       </th>
@@ -105,7 +111,7 @@ function Row({
       <td className={`${CELL} ${NUMBER}`}>
         {result.landed.known ? (
           <Figure
-            label={`${quote.boardHouse}, landed`}
+            label={`${name}, landed`}
             value={moneyText(result.landed.value, reporting)}
             {...opens(`quote:${quote.id}`)}
           />

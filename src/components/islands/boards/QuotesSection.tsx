@@ -1,25 +1,36 @@
-import { useState } from "react";
+import { lazy, Suspense, useState } from "react";
 import { countText } from "#src/components/amount-text.ts";
 import { Button } from "#src/components/islands/parts/Button.tsx";
+import { Later } from "#src/components/islands/parts/Later.tsx";
+import { Loading } from "#src/components/islands/parts/Loading.tsx";
+import { laterPart } from "#src/components/islands/parts/later-part.ts";
 import { Pair } from "#src/components/islands/parts/Pair.tsx";
 import { Section } from "#src/components/islands/parts/Section.tsx";
 import { editField } from "#src/components/islands/plan/edit-plan.ts";
 import type { QuoteResult, RunResult } from "#src/costing/run-result.ts";
 import type { BoardQuoteView } from "#src/server/board-changes.ts";
+import type { BoardQuoteFields } from "#src/shapes/board-quote.ts";
 import type { Plan } from "#src/shapes/plan.ts";
-import type { BoardsProps } from "./Boards.tsx";
-import { EditedQuote } from "./EditedQuote.tsx";
-import { QuoteForm } from "./QuoteForm.tsx";
+import type { BegunQuote, BoardsProps } from "./Boards.tsx";
+import { quoteName } from "./board-words.ts";
+import type { EditedQuoteProps } from "./EditedQuote.tsx";
 import { QuoteNotes } from "./QuoteNotes.tsx";
 import { type QuoteRow, QuoteTable } from "./QuoteTable.tsx";
 import { blankQuote } from "./quote-draft.ts";
 import { addQuote } from "./quotes-store.ts";
+
+/** A board without quotes begins with the form, so the server draws it too. */
+const QuoteForm = lazy(async () => ({ default: (await import("./QuoteForm.tsx")).QuoteForm }));
+const EditedQuote = laterPart<EditedQuoteProps>(async () => (await import("./EditedQuote.tsx")).EditedQuote);
 
 interface QuotesProps {
   props: BoardsProps;
   plan: Plan;
   run: RunResult;
   quotes: readonly BoardQuoteView[];
+  /** A quote that is being written down, with what was known of it; null: none. */
+  begun: BegunQuote | null;
+  onBegin: (known: Partial<BoardQuoteFields> | null) => void;
 }
 
 /** The cheapest first; what cannot be used comes last. */
@@ -33,12 +44,15 @@ function rowsOf(run: RunResult, quotes: readonly BoardQuoteView[]): QuoteRow[] {
 }
 
 /** Board houses side by side, and the forms to add a quote or change one. */
-export function QuotesSection({ props, plan, run, quotes }: QuotesProps) {
+export function QuotesSection({ props, plan, run, quotes, begun, onBegin }: QuotesProps) {
   const { address, today, canChange, canChoose } = props;
-  const [open, setOpen] = useState<"new" | string | null>(quotes.length === 0 && canChange ? "new" : null);
+  const [open, setOpen] = useState<string | null>(null);
   const rows = rowsOf(run, quotes);
-  const edited = quotes.find(({ id }) => id === open);
-  const nameOf = (id: unknown) => quotes.find((quote) => quote.id === id)?.boardHouse;
+  const edited = begun ? undefined : quotes.find(({ id }) => id === open);
+  const nameOf = (id: unknown) => {
+    const found = run.boards.quotes.find((quote) => quote.id === id);
+    return found && quoteName(found);
+  };
   const choose = (quote: string | null) =>
     editField(address, {
       row: { kind: "run" },
@@ -47,7 +61,10 @@ export function QuotesSection({ props, plan, run, quotes }: QuotesProps) {
       name: () =>
         quote === null ? "Boards: the cheapest quote is taken." : `Boards: always from ${nameOf(quote)}.`,
     });
-  const close = () => setOpen(null);
+  const close = () => {
+    setOpen(null);
+    onBegin(null);
+  };
   return (
     <Pair note={<QuoteNotes {...{ plan, run }} />}>
       <Section
@@ -56,34 +73,49 @@ export function QuotesSection({ props, plan, run, quotes }: QuotesProps) {
         id="quotes"
         actions={
           canChange && (
-            <Button size="small" onClick={() => setOpen("new")}>
+            <Button size="small" onClick={() => onBegin({})}>
               Add a quote
             </Button>
           )
         }
       >
-        {open === "new" && (
+        {begun && (
           <div className="mb-6 border-l-4 border-petrol pl-5">
-            <QuoteForm
-              first={blankQuote(plan.currency, today, props.width, props.height)}
-              version={0}
-              action="Add the quote"
-              onLeave={quotes.length > 0 ? close : undefined}
-              onSave={async (fields) => {
-                await addQuote(address, fields);
-                close();
-              }}
-            />
+            <Suspense fallback={<Loading what="A quote" rows={8} />}>
+              <QuoteForm
+                key={begun.key}
+                first={{ ...blankQuote(plan.currency, today, props.width, props.height), ...begun.known }}
+                takesFocus={begun.key > 0}
+                version={0}
+                action="Add the quote"
+                onLeave={quotes.length > 0 ? close : undefined}
+                onSave={async (fields) => {
+                  await addQuote(address, fields);
+                  close();
+                }}
+              />
+            </Suspense>
           </div>
         )}
-        {edited && <EditedQuote key={edited.id} address={address} quote={edited} onDone={close} />}
+        {edited && (
+          <Later
+            key={edited.id}
+            part={EditedQuote}
+            give={{ address, quote: edited, onDone: close }}
+            what={`The quote of ${edited.boardHouse}`}
+            rows={8}
+          />
+        )}
         {rows.length > 0 && (
           <QuoteTable
             {...{ rows, today, canChoose, canChange }}
             chosen={plan.boards.chosenQuote}
             reporting={plan.currency}
             onChoose={choose}
-            onEdit={({ id }) => setOpen(id)}
+            onEdit={({ id }) => {
+              close();
+              setOpen(id);
+            }}
           />
         )}
         {rows.length === 0 && !canChange && <p className="type-note py-3">Nobody has quoted yet.</p>}

@@ -4,11 +4,14 @@ import { boardsByRun } from "#src/costing/boards-by-run.ts";
 import { exact } from "#src/costing/decimal.ts";
 import type { QuoteResult } from "#src/costing/run-result.ts";
 import type { Plan } from "#src/shapes/plan.ts";
+import { quoteName } from "./board-words.ts";
 
 /** A quote as a line of the chart. */
 export interface QuoteLine {
   id: string;
   name: string;
+  /** The name as it stands at the end of the line: "Kilnside × 12" for panels of 12. */
+  label: string;
   /** Its boards are taken at the chosen run. */
   chosen: boolean;
 }
@@ -30,6 +33,15 @@ export interface BoardsPoints {
   points: readonly BoardsPoint[];
 }
 
+/** A longer name at the end of a line is cut. */
+const LABEL_MOST = 16;
+
+function lineLabel({ boardHouse, boardsPerPiece }: QuoteResult): string {
+  const tail = boardsPerPiece === 1 ? "" : ` × ${boardsPerPiece}`;
+  const room = LABEL_MOST - tail.length;
+  return `${boardHouse.length > room ? `${boardHouse.slice(0, room - 2)} …` : boardHouse}${tail}`;
+}
+
 /** A board that gets dearer by more than this share from one kit to the next steps up. */
 const STEP = 0.03;
 
@@ -45,10 +57,11 @@ function leastOf(quotes: readonly QuoteResult[]): string | null {
 export function boardsPoints(plan: Plan, { from, to }: { from: number; to: number }): BoardsPoints {
   const runs = boardsByRun(plan, from, to);
   const [at] = boardsByRun(plan, plan.run.kits, plan.run.kits);
-  const lines = (at?.boards.quotes ?? []).map(({ id, boardHouse, chosen }) => ({
-    id,
-    name: boardHouse,
-    chosen,
+  const lines = (at?.boards.quotes ?? []).map((quote) => ({
+    id: quote.id,
+    name: quoteName(quote),
+    label: lineLabel(quote),
+    chosen: quote.chosen,
   }));
   const bare = runs.map(({ kits, boards: { quotes } }) => {
     const known = quotes.map(({ id, perBoard }) => [id, perBoard.known ? perBoard.value : null] as const);

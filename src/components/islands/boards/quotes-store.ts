@@ -9,8 +9,8 @@ import type { GET } from "#src/pages/api/workshops/[workshop]/kits/[kit]/boards.
 import type { BoardQuoteView, BoardsView } from "#src/server/board-changes.ts";
 import type { BoardQuoteFields } from "#src/shapes/board-quote.ts";
 
-/** The kit's quotes as this screen has them; `first` came with the page. */
-export function useQuotes(address: KitAddress, first: BoardsView): BoardQuoteView[] {
+/** The kit's quotes and panel terms as this screen has them; `first` came with the page. */
+export function useBoards(address: KitAddress, first: BoardsView): BoardsView {
   const { data } = useQuery(
     {
       queryKey: kitKeys.boards(address.kit),
@@ -19,16 +19,18 @@ export function useQuotes(address: KitAddress, first: BoardsView): BoardQuoteVie
     },
     pageCache(),
   );
-  return data.quotes;
+  return data;
+}
+
+/** Puts what was saved into what this screen has; the plan is fetched anew. */
+export function holdBoards(address: KitAddress, how: (boards: BoardsView) => BoardsView): void {
+  queryClient.setQueryData<BoardsView>(kitKeys.boards(address.kit), (held) => held && how(held));
+  saving.change((now) => ({ ...now, savedAt: Date.now(), lostAt: null }));
+  void queryClient.invalidateQueries({ queryKey: kitKeys.plan(address.kit) });
 }
 
 function hold(address: KitAddress, how: (quotes: BoardQuoteView[]) => BoardQuoteView[]): void {
-  queryClient.setQueryData<BoardsView>(
-    kitKeys.boards(address.kit),
-    (held) => held && { ...held, quotes: how(held.quotes) },
-  );
-  saving.change((now) => ({ ...now, savedAt: Date.now(), lostAt: null }));
-  void queryClient.invalidateQueries({ queryKey: kitKeys.plan(address.kit) });
+  holdBoards(address, (boards) => ({ ...boards, quotes: how(boards.quotes) }));
 }
 
 /** Adds a quote. @throws CallFailed */
