@@ -31,5 +31,5 @@ it("says in the cells only that a figure is not known, and below once what is ne
   expect(cells("Full kit")).toEqual(["5", "not set", "not known", "not known", "not known", "not known"]);
   expect(cells("Bare board").slice(2)).toEqual(["€5.00", "not known", "not known", "not known"]);
   expect(cells("Later").slice(2)).toEqual(["€5.00", "–", "–", "–"]);
-  expect(screen.getByText(/^Not known:/).textContent).toBe("Not known: needs a price; needs 2 prices.");
+  expect(screen.getByText(/^Not known yet:/).textContent).toBe("Not known yet: needs a price and 2 prices.");
 });

@@ -1,4 +1,5 @@
 import { countText, moneyText } from "#src/components/amount-text.ts";
+import { listed } from "#src/components/count-words.ts";
 import { Figure } from "#src/components/islands/parts/Figure.tsx";
 import { Section } from "#src/components/islands/parts/Section.tsx";
 import { type Column, Table } from "#src/components/islands/parts/Table.tsx";
@@ -18,7 +19,7 @@ export function EditionsSection({ run, opens }: { run: RunResult; opens: ReturnT
     figure.known ? (
       <Figure label={label} value={moneyText(figure.value, currency)} {...(figureId && opens(figureId))} />
     ) : (
-      <span className="text-ink-2">{unknownWord(figure.needs)}</span>
+      <span className="whitespace-normal text-ink-2">{unknownWord(figure.needs)}</span>
     );
   const columns: Column<EditionResult>[] = [
     { key: "name", head: "Edition", names: true, cell: ({ name }) => name },
@@ -81,7 +82,11 @@ function unknownWord(needs: readonly Need[]): string {
   return needs.every(({ code }) => code === "not-in-run") ? "–" : "not known";
 }
 
-/** What the figures that are not known wait for, once for all of them: "Not known: needs 2 prices; needs the tax rate." */
+/** What the figures that are not known wait for, once for all of them: "Not known yet: needs 2 prices and the tax rate." */
 function notKnownWords(needs: readonly Need[]): string {
-  return `Not known: ${needs.map((one) => needWords([one])).join("; ")}.`;
+  const words = needs.map((one) => needWords([one]));
+  const wanted = words.filter((word) => word.startsWith("needs ")).map((word) => word.slice(6));
+  const others = words.filter((word) => !word.startsWith("needs "));
+  const all = [...(wanted.length > 0 ? [`needs ${listed(wanted)}`] : []), ...others];
+  return `Not known yet: ${all.join("; ")}.`;
 }
