@@ -1,7 +1,9 @@
 import { basketBill } from "./basket-bill.ts";
 import { type Column, columnsAt } from "./columns.ts";
 import { type Baskets, basketsOf, type HeldPlan } from "./held-plan.ts";
+import { searchManySets } from "./many-sets.ts";
 import type { Market } from "./market.ts";
+import { nearSet } from "./near-set.ts";
 import { choicesWithin, emptyLines, relaxChoices } from "./node-choices.ts";
 import { addNode, emptyQueue } from "./node-queue.ts";
 import { plainPrices } from "./prices.ts";
@@ -9,6 +11,9 @@ import { offerPlan, type Search, type SearchLimits, startSearch } from "./search
 import { searchNodes } from "./search-nodes.ts";
 import { evaluate } from "./set-node.ts";
 import { nodeOf, searchSets, setKey } from "./supplier-sets.ts";
+
+/** Suppliers up to which all sets are gone through one by one. */
+const FEW_SUPPLIERS = 10;
 
 /**
  * The best plan of a market, proven unless work ran out. `before`: the best plan of a market much like it, such as
@@ -22,7 +27,8 @@ export function findPlan(market: Market, limits: SearchLimits, before: HeldPlan 
       (start.goods[b.reach.supplier] as number) * near(search, b) -
       (start.goods[a.reach.supplier] as number) * near(search, a),
   );
-  const first = columns.filter(({ reach }) => (start.lines[reach.supplier] as number) > 0);
+  const used = columns.filter(({ reach }) => (start.lines[reach.supplier] as number) > 0);
+  const first = before === null ? nearSet(columns, used, limits.mostParcels) : used;
   const queue = emptyQueue();
   let done: string | null = null;
   if (first.length >= limits.leastParcels && first.length <= limits.mostParcels) {
@@ -31,7 +37,8 @@ export function findPlan(market: Market, limits: SearchLimits, before: HeldPlan 
     addNode(queue, node);
     done = setKey(first);
   }
-  searchSets(search, queue, columns, done);
+  if (columns.length > FEW_SUPPLIERS) searchManySets(search, queue, columns);
+  else searchSets(search, queue, columns, done);
   searchNodes(search, queue);
   return search;
 }

@@ -56,7 +56,7 @@ function searchNode(search: Search, queue: NodeQueue, node: SetNode): void {
 }
 
 /** Evaluates a new node, and queues it unless it is beaten. */
-function queueNode(search: Search, queue: NodeQueue, node: SetNode): void {
+export function queueNode(search: Search, queue: NodeQueue, node: SetNode): void {
   evaluate(search, node);
   if (!isBeaten(search, node.bound)) addNode(queue, node);
 }

@@ -4,8 +4,8 @@ import { isBeaten, type Search, spend } from "./search.ts";
 import type { SetNode } from "./set-node.ts";
 
 /**
- * Queues the sets of suppliers that may hold the best plan: goes through them depth first, passing over every branch whose bound leaves no room for a better
- * plan: the least count of each part among the suppliers taken and those still to be decided, and the floors of
+ * Queues the sets of suppliers that may hold the best plan: goes through them depth first, passing over every branch
+ * whose bound leaves no room for a better plan: the least count of each part among the suppliers taken and those still to be decided, and the floors of
  * those taken (and, where they lie below nothing, of those still to be decided).
  *
  * @param done a set, as a list of suppliers ascending, that is in the queue already

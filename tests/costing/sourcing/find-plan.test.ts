@@ -1,36 +1,14 @@
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
-import { findPlan } from "#src/costing/sourcing/find-plan.ts";
-import { exactTotal, leftWorth } from "#src/costing/sourcing/held-plan.ts";
-import { marketOf, narrowed } from "#src/costing/sourcing/market.ts";
-import { EFFORT, type Effort } from "#src/costing/sourcing/search.ts";
-import type { SourcingInput, SourcingLimits } from "#src/costing/sourcing/sourcing-input.ts";
-import { type PlainPlan, plainBest } from "./plain-sourcing.ts";
+import type { Effort } from "#src/costing/sourcing/search.ts";
+import type { SourcingLimits } from "#src/costing/sourcing/sourcing-input.ts";
+import { foundPlan } from "./found-plan.ts";
+import { plainBest } from "./plain-sourcing.ts";
 import { sourcing } from "./random-sourcing.ts";
 
 /** Nothing followed, everything parted; and the other way round. */
 const PARTING: Effort = { dive: 1, wide: 0, narrow: 0, lines: 0 };
 const FOLLOWING: Effort = { dive: 1, wide: 1e9, narrow: 1e9, lines: 1e9 };
-
-function found(input: SourcingInput, limits: SourcingLimits = {}, effort = EFFORT): PlainPlan | null {
-  const market = narrowed(marketOf(input), limits.without ?? [], limits.latestDays ?? null);
-  const search = findPlan(
-    market,
-    { leastParcels: limits.leastParcels ?? 0, mostParcels: limits.mostParcels ?? 99, work: 1e6, effort },
-    null,
-  );
-  expect(search.unsearched).toBe(Number.POSITIVE_INFINITY);
-  if (search.best === null) return null;
-  const { unbought, freightUnknown, used, ways } = search.best;
-  return {
-    ways: [...ways].map((way, part) => (way < 0 ? -1 : way - (market.first[part] ?? 0))),
-    unbought,
-    freightUnknown,
-    used,
-    total: exactTotal(market, search.best),
-    left: leftWorth(market, ways),
-  };
-}
 
 const small = { suppliers: 3, parts: 4, ways: 4 };
 
@@ -46,9 +24,9 @@ describe("the best plan is the best of all choices, ties included", () => {
     fc.assert(
       fc.property(sourcing({ ...small, ...sizes }), (input) => {
         const best = plainBest(input);
-        expect(found(input)).toEqual(best);
-        expect(found(input, {}, PARTING)).toEqual(best);
-        expect(found(input, {}, FOLLOWING)).toEqual(best);
+        expect(foundPlan(input)).toEqual(best);
+        expect(foundPlan(input, {}, PARTING)).toEqual(best);
+        expect(foundPlan(input, {}, FOLLOWING)).toEqual(best);
       }),
       { numRuns: 1500 },
     );
@@ -65,7 +43,7 @@ describe("limits", () => {
   test.each([900, 6])("are kept at least cost, sums up to %i", (cost) => {
     fc.assert(
       fc.property(sourcing({ ...small, cost, gaps: true }), limits, (input, limit) => {
-        expect(found(input, limit)).toEqual(plainBest(input, limit));
+        expect(foundPlan(input, limit)).toEqual(plainBest(input, limit));
       }),
       { numRuns: 1500 },
     );

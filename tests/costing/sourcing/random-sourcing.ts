@@ -8,11 +8,16 @@ import { plan } from "#tests/costing/plans.ts";
 export interface Sizes {
   suppliers: number;
   parts: number;
+  partsLeast?: number;
   ways: number;
   /** Costs are at most this many minor units; small ones make ties and near ties. */
   cost: number;
+  /** Rates of duty and tax in whole percent, as general solvers need them. */
+  wholePercent?: boolean;
   /** Whether weights and lead times may be unknown, freight too, and orders refused. */
   gaps: boolean;
+  /** Whether orders may be refused although nothing else is missing. */
+  refusals?: boolean;
 }
 
 /** Decimals and odd rates: none, two, three decimals. */
@@ -53,12 +58,15 @@ function freight({ cost, gaps }: Sizes): fc.Arbitrary<FreightTerms> {
 
 function terms(sizes: Sizes): fc.Arbitrary<BasketTerms> {
   const { cost, gaps } = sizes;
+  const rates = sizes.wholePercent
+    ? { duty: [0, 30_000, 120_000], tax: [0, 200_000, 250_000] }
+    : { duty: [0, 27_000, 125_000, 370_001], tax: [0, 200_000, 255_000, 81_003] };
   return fc.record({
     minimum: fc.oneof(fc.constant(0), amount(2 * cost)),
     belowMinimum: fc.oneof(
       fc.constant({ term: "none" as const }),
       amount(cost / 2).map((fee) => ({ term: "fee" as const, fee })),
-      ...(gaps ? [fc.constant({ term: "refused" as const })] : []),
+      ...(gaps || sizes.refusals ? [fc.constant({ term: "refused" as const })] : []),
     ),
     freight: freight(sizes),
     freeFrom: fc.option(amount(3 * cost)),
@@ -66,9 +74,9 @@ function terms(sizes: Sizes): fc.Arbitrary<BasketTerms> {
     customs: fc.option(
       fc.record({
         withFreight: fc.boolean(),
-        dutyMillionths: fc.constantFrom(0, 27_000, 125_000, 370_001),
+        dutyMillionths: fc.constantFrom(...rates.duty),
         dutyOver: fc.oneof(fc.constant(0), amount(2 * cost)),
-        taxMillionths: fc.constantFrom(0, 200_000, 255_000, 81_003),
+        taxMillionths: fc.constantFrom(...rates.tax),
         taxReclaimed: fc.boolean(),
         broker: fc.oneof(fc.constant(0), amount(cost / 4)),
       }),
@@ -113,7 +121,7 @@ export function sourcing(sizes: Sizes): fc.Arbitrary<SourcingInput> {
     },
   );
   const parts = fc.array(fc.array(way(sizes), { minLength: sizes.gaps ? 0 : 1, maxLength: sizes.ways }), {
-    minLength: 0,
+    minLength: sizes.partsLeast ?? 0,
     maxLength: sizes.parts,
   });
   return fc.record({ suppliers, parts, oneCurrency: fc.boolean() }).map((made) => ({
