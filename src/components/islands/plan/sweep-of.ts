@@ -5,8 +5,12 @@ import type { Plan } from "#src/shapes/plan.ts";
 import type { SweepDone, SweepOrder } from "./costing.worker.ts";
 import { moduleStore } from "./module-store.ts";
 
-/** A frame; where a sweep took longer, the worker does the next. */
+/** A frame; where sweeps keep taking longer, the worker does the next. */
 const FRAME_MS = 16;
+/** The first sweeps of a page are slow while the browser still compiles them; so many in a row are no chance. */
+const SLOW_IN_A_ROW = 3;
+/** One sweep that holds the page up so long is enough. */
+const TOO_LONG_MS = 100;
 /** Before anything was timed: parts times run sizes that surely fit into a frame. */
 const SURELY_QUICK = 20_000;
 /** Waiting that is shorter than this is not shown. */
@@ -34,7 +38,8 @@ let busy = false;
 let noticed: ReturnType<typeof setTimeout> | undefined;
 /** The last sweep of all, wherever it was reckoned. */
 let last: { plan: Plan; sweep: SweepResult } | null = null;
-let tookMs: number | null = null;
+/** How many sweeps in a row took longer than a frame; none was timed yet: null. */
+let slow: number | null = null;
 
 /** Whether two plans differ at most in the size of the run, on which no other run size depends. */
 function sameButRun(one: Plan, other: Plan): boolean {
@@ -51,7 +56,13 @@ function forRun(sweep: SweepResult, plan: Plan): SweepResult {
 }
 
 function isQuick(plan: Plan): boolean {
-  return tookMs === null ? (plan.parts.length + 1) * plan.run.sweepTo < SURELY_QUICK : tookMs < FRAME_MS;
+  if (slow === null) return (plan.parts.length + 1) * plan.run.sweepTo < SURELY_QUICK;
+  return slow < SLOW_IN_A_ROW;
+}
+
+function timed(tookMs: number): void {
+  if (tookMs < FRAME_MS) slow = 0;
+  else slow = tookMs > TOO_LONG_MS ? SLOW_IN_A_ROW : (slow ?? 0) + 1;
 }
 
 /**
@@ -64,7 +75,7 @@ export function sweepAtOnce(plan: Plan): SweepResult | null {
   else if (isQuick(plan)) {
     const began = performance.now();
     last = { plan, sweep: sweepRuns(plan) };
-    tookMs = performance.now() - began;
+    timed(performance.now() - began);
   } else return null;
   return last.sweep;
 }
