@@ -34,7 +34,7 @@ async function money(page: Page, label: string, amount: string): Promise<void> {
   await field.press("Tab");
 }
 
-/** A workshop of its own, whose name comes after the demonstration's: signing in still leads there first. */
+/** A workshop of its own, with nothing in it. */
 async function makeWorkshopAndKit(page: Page): Promise<string> {
   await page.goto("/workshops/new");
   await page.getByLabel("Name of the workshop").fill("Pier Workshop");
