@@ -10,7 +10,7 @@ export interface Alternatives {
   byParcels: SourcingResult[];
   /** The cheapest of those with the fewest parcels that buy as many parts as the best plan; null: none does. */
   fewest: SourcingResult | null;
-  /** The cheapest of those that arrive soonest and buy as many parts; null: too many lead times are not known. */
+  /** The cheapest of those that arrive soonest and buy as many parts; null: too many lead times are not known, or nothing is bought. */
   soonest: { days: number; result: SourcingResult } | null;
   /** For each supplier of the best plan, by index: the best plan without it. */
   without: { supplier: number; result: SourcingResult }[];
@@ -49,6 +49,7 @@ function soonest(
   best: SourcingPlan,
   search: (more: SourcingLimits) => SourcingResult,
 ): Alternatives["soonest"] {
+  if (best.baskets.length === 0) return null;
   const known = [...market.leadDays].filter((days) => !Number.isNaN(days));
   const days = [...new Set(known)].sort((a, b) => a - b);
   let [low, high] = [0, days.length - 1];
