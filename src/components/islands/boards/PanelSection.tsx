@@ -1,5 +1,5 @@
 import { useMemo, useState } from "react";
-import type { BoardPicture } from "#src/components/board-picture.ts";
+import { type BoardPicture, boardInWords } from "#src/components/board-picture.ts";
 import { type KitAddress, kitPath } from "#src/components/islands/kit-address.ts";
 import { Button } from "#src/components/islands/parts/Button.tsx";
 import { FilterGroup } from "#src/components/islands/parts/FilterGroup.tsx";
@@ -96,7 +96,9 @@ export function PanelSection(props: PanelSectionProps) {
 function asideOf({ boards: { size, panelTerms } }: Plan, house: string | null): string {
   const of = panelTerms.find(({ boardHouse }) => boardHouse === house);
   const words = [
-    size ? `board ${size.width} × ${size.height}\u00a0mm` : "",
+    size
+      ? `board ${boardInWords({ shape: size.shape, widthMm: Number(size.width), heightMm: Number(size.height) })}`
+      : "",
     of ? `largest panel at ${of.boardHouse} ${of.largest.width} × ${of.largest.height}\u00a0mm` : "",
   ];
   return words.filter(Boolean).join(", ");

@@ -11,8 +11,8 @@ import type { PanelTermsFields } from "#src/shapes/panel-terms.ts";
 import { type PanelTermsDraft, termsFields } from "./panel-terms-draft.ts";
 
 const SEPARATED: readonly { value: Separation; label: string }[] = [
-  { value: "routed", label: "Routing, with breaking tabs" },
-  { value: "v-score", label: "V-scores, edge to edge" },
+  { value: "routed", label: "Routing and tabs" },
+  { value: "v-score", label: "V-scoring" },
 ];
 
 const RAILS: readonly { value: RailSides; label: string }[] = [

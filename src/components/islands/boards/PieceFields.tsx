@@ -13,14 +13,12 @@ const COME = [
   { value: "panels", label: "In panels" },
 ] as const;
 
-/** How a house sells what it makes; one piece is a board or a panel. */
-function models(panelled: boolean): readonly { value: BoardPriceModel; label: string }[] {
-  return [
-    { value: "lots", label: "Lots at a fixed price" },
-    { value: "whole-order", label: `Each ${panelled ? "panel" : "board"}, at the break reached` },
-    { value: "formula", label: "By a formula: area and boards" },
-  ];
-}
+/** How a house prices what it makes. */
+const MODELS: readonly { value: BoardPriceModel; label: string }[] = [
+  { value: "lots", label: "In lots" },
+  { value: "whole-order", label: "Each, by breaks" },
+  { value: "formula", label: "By formula" },
+];
 
 /** Whether boards come singly or in panels, of how many and what size, and how they are priced. */
 export function PieceFields({ form: { fields, set, words } }: { form: Form<QuoteDraft> }) {
@@ -44,9 +42,9 @@ export function PieceFields({ form: { fields, set, words } }: { form: Form<Quote
         onChange={(change) => set({ boardsPerPanel: change.currentTarget.value === "panels" ? "" : null })}
       />
       <ChoiceField
-        label="Sold as"
+        label="Sold"
         {...words("priceModel")}
-        choices={models(panelled)}
+        choices={MODELS}
         value={fields.priceModel}
         onChange={(change) => set({ priceModel: change.currentTarget.value as BoardPriceModel })}
       />

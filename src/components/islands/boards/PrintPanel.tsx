@@ -40,7 +40,7 @@ export function PrintPanel(props: PrintPanelProps) {
         offBecause={
           paper
             ? undefined
-            : `${sizeText(props.panel.outer)} do not fit on A4, so it cannot be printed at true scale.`
+            : `${sizeText(props.panel.outer)} do not fit on A4, so the panel cannot be printed at true scale.`
         }
       >
         Print 1:1

@@ -18,9 +18,11 @@ export function paysSentence({ first, safe }: PanelsPay, to: number): string {
   if (first === null) return `Single boards cost no more at any run up to ${end}.`;
   if (safe === first && first === 1) return `Panels cost less at every run up to ${end}.`;
   if (safe === first) return `Panels cost less from a run of ${countText(first)} on.`;
+  const begins =
+    first === 1 ? "Panels cost less at a run of 1" : `Panels first cost less at a run of ${countText(first)}`;
   const later =
     safe === null
       ? `but not at every run after it, as far as ${end}`
       : `and from ${countText(safe)} on at every run up to ${end}`;
-  return `Panels first cost less at a run of ${countText(first)}, ${later}.`;
+  return `${begins}, ${later}.`;
 }

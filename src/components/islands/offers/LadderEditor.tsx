@@ -46,6 +46,12 @@ function dearerAt({ breaks, priceModel }: LadderFields): ReadonlySet<number> {
   return new Set(found.filter(({ code }) => code === "price-rises").map(({ at }) => at));
 }
 
+/** "From", "A lot of panels", "From so many panels". */
+function columnHead(lots: boolean, things: string | undefined): string {
+  if (!things) return lots ? "A lot of" : "From";
+  return lots ? `A lot of ${things}` : `From so many ${things}`;
+}
+
 /** Focus goes to a field of a rung once it is there. */
 function useRungFocus() {
   const list = useRef<HTMLUListElement>(null);
@@ -91,7 +97,7 @@ export function LadderEditor<Fields extends LadderFields>({
     <fieldset>
       <legend className="type-table mb-2 font-semibold">{lots ? "Lots" : "Price breaks"}</legend>
       <div aria-hidden="true" className="type-label mb-1 flex gap-4 text-ink-2">
-        <span className="w-52 max-tablet:w-full">{[lots ? "A lot of" : "From", things].join(" ")}</span>
+        <span className="w-52 max-tablet:w-full">{columnHead(lots, things)}</span>
         <span className="max-tablet:hidden">{lots ? "costs" : "each costs"}</span>
       </div>
       <ul ref={list} className="flex flex-col gap-3">
