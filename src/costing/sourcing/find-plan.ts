@@ -5,11 +5,10 @@ import { searchManySets } from "./many-sets.ts";
 import type { Market } from "./market.ts";
 import { nearSet } from "./near-set.ts";
 import { choicesWithin, emptyLines, relaxChoices } from "./node-choices.ts";
-import { addNode, emptyQueue } from "./node-queue.ts";
+import { emptyQueue } from "./node-queue.ts";
 import { plainPrices } from "./prices.ts";
 import { offerPlan, type Search, type SearchLimits, startSearch } from "./search.ts";
-import { searchNodes } from "./search-nodes.ts";
-import { evaluate } from "./set-node.ts";
+import { searchNode, searchNodes } from "./search-nodes.ts";
 import { nodeOf, searchSets, setKey } from "./supplier-sets.ts";
 
 /** Suppliers up to which all sets are gone through one by one. */
@@ -33,8 +32,7 @@ export function findPlan(market: Market, limits: SearchLimits, before: HeldPlan 
   let done: string | null = null;
   if (first.length >= limits.leastParcels && first.length <= limits.mostParcels) {
     const node = nodeOf(first, Number.NEGATIVE_INFINITY);
-    evaluate(search, node);
-    addNode(queue, node);
+    searchNode(search, queue, node);
     done = setKey(first);
   }
   if (columns.length > FEW_SUPPLIERS) searchManySets(search, queue, columns);

@@ -20,16 +20,19 @@ export interface RelaxedLines {
   ways: Int32Array;
   /** By choice: what its least way counts for. */
   counts: Float64Array;
+  /** By place in the choices' ways: what each counts for. */
+  wayCounts: Float64Array;
   /** What all counts for together, settled parts included. */
   sum: number;
   baskets: Baskets;
 }
 
 /** Room for relaxed lines, to be filled again and again. */
-export function emptyLines({ parts, suppliers }: Market): RelaxedLines {
+export function emptyLines({ parts, suppliers, open }: Market): RelaxedLines {
   return {
     ways: new Int32Array(parts),
     counts: new Float64Array(parts),
+    wayCounts: new Float64Array(open.length),
     sum: 0,
     baskets: emptyBaskets(suppliers.length),
   };
@@ -37,17 +40,15 @@ export function emptyLines({ parts, suppliers }: Market): RelaxedLines {
 
 /** All open ways through suppliers of a set. */
 export function choicesWithin(market: Market, inSet: Uint8Array): NodeChoices {
-  const lines: ChoiceLine[] = [];
-  const settled = new Int32Array(market.parts).fill(-1);
+  const writer = startChoices(market, market.parts, market.open.length);
   for (let part = 0; part < market.parts; part += 1) {
     if (market.needed[part] === 0) continue;
-    const ways: number[] = [];
     const end = market.first[part + 1] as number;
     for (let way = market.first[part] as number; way < end; way += 1)
-      if (market.open[way] === 1 && isWithin(market, inSet, way)) ways.push(way);
-    lines.push({ part, ways });
+      if (market.open[way] === 1 && isWithin(market, inSet, way)) writer.ways[writer.count++] = way;
+    endLine(market, writer, part);
   }
-  return choicesOf(market, lines, settled, emptyBaskets(market.suppliers.length), 0);
+  return finished(writer);
 }
 
 function isWithin(market: Market, inSet: Uint8Array, way: number): boolean {
@@ -55,6 +56,93 @@ function isWithin(market: Market, inSet: Uint8Array, way: number): boolean {
   for (let at = market.orderFrom[way] as number; at < end; at += 1)
     if (inSet[market.supplier[at] as number] === 0) return false;
   return true;
+}
+
+/** Choices while they are written, line by line. */
+interface ChoiceWriter extends NodeChoices {
+  /** Lines written, and ways written so far. */
+  lines: number;
+  count: number;
+}
+
+function startChoices(market: Market, lines: number, ways: number): ChoiceWriter {
+  return {
+    parts: new Int32Array(lines),
+    from: new Int32Array(lines + 1),
+    ways: new Int32Array(ways),
+    settled: new Int32Array(market.parts).fill(-1),
+    baskets: emptyBaskets(market.suppliers.length),
+    unbought: 0,
+    lines: 0,
+    count: 0,
+  };
+}
+
+/** Ends the line of a part after its ways: one of one way, or none, is settled. True: it stays open. */
+function endLine(market: Market, writer: ChoiceWriter, part: number): boolean {
+  const from = writer.from[writer.lines] as number;
+  if (writer.count - from > 1) {
+    writer.parts[writer.lines++] = part;
+    writer.from[writer.lines] = writer.count;
+    return true;
+  }
+  if (writer.count === from) writer.unbought += 1;
+  else {
+    const only = writer.ways[from] as number;
+    writer.settled[part] = only;
+    putWay(market, only, writer.baskets);
+  }
+  writer.count = from;
+  return false;
+}
+
+function finished({
+  parts,
+  from,
+  ways,
+  lines,
+  count,
+  settled,
+  baskets,
+  unbought,
+}: ChoiceWriter): NodeChoices {
+  return {
+    parts: parts.slice(0, lines),
+    from: from.slice(0, lines + 1),
+    ways: ways.slice(0, count),
+    settled,
+    baskets,
+    unbought,
+  };
+}
+
+/**
+ * The choices without the ways whose counts exceed their line's least by more than a gap; the same where there are none.
+ * The counts are those of the last relaxation, and go on to stand for what is left.
+ */
+export function choicesNear(
+  market: Market,
+  choices: NodeChoices,
+  { counts, wayCounts }: RelaxedLines,
+  gap: number,
+): NodeChoices {
+  const { parts, from, ways } = choices;
+  const writer = startChoices(market, parts.length, ways.length);
+  writer.settled.set(choices.settled);
+  writer.baskets = copyBaskets(choices.baskets);
+  writer.unbought = choices.unbought;
+  let kept = 0;
+  for (let index = 0; index < parts.length; index += 1) {
+    const end = from[index + 1] as number;
+    const least = counts[index] as number;
+    for (let at = from[index] as number; at < end; at += 1)
+      if ((wayCounts[at] as number) - least <= gap) {
+        wayCounts[writer.count] = wayCounts[at] as number;
+        writer.ways[writer.count++] = ways[at] as number;
+      }
+    if (endLine(market, writer, parts[index] as number)) counts[kept++] = least;
+  }
+  return writer.count === ways.length ? choices : finished(writer);
 }
 
 export interface ChoiceLine {
@@ -125,6 +213,7 @@ export function relaxChoices(
     for (let at = from[index] as number; at < end; at += 1) {
       const way = ways[at] as number;
       const count = countOf(market, prices, way);
+      lines.wayCounts[at] = count;
       if (count < least) {
         least = count;
         best = way;

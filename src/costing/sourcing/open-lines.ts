@@ -3,7 +3,6 @@ import { type Baskets, putWay } from "./held-plan.ts";
 import { broughtTo, cellOver, type Span, spanOf } from "./line-spans.ts";
 import type { Market, MarketSupplier } from "./market.ts";
 import { copyBaskets, type NodeChoices } from "./node-choices.ts";
-import { countOf } from "./prices.ts";
 import type { Search } from "./search.ts";
 import { choicesFor, mustUseAll, type SetNode } from "./set-node.ts";
 import { kindsOf, undominated } from "./undominated.ts";
@@ -88,17 +87,12 @@ export function openLines(search: Search, node: SetNode, gap: number): OpenLines
   };
 }
 
-function waysWithin(
-  { market, prices, relaxed }: Search,
-  choices: NodeChoices,
-  index: number,
-  gap: number,
-): OpenWay[] {
+function waysWithin({ relaxed }: Search, choices: NodeChoices, index: number, gap: number): OpenWay[] {
   const ways: OpenWay[] = [];
   const end = choices.from[index + 1] as number;
   for (let at = choices.from[index] as number; at < end; at += 1) {
     const way = choices.ways[at] as number;
-    const excess = countOf(market, prices, way) - (relaxed.counts[index] as number);
+    const excess = (relaxed.wayCounts[at] as number) - (relaxed.counts[index] as number);
     if (excess <= gap && excess < Number.POSITIVE_INFINITY) ways.push({ way, excess });
   }
   return ways;

@@ -8,8 +8,10 @@ import { polishBound } from "./polish-bound.ts";
 import { raiseBound } from "./raise-bound.ts";
 import { isBeaten, marginAt, type Search, spend } from "./search.ts";
 import { evaluate, type SetNode, shrink } from "./set-node.ts";
-import { lineAt, type Reach } from "./support-line.ts";
+import { lineAt, lineOf, type Reach, type SupportLine } from "./support-line.ts";
 
+/** Times that ranges are dropped and the node evaluated anew before it is parted. */
+const SETTLINGS = 3;
 /** Times that one line of a node is raised by itself before all are together. */
 const RAISES = 2;
 
@@ -26,10 +28,16 @@ export function searchNodes(search: Search, queue: NodeQueue): void {
   }
 }
 
-function searchNode(search: Search, queue: NodeQueue, node: SetNode): void {
+/** Raises a node's bound as far as it goes, then searches its lines, or parts it. */
+export function searchNode(search: Search, queue: NodeQueue, node: SetNode): void {
   let value = evaluate(search, node);
   if (isBeaten(search, node.bound)) return;
   shrink(search, node, value);
+  for (let round = 0; round < SETTLINGS && dropRanges(search, node, value); round += 1) {
+    value = evaluate(search, node);
+    if (isBeaten(search, node.bound)) return;
+    shrink(search, node, value);
+  }
   let gaps = gapsOf(search, node);
   for (let round = 0; round < RAISES; round += 1) {
     const worst = widest(gaps);
@@ -53,6 +61,34 @@ function searchNode(search: Search, queue: NodeQueue, node: SetNode): void {
   if (!node.improved) improvePlan(search, node, open);
   for (const choices of partedLines(search.market, open))
     queueNode(search, queue, { ...node, lines: node.lines.slice(), choices, improved: true });
+}
+
+/**
+ * Leaves a node without the ranges in which the line in force lies so high that no plan as good as the best is left, and
+ * draws the lines anew over those that remain. `value`: the bound at the lines in force. False: nothing was dropped.
+ */
+function dropRanges(search: Search, node: SetNode, value: number): boolean {
+  const { goods, weight } = search.relaxed.baskets;
+  let dropped = false;
+  const reaches = node.reaches.map(({ supplier, cells }, index) => {
+    if (cells.length === 1) return { supplier, cells };
+    const line = node.lines[index] as SupportLine;
+    const left = cells.filter((cell) => {
+      const own = lineOf(search, { supplier, cells: [cell] }, line.perGoods, line.perWeight);
+      return !isBeaten(search, value + own.floor - line.floor);
+    });
+    if (left.length === cells.length || left.length === 0) return { supplier, cells };
+    dropped = true;
+    return { supplier, cells: left };
+  });
+  if (!dropped) return false;
+  node.lines = node.lines.map((line, index) => {
+    const reach = reaches[index] as Reach;
+    if (reach.cells.length === node.reaches[index]?.cells.length) return line;
+    return lineAt(search, reach, goods[reach.supplier] as number, weight[reach.supplier] as number);
+  });
+  node.reaches = reaches;
+  return true;
 }
 
 /** Evaluates a new node, and queues it unless it is beaten. */

@@ -1,12 +1,4 @@
-import {
-  type ChoiceLine,
-  choicesOf,
-  choicesWithin,
-  copyBaskets,
-  type NodeChoices,
-  relaxChoices,
-} from "./node-choices.ts";
-import { countOf } from "./prices.ts";
+import { choicesNear, choicesWithin, type NodeChoices, relaxChoices } from "./node-choices.ts";
 import { isBeaten, marginAt, offerPlan, type Search } from "./search.ts";
 import type { Reach, SupportLine } from "./support-line.ts";
 
@@ -15,7 +7,7 @@ import type { Reach, SupportLine } from "./support-line.ts";
  * ways that are left to the parts.
  */
 export interface SetNode {
-  reaches: readonly Reach[];
+  reaches: Reach[];
   lines: SupportLine[];
   bound: number;
   /** Null until the node's turn comes: all ways through the set. */
@@ -65,27 +57,7 @@ export function evaluate(search: Search, node: SetNode): number {
  * the lines it was just evaluated at, whose counts go on to stand for the choices that are left.
  */
 export function shrink(search: Search, node: SetNode, value: number): void {
-  const { market, prices, relaxed } = search;
-  const choices = choicesFor(search, node);
   const gap = search.bestScore - value + 2 * marginAt(search);
   if (gap === Number.POSITIVE_INFINITY) return;
-  const lines: ChoiceLine[] = [];
-  let dropped = 0;
-  for (let index = 0; index < choices.parts.length; index += 1) {
-    const ways: number[] = [];
-    const end = choices.from[index + 1] as number;
-    for (let at = choices.from[index] as number; at < end; at += 1) {
-      const way = choices.ways[at] as number;
-      if (countOf(market, prices, way) - (relaxed.counts[index] as number) <= gap) ways.push(way);
-      else dropped += 1;
-    }
-    lines.push({ part: choices.parts[index] as number, ways });
-  }
-  if (dropped === 0) return;
-  let kept = 0;
-  lines.forEach(({ ways }, index) => {
-    if (ways.length > 1) relaxed.counts[kept++] = relaxed.counts[index] as number;
-  });
-  const { settled, baskets, unbought } = choices;
-  node.choices = choicesOf(market, lines, settled.slice(), copyBaskets(baskets), unbought);
+  node.choices = choicesNear(search.market, choicesFor(search, node), search.relaxed, gap);
 }
