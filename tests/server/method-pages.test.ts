@@ -34,7 +34,9 @@ describe("the pages of the method", () => {
     for (const { section, figures, slug } of pages) {
       // Rounding and workings concern every figure.
       if (section === "1" || section === "14") continue;
-      const rules = exampleWorkings(figures).flatMap(({ lines }) => lines.map(({ rule }) => rule.split(".")[0]));
+      const rules = exampleWorkings(figures).flatMap(({ lines }) =>
+        lines.map(({ rule }) => rule.split(".")[0]),
+      );
       expect(rules, slug).toContain(section);
     }
   });
