@@ -9,7 +9,7 @@ import { FormulaFields, PieceFields } from "./PieceFields.tsx";
 import { BoardFields, ChargeFields, WhoFields } from "./QuoteFields.tsx";
 import { quoteDraft, quoteFields } from "./quote-draft.ts";
 
-interface QuoteFormProps {
+export interface QuoteFormProps {
   first: BoardQuoteFields;
   version: number;
   action: string;

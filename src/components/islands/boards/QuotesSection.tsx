@@ -1,8 +1,7 @@
-import { lazy, Suspense, useState } from "react";
+import { useState } from "react";
 import { countText } from "#src/components/amount-text.ts";
 import { Button } from "#src/components/islands/parts/Button.tsx";
 import { Later } from "#src/components/islands/parts/Later.tsx";
-import { Loading } from "#src/components/islands/parts/Loading.tsx";
 import { laterPart } from "#src/components/islands/parts/later-part.ts";
 import { Pair } from "#src/components/islands/parts/Pair.tsx";
 import { Section } from "#src/components/islands/parts/Section.tsx";
@@ -14,13 +13,13 @@ import type { Plan } from "#src/shapes/plan.ts";
 import type { BegunQuote, BoardsProps } from "./Boards.tsx";
 import { quoteName } from "./board-words.ts";
 import type { EditedQuoteProps } from "./EditedQuote.tsx";
+import type { QuoteFormProps } from "./QuoteForm.tsx";
 import { QuoteNotes } from "./QuoteNotes.tsx";
 import { type QuoteRow, QuoteTable } from "./QuoteTable.tsx";
 import { blankQuote } from "./quote-draft.ts";
 import { addQuote } from "./quotes-store.ts";
 
-/** A board without quotes begins with the form, so the server draws it too. */
-const QuoteForm = lazy(async () => ({ default: (await import("./QuoteForm.tsx")).QuoteForm }));
+const QuoteForm = laterPart<QuoteFormProps>(async () => (await import("./QuoteForm.tsx")).QuoteForm);
 const EditedQuote = laterPart<EditedQuoteProps>(async () => (await import("./EditedQuote.tsx")).EditedQuote);
 
 interface QuotesProps {
@@ -81,20 +80,23 @@ export function QuotesSection({ props, plan, run, quotes, begun, onBegin }: Quot
       >
         {begun && (
           <div className="mb-6 border-l-4 border-petrol pl-5">
-            <Suspense fallback={<Loading what="A quote" rows={8} />}>
-              <QuoteForm
-                key={begun.key}
-                first={{ ...blankQuote(plan.currency, today, props.width, props.height), ...begun.known }}
-                takesFocus={begun.key > 0}
-                version={0}
-                action="Add the quote"
-                onLeave={quotes.length > 0 ? close : undefined}
-                onSave={async (fields) => {
+            <Later
+              key={begun.key}
+              part={QuoteForm}
+              give={{
+                first: { ...blankQuote(plan.currency, today, props.width, props.height), ...begun.known },
+                version: 0,
+                action: "Add the quote",
+                takesFocus: begun.key > 0,
+                onLeave: quotes.length > 0 ? close : undefined,
+                onSave: async (fields) => {
                   await addQuote(address, fields);
                   close();
-                }}
-              />
-            </Suspense>
+                },
+              }}
+              what="A quote"
+              rows={8}
+            />
           </div>
         )}
         {edited && (
