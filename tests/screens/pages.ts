@@ -32,6 +32,8 @@ export const PAGES: readonly PictureOf[] = [
   { name: "offers", path: kit("Dew Lantern", "offers") },
   { name: "offer", path: kit("Dew Lantern", `offers/${seedId("part", "ledww")}`) },
   { name: "boards", path: kit("Dew Lantern", "boards") },
+  { name: "boards-no-panels", path: kit("Cricket Box", "boards") },
+  { name: "boards-empty", path: kit("Moth Lamp", "boards") },
   { name: "run", path: kit("Dew Lantern", "run") },
   { name: "run-not-known", path: kit("Tide Clock", "run") },
   { name: "run-empty", path: kit("Moth Lamp", "run") },

@@ -67,6 +67,18 @@ describe("the example kit at a run of 40", () => {
     expect(part("chip")?.orders[0]).toMatchObject({ quantity: 50 });
   });
 
+  it("compares nine to a panel by formula: five panels, 81.81 with freight 90.31", () => {
+    // 43 boards to order (42 would be enough in 94.9 of 100 runs); 184 × 138 mm are 2.5392 dm².
+    // 5 × 2.5392 × 1.60 = 20.3136; 45 boards at 0.25 + 0.05 = 13.50; with 48.00 81.8136.
+    const quote = result.boards.quotes.find(({ id }) => id === "quay-nines");
+    expect(result.boards).toMatchObject({ toOrder: 43, chosen: "quay" });
+    expect(quote).toMatchObject({ pieces: 5, ordered: 45, boards: "81.81", landed: { value: "90.31" } });
+    // 3 × 60 + 2 × 2 by 3 × 40 + 2 × 2 + 2 × 7; nine boards are 216 of 253.92 cm².
+    const panel = workingOf(context, "panel:quay-nines");
+    expect(panel?.title).toBe("A panel of 9 boards, 184 × 138 mm");
+    expect(panel?.lines.at(-1)?.amount).toEqual({ kind: "rate", value: "0.8507" });
+  });
+
   it("opens every figure", () => {
     for (const figure of figuresOf(context))
       expect(workingOf(context, figure)?.lines.length).toBeGreaterThan(0);

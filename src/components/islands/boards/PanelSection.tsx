@@ -84,7 +84,7 @@ export function PanelSection(props: PanelSectionProps) {
         )}
         {house !== null && <Houses {...{ plan, house, onChoose: show }} />}
         {house === null && open === null && <NoTerms canChange={canChange} onBegin={() => setOpen("new")} />}
-        {house !== null && plan.boards.size === null && <NoSize address={address} />}
+        {plan.boards.size === null && <NoSize address={address} />}
         {house !== null && view === null && <WhyNone {...{ plan, house }} />}
         {view && <ShownPanels {...props} view={view} onCount={setCount} />}
       </Section>
