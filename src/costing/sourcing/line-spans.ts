@@ -27,38 +27,93 @@ export interface Span {
   lines: number;
 }
 
-const MEASURED = ["goods", "weight", "unweighed"] as const;
-
-/** Over what a basket may range while the lines are open. */
-export function spanOf(market: Market, lines: readonly OpenLine[], baskets: Baskets, supplier: number): Span {
-  const [goods, weight] = [baskets.goods[supplier] as number, baskets.weight[supplier] as number];
-  const unweighed = baskets.unweighed[supplier] as number;
-  const span: Span = {
-    supplier,
-    goods: [goods, goods],
-    weight: [weight, weight],
-    unweighed: [unweighed, unweighed],
-    lines: baskets.lines[supplier] as number,
-  };
+/** Over what each basket of some suppliers may range while the lines are open. */
+export function spansOf(
+  market: Market,
+  suppliers: readonly number[],
+  lines: readonly OpenLine[],
+  baskets: Baskets,
+): Span[] {
+  const spans = market.suppliers.map((_, supplier) => settledSpan(baskets, supplier));
+  const seen = new Int32Array(spans.length);
+  const [low, high] = [spans.map(emptySpan), spans.map(emptySpan)];
   for (const { ways } of lines) {
-    const never = Number.POSITIVE_INFINITY;
-    const low = { goods: never, weight: never, unweighed: never, lines: never };
-    const high = { goods: 0, weight: 0, unweighed: 0 };
+    seen.fill(0);
     for (const { way } of ways) {
-      const brought = broughtTo(market, way, supplier);
-      for (const kind of MEASURED) {
-        low[kind] = Math.min(low[kind], brought[kind]);
-        high[kind] = Math.max(high[kind], brought[kind]);
+      const end = market.orderTo[way] as number;
+      const from = market.orderFrom[way] as number;
+      for (let at = from; at < end; at += 1) {
+        const supplier = market.supplier[at] as number;
+        if (end - from > 1 && seenBefore(market, from, at)) continue;
+        widen(low[supplier] as Measures, high[supplier] as Measures, seen[supplier] === 0, market, way, at);
+        seen[supplier] = (seen[supplier] as number) + 1;
       }
-      low.lines = Math.min(low.lines, brought.lines);
     }
-    for (const kind of MEASURED) {
-      span[kind][0] += low[kind];
-      span[kind][1] += high[kind];
-    }
-    span.lines += low.lines;
+    for (let supplier = 0; supplier < spans.length; supplier += 1)
+      if (seen[supplier] !== 0)
+        addRange(
+          spans[supplier] as Span,
+          low[supplier] as Measures,
+          high[supplier] as Measures,
+          seen[supplier] === ways.length,
+        );
   }
-  return span;
+  return suppliers.map((supplier) => spans[supplier] as Span);
+}
+
+interface Measures {
+  goods: number;
+  weight: number;
+  unweighed: number;
+}
+
+function emptySpan(): Measures {
+  return { goods: 0, weight: 0, unweighed: 0 };
+}
+
+function settledSpan({ goods, weight, unweighed, lines }: Baskets, supplier: number): Span {
+  const [own, heavy] = [goods[supplier] as number, weight[supplier] as number];
+  const unknown = unweighed[supplier] as number;
+  return {
+    supplier,
+    goods: [own, own],
+    weight: [heavy, heavy],
+    unweighed: [unknown, unknown],
+    lines: lines[supplier] as number,
+  };
+}
+
+/** Whether an earlier order of the same way goes to the same supplier: a way counts once, with all its orders. */
+function seenBefore(market: Market, from: number, at: number): boolean {
+  for (let other = from; other < at; other += 1)
+    if (market.supplier[other] === market.supplier[at]) return true;
+  return false;
+}
+
+function widen(low: Measures, high: Measures, first: boolean, market: Market, way: number, at: number): void {
+  const single = (market.orderTo[way] as number) - (market.orderFrom[way] as number) === 1;
+  const weighed = market.weight[at] as number;
+  let [goods, weight, unweighed] = [market.cost[at] as number, weighed || 0, Number.isNaN(weighed) ? 1 : 0];
+  if (!single) ({ goods, weight, unweighed } = broughtTo(market, way, market.supplier[at] as number));
+  low.goods = first ? goods : Math.min(low.goods, goods);
+  low.weight = first ? weight : Math.min(low.weight, weight);
+  low.unweighed = first ? unweighed : Math.min(low.unweighed, unweighed);
+  high.goods = first ? goods : Math.max(high.goods, goods);
+  high.weight = first ? weight : Math.max(high.weight, weight);
+  high.unweighed = first ? unweighed : Math.max(high.unweighed, unweighed);
+}
+
+/** Adds what one line may bring; `always`: each of its ways brings something. */
+function addRange(span: Span, low: Measures, high: Measures, always: boolean): void {
+  if (always) {
+    span.goods[0] += low.goods;
+    span.weight[0] += low.weight;
+    span.unweighed[0] += low.unweighed;
+    span.lines += 1;
+  }
+  span.goods[1] += high.goods;
+  span.weight[1] += high.weight;
+  span.unweighed[1] += high.unweighed;
 }
 
 /** The one range that a span lies in; null: it may reach into several, or weights are partly known. */

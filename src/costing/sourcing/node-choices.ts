@@ -237,8 +237,7 @@ function settledCount(market: Market, prices: Prices, { goods, weight, unweighed
     const near = market.suppliers[supplier]?.near ?? 0;
     sum +=
       (prices.perGoods[supplier] as number) * near * (goods[supplier] as number) +
-      (prices.perWeight[supplier] as number) * (weight[supplier] as number) -
-      (prices.bonus[supplier] as number) * (lines[supplier] as number);
+      (prices.perWeight[supplier] as number) * (weight[supplier] as number);
   }
   return sum;
 }

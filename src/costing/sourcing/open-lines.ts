@@ -1,6 +1,6 @@
 import type { BasketCell } from "./basket-cells.ts";
 import { type Baskets, putWay } from "./held-plan.ts";
-import { broughtTo, cellOver, type Span, spanOf } from "./line-spans.ts";
+import { broughtTo, cellOver, type Span, spansOf } from "./line-spans.ts";
 import type { Market, MarketSupplier } from "./market.ts";
 import { copyBaskets, type NodeChoices } from "./node-choices.ts";
 import type { Search } from "./search.ts";
@@ -67,7 +67,12 @@ export function openLines(search: Search, node: SetNode, gap: number): OpenLines
     else if (only < 0) unbought += 1;
     else settle(market, settled, baskets, part, only);
   });
-  const spans = node.reaches.map(({ supplier }) => spanOf(market, lines, baskets, supplier));
+  const spans = spansOf(
+    market,
+    node.reaches.map(({ supplier }) => supplier),
+    lines,
+    baskets,
+  );
   const tracked = trackedOf(search, node, spans, lines, baskets);
   const kinds = kindsOf(search, node, spans, tracked);
   const stillOpen: OpenLine[] = [];

@@ -5,8 +5,6 @@ export interface Prices {
   /** By supplier: what a unit of an order's worth, and of its weight, counts for. */
   perGoods: Float64Array;
   perWeight: Float64Array;
-  /** By supplier: what each order is let off, so that a supplier which must be used gets one. */
-  bonus: Float64Array;
   /** 1: only orders whose weight is known. */
   weighedOnly: Uint8Array;
 }
@@ -16,7 +14,6 @@ export function plainPrices(suppliers: number): Prices {
   return {
     perGoods: new Float64Array(suppliers).fill(1),
     perWeight: new Float64Array(suppliers),
-    bonus: new Float64Array(suppliers),
     weighedOnly: new Uint8Array(suppliers),
   };
 }
@@ -27,13 +24,12 @@ export function countOf(market: Market, prices: Prices, way: number): number {
   let count = 0;
   for (let at = market.orderFrom[way] as number; at < end; at += 1) {
     const supplier = market.supplier[at] as number;
+    const perWeight = prices.perWeight[supplier] as number;
+    count += (prices.perGoods[supplier] as number) * (market.near[at] as number);
+    if (perWeight === 0 && prices.weighedOnly[supplier] === 0) continue;
     const weight = market.weight[at] as number;
-    const weighed = !Number.isNaN(weight);
-    if (!weighed && prices.weighedOnly[supplier] === 1) return Number.POSITIVE_INFINITY;
-    count +=
-      (prices.perGoods[supplier] as number) * (market.near[at] as number) -
-      (prices.bonus[supplier] as number);
-    if (weighed) count += (prices.perWeight[supplier] as number) * weight;
+    if (!Number.isNaN(weight)) count += perWeight * weight;
+    else if (prices.weighedOnly[supplier] === 1) return Number.POSITIVE_INFINITY;
   }
   return count;
 }

@@ -12,6 +12,8 @@ import { lineAt, lineOf, type Reach, type SupportLine } from "./support-line.ts"
 
 /** Times that ranges are dropped and the node evaluated anew before it is parted. */
 const SETTLINGS = 3;
+/** Of nodes that are parted by a line, one in so many is looked around for better plans. */
+const IMPROVED_EVERY = 16;
 /** Times that one line of a node is raised by itself before all are together. */
 const RAISES = 2;
 
@@ -58,7 +60,8 @@ export function searchNode(search: Search, queue: NodeQueue, node: SetNode): voi
   shrink(search, node, value);
   const open = openLines(search, node, search.bestScore - value + 2 * marginAt(search));
   if (closeLines(search, node, open, value)) return;
-  if (!node.improved) improvePlan(search, node, open);
+  if (search.parted % IMPROVED_EVERY === 0 || !node.improved) improvePlan(search, node, open);
+  search.parted += 1;
   for (const choices of partedLines(search.market, open))
     queueNode(search, queue, { ...node, lines: node.lines.slice(), choices, improved: true });
 }

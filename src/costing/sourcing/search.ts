@@ -22,6 +22,8 @@ export interface Search {
   /** `best` as one number: its total and what is added for parts not bought and freight unknown. */
   bestScore: number;
   workLeft: number;
+  /** Nodes parted by a line so far. */
+  parted: number;
   /** Room in which nodes are evaluated, one after the other. */
   prices: Prices;
   relaxed: RelaxedLines;
@@ -67,6 +69,7 @@ export function startSearch(market: Market, limits: SearchLimits): Search {
     best: null,
     bestScore: Number.POSITIVE_INFINITY,
     workLeft: limits.work,
+    parted: 0,
     prices: plainPrices(suppliers.length),
     relaxed: emptyLines(market),
     unsearched: Number.POSITIVE_INFINITY,

@@ -10,14 +10,19 @@ import type { SourcingSupplier } from "./sourcing-input.ts";
 export interface SourcingRuns {
   sale: SaleMarket;
   last: HeldPlan | null;
+  /** Pieces bought in all when it was found. */
+  pieces: number;
 }
+
+/** A size that buys at most so much more or less than the last is begun from there; others are begun anew. */
+const ALIKE = 0.08;
 
 /** Suppliers and offers made ready for any run size. */
 export function sourcingRuns(
   suppliers: readonly SourcingSupplier[],
   parts: readonly PartForSale[],
 ): SourcingRuns {
-  return { sale: saleMarket(suppliers.map(marketSupplier), parts), last: null };
+  return { sale: saleMarket(suppliers.map(marketSupplier), parts), last: null, pieces: 0 };
 }
 
 /**
@@ -30,7 +35,10 @@ export function sourceRun(runs: SourcingRuns, toBuy: ArrayLike<number>, work: nu
   fillMarket(runs.sale, toBuy);
   const { market } = runs.sale;
   const limits = { leastParcels: 0, mostParcels: market.suppliers.length, work };
-  const search = findPlan(market, limits, runs.last);
+  const pieces = runs.sale.toBuy.reduce((sum, quantity) => sum + quantity, 0);
+  const alike = Math.abs(pieces - runs.pieces) <= ALIKE * runs.pieces;
+  const search = findPlan(market, limits, alike ? runs.last : null);
+  runs.pieces = pieces;
   runs.last = search.best;
   return search;
 }
