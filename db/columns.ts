@@ -29,6 +29,14 @@ export function wholeNumber(column: Named, least = 0) {
   return rule(column, sql`typeof(${column}) = 'integer' and ${column} >= ${sql.raw(String(least))}`);
 }
 
+/** A rate that may have a minus before its digits, such as a discount. */
+export function signedRate(column: Named) {
+  return rule(
+    column,
+    sql`typeof(${column}) = 'text' and ltrim(${column}, '-') glob '[0-9]*' and ltrim(${column}, '-') not glob '*[^0-9.]*' and ${column} not glob '*.*.*' and ${column} not glob '*.' and ${column} not glob '--*'`,
+  );
+}
+
 /** Digits with at most one point: never a floating-point number, a sign or an exponent. */
 export function amountText(column: Named) {
   return rule(

@@ -4,7 +4,7 @@ import { ofKit } from "#db/of-kit.ts";
 import { ofWorkshop } from "#db/of-workshop.ts";
 import { kits } from "./kits.ts";
 
-/** One kit's run: how many, with which yield, spares, work and sale terms. Null: not decided. */
+/** One kit's run: how many, with which yield, spares and work. Null: not decided. */
 export const runPlans = sqliteTable(
   "run_plans",
   {
@@ -23,11 +23,6 @@ export const runPlans = sqliteTable(
     kitsMadeBefore: integer("kits_made_before").notNull(),
     replacementShare: amount("replacement_share").notNull(),
     replacementCost: amount("replacement_cost"),
-    taxRate: amount("tax_rate"),
-    feeRate: amount("fee_rate"),
-    feeFixed: amount("fee_fixed"),
-    postageCharged: amount("postage_charged"),
-    postagePaid: amount("postage_paid"),
     version: version(),
   },
   (t) => [
@@ -41,11 +36,6 @@ export const runPlans = sqliteTable(
     amountText(t.learningSlope),
     amountText(t.replacementShare),
     amountText(t.replacementCost),
-    amountText(t.taxRate),
-    amountText(t.feeRate),
-    amountText(t.feeFixed),
-    amountText(t.postageCharged),
-    amountText(t.postagePaid),
   ],
 );
 

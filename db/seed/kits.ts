@@ -1,3 +1,10 @@
+import {
+  BENCH_PIP_CHANNELS,
+  CRICKET_BOX_CHANNELS,
+  DEW_LANTERN_CHANNELS,
+  TAX,
+  UNDECIDED,
+} from "./channels.ts";
 import type { SeedKit, SeedLine } from "./seed-data.ts";
 
 /** The five kits of Marsh Lane Workshop, in five states of the job. Invented. */
@@ -154,11 +161,6 @@ const DEW_LANTERN: SeedKit = {
     kitsMadeBefore: 12,
     replacementShare: "0.02",
     replacementCost: "6.50",
-    taxRate: "0.19",
-    feeRate: "0.05",
-    feeFixed: "0.30",
-    postageCharged: "5.90",
-    postagePaid: "5.20",
   },
   tasks: [
     { name: "Counting out", minutesPerKit: "6", setUpMinutes: "45" },
@@ -171,11 +173,12 @@ const DEW_LANTERN: SeedKit = {
     { name: "Bags", costPerKit: "0.14" },
   ],
   charges: [
-    { name: "Safety and emission check", amount: "540.00" },
+    { name: "Safety and emission check", amount: "400.00" },
     { name: "Prototypes, rev A to C", amount: "192.00", spreadOver: 360 },
     { name: "Booklet and photographs", amount: "150.00", spreadOver: 240 },
     { name: "Test jig", amount: "118.00" },
   ],
+  channels: DEW_LANTERN_CHANNELS,
 };
 
 const BENCH_PIP: SeedKit = {
@@ -221,11 +224,6 @@ const BENCH_PIP: SeedKit = {
     kitsMadeBefore: 40,
     replacementShare: "0.01",
     replacementCost: "4.80",
-    taxRate: "0.19",
-    feeRate: "0.05",
-    feeFixed: "0.30",
-    postageCharged: "3.90",
-    postagePaid: "3.10",
   },
   tasks: [
     { name: "Counting out", minutesPerKit: "4", setUpMinutes: "30" },
@@ -239,6 +237,7 @@ const BENCH_PIP: SeedKit = {
     { name: "Prototypes, rev A and B", amount: "96.00", spreadOver: 500 },
     { name: "Photographs", amount: "60.00" },
   ],
+  channels: BENCH_PIP_CHANNELS,
 };
 
 const CRICKET_BOX: SeedKit = {
@@ -286,11 +285,6 @@ const CRICKET_BOX: SeedKit = {
     kitsMadeBefore: 0,
     replacementShare: "0.02",
     replacementCost: "5.00",
-    taxRate: "0.19",
-    feeRate: "0.05",
-    feeFixed: "0.30",
-    postageCharged: "4.90",
-    postagePaid: "4.20",
   },
   tasks: [
     { name: "Programming", minutesPerKit: "1.5", setUpMinutes: "20" },
@@ -305,6 +299,7 @@ const CRICKET_BOX: SeedKit = {
     { name: "Prototypes", amount: "74.00" },
     { name: "Box artwork", amount: "120.00", spreadOver: 120 },
   ],
+  channels: CRICKET_BOX_CHANNELS,
 };
 
 const TIDE_CLOCK: SeedKit = {
@@ -360,15 +355,11 @@ const TIDE_CLOCK: SeedKit = {
     kitsMadeBefore: 0,
     replacementShare: "0",
     replacementCost: null,
-    taxRate: "0.19",
-    feeRate: null,
-    feeFixed: null,
-    postageCharged: null,
-    postagePaid: null,
   },
   tasks: [{ name: "Programming", minutesPerKit: "2", setUpMinutes: "25" }],
   packing: [{ name: "Box", costPerKit: null }],
   charges: [{ name: "Prototypes", amount: "118.00" }],
+  channels: [{ ...UNDECIDED, taxRate: TAX }],
 };
 
 const MOTH_LAMP: SeedKit = {
@@ -389,15 +380,11 @@ const MOTH_LAMP: SeedKit = {
     kitsMadeBefore: 0,
     replacementShare: "0",
     replacementCost: null,
-    taxRate: null,
-    feeRate: null,
-    feeFixed: null,
-    postageCharged: null,
-    postagePaid: null,
   },
   tasks: [],
   packing: [],
   charges: [],
+  channels: [UNDECIDED],
 };
 
 export const KITS: readonly SeedKit[] = [DEW_LANTERN, BENCH_PIP, CRICKET_BOX, TIDE_CLOCK, MOTH_LAMP];

@@ -1,4 +1,5 @@
 import { boardQuoteBreaks, boardQuotes, panelTerms } from "#db/schema/boards.ts";
+import { channelPrices, channels } from "#db/schema/channels.ts";
 import { kitGuests } from "#db/schema/guests.ts";
 import { editions, kits } from "#db/schema/kits.ts";
 import { lineQuantities, lines, partChoices, parts } from "#db/schema/parts.ts";
@@ -12,7 +13,15 @@ import { KITS } from "./kits.ts";
 import { PEOPLE, RATES, SUPPLIERS, WORKSHOP } from "./marsh-lane.ts";
 import { loadNews } from "./news.ts";
 import { PARTS } from "./parts.ts";
-import type { SeedKit, SeedOffer, SeedPanels, SeedPart, SeedQuote, SeedSupplier } from "./seed-data.ts";
+import type {
+  SeedChannel,
+  SeedKit,
+  SeedOffer,
+  SeedPanels,
+  SeedPart,
+  SeedQuote,
+  SeedSupplier,
+} from "./seed-data.ts";
 import { seedId, WORKSHOP_ID } from "./seed-id.ts";
 
 const DAY = 24 * 60 * 60 * 1000;
@@ -276,6 +285,37 @@ function loadWork(db: Db, kit: SeedKit, owner: Owner): void {
       .run();
 }
 
+function loadChannel(db: Db, kit: SeedKit, channel: SeedChannel, position: number, owner: Owner): void {
+  const { editions: only, ownPrices = {}, other, ...terms } = channel;
+  const id = seedId("channel", kit.name, channel.name);
+  db.insert(channels)
+    .values({
+      id,
+      ...owner,
+      position,
+      discount: "0",
+      taxStated: "inside",
+      feeOnPostage: true,
+      feeOnTax: true,
+      kitsPerOrder: "1",
+      ...terms,
+      editions: editionIds(kit, only),
+      otherName: other?.name ?? "",
+      otherAmount: other?.amount ?? "0",
+      otherSharedOver: other?.sharedOver ?? 1,
+    })
+    .run();
+  for (const [edition, price] of Object.entries(ownPrices))
+    db.insert(channelPrices)
+      .values({
+        workshopId: WORKSHOP_ID,
+        channelId: id,
+        editionId: seedId("edition", kit.name, edition),
+        price,
+      })
+      .run();
+}
+
 function loadKit(db: Db, kit: SeedKit, now: number): void {
   const kitId = seedId("kit", kit.name);
   const owner = { workshopId: WORKSHOP_ID, kitId };
@@ -306,6 +346,7 @@ function loadKit(db: Db, kit: SeedKit, now: number): void {
     .values({ ...owner, ...kit.run, chosenQuoteId })
     .run();
   loadWork(db, kit, owner);
+  for (const [position, channel] of kit.channels.entries()) loadChannel(db, kit, channel, position, owner);
 }
 
 /**

@@ -10,6 +10,7 @@ import type {
   Role,
   Separation,
   SmallOrderTerm,
+  TaxStated,
   ValueUnit,
 } from "#src/shapes/limits.ts";
 
@@ -119,6 +120,26 @@ export interface SeedQuote {
   chosen?: true;
 }
 
+export interface SeedChannel {
+  name: string;
+  weight: number;
+  /** By name; absent: every edition. */
+  editions?: readonly string[];
+  discount?: string;
+  /** By name of edition. */
+  ownPrices?: Readonly<Record<string, string>>;
+  taxRate: string | null;
+  taxStated?: TaxStated;
+  feeRate: string | null;
+  feeFixed: string | null;
+  postageCharged: string | null;
+  postagePaid: string | null;
+  packingCost: string | null;
+  other?: { name: string; amount: string; sharedOver: number };
+  minutesPerOrder: string | null;
+  kitsPerOrder?: string;
+}
+
 export interface SeedKit {
   name: string;
   summary: string;
@@ -139,11 +160,6 @@ export interface SeedKit {
     kitsMadeBefore: number;
     replacementShare: string;
     replacementCost: string | null;
-    taxRate: string | null;
-    feeRate: string | null;
-    feeFixed: string | null;
-    postageCharged: string | null;
-    postagePaid: string | null;
   };
   tasks: readonly {
     name: string;
@@ -153,4 +169,5 @@ export interface SeedKit {
   }[];
   packing: readonly { name: string; costPerKit: string | null; editions?: readonly string[] }[];
   charges: readonly { name: string; amount: string; spreadOver?: number }[];
+  channels: readonly SeedChannel[];
 }

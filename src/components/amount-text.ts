@@ -70,7 +70,7 @@ export function signedCountText(whole: string): string {
 
 /** A share of 0 to 1 in whole hundredths: "43 %". */
 export function shareText(part: string): string {
-  return `${roundedText(shifted(part), 0)}${NO_BREAK}%`;
+  return `${withSign(roundedText(shifted(part), 0), null, false)}${NO_BREAK}%`;
 }
 
 /** A rate as it was entered: "0.029" is "2.9 %". */

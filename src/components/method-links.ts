@@ -10,6 +10,7 @@ const METHODS: Readonly<Record<string, { slug: string; title: string }>> = {
   "7": { slug: "work", title: "Work" },
   "8": { slug: "cost-of-a-run", title: "What a run costs" },
   "9": { slug: "every-run-size", title: "Every run size" },
+  "10": { slug: "price", title: "Price" },
   "11": { slug: "break-even", title: "Break-even" },
   "14": { slug: "workings", title: "Workings" },
 };

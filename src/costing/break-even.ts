@@ -1,11 +1,11 @@
 import { evenRuns } from "./even-runs.ts";
 import { grainShare, grainText, ONE } from "./grains.ts";
-import { KEPT_NEEDS, USED_NEEDS } from "./run-sheet.ts";
+import { BRINGS_NEEDS, USED_NEEDS } from "./run-sheet.ts";
 import type { BreakEven, Crossing } from "./sweep-result.ts";
 import type { Swept } from "./swept.ts";
 
 /**
- * Break-even over the sweep (section 11): profit(n) = kept from n sales − used cost of a run of n.
+ * Break-even over the sweep (section 11): profit(n) = brought by n sales − used cost of a run of n.
  * Costs go up in steps, so every passing of zero is listed with what stepped; `first` is the first
  * run without a loss and `safe` the one from which no run up to `upTo` loses.
  *
@@ -13,7 +13,7 @@ import type { Swept } from "./swept.ts";
  */
 export function breakEvenOf(swept: Swept, planned: number): BreakEven {
   const upTo = knownUpTo(swept);
-  const profit = (kits: number) => (swept.kept[kits] as bigint) - (swept.used[kits] as bigint);
+  const profit = (kits: number) => (swept.brings[kits] as bigint) - (swept.used[kits] as bigint);
   const { turns, first, safe } = evenRuns(profit, upTo);
   const crossings = turns.map(
     ({ kits, way }): Crossing => ({
@@ -39,7 +39,7 @@ export function marginOfSafety(planned: number, breakEven: number | null): strin
 
 function knownUpTo({ missing, to }: Swept): number {
   for (let kits = 1; kits <= to; kits += 1) {
-    if (((missing[kits] as number) & (USED_NEEDS | KEPT_NEEDS)) !== 0) return kits - 1;
+    if (((missing[kits] as number) & (USED_NEEDS | BRINGS_NEEDS)) !== 0) return kits - 1;
   }
   return to;
 }

@@ -6,18 +6,19 @@ import type { Figure } from "./figure.ts";
 import { figureOf, figurePer, inBothViews, wholeFigure } from "./figure-of.ts";
 import { grainShare, grainText, ONE, scaledText } from "./grains.ts";
 import { headResults, taskCost } from "./head-results.ts";
-import { saleOf } from "./kept-per-sale.ts";
 import { taskMinutes } from "./kit-costs.ts";
 import { FACTOR_PLACES } from "./learning.ts";
 import { partLine } from "./part-lines.ts";
 import { preparePlan } from "./prepare-plan.ts";
 import type { PreparedPlan } from "./prepared-plan.ts";
+import { nearest } from "./price/fraction.ts";
+import { takingsFrom } from "./price/takings.ts";
 import type { Need } from "./problem.ts";
 import { reckonRun } from "./reckon-run.ts";
-import { need, needsOf, termNeeds } from "./run-needs.ts";
+import { joinNeeds, need, needsOf, soldNeeds } from "./run-needs.ts";
 import { runProblems } from "./run-problems.ts";
-import type { EditionResult, RunResult, SaleResult, WorkResult } from "./run-result.ts";
-import { createSheet, KEPT_NEEDS, MISSING, type RunSheet, SPENT_NEEDS, USED_NEEDS } from "./run-sheet.ts";
+import type { EditionResult, RunResult, WorkResult } from "./run-result.ts";
+import { BRINGS_NEEDS, createSheet, MISSING, type RunSheet, SPENT_NEEDS, USED_NEEDS } from "./run-sheet.ts";
 import { soldToPay } from "./sold-to-pay.ts";
 
 /**
@@ -43,7 +44,7 @@ export function runResult(prepared: PreparedPlan, sheet: RunSheet): RunResult {
   const { money, kits } = sheet;
   const { baskets, shareOf } = basketResults(prepared, sheet);
   const needs = runFigureNeeds(prepared, sheet);
-  const profit = money.kept - money.used;
+  const profit = money.brings - money.used;
   return {
     kit: plan.kit,
     revision: plan.revision,
@@ -62,8 +63,10 @@ export function runResult(prepared: PreparedPlan, sheet: RunSheet): RunResult {
     spent: figureOf(money.spent, needs.spent),
     used: figureOf(money.used, needs.used),
     perKit: inBothViews(money.spent, money.used, kits, needs.spent, needs.used),
-    kept: wholeFigure(money.kept, needs.kept),
-    keptPerKit: needs.kept.length > 0 ? wholeFigure(null, needs.kept) : figurePer(money.kept, kits, []),
+    kept: wholeFigure(takingsFrom(prepared.takings.kept, sheet.kitsOf), needs.kept),
+    brings: wholeFigure(money.brings, needs.brings),
+    bringsPerKit:
+      needs.brings.length > 0 ? wholeFigure(null, needs.brings) : figurePer(money.brings, kits, []),
     profit: needs.profit.length > 0 ? wholeFigure(null, needs.profit) : figureOf(profit, []),
     earnsPerKit: needs.profit.length > 0 ? wholeFigure(null, needs.profit) : figurePer(profit, kits, []),
     earnedPerHour: earnedPerHour(prepared, sheet),
@@ -88,6 +91,7 @@ interface FigureNeeds {
   spent: Need[];
   used: Need[];
   kept: Need[];
+  brings: Need[];
   profit: Need[];
 }
 
@@ -98,22 +102,37 @@ function runFigureNeeds(prepared: PreparedPlan, sheet: RunSheet): FigureNeeds {
     stock: of(MISSING.mix | MISSING.stock),
     spent: of(SPENT_NEEDS),
     used: of(USED_NEEDS),
-    kept: of(KEPT_NEEDS),
-    profit: of(USED_NEEDS | KEPT_NEEDS),
+    kept: joinNeeds(of(MISSING.mix), soldNeeds(prepared, sheet, "kept")),
+    brings: of(BRINGS_NEEDS),
+    profit: of(USED_NEEDS | BRINGS_NEEDS),
   };
 }
 
 /**
- * Earned per hour (section 7): `(income − all costs but own work) ÷ hours`, in money per hour, to
- * the nearest grain. Known without an hourly rate, since own work is what it pays for.
+ * Earned per hour (section 7): `(income − all costs but own work) ÷ hours of making and selling`, in
+ * money per hour, to the nearest grain. Known without an hourly rate, since own work is what it pays for.
  */
 function earnedPerHour(prepared: PreparedPlan, sheet: RunSheet): Figure {
   const { money } = sheet;
-  const needs = needsOf(prepared, sheet, (USED_NEEDS | KEPT_NEEDS) & ~MISSING.rate);
-  if (money.minutes === 0n) needs.push(need("no-work", [{}]));
+  const { kept, minutes: selling } = sellingOf(prepared, sheet);
+  const minutes = money.minutes + selling;
+  const needs = joinNeeds(
+    needsOf(prepared, sheet, USED_NEEDS & ~MISSING.rate),
+    soldNeeds(prepared, sheet, "kept"),
+    soldNeeds(prepared, sheet, "minutes"),
+    minutes === 0n ? [need("no-work", [{}])] : [],
+  );
   if (needs.length > 0) return wholeFigure(null, needs);
-  const pay = money.kept - (money.used - money.work);
-  return figureOf(grainShare(pay * 60n, ONE, money.minutes), []);
+  const pay = kept - (money.used - money.work);
+  return figureOf(grainShare(pay * 60n, ONE, minutes), []);
+}
+
+/** What the sales of a run keep and how long they take, in grains; nothing where `soldNeeds` says why. */
+function sellingOf({ takings }: PreparedPlan, { kitsOf }: RunSheet) {
+  return {
+    kept: takingsFrom(takings.kept, kitsOf) ?? 0n,
+    minutes: takingsFrom(takings.minutes, kitsOf) ?? 0n,
+  };
 }
 
 function editionResults(prepared: PreparedPlan, sheet: RunSheet, needs: FigureNeeds): EditionResult[] {
@@ -131,24 +150,18 @@ function editionResults(prepared: PreparedPlan, sheet: RunSheet, needs: FigureNe
         kits === 0
           ? { spent: wholeFigure(null, absent), used: wholeFigure(null, absent) }
           : inBothViews(spent, used, kits, needs.spent, needs.used),
-      sale: saleResult(prepared.plan, edition),
+      price: edition.price,
+      ...soldResult(prepared, index),
     };
   });
 }
 
-/** One sale of an edition, each of its figures with what it needs. */
-export function saleResult(plan: Plan, edition: Plan["editions"][number]): SaleResult {
-  const sale = saleOf(plan, edition);
-  const price = edition.price === null ? [need("no-price", [{ edition: edition.id }])] : [];
-  const terms = (...codes: Need["code"][]) => termNeeds(plan.sale).filter(({ code }) => codes.includes(code));
-  const charged = [...price, ...terms("no-postage-charged")];
+/** One kit of an edition sold over its channels. */
+function soldResult({ sold }: PreparedPlan, index: number): Pick<EditionResult, "kept" | "brings"> {
+  const kit = sold[index] as PreparedPlan["sold"][number];
   return {
-    price: edition.price,
-    charged: wholeFigure(sale.charged, charged),
-    taxInside: wholeFigure(sale.taxInside, [...charged, ...terms("no-tax-rate")]),
-    fee: wholeFigure(sale.fee, [...charged, ...terms("no-fee-rate", "no-fixed-fee")]),
-    postagePaid: wholeFigure(sale.postagePaid, terms("no-postage-paid")),
-    kept: wholeFigure(sale.kept, [...price, ...termNeeds(plan.sale)]),
+    kept: wholeFigure(nearest(kit.kept), kit.needs.kept),
+    brings: wholeFigure(nearest(kit.brings), kit.needs.brings),
   };
 }
 
@@ -171,6 +184,7 @@ function workResult(prepared: PreparedPlan, sheet: RunSheet): WorkResult {
     }),
     minutes: grainText(money.minutes),
     hours: grainText(grainShare(money.minutes, 1n, 60n)),
+    sellingMinutes: wholeFigure(sellingOf(prepared, sheet).minutes, soldNeeds(prepared, sheet, "minutes")),
     ratePerHour: plan.work.ratePerHour,
     cost: figureOf(money.work, needsOf(prepared, sheet, MISSING.mix | MISSING.rate)),
   };

@@ -7,6 +7,7 @@ import type {
   PreparedReplacements,
   PreparedTask,
 } from "./prepared-plan.ts";
+import { takingsFrom } from "./price/takings.ts";
 import { MISSING, type RunSheet } from "./run-sheet.ts";
 
 const FACTOR_UNIT = 10n ** BigInt(FACTOR_PLACES);
@@ -103,25 +104,12 @@ export function replacementCost(
   return costEach === null ? null : (expected * costEach) / MILLION;
 }
 
-/** What the run brings if every kit sells (sections 10 and 11): `Σ kits of the edition × kept per sale`. */
-export function takings(prepared: PreparedPlan, sheet: RunSheet): void {
-  const kept = keptFromSales(prepared, sheet.kitsOf);
-  if (kept === null) sheet.missing |= MISSING.sale;
-  sheet.money.kept = kept ?? 0n;
-}
-
 /**
- * Kept from so many sales of each edition, in grains; null where a sold edition's is not known.
- *
- * @example 20 at 25.30 and 10 at 6.10 → 567.00
+ * What the run brings if every kit sells (sections 10 and 11): `Σ kits of the edition × brought by one`,
+ * that is kept over its channels less the time to sell it.
  */
-export function keptFromSales(prepared: PreparedPlan, sales: readonly number[]): bigint | null {
-  let sum = 0n;
-  for (let index = 0; index < sales.length; index += 1) {
-    if (sales[index] === 0) continue;
-    const each = prepared.keptPerSale[index] ?? null;
-    if (each === null) return null;
-    sum += each * BigInt(sales[index] as number);
-  }
-  return sum;
+export function takings(prepared: PreparedPlan, sheet: RunSheet): void {
+  const brings = takingsFrom(prepared.takings.brings, sheet.kitsOf);
+  if (brings === null) sheet.missing |= MISSING.sale;
+  sheet.money.brings = brings ?? 0n;
 }

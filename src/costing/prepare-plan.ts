@@ -4,7 +4,6 @@ import { emptyMemory } from "./choice-memory.ts";
 import { type MinorWorth, minorWorth } from "./conversion.ts";
 import { currencyDecimals } from "./currencies.ts";
 import { grains, scaled } from "./grains.ts";
-import { saleOf } from "./kept-per-sale.ts";
 import { priceOf } from "./ladder.ts";
 import { factorSums } from "./learning.ts";
 import { minorReaching, toMinor } from "./money.ts";
@@ -12,6 +11,10 @@ import { spareOf } from "./need.ts";
 import { prepareOffers } from "./prepare-offers.ts";
 import { prepareQuote } from "./prepare-quote.ts";
 import type { PreparedPart, PreparedPlan, PreparedSupplier, PreparedTask } from "./prepared-plan.ts";
+import { kitsSold } from "./price/run-sold.ts";
+import { saleContext } from "./price/sale-context.ts";
+import type { SoldKit } from "./price/sold-kit.ts";
+import { takingsOf } from "./price/takings.ts";
 import type { Problem } from "./problem.ts";
 
 /** Where worths and buckets of a plan are looked up while it is prepared. */
@@ -66,7 +69,7 @@ export function preparePlan(plan: Plan, kitsMost: number): PreparedPlan {
     quotes: plan.boards.quotes.map((quote) => prepareQuote(quote, preparing)),
     tasks: prepareTasks(plan, kitsMost),
     ...prepareKitCosts(plan),
-    keptPerSale: plan.editions.map((edition) => saleOf(plan, edition).kept),
+    ...prepareTakings(plan),
     weights: plan.editions.map(({ weight }) => weight),
     boardsPerKit: plan.editions.map(({ boardsPerKit }) => boardsPerKit),
     buckets,
@@ -156,6 +159,14 @@ function prepareKitCosts(plan: Plan) {
       costEach: grainsOf(replacements.costEach),
     },
   };
+}
+
+/** What one kit of each edition keeps, brings and takes to sell, over the channels. */
+function prepareTakings(plan: Plan) {
+  const sold = kitsSold(saleContext(plan));
+  const of = (figure: "kept" | "brings" | "minutes") =>
+    takingsOf(sold.map((kit: SoldKit) => (kit.needs[figure].length > 0 ? null : kit[figure])));
+  return { sold, takings: { kept: of("kept"), brings: of("brings"), minutes: of("minutes") } };
 }
 
 /** By index of edition: whether it is among `editions`; null: all are. */

@@ -12,6 +12,8 @@ import type { ChoiceMemory } from "./choice-memory.ts";
 import type { MinorWorth } from "./conversion.ts";
 import type { Ladder, Price } from "./ladder.ts";
 import type { PreparedPieces } from "./panels/prepare-pieces.ts";
+import type { SoldKit } from "./price/sold-kit.ts";
+import type { Takings } from "./price/takings.ts";
 import type { Problem } from "./problem.ts";
 import type { OfferStanding, QuoteStanding } from "./run-result.ts";
 import type { SplitTable } from "./split-order.ts";
@@ -31,8 +33,9 @@ export interface PreparedPlan {
   /** Own work in 10^-6 of the plan's currency an hour; null: not decided. */
   hourRate: bigint | null;
   replacements: PreparedReplacements;
-  /** Per edition: what one sale keeps, in grains; null while not known. */
-  keptPerSale: (bigint | null)[];
+  /** Per edition: one kit sold over its channels, with what it needs; and ready to be added up. */
+  sold: SoldKit[];
+  takings: { kept: Takings; brings: Takings; minutes: Takings };
   weights: number[];
   boardsPerKit: number[];
   /** Values of what is left over are summed in these, one for each currency and keep share. */

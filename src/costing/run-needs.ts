@@ -1,7 +1,6 @@
-import type { PlanSale } from "#src/shapes/plan.ts";
-import { SALE_NEEDS } from "./kept-per-sale.ts";
 import { kitsWith } from "./kit-costs.ts";
 import type { PreparedPart, PreparedPlan } from "./prepared-plan.ts";
+import type { SoldKit } from "./price/sold-kit.ts";
 import type { Need, NeedCode, Place, SourcePage } from "./problem.ts";
 import { MISSING, REFUSED, type RunSheet, SETTLED, SHORT, TOO_LARGE } from "./run-sheet.ts";
 
@@ -82,7 +81,7 @@ export function needsOf(prepared: PreparedPlan, sheet: RunSheet, bits: number): 
   if (missing & MISSING.rate) found.push(need("no-hourly-rate", [{}]));
   if (missing & MISSING.replacement) found.push(need("no-replacement-cost", [{}]));
   if (missing & MISSING.stock) found.push(...stockNeeds(prepared, sheet));
-  if (missing & MISSING.sale) found.push(...saleNeeds(prepared, sheet));
+  if (missing & MISSING.sale) found.push(...soldNeeds(prepared, sheet, "brings"));
   return joinNeeds(found);
 }
 
@@ -157,15 +156,7 @@ function stockNeeds(prepared: PreparedPlan, sheet: RunSheet): Need[] {
     .map(({ part }) => need("no-stock-cost", [{ part: part.id }]));
 }
 
-function saleNeeds({ plan }: PreparedPlan, sheet: RunSheet): Need[] {
-  const unpriced = plan.editions.filter(
-    ({ price }, index) => price === null && (sheet.kitsOf[index] ?? 0) > 0,
-  );
-  return [...unpriced.map(({ id }) => need("no-price", [{ edition: id }])), ...termNeeds(plan.sale)];
-}
-
-/** Terms of sale that are missing. */
-export function termNeeds(sale: PlanSale): Need[] {
-  const terms = Object.keys(SALE_NEEDS) as (keyof PlanSale)[];
-  return terms.filter((term) => sale[term] === null).map((term) => need(SALE_NEEDS[term], [{}]));
+/** What the sales of a run need, over the editions that are made: for what they keep, bring or take. */
+export function soldNeeds({ sold }: PreparedPlan, sheet: RunSheet, figure: keyof SoldKit["needs"]): Need[] {
+  return joinNeeds(...sold.map(({ needs }, index) => ((sheet.kitsOf[index] ?? 0) > 0 ? needs[figure] : [])));
 }

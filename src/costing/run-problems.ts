@@ -2,7 +2,7 @@ import { minorText } from "./money.ts";
 import type { PreparedPlan } from "./prepared-plan.ts";
 import { NEED_CODES, type Problem, type ProblemFacts } from "./problem.ts";
 import { needsOf } from "./run-needs.ts";
-import { KEPT_NEEDS, type RunSheet, SHORT, USED_NEEDS } from "./run-sheet.ts";
+import { BRINGS_NEEDS, type RunSheet, SHORT, USED_NEEDS } from "./run-sheet.ts";
 import { coverableOf } from "./split-order.ts";
 
 /**
@@ -10,7 +10,7 @@ import { coverableOf } from "./split-order.ts";
  * cautions; within each, in the order of the code list, then of the plan.
  */
 export function runProblems(prepared: PreparedPlan, sheet: RunSheet): Problem[] {
-  const missing = needsOf(prepared, sheet, USED_NEEDS | KEPT_NEEDS).flatMap(({ code, at }) =>
+  const missing = needsOf(prepared, sheet, USED_NEEDS | BRINGS_NEEDS).flatMap(({ code, at }) =>
     at.map((place): Problem => ({ code, at: place, facts: factsOf(prepared, sheet, code, place) })),
   );
   const waiting = new Set<string>(missing.map(({ code }) => code));

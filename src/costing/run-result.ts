@@ -28,14 +28,15 @@ export interface RunResult {
   spent: Figure;
   used: Figure;
   perKit: { spent: Figure; used: Figure };
-  /** What the whole run brings after tax, fees and postage, if every kit sells (section 10). */
+  /** What the whole run keeps after tax, fees and postage, if every kit sells (section 10). */
   kept: Figure;
-  /** `kept ÷ kits`: the mean over the mix. */
-  keptPerKit: Figure;
-  /** `kept − used`, and that over the kits. */
+  /** `kept` less the time to sell, at the plan's rate; and that over the kits: the mean over the mix. */
+  brings: Figure;
+  bringsPerKit: Figure;
+  /** `brings − used`, and that over the kits. */
   profit: Figure;
   earnsPerKit: Figure;
-  /** `(kept − all costs but own work) ÷ hours` (section 7). */
+  /** `(kept − all costs but own work) ÷ hours of making and selling` (section 7). */
   earnedPerHour: Figure;
   /**
    * A whole number of kits: the least sold, by the mix, with no loss on this run (section 11); not known
@@ -55,18 +56,11 @@ export interface EditionResult {
   /** Cost of all kits of the edition; over all editions these add up to the run's exactly. */
   cost: { spent: Figure; used: Figure };
   perKit: { spent: Figure; used: Figure };
-  sale: SaleResult;
-}
-
-/** One sale of an edition (section 10): `kept = charged − taxInside − fee − postagePaid`. */
-export interface SaleResult {
+  /** List price, tax included. */
   price: string | null;
-  /** Price and postage, tax included. */
-  charged: Figure;
-  taxInside: Figure;
-  fee: Figure;
-  postagePaid: Figure;
+  /** One kit sold, over the channels by share (section 10); `brings` is less the time to sell it. */
   kept: Figure;
+  brings: Figure;
 }
 
 export type PartState =
@@ -248,6 +242,8 @@ export interface WorkResult {
   /** Exact minutes of the run, and hours (a quotient: minutes ÷ 60). */
   minutes: string;
   hours: string;
+  /** Own time to sell every kit of the run, in no other figure of the work. */
+  sellingMinutes: Figure;
   ratePerHour: string | null;
   cost: Figure;
 }

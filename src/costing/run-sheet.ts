@@ -37,7 +37,7 @@ export const SPENT_NEEDS =
   MISSING.rate |
   MISSING.replacement;
 export const USED_NEEDS = SPENT_NEEDS | MISSING.stock;
-export const KEPT_NEEDS = MISSING.mix | MISSING.sale;
+export const BRINGS_NEEDS = MISSING.mix | MISSING.sale;
 
 /** The boards of a run: what is ordered of the chosen quote. */
 export interface BoardChoice {
@@ -98,7 +98,7 @@ export interface RunMoney {
   stockTaken: bigint;
   spent: bigint;
   used: bigint;
-  kept: bigint;
+  brings: bigint;
   minutes: bigint;
 }
 
@@ -148,7 +148,7 @@ function emptyMoney(): RunMoney {
     stockTaken: 0n,
     spent: 0n,
     used: 0n,
-    kept: 0n,
+    brings: 0n,
     minutes: 0n,
   };
 }

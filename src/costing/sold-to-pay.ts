@@ -1,6 +1,6 @@
-import { keptFromSales } from "./kit-costs.ts";
 import type { PreparedPlan } from "./prepared-plan.ts";
-import { KEPT_NEEDS, USED_NEEDS } from "./run-sheet.ts";
+import { takingsFrom } from "./price/takings.ts";
+import { BRINGS_NEEDS, USED_NEEDS } from "./run-sheet.ts";
 import { splitKits } from "./split-kits.ts";
 import type { Swept } from "./swept.ts";
 
@@ -11,7 +11,7 @@ import type { Swept } from "./swept.ts";
  */
 export function soldToPayFor(prepared: PreparedPlan, swept: Swept, known: boolean): (number | null)[] {
   const highest = highestTakings(prepared, swept.to);
-  const bits = known ? USED_NEEDS | KEPT_NEEDS : KEPT_NEEDS;
+  const bits = known ? USED_NEEDS | BRINGS_NEEDS : BRINGS_NEEDS;
   const answers: (number | null)[] = [];
   for (let kits = 1; kits <= swept.to; kits += 1) {
     const hidden = ((swept.missing[kits] as number) & bits) !== 0 || highest === null;
@@ -21,7 +21,7 @@ export function soldToPayFor(prepared: PreparedPlan, swept: Swept, known: boolea
 }
 
 function highestTakings(prepared: PreparedPlan, to: number): bigint[] | null {
-  return highestOf((sold) => keptFromSales(prepared, splitKits(sold, prepared.weights)), to);
+  return highestOf((sold) => takingsFrom(prepared.takings.brings, splitKits(sold, prepared.weights)), to);
 }
 
 /**

@@ -1,13 +1,13 @@
 import { grainText } from "./grains.ts";
 import type { PreparedPlan } from "./prepared-plan.ts";
-import { KEPT_NEEDS, MISSING, SPENT_NEEDS, USED_NEEDS } from "./run-sheet.ts";
+import { BRINGS_NEEDS, MISSING, SPENT_NEEDS, USED_NEEDS } from "./run-sheet.ts";
 import { soldToPayFor } from "./sold-to-pay.ts";
 import type { SweepColumns } from "./sweep-result.ts";
 import { perKitOf, type Swept } from "./swept.ts";
 
 /** Columns as text: where `known` only what is known at that size, else everything that can be reckoned. */
 export function columnsOf(prepared: PreparedPlan, swept: Swept, known: boolean): SweepColumns {
-  const { spent, used, kept, leftOver, missing, to } = swept;
+  const { spent, used, brings, leftOver, missing, to } = swept;
   const column = (bits: number, value: (kits: number) => bigint) => {
     const texts: (string | null)[] = [];
     for (let kits = 1; kits <= to; kits += 1) {
@@ -22,8 +22,8 @@ export function columnsOf(prepared: PreparedPlan, swept: Swept, known: boolean):
     used: column(USED_NEEDS, (kits) => at(used, kits)),
     perKitSpent: column(SPENT_NEEDS, (kits) => perKitOf(at(spent, kits), kits)),
     perKitUsed: column(USED_NEEDS, (kits) => perKitOf(at(used, kits), kits)),
-    kept: column(KEPT_NEEDS, (kits) => at(kept, kits)),
-    profit: column(USED_NEEDS | KEPT_NEEDS, (kits) => at(kept, kits) - at(used, kits)),
+    brings: column(BRINGS_NEEDS, (kits) => at(brings, kits)),
+    profit: column(USED_NEEDS | BRINGS_NEEDS, (kits) => at(brings, kits) - at(used, kits)),
     leftOver: column(MISSING.mix | MISSING.goods, (kits) => at(leftOver, kits)),
     nextKitSpent: column(SPENT_NEEDS, (kits) => at(spent, kits + 1) - at(spent, kits)),
     nextKitUsed: column(USED_NEEDS, (kits) => at(used, kits + 1) - at(used, kits)),

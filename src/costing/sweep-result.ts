@@ -22,8 +22,8 @@ export interface SweepColumns {
   used: (string | null)[];
   perKitSpent: (string | null)[];
   perKitUsed: (string | null)[];
-  /** What a run of n brings after tax, fees and postage if all sell. */
-  kept: (string | null)[];
+  /** What a run of n brings if all sell: kept after tax, fees and postage, less the time to sell. */
+  brings: (string | null)[];
   profit: (string | null)[];
   leftOver: (string | null)[];
   /** Cost of one kit more, `C(n + 1) − C(n)`, in both views. */

@@ -5,7 +5,7 @@ import type { PreparedPlan } from "./prepared-plan.ts";
 import type { Need } from "./problem.ts";
 import { reckonRun } from "./reckon-run.ts";
 import { joinNeeds, needsOf } from "./run-needs.ts";
-import { createSheet, KEPT_NEEDS, type RunSheet, USED_NEEDS } from "./run-sheet.ts";
+import { BRINGS_NEEDS, createSheet, type RunSheet, USED_NEEDS } from "./run-sheet.ts";
 import { changesBetween } from "./step-changes.ts";
 import { fellByStep, stepDowns, sweetSpots, windowOf } from "./steps.ts";
 import { columnsOf } from "./sweep-columns.ts";
@@ -47,7 +47,7 @@ function reckonAll(prepared: PreparedPlan, to: number, beyond: number): { swept:
     to,
     spent: [0n],
     used: [0n],
-    kept: [0n],
+    brings: [0n],
     leftOver: [0n],
     parcels: [0],
     missing: [0],
@@ -62,7 +62,7 @@ function reckonAll(prepared: PreparedPlan, to: number, beyond: number): { swept:
     const { money, missing, parcels } = sheet;
     swept.spent.push(money.spent);
     swept.used.push(money.used);
-    swept.kept.push(money.kept);
+    swept.brings.push(money.brings);
     swept.leftOver.push(money.leftOver);
     swept.parcels.push(parcels);
     swept.missing.push(missing);
@@ -71,7 +71,7 @@ function reckonAll(prepared: PreparedPlan, to: number, beyond: number): { swept:
       swept.steps.push(fell ? changesBetween(prepared, before, sheet, false) : []);
     }
     if (missing !== 0 && kits <= to && !sameGaps(before, sheet)) {
-      needs = joinNeeds(needs, needsOf(prepared, sheet, USED_NEEDS | KEPT_NEEDS));
+      needs = joinNeeds(needs, needsOf(prepared, sheet, USED_NEEDS | BRINGS_NEEDS));
     }
   }
   return { swept, needs };

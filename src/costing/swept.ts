@@ -6,7 +6,8 @@ export interface Swept {
   to: number;
   spent: bigint[];
   used: bigint[];
-  kept: bigint[];
+  /** Kept from the sales less the time to sell. */
+  brings: bigint[];
   leftOver: bigint[];
   parcels: number[];
   missing: number[];

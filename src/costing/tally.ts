@@ -46,7 +46,7 @@ export function tallyOf(result: RunResult): Tally {
 /** `Σ kits of the edition × its price ÷ kits`, to the nearest grain. */
 function meanPrice({ editions, kits }: RunResult): Figure {
   const sold = editions.filter((edition) => edition.kits > 0);
-  const unpriced = sold.filter(({ sale }) => sale.price === null).map(({ id }) => ({ edition: id }));
+  const unpriced = sold.filter(({ price }) => price === null).map(({ id }) => ({ edition: id }));
   if (unpriced.length > 0) return { known: false, needs: [need("no-price", unpriced)], without: null };
   if (sold.length === 0) {
     return {
@@ -60,9 +60,6 @@ function meanPrice({ editions, kits }: RunResult): Figure {
       without: null,
     };
   }
-  const total = sold.reduce(
-    (sum, edition) => sum + grains(edition.sale.price ?? "0") * BigInt(edition.kits),
-    0n,
-  );
+  const total = sold.reduce((sum, edition) => sum + grains(edition.price ?? "0") * BigInt(edition.kits), 0n);
   return figurePer(total, kits, []);
 }

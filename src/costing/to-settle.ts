@@ -47,7 +47,7 @@ function pageOf({ code }: Problem): SourcePage | null {
 }
 
 function keyOf({ code, at }: Problem): string {
-  return at.part ?? at.quote ?? at.supplier ?? at.currency ?? code;
+  return at.part ?? at.quote ?? at.supplier ?? at.channel ?? at.currency ?? code;
 }
 
 /**

@@ -1,10 +1,10 @@
 import { headSpent } from "./head-results.ts";
-import { keptFromSales } from "./kit-costs.ts";
 import { preparePlan } from "./prepare-plan.ts";
+import { takingsFrom } from "./price/takings.ts";
 import { reckonRun } from "./reckon-run.ts";
 import { need } from "./run-needs.ts";
 import { HEADS } from "./run-result.ts";
-import { createSheet, KEPT_NEEDS, type RunSheet, USED_NEEDS } from "./run-sheet.ts";
+import { BRINGS_NEEDS, createSheet, type RunSheet, USED_NEEDS } from "./run-sheet.ts";
 import { splitKits } from "./split-kits.ts";
 import { sweepRuns } from "./sweep.ts";
 import type { WorkingContext } from "./working.ts";
@@ -17,14 +17,14 @@ export function evenAfterSheet({ prepared, result, sheet }: WorkingContext): She
   const needed = evenAfter.known ? null : notKnown(evenAfter.needs);
   const sold = evenAfter.known ? Number(evenAfter.value) : null;
   const compare = (number: number): Step[] => {
-    const kept = keptFromSales(prepared, splitKits(number, prepared.weights)) ?? 0n;
+    const brought = takingsFrom(prepared.takings.brings, splitKits(number, prepared.weights)) ?? 0n;
     return [
-      step(null, `Kept from ${number} sold`, money(kept, currency), "11"),
+      step(null, `${number} sold bring`, money(brought, currency), "11"),
       step("−", "Used by the run", money(result.used, currency), "8", { opens: "used" }),
       step(
         "=",
-        kept < sheet.money.used ? "Still a loss" : "No loss",
-        money(kept - sheet.money.used, currency),
+        brought < sheet.money.used ? "Still a loss" : "No loss",
+        money(brought - sheet.money.used, currency),
         "11",
       ),
     ];
@@ -55,14 +55,14 @@ export function crossingSheet(context: WorkingContext, kits: number, title: stri
   const { currency } = context.result;
   const profitSteps = (at: number): Step[] => {
     const { money: sums, missing } = sheetAt(context, at);
-    const known = (missing & (USED_NEEDS | KEPT_NEEDS)) === 0;
+    const known = (missing & (USED_NEEDS | BRINGS_NEEDS)) === 0;
     const amount = (value: bigint) =>
       known
         ? money(value, currency)
         : notKnown(context.result.profit.known ? [] : context.result.profit.needs);
-    const profit = sums.kept - sums.used;
+    const profit = sums.brings - sums.used;
     return [
-      step(null, `A run of ${at} brings`, amount(sums.kept), "11"),
+      step(null, `A run of ${at} brings`, amount(sums.brings), "11"),
       step("−", `A run of ${at} uses`, amount(sums.used), "8"),
       step("=", profit < 0n ? "Loss" : "No loss", amount(profit), "11", { result: at === kits }),
     ];

@@ -8,8 +8,8 @@ export type FigureId =
   | "used"
   | "per-kit-spent"
   | "per-kit-used"
-  | "kept"
-  | "kept-per-kit"
+  | "brings"
+  | "brings-per-kit"
   | "profit"
   | "earns-per-kit"
   | "earned-per-hour"
@@ -26,7 +26,6 @@ export type FigureId =
   | `quote:${string}`
   | `panel:${string}`
   | `task:${string}`
-  | `sale:${string}`
   | `edition:${string}`
   | `crossing:${number}`
   | PriceFigureId;

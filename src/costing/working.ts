@@ -3,11 +3,15 @@ import { runResult } from "./cost-run.ts";
 import { panelOfQuote } from "./panels/panel-of-quote.ts";
 import { preparePlan } from "./prepare-plan.ts";
 import type { PreparedPlan } from "./prepared-plan.ts";
+import { type PriceContext, priceContext } from "./price/price-context.ts";
+import { isPriceFigure } from "./price/price-figures.ts";
+import { priceFiguresOf, priceWorking } from "./price/price-working.ts";
 import { reckonRun } from "./reckon-run.ts";
 import { HEADS, type HeadId, type RunResult } from "./run-result.ts";
 import { createSheet, type RunSheet } from "./run-sheet.ts";
 import { basketSheet } from "./working-basket.ts";
 import { boardsToOrderSheet } from "./working-boards.ts";
+import { editionSheet } from "./working-edition.ts";
 import { crossingSheet, evenAfterSheet, firstOrSafeSheet, nextKitSheet } from "./working-even.ts";
 import { headSheet, taskSheet } from "./working-head.ts";
 import { type Sheet, treeOf } from "./working-lines.ts";
@@ -15,8 +19,7 @@ import { offerSheet } from "./working-offer.ts";
 import { partSheet } from "./working-part.ts";
 import { quotedPanelSheet, quoteSheet } from "./working-quote.ts";
 import { leftOverSheet, perKitSheet, spentSheet, usedSheet } from "./working-run.ts";
-import { editionSheet, saleSheet } from "./working-sale.ts";
-import { earnsSheet, keptPerKitSheet, keptSheet, perHourSheet, profitSheet } from "./working-takings.ts";
+import { bringsPerKitSheet, bringsSheet, earnsSheet, perHourSheet, profitSheet } from "./working-takings.ts";
 import type { FigureId, WorkingTree } from "./working-tree.ts";
 
 /** One run reckoned, as every working reads it: the sheet the figures come from, and the result. */
@@ -24,6 +27,8 @@ export interface WorkingContext {
   prepared: PreparedPlan;
   sheet: RunSheet;
   result: RunResult;
+  /** The run made ready for pricing, when a figure of it is first asked for. */
+  pricing: () => PriceContext;
 }
 
 /** Figures that need no more than their name. */
@@ -32,8 +37,8 @@ const PLAIN: Partial<Record<FigureId, (context: WorkingContext) => Sheet>> = {
   used: usedSheet,
   "per-kit-spent": (context) => perKitSheet(context, "spent"),
   "per-kit-used": (context) => perKitSheet(context, "used"),
-  kept: keptSheet,
-  "kept-per-kit": keptPerKitSheet,
+  brings: bringsSheet,
+  "brings-per-kit": bringsPerKitSheet,
   profit: profitSheet,
   "earns-per-kit": earnsSheet,
   "earned-per-hour": perHourSheet,
@@ -54,7 +59,6 @@ const OF_A_THING: Record<string, (context: WorkingContext, id: string) => Sheet 
   quote: quoteSheet,
   panel: quotedPanelSheet,
   task: taskSheet,
-  sale: saleSheet,
   edition: editionSheet,
   crossing: (context, id) =>
     /^[1-9]\d{0,3}$/.test(id) ? crossingSheet(context, Number(id), `Break-even at a run of ${id}`) : null,
@@ -76,11 +80,17 @@ export function reckoned(plan: Plan, kits: number = plan.run.kits): WorkingConte
   const prepared = preparePlan(plan, kits);
   const sheet = createSheet(prepared);
   reckonRun(prepared, kits, sheet);
-  return { prepared, sheet, result: runResult(prepared, sheet) };
+  let priced: PriceContext | undefined;
+  const pricing = () => {
+    priced ??= priceContext(plan, kits);
+    return priced;
+  };
+  return { prepared, sheet, result: runResult(prepared, sheet), pricing };
 }
 
 /** One figure of a run already reckoned; `null` as in `working`. */
 export function workingOf(context: WorkingContext, figure: FigureId): WorkingTree | null {
+  if (isPriceFigure(figure)) return priceWorking(context.pricing(), figure);
   const colon = figure.indexOf(":");
   const sheet =
     colon < 0
@@ -108,7 +118,7 @@ function newestPrice({ prepared, result }: WorkingContext): string | null {
 
 /** Every figure of a run that opens, in reading order: what the endpoint's full working lists. */
 export function figuresOf(context: WorkingContext): FigureId[] {
-  const { result } = context;
+  const { result, pricing } = context;
   return [
     ...(Object.keys(PLAIN) as FigureId[]),
     ...HEADS.map((id): FigureId => `head:${id}`),
@@ -124,6 +134,7 @@ export function figuresOf(context: WorkingContext): FigureId[] {
       .filter(({ id }) => panelOfQuote(context.prepared.plan, id) !== null)
       .map(({ id }): FigureId => `panel:${id}`),
     ...result.work.tasks.map(({ id }): FigureId => `task:${id}`),
-    ...result.editions.flatMap(({ id }): FigureId[] => [`sale:${id}`, `edition:${id}`]),
+    ...result.editions.flatMap(({ id }): FigureId[] => [`edition:${id}`]),
+    ...priceFiguresOf(pricing()),
   ];
 }

@@ -3,6 +3,7 @@ import { EDITIONS_MOST } from "#src/shapes/limits.ts";
 import { newId } from "./new-id.ts";
 import { type Changing as ChangingSomewhere, clash, noteChange } from "./note-change.ts";
 import { Problem, wrongField } from "./problem.ts";
+import { changeChannel, channelsOf } from "./store/channel.ts";
 import {
   addEdition,
   changeEdition,
@@ -95,7 +96,7 @@ export interface EditionLoss {
   /** Lines that have a quantity in it, and how many of them are in no other edition. */
   lines: number;
   onlyHere: number;
-  /** Names of work and packing that were for this edition alone, and are for none then. */
+  /** Names of work, packing and channels that were for this edition alone, and are for none then. */
   forNothing: string[];
 }
 
@@ -109,7 +110,11 @@ export function editionLoss(given: Pick<Changing, "db" | "kit">, id: string): Ed
   const rows = lineQuantitiesOf(given.db, given.kit.id);
   const here = rows.filter((row) => row.editionId === id).map((row) => row.lineId);
   const elsewhere = new Set(rows.filter((row) => row.editionId !== id).map((row) => row.lineId));
-  const named = [...tasksOf(given.db, given.kit.id), ...packingItemsOf(given.db, given.kit.id)];
+  const named = [
+    ...tasksOf(given.db, given.kit.id),
+    ...packingItemsOf(given.db, given.kit.id),
+    ...channelsOf(given.db, given.kit.id).map(({ channel }) => channel),
+  ];
   return {
     lines: here.length,
     onlyHere: here.filter((line) => !elsewhere.has(line)).length,
@@ -119,7 +124,7 @@ export function editionLoss(given: Pick<Changing, "db" | "kit">, id: string): Ed
   };
 }
 
-/** Work and packing that name the edition name it no longer. */
+/** Work, packing and channels that name the edition name it no longer. */
 function unnameEdition({ db, kit }: Changing, id: string): void {
   for (const row of tasksOf(db, kit.id))
     if (row.editions?.includes(id))
@@ -127,6 +132,9 @@ function unnameEdition({ db, kit }: Changing, id: string): void {
   for (const row of packingItemsOf(db, kit.id))
     if (row.editions?.includes(id))
       packingList.change(db, row.id, row.version, { editions: withoutEdition(row, id) });
+  for (const { channel } of channelsOf(db, kit.id))
+    if (channel.editions?.includes(id))
+      changeChannel(db, channel, channel.version, { editions: withoutEdition(channel, id) });
 }
 
 /** Removes an edition with its quantities and says what was lost. The last one stays. */

@@ -1,5 +1,6 @@
 import { type LadderProblem, ladderProblems } from "#src/costing/ladder-problems.ts";
 import type { Plan, PlanBoardQuote, PlanOffer } from "#src/shapes/plan.ts";
+import { channelFaults } from "./channel-faults.ts";
 import type { FieldError } from "./problem.ts";
 
 const LADDER_WORDS: Record<LadderProblem["code"], string> = {
@@ -70,7 +71,8 @@ function partFaults(
 
 /**
  * What makes a plan impossible although each of its fields has the right shape (section 1.6): ids that
- * repeat or name nothing, ladders whose quantities repeat or lie below the minimum order.
+ * repeat or name nothing, ladders whose quantities repeat or lie below the minimum order, a fee that with
+ * the tax takes all of a price.
  */
 export function planFaults(plan: Plan): FieldError[] {
   const editions = new Set(plan.editions.map(({ id }) => id));
@@ -84,6 +86,7 @@ export function planFaults(plan: Plan): FieldError[] {
     ...sameIds(tasks, "work.tasks"),
     ...sameIds(plan.packing, "packing"),
     ...sameIds(plan.charges, "charges"),
+    ...sameIds(plan.channels, "channels"),
     ...repeated(
       plan.rates.map(({ currency }) => currency),
       (place) => `rates.${place}.currency`,
@@ -96,6 +99,9 @@ export function planFaults(plan: Plan): FieldError[] {
     ),
     ...plan.packing.flatMap((item, place) =>
       strange(item.editions ?? [], editions, `packing.${place}.editions`, "edition"),
+    ),
+    ...plan.channels.flatMap((channel, place) =>
+      channelFaults(channel, editions).map(({ at, message }) => ({ at: `channels.${place}.${at}`, message })),
     ),
   ];
 }

@@ -1,8 +1,10 @@
 import type { Db } from "#db/client.ts";
 import type { KitChange, KitEntry } from "#src/shapes/kit.ts";
+import { OWN_SITE } from "#src/shapes/limits.ts";
 import { newId } from "./new-id.ts";
 import { type Changing as ChangingSomewhere, clash, noteChange } from "./note-change.ts";
 import { wrongField } from "./problem.ts";
+import { addChannel } from "./store/channel.ts";
 import { addEdition } from "./store/edition.ts";
 import { addKit, changeKit, type KitRow, kitNamed, removeKit } from "./store/kit.ts";
 import { copyKitRows } from "./store/kit-copy.ts";
@@ -25,13 +27,29 @@ const FIRST_RUN = {
   replacementShare: "0",
 } as const;
 
+/** The first way to sell: what it takes of a sale is for the workshop to say. */
+const FIRST_CHANNEL = {
+  name: OWN_SITE,
+  position: 0,
+  weight: 1,
+  editions: null,
+  discount: "0",
+  taxStated: "inside",
+  feeOnPostage: true,
+  feeOnTax: true,
+  otherName: "",
+  otherAmount: "0",
+  otherSharedOver: 1,
+  kitsPerOrder: "1",
+} as const;
+
 function refuseTakenName(db: Db, workshopId: string, name: string, own?: string): void {
   const other = kitNamed(db, workshopId, name);
   if (other && other.id !== own)
     throw wrongField("name", `This workshop has a kit called ${name} already. Give it another name.`);
 }
 
-/** Begins a kit: with one edition, a run to start from, and no lines. */
+/** Begins a kit: with one edition, one channel, a run to start from, and no lines. */
 export function makeKit(given: Changing, entry: KitEntry): KitRow {
   const { db, workshop, now } = given;
   return inTransaction(db, () => {
@@ -39,6 +57,7 @@ export function makeKit(given: Changing, entry: KitEntry): KitRow {
     const kit = addKit(db, { ...entry, id: newId(), workshopId: workshop.id, createdAt: now });
     addRunPlan(db, { ...FIRST_RUN, kitId: kit.id, workshopId: workshop.id });
     const edition = { name: "Full kit", weight: 1, boardsPerKit: kit.boardNeeded ? 1 : 0, position: 0 };
+    addChannel(db, { ...FIRST_CHANNEL, id: newId(), workshopId: workshop.id, kitId: kit.id }, []);
     addEdition(db, { ...edition, id: newId(), workshopId: workshop.id, kitId: kit.id });
     noteChange({ ...given, kit }, { action: "kit.add", subjectId: kit.id, subjectName: kit.name });
     return kit;

@@ -1,6 +1,7 @@
 import type { Db } from "#db/client.ts";
 import type { Plan } from "#src/shapes/plan.ts";
 import { planOf } from "./plan.ts";
+import { channelsOf } from "./store/channel.ts";
 import { editionsOf } from "./store/edition.ts";
 import type { KitRow } from "./store/kit.ts";
 import type { WorkshopRow } from "./store/membership.ts";
@@ -13,10 +14,10 @@ export interface KitPlan {
   /** The run's spare rate, and the parts that have one of their own. */
   spare: { rate: string; own: string[] };
   versions: {
-    /** Of the run plan itself, sale terms included. */
+    /** Of the run plan itself. */
     run: number;
     workshop: number;
-    /** Of editions, tasks, packing items and charges, by id. */
+    /** Of editions, channels, tasks, packing items and charges, by id. */
     rows: Record<string, number>;
   };
 }
@@ -25,6 +26,7 @@ export interface KitPlan {
 export function kitPlan(db: Db, workshop: WorkshopRow, kit: KitRow, asOf: string): KitPlan {
   const rows = [
     ...editionsOf(db, kit.id),
+    ...channelsOf(db, kit.id).map(({ channel }) => channel),
     ...tasksOf(db, kit.id),
     ...packingItemsOf(db, kit.id),
     ...chargesOf(db, kit.id),

@@ -4,7 +4,9 @@ import type { Plan, PlanBoardQuote, PlanOffer, PlanPart, PlanSupplier } from "#s
 import { revisionLetter } from "#src/shapes/revision-letter.ts";
 import { kitBoard } from "./kit-board.ts";
 import { coreTerms } from "./panel-faults.ts";
+import { planChannel } from "./plan-channel.ts";
 import { boardQuotesOf, type QuoteWithBreaks } from "./store/board-quote.ts";
+import { channelsOf } from "./store/channel.ts";
 import { type CurrencyRateRow, currencyRatesOf } from "./store/currency-rate.ts";
 import { editionsOf } from "./store/edition.ts";
 import type { KitRow } from "./store/kit.ts";
@@ -175,16 +177,6 @@ function ratesOn(day: string, rows: readonly CurrencyRateRow[]): Plan["rates"] {
   });
 }
 
-function sale(run: RunPlanRow): Plan["sale"] {
-  return {
-    taxRate: run.taxRate,
-    feeRate: run.feeRate,
-    feeFixed: run.feeFixed,
-    postageCharged: run.postageCharged,
-    postagePaid: run.postagePaid,
-  };
-}
-
 /**
  * Gathers all that the reckoning needs for one kit, as it stands. Reads only; the arithmetic is the costing
  * core's. `asOf` is the day on which offers must be valid, ISO 8601.
@@ -192,7 +184,7 @@ function sale(run: RunPlanRow): Plan["sale"] {
 export function planOf(db: Db, workshop: WorkshopRow, kit: KitRow, asOf: string): Plan {
   const run = runPlanOf(db, kit.id);
   return {
-    format: "tinpenny-plan/1",
+    format: "tinpenny-plan/2",
     kit: kit.name,
     revision: revisionLetter(kit.revision),
     currency: workshop.currency,
@@ -243,6 +235,6 @@ export function planOf(db: Db, workshop: WorkshopRow, kit: KitRow, asOf: string)
       spreadOver,
     })),
     replacements: { share: run.replacementShare, costEach: run.replacementCost },
-    sale: sale(run),
+    channels: channelsOf(db, kit.id).map(planChannel),
   };
 }

@@ -30,7 +30,7 @@ const MAIN: readonly FigureId[] = [
   "used",
   "per-kit-spent",
   "per-kit-used",
-  "kept-per-kit",
+  "brings-per-kit",
   "earns-per-kit",
   "profit",
   "even-after",

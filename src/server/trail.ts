@@ -4,7 +4,7 @@ import type { OpenThing } from "#src/costing/to-settle.ts";
 import type { Role } from "#src/shapes/limits.ts";
 import type { Plan } from "#src/shapes/plan.ts";
 
-export type StopKey = "parts" | "offers" | "boards" | "run";
+export type StopKey = "parts" | "offers" | "boards" | "run" | "price";
 
 /** How far a stop is: a count of what is open, or nothing left, or not begun. */
 export type StopState = { kind: "done" } | { kind: "to-settle"; count: number } | { kind: "not-started" };
@@ -26,11 +26,6 @@ export interface KitState {
   linesToSettle: number;
 }
 
-/** The stop on which a thing is settled; prices stand on the run page. */
-function stopOf({ page }: OpenThing): StopKey {
-  return page === "price" ? "run" : page;
-}
-
 function settled(count: number): StopState {
   return count > 0 ? { kind: "to-settle", count } : { kind: "done" };
 }
@@ -42,9 +37,10 @@ function stateOf(stop: StopKey, { plan, open, linesToSettle }: KitState): StopSt
     offers: plan.parts.some(({ offers }) => offers.length > 0),
     boards: plan.boards.quotes.length > 0 || (!plan.boards.needed && lines > 0),
     run: lines > 0 && plan.parts.length > 0,
+    price: lines > 0,
   };
   if (!begun[stop]) return { kind: "not-started" };
-  const count = open.filter((thing) => stopOf(thing) === stop).length;
+  const count = open.filter(({ page }) => page === stop).length;
   return settled(count + (stop === "parts" ? linesToSettle : 0));
 }
 
@@ -53,10 +49,18 @@ export function waitingThings({ open, plan }: KitState): OpenThing[] {
   return plan.lines === 0 ? [] : open;
 }
 
-const NAMES: Record<StopKey, string> = { parts: "Parts", offers: "Offers", boards: "Boards", run: "Run" };
+const NAMES: Record<StopKey, string> = {
+  parts: "Parts",
+  offers: "Offers",
+  boards: "Boards",
+  run: "Run",
+  price: "Price",
+};
+
+const WITH_MONEY: readonly StopKey[] = ["parts", "offers", "boards", "run", "price"];
 
 /** The stops of the job so far, in order, each with its state; a role without money has only the parts. */
 export function kitStops(role: Role, state: KitState): KitStop[] {
-  const keys: StopKey[] = can(role, "see-money") ? ["parts", "offers", "boards", "run"] : ["parts"];
+  const keys: readonly StopKey[] = can(role, "see-money") ? WITH_MONEY : ["parts"];
   return keys.map((key) => ({ key, name: NAMES[key], state: stateOf(key, state) }));
 }

@@ -25,6 +25,14 @@ export const RateBelowOne = z
   .string()
   .regex(/^0(\.\d{1,6})?$/, "Write a rate from 0 up to, but not including, 100 %.");
 
+/** A rate below 1 that may be negative, such as a discount: `"-0.06"` is 6 % dearer. */
+export const SignedRateBelowOne = z
+  .string()
+  .regex(
+    /^(-\d{1,3}(\.\d{1,6})?|0(\.\d{1,6})?)$/,
+    "Write a rate below 100 %, with a minus where it is dearer.",
+  );
+
 /** A share from 0 to 1 inclusive. */
 export const Share = z.string().regex(/^(0(\.\d{1,6})?|1(\.0{1,6})?)$/, "Write a share from 0 to 100 %.");
 

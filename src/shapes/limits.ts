@@ -66,6 +66,13 @@ export type FreightTerm = (typeof FREIGHT_TERMS)[number];
 export const SMALL_ORDER_TERMS = ["none", "fee", "refused"] as const;
 export type SmallOrderTerm = (typeof SMALL_ORDER_TERMS)[number];
 
+/** Whether a channel's prices have their tax inside, or are stated without it. */
+export const TAX_STATED = ["inside", "on-top"] as const;
+export type TaxStated = (typeof TAX_STATED)[number];
+
+/** What a kit's first channel is called. */
+export const OWN_SITE = "Own site";
+
 export const IMPORT_KINDS = ["parts-list", "price-list"] as const;
 export type ImportKind = (typeof IMPORT_KINDS)[number];
 
@@ -90,6 +97,7 @@ export const PARTS_MOST = 2000;
 export const OFFERS_PER_PART_MOST = 40;
 export const BREAKS_PER_OFFER_MOST = 24;
 export const EDITIONS_MOST = 8;
+export const CHANNELS_MOST = 12;
 export const SUPPLIERS_MOST = 200;
 export const BOARD_QUOTES_MOST = 50;
 export const QUANTITY_MOST = 1_000_000_000;

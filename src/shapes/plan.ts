@@ -9,6 +9,7 @@ import {
   RateBelowOne,
   Share,
   Side,
+  SignedRateBelowOne,
 } from "./decimal-text.ts";
 import * as limits from "./limits.ts";
 
@@ -172,18 +173,51 @@ export const PlanPacking = z.strictObject({
 });
 export type PlanPacking = z.infer<typeof PlanPacking>;
 
-/** One fee and tax rule for every sale (section 10); what is `null` leaves the takings not known. */
-export const PlanSale = z.strictObject({
+/** Kits in one order, on average. */
+const KitsPerOrder = Amount.regex(/^0*[1-9]/, "An order has at least one kit.");
+
+/**
+ * A way to sell: own site, marketplace, club table, a shop that buys to sell on (section 10). What is
+ * `null` leaves what the channel brings not known.
+ */
+export const PlanChannel = z.strictObject({
+  id: Id,
+  name: Name,
+  /** Share of the kits sold, as a weight. */
+  weight: z.int().min(0).max(1_000_000),
+  /** Editions sold here; `null`: every one. */
+  editions: z.array(Id).max(limits.EDITIONS_MOST).nullable(),
+  /** Off the list price, as a rate; negative where it is dearer here. */
+  discount: SignedRateBelowOne,
+  /** A price of its own here, which takes the place of the list price less discount; stated as its prices are. */
+  ownPrices: z.array(z.strictObject({ edition: Id, price: Amount })).max(limits.EDITIONS_MOST),
   taxRate: Rate.nullable(),
+  /** `inside`: the buyer pays the price as it stands; `on-top`: the price is stated without tax. */
+  taxStated: z.enum(limits.TAX_STATED),
   feeRate: RateBelowOne.nullable(),
   feeFixed: Amount.nullable(),
+  /** Whether the fee is also taken on the postage the buyer pays, and on the tax. */
+  feeOnPostage: z.boolean(),
+  feeOnTax: z.boolean(),
+  /** Per order, stated as the price is: with its tax, or without. */
   postageCharged: Amount.nullable(),
   postagePaid: Amount.nullable(),
+  /** Box, label, tape of one order. */
+  packingCost: Amount.nullable(),
+  /** What else selling costs: `amount` once for so many orders, such as the hire of a stall. */
+  other: z.strictObject({
+    name: z.string().max(limits.NAME_LENGTH),
+    amount: Amount.nullable(),
+    sharedOver: Count.min(1),
+  }),
+  /** Own time to sell and send one order, beyond making the kits. */
+  minutesPerOrder: Minutes.nullable(),
+  kitsPerOrder: KitsPerOrder,
 });
-export type PlanSale = z.infer<typeof PlanSale>;
+export type PlanChannel = z.infer<typeof PlanChannel>;
 
 export const Plan = z.strictObject({
-  format: z.literal("tinpenny-plan/1"),
+  format: z.literal("tinpenny-plan/2"),
   kit: Name,
   /** Revision letter and the newest price date, for the foot of a working; may be empty. */
   revision: z.string().max(20),
@@ -228,6 +262,6 @@ export const Plan = z.strictObject({
   packing: z.array(PlanPacking).max(100),
   charges: z.array(PlanCharge).max(100),
   replacements: z.strictObject({ share: Share, costEach: Amount.nullable() }),
-  sale: PlanSale,
+  channels: z.array(PlanChannel).min(1).max(limits.CHANNELS_MOST),
 });
 export type Plan = z.infer<typeof Plan>;

@@ -53,14 +53,9 @@ const Edition = z.object({
   kits: Count,
   cost: BothViews,
   perKit: BothViews,
-  sale: z.object({
-    price: Exact.nullable(),
-    charged: FigureReply,
-    taxInside: FigureReply,
-    fee: FigureReply,
-    postagePaid: FigureReply,
-    kept: FigureReply,
-  }),
+  price: Exact.nullable().describe("List price, tax included."),
+  kept: FigureReply,
+  brings: FigureReply,
 });
 
 const Order = z.object({
@@ -117,7 +112,13 @@ const Boards = z.object({
   perGoodBoard: FigureReply,
 });
 
-const Work = z.object({ minutes: Exact, hours: Exact, ratePerHour: Exact.nullable(), cost: FigureReply });
+const Work = z.object({
+  minutes: Exact,
+  hours: Exact,
+  sellingMinutes: FigureReply,
+  ratePerHour: Exact.nullable(),
+  cost: FigureReply,
+});
 
 const Head = z.object({
   id: AnyOf,
@@ -142,8 +143,9 @@ const Run = z.object({
   leftOver: FigureReply,
   ...BothViews.shape,
   perKit: BothViews,
-  kept: FigureReply,
-  keptPerKit: FigureReply,
+  kept: FigureReply.describe("After tax, fees and postage."),
+  brings: FigureReply.describe("The same less the time to sell."),
+  bringsPerKit: FigureReply,
   profit: FigureReply,
   earnsPerKit: FigureReply,
   earnedPerHour: FigureReply,
@@ -162,7 +164,7 @@ const Sweep = z.object({
     used: Column,
     perKitSpent: Column,
     perKitUsed: Column,
-    kept: Column,
+    brings: Column.describe("Kept after tax, fees and postage, less the time to sell."),
     profit: Column,
     leftOver: Column,
     nextKitSpent: Column,

@@ -1,7 +1,7 @@
 import { z } from "zod";
 import { Amount, Rate, RateBelowOne, Share } from "./decimal-text.ts";
 import * as limits from "./limits.ts";
-import { Plan, PlanCharge, PlanEdition, PlanPacking, PlanSale, PlanTask } from "./plan.ts";
+import { Plan, PlanCharge, PlanEdition, PlanPacking, PlanTask } from "./plan.ts";
 
 /** What people change of a kit's run: fields left out stay; the version is the one they have seen. */
 
@@ -25,10 +25,6 @@ export const RunChange = z
   .partial()
   .extend({ version: Version });
 export type RunChange = z.infer<typeof RunChange>;
-
-/** Tax, fees and postage of a sale. */
-export const SaleChange = PlanSale.partial().extend({ version: Version });
-export type SaleChange = z.infer<typeof SaleChange>;
 
 export const PriceChange = z.strictObject({ version: Version, price: PlanEdition.shape.price });
 export const WeightChange = z.strictObject({ version: Version, weight: PlanEdition.shape.weight });

@@ -90,6 +90,37 @@ describe("costing a plan that is sent", () => {
   });
 });
 
+describe("a plan file of the first format", () => {
+  const sale = {
+    taxRate: "0.19",
+    feeRate: "0.05",
+    feeFixed: "0.30",
+    postageCharged: "5",
+    postagePaid: "4.50",
+  };
+  const first = ({ channels: _, ...plan }: Plan, over: object = {}) => ({
+    ...plan,
+    format: "tinpenny-plan/1",
+    sale,
+    ...over,
+  });
+
+  it("is read as one channel: 12.00 and 5.00 postage, 19 % inside, 5 % and 0.30, 4.50 paid", async () => {
+    const { as, plan } = await downloaded();
+    const { body } = await call(costing, { as, body: first(plan), query: { working: "" } });
+    // 17.00 × 0.19 ÷ 1.19 = 2.7142… → 2.71; 17.00 × 0.05 + 0.30 = 1.15; 17.00 − 2.71 − 1.15 − 4.50 = 8.64.
+    expect(body.run.bringsPerKit).toEqual({ known: true, value: "8.64" });
+  });
+
+  it("is refused with the field named where its sale is impossible or missing", async () => {
+    const { as, plan } = await downloaded();
+    const wrong = await call(costing, { as, body: first(plan, { sale: { ...sale, feeRate: "1" } }) });
+    expect(wrong.problem?.errors?.map(({ at }) => at)).toEqual(["channels.0.feeRate"]);
+    const none = await call(costing, { as, body: first(plan, { sale: undefined }) });
+    expect(none.problem?.errors?.map(({ at }) => at)).toEqual(["channels"]);
+  });
+});
+
 describe("an impossible plan", () => {
   const offers = (plan: Plan) => plan.parts[0]?.offers ?? [];
   const cases: [string, (plan: Plan) => void, string][] = [
@@ -98,11 +129,31 @@ describe("an impossible plan", () => {
       (plan) => Object.assign(plan.parts[0] ?? {}, { leastSpare: -1 }),
       "parts.0.leastSpare",
     ],
-    ["a fee of 100 %", (plan) => Object.assign(plan.sale, { feeRate: "1" }), "sale.feeRate"],
+    [
+      "a fee of 100 %",
+      (plan) => Object.assign(plan.channels[0] ?? {}, { feeRate: "1" }),
+      "channels.0.feeRate",
+    ],
     [
       "an amount that is no decimal text",
-      (plan) => Object.assign(plan.sale, { feeFixed: 0.3 }),
-      "sale.feeFixed",
+      (plan) => Object.assign(plan.channels[0] ?? {}, { feeFixed: 0.3 }),
+      "channels.0.feeFixed",
+    ],
+    [
+      "fee and tax that leave nothing of a price",
+      (plan) => Object.assign(plan.channels[0] ?? {}, { feeRate: "0.85", taxRate: "0.21" }),
+      "channels.0.feeRate",
+    ],
+    ["a plan that is sold nowhere", (plan) => plan.channels.splice(0), "channels"],
+    [
+      "an order of no kit",
+      (plan) => Object.assign(plan.channels[0] ?? {}, { kitsPerOrder: "0.5" }),
+      "channels.0.kitsPerOrder",
+    ],
+    [
+      "a discount of all of the price",
+      (plan) => Object.assign(plan.channels[0] ?? {}, { discount: "1" }),
+      "channels.0.discount",
     ],
     [
       "a ladder whose quantities repeat",

@@ -8,6 +8,7 @@ import {
 import { POST as endRevision } from "#src/pages/api/workshops/[workshop]/kits/[kit]/revisions/index.ts";
 import { GET as kitList, POST as newKit } from "#src/pages/api/workshops/[workshop]/kits/index.ts";
 import { activitySince } from "#src/server/store/activity.ts";
+import { channelsOf } from "#src/server/store/channel.ts";
 import { changeKit, kitOf } from "#src/server/store/kit.ts";
 import { runPlanOf } from "#src/server/store/run-plan.ts";
 import { call, testApp } from "#tests/support/app.ts";
@@ -41,10 +42,11 @@ describe("a new kit", () => {
       learningSlope: "1",
       kitsMadeBefore: 0,
       replacementShare: "0",
-      taxRate: null,
-      feeRate: null,
-      postagePaid: null,
     });
+    const [site, ...more] = channelsOf(app.db, kit.id);
+    expect(more).toEqual([]);
+    expect(site?.channel).toMatchObject({ name: "Own site", weight: 1, taxRate: null, feeRate: null });
+    expect(site?.channel).toMatchObject({ packingCost: null, minutesPerOrder: null, kitsPerOrder: "1" });
   });
 
   it("needs a name that no other kit of the workshop has", async () => {

@@ -100,7 +100,8 @@ describe("the description of the API", () => {
   });
 
   it("takes bodies from the shapes: amounts are text with their pattern, strangers are refused", () => {
-    const body = document.paths["/api/workshops/{workshop}/kits/{kit}/sale"]?.patch?.requestBody;
+    const body =
+      document.paths["/api/workshops/{workshop}/kits/{kit}/channels/{channel}"]?.patch?.requestBody;
     const schema = body?.content["application/json"]?.schema as { properties: Json; required: string[] };
     expect(schema).toMatchObject({ type: "object", additionalProperties: false, required: ["version"] });
     expect(JSON.stringify(schema.properties.feeFixed)).toContain('"type":"string"');

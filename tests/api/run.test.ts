@@ -8,7 +8,6 @@ import { PATCH as setWeight } from "#src/pages/api/workshops/[workshop]/kits/[ki
 import { POST as addPacking } from "#src/pages/api/workshops/[workshop]/kits/[kit]/packing.ts";
 import { GET as getPlan } from "#src/pages/api/workshops/[workshop]/kits/[kit]/plan.ts";
 import { PATCH as setRun } from "#src/pages/api/workshops/[workshop]/kits/[kit]/run.ts";
-import { PATCH as setSale } from "#src/pages/api/workshops/[workshop]/kits/[kit]/sale.ts";
 import {
   PATCH as changeTask,
   DELETE as removeTask,
@@ -98,31 +97,17 @@ describe("changing a run", () => {
   });
 });
 
-describe("price, fees and tax", () => {
-  it("are the seller's to change, and the designer's only to see", async () => {
+describe("the price of an edition", () => {
+  it("is the seller's to change, and the designer's only to see", async () => {
     const { params, seller, designer, plan } = place();
     const price = { version: 1, price: "13.50" };
     expect((await call(setPrice, { as: designer, params, body: price })).status).toBe(403);
-    expect((await call(setSale, { as: designer, params, body: { version: 1, taxRate: "0.2" } })).status).toBe(
-      403,
-    );
     expect((await call(setPrice, { as: seller, params, body: price })).body).toEqual({ version: 2 });
-    const sale = { version: 1, taxRate: "0.21", feeFixed: null };
-    expect((await call(setSale, { as: seller, params, body: sale })).body).toEqual({ version: 2 });
     const { plan: after } = await plan();
     expect(after.editions[0]?.price).toBe("13.50");
-    expect(after.sale).toMatchObject({ taxRate: "0.21", feeFixed: null, feeRate: "0" });
   });
 
-  it("refuse a fee of 100 % or more", async () => {
-    const { params, seller } = place();
-    const answer = await call(setSale, { as: seller, params, body: { version: 1, feeRate: "1" } });
-    expect(answer.problem?.errors).toEqual([
-      { at: "feeRate", message: "Write a rate from 0 up to, but not including, 100 %." },
-    ]);
-  });
-
-  it("leave an edition of another kit alone", async () => {
+  it("leaves an edition of another kit alone", async () => {
     const { workshop, params, seller, designer } = place();
     const other = runKit(app, workshop, "Rain Post");
     const strange = { ...params, edition: other.edition };

@@ -1,5 +1,6 @@
 import type { Plan, PlanPart } from "#src/shapes/plan.ts";
 import { edition, offer, part, plan, quote, supplier } from "#tests/costing/plans.ts";
+import { channel } from "#tests/costing/price/channels.ts";
 
 /** Lehmer's generator with Park and Miller's numbers (CACM 31, 1988): the same plan on every machine. */
 function chance(seed: number): (below: number) => number {
@@ -80,13 +81,18 @@ export function bigPlan(parts: number, offers: number, breaks: number, sweepTo: 
       { id: "proto", name: "Prototypes", amount: "192", spreadOver: 500 },
     ],
     replacements: { share: "0.02", costEach: "3.40" },
-    sale: {
-      taxRate: "0.21",
-      feeRate: "0.029",
-      feeFixed: "0.30",
-      postageCharged: "4.50",
-      postagePaid: "5.10",
-    },
+    channels: [
+      channel({
+        weight: 7,
+        taxRate: "0.21",
+        feeRate: "0.029",
+        feeFixed: "0.30",
+        postageCharged: "4.50",
+        postagePaid: "5.10",
+        minutesPerOrder: "12",
+      }),
+      channel({ id: "stall", name: "Club stall", weight: 3, taxRate: "0.21", minutesPerOrder: "20" }),
+    ],
   });
 }
 

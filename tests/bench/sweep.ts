@@ -23,11 +23,11 @@ export async function run(): Promise<BenchRow[]> {
   plainRuns();
   const plain = timed(plainRuns);
   const differing = SAMPLE.filter((kits, index) => {
-    const { spent, used, kept, leftOver } = swept.columns;
+    const { spent, used, brings, leftOver } = swept.columns;
     const one = plain.result[index];
     return (
-      [spent, used, kept, leftOver].map((column) => column[kits - 1]).join() !==
-      [one?.spent, one?.used, one?.kept, one?.leftOver].join()
+      [spent, used, brings, leftOver].map((column) => column[kits - 1]).join() !==
+      [one?.spent, one?.used, one?.brings, one?.leftOver].join()
     );
   });
   for (let round = 0; round < WARM_UPS; round += 1) sweepRuns(plan);

@@ -101,14 +101,26 @@ async function planRun(page: Page, kit: string): Promise<void> {
     .fill("40");
   await page.keyboard.press("Enter");
   await money(page, "Price of Full kit", "24");
+}
+
+/** What goes off a sale, on the page about the price; then back to the run. */
+async function setChannel(page: Page, kit: string): Promise<void> {
+  await page.goto(`${kit}/price`, { waitUntil: "networkidle" });
+  await page.getByRole("button", { name: "Change Own site" }).click();
   for (const [label, amount] of [
-    ["Tax inside the price", "19"],
-    ["Fee on price and postage", "5"],
-    ["Fixed fee", "0.30"],
-    ["Postage the buyer pays", "5"],
-    ["Postage you pay", "4.50"],
+    ["Tax rate", "19"],
+    ["Fee rate", "5"],
+    ["Fee per order", "0.30"],
+    ["Postage charged", "5"],
+    ["Postage paid", "4.50"],
+    ["Packing of an order", "0"],
+    ["Time for an order", "0"],
   ] as const)
     await money(page, label, amount);
+  await expect(
+    page.getByRole("button", { name: "Comes in, Own site €18.12, show the working" }),
+  ).toBeVisible();
+  await page.goto(`${kit}/run`, { waitUntil: "networkidle" });
 }
 
 /** A figure of the strip, as it is read out: its button is named by label and value. */
@@ -130,6 +142,7 @@ for (const width of [1440, 390])
     await setFreight(page, kit, "Lumenhof", "4.90");
     await addBoardQuote(page, kit);
     await planRun(page, kit);
+    await setChannel(page, kit);
     await expect(page.getByRole("main")).toContainText(`One kit costs ${BY_HAND.costPerKit}`);
     await expect(page.getByRole("main")).toContainText(`each earns ${BY_HAND.earnsPerKit}`);
     // The header says when the server has everything; only then is a reload a test of what it keeps.

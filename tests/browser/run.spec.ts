@@ -82,12 +82,12 @@ test("figures follow a price while it is typed; what cannot be taken is refused 
   await expect(price).toHaveValue("-5");
   await expect(figure(page, "Earns per kit")).toHaveText(earns ?? "");
   await price.press("Escape");
-  const fee = page.getByLabel("Fee on price and postage");
-  await fee.fill("100");
+  const sure = page.getByLabel("Sure of enough boards");
+  await sure.fill("100");
   await expect(figure(page, "Earns per kit")).toHaveText(earns ?? "");
-  await fee.press("Tab");
+  await sure.press("Tab");
   await expect(page.getByText("Write less than 100 %.")).toBeVisible();
-  await fee.press("Escape");
+  await sure.press("Escape");
 });
 
 test("a task is added, counted and removed by keyboard, and put back", async ({ page }) => {
@@ -174,9 +174,9 @@ test("the plan goes out as a file and its figures come back the same", async ({ 
     });
   await feed(plan);
   await expect(page.getByRole("table", { name: "Figures of mine-plan.json" })).toContainText(cost ?? "");
-  await feed({ ...plan, sale: { ...plan.sale, feeRate: "1" } });
+  await feed({ ...plan, channels: [{ ...plan.channels[0], feeRate: "1" }] });
   await expect(page.getByRole("region", { name: "mine-plan.json cannot be worked out" })).toContainText(
-    "sale.feeRate",
+    "channels.0.feeRate",
   );
 });
 

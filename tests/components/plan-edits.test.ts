@@ -33,7 +33,7 @@ describe("an edit on this screen", () => {
   });
 
   it("shares a version where the database does", () => {
-    expect(holderOf({ kind: "sale" })).toBe(holderOf(RUN));
+    expect(holderOf({ kind: "channel", id: "site" })).not.toBe(holderOf(RUN));
     expect(holderOf({ kind: "weight", id: "kit" })).toBe(holderOf(PRICE));
     expect(withVersion(heldSmallPlan().versions, "kit", 7).rows.kit).toBe(7);
   });
@@ -124,7 +124,7 @@ describe("signed changes of the strip", () => {
   it("are written in the cells and said once, in words", () => {
     const changes = tallyChanges(tally(plan), tally(dearer));
     const address = { workshop: "w", kit: "k" };
-    const cells = tallyCells(tally(dearer), { address, currency: "EUR", editions: plan.editions, changes });
+    const cells = tallyCells(tally(dearer), { address, currency: "EUR", changes });
     expect(cells.map(({ value }) => value)).toEqual(["€7.47", "€12.00", "€4.53", "25", "€298.91"]);
     expect(cells[0]?.change).toEqual({ amount: "+€2.03", turn: "worse" });
     expect(cells[3]?.change).toEqual({ amount: "+6", turn: "worse" });
@@ -134,11 +134,11 @@ describe("signed changes of the strip", () => {
   it("name what a figure waits for, with the way there", () => {
     const unpriced = withFields(heldSmallPlan(), PRICE, { price: null }).plan;
     const address = { workshop: "w", kit: "k" };
-    const cells = tallyCells(tally(unpriced), { address, currency: "EUR", editions: [], changes: [] });
+    const cells = tallyCells(tally(unpriced), { address, currency: "EUR", changes: [] });
     expect(cells[1]).toMatchObject({
       value: null,
       needs: "not set",
-      needsHref: "/workshops/w/kits/k/run#prices",
+      needsHref: "/workshops/w/kits/k/price",
     });
   });
 });

@@ -18,8 +18,15 @@ import { sweepRuns } from "#src/costing/sweep.ts";
 import { smallPlan } from "#tests/support/small-plan.ts";
 
 /** A point from totals alone. */
-function point(kits: number, total: number | null, kept: number | null, breaksAfter = false): CostPoint {
-  return { kits, perKit: null, total, kept, breaksAfter, exact: { perKit: null, total: null, kept: null } };
+function point(kits: number, total: number | null, brings: number | null, breaksAfter = false): CostPoint {
+  return {
+    kits,
+    perKit: null,
+    total,
+    brings,
+    breaksAfter,
+    exact: { perKit: null, total: null, brings: null },
+  };
 }
 
 describe("round figures of an axis", () => {
@@ -52,7 +59,7 @@ describe("points of a sweep", () => {
     // By hand, see smallPlan: a run of 40 costs 217.91, a kit 5.44775, and brings 480.
     expect(points[2]).toMatchObject({
       total: 217.91,
-      exact: { total: "217.91", perKit: "5.44775", kept: "480" },
+      exact: { total: "217.91", perKit: "5.44775", brings: "480" },
       breaksAfter: false,
     });
   });
@@ -138,7 +145,7 @@ describe("areas of loss and profit", () => {
     const sums = fc.array(fc.tuple(fc.nat(200), fc.nat(200)), { minLength: 2, maxLength: 30 });
     fc.assert(
       fc.property(sums, (rows) => {
-        const points = rows.map(([total, kept], place) => point(place + 1, total, kept));
+        const points = rows.map(([total, brings], place) => point(place + 1, total, brings));
         for (const { upper, lower } of gainAreas(points))
           upper.forEach((place, index) => {
             expect(place.money).toBeGreaterThanOrEqual((lower[index]?.money ?? 0) - 1e-9);

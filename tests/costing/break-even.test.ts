@@ -1,8 +1,8 @@
 import fc from "fast-check";
 import { describe, expect, test, vi } from "vitest";
 import { costRun } from "#src/costing/cost-run.ts";
-import { keptFromSales } from "#src/costing/kit-costs.ts";
 import { preparePlan } from "#src/costing/prepare-plan.ts";
+import { takingsFrom } from "#src/costing/price/takings.ts";
 import { splitKits } from "#src/costing/split-kits.ts";
 import { sweepRuns } from "#src/costing/sweep.ts";
 import { runsForProfit } from "#src/costing/target-profit.ts";
@@ -112,7 +112,7 @@ describe("a run that is made, of which some sell", () => {
           );
           let least: number | null = null;
           for (let sold = kits; sold >= 0; sold -= 1) {
-            if ((keptFromSales(prepared, splitKits(sold, weights)) ?? 0n) >= used) least = sold;
+            if ((takingsFrom(prepared.takings.brings, splitKits(sold, weights)) ?? 0n) >= used) least = sold;
           }
           expect(columns.soldToPay[kits - 1]).toBe(least);
         }

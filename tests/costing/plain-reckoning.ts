@@ -1,5 +1,12 @@
 import { Decimal } from "decimal.js";
-import type { Plan, PlanBoardQuote, PlanOffer, PlanPart, PlanSupplier } from "#src/shapes/plan.ts";
+import type {
+  Plan,
+  PlanBoardQuote,
+  PlanChannel,
+  PlanOffer,
+  PlanPart,
+  PlanSupplier,
+} from "#src/shapes/plan.ts";
 
 /**
  * The method read a second time, as plainly as possible: one run size after the other, every offer
@@ -27,7 +34,7 @@ const DECIMALS: Record<string, number> = { EUR: 2, USD: 2, GBP: 2, JPY: 0, KWD: 
 export interface PlainRun {
   spent: string;
   used: string;
-  kept: string;
+  brings: string;
   leftOver: string;
   parcels: number;
 }
@@ -303,24 +310,38 @@ export function plainRun(plan: Plan, kits: number, boardsFor = plainBoards): Pla
   return {
     spent: spent.toFixed(),
     used: spent.minus(kept).plus(stock).toFixed(),
-    kept: plan.editions
-      .reduce(
-        (sum, edition, at) => sum.plus(keptPerSale(plan, edition.price ?? "0").times(kitsOf[at] ?? 0)),
+    brings: quotient(
+      plan.editions.reduce(
+        (sum, edition, at) => sum.plus(broughtByOne(plan, edition.price ?? "0").times(kitsOf[at] ?? 0)),
         new D(0),
-      )
-      .toFixed(),
+      ),
+    ).toFixed(),
     leftOver: left.toFixed(),
     parcels,
   };
 }
 
-function keptPerSale({ sale, currency }: Plan, price: string): D {
-  const charged = dec(price).plus(sale.postageCharged ?? 0);
-  const rate = dec(sale.taxRate ?? 0);
+/** What one kit brings over the channels that all sell every edition: kept less the time to sell it, at its rate. */
+function broughtByOne({ channels, currency, work }: Plan, price: string): D {
+  const weights = channels.reduce((sum, { weight }) => sum + weight, 0);
+  return channels.reduce((sum, channel) => {
+    const minutes = dec(channel.minutesPerOrder ?? 0)
+      .times(work.ratePerHour ?? 0)
+      .div(60);
+    const order = keptOfOrder(channel, price, currency).minus(minutes);
+    return sum.plus(order.div(channel.kitsPerOrder).times(channel.weight).div(weights));
+  }, new D(0));
+}
+
+function keptOfOrder(channel: PlanChannel, price: string, currency: string): D {
+  const charged = dec(price)
+    .times(channel.kitsPerOrder)
+    .plus(channel.postageCharged ?? 0);
+  const rate = dec(channel.taxRate ?? 0);
   const tax = rounded(charged.times(rate).div(rate.plus(1)), currency);
-  const fee = rounded(charged.times(sale.feeRate ?? 0).plus(sale.feeFixed ?? 0), currency);
+  const fee = rounded(charged.times(channel.feeRate ?? 0).plus(channel.feeFixed ?? 0), currency);
   return charged
     .minus(tax)
     .minus(fee)
-    .minus(sale.postagePaid ?? 0);
+    .minus(channel.postagePaid ?? 0);
 }

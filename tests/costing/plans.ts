@@ -6,6 +6,7 @@ import type {
   PlanPart,
   PlanSupplier,
 } from "#src/shapes/plan.ts";
+import { channel } from "#tests/costing/price/channels.ts";
 
 /** Small invented plans for tests: every field stands, and a test names only what it is about. */
 
@@ -87,7 +88,7 @@ export function quote(over: Partial<PlanBoardQuote> = {}): PlanBoardQuote {
 /** A plan whose every figure but takings is known: no boards, no work, nothing to pay but its parts. */
 export function plan(over: Partial<Plan> = {}): Plan {
   return {
-    format: "tinpenny-plan/1",
+    format: "tinpenny-plan/2",
     kit: "Trial",
     revision: "A",
     currency: "EUR",
@@ -112,7 +113,7 @@ export function plan(over: Partial<Plan> = {}): Plan {
     packing: [],
     charges: [],
     replacements: { share: "0", costEach: null },
-    sale: { taxRate: "0", feeRate: "0", feeFixed: "0", postageCharged: "0", postagePaid: "0" },
+    channels: [channel()],
     ...over,
   };
 }

@@ -1,5 +1,6 @@
 import fc from "fast-check";
 import type { Plan, PlanOffer, PlanPart } from "#src/shapes/plan.ts";
+import { channel } from "#tests/costing/price/channels.ts";
 import { edition, offer, part, plan, quote, supplier } from "./plans.ts";
 
 /** Arbitrary complete plans: everything known, no stock limits, no refusals; small enough for plain reckoning. */
@@ -91,13 +92,19 @@ export const completePlan: fc.Arbitrary<Plan> = suppliers.chain((list) =>
       spreadOver: fc.option(fc.integer({ min: 1, max: 90 })),
       replacements: fc.record({ share, costEach: cents(500) }),
       prices: fc.array(cents(6000), { minLength: 2, maxLength: 2 }),
-      sale: fc.record({
-        taxRate: fc.constantFrom("0", "0.21", "0.255"),
-        feeRate: fc.constantFrom("0", "0.029"),
-        feeFixed: cents(60),
-        postageCharged: cents(700),
-        postagePaid: cents(700),
-      }),
+      channels: fc.array(
+        fc.record({
+          weight: fc.integer({ min: 1, max: 9 }),
+          taxRate: fc.constantFrom("0", "0.21", "0.255"),
+          feeRate: fc.constantFrom("0", "0.029"),
+          feeFixed: cents(60),
+          postageCharged: cents(700),
+          postagePaid: cents(700),
+          minutesPerOrder: fc.constantFrom("0", "12", "7.5"),
+          kitsPerOrder: fc.constantFrom("1", "1.4"),
+        }),
+        { minLength: 1, maxLength: 3 },
+      ),
     })
     .map((made) =>
       plan({
@@ -209,7 +216,7 @@ export const completePlan: fc.Arbitrary<Plan> = suppliers.chain((list) =>
         packing: [{ id: "bag", name: "Bag", editions: ["full"], costPerKit: made.packing }],
         charges: [{ id: "photo", name: "Photographs", amount: made.charge, spreadOver: made.spreadOver }],
         replacements: made.replacements,
-        sale: made.sale,
+        channels: made.channels.map((terms, place) => channel({ id: `c${place}`, ...terms })),
       }),
     ),
 );

@@ -26,7 +26,7 @@ describe("sweepRuns", () => {
             used: columns.used[at],
             perKitSpent: columns.perKitSpent[at],
             perKitUsed: columns.perKitUsed[at],
-            kept: columns.kept[at],
+            brings: columns.brings[at],
             profit: columns.profit[at],
             leftOver: columns.leftOver[at],
             parcels: columns.parcels[at],
@@ -36,7 +36,7 @@ describe("sweepRuns", () => {
             used: value(run.used),
             perKitSpent: value(run.perKit.spent),
             perKitUsed: value(run.perKit.used),
-            kept: value(run.kept),
+            brings: value(run.brings),
             profit: value(run.profit),
             leftOver: value(run.leftOver),
             parcels: run.parcels,
@@ -58,10 +58,10 @@ describe("sweepRuns", () => {
           expect([
             columns.spent[at],
             columns.used[at],
-            columns.kept[at],
+            columns.brings[at],
             columns.leftOver[at],
             columns.parcels[at],
-          ]).toEqual([run.spent, run.used, run.kept, run.leftOver, run.parcels]);
+          ]).toEqual([run.spent, run.used, run.brings, run.leftOver, run.parcels]);
         }
       }),
       { numRuns: 25 },

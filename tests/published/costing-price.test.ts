@@ -1,13 +1,13 @@
 import { describe, expect, test } from "vitest";
 import type { Figure } from "#src/costing/figure.ts";
 import type { Aim } from "#src/costing/price/aims.ts";
-import type { Channel } from "#src/costing/price/channel.ts";
 import { channelTable } from "#src/costing/price/channel-table.ts";
 import { evenAt } from "#src/costing/price/even-at.ts";
 import { priceContext } from "#src/costing/price/price-context.ts";
 import { priceForAim } from "#src/costing/price/price-for-aim.ts";
 import { yieldsAt } from "#src/costing/price/price-yields.ts";
 import { profitAfterTax } from "#src/costing/target-profit.ts";
+import type { PlanChannel } from "#src/shapes/plan.ts";
 import { edition, plan } from "#tests/costing/plans.ts";
 import { channel } from "#tests/costing/price/channels.ts";
 
@@ -24,7 +24,7 @@ function made(
   fixed: string,
   kits: number,
   products: readonly Product[] = [{ variable: 0, mix: 1 }],
-  channels: Channel[] = [channel()],
+  channels: PlanChannel[] = [channel()],
 ) {
   const run = plan({
     run: { kits, sweepTo: 1 },
@@ -39,7 +39,7 @@ function made(
     })),
     charges: [{ id: "fixed", name: "Fixed", amount: fixed, spreadOver: null }],
   });
-  return priceContext(run, channels);
+  return priceContext({ ...run, channels });
 }
 
 function priceFor(context: ReturnType<typeof made>, aim: Aim): string | null {
@@ -175,7 +175,7 @@ describe("a sales mix as channels of one product", () => {
 });
 
 describe("tax of a sale", () => {
-  const order = (over: Partial<Channel>, price: string) => {
+  const order = (over: Partial<PlanChannel>, price: string) => {
     const context = made("1", 1, [{ price: Number(price), variable: 0, mix: 1 }], [channel(over)]);
     return channelTable(context, "e0").map(({ taxInside, taxOnTop, comesIn }) =>
       [taxInside, taxOnTop, comesIn].map((figure) => share(figure, 2)),

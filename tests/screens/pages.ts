@@ -37,4 +37,8 @@ export const PAGES: readonly PictureOf[] = [
   { name: "run", path: kit("Dew Lantern", "run") },
   { name: "run-not-known", path: kit("Tide Clock", "run") },
   { name: "run-empty", path: kit("Moth Lamp", "run") },
+  { name: "price", path: kit("Dew Lantern", "price") },
+  { name: "price-two-channels", path: kit("Bench Pip", "price") },
+  { name: "price-not-known", path: kit("Tide Clock", "price") },
+  { name: "price-empty", path: kit("Moth Lamp", "price") },
 ];

@@ -85,10 +85,10 @@ describe("a kit whose list is not begun", () => {
       "needs both",
     ]);
     const address = { workshop: workshop.id, kit: kit.id };
-    const cells = tallyCells(money.tally, { address, currency: "EUR", editions: [], changes: [] });
+    const cells = tallyCells(money.tally, { address, currency: "EUR", changes: [] });
     expect(cells.map(({ label, needs, needsHref }) => [label, needs, needsHref?.split(kit.id)[1]])).toEqual([
       ["Cost per kit", "needs parts", "/parts"],
-      ["Price", "not set", "/run#prices"],
+      ["Price", "not set", "/price"],
       ["Earns per kit", "needs both", "/parts"],
       ["Even after", "needs both", "/parts"],
       ["Cash needed", "needs parts", "/parts"],

@@ -2,6 +2,7 @@ import { editions } from "#db/schema/kits.ts";
 import { lineQuantities, lines, parts } from "#db/schema/parts.ts";
 import { charges, packingItems, runPlans, tasks } from "#db/schema/runs.ts";
 import { offerBreaks, offers, suppliers } from "#db/schema/supply.ts";
+import { addChannel } from "#src/server/store/channel.ts";
 import type { KitRow } from "#src/server/store/kit.ts";
 import type { WorkshopRow } from "#src/server/store/membership.ts";
 import type { App } from "#tests/support/app.ts";
@@ -9,15 +10,39 @@ import type { App } from "#tests/support/app.ts";
 /** The price of one part in the kit below; no reply to a role that may not see money holds it. */
 export const TELLTALE_PRICE = "0.773911";
 
+/** A way to sell that takes nothing. */
+const FREE_CHANNEL = {
+  name: "Own site",
+  position: 0,
+  weight: 1,
+  editions: null,
+  discount: "0",
+  taxRate: "0",
+  taxStated: "inside",
+  feeRate: "0",
+  feeFixed: "0",
+  feeOnPostage: true,
+  feeOnTax: true,
+  postageCharged: "0",
+  postagePaid: "0",
+  packingCost: "0",
+  otherName: "",
+  otherAmount: "0",
+  otherSharedOver: 1,
+  minutesPerOrder: "0",
+  kitsPerOrder: "1",
+} as const;
+
 /**
  * A small kit with a run of 40 that can be reckoned by hand: no board, one part (two in a kit), one supplier
- * with flat freight, one task, one packing item, one once-only charge, one edition at 12.00.
+ * with flat freight, one task, one packing item, one once-only charge, one edition at 12.00, one channel
+ * that takes nothing.
  */
 export function runKit(
   app: App,
   workshop: WorkshopRow,
   name = "Gate Bell",
-): KitRow & { edition: string; task: string } {
+): KitRow & { edition: string; task: string; site: string } {
   const { db } = app;
   const kit = app.kit(workshop, { name, boardNeeded: false });
   const at = { workshopId: workshop.id, kitId: kit.id };
@@ -33,13 +58,10 @@ export function runKit(
       learningSlope: "1",
       kitsMadeBefore: 0,
       replacementShare: "0",
-      taxRate: "0",
-      feeRate: "0",
-      feeFixed: "0",
-      postageCharged: "0",
-      postagePaid: "0",
     })
     .run();
+  const site = of("site");
+  addChannel(db, { ...at, ...FREE_CHANNEL, id: site }, []);
   const edition = of("edition");
   db.insert(editions)
     .values({ ...at, id: edition, position: 1, name: "Kit", weight: 1, boardsPerKit: 0, price: "12.00" })
@@ -55,7 +77,7 @@ export function runKit(
   db.insert(charges)
     .values({ ...at, id: of("stencil"), position: 1, name: "Photographs", amount: "60" })
     .run();
-  return { ...kit, edition, task };
+  return { ...kit, edition, task, site };
 }
 
 function addPart(app: App, at: { workshopId: string; kitId: string }, edition: string): void {

@@ -1,5 +1,6 @@
 import type { KitPlan } from "#src/server/kit-plan.ts";
 import type { Plan, PlanOffer, PlanPart } from "#src/shapes/plan.ts";
+import { channel } from "#tests/costing/price/channels.ts";
 
 const offer = (over: Partial<PlanOffer>): PlanOffer => ({
   id: "",
@@ -38,7 +39,7 @@ const part = (id: string, name: string, perKit: number, offers: PlanOffer[]): Pl
  */
 export function smallPlan(): Plan {
   return {
-    format: "tinpenny-plan/1",
+    format: "tinpenny-plan/2",
     kit: "Gate Bell",
     revision: "A",
     currency: "EUR",
@@ -83,7 +84,7 @@ export function smallPlan(): Plan {
     packing: [{ id: "bags", name: "Bags", editions: null, costPerKit: "0.25" }],
     charges: [{ id: "photos", name: "Photographs", amount: "60", spreadOver: null }],
     replacements: { share: "0", costEach: null },
-    sale: { taxRate: "0", feeRate: "0", feeFixed: "0", postageCharged: "0", postagePaid: "0" },
+    channels: [channel()],
   };
 }
 

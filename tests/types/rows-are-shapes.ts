@@ -1,4 +1,5 @@
 import type { BoardQuoteRow } from "#src/server/store/board-quote.ts";
+import type { ChannelRow, OwnPrice } from "#src/server/store/channel.ts";
 import type { CurrencyRateRow } from "#src/server/store/currency-rate.ts";
 import type { EditionRow } from "#src/server/store/edition.ts";
 import type { KitRow } from "#src/server/store/kit.ts";
@@ -18,7 +19,7 @@ import type { PartFields } from "#src/shapes/part.ts";
 import type { PartChoice } from "#src/shapes/part-choice.ts";
 import type { PartsChange } from "#src/shapes/parts-change.ts";
 import type { SnapshotPart } from "#src/shapes/parts-snapshot.ts";
-import type { PlanCharge, PlanEdition, PlanPacking, PlanSale, PlanTask } from "#src/shapes/plan.ts";
+import type { PlanChannel, PlanCharge, PlanEdition, PlanPacking, PlanTask } from "#src/shapes/plan.ts";
 import type { RunChange } from "#src/shapes/run-edit.ts";
 import type { SupplierFields } from "#src/shapes/supplier.ts";
 
@@ -46,6 +47,10 @@ type Filled<Row, Besides extends keyof Row = never> = Omit<Row, OwnToServer | Be
 /** The fields of a change, each given. */
 type Given<Change, Besides extends PropertyKey = never> = Required<Omit<Change, "version" | Besides>>;
 
+type OtherCost = "otherName" | "otherAmount" | "otherSharedOver";
+/** Columns of a part of a shape that is flat in its row. */
+type Prefixed<Other> = { [Key in keyof Other & string as `other${Capitalize<Key>}`]: Other[Key] };
+
 type LineSet = Extract<PartsChange, { do: "change-line" }>["set"];
 
 export interface Proofs {
@@ -64,8 +69,10 @@ export interface Proofs {
   rate: Proof<Same<Filled<CurrencyRateRow, "currency" | "setAt">, Given<CurrencyRateInput>>>;
   quote: Proof<Same<Filled<BoardQuoteRow>, Omit<BoardQuoteFields, "breaks">>>;
   panelTerms: Proof<Same<Filled<PanelTermsRow>, PanelTermsFields>>;
-  run: Proof<Same<Filled<RunPlanRow, keyof PlanSale>, Given<RunChange>>>;
-  sale: Proof<Same<Pick<RunPlanRow, keyof PlanSale>, PlanSale>>;
+  run: Proof<Same<Filled<RunPlanRow>, Given<RunChange>>>;
+  channel: Proof<Same<Filled<ChannelRow, OtherCost>, Omit<PlanChannel, "id" | "ownPrices" | "other">>>;
+  otherCost: Proof<Same<Pick<ChannelRow, OtherCost>, Prefixed<PlanChannel["other"]>>>;
+  ownPrice: Proof<Same<OwnPrice, PlanChannel["ownPrices"][number]>>;
   task: Proof<Same<Filled<TaskRow>, Omit<PlanTask, "id">>>;
   packing: Proof<Same<Filled<PackingItemRow>, Omit<PlanPacking, "id">>>;
   charge: Proof<Same<Filled<ChargeRow>, Omit<PlanCharge, "id">>>;

@@ -29,12 +29,14 @@ const SETTLE = {
   offers: "Settle the offers",
   boards: "Settle the boards",
   run: "Settle the run",
+  price: "Settle the price",
 };
 const BEGIN = {
   parts: "Bring in a parts list",
   offers: "Add the first offer",
   boards: "Add a board quote",
   run: "Plan the run",
+  price: "Set the price",
 };
 
 /** The one next step of a kit, with the page on which it is taken. */

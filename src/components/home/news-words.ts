@@ -25,6 +25,7 @@ const NOUNS: Readonly<Record<string, [one: string, many: string]>> = {
   quote: ["the board quote of", "board quotes"],
   "panel-terms": ["the panels of", "board houses' panels"],
   edition: ["the edition", "editions"],
+  channel: ["the channel", "channels"],
 };
 
 const VERBS = {
@@ -69,6 +70,7 @@ const PHRASES: Readonly<Record<string, Phrase>> = {
   ...Object.fromEntries(belongings()),
   "edition.change": editionChanged,
   "edition.order": ({ kit }) => `put the editions of ${kit} in another order`,
+  "channel.order": ({ kit }) => `put the channels of ${kit} in another order`,
   "run.change": runChanged,
   "line.add": each(
     ({ name, kit }) => `added ${name} to ${kit}`,

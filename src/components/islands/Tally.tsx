@@ -118,7 +118,6 @@ function Strip({ address, held, first, fixed, sweetSpots }: StripProps) {
       cells={tallyCells(now, {
         address,
         currency: now.currency,
-        editions: held?.plan.editions ?? [],
         changes,
         opens: held ? opens : undefined,
       })}

@@ -1,13 +1,13 @@
 import { grains, scaled } from "#src/costing/grains.ts";
 import type { Need, NeedCode } from "#src/costing/problem.ts";
 import { need } from "#src/costing/run-needs.ts";
-import type { Channel } from "./channel.ts";
+import type { PlanChannel } from "#src/shapes/plan.ts";
 import { MILLION } from "./charged.ts";
 import { type Fraction, fraction, reduced } from "./fraction.ts";
 
 /** A channel with every text read once. Money in grains, rates in millionths; missing terms read as 0. */
 export interface PreparedChannel {
-  channel: Channel;
+  channel: PlanChannel;
   weight: bigint;
   taxRate: bigint;
   taxOnTop: boolean;
@@ -39,7 +39,7 @@ export interface ChannelNeeds {
 }
 
 /** Reads a channel's terms. */
-export function prepareChannel(channel: Channel): PreparedChannel {
+export function prepareChannel(channel: PlanChannel): PreparedChannel {
   const { other } = channel;
   return {
     channel,
@@ -60,7 +60,7 @@ export function prepareChannel(channel: Channel): PreparedChannel {
   };
 }
 
-function channelNeeds(channel: Channel): ChannelNeeds {
+function channelNeeds(channel: PlanChannel): ChannelNeeds {
   const unless = (value: string | null, code: NeedCode) =>
     value === null ? [need(code, [{ channel: channel.id }])] : [];
   const tax = unless(channel.taxRate, "no-tax-rate");

@@ -8,11 +8,17 @@ import type { PriceContext } from "./price-context.ts";
 import type { PriceEnding } from "./price-ending.ts";
 import { CHANNEL_FIGURES, EDITION_FIGURES, type PriceFigureId } from "./price-figures.ts";
 import { aimSheet } from "./working-aim.ts";
-import { kitKeptSheet, kitLeftSheet, kitMarginSheet, kitMarkUpSheet, kitNextSheet } from "./working-kit.ts";
+import {
+  kitBringsSheet,
+  kitKeptSheet,
+  kitLeftSheet,
+  kitMarginSheet,
+  kitMarkUpSheet,
+  kitNextSheet,
+} from "./working-kit.ts";
 import { kitHourSheet } from "./working-kit-hour.ts";
 import { orderSheet } from "./working-order.ts";
 import { orderHourSheet, orderLeftSheet } from "./working-order-left.ts";
-import { soldEvenSheet, soldProfitSheet } from "./working-sold.ts";
 
 type OfChannel = (context: PriceContext, prepared: PreparedChannel, edition: string) => Sheet | null;
 type OfEdition = (context: PriceContext, edition: string) => Sheet;
@@ -25,6 +31,7 @@ const OF_CHANNEL: Record<(typeof CHANNEL_FIGURES)[number], OfChannel> = {
 
 const OF_EDITION: Record<(typeof EDITION_FIGURES)[number], OfEdition> = {
   "kit-kept": kitKeptSheet,
+  "kit-brings": kitBringsSheet,
   "kit-left": kitLeftSheet,
   "kit-hour": kitHourSheet,
   "kit-margin": kitMarginSheet,
@@ -56,21 +63,15 @@ export function aimWorking(
 
 /** Every figure of pricing that opens, in reading order. */
 export function priceFiguresOf({ channels, plan }: PriceContext): PriceFigureId[] {
-  return plan.editions
-    .flatMap(({ id }) => [
-      ...channels
-        .filter((prepared) => sells(prepared, id))
-        .flatMap(({ channel }) =>
-          CHANNEL_FIGURES.map((name): PriceFigureId => `${name}:${channel.id}:${id}`),
-        ),
-      ...EDITION_FIGURES.map((name): PriceFigureId => `${name}:${id}`),
-    ])
-    .concat(["sold-profit", "sold-even-after"]);
+  return plan.editions.flatMap(({ id }) => [
+    ...channels
+      .filter((prepared) => sells(prepared, id))
+      .flatMap(({ channel }) => CHANNEL_FIGURES.map((name): PriceFigureId => `${name}:${channel.id}:${id}`)),
+    ...EDITION_FIGURES.map((name): PriceFigureId => `${name}:${id}`),
+  ]);
 }
 
 function sheetOf(context: PriceContext, figure: PriceFigureId): Sheet | null {
-  if (figure === "sold-profit") return soldProfitSheet(context);
-  if (figure === "sold-even-after") return soldEvenSheet(context);
   const colon = figure.indexOf(":");
   const [name, ids] = [figure.slice(0, colon), figure.slice(colon + 1)];
   const { editions } = context.plan;

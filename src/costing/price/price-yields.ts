@@ -21,6 +21,8 @@ export interface PriceYields {
   cost: Figure;
   /** Own time to sell a kit, at the plan's rate. */
   timeCost: Figure;
+  /** `kept − timeCost`, to the last digit. */
+  brings: Figure;
   /** `kept − cost − timeCost`, to the last digit. */
   left: Figure;
   /** Left ÷ price without tax, and ÷ cost. */
@@ -68,6 +70,7 @@ function keptParts(sold: SoldKit, kit: EditionKit) {
     kept: wholeFigure(kept, sold.needs.kept),
     cost: wholeFigure(cost, kit.needs.cost),
     timeCost: wholeFigure(timeCost, sold.needs.timeCost),
+    brings: wholeFigure(kept - timeCost, sold.needs.brings),
     left: wholeFigure(kept - cost - timeCost, needs),
   };
   return { figures, needs };

@@ -3,6 +3,7 @@ import { joinNeeds } from "#src/costing/run-needs.ts";
 import type { Scope } from "./edition-sale.ts";
 import { type Fraction, fraction, NOTHING, plus, times } from "./fraction.ts";
 import type { PriceContext } from "./price-context.ts";
+import type { SaleContext } from "./sale-context.ts";
 import { type SoldKit, soldKit } from "./sold-kit.ts";
 import { type Takings, takingsOf } from "./takings.ts";
 
@@ -13,7 +14,7 @@ export interface Tried {
 }
 
 /** One kit of every edition sold over its channels, in the plan's order; `tried` takes its edition's place. */
-export function kitsSold(context: PriceContext, tried: Tried | null = null): SoldKit[] {
+export function kitsSold(context: SaleContext, tried: Tried | null = null): SoldKit[] {
   return context.plan.editions.map(({ id }) =>
     tried?.scope.edition === id
       ? soldKit(context, tried.scope, tried.price)

@@ -14,7 +14,7 @@ import {
   timeNeeds,
 } from "./edition-sale.ts";
 import { type Fraction, fraction, minus, NOTHING, times } from "./fraction.ts";
-import type { PriceContext } from "./price-context.ts";
+import type { SaleContext } from "./sale-context.ts";
 
 /** What selling one kit of an edition brings and takes at a price; see `Needs` before any of it. */
 export interface SoldKit extends KitSold {
@@ -36,7 +36,7 @@ export interface SoldKit extends KitSold {
  * @example kept 25.1885, 18.45 minutes to sell it at 12.00 an hour: brings 21.4985
  */
 export function soldKit(
-  context: PriceContext,
+  context: SaleContext,
   scope: Scope,
   price: bigint | null = priceNow(context, scope),
 ): SoldKit {
@@ -60,7 +60,7 @@ export function soldKit(
 }
 
 /** The price of a scope as the plan has it: an edition's list price, or what a channel asks for it. */
-export function priceNow({ plan, channels, unit }: PriceContext, scope: Scope): bigint | null {
+export function priceNow({ plan, channels, unit }: SaleContext, scope: Scope): bigint | null {
   const text = plan.editions.find(({ id }) => id === scope.edition)?.price ?? null;
   const listPrice = text === null ? null : grains(text);
   if (scope.channel === null) return listPrice;

@@ -15,15 +15,15 @@ function basisIn({ plan }: PriceContext): string {
   return `In ${plan.currency}, after tax, fees and postage`;
 }
 
-/** What one kit brings over all channels (section 10). */
+/** What is kept of one kit over all channels (section 10). */
 export function kitKeptSheet(context: PriceContext, edition: string): Sheet {
   const { currency } = context.plan;
   const { kept } = yieldsAt(context, { edition, channel: null });
   return {
-    title: "What one kit brings, over all channels",
+    title: "Kept of one kit, over all channels",
     steps: [
       ...(kept.known ? keptSteps(context, edition) : []),
-      step(kept.known ? "=" : null, "One kit brings", money(kept, currency), "10", { result: true }),
+      step(kept.known ? "=" : null, "Kept of one kit", money(kept, currency), "10", { result: true }),
     ],
     notes: ["Channels count by their share, exactly."],
     basis: basisIn(context),
@@ -50,6 +50,22 @@ function keptSteps(context: PriceContext, edition: string): Step[] {
   });
 }
 
+/** What one kit brings: kept less the time to sell it. */
+export function kitBringsSheet(context: PriceContext, edition: string): Sheet {
+  const { currency } = context.plan;
+  const yields = yieldsAt(context, { edition, channel: null });
+  return {
+    title: "What one kit brings, over all channels",
+    steps: [
+      step(null, "Kept of one kit", money(yields.kept, currency), "10", { opens: `kit-kept:${edition}` }),
+      step("−", "Time to sell it", money(yields.timeCost, currency), "7"),
+      step("=", "One kit brings", money(yields.brings, currency), "10", { result: true }),
+    ],
+    notes: [OWN_WORK],
+    basis: basisIn(context),
+  };
+}
+
 /** What one kit leaves over all channels. */
 export function kitLeftSheet(context: PriceContext, edition: string): Sheet {
   const { currency } = context.plan;
@@ -57,7 +73,7 @@ export function kitLeftSheet(context: PriceContext, edition: string): Sheet {
   return {
     title: "Left of one kit, over all channels",
     steps: [
-      step(null, "One kit brings", money(yields.kept, currency), "10", { opens: `kit-kept:${edition}` }),
+      step(null, "Kept of one kit", money(yields.kept, currency), "10", { opens: `kit-kept:${edition}` }),
       step("−", "Cost of one kit", money(yields.cost, currency), "8", { opens: `edition:${edition}` }),
       step("−", "Time to sell it", money(yields.timeCost, currency), "7"),
       step("=", "Left", money(yields.left, currency), "10", { result: true }),
@@ -133,7 +149,7 @@ export function kitNextSheet(context: PriceContext, edition: string): Sheet {
   return {
     title: "Left of the next kit",
     steps: [
-      step(null, "One kit brings", money(yields.kept, currency), "10", { opens: `kit-kept:${edition}` }),
+      step(null, "Kept of one kit", money(yields.kept, currency), "10", { opens: `kit-kept:${edition}` }),
       step("−", "What one more costs the run", cost, "9"),
       step("−", "Time to sell it", money(yields.timeCost, currency), "7"),
       step("=", "Left", money(yields.nextKit, currency), "10", { result: true }),

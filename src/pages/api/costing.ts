@@ -2,7 +2,7 @@ import { z } from "zod";
 import { reckon } from "#src/server/reckon.ts";
 import { route } from "#src/server/route.ts";
 import { PLAN_BYTES, RUN_LEAST, RUN_MOST } from "#src/shapes/limits.ts";
-import { Plan } from "#src/shapes/plan.ts";
+import { PlanFile } from "#src/shapes/plan-file.ts";
 
 /**
  * Reckons a plan and keeps nothing: the run, with `sweep=1` every run size, and how the figures come about.
@@ -15,7 +15,7 @@ export const POST = route({
     sweep: z.literal("1").optional(),
     working: z.string().max(4000).optional(),
   }),
-  input: Plan,
+  input: PlanFile,
   limit: PLAN_BYTES,
   run: ({ input, query }) => reckon(input, query),
 });

@@ -6,6 +6,7 @@ import { lineQuantities, lines, partChoices } from "#db/schema/parts.ts";
 import { charges, packingItems, runPlans, tasks } from "#db/schema/runs.ts";
 import { shutOutSuppliers } from "#db/schema/supply.ts";
 import { boardQuotesOf } from "./board-quote.ts";
+import { addChannel, channelsOf } from "./channel.ts";
 import { editionsOf } from "./edition.ts";
 import { inChunks } from "./in-chunks.ts";
 import { lineQuantitiesOf, linesOf } from "./line.ts";
@@ -84,13 +85,22 @@ function copyRun(db: Db, { from, to, idFor }: Copying): void {
       .run();
 }
 
+function copyChannels(db: Db, { from, to, idFor }: Copying): void {
+  for (const { channel, ownPrices } of channelsOf(db, from)) {
+    const editions = channel.editions?.map(idFor) ?? null;
+    const prices = ownPrices.map(({ edition, price }) => ({ edition: idFor(edition), price }));
+    addChannel(db, { ...channel, id: idFor(channel.id), kitId: to, editions, version: 1 }, prices);
+  }
+}
+
 /**
  * Copies everything that belongs to one kit into another of the same workshop, which has nothing yet: editions,
- * lines, choices, quotes, run. Parts and offers are the workshop's and are shared; revisions, imports, guests and
+ * lines, choices, quotes, run, channels. Parts and offers are the workshop's and are shared; revisions, imports, guests and
  * history stay with the first.
  */
 export function copyKitRows(db: Db, copying: Copying): void {
   copyList(db, copying);
   copyQuotes(db, copying);
   copyRun(db, copying);
+  copyChannels(db, copying);
 }

@@ -27,7 +27,7 @@ const value = (figure: Figure) => (figure.known ? figure.value : "not known");
 const cents = (figure: Figure) => new D(value(figure)).toFixed(2);
 
 describe("channel by channel", () => {
-  const table = channelTable(priceContext(made, FOUR), "kit");
+  const table = channelTable(priceContext({ ...made, channels: FOUR }), "kit");
   const line = (name: keyof ChannelOrder) => table.map((one) => cents(one[name] as Figure));
 
   test("four channels, by hand", () => {
@@ -50,7 +50,7 @@ describe("channel by channel", () => {
   });
 
   test("all channels together, weighted exactly by 55, 20, 15 and 10", () => {
-    const all = yieldsAt(priceContext(made, FOUR), { edition: "kit", channel: null });
+    const all = yieldsAt(priceContext({ ...made, channels: FOUR }), { edition: "kit", channel: null });
     // 0.55 · 26.31 + 0.20 · 24.60 + 0.15 · 25.70 + 0.10 · 19.44; minutes 11 + 18.45.
     expect([value(all.kept), value(all.minutes), cents(all.left), cents(all.perHour)]).toEqual([
       "25.1895",
@@ -65,7 +65,7 @@ describe("channel by channel", () => {
 
   test("own work at a rate is a cost where it sells as well as where it makes", () => {
     const paid = { ...made, work: { ...made.work, ratePerHour: "12" } };
-    const [site] = channelTable(priceContext(paid, FOUR), "kit");
+    const [site] = channelTable(priceContext({ ...paid, channels: FOUR }), "kit");
     // 19 minutes at 12 are 3.80; 11 minutes are 2.20 more in the kit. An hour earns the same as before.
     expect([site && cents(site.timeCost), site && cents(site.left), site && cents(site.perHour)]).toEqual([
       "3.80",
@@ -76,10 +76,12 @@ describe("channel by channel", () => {
 
   test("two kits in an order share what an order costs", () => {
     const two = [{ ...(FOUR[0] as (typeof FOUR)[number]), kitsPerOrder: "2" }];
-    const [site] = channelTable(priceContext(made, two), "kit");
+    const [site] = channelTable(priceContext({ ...made, channels: two }), "kit");
     // 72.95 · 21/121 = 12.66; 72.95 · 0.015 + 0.25 = 1.34425; 72.95 − 12.66 − 1.34 − 4.10 − 0.95.
     expect(site && cents(site.comesIn)).toBe("53.90");
-    expect(cents(yieldsAt(priceContext(made, two), { edition: "kit", channel: null }).kept)).toBe("26.95");
+    expect(
+      cents(yieldsAt(priceContext({ ...made, channels: two }), { edition: "kit", channel: null }).kept),
+    ).toBe("26.95");
   });
 });
 
@@ -92,7 +94,9 @@ test("what the fee is taken on: postage and tax, or neither", () => {
     ownPrices: [{ edition: "kit", price: "34.00" }],
   };
   const fee = (over: Partial<Parameters<typeof channel>[0]>) =>
-    channelTable(priceContext(made, [channel({ ...base, ...over })]), "kit").map((one) => value(one.fee))[0];
+    channelTable(priceContext({ ...made, channels: [channel({ ...base, ...over })] }), "kit").map((one) =>
+      value(one.fee),
+    )[0];
   expect(fee({})).toBe("3.9");
   expect(fee({ feeOnPostage: false })).toBe("3.4");
   // 38.95 − 6.76 = 32.19; 34.00 − 5.90 = 28.10.
@@ -107,7 +111,7 @@ test("what the fee is taken on: postage and tax, or neither", () => {
 test("against plain decimals, and the lines add up to the last digit", () => {
   fc.assert(
     fc.property(pricedPlan, ({ made: any, channels, places }) => {
-      for (const [index, one] of channelTable(priceContext(any, channels), "full").entries()) {
+      for (const [index, one] of channelTable(priceContext({ ...any, channels }), "full").entries()) {
         const terms = channels[index] as (typeof channels)[number];
         const asked = plainAsked(terms, "full", new D(any.editions[0]?.price ?? 0), places);
         expect(new D(value(one.priceAsked)).eq(asked)).toBe(true);
@@ -125,7 +129,7 @@ test("against plain decimals, and the lines add up to the last digit", () => {
         expect(less(one.comesIn, one.cost, one.timeCost)).toBe(value(one.left));
         expect(less(one.charged, one.goods)).toBe(value(one.postageCharged));
       }
-      const together = yieldsAt(priceContext(any, channels), { edition: "full", channel: null });
+      const together = yieldsAt(priceContext({ ...any, channels }), { edition: "full", channel: null });
       expect(
         grains(value(together.kept)) - grains(value(together.cost)) - grains(value(together.timeCost)),
       ).toBe(grains(value(together.left)));
@@ -136,7 +140,7 @@ test("against plain decimals, and the lines add up to the last digit", () => {
 
 test("a line that can be said is said, and the others name what they need", () => {
   const gaps = channel({ taxRate: null, postagePaid: null, ownPrices: [{ edition: "kit", price: "20" }] });
-  const [one] = channelTable(priceContext(made, [gaps]), "kit");
+  const [one] = channelTable(priceContext({ ...made, channels: [gaps] }), "kit");
   expect(one && [value(one.charged), value(one.fee), value(one.taxInside)]).toEqual(["20", "0", "not known"]);
   expect(one?.comesIn).toEqual({
     known: false,
@@ -153,10 +157,13 @@ test("prices without tax need the tax rate only to follow a list that has it ins
   const shop = channel({ taxRate: null, taxStated: "on-top", feeOnTax: false });
   const needs = [{ code: "no-tax-rate", at: [{ channel: "site" }], page: "price" }];
   const scopes = [null, "site"].map((only) => ({ edition: "kit", channel: only }));
-  const follows = priceContext(made, [shop]);
+  const follows = priceContext({ ...made, channels: [shop] });
   for (const scope of scopes) expect(yieldsAt(follows, scope).kept).toMatchObject({ known: false, needs });
   expect(channelTable(follows, "kit")[0]?.priceAsked).toMatchObject({ needs });
-  const own = priceContext(made, [{ ...shop, ownPrices: [{ edition: "kit", price: "20.50" }] }]);
+  const own = priceContext({
+    ...made,
+    channels: [{ ...shop, ownPrices: [{ edition: "kit", price: "20.50" }] }],
+  });
   for (const scope of scopes) expect(value(yieldsAt(own, scope).kept)).toBe("20.5");
   expect(
     channelTable(own, "kit").map(({ taxInside, comesIn }) => [value(taxInside), value(comesIn)]),

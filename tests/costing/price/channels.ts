@@ -1,8 +1,7 @@
-import type { Channel } from "#src/costing/price/channel.ts";
-import type { PlanSale } from "#src/shapes/plan.ts";
+import type { PlanChannel } from "#src/shapes/plan.ts";
 
 /** A channel that takes nothing: a test names only what it is about. */
-export function channel(over: Partial<Channel> = {}): Channel {
+export function channel(over: Partial<PlanChannel> = {}): PlanChannel {
   return {
     id: "site",
     name: "Own site",
@@ -26,15 +25,10 @@ export function channel(over: Partial<Channel> = {}): Channel {
   };
 }
 
-/** The one channel that a plan's sale terms say. */
-export function channelOf(sale: PlanSale): Channel {
-  return channel({ ...sale });
-}
-
 const twentyOne = { taxRate: "0.21" };
 
 /** Four invented channels: site, marketplace, stall, shop. */
-export const FOUR: Channel[] = [
+export const FOUR: PlanChannel[] = [
   channel({
     ...twentyOne,
     weight: 55,

@@ -12,19 +12,19 @@ import { plainSplit } from "#tests/costing/plain-reckoning.ts";
 import { edition, plan } from "#tests/costing/plans.ts";
 import { completePlan } from "#tests/costing/random-plans.ts";
 import { MANY_CASES } from "#tests/support/slow.ts";
-import { channel, channelOf } from "./channels.ts";
+import { channel } from "./channels.ts";
 import { D, plainKit } from "./plain-pricing.ts";
 import { pricedPlan } from "./random-channels.ts";
 
 vi.setConfig({ testTimeout: MANY_CASES });
 
 describe("break-even over channels", () => {
-  test("one channel with the plan's sale terms: the figures of the sweep and of the run, to the last digit", () => {
+  test("the plan's own channels: the figures of the sweep and of the run, to the last digit", () => {
     fc.assert(
       fc.property(completePlan, fc.integer({ min: 1, max: 25 }), (made, kits) => {
         const swept = sweepRuns(made);
-        const context = priceContext(made, [channelOf(made.sale)], kits);
-        const even = evenAt(priceContext(made, [channelOf(made.sale)]), swept.columns.used);
+        const context = priceContext(made, kits);
+        const even = evenAt(priceContext(made), swept.columns.used);
         expect(even.profit).toEqual(swept.columns.profit);
         expect(even.crossings).toEqual(swept.breakEven.crossings.map(({ changes, ...rest }) => rest));
         expect([even.first, even.safe, even.upTo, even.marginOfSafety]).toEqual([
@@ -48,7 +48,7 @@ describe("break-even over channels", () => {
     fc.assert(
       fc.property(pricedPlan, ({ made, channels, places }) => {
         const { columns } = sweepRuns(made);
-        const context = priceContext(made, channels);
+        const context = priceContext({ ...made, channels });
         const even = evenAt(context, columns.used);
         const rate = new D(made.work.ratePerHour ?? 0);
         const each = made.editions.map(({ id, price }) => {
@@ -90,21 +90,25 @@ describe("break-even over channels", () => {
     });
     const first = (edition: string) => {
       const alone = onlyEdition(made, edition);
-      return evenAt(priceContext(alone, [channel()]), sweepRuns(alone).columns.used).first;
+      return evenAt(priceContext({ ...alone, channels: [channel()] }), sweepRuns(alone).columns.used).first;
     };
     // 50 ÷ 8.50 = 5.88…; 50 ÷ 2.50 = 20; nine kits are five and four: 42.50 + 10.00, eight bring 44.00.
     expect([first("full"), first("bare")]).toEqual([6, 20]);
-    expect(evenAt(priceContext(made, [channel()]), sweepRuns(made).columns.used).first).toBe(9);
+    expect(evenAt(priceContext({ ...made, channels: [channel()] }), sweepRuns(made).columns.used).first).toBe(
+      9,
+    );
   });
 
   test("where nothing is known nothing is said", () => {
     const made = plan({ editions: [edition()] });
-    expect(evenAt(priceContext(made, [channel()]), ["1", "2"])).toMatchObject({
+    expect(evenAt(priceContext({ ...made, channels: [channel()] }), ["1", "2"])).toMatchObject({
       known: false,
       upTo: 0,
       first: null,
     });
-    expect(evenAfterAt(priceContext(made, [channel()]))).toMatchObject({ needs: [{ code: "no-price" }] });
+    expect(evenAfterAt(priceContext({ ...made, channels: [channel()] }))).toMatchObject({
+      needs: [{ code: "no-price" }],
+    });
   });
 });
 
@@ -124,11 +128,12 @@ describe("the strip of prices", () => {
       editions: [edition({ price: "10" })],
       charges: [{ id: "c", name: "C", amount: "100", spreadOver: null }],
     });
-    const strip = priceStrip(priceContext(made, [channel()]), { edition: "kit", channel: null }, "10", [
-      "4",
-      "8",
+    const strip = priceStrip(
+      priceContext({ ...made, channels: [channel()] }),
+      { edition: "kit", channel: null },
       "10",
-    ]);
+      ["4", "8", "10"],
+    );
     // 100 ÷ 20 = 5.00 a kit; 100 ÷ 8 = 12.5.
     expect(strip).toMatchObject([
       {

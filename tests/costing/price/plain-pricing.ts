@@ -1,14 +1,13 @@
 import { Decimal } from "decimal.js";
 import type { Aim } from "#src/costing/price/aims.ts";
-import type { Channel } from "#src/costing/price/channel.ts";
 import type { RunCost } from "#src/costing/price/run-cost.ts";
-import type { Plan } from "#src/shapes/plan.ts";
+import type { Plan, PlanChannel } from "#src/shapes/plan.ts";
 
 /** Sections 10 and 11 told plainly in decimals, one price at a time: what the quick search is compared with. */
 
 export const D = Decimal.clone({ precision: 120, rounding: Decimal.ROUND_HALF_UP });
 
-export function plainAsked(channel: Channel, edition: string, list: Decimal, places: number): Decimal {
+export function plainAsked(channel: PlanChannel, edition: string, list: Decimal, places: number): Decimal {
   const own = channel.ownPrices.find((one) => one.edition === edition);
   if (own) return new D(own.price);
   const left = list.times(new D(1).minus(channel.discount));
@@ -17,7 +16,7 @@ export function plainAsked(channel: Channel, edition: string, list: Decimal, pla
 }
 
 /** What one order keeps. */
-export function plainKept(channel: Channel, asked: Decimal, places: number): Decimal {
+export function plainKept(channel: PlanChannel, asked: Decimal, places: number): Decimal {
   const rate = new D(channel.taxRate ?? 0);
   const inside = channel.taxStated === "inside";
   const taxOf = (sum: Decimal) => (inside ? sum.times(rate).div(rate.plus(1)) : sum.times(rate)).toDP(places);
@@ -45,7 +44,7 @@ export function plainKept(channel: Channel, asked: Decimal, places: number): Dec
 
 /** Kept, price without tax and minutes of one kit of an edition over the channels that sell it. */
 export function plainKit(
-  channels: readonly Channel[],
+  channels: readonly PlanChannel[],
   edition: string,
   price: Decimal,
   places: number,
@@ -71,7 +70,7 @@ export function plainKit(
 /** How far an aim is passed at a price; below nothing it is not reached. */
 export function plainGap(
   plan: Plan,
-  channels: readonly Channel[],
+  channels: readonly PlanChannel[],
   cost: RunCost,
   scope: { edition: string; channel: string | null },
   aim: Aim,

@@ -1,13 +1,12 @@
 import fc from "fast-check";
 import { describe, expect, test, vi } from "vitest";
 import type { Aim } from "#src/costing/price/aims.ts";
-import type { Channel } from "#src/costing/price/channel.ts";
 import { priceContext } from "#src/costing/price/price-context.ts";
 import { PRICE_ENDINGS, type PriceEnding } from "#src/costing/price/price-ending.ts";
 import { priceForAim } from "#src/costing/price/price-for-aim.ts";
 import { yieldsAt } from "#src/costing/price/price-yields.ts";
 import { aimSentence } from "#src/costing/problem-words.ts";
-import type { Plan } from "#src/shapes/plan.ts";
+import type { Plan, PlanChannel } from "#src/shapes/plan.ts";
 import { edition, plan } from "#tests/costing/plans.ts";
 import { MANY_CASES } from "#tests/support/slow.ts";
 import { channel, FOUR } from "./channels.ts";
@@ -41,7 +40,7 @@ describe("the least price for an aim", () => {
     let solved = 0;
     fc.assert(
       fc.property(cases, ({ made: { made, channels, places }, scope, aim, ending }) => {
-        const context = priceContext(made, channels);
+        const context = priceContext({ ...made, channels });
         const answer = priceForAim(context, scope, aim, ending);
         if (!answer.found || Number(answer.price) * 10 ** places > 9000) return;
         const reaches = (price: string) =>
@@ -70,8 +69,8 @@ describe("the least price for an aim", () => {
           feeRate: (Number(one.feeRate) + more / 10_000).toFixed(4),
         }));
         // The other editions keep their prices and pay the higher fee as well.
-        const low = priceForAim(priceContext(made.made, made.channels), scope, aim, ending);
-        const high = priceForAim(priceContext(made.made, dearer), scope, aim, ending);
+        const low = priceForAim(priceContext({ ...made.made, channels: made.channels }), scope, aim, ending);
+        const high = priceForAim(priceContext({ ...made.made, channels: dearer }), scope, aim, ending);
         if (!low.found) expect(high.found).toBe(false);
         if (low.found && high.found) expect(new D(high.price).gte(low.price)).toBe(true);
       }),
@@ -82,7 +81,7 @@ describe("the least price for an aim", () => {
   test("says what its price yields: no less than was aimed at, and less a step below", () => {
     fc.assert(
       fc.property(cases, ({ made: { made, channels }, scope, aim, ending }) => {
-        const context = priceContext(made, channels);
+        const context = priceContext({ ...made, channels });
         const answer = priceForAim(context, scope, aim, ending);
         if (!answer.found) return;
         expect(reached(yieldsAt(context, scope, answer.price), aim)).not.toBe(false);
@@ -115,8 +114,8 @@ function reached(yields: ReturnType<typeof yieldsAt>, aim: Aim): boolean | null 
 
 const SCOPE = { edition: "kit", channel: null };
 
-function priced(made: Partial<Plan>, channels: Channel[], aim: Aim, ending: PriceEnding = "none") {
-  return priceForAim(priceContext(plan(made), channels), SCOPE, aim, ending);
+function priced(made: Partial<Plan>, channels: PlanChannel[], aim: Aim, ending: PriceEnding = "none") {
+  return priceForAim(priceContext({ ...plan(made), channels }), SCOPE, aim, ending);
 }
 
 const costing = (cost: string, kits = 1): Partial<Plan> => ({
@@ -147,7 +146,7 @@ describe("by hand", () => {
     // Fee 45 %, tax 25 % inside. 0.12 pays 0.024 → 0.02 and 0.054 → 0.05, keeps 0.05; 0.13 pays 0.026 → 0.03
     // and 0.0585 → 0.06, keeps 0.04; 0.11 pays 0.02 and 0.05, keeps 0.04. Divided out it would be 0.05 ÷ 0.35.
     const uneven = channel({ taxRate: "0.25", feeRate: "0.45" });
-    const context = priceContext(plan(costing("0.05")), [uneven]);
+    const context = priceContext({ ...plan(costing("0.05")), channels: [uneven] });
     expect(priceForAim(context, SCOPE, { aim: "run-even" })).toMatchObject({ price: "0.12", before: "0.11" });
     expect(yieldsAt(context, SCOPE, "0.13").left).toEqual({ known: true, value: "-0.01" });
   });
@@ -178,7 +177,7 @@ describe("by hand", () => {
 
   test("one channel, as though the edition were sold there alone", () => {
     const unpaid = { ...plan().work, ratePerHour: "0" };
-    const context = priceContext(plan({ ...costing("14.95"), work: unpaid }), FOUR);
+    const context = priceContext({ ...plan({ ...costing("14.95"), work: unpaid }), channels: FOUR });
     const answer = priceForAim(context, { edition: "kit", channel: "shop" }, { aim: "run-even" });
     // 14.95 and 1.07 of postage paid.
     expect(answer).toMatchObject({ price: "16.02", before: "16.01" });

@@ -1,7 +1,6 @@
 import fc from "fast-check";
 import type { Aim } from "#src/costing/price/aims.ts";
-import type { Channel, OwnPrice } from "#src/costing/price/channel.ts";
-import type { Plan } from "#src/shapes/plan.ts";
+import type { Plan, PlanChannel } from "#src/shapes/plan.ts";
 import { edition, plan } from "#tests/costing/plans.ts";
 import { channel } from "./channels.ts";
 
@@ -19,13 +18,13 @@ function amount(places: number, most: number, least = 0): fc.Arbitrary<string> {
   return fc.integer({ min: least, max: most }).map((minor) => (minor / 10 ** places).toFixed(places));
 }
 
-function channelIn(places: number): fc.Arbitrary<Channel> {
+function channelIn(places: number): fc.Arbitrary<PlanChannel> {
   return fc
     .record({
       weight: fc.integer({ min: 1, max: 60 }),
       discount: fc.constantFrom("0", "0", "0.25", "0.3333", "-0.05"),
       ownPrices: fc.oneof(
-        { weight: 4, arbitrary: fc.constant<OwnPrice[]>([]) },
+        { weight: 4, arbitrary: fc.constant<PlanChannel["ownPrices"]>([]) },
         amount(places, 900, 50).map((price) => [{ edition: "full", price }]),
       ),
       taxRate: fc.constantFrom("0", "0.21", "0.055", "0.255"),
@@ -49,14 +48,14 @@ function channelIn(places: number): fc.Arbitrary<Channel> {
 }
 
 /** Up to three channels with their ids. */
-export function channelsIn(places: number): fc.Arbitrary<Channel[]> {
+export function channelsIn(places: number): fc.Arbitrary<PlanChannel[]> {
   return fc
     .array(channelIn(places), { minLength: 1, maxLength: 3 })
     .map((list) => list.map((one, place) => ({ ...one, id: `c${place}`, name: `C${place}` })));
 }
 
 /** A plan of two editions whose costs are charges, packing and work, and its channels. */
-export const pricedPlan: fc.Arbitrary<{ made: Plan; channels: Channel[]; places: number }> = fc
+export const pricedPlan: fc.Arbitrary<{ made: Plan; channels: PlanChannel[]; places: number }> = fc
   .constantFrom("EUR", "JPY", "KWD")
   .chain((currency) => {
     const places = placesOf(currency);

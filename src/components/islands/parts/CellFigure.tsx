@@ -1,6 +1,9 @@
 import { Figure } from "./Figure.tsx";
 import type { TallyCell } from "./TallyStrip.tsx";
 
+/** Underlined as links are; a dotted foot would promise a working. */
+const FIGURE_LINK = "whitespace-nowrap decoration-2 underline-offset-4 hover:text-petrol";
+
 /** The figure of a cell, or what stands in its place while it is not known. */
 export function CellFigure({ cell, workingOut }: { cell: TallyCell; workingOut?: boolean }) {
   if (cell.value === null)
@@ -14,6 +17,12 @@ export function CellFigure({ cell, workingOut }: { cell: TallyCell; workingOut?:
           (cell.needs ?? "not known")
         )}
       </span>
+    );
+  if (cell.href)
+    return (
+      <a href={cell.href} className={`type-tally ${FIGURE_LINK} ${workingOut ? "text-ink-2" : "text-ink"}`}>
+        {cell.value}
+      </a>
     );
   return (
     <span className="whitespace-nowrap">

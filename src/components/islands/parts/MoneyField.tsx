@@ -79,7 +79,7 @@ export function MoneyField({
         >
           <span
             aria-hidden="true"
-            className={`${UNIT_BOX_LOOK} border-r border-rule ${large ? "type-h1 px-5 font-normal!" : ""}`}
+            className={`${UNIT_BOX_LOOK} border-r border-rule ${large ? "type-h1! px-5 font-normal!" : ""}`}
           >
             {currency}
           </span>

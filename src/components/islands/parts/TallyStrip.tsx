@@ -24,6 +24,8 @@ export type TallyCell = {
   /** A word after the figure: "sold". */
   after?: string;
   change?: ChangeProps;
+  /** The page a figure leads to that does not open. */
+  href?: string;
   onOpen?: () => void;
   open?: boolean;
   /** Stands in the phone's bar; the others are in its sheet. */

@@ -15,7 +15,7 @@ export interface ClashesProps {
 
 function thing(plan: Plan, row: PlanRow): string | undefined {
   if (!("id" in row)) return undefined;
-  const rows = [...plan.editions, ...plan.work.tasks, ...plan.packing, ...plan.charges];
+  const rows = [...plan.editions, ...plan.work.tasks, ...plan.packing, ...plan.charges, ...plan.channels];
   return rows.find(({ id }) => id === row.id)?.name;
 }
 

@@ -1,4 +1,5 @@
 import { countText, moneyText, rateText } from "#src/components/amount-text.ts";
+import type { PlanChannel } from "#src/shapes/plan.ts";
 import type { PlanRow } from "./plan-rows.ts";
 
 const MONEY = [
@@ -10,6 +11,7 @@ const MONEY = [
   "replacementCost",
   "amount",
   "costPerKit",
+  "packingCost",
 ];
 const RATES = [
   "taxRate",
@@ -19,6 +21,7 @@ const RATES = [
   "boardConfidence",
   "learningSlope",
   "replacementShare",
+  "discount",
 ];
 
 /** What a field of the plan is called in a sentence. */
@@ -39,7 +42,7 @@ const NAMES: Record<string, string> = {
   postageCharged: "postage the buyer pays",
   postagePaid: "postage you pay",
   price: "price",
-  weight: "share of the run",
+  weight: "share",
   ratePerHour: "rate for an hour",
   minutesPerKit: "minutes a kit",
   setUpMinutes: "minutes to set up",
@@ -48,6 +51,15 @@ const NAMES: Record<string, string> = {
   spreadOver: "kits it is spread over",
   editions: "editions",
   name: "name",
+  discount: "discount",
+  ownPrices: "own prices",
+  taxStated: "how the tax is stated",
+  feeOnPostage: "fee on postage",
+  feeOnTax: "fee on tax",
+  packingCost: "packing of an order",
+  other: "other cost",
+  minutesPerOrder: "minutes an order",
+  kitsPerOrder: "kits in an order",
 };
 
 /** A value of a field as it is written in a sentence. */
@@ -56,8 +68,24 @@ export function fieldValue(field: string, value: unknown, currency: string): str
   if (MONEY.includes(field)) return moneyText(String(value), currency);
   if (RATES.includes(field)) return rateText(String(value));
   if (typeof value === "number") return countText(value);
+  if (typeof value === "boolean") return value ? "yes" : "no";
+  if (field === "taxStated") return value === "inside" ? "inside the price" : "on top of the price";
+  if (field === "ownPrices") return ownPricesWords(value as PlanChannel["ownPrices"], currency);
+  if (field === "other") return otherWords(value as PlanChannel["other"], currency);
   if (Array.isArray(value)) return value.length === 1 ? "one edition" : `${value.length} editions`;
   return String(value);
+}
+
+function ownPricesWords(prices: PlanChannel["ownPrices"], currency: string): string {
+  return prices.length === 0
+    ? "those of the list"
+    : prices.map(({ price }) => moneyText(price, currency)).join(", ");
+}
+
+function otherWords({ name, amount, sharedOver }: PlanChannel["other"], currency: string): string {
+  const cost = amount === null ? "not set" : moneyText(amount, currency);
+  const shared = sharedOver === 1 ? "" : ` for ${countText(sharedOver)} orders`;
+  return `${name === "" ? "" : `${name}, `}${cost}${shared}`;
 }
 
 /** "Run", "Price of Full kit": a field with the thing it belongs to. */

@@ -48,21 +48,23 @@ interface NoneOfIt {
   field: string;
 }
 
+function ofChannel(label: string, field: string): (at: Place) => NoneOfIt {
+  return ({ channel }) => ({ label, row: { kind: "channel", id: channel ?? "" }, field });
+}
+
 const NONE_OF_IT: Partial<Record<NeedCode, (at: Place) => NoneOfIt>> = {
   "no-hourly-rate": () => ({
     label: "Count the hours at nothing",
     row: { kind: "hour-rate" },
     field: "ratePerHour",
   }),
-  "no-tax-rate": () => ({ label: "There is no tax in it", row: { kind: "sale" }, field: "taxRate" }),
-  "no-fee-rate": () => ({ label: "There is no such fee", row: { kind: "sale" }, field: "feeRate" }),
-  "no-fixed-fee": () => ({ label: "There is no such fee", row: { kind: "sale" }, field: "feeFixed" }),
-  "no-postage-charged": () => ({
-    label: "The buyer pays none",
-    row: { kind: "sale" },
-    field: "postageCharged",
-  }),
-  "no-postage-paid": () => ({ label: "You pay none", row: { kind: "sale" }, field: "postagePaid" }),
+  "no-tax-rate": ofChannel("There is no tax in it", "taxRate"),
+  "no-fee-rate": ofChannel("There is no such fee", "feeRate"),
+  "no-fixed-fee": ofChannel("There is no such fee", "feeFixed"),
+  "no-postage-charged": ofChannel("The buyer pays none", "postageCharged"),
+  "no-postage-paid": ofChannel("You pay none", "postagePaid"),
+  "no-order-packing": ofChannel("It costs nothing", "packingCost"),
+  "no-order-minutes": ofChannel("It takes no time", "minutesPerOrder"),
   "no-packing-cost": ({ packing }) => ({
     label: "It costs nothing",
     row: { kind: "packing", id: packing ?? "" },

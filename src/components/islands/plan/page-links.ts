@@ -6,7 +6,7 @@ const PAGES: Record<SourcePage, { label: string; path: string }> = {
   offers: { label: "Offers", path: "/offers" },
   boards: { label: "Boards", path: "/boards" },
   run: { label: "Run", path: "/run#inputs" },
-  price: { label: "Price", path: "/run#prices" },
+  price: { label: "Price", path: "/price" },
 };
 
 /** A page of the kit as a source: its name and its address. */

@@ -8,19 +8,21 @@ import type { Fields } from "./plan-rows.ts";
 import { heldPlan, holdPlan, settledRow } from "./save-edits.ts";
 import { saving } from "./saving.ts";
 
-/** The lists of a run plan that people add to: work, packing, once-only charges. */
-export type ListKind = "task" | "packing" | "charge";
+/** The lists of a plan that people add to: work, packing, once-only charges, channels. */
+export type ListKind = "task" | "packing" | "charge" | "channel";
 
 const LISTS: Record<ListKind, { path: string; of: (plan: KitPlan["plan"]) => readonly { id: string }[] }> = {
   task: { path: "/tasks", of: (plan) => plan.work.tasks },
   packing: { path: "/packing", of: (plan) => plan.packing },
   charge: { path: "/charges", of: (plan) => plan.charges },
+  channel: { path: "/channels", of: (plan) => plan.channels },
 };
 
 function withList(held: KitPlan, kind: ListKind, rows: readonly { id: string }[]): KitPlan {
   const { plan } = held;
   if (kind === "task")
     return { ...held, plan: { ...plan, work: { ...plan.work, tasks: rows as typeof plan.work.tasks } } };
+  if (kind === "channel") return { ...held, plan: { ...plan, channels: rows as typeof plan.channels } };
   if (kind === "packing") return { ...held, plan: { ...plan, packing: rows as typeof plan.packing } };
   return { ...held, plan: { ...plan, charges: rows as typeof plan.charges } };
 }
@@ -127,4 +129,18 @@ export async function removeRow(
     nameFrom: () => `${name} removed.`,
     undo: () => void insert(address, kind, { ...fields, position: gone.position }, place),
   });
+}
+
+/** Puts the channels in another order: on this screen at once; the server's order where it is refused. */
+export async function orderChannels(address: KitAddress, order: readonly string[]): Promise<void> {
+  const before = heldPlan(address);
+  if (!before) return;
+  const rows = order.flatMap((id) => before.plan.channels.filter((channel) => channel.id === id));
+  holdPlan(address, (held) => withList(held, "channel", rows));
+  try {
+    await call<never>("PUT", kitApi(address, "/channels"), { channels: order } as never);
+    saving.change((now) => ({ ...now, savedAt: Date.now() }));
+  } catch (error) {
+    refused(address, error);
+  }
 }

@@ -2,12 +2,12 @@ import type { KitPlan } from "#src/server/kit-plan.ts";
 import type { Plan } from "#src/shapes/plan.ts";
 
 /**
- * What a person can change of a plan, row by row as the server keeps it. `run` and `sale` are one row of the
- * database with two addresses, because different roles may change them; so are `price` and `weight`.
+ * What a person can change of a plan, row by row as the server keeps it. `price` and `weight` are one row of the
+ * database with two addresses, because different roles may change them.
  */
 export type PlanRow =
-  | { kind: "run" | "sale" | "hour-rate" }
-  | { kind: "price" | "weight" | "task" | "packing" | "charge"; id: string };
+  | { kind: "run" | "hour-rate" }
+  | { kind: "price" | "weight" | "task" | "packing" | "charge" | "channel"; id: string };
 
 export type RowKind = PlanRow["kind"];
 export type Fields = Record<string, unknown>;
@@ -85,8 +85,6 @@ function withPlanFields(plan: Plan, row: PlanRow, fields: Fields): Plan {
   switch (row.kind) {
     case "run":
       return withRunFields(plan, fields as Partial<RunFields>);
-    case "sale":
-      return { ...plan, sale: { ...plan.sale, ...fields } };
     case "hour-rate":
       return { ...plan, work: { ...plan.work, ...fields } };
     case "price":
@@ -98,6 +96,8 @@ function withPlanFields(plan: Plan, row: PlanRow, fields: Fields): Plan {
       return { ...plan, packing: withRow(plan.packing, row.id, fields) };
     case "charge":
       return { ...plan, charges: withRow(plan.charges, row.id, fields) };
+    case "channel":
+      return { ...plan, channels: withRow(plan.channels, row.id, fields) };
   }
 }
 
@@ -107,8 +107,6 @@ function rowOf(plan: Plan, row: PlanRow): Fields {
   switch (row.kind) {
     case "run":
       return { ...runFields(plan) };
-    case "sale":
-      return plan.sale;
     case "hour-rate":
       return { ratePerHour: plan.work.ratePerHour };
     case "price":
@@ -120,6 +118,8 @@ function rowOf(plan: Plan, row: PlanRow): Fields {
       return listed(plan.packing);
     case "charge":
       return listed(plan.charges);
+    case "channel":
+      return listed(plan.channels);
   }
 }
 
@@ -143,6 +143,8 @@ export function addressOf(row: PlanRow): { of: "kit" | "workshop"; path: string 
       return { of: "kit", path: `/packing/${row.id}` };
     case "charge":
       return { of: "kit", path: `/charges/${row.id}` };
+    case "channel":
+      return { of: "kit", path: `/channels/${row.id}` };
     default:
       return { of: "kit", path: `/${row.kind}` };
   }

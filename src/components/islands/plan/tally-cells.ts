@@ -1,5 +1,5 @@
 import { changeText, countText, moneyText, signedCountText } from "#src/components/amount-text.ts";
-import type { KitAddress } from "#src/components/islands/kit-address.ts";
+import { type KitAddress, kitPath } from "#src/components/islands/kit-address.ts";
 import type { TallyCell } from "#src/components/islands/parts/TallyStrip.tsx";
 import type { Figure } from "#src/costing/figure.ts";
 import { needsInShort, priceNeeds } from "#src/costing/problem-words.ts";
@@ -18,23 +18,17 @@ const LABELS: Record<TallyFigure, string> = {
 
 const ORDER: readonly TallyFigure[] = ["costPerKit", "price", "earnsPerKit", "evenAfter", "cashNeeded"];
 
-/** What each figure opens; the price of a kit in one edition opens that sale, a mean price what a kit brings. */
-function opened(figure: TallyFigure, editions: readonly { id: string }[]): FigureId {
-  if (figure === "price")
-    return editions.length === 1 && editions[0] ? `sale:${editions[0].id}` : "kept-per-kit";
-  const figures = {
-    costPerKit: "per-kit-used",
-    earnsPerKit: "earns-per-kit",
-    evenAfter: "even-after",
-    cashNeeded: "spent",
-  } as const;
-  return figures[figure];
-}
+/** What each figure opens; the price leads to its own page. */
+const OPENED = {
+  costPerKit: "per-kit-used",
+  earnsPerKit: "earns-per-kit",
+  evenAfter: "even-after",
+  cashNeeded: "spent",
+} as const satisfies Record<Exclude<TallyFigure, "price">, FigureId>;
 
 export interface CellContext {
   address: KitAddress;
   currency: string;
-  editions: readonly { id: string }[];
   changes: readonly TallyChange[];
   /** Left out until there is a plan whose workings can be opened. */
   opens?: (figure: FigureId) => { open: boolean; onOpen: () => void };
@@ -54,7 +48,7 @@ function needs(
 
 /** The figures of the strip, written, with their changes and what they open. */
 export function tallyCells(tally: Tally, context: CellContext): TallyCell[] {
-  const { address, currency, changes, editions, opens } = context;
+  const { address, currency, changes, opens } = context;
   return ORDER.map((key) => {
     const figure = tally[key];
     const change = changes.find((one) => one.figure === key);
@@ -72,7 +66,7 @@ export function tallyCells(tally: Tally, context: CellContext): TallyCell[] {
           turn: change.turn,
         },
       }),
-      ...(figure.known && opens?.(opened(key, editions))),
+      ...(figure.known && (key === "price" ? { href: kitPath(address, "/price") } : opens?.(OPENED[key]))),
     };
   });
 }

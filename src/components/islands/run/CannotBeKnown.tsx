@@ -17,7 +17,7 @@ export interface CannotBeKnownProps {
 }
 
 function mayTake({ noneOfIt }: MissingThing, may: CannotBeKnownProps["may"]): boolean {
-  return noneOfIt !== null && (noneOfIt.row.kind === "sale" ? may.changePrice : may.changeRun);
+  return noneOfIt !== null && (noneOfIt.row.kind === "channel" ? may.changePrice : may.changeRun);
 }
 
 /** What cannot be worked out, and for each missing thing its reason and the ways on. */

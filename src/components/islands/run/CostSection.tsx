@@ -105,7 +105,7 @@ export function CostSection({ plan, run, sweep, columns, narrow, opens, partial 
             width={width}
             narrow={narrow}
             currency={run.currency}
-            brings={run.keptPerKit.known ? run.keptPerKit.value : null}
+            brings={run.bringsPerKit.known ? run.bringsPerKit.value : null}
             earns={shown === "used" && run.earnsPerKit.known ? run.earnsPerKit.value : null}
             spots={sweep.sweetSpots.map(({ kits }) => kits)}
             note={shown === "used" && partial === null ? stepNote(plan, sweep, run.kits, to) : null}

@@ -29,13 +29,13 @@ export function EditionsSection({ run, opens }: { run: RunResult; opens: ReturnT
       head: "Price",
       number: true,
       wide: true,
-      cell: ({ sale }) => (sale.price === null ? "not set" : moneyText(sale.price, currency)),
+      cell: ({ price }) => (price === null ? "not set" : moneyText(price, currency)),
     },
     {
       key: "brings",
       head: "Brings in",
       number: true,
-      cell: ({ id, name, sale }) => written(`${name} brings in`, sale.kept, `sale:${id}`),
+      cell: ({ id, name, brings }) => written(`${name} brings in`, brings, `kit-brings:${id}`),
     },
     {
       key: "used",
@@ -54,13 +54,14 @@ export function EditionsSection({ run, opens }: { run: RunResult; opens: ReturnT
       key: "earns",
       head: "Earns",
       number: true,
-      cell: ({ name, sale, perKit }) => written(`${name} earns`, figureLess(sale.kept, perKit.used)),
+      cell: ({ id, name, brings, perKit }) =>
+        written(`${name} earns`, figureLess(brings, perKit.used), `kit-left:${id}`),
     },
   ];
   const needs = joinNeeds(
     ...run.editions
       .filter(({ kits }) => kits > 0)
-      .flatMap(({ sale, perKit }) => [sale.kept, perKit.used, perKit.spent])
+      .flatMap(({ brings, perKit }) => [brings, perKit.used, perKit.spent])
       .map((figure) => (figure.known ? [] : figure.needs)),
   );
   return (

@@ -40,8 +40,8 @@ const drawWhole = (line: object) => <BrokenLine {...line} />;
 /** Takings against total cost, if every kit sells. */
 export function EvenChart(props: EvenChartProps) {
   const { points, span, width, narrow, currency } = props;
-  const top = Math.max(1, ...points.flatMap(({ total, kept }) => [total ?? 0, kept ?? 0]));
-  const low = Math.min(0, ...points.map(({ kept }) => kept ?? 0));
+  const top = Math.max(1, ...points.flatMap(({ total, brings }) => [total ?? 0, brings ?? 0]));
+  const low = Math.min(0, ...points.map(({ brings }) => brings ?? 0));
   const ticks = axisTicks(low, top, 7);
   return (
     <LineChart
@@ -60,7 +60,7 @@ export function EvenChart(props: EvenChartProps) {
         title="kits made and sold"
       />
       <EvenAreas points={points} />
-      <Line {...TAKINGS_LINE} dataKey="kept" shape={drawWhole} />
+      <Line {...TAKINGS_LINE} dataKey="brings" shape={drawWhole} />
       <Line {...COST_LINE} dataKey="total" shape={drawLine} />
       <ZIndexLayer zIndex={DefaultZIndexes.scatter}>
         <EvenMarks {...props} />
@@ -78,7 +78,7 @@ function useTip(currency: string) {
         <ChartTip<CostPoint>
           {...tip}
           lines={({ exact }) => [
-            { name: "Takings", figure: written(exact.kept) },
+            { name: "Takings", figure: written(exact.brings) },
             { name: "Total cost, used", figure: written(exact.total) },
           ]}
         />

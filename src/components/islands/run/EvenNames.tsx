@@ -17,8 +17,8 @@ export function EvenNames({ points, scale, narrow, taken }: EvenNamesProps) {
   const loss = middleOf(points, "loss", scale, narrow ? 22 : 40);
   const profit = middleOf(points, "profit", scale, narrow ? -44 : -110);
   const cost = costNamePlace(points, scale, taken);
-  const last = points.findLast(({ kept }) => kept !== null);
-  const takings = last && scale({ kits: last.kits, money: last.kept ?? 0 });
+  const last = points.findLast(({ brings }) => brings !== null);
+  const takings = last && scale({ kits: last.kits, money: last.brings ?? 0 });
   return (
     <g>
       {loss && (

@@ -18,14 +18,14 @@ function evenTable(columns: SweepColumns, span: Span, currency: string): ChartTa
     head: ["Run", "Takings", "Total cost, used", "Left", "Sold to pay for it"],
     rows: sizes.map((kits) => [
       String(kits),
-      written(columns.kept[kits - 1]),
+      written(columns.brings[kits - 1]),
       written(columns.used[kits - 1]),
       written(columns.profit[kits - 1]),
       columns.soldToPay[kits - 1] == null ? "–" : countText(columns.soldToPay[kits - 1] ?? 0),
     ]),
     fileRows: columns.used.map((used, place) => [
       String(place + 1),
-      columns.kept[place] ?? "",
+      columns.brings[place] ?? "",
       used ?? "",
       columns.profit[place] ?? "",
       columns.soldToPay[place]?.toString() ?? "",

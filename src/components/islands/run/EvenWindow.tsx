@@ -40,12 +40,12 @@ function shown(points: readonly CostPoint[], crossings: readonly PlacedCrossing[
       point.kits >= first - margin &&
       point.kits <= last + margin &&
       point.total !== null &&
-      point.kept !== null,
+      point.brings !== null,
   );
 }
 
 function bounds(points: readonly CostPoint[]) {
-  const sums = points.flatMap(({ total, kept }) => [total ?? 0, kept ?? 0]);
+  const sums = points.flatMap(({ total, brings }) => [total ?? 0, brings ?? 0]);
   const [low, high] = [Math.min(...sums), Math.max(...sums)];
   const spare = (high - low) * 0.08 || 1;
   return {
@@ -114,7 +114,7 @@ export function EvenWindow({ points, crossings, scale, plot }: EvenWindowProps) 
       <GainAreas points={part} scale={within} />
       <path
         d={path(
-          part.map(({ kits, kept }) => ({ kits, money: kept ?? 0 })),
+          part.map(({ kits, brings }) => ({ kits, money: brings ?? 0 })),
           within,
         )}
         fill="none"

@@ -67,7 +67,7 @@ function FileFigures({ file, run }: { file: string; run: RunResult }) {
   const rows: [string, string][] = [
     ["Cost per kit, used", written(run.perKit.used)],
     ["Cost per kit, spent", written(run.perKit.spent)],
-    ["One kit brings in", written(run.keptPerKit)],
+    ["One kit brings in", written(run.bringsPerKit)],
     ["Earns per kit", written(run.earnsPerKit)],
     [
       "Even after",

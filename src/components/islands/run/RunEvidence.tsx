@@ -67,7 +67,7 @@ export function RunEvidence(props: EvidenceProps) {
           <CostSection {...shared} />
         </Pair>
       )}
-      {columns.kept.some((value) => value !== null) ? (
+      {columns.brings.some((value) => value !== null) ? (
         <Pair note={<EvenNotes plan={plan} sweep={sweep} run={run.kits} opens={opens} />}>
           <EvenSection {...shared} />
         </Pair>
@@ -147,7 +147,7 @@ function TakingsNotKnown({
   run,
   may,
 }: Pick<EvidenceProps, "address" | "plan" | "run" | "may">) {
-  const needs = run.keptPerKit.known ? [] : run.keptPerKit.needs;
+  const needs = run.bringsPerKit.known ? [] : run.bringsPerKit.needs;
   return (
     <Section title="Takings against total cost">
       <CannotBeKnown

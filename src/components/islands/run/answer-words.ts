@@ -28,7 +28,7 @@ export function answerFigures(run: RunResult): AnswerFigures {
     kits: run.kits,
     currency: run.currency,
     costPerKit: run.perKit.used,
-    bringsPerKit: run.keptPerKit,
+    bringsPerKit: run.bringsPerKit,
     earnsPerKit: run.earnsPerKit,
     evenAfter: run.evenAfter,
     spent: run.spent,

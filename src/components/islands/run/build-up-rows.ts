@@ -50,7 +50,7 @@ function drawn(figure: Figure): number | null {
 export function buildUp(run: RunResult): BuildUp {
   const heads = run.heads.filter(({ perKit }) => drawn(perKit.used) !== 0);
   const cost = drawn(run.perKit.used) ?? 0;
-  const brings = drawn(run.keptPerKit);
+  const brings = drawn(run.bringsPerKit);
   const end = Math.max(cost, brings ?? 0, 0.01);
   const step = roundStep(end, 6);
   const at = (money: number) => (Math.max(0, money) / end) * 100;
@@ -93,8 +93,8 @@ export function buildUp(run: RunResult): BuildUp {
     row(
       "brings",
       "One kit brings in",
-      run.keptPerKit,
-      "kept-per-kit",
+      run.bringsPerKit,
+      "brings-per-kit",
       "brings",
       brings === null ? null : { from: 0, to: at(brings) },
     ),

@@ -14,8 +14,8 @@ export interface CostPoint {
   kits: number;
   perKit: number | null;
   total: number | null;
-  kept: number | null;
-  exact: { perKit: string | null; total: string | null; kept: string | null };
+  brings: number | null;
+  exact: { perKit: string | null; total: string | null; brings: string | null };
   /** The next kit costs so much more that the line breaks after this one. */
   breaksAfter: boolean;
 }
@@ -50,12 +50,12 @@ export function costPoints(columns: SweepColumns, view: CostView, { from, to }: 
   const sizes = Array.from({ length: Math.max(0, to - from + 1) }, (_, place) => from + place);
   const points = sizes.map((kits) => {
     const at = (column: readonly (string | null)[]) => column[kits - 1] ?? null;
-    const exact = { perKit: at(perKit), total: at(totals), kept: at(columns.kept) };
+    const exact = { perKit: at(perKit), total: at(totals), brings: at(columns.brings) };
     return {
       kits,
       perKit: pixels(exact.perKit),
       total: pixels(exact.total),
-      kept: pixels(exact.kept),
+      brings: pixels(exact.brings),
       exact,
     };
   });

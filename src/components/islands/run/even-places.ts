@@ -33,9 +33,9 @@ export function middleOf(
   scale: ChartScale,
   aside: number,
 ): Pixels | null {
-  const tall = points.flatMap(({ kits, total, kept }) => {
-    if (total === null || kept === null || kept >= total !== (gain === "profit")) return [];
-    const [one, other] = [scale({ kits, money: total }), scale({ kits, money: kept })];
+  const tall = points.flatMap(({ kits, total, brings }) => {
+    if (total === null || brings === null || brings >= total !== (gain === "profit")) return [];
+    const [one, other] = [scale({ kits, money: total }), scale({ kits, money: brings })];
     return [{ x: one.x, y: (one.y + other.y) / 2, height: Math.abs(one.y - other.y) }];
   });
   const none = { x: 0, y: 0, height: 0 };

@@ -15,15 +15,15 @@ export interface GainArea {
 
 /** Where the lines cross between two run sizes; on a step it is the step itself. */
 export function meeting(before: CostPoint, after: CostPoint): ChartPlace | null {
-  if (before.total === null || before.kept === null || after.total === null || after.kept === null)
+  if (before.total === null || before.brings === null || after.total === null || after.brings === null)
     return null;
-  if (before.breaksAfter) return { kits: after.kits, money: after.kept };
-  const gapBefore = before.kept - before.total;
-  const gapAfter = after.kept - after.total;
+  if (before.breaksAfter) return { kits: after.kits, money: after.brings };
+  const gapBefore = before.brings - before.total;
+  const gapAfter = after.brings - after.total;
   const share = gapBefore === gapAfter ? 1 : gapBefore / (gapBefore - gapAfter);
   return {
     kits: before.kits + share * (after.kits - before.kits),
-    money: before.kept + share * (after.kept - before.kept),
+    money: before.brings + share * (after.brings - before.brings),
   };
 }
 
@@ -40,16 +40,16 @@ function gapOf({ cost, takings }: Pair): number {
 /** The unbroken courses of cost and takings, with both ends of every step; what is not known parts them. */
 function courses(points: readonly CostPoint[]): Pair[][] {
   const all: Pair[][] = [[]];
-  for (const [place, { kits, total, kept, breaksAfter }] of points.entries()) {
-    if (total === null || kept === null) {
+  for (const [place, { kits, total, brings, breaksAfter }] of points.entries()) {
+    if (total === null || brings === null) {
       all.push([]);
       continue;
     }
     const next = points[place + 1];
-    all.at(-1)?.push({ kits, cost: total, takings: kept });
+    all.at(-1)?.push({ kits, cost: total, takings: brings });
     // The old cost holds until the step, where the area closes on the vertical.
-    if (breaksAfter && next && next.total !== null && next.kept !== null)
-      all.at(-1)?.push({ kits: next.kits, cost: total, takings: next.kept });
+    if (breaksAfter && next && next.total !== null && next.brings !== null)
+      all.at(-1)?.push({ kits: next.kits, cost: total, takings: next.brings });
   }
   return all;
 }

@@ -14,8 +14,8 @@ export function SaleNote() {
   return (
     <MarginNote title="What is left of a price">
       <p>
-        Of price and postage together the tax is taken out, then the fee, then the postage you pay. What is
-        left is what a kit brings in.
+        Of what the buyer pays go the tax inside it, the fee, postage and packing. What is left comes in; less
+        the time to sell it, it is what a kit brings in.
       </p>
     </MarginNote>
   );

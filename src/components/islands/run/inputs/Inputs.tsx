@@ -9,7 +9,7 @@ import { AllowancesNote, ChargesNote, MixNote, PackingNote, SaleNote, WorkNote }
 import type { InputProps } from "./input-props.ts";
 import { MixAndPrices } from "./MixAndPrices.tsx";
 import { Packing } from "./Packing.tsx";
-import { SaleTerms } from "./SaleTerms.tsx";
+import { SaleLines } from "./SaleLines.tsx";
 import { Work } from "./Work.tsx";
 
 interface GroupProps {
@@ -45,8 +45,8 @@ const Mix = memo(
   unlessSame(({ held, run, may }) => [held.plan.editions, run.kits, may]),
 );
 const Sale = memo(
-  SaleTerms,
-  unlessSame(({ held, may }) => [held.plan.sale, may]),
+  SaleLines,
+  unlessSame(({ held }) => [held.plan.channels, held.plan.editions]),
 );
 const Tasks = memo(
   Work,
@@ -76,7 +76,7 @@ export function Inputs(props: InputProps) {
       <Group id="prices" title="Mix and prices" aside={pricesAside} note={<MixNote />}>
         <Mix {...props} />
       </Group>
-      <Group id="sale" title="What goes off a sale" aside={pricesAside} note={<SaleNote />}>
+      <Group id="sale" title="What goes off a sale" note={<SaleNote />}>
         <Sale {...props} />
       </Group>
       <Group id="work" title="Work at the table" note={<WorkNote />}>

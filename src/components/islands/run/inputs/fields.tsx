@@ -4,6 +4,7 @@ import { MeasureField } from "#src/components/islands/parts/MeasureField.tsx";
 import { MoneyField } from "#src/components/islands/parts/MoneyField.tsx";
 import type { MoneyPlaces } from "#src/components/money-entry.ts";
 import { fromPercent, toPercent } from "#src/components/percent.ts";
+import { shownMoney } from "#src/components/shown-money.ts";
 import { type Entry, take } from "./entry.ts";
 
 type Common = FieldWords & {
@@ -34,13 +35,6 @@ export function AmountEntry({ entry, value, mayBeEmpty, ...rest }: AmountEntryPr
   );
 }
 
-/** Two decimals at least, as the field itself writes them. */
-function shownMoney(value: string | null): string {
-  if (value === null) return "";
-  const [whole = "0", part = ""] = value.split(".");
-  return `${whole}.${part.padEnd(2, "0")}`;
-}
-
 type RateEntryProps = Common & {
   /** A decimal: "0.029". */
   value: string | null;
@@ -48,18 +42,20 @@ type RateEntryProps = Common & {
   /** In hundredths: what is taken at most, and whether exactly that is allowed. */
   below?: number;
   most?: number;
+  /** Why a rate, as a decimal, cannot be taken for what it would do. */
+  refuse?: (rate: string) => string | undefined;
 };
 
 /** Rates keep six decimals, so hundredths four. */
 const PERCENT = /^\d+(\.\d{1,4})?$/;
 
 /** A rate or share, shown in hundredths. */
-export function RateEntry({ entry, value, mayBeEmpty, below, most, ...rest }: RateEntryProps) {
+export function RateEntry({ entry, value, mayBeEmpty, below, most, refuse, ...rest }: RateEntryProps) {
   function wrong(percent: string): string | undefined {
     if (!PERCENT.test(percent)) return "Write at most four decimals.";
     if (below !== undefined && Number(percent) >= below) return `Write less than ${below} %.`;
     if (most !== undefined && Number(percent) > most) return `Write at most ${most} %.`;
-    return undefined;
+    return refuse?.(fromPercent(percent));
   }
   return (
     <MeasureField

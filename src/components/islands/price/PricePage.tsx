@@ -1,0 +1,132 @@
+import { useMemo, useState } from "react";
+import { CallFailed } from "#src/components/islands/call.ts";
+import { Button } from "#src/components/islands/parts/Button.tsx";
+import { ErrorBox } from "#src/components/islands/parts/ErrorBox.tsx";
+import { FilterGroup } from "#src/components/islands/parts/FilterGroup.tsx";
+import { Loading } from "#src/components/islands/parts/Loading.tsx";
+import { Pair } from "#src/components/islands/parts/Pair.tsx";
+import { Question } from "#src/components/islands/parts/Question.tsx";
+import { useOpens } from "#src/components/islands/plan/open-working.ts";
+import { runOf } from "#src/components/islands/plan/run-of.ts";
+import { usePlan } from "#src/components/islands/plan/use-plan.ts";
+import { useSweep } from "#src/components/islands/plan/use-sweep.ts";
+import { CannotBeKnown } from "#src/components/islands/run/CannotBeKnown.tsx";
+import { PAIRS } from "#src/components/page-look.ts";
+import { yieldsAt } from "#src/costing/price/price-yields.ts";
+import type { Plan, PlanEdition } from "#src/shapes/plan.ts";
+import { AimsSection } from "./AimsSection.tsx";
+import { AskedPrice, type WhoPrices } from "./AskedPrice.tsx";
+import { ChannelsSection } from "./ChannelsSection.tsx";
+import { EvenSection } from "./EvenSection.tsx";
+import { MoneyBars } from "./MoneyBars.tsx";
+import { OtherPrices } from "./OtherPrices.tsx";
+import { PriceAnswer } from "./PriceAnswer.tsx";
+import { CautionNote, TimeNote, TogetherNote, WholesaleNote } from "./PriceNotes.tsx";
+import { pricingOf } from "./pricing-of.ts";
+import { YieldsSection } from "./YieldsSection.tsx";
+
+export interface PricePageProps {
+  workshop: string;
+  kit: string;
+  who: WhoPrices;
+  may: { changeRun: boolean; changePrice: boolean };
+}
+
+/** What should we ask for a kit? The price, what every channel leaves of it, and which price does what. */
+export default function PricePage({ workshop, kit, who, may }: PricePageProps) {
+  const address = useMemo(() => ({ workshop, kit }), [workshop, kit]);
+  const { held, error, retry } = usePlan(address);
+  if (held) return <Priced {...{ address, who, may }} plan={held.plan} />;
+  return (
+    <>
+      <Question question="What should we ask for a kit?">{error ? "" : "Working out."}</Question>
+      {error ? (
+        <ErrorBox title="The plan could not be fetched" alert>
+          <p>
+            {error instanceof CallFailed ? `${error.problem.title} ${error.problem.detail}` : error.message}
+          </p>
+          <Button className="mt-3" onClick={retry}>
+            Try again
+          </Button>
+        </ErrorBox>
+      ) : (
+        <Loading what="prices and channels" rows={8} />
+      )}
+    </>
+  );
+}
+
+interface PricedProps extends Pick<PricePageProps, "who" | "may"> {
+  address: { workshop: string; kit: string };
+  plan: Plan;
+}
+
+/** The edition in view: the one chosen, else the one most of the run is made of. */
+function inView(plan: Plan, chosen: string | null): PlanEdition {
+  const found = plan.editions.find(({ id }) => id === chosen);
+  return found ?? plan.editions.reduce((one, other) => (other.weight > one.weight ? other : one));
+}
+
+function Priced({ address, plan, who, may }: PricedProps) {
+  const [chosen, setChosen] = useState<string | null>(null);
+  const opens = useOpens();
+  const { sweep } = useSweep(plan);
+  const edition = inView(plan, chosen);
+  const context = pricingOf(plan);
+  const run = runOf(plan);
+  const yields = yieldsAt(context, { edition: edition.id, channel: null });
+  const props = { address, context, edition, mayChange: may.changePrice };
+  const needs = yields.left.known ? [] : yields.left.needs;
+  const { currency } = plan;
+  return (
+    <>
+      <PriceAnswer {...{ edition, yields, currency, opens }} named={plan.editions.length > 1} />
+      {plan.editions.length > 1 && (
+        <div className="mb-6">
+          <FilterGroup
+            label="Edition"
+            choices={plan.editions.map(({ id, name }) => ({ value: id, label: name }))}
+            value={edition.id}
+            onChoose={setChosen}
+          />
+        </div>
+      )}
+      <div className="mb-11 grid gap-x-11 gap-y-6 desktop:grid-cols-[300px_minmax(0,1fr)] desktop:items-end">
+        <AskedPrice {...props} who={who} />
+        <OtherPrices {...props} />
+      </div>
+      <div className={PAIRS}>
+        {needs.length > 0 && (
+          <Pair>
+            <CannotBeKnown {...{ address, plan, needs, may }} title="What a kit leaves is not known yet" />
+          </Pair>
+        )}
+        <Pair
+          note={
+            <>
+              <TogetherNote {...{ context, edition, yields, opens }} />
+              <TimeNote {...{ context, edition }} />
+              <CautionNote />
+            </>
+          }
+        >
+          <ChannelsSection {...props} opens={opens} />
+        </Pair>
+        <Pair note={<WholesaleNote {...{ context, edition }} />}>
+          <MoneyBars {...{ context, edition }} />
+        </Pair>
+        <Pair>
+          <AimsSection {...props} />
+        </Pair>
+        <Pair>
+          <YieldsSection {...{ context, edition, yields, opens }} />
+        </Pair>
+        {sweep && (
+          <Pair>
+            <EvenSection {...{ address, context, run, sweep, opens }} />
+          </Pair>
+        )}
+      </div>
+    </>
+  );
+}
