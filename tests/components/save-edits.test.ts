@@ -95,6 +95,26 @@ describe("an edit that is under way when the page is left", () => {
     expect(saving.now().clashes).toMatchObject([{ field: "kits", yours: 55, theirs: 90, by: "Tom" }]);
   });
 
+  it("is put by also where the refusal came while the page was going", async () => {
+    const theirs = { kits: 90, version: 2, changedBy: "Tom", changedAt: 1 };
+    replies = [changed(theirs)];
+    editRow(ADDRESS, RUN, { kits: 55 });
+    window.dispatchEvent(new Event("beforeunload", { cancelable: true }));
+    await settled();
+    expect(saving.now().clashes).toHaveLength(1);
+    window.dispatchEvent(new Event("pagehide"));
+
+    saving.put(NOTHING_SAVED);
+    const fresh = heldSmallPlan();
+    const plan = { ...fresh.plan, run: { ...fresh.plan.run, kits: 90 } };
+    queryClient.setQueryData(kitKeys.plan("k"), { ...fresh, plan });
+    replies = [changed(theirs)];
+    takeUpEdits(ADDRESS);
+    await settled();
+    expect(sent[1]?.body).toEqual({ kits: 55, version: 1 });
+    expect(saving.now().clashes).toMatchObject([{ field: "kits", yours: 55, theirs: 90, by: "Tom" }]);
+  });
+
   it("has the browser ask where a second edit waits for its version", async () => {
     let answer = (_: Response) => {};
     replies = [

@@ -48,6 +48,8 @@ const STACK_MOST = 200;
 
 let confirmed: PricedPartsList | null = null;
 let waiting: Edit[] = [];
+/** An edit that met another person's change and is not settled, as it was made. */
+let met: Edit | null = null;
 let sending = false;
 
 /** The list as this screen shows it: what the server has, with unsent edits on top. */
@@ -191,6 +193,7 @@ async function failed(address: KitAddress, edit: Edit, { problem }: CallFailed):
     return;
   }
   drop(edit);
+  met = problem.code === "changed-meanwhile" ? edit : null;
   const fresh = await call<typeof GET>("GET", kitApi(address, "/lines")).catch(() => null);
   if (fresh?.money) confirmed = fresh as PricedPartsList;
   show(address);
@@ -211,6 +214,7 @@ function meetOther(address: KitAddress, edit: Edit, current: unknown): void {
   if (!confirmed) return;
   const both = overlaps(edit.before, confirmed, edit.steps);
   const again = { ...edit, before: confirmed, back: inverseSteps(confirmed, edit.steps) };
+  met = both.length === 0 ? null : edit;
   if (both.length === 0) enqueue(address, again);
   else
     editorState.change((now) => ({
@@ -224,6 +228,7 @@ export function settleListClash(address: KitAddress, keep: "yours" | "theirs"): 
   const { clash } = editorState.now();
   if (!clash) return;
   editorState.change((now) => ({ ...now, clash: null }));
+  met = null;
   const theirs = new Set(clash.overlaps.map(({ step }) => step));
   const steps = keep === "yours" ? clash.edit.steps : clash.edit.steps.filter((step) => !theirs.has(step));
   editList(address, clash.edit.name, steps);
@@ -254,7 +259,7 @@ export function watchList(address: KitAddress): () => void {
       holds: () => waiting.length > 0,
       atRisk: () =>
         waiting.length > 1 || (waiting.length > 0 && !sending) || editorState.now().clash !== null,
-      keep: () => keepEdits("lines", address.kit, waiting),
+      keep: () => keepEdits("lines", address.kit, met ? [met, ...waiting] : waiting),
     }),
     saving.watch(() => saving.now().lostAt === null && void sendNext(address)),
   ];

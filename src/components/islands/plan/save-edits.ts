@@ -132,6 +132,12 @@ export async function settledRow(address: KitAddress, row: PlanRow): Promise<voi
   while (line.sent) await line.flight;
 }
 
+/** The version that is held for a line's row; a line without a plan has none. */
+function versionHeld({ address, holder }: Line): number {
+  const held = heldPlan(address);
+  return held ? versionOf(held.versions, holder) : 0;
+}
+
 function failed(line: Line, edit: PendingEdit, { problem }: CallFailed): void {
   if (problem.code === "no-connection") {
     line.waiting = line.waiting.reduce(withEdit, [edit]);
@@ -148,6 +154,7 @@ function failed(line: Line, edit: PendingEdit, { problem }: CallFailed): void {
 /** Somebody was quicker. What only we changed is sent again; what both changed is for the person to choose. */
 function meetOther(line: Line, edit: PendingEdit, current: Fields): void {
   const { ours, both } = merged(edit, current);
+  const seen = edit.seen ?? versionHeld(line);
   holdPlan(line.address, (now) => ({
     ...now,
     versions: withVersion(now.versions, line.holder, current.version as number),
@@ -156,7 +163,9 @@ function meetOther(line: Line, edit: PendingEdit, current: Fields): void {
   if (Object.keys(ours).length > 0)
     line.waiting = line.waiting.reduce(withEdit, [{ row, base, fields: ours }]);
   const from = { by: current.changedBy as string | null, at: current.changedAt as number | null };
-  const clashes = both.map((field): Clash => ({ row: edit.row, ...field, ...from }));
+  const clashes = both.map(
+    (clash): Clash => ({ row: edit.row, ...clash, base: base[clash.field], seen, ...from }),
+  );
   saving.change((now) => ({ ...now, clashes: [...now.clashes, ...clashes] }));
   if (both.length === 0) void queryClient.invalidateQueries({ queryKey: kitKeys.plan(line.address.kit) });
 }
@@ -183,12 +192,17 @@ function flush(): void {
   if (saving.now().lostAt === null) sendAll();
 }
 
+/** Ours of a clash that nobody has settled, as it was sent: sent again it meets theirs again. */
+function unsettled({ row, field, yours, base, seen }: Clash): PendingEdit {
+  return { row, fields: { [field]: yours }, base: { [field]: base }, seen };
+}
+
 /** Puts by the edits of a kit, each with the version its request named or would name. */
 function keep(address: KitAddress): void {
   const versions = heldPlan(address)?.versions;
   if (!versions) return;
-  const kept = unsaved().map((edit) => ({ seen: versionOf(versions, holderOf(edit.row)), ...edit }));
-  keepEdits("plan", address.kit, kept);
+  const waiting = unsaved().map((edit) => ({ seen: versionOf(versions, holderOf(edit.row)), ...edit }));
+  keepEdits("plan", address.kit, [...saving.now().clashes.map(unsettled), ...waiting]);
 }
 
 /** Takes up what the page before had not heard of when it was left, once the plan is there. */

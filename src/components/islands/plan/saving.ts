@@ -7,6 +7,10 @@ export interface Clash {
   field: string;
   yours: unknown;
   theirs: unknown;
+  /** What stood there when we began. */
+  base: unknown;
+  /** The version ours was sent with. */
+  seen: number;
   by: string | null;
   /** Milliseconds since 1970. */
   at: number | null;
