@@ -120,7 +120,7 @@ test("the least price for an aim opens its working and is taken with a press", a
 
 test("a channel is added, copied, moved and removed by keyboard", async ({ page }) => {
   await openPrice(page, /Cricket Box/, SELLER);
-  const heads = page.getByRole("columnheader");
+  const heads = page.getByRole("table", { name: /in every channel/ }).getByRole("columnheader");
   await page.getByRole("button", { name: "Add a channel" }).press("Enter");
   const name = page.getByLabel("Name", { exact: true });
   await expect(name).toBeFocused();
