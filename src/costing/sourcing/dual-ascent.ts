@@ -6,7 +6,7 @@ export interface Ascent {
   slacks: Float64Array;
 }
 
-const ROUNDS = 100;
+const ROUNDS = 40;
 
 /**
  * Bounds what parts cost where some suppliers are taken and others, at a floor each, may be: every part offers a price,

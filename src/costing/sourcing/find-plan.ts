@@ -9,10 +9,7 @@ import { emptyQueue } from "./node-queue.ts";
 import { plainPrices } from "./prices.ts";
 import { offerPlan, type Search, type SearchLimits, startSearch } from "./search.ts";
 import { searchNode, searchNodes } from "./search-nodes.ts";
-import { nodeOf, searchSets, setKey } from "./supplier-sets.ts";
-
-/** Suppliers up to which all sets are gone through one by one. */
-const FEW_SUPPLIERS = 10;
+import { nodeOf, setKey } from "./supplier-sets.ts";
 
 /**
  * The best plan of a market, proven unless work ran out. `before`: the best plan of a market much like it, such as
@@ -35,8 +32,7 @@ export function findPlan(market: Market, limits: SearchLimits, before: HeldPlan 
     searchNode(search, queue, node);
     done = setKey(first);
   }
-  if (columns.length > FEW_SUPPLIERS) searchManySets(search, queue, columns);
-  else searchSets(search, queue, columns, done);
+  searchManySets(search, queue, columns, done);
   searchNodes(search, queue);
   return search;
 }

@@ -2,19 +2,24 @@ import type { Column } from "./columns.ts";
 import { dualAscent } from "./dual-ascent.ts";
 import type { NodeQueue } from "./node-queue.ts";
 import { isBeaten, type Search, spend } from "./search.ts";
-import { queueNode } from "./search-nodes.ts";
-import { nodeOf } from "./supplier-sets.ts";
+import { nobodyTaken, searchSets } from "./supplier-sets.ts";
 
 /**
- * The same as `searchSets` where suppliers are too many to go through their sets one by one: every branch is bounded by
+ * The same as `searchSets` from nobody taken, where suppliers may be too many to go through their sets one by one: every branch is bounded by
  * a dual ascent, which also tells which suppliers would be too dear to take; of the others the one that most parts lean
  * on is decided next.
  */
-export function searchManySets(search: Search, queue: NodeQueue, columns: readonly Column[]): void {
-  const { market, omitted } = search;
-  const start = Float64Array.from(market.needed, (needed) => (needed === 1 ? omitted : 0));
-  visit(search, queue, [], columns, start);
+export function searchManySets(
+  search: Search,
+  queue: NodeQueue,
+  columns: readonly Column[],
+  done: string | null,
+): void {
+  visit(search, queue, [], columns, nobodyTaken(search), done);
 }
+
+/** Suppliers up to which all sets are gone through one by one. */
+const FEW = 10;
 
 function visit(
   search: Search,
@@ -22,7 +27,12 @@ function visit(
   taken: readonly Column[],
   undecided: readonly Column[],
   least: Float64Array,
+  done: string | null,
 ): void {
+  if (undecided.length <= FEW) {
+    searchSets(search, queue, taken, undecided, least, done);
+    return;
+  }
   if (taken.length > search.mostParcels || taken.length + undecided.length < search.leastParcels) return;
   const floors =
     taken.reduce((sum, { line }) => sum + line.floor, 0) +
@@ -33,13 +43,13 @@ function visit(
   const left = undecided.filter((_, index) => !isBeaten(search, bound + (ascent.slacks[index] as number)));
   const next = leanedOn(least, left);
   if (next === null) {
-    queueNode(search, queue, nodeOf(taken, bound));
+    searchSets(search, queue, taken, left, least, done);
     return;
   }
   const others = left.filter((column) => column !== next);
   const with_ = least.map((held, part) => Math.min(held, next.counts[part] as number));
-  visit(search, queue, [...taken, next], others, with_);
-  visit(search, queue, taken, others, least);
+  visit(search, queue, [...taken, next], others, with_, done);
+  visit(search, queue, taken, others, least, done);
 }
 
 /** The supplier that saves the parts most against the next best of those left. */

@@ -3,50 +3,57 @@ import { addNode, type NodeQueue } from "./node-queue.ts";
 import { isBeaten, type Search, spend } from "./search.ts";
 import type { SetNode } from "./set-node.ts";
 
+/** Work that looking at one set takes, against that of a step of the search within one. */
+const SET_STEP = 1 / 16;
+
 /**
  * Queues the sets of suppliers that may hold the best plan: goes through them depth first, passing over every branch
- * whose bound leaves no room for a better plan: the least count of each part among the suppliers taken and those still to be decided, and the floors of
- * those taken (and, where they lie below nothing, of those still to be decided).
+ * whose bound leaves no room for a better plan: the least count of each part among the suppliers taken and those still
+ * to be decided, and the floors of those taken (and, where they lie below nothing, of those still to be decided).
  *
- * @param done a set, as a list of suppliers ascending, that is in the queue already
+ * @param taken suppliers that are in every set; `least` is the least count of each part among them
+ * @param done a set, as a list of suppliers ascending, that was searched already
  */
 export function searchSets(
   search: Search,
   queue: NodeQueue,
+  taken: readonly Column[],
   columns: readonly Column[],
+  least: Float64Array,
   done: string | null,
 ): void {
-  const { parts } = search.market;
   const rest = restMinima(search, columns);
-  const taken = columns.map(() => new Float64Array(parts));
-  taken.push(new Float64Array(parts));
-  const start = taken[0] as Float64Array;
-  for (let part = 0; part < parts; part += 1)
-    start[part] = search.market.needed[part] === 1 ? search.omitted : 0;
+  const rows = columns.map(() => new Float64Array(least.length));
   const spare = columns.map((_, depth) =>
     columns.slice(depth).reduce((sum, { line }) => sum + Math.min(0, line.floor), 0),
   );
-  const chosen: Column[] = [];
-  const visit = (depth: number, least: Float64Array, floor: number, bound: number): void => {
+  const chosen = [...taken];
+  const visit = (depth: number, held: Float64Array, floor: number, bound: number): void => {
     if (chosen.length + columns.length - depth < search.leastParcels) return;
-    if (isBeaten(search, bound) || !spend(search, 1, bound)) return;
+    if (isBeaten(search, bound) || !spend(search, SET_STEP, bound)) return;
     const column = columns[depth];
     if (column === undefined) {
       if (setKey(chosen) !== done) addNode(queue, nodeOf(chosen, bound));
       return;
     }
-    const next = taken[depth + 1] as Float64Array;
+    const next = rows[depth] as Float64Array;
     const later = floor + (spare[depth + 1] ?? 0);
+    const ahead = rest[depth + 1] as Float64Array;
     if (chosen.length < search.mostParcels) {
       chosen.push(column);
-      const withIt = takeColumn(least, column.counts, rest[depth + 1] as Float64Array, next);
+      const withIt = takeColumn(held, column.counts, ahead, next);
       visit(depth + 1, next, floor + column.line.floor, later + column.line.floor + withIt);
       chosen.pop();
     }
-    next.set(least);
-    visit(depth + 1, next, floor, later + sumOfLeast(least, rest[depth + 1] as Float64Array));
+    visit(depth + 1, held, floor, later + sumOfLeast(held, ahead));
   };
-  visit(0, start, 0, (spare[0] ?? 0) + sumOfLeast(start, rest[0] as Float64Array));
+  const floors = taken.reduce((sum, { line }) => sum + line.floor, 0);
+  visit(0, least, floors, floors + (spare[0] ?? 0) + sumOfLeast(least, rest[0] as Float64Array));
+}
+
+/** What every part counts for while no supplier is taken. */
+export function nobodyTaken({ market, omitted }: Search): Float64Array {
+  return Float64Array.from(market.needed, (needed) => (needed === 1 ? omitted : 0));
 }
 
 /** From each depth on, the least count of every part among the suppliers still to be decided. */
