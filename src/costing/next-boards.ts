@@ -1,11 +1,11 @@
 import type { PlanBoardQuote } from "#src/shapes/plan.ts";
-import { exact } from "./decimal.ts";
+import { scaled, scaledText } from "./grains.ts";
 import { minorText } from "./money.ts";
 import { totalOf } from "./panels/cost-pieces.ts";
 import { orderPieces } from "./panels/order-pieces.ts";
 import { pieceQuote } from "./panels/piece-quote.ts";
 import { preparePieces } from "./panels/prepare-pieces.ts";
-import { divideUp } from "./whole.ts";
+import { divideBigHalfAway, divideUp } from "./whole.ts";
 
 /** More boards of a quote than are ordered, and what they really add (section 6). */
 export interface NextBoards {
@@ -46,7 +46,7 @@ export function nextBoards(quote: PlanBoardQuote, ordered: number, count: number
       more,
       total: minorText(totalOf(prepared, next), quote.currency),
       adds,
-      addsEach: exact(adds).div(more).toDecimalPlaces(6).toFixed(),
+      addsEach: scaledText(divideBigHalfAway(scaled(adds, 6), BigInt(more)), 6),
     });
     at = next.pieces;
   }

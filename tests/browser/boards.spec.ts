@@ -73,6 +73,7 @@ test("a panel that fits is printed alone and at true scale", async ({ page }) =>
   });
   await openBoards(page, DESIGNER, /Dew Lantern/);
   await page.getByRole("button", { name: "Print 1:1" }).click();
+  await expect(page.locator("html")).toHaveAttribute("data-sheet", "lying");
   await page.emulateMedia({ media: "print" });
   const sheet = page.locator("[data-print-sheet] svg");
   const box = await sheet.boundingBox();

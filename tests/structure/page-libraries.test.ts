@@ -26,7 +26,7 @@ test.each([
   ["parts-grid/PartsPage.tsx", ["decimal.js", "ag-grid-community", "recharts", "papaparse"]],
   ["offers/OffersOverview.tsx", ["decimal.js", "ag-grid-community", "recharts"]],
   ["offers/OfferPage.tsx", ["decimal.js", "ag-grid-community", "recharts"]],
-  ["boards/Boards.tsx", ["ag-grid-community", "recharts"]],
+  ["boards/Boards.tsx", ["decimal.js", "ag-grid-community", "recharts"]],
 ])("%s comes without libraries it has no use for at once", (page, libraries) => {
   const fetched = fetchedWith(`${ISLANDS}/${page}`);
   expect(fetched.size, "the walk went on from the page").toBeGreaterThan(20);

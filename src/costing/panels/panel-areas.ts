@@ -1,4 +1,5 @@
-import { exact } from "#src/costing/decimal.ts";
+import { scaled, scaledText } from "#src/costing/grains.ts";
+import { divideBigHalfAway } from "#src/costing/whole.ts";
 import { type Rect, type Size, squareCentimetres } from "./micrometres.ts";
 import type { PanelMeasures } from "./panel-measures.ts";
 
@@ -13,9 +14,10 @@ export interface PanelAreas {
   used: string;
 }
 
-const PI = "3.141592653589793238462643383279502884197";
-/** Decimals of an area in square centimetres that is a whole number of square micrometres. */
-const PLACES = 8;
+/** π with 39 decimals, as a whole number. */
+const PI_PLACES = 39;
+const PI = scaled("3.141592653589793238462643383279502884197", PI_PLACES);
+const USED_PLACES = 4;
 
 /**
  * Areas of a panel. A board counts as its enclosing rectangle, or as an ellipse where it is round (to 8 decimals).
@@ -29,15 +31,16 @@ export function panelAreas(
   { board, round }: PanelMeasures,
 ): PanelAreas {
   const area = ({ width, height }: Size) => BigInt(width) * BigInt(height);
-  const enclosing = squareCentimetres(area(board) * BigInt(count));
-  const boards = round ? exact(enclosing).times(PI).div(4).toDecimalPlaces(PLACES).toFixed() : enclosing;
-  const railed = squareCentimetres(rails.reduce((sum, rail) => sum + area(rail), 0n));
-  const panel = squareCentimetres(area(outer));
+  const enclosing = area(board) * BigInt(count);
+  const boards = round ? divideBigHalfAway(enclosing * PI, 4n * 10n ** BigInt(PI_PLACES)) : enclosing;
+  const railed = rails.reduce((sum, rail) => sum + area(rail), 0n);
+  const panel = area(outer);
+  const used = divideBigHalfAway(boards * 10n ** BigInt(USED_PLACES), panel);
   return {
-    boards,
-    rails: railed,
-    gaps: exact(panel).minus(boards).minus(railed).toFixed(),
-    panel,
-    used: exact(boards).div(panel).toDecimalPlaces(4).toFixed(),
+    boards: squareCentimetres(boards),
+    rails: squareCentimetres(railed),
+    gaps: squareCentimetres(panel - boards - railed),
+    panel: squareCentimetres(panel),
+    used: scaledText(used, USED_PLACES),
   };
 }

@@ -1,11 +1,10 @@
-import { exact } from "#src/costing/decimal.ts";
 import { micrometres, type Size, sizeWords } from "./micrometres.ts";
 import { mostByArea } from "./most-boards.ts";
 import type { PanelProblem } from "./panel-problem.ts";
 import type { PanelBoard, PanelSize } from "./panel-terms.ts";
 
-/** A little less than π ÷ 4, the share of its rectangle that an ellipse covers. */
-const ROUND_SHARE = "0.785398";
+/** A little less than π ÷ 4, the share of its rectangle that an ellipse covers, in millionths. */
+const ROUND_SHARE = 785_398n;
 
 /**
  * Why so many boards cannot lie on a panel of the size quoted, whatever its rails and gaps: the board is larger, or
@@ -35,6 +34,6 @@ function liesIn(board: Size, panel: Size): boolean {
 /** A bound that no layout passes. */
 function mostOf(round: boolean, board: Size, panel: Size): number {
   if (!round) return mostByArea(panel, { board, gap: 0 });
-  const each = exact(ROUND_SHARE).times(board.width).times(board.height);
-  return exact(panel.width).times(panel.height).div(each).floor().toNumber();
+  const area = ({ width, height }: Size) => BigInt(width) * BigInt(height);
+  return Number((area(panel) * 1_000_000n) / (area(board) * ROUND_SHARE));
 }

@@ -1,9 +1,10 @@
 import { describe, expect, it } from "vitest";
+import { blankQuote } from "#src/components/islands/boards/blank-quote.ts";
 import { boardsAnswer, orderWords, quoteName } from "#src/components/islands/boards/board-words.ts";
 import { boardsPoints } from "#src/components/islands/boards/boards-points.ts";
 import { blankTerms, termsFields } from "#src/components/islands/boards/panel-terms-draft.ts";
 import { paysSentence, runsWords } from "#src/components/islands/boards/pays-words.ts";
-import { blankQuote, quoteDraft, quoteFields } from "#src/components/islands/boards/quote-draft.ts";
+import { quoteDraft, quoteFields } from "#src/components/islands/boards/quote-draft.ts";
 import { costRun } from "#src/costing/cost-run.ts";
 import type { PanelsPay } from "#src/costing/panels/compare-pieces.ts";
 import { singlyOrPanels } from "#src/costing/singly-or-panels.ts";

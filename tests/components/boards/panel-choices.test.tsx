@@ -52,7 +52,7 @@ function printer() {
   return print;
 }
 
-it("prints at true scale: millimetres of the drawing are millimetres of paper, and the bar is fifty", () => {
+it("prints at true scale: millimetres of the drawing are millimetres of paper, and the bar is fifty", async () => {
   const print = printer();
   const fitted = fitPanels(BOARD, ROUTED);
   const twelve = fitted.ok && fitted.arrangements.find(({ count }) => count === 8);
@@ -61,7 +61,7 @@ it("prints at true scale: millimetres of the drawing are millimetres of paper, a
   const panel = layOutPanel(twelve, fitted.measures);
   render(<PrintPanel panel={panel} picture={PICTURE} title="Dew Lantern, panel at Kilnside" />);
   fireEvent.click(screen.getByRole("button", { name: "Print 1:1" }));
-  expect(print).toHaveBeenCalledOnce();
+  await vi.waitFor(() => expect(print).toHaveBeenCalledOnce());
   expect(document.documentElement.dataset).toMatchObject({ printing: "panel", sheet: "upright" });
   const sheet = document.querySelector("[data-print-sheet] svg") as SVGSVGElement;
   expect([sheet.getAttribute("viewBox"), sheet.style.width, sheet.style.height]).toEqual([

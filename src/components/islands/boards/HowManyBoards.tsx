@@ -6,7 +6,7 @@ import { type Column, Table } from "#src/components/islands/parts/Table.tsx";
 import { TextField } from "#src/components/islands/parts/TextField.tsx";
 import { editField } from "#src/components/islands/plan/edit-plan.ts";
 import { useOpens } from "#src/components/islands/plan/open-working.ts";
-import { exact } from "#src/costing/decimal.ts";
+import { toPercent } from "#src/components/percent.ts";
 import { enoughGood } from "#src/costing/enough-boards.ts";
 import { roundedText } from "#src/costing/rounded-text.ts";
 import type { BoardsResult } from "#src/costing/run-result.ts";
@@ -163,7 +163,7 @@ function ChanceTable({ boards, toOrder }: { boards: BoardsResult; toOrder: numbe
 
 /** "96 in 100"; near certainty one more figure tells. */
 function inHundred(chance: string): string {
-  const hundredths = exact(chance).times(100).toFixed();
-  if (exact(hundredths).lte(99)) return `${roundedText(hundredths, 0)} in 100`;
-  return exact(hundredths).gte("99.95") ? "all but surely" : `${roundedText(hundredths, 1)} in 100`;
+  const hundredths = toPercent(chance);
+  if (Number(hundredths) <= 99) return `${roundedText(hundredths, 0)} in 100`;
+  return Number(hundredths) >= 99.95 ? "all but surely" : `${roundedText(hundredths, 1)} in 100`;
 }

@@ -8,8 +8,6 @@ import { laterPart } from "#src/components/islands/parts/later-part.ts";
 import { Pair } from "#src/components/islands/parts/Pair.tsx";
 import { QuietButton } from "#src/components/islands/parts/QuietButton.tsx";
 import { Section } from "#src/components/islands/parts/Section.tsx";
-import { panelsAt } from "#src/costing/panels/panel-of-quote.ts";
-import { panelSentence } from "#src/costing/panels/panel-problem-words.ts";
 import type { RunResult } from "#src/costing/run-result.ts";
 import type { PanelTermsView } from "#src/server/panel-terms-changes.ts";
 import type { BoardQuoteFields } from "#src/shapes/board-quote.ts";
@@ -18,10 +16,13 @@ import type { EditedPanelTermsProps } from "./EditedPanelTerms.tsx";
 import { PanelNotes } from "./PanelNotes.tsx";
 import { firstHouse, panelView } from "./panel-view.ts";
 import { ShownPanels } from "./ShownPanels.tsx";
+import type { WhyNoPanelProps } from "./WhyNoPanel.tsx";
 
 const EditedPanelTerms = laterPart<EditedPanelTermsProps>(
   async () => (await import("./EditedPanelTerms.tsx")).EditedPanelTerms,
 );
+
+const WhyNoPanel = laterPart<WhyNoPanelProps>(async () => (await import("./WhyNoPanel.tsx")).WhyNoPanel);
 
 export interface PanelSectionProps {
   address: KitAddress;
@@ -85,7 +86,9 @@ export function PanelSection(props: PanelSectionProps) {
         {house !== null && <Houses {...{ plan, house, onChoose: show }} />}
         {house === null && open === null && <NoTerms canChange={canChange} onBegin={() => setOpen("new")} />}
         {plan.boards.size === null && <NoSize address={address} />}
-        {house !== null && view === null && <WhyNone {...{ plan, house }} />}
+        {house !== null && view === null && plan.boards.size !== null && (
+          <Later part={WhyNoPanel} give={{ plan, house }} what="Why no panel can be made" rows={1} />
+        )}
         {view && <ShownPanels {...props} view={view} onCount={setCount} />}
       </Section>
     </Pair>
@@ -166,18 +169,5 @@ function NoSize({ address }: { address: KitAddress }) {
       A panel can be laid out when the board's size is known.{" "}
       <a href={kitPath(address, "/details")}>Write the board's size</a>
     </p>
-  );
-}
-
-/** Why no panel can be made, such as a board that was made larger since. */
-function WhyNone({ plan, house }: { plan: Plan; house: string }) {
-  const fitted = panelsAt(plan, house);
-  if (fitted === null || fitted.ok) return null;
-  return (
-    <ul className="py-2">
-      {fitted.problems.map((problem) => (
-        <li key={problem.code + problem.field}>{panelSentence(problem)}</li>
-      ))}
-    </ul>
   );
 }

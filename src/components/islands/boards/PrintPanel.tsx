@@ -1,25 +1,27 @@
 import { useState } from "react";
 import { createPortal, flushSync } from "react-dom";
-import type { BoardPicture } from "#src/components/board-picture.ts";
 import { Button } from "#src/components/islands/parts/Button.tsx";
-import type { Panel } from "#src/costing/panels/lay-out-panel.ts";
-import { PanelPieces } from "./PanelPieces.tsx";
+import { laterPart } from "#src/components/islands/parts/later-part.ts";
+import { showToast } from "#src/components/islands/parts/toasts.ts";
+import type { PrintSheetProps } from "./PrintSheet.tsx";
 import { paperFor } from "./panel-paper.ts";
-import { boardsText, layoutWords, sizeText } from "./panel-words.ts";
+import { sizeText } from "./panel-words.ts";
 
-interface PrintPanelProps {
-  panel: Panel;
-  picture: BoardPicture;
-  /** Kit, revision and house, for the head of the sheet. */
-  title: string;
-}
+const Sheet = laterPart<PrintSheetProps>(async () => (await import("./PrintSheet.tsx")).PrintSheet);
 
 /** Prints the panel at true scale with a bar to check; says so where it does not fit a sheet of A4. */
-export function PrintPanel(props: PrintPanelProps) {
+export function PrintPanel(props: PrintSheetProps) {
   const [printing, setPrinting] = useState(false);
   const paper = paperFor(props.panel.outer);
-  function print() {
+  async function print() {
     if (!paper) return;
+    try {
+      await Sheet.fetch();
+    } catch {
+      const text = "The sheet could not be fetched. Try again when you are connected.";
+      showToast({ kind: "fault", text });
+      return;
+    }
     const root = document.documentElement;
     flushSync(() => setPrinting(true));
     root.dataset.printing = "panel";
@@ -32,11 +34,14 @@ export function PrintPanel(props: PrintPanelProps) {
     delete document.documentElement.dataset.sheet;
     setPrinting(false);
   }
+  const Printed = Sheet.now();
   return (
     <>
       <Button
         size="small"
-        onClick={print}
+        onClick={() => void print()}
+        onPointerEnter={Sheet.preload}
+        onFocus={Sheet.preload}
         offBecause={
           paper
             ? undefined
@@ -45,43 +50,7 @@ export function PrintPanel(props: PrintPanelProps) {
       >
         Print 1:1
       </Button>
-      {printing && createPortal(<Sheet {...props} />, document.body)}
+      {printing && Printed && createPortal(<Printed {...props} />, document.body)}
     </>
-  );
-}
-
-/** Scores reach past the panel's edge by so many millimetres. */
-const EDGE = 3;
-const BAR = 50;
-const FOOT = 12;
-
-function Sheet({ panel, picture, title }: PrintPanelProps) {
-  const [width, height] = [panel.outer.width / 1000 + 2 * EDGE, panel.outer.height / 1000 + EDGE + FOOT];
-  const bar = panel.outer.height / 1000 + 7;
-  return (
-    <div data-print-sheet>
-      <p className="font-semibold">{title}</p>
-      <p className="sheet-small mb-2">
-        {`${boardsText(panel.arrangement.count)}, ${layoutWords(panel.arrangement)}, ${sizeText(panel.outer)}. Scale 1:1: print at 100\u00a0%; the bar must measure ${BAR}\u00a0mm.`}
-      </p>
-      <svg
-        role="img"
-        aria-label={`${title}, at true scale`}
-        viewBox={`${-EDGE} ${-EDGE} ${width} ${height}`}
-        style={{ width: `${width}mm`, height: `${height}mm` }}
-        className="block max-w-none"
-      >
-        <PanelPieces {...{ panel, picture }} />
-        <path
-          d={`M0 ${bar}H${BAR}M0 ${bar - 1.5}v3M${BAR} ${bar - 1.5}v3M${BAR / 2} ${bar - 1}v2`}
-          fill="none"
-          strokeWidth={0.3}
-          className="stroke-ink"
-        />
-        <text x={BAR + 2} y={bar + 1.2} fontSize={3.6} className="fill-ink">
-          {`${BAR}\u00a0mm`}
-        </text>
-      </svg>
-    </div>
   );
 }

@@ -11,12 +11,12 @@ import type { BoardQuoteView } from "#src/server/board-changes.ts";
 import type { BoardQuoteFields } from "#src/shapes/board-quote.ts";
 import type { Plan } from "#src/shapes/plan.ts";
 import type { BegunQuote, BoardsProps } from "./Boards.tsx";
+import { blankQuote } from "./blank-quote.ts";
 import { quoteName } from "./board-words.ts";
 import type { EditedQuoteProps } from "./EditedQuote.tsx";
 import type { QuoteFormProps } from "./QuoteForm.tsx";
 import { QuoteNotes } from "./QuoteNotes.tsx";
 import { type QuoteRow, QuoteTable } from "./QuoteTable.tsx";
-import { blankQuote } from "./quote-draft.ts";
 import { addQuote } from "./quotes-store.ts";
 
 const QuoteForm = laterPart<QuoteFormProps>(async () => (await import("./QuoteForm.tsx")).QuoteForm);

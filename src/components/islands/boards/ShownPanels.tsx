@@ -1,12 +1,19 @@
+import { useState } from "react";
 import { Button } from "#src/components/islands/parts/Button.tsx";
+import { Later } from "#src/components/islands/parts/Later.tsx";
+import { laterPart } from "#src/components/islands/parts/later-part.ts";
+import type { Panel } from "#src/costing/panels/lay-out-panel.ts";
 import { millimetres } from "#src/costing/panels/micrometres.ts";
 import { PanelChoices } from "./PanelChoices.tsx";
 import { PanelDrawing } from "./PanelDrawing.tsx";
-import { PanelMeasures } from "./PanelMeasures.tsx";
 import type { PanelSectionProps } from "./PanelSection.tsx";
 import { PrintPanel } from "./PrintPanel.tsx";
 import { countOf, type PanelView } from "./panel-view.ts";
 import { boardsText } from "./panel-words.ts";
+
+const PanelMeasures = laterPart<{ panel: Panel }>(
+  async () => (await import("./PanelMeasures.tsx")).PanelMeasures,
+);
 
 interface ShownPanelsProps extends PanelSectionProps {
   view: PanelView;
@@ -28,13 +35,21 @@ export function ShownPanels(props: ShownPanelsProps) {
       />
       {picture && <PanelDrawing panel={now.panel} picture={picture} />}
       <Ways {...props} />
-      <details className="mt-4">
-        <summary className="type-table cursor-pointer font-semibold">The panel in figures</summary>
-        <div className="mt-2 max-w-[560px]">
-          <PanelMeasures panel={now.panel} />
-        </div>
-      </details>
+      <InFigures panel={now.panel} />
     </>
+  );
+}
+
+/** What the drawing shows, as text; fetched when it is opened. */
+function InFigures({ panel }: { panel: Panel }) {
+  const [opened, setOpened] = useState(false);
+  return (
+    <details className="mt-4" onToggle={() => setOpened(true)}>
+      <summary className="type-table cursor-pointer font-semibold">The panel in figures</summary>
+      <div className="mt-2 max-w-[560px]">
+        {opened && <Later part={PanelMeasures} give={{ panel }} what="The panel in figures" rows={8} />}
+      </div>
+    </details>
   );
 }
 

@@ -3,7 +3,7 @@ import { moneyText } from "#src/components/amount-text.ts";
 import { Figure } from "#src/components/islands/parts/Figure.tsx";
 import { type Column, Table } from "#src/components/islands/parts/Table.tsx";
 import { useOpens } from "#src/components/islands/plan/open-working.ts";
-import { exact } from "#src/costing/decimal.ts";
+import { grains } from "#src/costing/grains.ts";
 import type { QuoteResult, RunResult } from "#src/costing/run-result.ts";
 import { singlyOrPanels } from "#src/costing/singly-or-panels.ts";
 import type { Plan } from "#src/shapes/plan.ts";
@@ -19,7 +19,7 @@ interface Way {
 function cheapest(quotes: readonly QuoteResult[]): QuoteResult | null {
   return quotes.reduce<QuoteResult | null>((best, one) => {
     if (!one.landed.known) return best;
-    return best?.landed.known && exact(best.landed.value).lte(one.landed.value) ? best : one;
+    return best?.landed.known && grains(best.landed.value) <= grains(one.landed.value) ? best : one;
   }, null);
 }
 

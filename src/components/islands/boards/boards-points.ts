@@ -1,7 +1,7 @@
 import { countText, moneyText } from "#src/components/amount-text.ts";
 import type { ChartTable } from "#src/components/islands/charts/ChartFrame.tsx";
 import { boardsByRun } from "#src/costing/boards-by-run.ts";
-import { exact } from "#src/costing/decimal.ts";
+import { grains } from "#src/costing/grains.ts";
 import type { QuoteResult } from "#src/costing/run-result.ts";
 import type { Plan } from "#src/shapes/plan.ts";
 import { quoteName } from "./board-words.ts";
@@ -46,10 +46,12 @@ function lineLabel({ boardHouse, boardsPerPiece }: QuoteResult): string {
 const STEP = 0.03;
 
 function leastOf(quotes: readonly QuoteResult[]): string | null {
-  let least: { id: string; value: string } | null = null;
-  for (const { id, perBoard } of quotes)
-    if (perBoard.known && (least === null || exact(perBoard.value).lt(least.value)))
-      least = { id, value: perBoard.value };
+  let least: { id: string; value: bigint } | null = null;
+  for (const { id, perBoard } of quotes) {
+    if (!perBoard.known) continue;
+    const value = grains(perBoard.value);
+    if (least === null || value < least.value) least = { id, value };
+  }
   return least?.id ?? null;
 }
 
