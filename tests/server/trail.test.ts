@@ -1,5 +1,6 @@
 import { eq } from "drizzle-orm";
 import { describe, expect, it } from "vitest";
+import { channels } from "#db/schema/channels.ts";
 import { editions } from "#db/schema/kits.ts";
 import { lines } from "#db/schema/parts.ts";
 import { offers } from "#db/schema/supply.ts";
@@ -95,5 +96,20 @@ describe("a kit whose list is not begun", () => {
     ]);
     const answer = runAnswer(answerFigures(kitState(app.db, workshop, kit, TODAY).result));
     expect(answer[0]?.text).toBe("There are no parts yet.");
+  });
+});
+
+describe("what is to settle about the price", () => {
+  it("is a stop of its own: a channel that lacks two terms is one thing, a list price another", () => {
+    const { workshop, onHome } = place();
+    const kit = runKit(app, workshop);
+    const priceStop = () => onHome(kit.id).stops.find(({ key }) => key === "price")?.state;
+    expect(priceStop()).toEqual({ kind: "done" });
+    app.db.update(channels).set({ feeRate: null, postagePaid: null }).where(eq(channels.id, kit.site)).run();
+    expect(priceStop()).toEqual({ kind: "to-settle", count: 1 });
+    app.db.update(editions).set({ price: null }).where(eq(editions.kitId, kit.id)).run();
+    expect(priceStop()).toEqual({ kind: "to-settle", count: 2 });
+    app.db.delete(lines).where(eq(lines.kitId, kit.id)).run();
+    expect(priceStop()).toEqual({ kind: "not-started" });
   });
 });

@@ -3,7 +3,7 @@ import { kitPath } from "#src/components/islands/kit-address.ts";
 import type { Need, NeedCode, Place } from "#src/costing/problem.ts";
 import { problemSentence } from "#src/costing/problem-words.ts";
 import type { Plan } from "#src/shapes/plan.ts";
-import { needLink } from "./page-links.ts";
+import { channelLink, needLink } from "./page-links.ts";
 import type { PlanRow } from "./plan-rows.ts";
 
 /** The way to the field that settles a need, in the words of its button. */
@@ -80,7 +80,7 @@ const NONE_OF_IT: Partial<Record<NeedCode, (at: Place) => NoneOfIt>> = {
 /** One thing that is missing at one place, with the ways on. */
 export interface MissingThing {
   key: string;
-  /** Its place: the designators of a part, or nothing. */
+  /** Its place: the designators of a part, the name of a channel, or nothing. */
   what: string;
   reason: string;
   detail: string;
@@ -88,10 +88,18 @@ export interface MissingThing {
   noneOfIt: NoneOfIt | null;
 }
 
-function wayHref(address: KitAddress, need: Need, { part, quote }: Place): string {
+function wayHref(address: KitAddress, need: Need, { part, quote, channel }: Place): string {
+  if (channel) return channelLink(address, channel);
+  if (need.code === "no-price") return kitPath(address, "/price#list-price");
   if (part && need.page === "offers") return kitPath(address, `/offers/${part}`);
   if (quote) return kitPath(address, "/boards");
   return needLink(address, need);
+}
+
+/** Designators of the part, or the name of the channel where there are several. */
+function thingNamed({ parts, channels }: Plan, { part, channel }: Place): string {
+  if (part) return parts.find(({ id }) => id === part)?.designators ?? "";
+  return channels.length > 1 ? (channels.find(({ id }) => id === channel)?.name ?? "") : "";
 }
 
 /** Every missing thing behind some needs, one entry per place. */
@@ -102,7 +110,7 @@ export function missingThings(plan: Plan, needs: readonly Need[], address: KitAd
       const [reason = words, ...rest] = words.split(/(?<=\.) /);
       return {
         key: `${need.code} ${JSON.stringify(at)}`,
-        what: plan.parts.find(({ id }) => id === at.part)?.designators ?? "",
+        what: thingNamed(plan, at),
         reason,
         detail: rest.join(" "),
         way: { label: WAYS[need.code], href: wayHref(address, need, at) },

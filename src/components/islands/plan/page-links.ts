@@ -21,3 +21,8 @@ export function needLink(address: KitAddress, need: { code: NeedCode; page: Sour
     ? `/workshops/${address.workshop}/suppliers#rates`
     : pageLink(address, need.page).href;
 }
+
+/** Where the terms of a channel are entered; the page opens them. */
+export function channelLink(address: KitAddress, channel: string): string {
+  return kitPath(address, `/price#channel-${channel}`);
+}

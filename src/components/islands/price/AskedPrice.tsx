@@ -31,6 +31,7 @@ export function AskedPrice({ address, context, edition, mayChange, who }: PriceP
   return (
     <MoneyField
       key={edition.id}
+      id="list-price"
       label={several ? `List price of ${edition.name}, with tax` : "List price, with tax"}
       large
       live

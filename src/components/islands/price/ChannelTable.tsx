@@ -45,6 +45,7 @@ export function ChannelTable(props: ChannelTableProps) {
             {plan.channels.map((channel) => (
               <th
                 key={channel.id}
+                id={`channel-${channel.id}`}
                 scope="col"
                 className="border-l border-rule px-3 pb-2 text-right align-bottom font-semibold"
               >

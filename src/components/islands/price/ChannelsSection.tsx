@@ -1,4 +1,4 @@
-import { useState } from "react";
+import { useEffect, useState } from "react";
 import { countText } from "#src/components/amount-text.ts";
 import { Button } from "#src/components/islands/parts/Button.tsx";
 import { Section } from "#src/components/islands/parts/Section.tsx";
@@ -11,11 +11,26 @@ import { ChannelTable } from "./ChannelTable.tsx";
 import { freeName, newChannel } from "./channel-entry.ts";
 import type { PriceProps } from "./price-props.ts";
 
+/** The channel that is being changed; an address that ends in one's name opens it. */
+function useNamedChannel(mayChange: boolean) {
+  const [open, setOpen] = useState<string | null>(null);
+  useEffect(() => {
+    const read = () => {
+      const named = /^#channel-([\w-]+)$/.exec(location.hash)?.[1];
+      if (named !== undefined && mayChange) setOpen(named);
+    };
+    read();
+    addEventListener("hashchange", read);
+    return () => removeEventListener("hashchange", read);
+  }, [mayChange]);
+  return [open, setOpen] as const;
+}
+
 /** The channels, and the ways to add, copy, move and remove one. */
 export function ChannelsSection(props: PriceProps & { opens: ReturnType<typeof useOpens> }) {
   const { address, context, mayChange } = props;
   const { channels, run, editions } = context.plan;
-  const [open, setOpen] = useState<string | null>(null);
+  const [open, setOpen] = useNamedChannel(mayChange);
   const full = channels.length >= CHANNELS_MOST;
   async function add(fields: Omit<PlanChannel, "id">) {
     const id = await addRow(address, "channel", fields);

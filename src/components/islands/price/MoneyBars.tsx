@@ -30,6 +30,7 @@ const GROUNDS: Record<Segment, string> = {
 export function MoneyBars({ context, edition }: Pick<PriceProps, "context" | "edition">) {
   const { currency } = context.plan;
   const bars = moneyBars(channelTable(context, edition.id));
+  if (bars.every(({ parts }) => parts === null)) return null;
   const shown = SEGMENTS.filter((segment) =>
     bars.some(({ parts }) => parts?.some((part) => part.segment === segment)),
   );

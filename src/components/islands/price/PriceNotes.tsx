@@ -24,6 +24,7 @@ export function TogetherNote({
   opens,
 }: NoteProps & { opens: ReturnType<typeof useOpens> }) {
   const { left, perHour, minutes } = yields;
+  if (!left.known) return null;
   const { currency } = context.plan;
   const orders = channelTable(context, edition.id);
   const hundredths = orders.flatMap(({ share }) =>
@@ -34,15 +35,11 @@ export function TogetherNote({
       <p>
         {hundredths.length > 1 && `${listed(hundredths)} in a hundred, so one kit `}
         {hundredths.length > 1 ? "leaves " : "One kit leaves "}
-        {left.known ? (
-          <Figure
-            label="Left of a kit"
-            value={moneyText(left.value, currency)}
-            {...opens(`kit-left:${edition.id}`)}
-          />
-        ) : (
-          "what is not known yet"
-        )}
+        <Figure
+          label="Left of a kit"
+          value={moneyText(left.value, currency)}
+          {...opens(`kit-left:${edition.id}`)}
+        />
         {hundredths.length > 1 && " on average"}
         {perHour.known && (
           <>
@@ -72,7 +69,7 @@ function timesHundred(share: string): string {
 export function TimeNote({ context, edition }: Omit<NoteProps, "yields">) {
   const made = context.cost.editions.find(({ id }) => id === edition.id);
   const { ratePerHour } = context.plan.work;
-  if (!made || made.kits === 0) return null;
+  if (!made || made.kits === 0 || made.minutes === "0") return null;
   const each = exact(made.minutes).div(made.kits).toFixed();
   return (
     <MarginNote title="Time">

@@ -12,6 +12,7 @@ import { usePlan } from "#src/components/islands/plan/use-plan.ts";
 import { useSweep } from "#src/components/islands/plan/use-sweep.ts";
 import { CannotBeKnown } from "#src/components/islands/run/CannotBeKnown.tsx";
 import { PAIRS } from "#src/components/page-look.ts";
+import { priceForAim } from "#src/costing/price/price-for-aim.ts";
 import { yieldsAt } from "#src/costing/price/price-yields.ts";
 import type { Plan, PlanEdition } from "#src/shapes/plan.ts";
 import { AimsSection } from "./AimsSection.tsx";
@@ -78,9 +79,12 @@ function Priced({ address, plan, who, may }: PricedProps) {
   const props = { address, context, edition, mayChange: may.changePrice };
   const needs = yields.left.known ? [] : yields.left.needs;
   const { currency } = plan;
+  // No loss on the next kit rests on all that every other aim rests on.
+  const next = priceForAim(context, { edition: edition.id, channel: null }, { aim: "next-kit" });
+  const solved = next.found || next.problem !== null;
   return (
     <>
-      <PriceAnswer {...{ edition, yields, currency, opens }} named={plan.editions.length > 1} />
+      <PriceAnswer {...{ edition, yields, currency, opens, solved }} named={plan.editions.length > 1} />
       {plan.editions.length > 1 && (
         <div className="mb-6">
           <FilterGroup
@@ -115,13 +119,15 @@ function Priced({ address, plan, who, may }: PricedProps) {
         <Pair note={<WholesaleNote {...{ context, edition }} />}>
           <MoneyBars {...{ context, edition }} />
         </Pair>
-        <Pair>
-          <AimsSection {...props} />
-        </Pair>
+        {solved && (
+          <Pair>
+            <AimsSection {...props} />
+          </Pair>
+        )}
         <Pair>
           <YieldsSection {...{ context, edition, yields, opens }} />
         </Pair>
-        {sweep && (
+        {sweep?.breakEven.known && (
           <Pair>
             <EvenSection {...{ address, context, run, sweep, opens }} />
           </Pair>

@@ -48,7 +48,6 @@ export function TargetProfit({ sweep, currency }: { sweep: SweepResult; currency
 
 function inWords(sweep: SweepResult, before: string, currency: string): string {
   const money = moneyText(before, currency);
-  if (!sweep.breakEven.known) return `${money} before tax; which run reaches it is not known.`;
   const { first, safe } = runsForProfit(sweep, before);
   if (first === null)
     return `${money} before tax: no run up to ${countText(sweep.breakEven.upTo)} reaches it.`;

@@ -1,17 +1,17 @@
 import { countText, moneyText, rateText, roundMoneyText, shareText } from "#src/components/amount-text.ts";
 import type { Figure } from "#src/costing/figure.ts";
-import { needWords } from "#src/costing/problem-words.ts";
+import { needsInShort } from "#src/costing/problem-words.ts";
 
 const MINUS = "\u2212";
 
 /** A figure of money as written, or what it needs. */
 export function moneyOf(figure: Figure, currency: string): string {
-  return figure.known ? moneyText(figure.value, currency) : needWords(figure.needs);
+  return figure.known ? moneyText(figure.value, currency) : needsInShort(figure.needs);
 }
 
 /** What goes off: with a minus; nothing is a dash, since it does not apply. */
 export function offText(figure: Figure, currency: string): string {
-  if (!figure.known) return needWords(figure.needs);
+  if (!figure.known) return needsInShort(figure.needs);
   if (/^-?0*\.?0*$/.test(figure.value)) return "–";
   const negative = figure.value.startsWith("-");
   const text = moneyText(negative ? figure.value.slice(1) : figure.value, currency);
@@ -20,17 +20,17 @@ export function offText(figure: Figure, currency: string): string {
 
 /** A count of kits, or what it needs. */
 export function countOf(figure: Figure): string {
-  return figure.known ? countText(figure.value) : needWords(figure.needs);
+  return figure.known ? countText(figure.value) : needsInShort(figure.needs);
 }
 
 /** A share in whole hundredths, or what it needs. */
 export function shareOf(figure: Figure): string {
-  return figure.known ? shareText(figure.value) : needWords(figure.needs);
+  return figure.known ? shareText(figure.value) : needsInShort(figure.needs);
 }
 
 /** Minutes as they are, to a tenth: "18.5 min". */
 export function minutesOf(figure: Figure): string {
-  if (!figure.known) return needWords(figure.needs);
+  if (!figure.known) return needsInShort(figure.needs);
   return `${(Math.round(Number(figure.value) * 10) / 10).toString()}\u00a0min`;
 }
 
