@@ -28,6 +28,15 @@ function channelOf(sale: Given): Given {
   };
 }
 
+/** Boards as plans had them before panels: every quote for single boards, no size known, no house's panels. */
+function boardsOf(boards: Given): Given {
+  const singly = { boardsPerPanel: null, pieceSize: null, formula: null, depanelling: "0" };
+  const quotes = Array.isArray(boards.quotes)
+    ? boards.quotes.map((quote: unknown) => (isRecord(quote) ? { ...singly, ...quote } : quote))
+    : boards.quotes;
+  return { size: null, panelTerms: [], ...boards, quotes };
+}
+
 /** A plan of the first format in the words of the second; anything else as it came. */
 function asNow(value: unknown): unknown {
   if (!isRecord(value) || value.format !== "tinpenny-plan/1") return value;
@@ -35,7 +44,8 @@ function asNow(value: unknown): unknown {
   // Early files do not say how long the list is; each of its parts stands in it at least once.
   const lines = Array.isArray(rest.parts) ? rest.parts.length : 0;
   const channels = isRecord(sale) ? [channelOf(sale)] : sale;
-  return { lines, ...rest, format: "tinpenny-plan/2", channels };
+  const boards = isRecord(rest.boards) ? boardsOf(rest.boards) : rest.boards;
+  return { lines, ...rest, format: "tinpenny-plan/2", boards, channels };
 }
 
 /** A plan as somebody sends it: of this format, or of the first, which is read as what it meant. */

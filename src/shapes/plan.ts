@@ -98,22 +98,22 @@ export type PlanBoardFormula = z.infer<typeof PlanBoardFormula>;
 
 /**
  * A board house's quote (section 6) for single boards or for panels, its pieces. Quantities are pieces: lots may be
- * combined; breaks are for each piece at the break reached. Plans of the first format know single boards only.
+ * combined; breaks are for each piece at the break reached.
  */
 export const PlanBoardQuote = z.strictObject({
   id: Id,
   boardHouse: Name,
   currency: CurrencyCode,
   /** `null`: boards come singly. */
-  boardsPerPanel: z.int().min(2).max(limits.BOARDS_PER_PANEL_MOST).nullable().default(null),
+  boardsPerPanel: z.int().min(2).max(limits.BOARDS_PER_PANEL_MOST).nullable(),
   /** Outer size of a piece in millimetres, as quoted; a formula needs it. */
-  pieceSize: Size.nullable().default(null),
+  pieceSize: Size.nullable(),
   priceModel: z.enum(limits.BOARD_PRICE_MODELS),
   breaks: z.array(PriceBreak).max(limits.BREAKS_PER_OFFER_MOST),
   /** `null` unless the price model is a formula that is known. */
-  formula: PlanBoardFormula.nullable().default(null),
+  formula: PlanBoardFormula.nullable(),
   /** For breaking a board out of its panel, for each board delivered. */
-  depanelling: Amount.default("0"),
+  depanelling: Amount,
   engineeringCharge: Amount,
   stencilCharge: Amount,
   freight: Amount.nullable(),
@@ -241,10 +241,8 @@ export const Plan = z.strictObject({
     /** False for a kit without a board of its own. */
     needed: z.boolean(),
     /** The board's size in millimetres, as it lies on panels; `null`: not stated. */
-    size: Size.extend({ shape: z.enum(limits.BOARD_SHAPES) })
-      .nullable()
-      .default(null),
-    panelTerms: z.array(PlanPanelTerms).max(limits.BOARD_QUOTES_MOST).default([]),
+    size: Size.extend({ shape: z.enum(limits.BOARD_SHAPES) }).nullable(),
+    panelTerms: z.array(PlanPanelTerms).max(limits.BOARD_QUOTES_MOST),
     yield: Share,
     confidence: RateBelowOne,
     quotes: z.array(PlanBoardQuote).max(limits.BOARD_QUOTES_MOST),

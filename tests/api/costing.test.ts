@@ -112,6 +112,26 @@ describe("a plan file of the first format", () => {
     expect(body.run.bringsPerKit).toEqual({ known: true, value: "8.64" });
   });
 
+  it("is read as one whose board quotes are for single boards", async () => {
+    const { as, plan } = await downloaded();
+    const { size: _, panelTerms: __, ...boards } = plan.boards;
+    const quote = {
+      ...{ id: "q", boardHouse: "Kilnside", currency: plan.currency, priceModel: "lots" },
+      breaks: [{ quantity: 50, price: "90.00" }],
+      ...{ engineeringCharge: "25", stencilCharge: "0", freight: "12.50" },
+      ...{ leadTimeDays: null, pricedOn: null, validUntil: null },
+    };
+    const editions = plan.editions.map((edition) => ({ ...edition, boardsPerKit: 1 }));
+    const body = first(plan, { editions, boards: { ...boards, needed: true, quotes: [quote] } });
+    const answer = await call(costing, { as, body, query: { working: "" } });
+    // 40 kits, a lot of 50: 90.00 + 25.00 + 12.50.
+    expect(answer.body.run.boards.quotes).toMatchObject([
+      { boardsPerPiece: 1, pieces: 50, landed: { value: "127.5" } },
+    ]);
+    const now = await call(costing, { as, body: { ...plan, boards: { ...boards, quotes: [quote] } } });
+    expect(now.problem?.errors?.map(({ at }) => at)).toContain("boards.panelTerms");
+  });
+
   it("is refused with the field named where its sale is impossible or missing", async () => {
     const { as, plan } = await downloaded();
     const wrong = await call(costing, { as, body: first(plan, { sale: { ...sale, feeRate: "1" } }) });
