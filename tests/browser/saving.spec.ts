@@ -119,7 +119,7 @@ test("a cell that is written and left at once is kept", async ({ page }) => {
     .first()
     .click();
   await page.waitForURL(/\/boards$/);
-  await page.goto(`${kit}/parts`);
+  await page.goto(`${kit}/parts`, { waitUntil: "networkidle" });
   await expect(drawer(page)).toHaveText("K7");
 
   // The editor is still open when another page is asked for.
@@ -130,11 +130,11 @@ test("a cell that is written and left at once is kept", async ({ page }) => {
     .first()
     .click();
   await page.waitForURL(/\/offers$/);
-  await page.goto(`${kit}/parts`);
+  await page.goto(`${kit}/parts`, { waitUntil: "networkidle" });
   await expect(drawer(page)).toHaveText("K8");
   await ready(page);
   await writeDrawer(page, "K9");
-  await page.reload();
+  await page.reload({ waitUntil: "networkidle" });
   await expect(drawer(page)).toHaveText("K9");
 
   await ready(page);
