@@ -1,4 +1,7 @@
-import { exact } from "./decimal.ts";
+import { grainShare, grains, grainText, scaled } from "./grains.ts";
+import { beforeTax } from "./price/aims.ts";
+import { MILLION } from "./price/charged.ts";
+import { nearest } from "./price/fraction.ts";
 import type { SweepColumns } from "./sweep-result.ts";
 
 /** Runs that reach a profit: the first that does, and the one from which every larger one does. */
@@ -9,22 +12,23 @@ export interface TargetRuns {
 
 /**
  * Profit before tax that leaves `afterTax` when so much of it is taxed away (section 11):
- * `after ÷ (1 − rate)`, to 40 significant digits. Money as decimal text; rate below 1.
+ * `after ÷ (1 − rate)`, to the nearest grain. Money as decimal text; rate below 1.
  *
  * @example profitBeforeTax("540000", "0.4") === "900000"
  */
 export function profitBeforeTax(afterTax: string, taxRate: string): string {
-  return exact(afterTax).div(exact(1).minus(taxRate)).toFixed();
+  return grainText(nearest(beforeTax(afterTax, taxRate)));
 }
 
 /**
- * What a profit leaves after tax: `profit × (1 − rate)`, exact; a loss is not taxed and stays as it is.
+ * What a profit leaves after tax: `profit × (1 − rate)`, to the nearest grain; a loss is not taxed and
+ * stays as it is.
  *
  * @example profitAfterTax("900000", "0.4") === "540000"
  */
 export function profitAfterTax(profit: string, taxRate: string): string {
-  const before = exact(profit);
-  return before.isNegative() ? before.toFixed() : before.times(exact(1).minus(taxRate)).toFixed();
+  const before = grains(profit);
+  return grainText(before < 0n ? before : grainShare(before, MILLION - scaled(taxRate, 6), MILLION));
 }
 
 /**
@@ -34,11 +38,11 @@ export function profitAfterTax(profit: string, taxRate: string): string {
  * @example fixed 50 000, price 250, variable 150: runsForProfit(sweep, "30000").first === 800
  */
 export function runsForProfit(sweep: { columns: Pick<SweepColumns, "profit"> }, target: string): TargetRuns {
-  const wanted = exact(target);
+  const wanted = grains(target);
   const { profit } = sweep.columns;
   const end = profit.indexOf(null);
   const known = end < 0 ? profit : profit.slice(0, end);
-  const reaches = known.map((value) => value !== null && exact(value).gte(wanted));
+  const reaches = known.map((value) => value !== null && grains(value) >= wanted);
   const first = reaches.indexOf(true);
   const lastMiss = reaches.lastIndexOf(false);
   return {

@@ -30,6 +30,7 @@ const OWN_PAGES = [
   `${KIT}/offers`,
   `${KIT}/boards`,
   `${KIT}/run`,
+  `${KIT}/price`,
 ];
 /** Pages whose address is found by following the first link of that kind on another. */
 const LINKED_PAGES = [

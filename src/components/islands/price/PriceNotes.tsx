@@ -1,13 +1,12 @@
-import { countText, moneyText } from "#src/components/amount-text.ts";
+import { countText, moneyText, shareText } from "#src/components/amount-text.ts";
 import { Figure } from "#src/components/islands/parts/Figure.tsx";
 import { MarginNote } from "#src/components/islands/parts/Pair.tsx";
 import type { useOpens } from "#src/components/islands/plan/open-working.ts";
-import { exact } from "#src/costing/decimal.ts";
 import { type ChannelOrder, channelTable } from "#src/costing/price/channel-table.ts";
 import type { PriceContext } from "#src/costing/price/price-context.ts";
 import type { PriceYields } from "#src/costing/price/price-yields.ts";
-import { roundedText } from "#src/costing/rounded-text.ts";
 import type { PlanEdition } from "#src/shapes/plan.ts";
+import { perKit } from "./per-kit.ts";
 import { listed, minutesOf } from "./price-words.ts";
 
 interface NoteProps {
@@ -27,9 +26,7 @@ export function TogetherNote({
   if (!left.known) return null;
   const { currency } = context.plan;
   const orders = channelTable(context, edition.id);
-  const hundredths = orders.flatMap(({ share }) =>
-    share.known ? [roundedText(timesHundred(share.value), 0)] : [],
-  );
+  const hundredths = orders.flatMap(({ share }) => (share.known ? [inHundred(share.value)] : []));
   return (
     <MarginNote title="All channels together">
       <p>
@@ -61,8 +58,9 @@ export function TogetherNote({
   );
 }
 
-function timesHundred(share: string): string {
-  return exact(share).times(100).toFixed();
+/** "0.55" is "55". */
+function inHundred(share: string): string {
+  return shareText(share).replace(/\D+$/, "");
 }
 
 /** Making and selling, apart. */
@@ -70,7 +68,7 @@ export function TimeNote({ context, edition }: Omit<NoteProps, "yields">) {
   const made = context.cost.editions.find(({ id }) => id === edition.id);
   const { ratePerHour } = context.plan.work;
   if (!made || made.kits === 0 || made.minutes === "0") return null;
-  const each = exact(made.minutes).div(made.kits).toFixed();
+  const each = perKit([made.minutes], made.kits.toString());
   return (
     <MarginNote title="Time">
       <p>
@@ -107,7 +105,7 @@ function paid({ priceAsked }: ChannelOrder, currency: string): string {
 
 function leaves({ left, minutes, kitsPerOrder }: ChannelOrder, currency: string): string {
   if (!left.known || !minutes.known) return "";
-  const each = (value: string) => exact(value).div(kitsPerOrder).toFixed();
+  const each = (value: string) => perKit([value], kitsPerOrder);
   const several = kitsPerOrder === "1" ? "" : `, ${countText(kitsPerOrder)} kits in an order`;
   return `It leaves ${moneyText(each(left.value), currency)} a kit and asks ${minutesOf({ known: true, value: each(minutes.value) })}${several}.`;
 }

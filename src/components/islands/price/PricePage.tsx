@@ -4,27 +4,17 @@ import { Button } from "#src/components/islands/parts/Button.tsx";
 import { ErrorBox } from "#src/components/islands/parts/ErrorBox.tsx";
 import { FilterGroup } from "#src/components/islands/parts/FilterGroup.tsx";
 import { Loading } from "#src/components/islands/parts/Loading.tsx";
-import { Pair } from "#src/components/islands/parts/Pair.tsx";
 import { Question } from "#src/components/islands/parts/Question.tsx";
 import { useOpens } from "#src/components/islands/plan/open-working.ts";
-import { runOf } from "#src/components/islands/plan/run-of.ts";
 import { usePlan } from "#src/components/islands/plan/use-plan.ts";
-import { useSweep } from "#src/components/islands/plan/use-sweep.ts";
-import { CannotBeKnown } from "#src/components/islands/run/CannotBeKnown.tsx";
-import { PAIRS } from "#src/components/page-look.ts";
 import { priceForAim } from "#src/costing/price/price-for-aim.ts";
 import { yieldsAt } from "#src/costing/price/price-yields.ts";
 import type { Plan, PlanEdition } from "#src/shapes/plan.ts";
-import { AimsSection } from "./AimsSection.tsx";
 import { AskedPrice, type WhoPrices } from "./AskedPrice.tsx";
-import { ChannelsSection } from "./ChannelsSection.tsx";
-import { EvenSection } from "./EvenSection.tsx";
-import { MoneyBars } from "./MoneyBars.tsx";
 import { OtherPrices } from "./OtherPrices.tsx";
 import { PriceAnswer } from "./PriceAnswer.tsx";
-import { CautionNote, TimeNote, TogetherNote, WholesaleNote } from "./PriceNotes.tsx";
+import { PriceEvidence } from "./PriceEvidence.tsx";
 import { pricingOf } from "./pricing-of.ts";
-import { YieldsSection } from "./YieldsSection.tsx";
 
 export interface PricePageProps {
   workshop: string;
@@ -71,21 +61,19 @@ function inView(plan: Plan, chosen: string | null): PlanEdition {
 function Priced({ address, plan, who, may }: PricedProps) {
   const [chosen, setChosen] = useState<string | null>(null);
   const opens = useOpens();
-  const { sweep } = useSweep(plan);
   const edition = inView(plan, chosen);
   const context = pricingOf(plan);
-  const run = runOf(plan);
-  const yields = yieldsAt(context, { edition: edition.id, channel: null });
-  const props = { address, context, edition, mayChange: may.changePrice };
-  const needs = yields.left.known ? [] : yields.left.needs;
-  const { currency } = plan;
+  const scope = { edition: edition.id, channel: null };
+  const yields = yieldsAt(context, scope);
   // No loss on the next kit rests on all that every other aim rests on.
-  const next = priceForAim(context, { edition: edition.id, channel: null }, { aim: "next-kit" });
+  const next = priceForAim(context, scope, { aim: "next-kit" });
   const solved = next.found || next.problem !== null;
+  const props = { address, context, edition, mayChange: may.changePrice };
+  const named = plan.editions.length > 1;
   return (
     <>
-      <PriceAnswer {...{ edition, yields, currency, opens, solved }} named={plan.editions.length > 1} />
-      {plan.editions.length > 1 && (
+      <PriceAnswer {...{ edition, yields, opens, solved, named }} currency={plan.currency} />
+      {named && (
         <div className="mb-6">
           <FilterGroup
             label="Edition"
@@ -99,40 +87,7 @@ function Priced({ address, plan, who, may }: PricedProps) {
         <AskedPrice {...props} who={who} />
         <OtherPrices {...props} />
       </div>
-      <div className={PAIRS}>
-        {needs.length > 0 && (
-          <Pair>
-            <CannotBeKnown {...{ address, plan, needs, may }} title="What a kit leaves is not known yet" />
-          </Pair>
-        )}
-        <Pair
-          note={
-            <>
-              <TogetherNote {...{ context, edition, yields, opens }} />
-              <TimeNote {...{ context, edition }} />
-              <CautionNote />
-            </>
-          }
-        >
-          <ChannelsSection {...props} opens={opens} />
-        </Pair>
-        <Pair note={<WholesaleNote {...{ context, edition }} />}>
-          <MoneyBars {...{ context, edition }} />
-        </Pair>
-        {solved && (
-          <Pair>
-            <AimsSection {...props} />
-          </Pair>
-        )}
-        <Pair>
-          <YieldsSection {...{ context, edition, yields, opens }} />
-        </Pair>
-        {sweep?.breakEven.known && (
-          <Pair>
-            <EvenSection {...{ address, context, run, sweep, opens }} />
-          </Pair>
-        )}
-      </div>
+      <PriceEvidence {...props} {...{ yields, solved, may, opens }} />
     </>
   );
 }

@@ -1,4 +1,5 @@
 import { moneyText, rateText } from "#src/components/amount-text.ts";
+import { grains, grainText } from "#src/costing/grains.ts";
 import type { ChannelOrder } from "#src/costing/price/channel-table.ts";
 import type { FigureId } from "#src/costing/working-tree.ts";
 import type { PlanChannel } from "#src/shapes/plan.ts";
@@ -22,17 +23,8 @@ export interface ChannelRow {
 function sendingText({ postagePaid, packing }: ChannelOrder, currency: string): string {
   if (!postagePaid.known) return offText(postagePaid, currency);
   if (!packing.known) return offText(packing, currency);
-  return offText({ known: true, value: sumText(postagePaid.value, packing.value) }, currency);
-}
-
-/** The sum of two amounts with at most six decimals, as decimal text. */
-function sumText(one: string, other: string): string {
-  const millionths = [one, other].map((text) => {
-    const [whole = "0", part = ""] = text.split(".");
-    return BigInt(whole) * 1_000_000n + BigInt(part.padEnd(6, "0").slice(0, 6));
-  });
-  const sum = (millionths[0] ?? 0n) + (millionths[1] ?? 0n);
-  return `${sum / 1_000_000n}.${String(sum % 1_000_000n).padStart(6, "0")}`;
+  const both = grainText(grains(postagePaid.value) + grains(packing.value));
+  return offText({ known: true, value: both }, currency);
 }
 
 const plain =

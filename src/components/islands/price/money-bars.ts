@@ -1,6 +1,6 @@
-import { exact } from "#src/costing/decimal.ts";
 import type { Figure } from "#src/costing/figure.ts";
 import type { ChannelOrder } from "#src/costing/price/channel-table.ts";
+import { perKit } from "./per-kit.ts";
 
 /** Where the buyer's money goes, in the order in which it is drawn. */
 export const SEGMENTS = ["tax", "fees", "selling", "cost", "time", "left"] as const;
@@ -23,19 +23,15 @@ export interface MoneyBar {
   lost: string | null;
 }
 
-/** Amounts of one order as one amount of one kit; null where one of them is not known. */
-function perKit(figures: readonly Figure[], kits: string): string | null {
-  let sum = exact(0);
-  for (const figure of figures) {
-    if (!figure.known) return null;
-    sum = sum.plus(figure.value);
-  }
-  return sum.div(kits).toFixed();
+/** Figures of one order as one amount of one kit; null where one of them is not known. */
+function ofOneKit(figures: readonly Figure[], kits: string): string | null {
+  const amounts = figures.flatMap((figure) => (figure.known ? [figure.value] : []));
+  return amounts.length < figures.length ? null : perKit(amounts, kits);
 }
 
 function shares(order: ChannelOrder): [Segment, string | null][] {
   const { taxInside, fee, postagePaid, packing, other, cost, timeCost, left, kitsPerOrder } = order;
-  const of = (...figures: Figure[]) => perKit(figures, kitsPerOrder);
+  const of = (...figures: Figure[]) => ofOneKit(figures, kitsPerOrder);
   return [
     ["tax", of(taxInside)],
     ["fees", of(fee)],
