@@ -3,6 +3,7 @@ import type { BenchRow } from "./bench-row.ts";
 import { run as importing } from "./import.ts";
 import { run as pages } from "./page-weight.ts";
 import { run as redrawing } from "./redraw.ts";
+import { run as sourcing } from "./sourcing.ts";
 import { run as sweeping } from "./sweep.ts";
 
 /** `npm run bench`: every measurement, each against its named baseline in the same run. Nothing fails by it. */
@@ -12,5 +13,5 @@ function printed({ what, value, unit, aim, met, note }: BenchRow): string {
 }
 
 ensureBuilt();
-for (const measure of [importing, sweeping, pages, redrawing])
+for (const measure of [importing, sweeping, sourcing, pages, redrawing])
   for (const row of await measure()) console.log(printed(row));

@@ -5,8 +5,8 @@ import type { Search } from "./search.ts";
 import type { SourcingInput, SourcingLimits } from "./sourcing-input.ts";
 import type { SourcingResult } from "./sourcing-result.ts";
 
-/** Steps of search after which the best plan so far is given with its gap: some seconds. */
-export const WORK = 2_000_000;
+/** Steps of search after which the best plan so far is given with its gap: a few seconds. */
+export const WORK = 60_000;
 
 /**
  * Chooses for every part how it is bought so that all baskets together, landed, cost least (section 5): fixed freight,

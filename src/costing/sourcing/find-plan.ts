@@ -11,30 +11,50 @@ import { offerPlan, type Search, type SearchLimits, startSearch } from "./search
 import { searchNode, searchNodes } from "./search-nodes.ts";
 import { nodeOf, setKey } from "./supplier-sets.ts";
 
+/** Times that a good set is looked for anew, near the best plan so far, before all sets are gone through. */
+const ROUNDS = 4;
+/** Share of the work that is kept for searching sets once they are found. */
+const KEPT_FOR_NODES = 0.7;
+
 /**
  * The best plan of a market, proven unless work ran out. `before`: the best plan of a market much like it, such as
  * that of the run size before, where the search then begins.
  */
 export function findPlan(market: Market, limits: SearchLimits, before: HeldPlan | null): Search {
   const search = startSearch(market, limits);
-  const start = before === null ? startLines(search) : basketsOf(market, before.ways);
-  const columns = columnsAt(search, start.goods, start.weight).sort(
-    (a, b) =>
-      (start.goods[b.reach.supplier] as number) * near(search, b) -
-      (start.goods[a.reach.supplier] as number) * near(search, a),
-  );
-  const used = columns.filter(({ reach }) => (start.lines[reach.supplier] as number) > 0);
-  const first = before === null ? nearSet(columns, used, limits.mostParcels) : used;
   const queue = emptyQueue();
-  let done: string | null = null;
-  if (first.length >= limits.leastParcels && first.length <= limits.mostParcels) {
-    const node = nodeOf(first, Number.NEGATIVE_INFINITY);
-    searchNode(search, queue, node);
-    done = setKey(first);
+  let baskets = before === null ? startLines(search) : basketsOf(market, before.ways);
+  const done = new Set<string>();
+  for (let round = 0; round < (before === null ? ROUNDS : 1); round += 1) {
+    const columns = columnsAt(search, baskets.goods, baskets.weight);
+    const used = columns.filter(({ reach }) => (baskets.lines[reach.supplier] as number) > 0);
+    const set = before === null ? nearSet(columns, used, limits.mostParcels) : used;
+    const fits = set.length >= limits.leastParcels && set.length <= limits.mostParcels;
+    if (!fits || done.has(setKey(set))) break;
+    done.add(setKey(set));
+    searchNode(search, queue, nodeOf(set, Number.NEGATIVE_INFINITY));
+    if (search.best !== null) baskets = filledUp(basketsOf(market, search.best.ways), baskets);
   }
+  const columns = columnsAt(search, baskets.goods, baskets.weight).sort(
+    (a, b) =>
+      (baskets.goods[b.reach.supplier] as number) * near(search, b) -
+      (baskets.goods[a.reach.supplier] as number) * near(search, a),
+  );
+  search.workKept = search.workLeft * KEPT_FOR_NODES;
   searchManySets(search, queue, columns, done);
+  search.workKept = 0;
   searchNodes(search, queue);
   return search;
+}
+
+/** A plan's baskets, and for suppliers that it does not use those they would have had before. */
+function filledUp(own: Baskets, before: Baskets): Baskets {
+  own.lines.forEach((lines, supplier) => {
+    if (lines > 0) return;
+    own.goods[supplier] = before.goods[supplier] as number;
+    own.weight[supplier] = before.weight[supplier] as number;
+  });
+  return own;
 }
 
 function near(search: Search, { reach }: Column): number {

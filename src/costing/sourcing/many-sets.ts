@@ -13,7 +13,7 @@ export function searchManySets(
   search: Search,
   queue: NodeQueue,
   columns: readonly Column[],
-  done: string | null,
+  done: ReadonlySet<string>,
 ): void {
   visit(search, queue, [], columns, nobodyTaken(search), done);
 }
@@ -27,7 +27,7 @@ function visit(
   taken: readonly Column[],
   undecided: readonly Column[],
   least: Float64Array,
-  done: string | null,
+  done: ReadonlySet<string>,
 ): void {
   if (undecided.length <= FEW) {
     searchSets(search, queue, taken, undecided, least, done);

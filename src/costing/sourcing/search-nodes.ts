@@ -95,7 +95,7 @@ function dropRanges(search: Search, node: SetNode, value: number): boolean {
 }
 
 /** Evaluates a new node, and queues it unless it is beaten. */
-export function queueNode(search: Search, queue: NodeQueue, node: SetNode): void {
+function queueNode(search: Search, queue: NodeQueue, node: SetNode): void {
   evaluate(search, node);
   if (!isBeaten(search, node.bound)) addNode(queue, node);
 }

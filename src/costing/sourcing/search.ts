@@ -22,6 +22,8 @@ export interface Search {
   /** `best` as one number: its total and what is added for parts not bought and freight unknown. */
   bestScore: number;
   workLeft: number;
+  /** Work kept back for what comes after: the sets are gone through with the rest. */
+  workKept: number;
   /** Nodes parted by a line so far. */
   parted: number;
   /** Room in which nodes are evaluated, one after the other. */
@@ -69,6 +71,7 @@ export function startSearch(market: Market, limits: SearchLimits): Search {
     best: null,
     bestScore: Number.POSITIVE_INFINITY,
     workLeft: limits.work,
+    workKept: 0,
     parted: 0,
     prices: plainPrices(suppliers.length),
     relaxed: emptyLines(market),
@@ -152,7 +155,7 @@ export function offerPlan(search: Search, ways: Int32Array, baskets: Baskets): b
 /** Counts steps; false once there is no work left, and then `bound` is noted as unsearched. */
 export function spend(search: Search, steps: number, bound: number): boolean {
   search.workLeft -= steps;
-  if (search.workLeft > 0) return true;
+  if (search.workLeft > search.workKept) return true;
   search.unsearched = Math.min(search.unsearched, bound);
   return false;
 }

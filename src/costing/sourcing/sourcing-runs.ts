@@ -16,6 +16,8 @@ export interface SourcingRuns {
 
 /** A size that buys at most so much more or less than the last is begun from there; others are begun anew. */
 const ALIKE = 0.08;
+/** Steps after which what the last size led to has not helped, and the size is begun anew. */
+const WARM_WORK = 2000;
 
 /** Suppliers and offers made ready for any run size. */
 export function sourcingRuns(
@@ -26,8 +28,8 @@ export function sourcingRuns(
 }
 
 /**
- * The best plan for the pieces to buy of each part, as `chooseSuppliers` gives it; what the last size led to only makes
- * it quicker.
+ * The best plan for the pieces to buy of each part, as `chooseSuppliers` gives it: what the last size led to only makes it
+ * quicker, and a plan that could not be proven from there is sought anew as it would be by itself.
  *
  * @example for (kits of 1 … 1000) sourceRun(runs, toBuyFor(kits)).best
  */
@@ -36,8 +38,10 @@ export function sourceRun(runs: SourcingRuns, toBuy: ArrayLike<number>, work: nu
   const { market } = runs.sale;
   const limits = { leastParcels: 0, mostParcels: market.suppliers.length, work };
   const pieces = runs.sale.toBuy.reduce((sum, quantity) => sum + quantity, 0);
-  const alike = Math.abs(pieces - runs.pieces) <= ALIKE * runs.pieces;
-  const search = findPlan(market, limits, alike ? runs.last : null);
+  const alike = runs.last !== null && Math.abs(pieces - runs.pieces) <= ALIKE * runs.pieces;
+  const warm = alike ? findPlan(market, { ...limits, work: WARM_WORK }, runs.last) : null;
+  const proven = warm !== null && warm.unsearched === Number.POSITIVE_INFINITY;
+  const search = proven ? warm : findPlan(market, limits, null);
   runs.pieces = pieces;
   runs.last = search.best;
   return search;

@@ -12,7 +12,7 @@ const SET_STEP = 1 / 16;
  * to be decided, and the floors of those taken (and, where they lie below nothing, of those still to be decided).
  *
  * @param taken suppliers that are in every set; `least` is the least count of each part among them
- * @param done a set, as a list of suppliers ascending, that was searched already
+ * @param done sets, as lists of suppliers ascending, that are searched or queued already
  */
 export function searchSets(
   search: Search,
@@ -20,7 +20,7 @@ export function searchSets(
   taken: readonly Column[],
   columns: readonly Column[],
   least: Float64Array,
-  done: string | null,
+  done: ReadonlySet<string>,
 ): void {
   const rest = restMinima(search, columns);
   const rows = columns.map(() => new Float64Array(least.length));
@@ -33,7 +33,7 @@ export function searchSets(
     if (isBeaten(search, bound) || !spend(search, SET_STEP, bound)) return;
     const column = columns[depth];
     if (column === undefined) {
-      if (setKey(chosen) !== done) addNode(queue, nodeOf(chosen, bound));
+      if (!done.has(setKey(chosen))) addNode(queue, nodeOf(chosen, bound));
       return;
     }
     const next = rows[depth] as Float64Array;

@@ -1,6 +1,5 @@
 import type { BasketTerms, FreightBand } from "#src/costing/sourcing/basket-terms.ts";
 import type { SourcingInput, SourcingSupplier } from "#src/costing/sourcing/sourcing-input.ts";
-import { RATES } from "./random-sourcing.ts";
 
 /**
  * The joint choice stated as a mixed-integer linear program, from the method pages alone: what general solvers are
@@ -105,7 +104,7 @@ function basket(
   weight: Term[],
   most: number,
 ): void {
-  const rate = Number(RATES[worth.currency]) * ({ JPY: 100, KWD: 0.1 }[worth.currency] ?? 1);
+  const rate = Number(worth.grains) / 1e22;
   const [used, amount] = [`y_${index}`, `g_${index}`];
   program.binary.push(used);
   program.rows.push({
