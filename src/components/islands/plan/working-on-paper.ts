@@ -8,6 +8,7 @@ import {
 import type { KitAddress } from "#src/components/islands/kit-address.ts";
 import { methodLinks } from "#src/components/method-links.ts";
 import type { Paper, PaperLine, PaperSub } from "#src/components/working-paper.ts";
+import { dayWords } from "#src/costing/day-words.ts";
 import { needWords } from "#src/costing/problem-words.ts";
 import { roundedText } from "#src/costing/rounded-text.ts";
 import type {
@@ -88,32 +89,11 @@ function paperLine(line: WorkingLine, before: WorkingLine | undefined, context: 
   };
 }
 
-const MONTHS = [
-  "January",
-  "February",
-  "March",
-  "April",
-  "May",
-  "June",
-  "July",
-  "August",
-  "September",
-  "October",
-  "November",
-  "December",
-];
-
-/** A day as people say it: "9 March 2026". */
-export function dayInWords(day: string): string {
-  const [year, month, date] = day.split("-").map(Number);
-  return `${date} ${MONTHS[(month ?? 1) - 1]} ${year}`;
-}
-
 /** A working as it is written on squared paper. */
 export function workingOnPaper(tree: WorkingTree, context: PaperContext): Paper {
   const from = [
     tree.revision && `rev ${tree.revision}`,
-    tree.pricedOn && `the prices of ${dayInWords(tree.pricedOn)}`,
+    tree.pricedOn && `the prices of ${dayWords(tree.pricedOn)}`,
   ].filter(Boolean);
   return {
     of: tree.title,
